@@ -1,0 +1,21 @@
+/** Bounds that client and server hold to alike. */
+export const LIMITS = {
+  upload: {
+    bytes: 20 * 1024 * 1024,
+    /** What an XLSX may unpack to; more is taken for a decompression bomb. */
+    unpackedBytes: 200 * 1024 * 1024,
+    sections: 500,
+    pointsPerSection: 2000,
+    sheets: 520,
+    parseSeconds: 30,
+    /** Faults reported of one file; the rest is counted. */
+    faults: 500,
+  },
+  hydrographPoints: 20_000,
+  laterals: 50,
+  stationsPerStudy: 100,
+  textShort: 120,
+  textLong: 4000,
+  password: { min: 12, max: 200 },
+  roles: 5,
+} as const;

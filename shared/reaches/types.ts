@@ -1,0 +1,52 @@
+import type { Section } from '../surveys/types';
+
+/**
+ * The geometry that is routed: the sections of an accepted survey revision with the modeller's bank marks and roughness.
+ * The survey itself never changes. `GET /api/studies/:studyId/reaches`.
+ */
+export interface ReachRow {
+  id: number;
+  name: string;
+  surveyRevisionId: number;
+  revision: number;
+  sectionCount: number;
+  /** m. */
+  firstChainage: number;
+  lastChainage: number;
+  /** Grows with each change; a change that names an older one is a conflict. */
+  version: number;
+  updatedAt: string;
+  updatedBy: string;
+}
+
+/** `GET /api/reaches/:reachId`. */
+export interface Reach extends ReachRow {
+  studyId: number;
+  sections: ReachSection[];
+  advice: Advice[];
+}
+
+export interface ReachSection extends Section {
+  /** Lowest point, m. */
+  thalweg: number;
+  /** Elevation at the bank marks, or at the section's ends, m. */
+  leftBank: number;
+  rightBank: number;
+  /** Below the lower bank (or lower end): m, m², m³/s per unit root slope. */
+  bankfull: { depth: number; topWidth: number; area: number; conveyance: number };
+}
+
+export type AdviceCode =
+  'spacing' | 'adverseSlope' | 'conveyanceJump' | 'noBanks' | 'roughnessRange' | 'lowEnds';
+
+/** Something that a careful modeller would look at, with its reason and its source. */
+export interface Advice {
+  code: AdviceCode;
+  /** Sections it is about: one, or the two of an interval. */
+  sectionIds: string[];
+  /** m, where it is shown on the ribbon. */
+  chainage: number;
+  message: string;
+  reason: string;
+  source: string;
+}

@@ -1,0 +1,158 @@
+import { array, lazy, mixed, number, object, string, type InferType } from 'yup';
+import { LIMITS } from '../limits';
+
+/**
+ * A scenario as it is typed and stored: SI. It may be incomplete (numbers null): it is saved as it is, and
+ * `checkScenario` says what is missing before it can run. The schema holds shapes and bounds only.
+ */
+const real = () => number().min(-1e9).max(1e9).nullable().default(null);
+const series = () =>
+  array()
+    .of(number().min(-1e9).max(1e9).required())
+    .max(LIMITS.hydrographPoints)
+    .default([])
+    .required();
+
+/** Shape functions are in `hydrographs.ts`; all flows include the base flow. Times in s, flows in m³/s. */
+const generated = object({
+  kind: string().oneOf(['generated']).required(),
+  shape: string().oneOf(['triangle', 'gamma', 'nrcs']).required(),
+  baseFlow: real(),
+  peakFlow: real(),
+  timeToPeak: real(),
+  /** Triangle only: recession over rise; 1.67 is the SCS triangle. */
+  recessionRatio: real(),
+  /** Gamma only: exponent m of (t/Tp)^m exp(m (1 - t/Tp)). */
+  gammaExponent: real(),
+}).noUnknown();
+const table = object({
+  kind: string().oneOf(['table']).required(),
+  times: series(),
+  flows: series(),
+}).noUnknown();
+const stageTable = object({
+  kind: string().oneOf(['stage']).required(),
+  times: series(),
+  stages: series(),
+}).noUnknown();
+const wall = object({ kind: string().oneOf(['wall']).required() }).noUnknown();
+
+const byKind = <T extends Record<string, { isType: unknown } | object>>(kinds: T) =>
+  lazy((value: { kind?: string } | undefined) => {
+    const schema = kinds[value?.kind ?? ''];
+    return (schema ??
+      mixed().oneOf([], `Choose one of: ${Object.keys(kinds).join(', ')}.`)) as never;
+  });
+
+const upstreamKinds = { generated, table, stage: stageTable, wall };
+const downstreamKinds = {
+  normalDepth: object({
+    kind: string().oneOf(['normalDepth']).required(),
+    slope: real(),
+  }).noUnknown(),
+  stage: stageTable,
+  rating: object({
+    kind: string().oneOf(['rating']).required(),
+    stages: series(),
+    flows: series(),
+  }).noUnknown(),
+  criticalDepth: object({ kind: string().oneOf(['criticalDepth']).required() }).noUnknown(),
+  open: object({ kind: string().oneOf(['open']).required() }).noUnknown(),
+  wall,
+};
+const initialKinds = {
+  steady: object({ kind: string().oneOf(['steady']).required() }).noUnknown(),
+  still: object({ kind: string().oneOf(['still']).required(), stage: real() }).noUnknown(),
+  profile: object({
+    kind: string().oneOf(['profile']).required(),
+    chainages: series(),
+    stages: series(),
+    flows: series(),
+  }).noUnknown(),
+  dam: object({
+    kind: string().oneOf(['dam']).required(),
+    chainage: real(),
+    stageAbove: real(),
+    /** null: dry below the dam. */
+    stageBelow: real(),
+  }).noUnknown(),
+};
+
+const lateral = object({
+  name: string().trim().max(LIMITS.textShort).default(''),
+  from: real(),
+  to: real(),
+  times: series(),
+  flows: series(),
+}).noUnknown();
+
+const numerics = object({
+  cellSize: real(),
+  duration: real(),
+  outputInterval: real(),
+  order: number().oneOf([1, 2]).default(2).required(),
+  courant: real(),
+  dryDepth: real(),
+}).noUnknown();
+
+export type Upstream =
+  | InferType<typeof generated>
+  | InferType<typeof table>
+  | InferType<typeof stageTable>
+  | InferType<typeof wall>;
+export type Downstream = {
+  [K in keyof typeof downstreamKinds]: InferType<(typeof downstreamKinds)[K]>;
+}[keyof typeof downstreamKinds];
+export type InitialState = {
+  [K in keyof typeof initialKinds]: InferType<(typeof initialKinds)[K]>;
+}[keyof typeof initialKinds];
+export type LateralInflow = InferType<typeof lateral>;
+export type NumericsSettings = InferType<typeof numerics>;
+
+export interface ScenarioBody {
+  name: string;
+  reachId: number;
+  /** Clock time of t = 0, ISO 8601 in UTC; null where the study has none. */
+  startsAt: string | null;
+  note: string;
+  upstream: Upstream;
+  laterals: LateralInflow[];
+  downstream: Downstream;
+  initial: InitialState;
+  numerics: NumericsSettings;
+}
+
+export const scenarioSchema = object({
+  name: string().trim().max(LIMITS.textShort).required('Name the scenario.'),
+  reachId: number().integer().positive().required('Choose the reach.'),
+  startsAt: string()
+    .nullable()
+    .default(null)
+    .test(
+      'iso',
+      'Write a date and time.',
+      (value) => value == null || !Number.isNaN(Date.parse(value)),
+    ),
+  note: string().trim().max(LIMITS.textLong).default(''),
+  upstream: byKind(upstreamKinds),
+  laterals: array().of(lateral.required()).max(LIMITS.laterals).default([]).required(),
+  downstream: byKind(downstreamKinds),
+  initial: byKind(initialKinds),
+  numerics: numerics.required(),
+}).noUnknown();
+
+/** `POST /api/studies/:studyId/scenarios`: only a name and a reach; the rest are proposals for the reach. */
+export const newScenarioSchema = object({
+  name: string().trim().max(LIMITS.textShort).required('Name the scenario.'),
+  reachId: number().integer().positive().required('Choose the reach.'),
+}).noUnknown();
+
+/** `PUT /api/scenarios/:scenarioId`. */
+export const scenarioChangeSchema = object({
+  version: number().integer().min(1).required(),
+  body: scenarioSchema.required(),
+}).noUnknown();
+
+export const duplicateScenarioSchema = object({
+  name: string().trim().max(LIMITS.textShort).required('Name the copy.'),
+}).noUnknown();

@@ -1,0 +1,29 @@
+import { number, object, string, type InferType } from 'yup';
+import { LIMITS } from '../limits';
+import { UNIT_SYSTEMS } from '../units/units';
+
+export const studySchema = object({
+  title: string().trim().max(LIMITS.textShort).required('Give the study a title.'),
+  clientName: string().trim().max(LIMITS.textShort).default(''),
+  place: string().trim().max(LIMITS.textShort).default(''),
+  verticalDatum: string()
+    .trim()
+    .max(LIMITS.textShort)
+    .required('Name the datum that the elevations refer to.'),
+  unitSystem: string().oneOf(UNIT_SYSTEMS).default('metric').required(),
+  purpose: string().trim().max(LIMITS.textLong).default(''),
+}).noUnknown();
+
+export const memberSchema = object({
+  userId: number().integer().positive().required(),
+  as: string().oneOf(['surveyor', 'client']).required(),
+}).noUnknown();
+
+export const stationSchema = object({
+  name: string().trim().max(LIMITS.textShort).required('Name the place.'),
+  chainage: number().min(-1e7).max(1e7).required('Give its chainage.'),
+}).noUnknown();
+
+export type StudyBody = InferType<typeof studySchema>;
+export type MemberBody = InferType<typeof memberSchema>;
+export type StationBody = InferType<typeof stationSchema>;

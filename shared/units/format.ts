@@ -1,0 +1,43 @@
+import { fromSi, UNITS, type Quantity, type UnitSystem } from './units';
+
+/** Digits in groups of three by a comma, a point before the decimals, a true minus sign. */
+export function formatNumber(value: number, decimals: number): string {
+  if (!Number.isFinite(value)) return '–';
+  const text = Math.abs(value).toLocaleString('en-GB', {
+    minimumFractionDigits: decimals,
+    maximumFractionDigits: decimals,
+  });
+  return value < 0 && /[1-9]/.test(text) ? `−${text}` : text;
+}
+
+/** An SI value in the study's units, without the symbol. Flows from 100 up carry no decimals. */
+export function formatQuantity(si: number, quantity: Quantity, system: UnitSystem): string {
+  const value = fromSi(si, quantity, system);
+  const { decimals } = UNITS[system][quantity];
+  const deserved = quantity === 'flow' && Math.abs(value) >= 100 ? 0 : decimals;
+  return formatNumber(value, deserved);
+}
+
+/** The same with its symbol, e.g. `44.66 m`. */
+export const formatWithUnit = (si: number, quantity: Quantity, system: UnitSystem): string =>
+  `${formatQuantity(si, quantity, system)} ${UNITS[system][quantity].symbol}`;
+
+/** Seconds from start as `6 h 07`; days are not split off: a flood is told in hours. */
+export function formatDuration(seconds: number): string {
+  const minutes = Math.round(seconds / 60);
+  const sign = minutes < 0 ? '−' : '';
+  const whole = Math.abs(minutes);
+  return `${sign}${Math.floor(whole / 60)} h ${String(whole % 60).padStart(2, '0')}`;
+}
+
+/** Clock time of a moment of a run whose study has a start, e.g. `14 Nov 18:12`, in UTC as it was typed. */
+export function formatClock(startIso: string, seconds: number): string {
+  const at = new Date(Date.parse(startIso) + seconds * 1000);
+  return at.toLocaleString('en-GB', {
+    day: 'numeric',
+    month: 'short',
+    hour: '2-digit',
+    minute: '2-digit',
+    timeZone: 'UTC',
+  });
+}
