@@ -37,12 +37,10 @@ export function bumpFlow(regime: BumpRegime, gravity: number): BumpFlow {
   const headBelow = outletStage === null ? 0 : outletStage + velocityHead(outletStage);
   const headAbove = regime === 'subcritical' ? headBelow : 1.5 * critical + bumpBed(CREST);
 
+  const branch = (energy: number, low: number, high: number) =>
+    energy <= 1.5 * critical ? critical : findRoot((h) => h + velocityHead(h) - energy, low, high);
   const slow = (energy: number) => branch(energy, critical, energy);
   const fast = (energy: number) => branch(energy, 1e-3 * critical, critical);
-  const branch = (energy: number, low: number, high: number) =>
-    energy <= 1.5 * critical
-      ? critical
-      : findRoot((h) => h + velocityHead(h) - energy, low, high);
 
   const depthBefore = (x: number) =>
     regime === 'subcritical' || x <= CREST

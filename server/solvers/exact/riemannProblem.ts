@@ -84,8 +84,7 @@ function starState(
   let high = Math.max(left.depth, right.depth);
   while (mismatch(high) < 0) high *= 2;
   const depth = findRoot(mismatch, 0, high);
-  const velocity =
-    (left.velocity + right.velocity + fromRight(depth) - fromLeft(depth)) / 2;
+  const velocity = (left.velocity + right.velocity + fromRight(depth) - fromLeft(depth)) / 2;
   return { depth, velocity };
 }
 
@@ -118,8 +117,7 @@ function waveFrom(
   if (star && star.depth > side.depth) {
     const areaSide = section.area(side.depth);
     const areaStar = section.area(star.depth);
-    const speed =
-      (areaStar * star.velocity - areaSide * side.velocity) / (areaStar - areaSide);
+    const speed = (areaStar * star.velocity - areaSide * side.velocity) / (areaStar - areaSide);
     return { edges: [speed, speed], at: () => side };
   }
   const omega = (depth: number) => riemannVariable(section, gravity, depth);

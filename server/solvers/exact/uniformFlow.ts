@@ -24,8 +24,7 @@ export function normalDepth(
 
 /** Depth at which the Froude number √(Q² B/(g A³)) is one, m. flow > 0. */
 export function criticalDepth(section: PrismaticSection, gravity: number, flow: number): number {
-  const excess = (h: number) =>
-    section.area(h) ** 3 * gravity - flow * flow * section.topWidth(h);
+  const excess = (h: number) => section.area(h) ** 3 * gravity - flow * flow * section.topWidth(h);
   return findRoot(excess, 1e-12, upperDepth(excess));
 }
 

@@ -11,11 +11,7 @@ export function waveSpeed(section: PrismaticSection, gravity: number, depth: num
  *
  *  The substitution h = s² removes the singularity at the bed, where A/B is proportional to h.
  *  Source: J. J. Stoker (1957), Water Waves, sec. 10.2, in the form for a general section. */
-export function riemannVariable(
-  section: PrismaticSection,
-  gravity: number,
-  depth: number,
-): number {
+export function riemannVariable(section: PrismaticSection, gravity: number, depth: number): number {
   const integrand = (s: number) => {
     const h = s * s;
     return 2 * s * Math.sqrt((gravity * section.topWidth(h)) / section.area(h));

@@ -47,18 +47,11 @@ export function findRoot(f: (x: number) => number, low: number, high: number): n
 }
 
 /** The step from b that a secant (two points) or an inverse parabola (three points) suggests. */
-function interpolate(
-  a: number,
-  b: number,
-  c: number,
-  fa: number,
-  fb: number,
-  fc: number,
-): number {
+function interpolate(a: number, b: number, c: number, fa: number, fb: number, fc: number): number {
   const s = fb / fa;
-  if (a === c) return (-s * (b - a)) / (1 - s) || 0;
+  if (a === c) return (s * (b - a)) / (1 - s);
   const q = fa / fc;
   const r = fb / fc;
   const p = s * ((c - b) * q * (q - r) - (b - a) * (r - 1));
-  return p / -((q - 1) * (r - 1) * (s - 1)) || 0;
+  return -p / ((q - 1) * (r - 1) * (s - 1));
 }

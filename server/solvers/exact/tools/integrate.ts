@@ -1,11 +1,6 @@
 /** Integral of a smooth function over an interval by composite Gauss-Legendre quadrature:
  *  `panels` equal parts, sixteen points in each, exact for polynomials of degree 31 on a part. */
-export function integrate(
-  f: (x: number) => number,
-  from: number,
-  to: number,
-  panels = 8,
-): number {
+export function integrate(f: (x: number) => number, from: number, to: number, panels = 8): number {
   const half = (to - from) / panels / 2;
   let sum = 0;
   for (let panel = 0; panel < panels; panel++) {
