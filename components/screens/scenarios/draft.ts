@@ -1,0 +1,102 @@
+import type {
+  Downstream,
+  InitialState,
+  LateralInflow,
+  NumericsSettings,
+  ScenarioBody,
+  Upstream,
+} from '@/shared/scenarios/schemas';
+import { clockFromText, clockToText } from './startClock';
+
+type ByKind<T extends { kind: string }> = { [K in T['kind']]: Extract<T, { kind: K }> };
+
+/**
+ * A scenario while it is edited. It holds an entry for every kind of boundary and initial state, not only for the one
+ * chosen, so that looking at another kind loses nothing that was typed. Numbers are SI; the clock stays as typed.
+ */
+export interface Draft {
+  name: string;
+  reachId: number;
+  startsAt: string;
+  note: string;
+  upstream: { kind: Upstream['kind']; byKind: ByKind<Upstream> };
+  laterals: LateralInflow[];
+  downstream: { kind: Downstream['kind']; byKind: ByKind<Downstream> };
+  initial: { kind: InitialState['kind']; byKind: ByKind<InitialState> };
+  numerics: NumericsSettings;
+}
+
+export const emptyLateral = (): LateralInflow => ({
+  name: '',
+  from: null,
+  to: null,
+  times: [],
+  flows: [],
+});
+
+export function toDraft(body: ScenarioBody): Draft {
+  const { upstream, downstream, initial } = body;
+  return {
+    name: body.name,
+    reachId: body.reachId,
+    startsAt: clockToText(body.startsAt),
+    note: body.note,
+    upstream: {
+      kind: upstream.kind,
+      byKind: {
+        generated: {
+          kind: 'generated',
+          shape: 'nrcs',
+          baseFlow: null,
+          peakFlow: null,
+          timeToPeak: null,
+          recessionRatio: null,
+          gammaExponent: null,
+        },
+        table: { kind: 'table', times: [], flows: [] },
+        stage: { kind: 'stage', times: [], stages: [] },
+        wall: { kind: 'wall' },
+        [upstream.kind]: upstream,
+      },
+    },
+    laterals: body.laterals,
+    downstream: {
+      kind: downstream.kind,
+      byKind: {
+        normalDepth: { kind: 'normalDepth', slope: null },
+        stage: { kind: 'stage', times: [], stages: [] },
+        rating: { kind: 'rating', stages: [], flows: [] },
+        criticalDepth: { kind: 'criticalDepth' },
+        open: { kind: 'open' },
+        wall: { kind: 'wall' },
+        [downstream.kind]: downstream,
+      },
+    },
+    initial: {
+      kind: initial.kind,
+      byKind: {
+        steady: { kind: 'steady' },
+        still: { kind: 'still', stage: null },
+        profile: { kind: 'profile', chainages: [], stages: [], flows: [] },
+        dam: { kind: 'dam', chainage: null, stageAbove: null, stageBelow: null },
+        [initial.kind]: initial,
+      },
+    },
+    numerics: body.numerics,
+  };
+}
+
+/** What is stored and routed: of each choice only the kind that stands. */
+export function toBody(draft: Draft): ScenarioBody {
+  return {
+    name: draft.name.trim(),
+    reachId: draft.reachId,
+    startsAt: clockFromText(draft.startsAt).iso,
+    note: draft.note.trim(),
+    upstream: draft.upstream.byKind[draft.upstream.kind],
+    laterals: draft.laterals,
+    downstream: draft.downstream.byKind[draft.downstream.kind],
+    initial: draft.initial.byKind[draft.initial.kind],
+    numerics: draft.numerics,
+  };
+}

@@ -1,0 +1,72 @@
+import type {
+  Downstream,
+  InitialState,
+  LateralInflow,
+  NumericsSettings,
+  Upstream,
+} from '@/shared/scenarios/schemas';
+import { emptyLateral, type Draft } from './draft';
+
+/** A change to the entry of the kind that stands. */
+export type Change<T extends { kind: string }> = T extends unknown
+  ? Partial<Omit<T, 'kind'>>
+  : never;
+
+export type DraftAction =
+  | {
+      type: 'detailsChanged';
+      change: Partial<Pick<Draft, 'name' | 'note' | 'startsAt' | 'reachId'>>;
+    }
+  | { type: 'upstreamChosen'; kind: Upstream['kind'] }
+  | { type: 'upstreamChanged'; change: Change<Upstream> }
+  | { type: 'lateralAdded' }
+  | { type: 'lateralChanged'; index: number; change: Partial<LateralInflow> }
+  | { type: 'lateralRemoved'; index: number }
+  | { type: 'downstreamChosen'; kind: Downstream['kind'] }
+  | { type: 'downstreamChanged'; change: Change<Downstream> }
+  | { type: 'initialChosen'; kind: InitialState['kind'] }
+  | { type: 'initialChanged'; change: Change<InitialState> }
+  | { type: 'numericsChanged'; change: Partial<NumericsSettings> }
+  | { type: 'restored'; draft: Draft };
+
+export function draftReducer(draft: Draft, action: DraftAction): Draft {
+  switch (action.type) {
+    case 'detailsChanged':
+      return { ...draft, ...action.change };
+    case 'upstreamChosen':
+      return { ...draft, upstream: { ...draft.upstream, kind: action.kind } };
+    case 'upstreamChanged':
+      return { ...draft, upstream: changed(draft.upstream, action.change) };
+    case 'lateralAdded':
+      return { ...draft, laterals: [...draft.laterals, emptyLateral()] };
+    case 'lateralChanged':
+      return {
+        ...draft,
+        laterals: draft.laterals.map((lateral, index) =>
+          index === action.index ? { ...lateral, ...action.change } : lateral,
+        ),
+      };
+    case 'lateralRemoved':
+      return { ...draft, laterals: draft.laterals.filter((_, index) => index !== action.index) };
+    case 'downstreamChosen':
+      return { ...draft, downstream: { ...draft.downstream, kind: action.kind } };
+    case 'downstreamChanged':
+      return { ...draft, downstream: changed(draft.downstream, action.change) };
+    case 'initialChosen':
+      return { ...draft, initial: { ...draft.initial, kind: action.kind } };
+    case 'initialChanged':
+      return { ...draft, initial: changed(draft.initial, action.change) };
+    case 'numericsChanged':
+      return { ...draft, numerics: { ...draft.numerics, ...action.change } };
+    case 'restored':
+      return action.draft;
+  }
+}
+
+const changed = <P extends { kind: string; byKind: Record<string, object> }>(
+  part: P,
+  change: object,
+): P => ({
+  ...part,
+  byKind: { ...part.byKind, [part.kind]: { ...part.byKind[part.kind], ...change } },
+});
