@@ -1,3 +1,5 @@
+const webPreset = require('jest-expo/web/jest-preset');
+
 /** Four projects: the pure code and the solver, the server on a real database, the client in jsdom,
  *  and the whole product in a real browser. */
 const swc = {
@@ -34,6 +36,10 @@ module.exports = {
     {
       displayName: 'components',
       preset: 'jest-expo/web',
+      // d3 ships modules only.
+      transformIgnorePatterns: webPreset.transformIgnorePatterns.map((pattern) =>
+        pattern.replace('(.pnpm|', '(.pnpm|d3-|internmap|'),
+      ),
       testMatch: ['<rootDir>/tests/components/**/*.test.{ts,tsx}'],
       moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
     },

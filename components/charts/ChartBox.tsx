@@ -1,0 +1,42 @@
+import { useState, type ReactNode } from 'react';
+import { StyleSheet, View, type LayoutChangeEvent } from 'react-native';
+import Svg from 'react-native-svg';
+
+interface Props {
+  /** What the drawing shows, in a sentence: all that a screen reader is told of it. */
+  label: string;
+  height: number;
+  /** Width until the layout is known, px. */
+  initialWidth?: number;
+  /** Drawn as SVG. */
+  children: (size: ChartSize) => ReactNode;
+  /** Laid over the drawing, e.g. what catches the hand. */
+  over?: (size: ChartSize) => ReactNode;
+}
+
+export interface ChartSize {
+  width: number;
+  height: number;
+}
+
+/** A drawing as wide as the place it is given. */
+export function ChartBox({ label, height, initialWidth = 0, children, over }: Props) {
+  const [width, setWidth] = useState(initialWidth);
+  const measure = (event: LayoutChangeEvent) => setWidth(event.nativeEvent.layout.width);
+  return (
+    <View style={[styles.box, { height }]} onLayout={measure} role="img" aria-label={label}>
+      {width > 0 ? (
+        <Svg width={width} height={height} style={styles.drawing}>
+          {children({ width, height })}
+        </Svg>
+      ) : null}
+      {width > 0 ? over?.({ width, height }) : null}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  box: { alignSelf: 'stretch' },
+  // Out of the flow, so that the drawing never holds its box open when the window narrows.
+  drawing: { position: 'absolute', left: 0, top: 0 },
+});

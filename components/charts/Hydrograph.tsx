@@ -1,0 +1,195 @@
+import { memo, useMemo } from 'react';
+import { Circle, Line, Path } from 'react-native-svg';
+import { useTheme } from '@/components/theme/useTheme';
+import { formatWithUnit } from '@/shared/units/format';
+import type { Quantity, UnitSystem } from '@/shared/units/units';
+import { ChartBox, type ChartSize } from './ChartBox';
+import { DragSurface } from './DragSurface';
+import {
+  hydrographModel,
+  peakOf,
+  type HydrographModel,
+  type Series,
+} from './geometry/hydrographModel';
+import { valueAt } from './geometry/interpolate';
+import { shortTime } from './geometry/timeWords';
+import { Reading, readingBox } from './Reading';
+import { TimeAxis } from './TimeAxis';
+import { ValueAxis } from './ValueAxis';
+
+export interface HydrographProps {
+  /** What is drawn, e.g. `Stage at Tornick bridge`. */
+  label: string;
+  quantity: Extract<Quantity, 'elevation' | 'depth' | 'flow' | 'velocity'>;
+  /** SI. Keep the same object while only the cursor moves. */
+  series: Series;
+  /** A second curve to compare with, dashed; its name goes into the heading. */
+  compare?: Series | null;
+  /** Highest value with its time where it is known better than from the series. */
+  peak?: { value: number; time: number } | null;
+  /** Time of the cursor, s; null for none. */
+  t: number | null;
+  /** Left out: the drawing only shows. */
+  onChange?: (t: number) => void;
+  unitSystem: UnitSystem;
+  height?: number;
+  initialWidth?: number;
+}
+
+/** A value against time, its peak named, its value at the cursor read out beside the curve and never over it. */
+export function Hydrograph(props: HydrographProps) {
+  const { onChange, height = 168, series } = props;
+  const peak = props.peak === undefined ? peakOf(series) : props.peak;
+  return (
+    <ChartBox
+      label={sentence(props, peak)}
+      height={height}
+      initialWidth={props.initialWidth}
+      over={(size) =>
+        onChange && series.times.length ? (
+          <TimeDrag {...props} onChange={onChange} size={size} />
+        ) : null
+      }
+    >
+      {(size) => <Drawing {...props} peak={peak} size={size} />}
+    </ChartBox>
+  );
+}
+
+type Sized = HydrographProps & { size: ChartSize };
+
+function useModel({ size, series, compare = null, quantity, unitSystem }: Sized) {
+  const { width, height } = size;
+  return useMemo(
+    () => hydrographModel({ width, height }, series, compare, quantity, unitSystem),
+    [width, height, series, compare, quantity, unitSystem],
+  );
+}
+
+function TimeDrag(props: Sized & { onChange: (t: number) => void }) {
+  const x = useModel(props).frame.x.copy().clamp(true);
+  return (
+    <DragSurface onDrag={(px) => props.onChange(Math.round(x.invert(px)))} style={props.size} />
+  );
+}
+
+function Drawing(props: Sized) {
+  const model = useModel(props);
+  return (
+    <>
+      <ValueAxis frame={model.frame} ticks={model.valueTicks} />
+      <TimeAxis frame={model.frame} ticks={model.timeTicks} />
+      <Curves model={model} />
+      <Marks {...props} model={model} />
+    </>
+  );
+}
+
+const Curves = memo(function Curves({ model }: { model: HydrographModel }) {
+  const { colours } = useTheme();
+  return (
+    <>
+      {model.compare ? (
+        <Path
+          d={model.compare.path}
+          fill="none"
+          stroke={colours.soft}
+          strokeWidth={1.25}
+          strokeDasharray="5 4"
+        />
+      ) : null}
+      <Path
+        d={model.main.path}
+        fill="none"
+        stroke={colours.water}
+        strokeWidth={2}
+        strokeLinejoin="round"
+      />
+    </>
+  );
+});
+
+/** The peak and the cursor with their readings. */
+function Marks({
+  series,
+  peak,
+  t,
+  quantity,
+  unitSystem,
+  model,
+}: Sized & { model: HydrographModel }) {
+  const { colours } = useTheme();
+  const { frame, yOf } = model;
+  const bounds = {
+    x: frame.left,
+    y: 0,
+    width: frame.right - frame.left,
+    height: frame.bottom,
+  };
+  const span = frame.x.domain()[1] - frame.x.domain()[0];
+  const value = (si: number) => formatWithUnit(si, quantity, unitSystem);
+  const cursor =
+    t === null || !series.times.length
+      ? null
+      : { x: frame.x(t), y: yOf(valueAt(series.times, series.values, t)) };
+  const upright = cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : [];
+  const curves = [model.main, ...(model.compare ? [model.compare] : []), ...upright];
+
+  const top = peak ? { x: frame.x(peak.time), y: yOf(peak.value) } : null;
+  const peakText = peak
+    ? [{ text: `${value(peak.value)} at ${shortTime(peak.time, span)}`, strong: true }]
+    : [];
+  const peakBox = top ? readingBox(peakText, top, bounds, curves) : null;
+  // At the peak itself its own label says all.
+  const apart = cursor && !(top && Math.hypot(top.x - cursor.x, top.y - cursor.y) < 6);
+  const cursorText =
+    t === null ? [] : [{ text: value(valueAt(series.times, series.values, t)), strong: false }];
+  const cursorBox =
+    cursor && apart
+      ? readingBox(cursorText, cursor, bounds, curves, peakBox ? [peakBox] : [])
+      : null;
+  return (
+    <>
+      {cursor ? (
+        <Line
+          x1={cursor.x}
+          x2={cursor.x}
+          y1={frame.top - 6}
+          y2={frame.bottom}
+          stroke={colours.ink}
+          strokeWidth={1.25}
+        />
+      ) : null}
+      {top && peakBox ? (
+        <>
+          <Circle cx={top.x} cy={top.y} r={4} fill={colours.water} />
+          <Reading texts={peakText} box={peakBox} from={top.x} />
+        </>
+      ) : null}
+      {cursor ? (
+        <Circle
+          cx={cursor.x}
+          cy={cursor.y}
+          r={3.5}
+          fill={colours.card}
+          stroke={colours.ink}
+          strokeWidth={1.5}
+        />
+      ) : null}
+      {cursor && cursorBox ? <Reading texts={cursorText} box={cursorBox} from={cursor.x} /> : null}
+    </>
+  );
+}
+
+function sentence(props: HydrographProps, peak: HydrographProps['peak']): string {
+  const { label, series, quantity, unitSystem, t } = props;
+  const n = series.times.length;
+  if (!n) return `${label}: no values`;
+  const span = series.times[n - 1] - series.times[0];
+  const value = (si: number) => formatWithUnit(si, quantity, unitSystem);
+  const parts = [label];
+  if (peak) parts.push(`highest ${value(peak.value)} at ${shortTime(peak.time, span)}`);
+  if (t !== null)
+    parts.push(`${value(valueAt(series.times, series.values, t))} at ${shortTime(t, span)}`);
+  return parts.join('; ');
+}

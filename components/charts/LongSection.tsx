@@ -1,0 +1,218 @@
+import { memo, useMemo } from 'react';
+import { Circle, Line, Path } from 'react-native-svg';
+import { useTheme } from '@/components/theme/useTheme';
+import { formatWithUnit } from '@/shared/units/format';
+import { fromSi, UNITS, type UnitSystem } from '@/shared/units/units';
+import { ChartBox } from './ChartBox';
+import { ChartText } from './ChartText';
+import { DragSurface } from './DragSurface';
+import { nearestIndex, valueAt } from './geometry/interpolate';
+import { longSectionFrame, wetSurface, type LongProfile } from './geometry/longProfile';
+import { bandPath, linePath, project } from './geometry/paths';
+import { placesAlong } from './geometry/placesAlong';
+import { PlaceAxis } from './PlaceAxis';
+import { Reading, readingBox, type ReadingText } from './Reading';
+import { StationMarks } from './StationMarks';
+import { ValueAxis } from './ValueAxis';
+
+export interface LongSectionProps {
+  /** Bed, banks and highest water by chainage, m. Keep it the same object while only the water moves. */
+  profile: LongProfile;
+  /** Water surface of the moment at the same places, m; null for the bare reach. */
+  stage?: ArrayLike<number> | null;
+  sections: readonly { id: string; chainage: number }[];
+  stations?: readonly { name: string; chainage: number }[];
+  /** Chosen place, m. */
+  at: number | null;
+  /** Left out: the drawing only shows. */
+  onChange?: (chainage: number) => void;
+  unitSystem: UnitSystem;
+  /** What the drawing shows beyond its name, e.g. the time of the water. */
+  label?: string;
+  height?: number;
+  initialWidth?: number;
+}
+
+/** The reach from the side: ground as ground, water as water, the highest water dotted, the chosen place read out. */
+export function LongSection(props: LongSectionProps) {
+  const { profile, sections, stations = NONE, onChange, at, height = 320 } = props;
+  const stops = useMemo(
+    () => placesAlong(sections, stations).map((place) => place.chainage),
+    [sections, stations],
+  );
+  const label = ['Long section', props.label, at === null ? '' : sentenceAt(props, at)];
+  return (
+    <ChartBox
+      label={label.filter(Boolean).join('. ')}
+      height={height}
+      initialWidth={props.initialWidth}
+      over={(size) => {
+        const drag = (px: number) => {
+          const frame = longSectionFrame(size, profile, props.unitSystem);
+          const wanted = frame.x.invert(px) * UNITS[props.unitSystem].chainage.si;
+          onChange?.(stops[nearestIndex(stops, wanted)]);
+        };
+        return onChange ? <DragSurface onDrag={drag} style={size} /> : null;
+      }}
+    >
+      {(size) => <Drawing {...props} size={size} />}
+    </ChartBox>
+  );
+}
+
+type Sized = LongSectionProps & { size: { width: number; height: number } };
+
+function Drawing({ profile, stage, at, unitSystem, sections, stations = NONE, size }: Sized) {
+  const { colours } = useTheme();
+  const { width, height } = size;
+  const frame = useMemo(
+    () => longSectionFrame({ width, height }, profile, unitSystem),
+    [width, height, profile, unitSystem],
+  );
+  const lines = useMemo(() => {
+    const x = project(profile.chainages, (m) => frame.x(fromSi(m, 'chainage', unitSystem)));
+    const y = (row: ArrayLike<number>) =>
+      project(row, (m) => frame.y(fromSi(m, 'elevation', unitSystem)));
+    return {
+      x,
+      bed: y(profile.bed),
+      peak: profile.peakStage ? y(profile.peakStage) : null,
+      left: profile.leftBank ? y(profile.leftBank) : null,
+      right: profile.rightBank ? y(profile.rightBank) : null,
+    };
+  }, [profile, frame, unitSystem]);
+  const surface = stage
+    ? project(wetSurface(profile.bed, stage), (m) => frame.y(fromSi(m, 'elevation', unitSystem)))
+    : null;
+
+  return (
+    <>
+      <ValueAxis frame={frame} ticks={frame.yTicks} />
+      {surface ? <Path d={bandPath(lines.x, surface, lines.bed)} fill={colours.waterTint} /> : null}
+      <Ground lines={lines} foot={frame.bottom} />
+      {surface ? (
+        <Path
+          d={linePath(lines.x, surface)}
+          fill="none"
+          stroke={colours.water}
+          strokeWidth={2}
+          strokeLinejoin="round"
+        />
+      ) : null}
+      <StationMarks
+        sections={sections}
+        stations={stations}
+        profile={profile}
+        frame={frame}
+        unitSystem={unitSystem}
+      />
+      <PlaceAxis frame={frame} ticks={frame.xTicks} />
+      <ChartText x={frame.left} y={14}>
+        {`${stage || profile.peakStage ? 'stage' : 'elevation'}, ${UNITS[unitSystem].elevation.symbol} above datum`}
+      </ChartText>
+      <ChartText x={frame.right} y={frame.bottom - 6} anchor="end" tone="earth">
+        {`chainage, ${UNITS[unitSystem].chainage.symbol}`}
+      </ChartText>
+      {at === null ? null : (
+        <Cursor {...{ frame, profile, stage, at, unitSystem }} lines={lines} surface={surface} />
+      )}
+    </>
+  );
+}
+
+interface Lines {
+  x: Float64Array;
+  bed: Float64Array;
+  peak: Float64Array | null;
+  left: Float64Array | null;
+  right: Float64Array | null;
+}
+
+/** What does not move while the flood plays. */
+const Ground = memo(function Ground({ lines, foot }: { lines: Lines; foot: number }) {
+  const { colours } = useTheme();
+  return (
+    <>
+      <Path d={bandPath(lines.x, lines.bed, foot)} fill={colours.earthTint} />
+      {[lines.left, lines.right].map((bank, i) =>
+        bank ? (
+          <Path
+            key={i}
+            d={linePath(lines.x, bank)}
+            fill="none"
+            stroke={colours.earth}
+            strokeWidth={1}
+            strokeDasharray={i ? '1.5 4' : '8 4'}
+          />
+        ) : null,
+      )}
+      {lines.peak ? (
+        <Path
+          d={linePath(lines.x, lines.peak)}
+          fill="none"
+          stroke={colours.water}
+          strokeWidth={1.25}
+          strokeDasharray="3 3"
+        />
+      ) : null}
+      <Path
+        d={linePath(lines.x, lines.bed)}
+        fill="none"
+        stroke={colours.earth}
+        strokeWidth={1.5}
+        strokeLinejoin="round"
+      />
+    </>
+  );
+});
+
+interface CursorProps extends Pick<LongSectionProps, 'profile' | 'stage' | 'unitSystem'> {
+  at: number;
+  frame: ReturnType<typeof longSectionFrame>;
+  lines: Lines;
+  surface: Float64Array | null;
+}
+
+function Cursor({ at, frame, profile, stage, unitSystem, lines, surface }: CursorProps) {
+  const { colours } = useTheme();
+  const x = frame.x(fromSi(at, 'chainage', unitSystem));
+  const level = valueAt(profile.chainages, stage ?? profile.bed, at);
+  const y = frame.y(fromSi(level, 'elevation', unitSystem));
+  const texts = readings({ profile, stage, unitSystem }, at);
+  const bounds = {
+    x: frame.left,
+    y: 4,
+    width: frame.right - frame.left,
+    height: frame.bottom - 26,
+  };
+  const drawn = [surface, lines.bed, lines.peak].flatMap((row) =>
+    row ? [{ x: lines.x, y: row }] : [],
+  );
+  const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };
+  const box = readingBox(texts, { x, y }, bounds, drawn, [axisTitle]);
+  return (
+    <>
+      <Line x1={x} x2={x} y1={10} y2={frame.bottom} stroke={colours.ink} strokeWidth={1.25} />
+      <Circle cx={x} cy={y} r={5} fill={colours.card} stroke={colours.ink} strokeWidth={2} />
+      <Reading texts={texts} box={box} from={x} />
+    </>
+  );
+}
+
+type ReadingOf = Pick<LongSectionProps, 'profile' | 'stage' | 'unitSystem'>;
+
+function readings({ profile, stage, unitSystem }: ReadingOf, at: number): ReadingText[] {
+  const value = (row: ArrayLike<number>) =>
+    formatWithUnit(valueAt(profile.chainages, row, at), 'elevation', unitSystem);
+  if (!stage) return [{ text: `bed ${value(profile.bed)}`, strong: true }];
+  const texts: ReadingText[] = [{ text: value(stage), strong: true }];
+  if (profile.peakStage) texts.push({ text: `peak ${value(profile.peakStage)}` });
+  return texts;
+}
+
+function sentenceAt(of: ReadingOf, at: number): string {
+  const values = readings(of, at).map(({ text }) => text);
+  return `At ${formatWithUnit(at, 'chainage', of.unitSystem)}: ${values.join(', ')}`;
+}
+
+const NONE: never[] = [];

@@ -1,0 +1,133 @@
+import { memo, useMemo, useState } from 'react';
+import { StyleSheet, View, type LayoutChangeEvent } from 'react-native';
+import Svg, { Circle, Line, Path } from 'react-native-svg';
+import { scaleLinear } from 'd3-scale';
+import { touch } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/useTheme';
+import { formatWithUnit } from '@/shared/units/format';
+import type { UnitSystem } from '@/shared/units/units';
+import { nearestIndex } from './geometry/interpolate';
+import { reachCurve } from './geometry/reachCurve';
+import { placesAlong, placeName, type ReachPlace } from './geometry/placesAlong';
+import { SliderSurface } from './SliderSurface';
+
+export interface ReachRibbonProps {
+  sections: readonly { id: string; chainage: number }[];
+  stations?: readonly { name: string; chainage: number }[];
+  /** What asks for attention by place, e.g. survey advice. */
+  advice?: readonly { chainage: number }[];
+  /** Chosen place, m; null before one is chosen. */
+  at: number | null;
+  onChange: (chainage: number) => void;
+  unitSystem: UnitSystem;
+  /** Width until the layout is known, px. */
+  initialWidth?: number;
+}
+
+const INSET = 12;
+const SWAY = 7;
+
+/** The river as one line, a tick a section: choose the place by touch, drag or arrow keys. */
+export function ReachRibbon(props: ReachRibbonProps) {
+  const { sections, stations = NONE, advice = NONE, at, onChange, unitSystem } = props;
+  const { colours } = useTheme();
+  const [width, setWidth] = useState(props.initialWidth ?? 0);
+  const places = useMemo(() => placesAlong(sections, stations), [sections, stations]);
+  const stops = useMemo(() => places.map((place) => place.chainage), [places]);
+  if (!places.length) return null;
+
+  const x = scaleLinear(
+    [stops[0], stops[stops.length - 1]],
+    [INSET, Math.max(INSET, width - INSET)],
+  );
+  const curve = reachCurve(INSET, width - INSET, touch / 2, SWAY);
+  const value = at ?? stops[0];
+  const chosen = x(value);
+  const measure = (event: LayoutChangeEvent) => setWidth(event.nativeEvent.layout.width);
+  return (
+    <View onLayout={measure} style={styles.box}>
+      <SliderSurface
+        label="Place on the reach"
+        stops={stops}
+        value={value}
+        valueText={describe(places, value, unitSystem)}
+        onChange={onChange}
+        onDrag={(px) => onChange(stops[nearestIndex(stops, x.invert(px))])}
+        style={styles.slider}
+      >
+        <Svg width={width} height={touch}>
+          <River path={curve.path} />
+          {places.map(({ chainage, kind }) => {
+            const px = x(chainage);
+            const y = curve.yAt(px);
+            return kind === 'station' ? (
+              <Circle
+                key={`s${chainage}`}
+                cx={px}
+                cy={y}
+                r={4}
+                fill={colours.card}
+                stroke={colours.ink}
+                strokeWidth={1.5}
+              />
+            ) : (
+              <Line
+                key={chainage}
+                x1={px}
+                x2={px}
+                y1={y - 6}
+                y2={y + 6}
+                stroke={colours.soft}
+                strokeWidth={1}
+              />
+            );
+          })}
+          {advice.map(({ chainage }, i) => {
+            const px = x(chainage);
+            const y = curve.yAt(px) - 9;
+            return <Path key={i} d={`M${px},${y}l-4,-7h8z`} fill={colours.ochre} />;
+          })}
+          {at === null ? null : (
+            <Circle
+              cx={chosen}
+              cy={curve.yAt(chosen)}
+              r={5}
+              fill={colours.card}
+              stroke={colours.ink}
+              strokeWidth={4.5}
+            />
+          )}
+        </Svg>
+      </SliderSurface>
+    </View>
+  );
+}
+
+const River = memo(function River({ path }: { path: string }) {
+  const { colours } = useTheme();
+  return (
+    <>
+      <Path
+        d={path}
+        stroke={colours.waterTint}
+        strokeWidth={10}
+        strokeLinecap="round"
+        fill="none"
+      />
+      <Path d={path} stroke={colours.water} strokeWidth={1.75} fill="none" />
+    </>
+  );
+});
+
+const NONE: never[] = [];
+
+function describe(places: readonly ReachPlace[], chainage: number, system: UnitSystem): string {
+  const name = placeName(places, chainage);
+  const where = formatWithUnit(chainage, 'chainage', system);
+  return name ? `${name}, ${where}` : where;
+}
+
+const styles = StyleSheet.create({
+  box: { alignSelf: 'stretch', height: touch },
+  slider: { borderRadius: touch / 2 },
+});

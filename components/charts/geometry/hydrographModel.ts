@@ -1,0 +1,79 @@
+import { fromSi, type Quantity, type UnitSystem } from '@/shared/units/units';
+import { extentOf, makeFrame, roomyExtent, type Frame } from './frame';
+import { linePath, project } from './paths';
+import type { Polyline } from './placeLabel';
+import { thinSeries } from './thinSeries';
+import { timeTicks, valueTicks, type TimeTicks } from './ticks';
+
+/** Values against time, SI, rising times in s. */
+export interface Series {
+  times: ArrayLike<number>;
+  values: ArrayLike<number>;
+}
+
+export interface Curve extends Polyline {
+  path: string;
+}
+
+export interface HydrographModel {
+  frame: Frame;
+  timeTicks: TimeTicks;
+  valueTicks: number[];
+  main: Curve;
+  compare: Curve | null;
+  /** px of an SI value. */
+  yOf: (value: number) => number;
+}
+
+/** Least height of a drawing in SI, so that a steady value is drawn level. */
+const LEAST: Partial<Record<Quantity, number>> = { elevation: 0.2, depth: 0.2, velocity: 0.2 };
+
+/** All of a hydrograph that does not follow the cursor. Flows and velocities are drawn from zero. */
+export function hydrographModel(
+  size: { width: number; height: number },
+  series: Series,
+  compare: Series | null,
+  quantity: Quantity,
+  unitSystem: UnitSystem,
+): HydrographModel {
+  const unit = (value: number) => fromSi(value, quantity, unitSystem);
+  const rows = compare ? [series.values, compare.values] : [series.values];
+  const [low, high] = extentOf(...rows, ...(quantity === 'elevation' ? [] : [[0]])) ?? [0, 1];
+  const y = roomyExtent([unit(low), unit(high)], unit(LEAST[quantity] ?? 1), 4);
+  const x = extentOf(series.times) ?? [0, 1];
+  const frame = makeFrame(size, MARGINS, x, y);
+  const yOf = (value: number) => frame.y(unit(value));
+  const curve = ({ times, values }: Series): Curve => {
+    const thin = thinSeries(times, values, Math.max(50, Math.round(size.width / 2)));
+    const points = { x: project(thin.x, frame.x), y: project(thin.y, yOf) };
+    return { ...points, path: linePath(points.x, points.y) };
+  };
+  return {
+    frame,
+    timeTicks: timeTicks(x, frame.right - frame.left, 60),
+    valueTicks: valueTicks(y, frame.bottom - frame.top, 26),
+    main: curve(series),
+    compare: compare ? curve(within(compare, x)) : null,
+    yOf,
+  };
+}
+
+const MARGINS = { top: 10, right: 14, bottom: 26, left: 46 };
+
+/** The part of a series that lies in the drawing. */
+function within({ times, values }: Series, [from, to]: readonly [number, number]): Series {
+  const kept: { times: number[]; values: number[] } = { times: [], values: [] };
+  for (let i = 0; i < times.length; i++) {
+    if (times[i] < from || times[i] > to) continue;
+    kept.times.push(times[i]);
+    kept.values.push(values[i]);
+  }
+  return kept;
+}
+
+/** The highest value and the first time it is reached; null of an empty series. */
+export function peakOf({ times, values }: Series): { value: number; time: number } | null {
+  let at = -1;
+  for (let i = 0; i < values.length; i++) if (at < 0 || values[i] > values[at]) at = i;
+  return at < 0 ? null : { value: values[at], time: times[at] };
+}

@@ -1,0 +1,50 @@
+import { fromSi, type UnitSystem } from '@/shared/units/units';
+import { extentOf, makeFrame, roomyExtent, type Frame } from './frame';
+import { valueTicks } from './ticks';
+
+/** What a long section is drawn from: rows of one length, m. */
+export interface LongProfile {
+  chainages: ArrayLike<number>;
+  bed: ArrayLike<number>;
+  leftBank?: ArrayLike<number> | null;
+  rightBank?: ArrayLike<number> | null;
+  peakStage?: ArrayLike<number> | null;
+}
+
+/** Thinner water than this is drawn as dry ground, m. */
+const THIN = 0.002;
+/** Least height of the drawing, m, so that a level pool looks level. */
+const LEAST = 1;
+
+/** The scales of a long section in the study's units. The highest water and the banks always fit. */
+export function longSectionFrame(
+  size: { width: number; height: number },
+  profile: LongProfile,
+  system: UnitSystem,
+): Frame & { xTicks: number[]; yTicks: number[] } {
+  const rows = [profile.bed, profile.leftBank, profile.rightBank, profile.peakStage];
+  const extent = extentOf(...rows.filter((row) => row != null)) ?? [0, 1];
+  const y = roomyExtent(
+    [fromSi(extent[0], 'elevation', system), fromSi(extent[1], 'elevation', system)],
+    fromSi(LEAST, 'elevation', system),
+    8,
+  );
+  const along = extentOf(profile.chainages) ?? [0, 1];
+  const x: [number, number] = [
+    fromSi(along[0], 'chainage', system),
+    fromSi(along[1], 'chainage', system),
+  ];
+  const frame = makeFrame(size, { top: 28, right: 16, bottom: 28, left: 46 }, x, y);
+  return {
+    ...frame,
+    xTicks: valueTicks(x, frame.right - frame.left, 72),
+    yTicks: valueTicks(y, frame.bottom - frame.top, 44),
+  };
+}
+
+/** The surface where there is water; NaN, which lifts the pen, where there is none. */
+export function wetSurface(bed: ArrayLike<number>, stage: ArrayLike<number>): Float64Array {
+  const out = new Float64Array(bed.length);
+  for (let i = 0; i < bed.length; i++) out[i] = stage[i] - bed[i] > THIN ? stage[i] : NaN;
+  return out;
+}
