@@ -1,0 +1,20 @@
+import path from 'node:path';
+import { socketPath } from './socketPath';
+
+/** What a database server keeps in its directory. */
+export interface Files {
+  data: string;
+  socket: string;
+  pid: string;
+  log: string;
+}
+
+export const filesOf = (dir: string): Files => ({
+  data: path.join(dir, 'mysql'),
+  socket: socketPath(dir),
+  pid: path.join(dir, 'mysql.pid'),
+  log: path.join(dir, 'mysql.log'),
+});
+
+/** MariaDB refuses to run as root unless it is told to. */
+export const asRoot = (): string[] => (process.getuid?.() === 0 ? ['--user=root'] : []);

@@ -1,0 +1,63 @@
+import { readdirSync } from 'node:fs';
+import path from 'node:path';
+import { QueryTypes, type QueryInterface, type Sequelize } from 'sequelize';
+import { SequelizeStorage, Umzug } from 'umzug';
+import type { Step } from './columns';
+
+/** The database was last used by a later version of the product. */
+export class NewerSchemaError extends Error {
+  constructor(readonly unknown: string[]) {
+    super(
+      `The database was written by a newer version of Spate (it has ${unknown.join(', ')}). ` +
+        'Start that version, or use another data directory; nothing was changed.',
+    );
+    this.name = 'NewerSchemaError';
+  }
+}
+
+const STEPS = path.resolve(__dirname, '../migrations');
+const STEP_FILE = /^(\d{3}-[a-z0-9-]+)\.[jt]s$/;
+
+export function migrator(sequelize: Sequelize): Umzug<QueryInterface> {
+  const migrations = readdirSync(STEPS)
+    .filter((file) => STEP_FILE.test(file))
+    .sort()
+    .map((file) => {
+      const load = () => import(path.join(STEPS, file)) as Promise<{ up: Step; down: Step }>;
+      return {
+        name: file.replace(STEP_FILE, '$1'),
+        up: async (params: { context: QueryInterface }) => (await load()).up(params),
+        down: async (params: { context: QueryInterface }) => (await load()).down(params),
+      };
+    });
+  return new Umzug<QueryInterface>({
+    migrations,
+    context: sequelize.getQueryInterface(),
+    storage: new SequelizeStorage({ sequelize, tableName: 'schema_steps' }),
+    logger: undefined,
+  });
+}
+
+/**
+ * Brings the schema up to this version, one server at a time. Throws `NewerSchemaError` before touching anything
+ * where the database knows steps that this version does not.
+ */
+export async function migrate(sequelize: Sequelize): Promise<string[]> {
+  const steps = migrator(sequelize);
+  // A named lock belongs to a connection: the transaction holds one fast meanwhile.
+  return sequelize.transaction(async (transaction) => {
+    const select = { transaction, type: QueryTypes.SELECT } as const;
+    await sequelize.query("SELECT GET_LOCK('spate-migrate', 120)", select);
+    try {
+      const known = new Set(
+        (await steps.migrations(sequelize.getQueryInterface())).map((step) => step.name),
+      );
+      const executed = (await steps.executed()).map((step) => step.name);
+      const unknown = executed.filter((name) => !known.has(name));
+      if (unknown.length > 0) throw new NewerSchemaError(unknown);
+      return (await steps.up()).map((step) => step.name);
+    } finally {
+      await sequelize.query("SELECT RELEASE_LOCK('spate-migrate')", select);
+    }
+  });
+}

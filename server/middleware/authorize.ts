@@ -1,0 +1,49 @@
+import type { Request, RequestHandler, Response } from 'express';
+import { forbidden, notFound, unauthenticated } from '../errors';
+import { decide } from '../policies/decide';
+import type { Action } from '../policies/policies';
+import type { Actor, Loaded } from '../policies/subject';
+
+/** Finds the record that a route is about; null where there is none. */
+export type Loader<R> = (req: Request, actor: Actor) => Promise<Loaded<R> | null>;
+
+/** Carried by the handler, so that the table test can read which action a route declares. */
+export interface DeclaredHandler extends RequestHandler {
+  action: Action | 'public';
+}
+
+const RECORD = 'record';
+
+/**
+ * Lets pass who may do `action` to the record that `load` finds; without a loader the subject is the person's own firm.
+ * What may not be seen answers 404. The record waits in `recordOf(res)`.
+ */
+export function authorize<R>(action: Action, load?: Loader<R>): DeclaredHandler {
+  const handler: RequestHandler = async (req, res, next) => {
+    const actor = actorOf(res);
+    const loaded = load ? await load(req, actor) : { record: null, subject: actor };
+    if (!loaded) throw notFound();
+    const decision = decide(actor, action, loaded.subject);
+    if (decision === 'notFound') throw notFound();
+    if (decision === 'forbidden') throw forbidden();
+    res.locals[RECORD] = loaded.record;
+    next();
+  };
+  return Object.assign(handler, { action });
+}
+
+/** Declares that a route needs no sign-in. */
+export const openToAll: DeclaredHandler = Object.assign(
+  ((_req, _res, next) => next()) as RequestHandler,
+  { action: 'public' as const },
+);
+
+/** Who asks; throws `unauthenticated` where `authenticate` did not run. */
+export function actorOf(res: Response): Actor {
+  const actor = res.locals['actor'] as Actor | undefined;
+  if (!actor) throw unauthenticated();
+  return actor;
+}
+
+/** What `authorize` loaded. */
+export const recordOf = <R>(res: Response): R => res.locals[RECORD] as R;

@@ -1,0 +1,78 @@
+import type { Role } from '../../shared/accounts/roles';
+import { asClient, asSurveyor, both, inFirm, own, type Condition } from './subject';
+
+/** Who may do it, by role and condition. Of several roles of a person one that allows is enough. */
+export interface Policy {
+  grants: Partial<Record<Role, Condition>>;
+  /**
+   * What a refusal tells: `forbidden` for what everybody knows is there, the name of another action where those who
+   * may do that one may know (403), and `notFound` for what must look as if it did not exist (404).
+   */
+  refusal: 'forbidden' | 'notFound' | { seenBy: string };
+}
+
+const anybody: Policy['grants'] = {
+  administrator: inFirm,
+  modeller: inFirm,
+  seniorEngineer: inFirm,
+  surveyor: inFirm,
+  client: inFirm,
+};
+const engineers: Policy['grants'] = { modeller: inFirm, seniorEngineer: inFirm };
+
+const table = <T extends Record<string, Policy>>(rows: T) => rows;
+
+/**
+ * The one table of rights: every route declares one of these actions, or that it is public. Records of another firm are
+ * refused before a row is looked at (`decide.ts`), so no row can open them.
+ */
+export const POLICIES = table({
+  // One's own account
+  'me.read': { grants: anybody, refusal: 'forbidden' },
+  'me.change': { grants: anybody, refusal: 'forbidden' },
+
+  // People of the firm
+  'user.list': { grants: { administrator: inFirm, ...engineers }, refusal: 'forbidden' },
+  'user.change': { grants: { administrator: inFirm }, refusal: { seenBy: 'user.list' } },
+  'invitation.list': { grants: { administrator: inFirm, ...engineers }, refusal: 'forbidden' },
+  'invitation.create': { grants: { administrator: inFirm, ...engineers }, refusal: 'forbidden' },
+  'invitation.change': {
+    grants: { administrator: inFirm, modeller: own, seniorEngineer: own },
+    refusal: 'notFound',
+  },
+
+  // Studies
+  'study.list': { grants: anybody, refusal: 'forbidden' },
+  'study.create': { grants: engineers, refusal: 'forbidden' },
+  'study.read': {
+    grants: { ...engineers, surveyor: asSurveyor, client: asClient },
+    refusal: 'notFound',
+  },
+  'study.change': { grants: engineers, refusal: { seenBy: 'study.read' } },
+  'study.share': { grants: engineers, refusal: { seenBy: 'study.read' } },
+  'station.read': { grants: engineers, refusal: 'notFound' },
+  'station.change': { grants: engineers, refusal: 'notFound' },
+
+  // Surveys: surveyors see what they sent themselves
+  'survey.list': { grants: { ...engineers, surveyor: asSurveyor }, refusal: 'notFound' },
+  'survey.send': {
+    grants: { ...engineers, surveyor: asSurveyor },
+    refusal: { seenBy: 'study.read' },
+  },
+  'survey.read': { grants: { ...engineers, surveyor: both(asSurveyor, own) }, refusal: 'notFound' },
+  'template.read': { grants: { ...engineers, surveyor: inFirm }, refusal: 'forbidden' },
+
+  // Reaches and scenarios
+  'reach.read': { grants: engineers, refusal: 'notFound' },
+  'reach.change': { grants: engineers, refusal: 'notFound' },
+  'scenario.read': { grants: engineers, refusal: 'notFound' },
+  'scenario.change': { grants: engineers, refusal: 'notFound' },
+  'table.read': { grants: engineers, refusal: 'forbidden' },
+
+  // Runs: nothing is issued to clients yet
+  'run.read': { grants: engineers, refusal: 'notFound' },
+  'run.request': { grants: engineers, refusal: 'notFound' },
+  'run.change': { grants: engineers, refusal: 'notFound' },
+});
+
+export type Action = keyof typeof POLICIES;

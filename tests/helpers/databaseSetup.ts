@@ -1,0 +1,33 @@
+import { randomBytes } from 'node:crypto';
+import { mkdirSync, readdirSync, rmSync } from 'node:fs';
+import path from 'node:path';
+import { startDatabase, type OwnDatabase } from '../../server/bootstrap/mariadb/startDatabase';
+import { isAlive } from '../../server/bootstrap/processes';
+
+export const TEST_DATA = path.resolve(__dirname, '../../.data-test');
+
+declare global {
+  var spateTestDatabase: { database: OwnDatabase; dir: string } | undefined;
+}
+
+/** One MariaDB server for a run of the tests, in a directory of its own: runs may go side by side. */
+export default async function databaseSetup(): Promise<void> {
+  mkdirSync(TEST_DATA, { recursive: true });
+  forgetTheDead();
+  const dir = path.join(TEST_DATA, `db-${process.pid}`);
+  const database = await startDatabase({
+    dir,
+    password: randomBytes(18).toString('base64url'),
+    args: ['--innodb-flush-log-at-trx-commit=0', '--skip-innodb-doublewrite'],
+  });
+  globalThis.spateTestDatabase = { database, dir };
+  process.env.SPATE_TEST_DATABASE = database.url('');
+}
+
+/** Removes what runs left behind that were killed. */
+function forgetTheDead(): void {
+  for (const name of readdirSync(TEST_DATA)) {
+    const pid = Number(/^db-(\d+)$/.exec(name)?.[1]);
+    if (pid && !isAlive(pid)) rmSync(path.join(TEST_DATA, name), { recursive: true, force: true });
+  }
+}

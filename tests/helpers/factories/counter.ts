@@ -1,0 +1,4 @@
+let count = 0;
+
+/** Tells made things apart. */
+export const nextNumber = (): number => ++count;
