@@ -1,0 +1,54 @@
+import type { Session } from '@/shared/accounts/types';
+import { ApiError } from './ApiError';
+
+/** The access token lives in memory alone; the refresh token in a cookie that no script can read. */
+let token: string | null = null;
+let renewing: Promise<Session> | null = null;
+let onEnded: () => void = () => undefined;
+
+export const getAccessToken = (): string | null => token;
+
+export function setAccessToken(next: string | null): void {
+  token = next;
+}
+
+/** Called when the session ends without the person asking for it. */
+export function whenSessionEnds(listener: () => void): void {
+  onEnded = listener;
+}
+
+/** One refresh at a time over all tabs: the refresh token rotates, and the use of an old one ends the session. */
+async function withLock<T>(task: () => Promise<T>): Promise<T> {
+  return 'locks' in navigator ? navigator.locks.request('spate-refresh', task) : task();
+}
+
+async function refresh(): Promise<Session> {
+  const response = await fetch('/api/auth/refresh', { method: 'POST' }).catch(() => {
+    throw ApiError.unreachable();
+  });
+  if (!response.ok) throw await ApiError.of(response);
+  const session = (await response.json()) as Session;
+  token = session.accessToken;
+  return session;
+}
+
+/** A new access token by the cookie. Throws ApiError: `unauthenticated` when there is no session to go on with. */
+export function renewSession(): Promise<Session> {
+  renewing ??= withLock(refresh).finally(() => {
+    renewing = null;
+  });
+  return renewing;
+}
+
+/** The same in the middle of a call: tells the application when the session is over. */
+export async function renewInFlight(): Promise<void> {
+  try {
+    await renewSession();
+  } catch (error) {
+    if (error instanceof ApiError && error.code === 'unauthenticated') {
+      token = null;
+      onEnded();
+    }
+    throw error;
+  }
+}

@@ -1,0 +1,115 @@
+import { Link, type Href } from 'expo-router';
+import { useId } from 'react';
+import {
+  ActivityIndicator,
+  Pressable,
+  StyleSheet,
+  View,
+  type PressableStateCallbackType,
+  type ViewStyle,
+} from 'react-native';
+import { radius, space, touch, type Colours } from '../theme/tokens';
+import { useTheme } from '../theme/useTheme';
+import { aria } from './aria';
+import { Txt } from './Txt';
+
+export type ButtonKind = 'solid' | 'outline' | 'quiet' | 'danger';
+
+interface ButtonProps {
+  label: string;
+  kind?: ButtonKind;
+  onPress?: () => void;
+  /** Makes it a link to another screen. */
+  href?: Href;
+  /** Under way: says so and takes no second press. */
+  busy?: boolean;
+  disabled?: boolean;
+  /** Said beside it, e.g. why it is disabled. */
+  hint?: string;
+  /** Takes the whole width. */
+  wide?: boolean;
+  /** Name for screen readers where the label alone does not say which, e.g. "Remove Ines Corrow". */
+  name?: string;
+}
+
+interface Look {
+  ground: string;
+  edge: string;
+  ink: string;
+}
+
+const look = (kind: ButtonKind, c: Colours): Look => {
+  if (kind === 'solid') return { ground: c.ink, edge: c.ink, ink: c.card };
+  if (kind === 'danger') return { ground: 'transparent', edge: c.brick, ink: c.brick };
+  if (kind === 'quiet') return { ground: 'transparent', edge: 'transparent', ink: c.ink };
+  return { ground: 'transparent', edge: c.ink, ink: c.ink };
+};
+
+/** One solid button a screen: what to do next. */
+export function Button(props: ButtonProps) {
+  const { label, kind = 'outline', onPress, href, busy, disabled, hint, wide, name } = props;
+  const { colours } = useTheme();
+  const hintId = useId();
+  const { ground, edge, ink } = look(kind, colours);
+  const off = Boolean(disabled || busy);
+
+  const box = (state: PressableStateCallbackType & { hovered?: boolean }): ViewStyle => ({
+    ...styles.box,
+    backgroundColor: ground,
+    borderColor: edge,
+    opacity: disabled && !busy ? 0.45 : state.pressed ? 0.75 : state.hovered ? 0.9 : 1,
+  });
+  const pressable = (
+    <Pressable
+      role={href ? 'link' : 'button'}
+      aria-label={name}
+      aria-busy={busy}
+      aria-disabled={off}
+      disabled={off}
+      onPress={href ? undefined : onPress}
+      {...aria({ 'aria-describedby': hint ? hintId : undefined })}
+      style={box}
+    >
+      {busy ? <ActivityIndicator size="small" color={ink} /> : null}
+      <Txt strong style={{ color: ink }}>
+        {label}
+      </Txt>
+      {kind === 'quiet' ? (
+        <View style={[styles.underline, { backgroundColor: colours.edge }]} />
+      ) : null}
+    </Pressable>
+  );
+  return (
+    <View style={wide ? styles.wide : styles.narrow}>
+      {href && !off ? (
+        <Link href={href} asChild>
+          {pressable}
+        </Link>
+      ) : (
+        pressable
+      )}
+      {hint ? (
+        <Txt id={hintId} variant="small" tone="soft">
+          {hint}
+        </Txt>
+      ) : null}
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  box: {
+    minHeight: touch,
+    paddingHorizontal: space.two,
+    paddingVertical: space.one,
+    borderRadius: radius.control,
+    borderWidth: 1.5,
+    flexDirection: 'row',
+    gap: space.one,
+    alignItems: 'center',
+    justifyContent: 'center',
+  },
+  underline: { position: 'absolute', left: space.two, right: space.two, bottom: 9, height: 1 },
+  narrow: { alignSelf: 'flex-start', gap: space.half },
+  wide: { alignSelf: 'stretch', gap: space.half },
+});
