@@ -38,7 +38,7 @@ export interface HydrographProps {
 
 /** A value against time, its peak named, its value at the cursor read out beside the curve and never over it. */
 export function Hydrograph(props: HydrographProps) {
-  const { onChange, height = 168, series } = props;
+  const { onChange, height = 180, series } = props;
   const peak = props.peak === undefined ? peakOf(series) : props.peak;
   return (
     <ChartBox
@@ -154,7 +154,7 @@ function Marks({
         <Line
           x1={cursor.x}
           x2={cursor.x}
-          y1={frame.top - 6}
+          y1={4}
           y2={frame.bottom}
           stroke={colours.ink}
           strokeWidth={1.25}

@@ -185,7 +185,7 @@ function Cursor({ at, frame, profile, stage, unitSystem, lines, surface }: Curso
     width: frame.right - frame.left,
     height: frame.bottom - 26,
   };
-  const drawn = [surface, lines.bed, lines.peak].flatMap((row) =>
+  const drawn = [surface, lines.bed, lines.peak, lines.left, lines.right].flatMap((row) =>
     row ? [{ x: lines.x, y: row }] : [],
   );
   const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };

@@ -60,7 +60,7 @@ export const StationMarks = memo(function StationMarks(props: Props) {
 
 const HEIGHT = 16;
 
-/** Names that find a place in the ground below their ring, clear of one another and of the axis title. */
+/** Names that find a place in the ground left below their ring, clear of one another, the foot and the cursor. */
 function namesWithRoom(
   stations: Props['stations'],
   px: (chainage: number) => number,
@@ -70,14 +70,14 @@ function namesWithRoom(
   const placed: { name: string; box: Box }[] = [];
   for (const { name, chainage } of stations) {
     const width = textWidth(name, CHART_TEXT_SIZE);
-    const x = Math.max(frame.left + 4, Math.min(frame.right - width - 4, px(chainage) - width / 2));
+    const x = px(chainage) - width - 8;
     const top = bedAt(chainage) + 8;
     const box = { x, y: top, width, height: HEIGHT };
-    const hitsFoot = top + HEIGHT > frame.bottom - 22;
+    const hitsEdge = x < frame.left + 4 || top + HEIGHT > frame.bottom - 22;
     const hitsName = placed.some(
       ({ box: other }) => x < other.x + other.width + 8 && other.x < x + width + 8,
     );
-    if (!hitsFoot && !hitsName) placed.push({ name, box });
+    if (!hitsEdge && !hitsName) placed.push({ name, box });
   }
   return placed;
 }

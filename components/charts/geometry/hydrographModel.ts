@@ -58,7 +58,8 @@ export function hydrographModel(
   };
 }
 
-const MARGINS = { top: 10, right: 14, bottom: 26, left: 46 };
+/** Above the plot there is room for the name of the peak. */
+const MARGINS = { top: 24, right: 14, bottom: 26, left: 46 };
 
 /** The part of a series that lies in the drawing. */
 function within({ times, values }: Series, [from, to]: readonly [number, number]): Series {

@@ -15,6 +15,8 @@ export interface LongProfile {
 const THIN = 0.002;
 /** Least height of the drawing, m, so that a level pool looks level. */
 const LEAST = 1;
+/** Ground below the lowest bed that is drawn, as a share of the height: room for names. */
+const FOOT = 0.12;
 
 /** The scales of a long section in the study's units. The highest water and the banks always fit. */
 export function longSectionFrame(
@@ -24,8 +26,9 @@ export function longSectionFrame(
 ): Frame & { xTicks: number[]; yTicks: number[] } {
   const rows = [profile.bed, profile.leftBank, profile.rightBank, profile.peakStage];
   const extent = extentOf(...rows.filter((row) => row != null)) ?? [0, 1];
+  const foot = extent[0] - FOOT * (extent[1] - extent[0]);
   const y = roomyExtent(
-    [fromSi(extent[0], 'elevation', system), fromSi(extent[1], 'elevation', system)],
+    [fromSi(foot, 'elevation', system), fromSi(extent[1], 'elevation', system)],
     fromSi(LEAST, 'elevation', system),
     8,
   );

@@ -25,16 +25,21 @@ export function placeLabel(
 ): Box {
   let best: Box | null = null;
   let bestCost = Infinity;
+  const right = point.x + gap;
+  const left = point.x - gap - size.width;
+  // Beside the point first; then as far aside as the bounds allow, over or under it.
+  const sides = [
+    right,
+    left,
+    Math.max(left, bounds.x),
+    Math.min(right, bounds.x + bounds.width - size.width),
+  ];
   const rows = Math.ceil(bounds.height / STEP);
   for (let row = 0; row <= rows; row++) {
-    for (const side of SIDES) {
+    for (const x of sides) {
       for (const up of row === 0 ? [0] : [-1, 1]) {
-        const box = {
-          x: side > 0 ? point.x + gap : point.x - gap - size.width,
-          y: point.y - size.height / 2 + up * row * STEP,
-          ...size,
-        };
-        if (!within(box, bounds)) continue;
+        const box = { x, y: point.y - size.height / 2 + up * row * STEP, ...size };
+        if (!within(box, bounds) || covers(box, point)) continue;
         const hidden =
           lines.reduce((sum, each) => sum + crossings(each, box), 0) +
           10 * taken.filter((each) => overlap(each, box)).length;
@@ -51,7 +56,6 @@ export function placeLabel(
 }
 
 const STEP = 4;
-const SIDES = [1, -1];
 const CLEAR = 3;
 
 const within = (box: Box, bounds: Box) =>
@@ -59,6 +63,9 @@ const within = (box: Box, bounds: Box) =>
   box.y >= bounds.y &&
   box.x + box.width <= bounds.x + bounds.width &&
   box.y + box.height <= bounds.y + bounds.height;
+
+const covers = (box: Box, point: { x: number; y: number }) =>
+  overlap(box, { x: point.x - 6, y: point.y - 6, width: 12, height: 12 });
 
 const overlap = (a: Box, b: Box) =>
   a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
