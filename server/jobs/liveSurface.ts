@@ -9,7 +9,8 @@ const LIVE_PLACES = 300;
 export function liveSurface(caseFile: CaseFile): (output: RunOutput) => LiveSurface {
   const grid = buildGrid(caseFile);
   const cells = evenly(grid.chainage.length, LIVE_PLACES);
-  const pick = (values: ArrayLike<number>) => Array.from(cells, (cell) => toMillimetres(values[cell]));
+  const pick = (values: ArrayLike<number>) =>
+    Array.from(cells, (cell) => toMillimetres(values[cell]));
   const chainages = pick(grid.chainage);
   const bed = pick(grid.bed);
   return ({ time, stage }) => ({ time, chainages, bed, stage: pick(stage) });

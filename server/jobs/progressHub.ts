@@ -27,7 +27,8 @@ export function progressHub(): ProgressHub {
       emitter.on(String(runId), listener);
       return () => void emitter.off(String(runId), listener);
     },
-    watchers: () => emitter.eventNames().reduce((sum, name) => sum + emitter.listenerCount(name), 0),
+    watchers: () =>
+      emitter.eventNames().reduce((sum, name) => sum + emitter.listenerCount(name), 0),
   };
 }
 

@@ -24,5 +24,4 @@ export type WorkerResult =
   | { type: 'cancelled' };
 
 export type WorkerMessage =
-  | { type: 'progress'; fraction: number; time: number; surface: LiveSurface | null }
-  | WorkerResult;
+  { type: 'progress'; fraction: number; time: number; surface: LiveSurface | null } | WorkerResult;

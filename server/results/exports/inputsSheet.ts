@@ -46,9 +46,7 @@ export function inputsSheet(run: ExportedRun, caseFile: CaseFile, facts: RunFact
   const seconds = { title: 'time (s)', si: 1 };
   const table = (title: string, columns: { title: string; si: number; values: number[] }[]) => {
     rows.push([], [title], ['', ...columns.map((c) => c.title)]);
-    columns[0].values.forEach((_, k) =>
-      rows.push(['', ...columns.map((c) => c.values[k] / c.si)]),
-    );
+    columns[0].values.forEach((_, k) => rows.push(['', ...columns.map((c) => c.values[k] / c.si)]));
   };
 
   const { upstream, downstream, initial } = caseFile;
