@@ -1,6 +1,13 @@
 import type { Sequelize } from 'sequelize';
 import { defineFirm } from './Firm';
 import { defineRefreshToken } from './RefreshToken';
+import { defineStudy } from './Study';
+import { defineStudyMember } from './StudyMember';
+import { defineStation } from './Station';
+import { defineSurveyRevision } from './SurveyRevision';
+import { defineSurveyRefusal } from './SurveyRefusal';
+import { defineReach } from './Reach';
+import { defineScenario } from './Scenario';
 import { defineUser } from './User';
 
 /** Every table, bound to one connection pool. A new model is one line here, and its ties to others below. */
@@ -8,9 +15,23 @@ export function defineModels(sequelize: Sequelize) {
   const models = {
     Firm: defineFirm(sequelize),
     RefreshToken: defineRefreshToken(sequelize),
+    Study: defineStudy(sequelize),
+    StudyMember: defineStudyMember(sequelize),
+    Station: defineStation(sequelize),
+    SurveyRevision: defineSurveyRevision(sequelize),
+    SurveyRefusal: defineSurveyRefusal(sequelize),
+    Reach: defineReach(sequelize),
+    Scenario: defineScenario(sequelize),
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
+  models.Study.belongsTo(models.User, { as: 'creator', foreignKey: 'createdBy' });
+  models.StudyMember.belongsTo(models.User, { as: 'user', foreignKey: 'userId' });
+  models.SurveyRevision.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
+  models.SurveyRefusal.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
+  models.Reach.belongsTo(models.SurveyRevision, { as: 'survey', foreignKey: 'surveyRevisionId' });
+  models.Reach.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
+  models.Scenario.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
   return models;
 }
 
