@@ -71,6 +71,27 @@ export function useSendSurvey(studyId: number) {
 export const refusedReading = (error: unknown): SurveyReading | null =>
   isApiError(error, 'surveyRefused') ? (error.details as SurveyReading) : null;
 
+/** Hands in a file that was read with faults, so that its refusal is kept. Gives the refusal's id. */
+export function useKeepRefusal(studyId: number) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: async (file: SurveyFile): Promise<number | null> => {
+      try {
+        await api.upload<SurveyRevisionRow>(`/studies/${studyId}/surveys`, formOf(file));
+        return null;
+      } catch (error) {
+        if (!isApiError(error, 'surveyRefused')) throw error;
+      }
+      const { refusals } = await client.fetchQuery({
+        queryKey: surveyKeys.list(studyId),
+        queryFn: () => api.get<SurveyList>(`/studies/${studyId}/surveys`),
+        staleTime: 0,
+      });
+      return refusals.find(({ fileName }) => fileName === file.file.name)?.id ?? null;
+    },
+  });
+}
+
 export const downloadFaults = (refusalId: number) =>
   api.download(`/refusals/${refusalId}/faults.xlsx`, 'faults.xlsx');
 

@@ -1,0 +1,118 @@
+import { useState } from 'react';
+import { Screen } from '@/components/layout/Screen';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { Button } from '@/components/ui/Button';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { Loading } from '@/components/ui/Loading';
+import { Txt } from '@/components/ui/Txt';
+import type { SurveyReading } from '@/shared/surveys/types';
+import { AcceptCard } from './AcceptCard';
+import { countFaults } from './faultPlace';
+import { FaultList } from './FaultList';
+import { FileButton } from './FileButton';
+import { FaultsDownload } from './FaultsDownload';
+import { refuses } from './handInState';
+import { MatchCard } from './MatchCard';
+import { SectionsPreview } from './SectionsPreview';
+import type { HandInControl } from './useHandIn';
+
+/** What was read of a file: its faults, or its sections and the button that takes them in. */
+export function HandInScreen({ control }: { control: HandInControl }) {
+  const { study } = useCurrentStudy();
+  const { state } = control;
+  const [note, setNote] = useState('');
+  if (state.step === 'choose' || state.step === 'accepted') return null;
+
+  const reading =
+    state.step === 'read' ? state.reading : state.step === 'reading' ? state.previous : null;
+  const refused = reading !== null && refuses(reading);
+  const busy = state.step === 'reading';
+  const choice = state.step === 'unread' ? null : state.choice;
+  const match =
+    reading && choice ? (
+      <MatchCard {...{ reading, choice, busy }} onChange={control.changeMatch} />
+    ) : null;
+  return (
+    <Screen
+      title={titleOf(reading, state.step)}
+      crumbs={[
+        { label: study.title, href: `/studies/${study.id}` },
+        { label: 'Survey', href: `/studies/${study.id}/survey` },
+      ]}
+      lead={reading ? leadOf(state.file.name, reading) : state.file.name}
+      actions={
+        <>
+          <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />
+          {reading && refused ? (
+            <FaultsDownload
+              file={state.file}
+              match={state.step === 'read' && state.changed ? choice : null}
+            />
+          ) : null}
+          {reading && !refused ? (
+            <FileButton label="Choose another file" onFile={control.choose} />
+          ) : (
+            <FileButton
+              label={refused ? 'Choose the mended file' : 'Choose another file'}
+              kind={refused ? 'solid' : 'outline'}
+              onFile={control.choose}
+            />
+          )}
+        </>
+      }
+      side={
+        refused ? (
+          match
+        ) : reading ? (
+          <AcceptCard
+            {...{ note, busy }}
+            sending={control.isSending}
+            error={control.sendError}
+            onNote={setNote}
+            onAccept={() => void control.handIn(note)}
+          />
+        ) : undefined
+      }
+    >
+      {busy && !reading ? <Loading what={`Reading ${state.file.name}…`} /> : null}
+      {state.step === 'unread' ? (
+        <ErrorState
+          title={`${state.file.name} could not be read`}
+          error={state.error}
+          retry={control.readAgain}
+        />
+      ) : null}
+      {reading && reading.faults.length > 0 ? (
+        <FaultList
+          label={refused ? 'Faults' : 'Doubts'}
+          faults={reading.faults}
+          notListed={reading.faultsNotListed}
+        />
+      ) : null}
+      {reading && !refused ? (
+        <>
+          {reading.sections.length > 0 ? <SectionsPreview sections={reading.sections} /> : null}
+          {match}
+        </>
+      ) : null}
+    </Screen>
+  );
+}
+
+function titleOf(reading: SurveyReading | null, step: string): string {
+  if (!reading) return step === 'unread' ? 'Not read' : 'Reading the survey';
+  const count = countFaults(reading.faults, reading.faultsNotListed);
+  if (refuses(reading)) return `Not taken in: ${count}`;
+  return reading.faults.length > 0 ? `Read, with ${count}` : 'Read without faults';
+}
+
+function leadOf(fileName: string, reading: SurveyReading) {
+  const read = `${fileName} · ${reading.sectionCount} sections, ${reading.pointCount.toLocaleString('en-GB')} points read.`;
+  return (
+    <Txt tone="soft" role="status">
+      {refuses(reading)
+        ? `${read} Nothing of it was kept. Mend these and send it again.`
+        : `${read} Nothing is kept yet: look it over and take it in.`}
+    </Txt>
+  );
+}

@@ -1,0 +1,63 @@
+import { Screen } from '@/components/layout/Screen';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { useSurveys } from '@/components/queries/surveys';
+import { Badge } from '@/components/ui/Badge';
+import { Button } from '@/components/ui/Button';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { Loading } from '@/components/ui/Loading';
+import { Notice } from '@/components/ui/Notice';
+import { Txt } from '@/components/ui/Txt';
+import { HandInCard } from './HandInCard';
+import { RefusalsCard } from './RefusalsCard';
+import { RevisionsCard } from './RevisionsCard';
+import { TemplatesCard } from './TemplatesCard';
+import type { HandInControl } from './useHandIn';
+
+/** Revisions and refusals, the templates, and the place to hand in a file. */
+export function SurveyOverview({ control }: { control: HandInControl }) {
+  const { study, may } = useCurrentStudy();
+  const surveys = useSurveys(study.id);
+  const latest = surveys.data?.revisions[0];
+  return (
+    <Screen
+      title="Survey"
+      crumbs={[{ label: study.title, href: `/studies/${study.id}` }]}
+      badge={latest ? <Badge label={`Revision ${latest.revision}`} /> : undefined}
+      side={
+        <>
+          {may('survey.send') ? <HandInCard onFile={control.choose} /> : null}
+          <TemplatesCard />
+        </>
+      }
+    >
+      {control.state.step === 'accepted' ? (
+        <Notice tone="done" title={`Taken in as revision ${control.state.row.revision}`}>
+          <Txt>
+            {control.state.row.sectionCount} sections, {counted(control.state.row.pointCount)}{' '}
+            points of {control.state.row.fileName}. This revision will not change; a mended file
+            makes the next one.
+          </Txt>
+          {may('reach.read') ? (
+            <Button label="Look at the reach" href={`/studies/${study.id}/reach`} />
+          ) : null}
+        </Notice>
+      ) : null}
+      {surveys.isPending ? <Loading what="Reading what was handed in…" /> : null}
+      {surveys.isError ? (
+        <ErrorState
+          title="The surveys could not be read"
+          error={surveys.error}
+          retry={() => void surveys.refetch()}
+        />
+      ) : null}
+      {surveys.data ? (
+        <>
+          <RevisionsCard revisions={surveys.data.revisions} />
+          <RefusalsCard refusals={surveys.data.refusals} />
+        </>
+      ) : null}
+    </Screen>
+  );
+}
+
+const counted = (count: number): string => count.toLocaleString('en-GB');
