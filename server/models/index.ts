@@ -8,6 +8,8 @@ import { defineSurveyRevision } from './SurveyRevision';
 import { defineSurveyRefusal } from './SurveyRefusal';
 import { defineReach } from './Reach';
 import { defineScenario } from './Scenario';
+import { defineRun } from './Run';
+import { defineRunBlock } from './RunBlock';
 import { defineUser } from './User';
 
 /** Every table, bound to one connection pool. A new model is one line here, and its ties to others below. */
@@ -22,6 +24,8 @@ export function defineModels(sequelize: Sequelize) {
     SurveyRefusal: defineSurveyRefusal(sequelize),
     Reach: defineReach(sequelize),
     Scenario: defineScenario(sequelize),
+    Run: defineRun(sequelize),
+    RunBlock: defineRunBlock(sequelize),
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
@@ -32,6 +36,8 @@ export function defineModels(sequelize: Sequelize) {
   models.Reach.belongsTo(models.SurveyRevision, { as: 'survey', foreignKey: 'surveyRevisionId' });
   models.Reach.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
   models.Scenario.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
+  models.Run.belongsTo(models.Study, { as: 'study', foreignKey: 'studyId' });
+  models.Run.belongsTo(models.User, { as: 'requester', foreignKey: 'requestedBy' });
   return models;
 }
 
