@@ -67,27 +67,30 @@ export type SectionsFormValues = InferType<typeof sectionsFormSchema>;
 export function sectionsFormStart(section: ReachSection | undefined): SectionsFormValues {
   const [leftBank, rightBank] = section?.banks ?? [null, null];
   const roughness = section?.roughness ?? [];
+  const [left = null, channel = null, right = null] = section?.banks
+    ? roughnessByStrip(section)
+    : [];
   return {
     banks: 'keep',
     leftBank,
     rightBank,
     roughness: 'keep',
-    ...byBank(section),
+    left,
+    channel,
+    right,
     zones: roughness.length
       ? roughness.map(([from, n]) => ({ from, n }))
       : [{ from: section?.points[0][0] ?? 0, n: null }],
   };
 }
 
-/** Manning's n in the middle of the left, channel and right strip. */
-function byBank(section: ReachSection | undefined) {
-  if (!section?.banks) return { left: null, channel: null, right: null };
+/** Manning's n in the middle of the left, channel and right strip; without bank marks that of the middle only. */
+export function roughnessByStrip(section: ReachSection): (number | null)[] {
   const { points, banks } = section;
-  const edges = [points[0][0], ...banks, points[points.length - 1][0]];
-  const [left, channel, right] = [0, 1, 2].map((strip) =>
-    roughnessAt(section, (edges[strip] + edges[strip + 1]) / 2),
-  );
-  return { left, channel, right };
+  const [first, last] = [points[0][0], points[points.length - 1][0]];
+  if (!banks) return [roughnessAt(section, (first + last) / 2)];
+  const edges = [first, ...banks, last];
+  return [0, 1, 2].map((strip) => roughnessAt(section, (edges[strip] + edges[strip + 1]) / 2));
 }
 
 /** Manning's n that holds at an offset; null where none is given. */

@@ -1,0 +1,62 @@
+import { StyleSheet, View } from 'react-native';
+import { space } from '@/components/theme/tokens';
+import { NumberField } from '@/components/ui/NumberField';
+import { RadioGroup } from '@/components/ui/RadioGroup';
+import type { Reach, ReachSection } from '@/shared/reaches/types';
+import type { SectionChoice } from './sectionChoice';
+import type { ScopeChoice } from './sectionScope';
+
+interface ScopeFieldsProps {
+  reach: Reach;
+  section: ReachSection;
+  ticked: SectionChoice;
+  scope: ScopeChoice;
+  onChange: (scope: ScopeChoice) => void;
+}
+
+/** Which sections the change goes to. */
+export function ScopeFields({ reach, section, ticked, scope, onChange }: ScopeFieldsProps) {
+  return (
+    <>
+      <RadioGroup
+        label="Sections"
+        value={scope.scope}
+        onChange={(chosen) => onChange({ ...scope, scope: chosen })}
+        options={[
+          { value: 'here', label: `The one shown, ${section.id}` },
+          { value: 'stretch', label: 'A stretch of the reach' },
+          {
+            value: 'ticked',
+            label: `Those ticked in the table (${ticked.length})`,
+          },
+          { value: 'all', label: `All ${reach.sections.length}` },
+        ]}
+      />
+      {scope.scope === 'stretch' ? (
+        <View style={styles.pair}>
+          <View style={styles.half}>
+            <NumberField
+              label="From chainage"
+              quantity="chainage"
+              value={scope.from}
+              onChange={(from) => onChange({ ...scope, from })}
+            />
+          </View>
+          <View style={styles.half}>
+            <NumberField
+              label="To chainage"
+              quantity="chainage"
+              value={scope.to}
+              onChange={(to) => onChange({ ...scope, to })}
+            />
+          </View>
+        </View>
+      ) : null}
+    </>
+  );
+}
+
+const styles = StyleSheet.create({
+  pair: { flexDirection: 'row', gap: space.two },
+  half: { flex: 1, minWidth: 0 },
+});
