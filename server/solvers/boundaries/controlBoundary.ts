@@ -1,0 +1,56 @@
+import type { CellTables } from '../geometry/cellTables';
+import type { Workspace } from '../workspace';
+import type { Boundary } from './boundary';
+import { createEndFlux } from './endFlux';
+import { createEndSection } from './endSection';
+import { createEndState, type End } from './endState';
+import { risingRoot } from './risingRoot';
+
+/**
+ * An outlet whose flow is a rising function R of its stage: normal depth, a rating, critical depth. Stage and flow are
+ * where R meets the outgoing characteristic Q_b = Q + (u - c)(A_b - A), with the mean celerity. R is at most critical.
+ * Supercritical water leaves as it comes, unless the stage that R wants has the greater force. Nothing enters.
+ */
+export function createControlBoundary(
+  workspace: Workspace,
+  tables: CellTables,
+  end: End,
+  control: (stage: number) => number,
+): Boundary {
+  const { section, cell, outward } = end;
+  const { bed, stage } = workspace;
+  const endState = createEndState(workspace, tables, end);
+  const endFlux = createEndFlux(workspace, tables, end);
+  const { celerityAt, criticalFlowAt, forceAt } = createEndSection(workspace, tables, section);
+
+  // What the search below reads: set before each search, so that the search makes no closure.
+  let out = 0;
+  let area = 0;
+  let velocity = 0;
+  let celerity = 0;
+  const released = (eta: number): number => Math.min(control(eta), criticalFlowAt(eta));
+  const surplus = (eta: number): number => released(eta) - out;
+  const mismatch = (eta: number): number => {
+    const c = 0.5 * (celerity + celerityAt(eta));
+    const speed = Math.min(velocity - c, -0.25 * celerity);
+    return released(eta) - out - speed * (tables.areaAt(section, eta) - area);
+  };
+
+  return function controlBoundary() {
+    const inside = endState();
+    if (inside.area <= 0) return endFlux(stage[cell], 0);
+    out = outward * inside.flow;
+    area = inside.area;
+    velocity = outward * inside.velocity;
+    celerity = inside.celerity;
+    const step = Math.max(0.5 * (inside.stage - bed[section]), 1e-3);
+    if (velocity >= celerity) {
+      const wanted = risingRoot(surplus, bed[section], step);
+      const held = wanted > inside.stage && forceAt(wanted, out) > forceAt(inside.stage, out);
+      return endFlux(held ? wanted : inside.stage, inside.flow);
+    }
+    const eta = risingRoot(mismatch, bed[section], step);
+    if (eta <= bed[section]) return endFlux(inside.stage, 0);
+    return endFlux(eta, outward * released(eta));
+  };
+}

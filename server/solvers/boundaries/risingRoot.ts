@@ -1,0 +1,38 @@
+/**
+ * The root of an increasing function at or above `lo`, by the Illinois form of false position (Dowell and Jarratt 1971,
+ * BIT 11, 168-174); `lo` itself where the function is not negative there. `step` is the first width of the search.
+ */
+export function risingRoot(f: (x: number) => number, lo: number, step: number): number {
+  let fLo = f(lo);
+  if (fLo >= 0) return lo;
+  let hi = lo + step;
+  let fHi = f(hi);
+  for (let k = 0; fHi < 0 && k < 60; k++) {
+    lo = hi;
+    fLo = fHi;
+    step *= 2;
+    hi = lo + step;
+    fHi = f(hi);
+  }
+  if (fHi < 0) return hi;
+  let side = 0;
+  for (let k = 0; k < 100; k++) {
+    const x = hi - (fHi * (hi - lo)) / (fHi - fLo);
+    if (!(x > lo && x < hi)) return fHi === 0 ? hi : 0.5 * (lo + hi);
+    const fx = f(x);
+    if (fx === 0) return x;
+    if (fx < 0) {
+      lo = x;
+      fLo = fx;
+      if (side === -1) fHi *= 0.5;
+      side = -1;
+    } else {
+      hi = x;
+      fHi = fx;
+      if (side === 1) fLo *= 0.5;
+      side = 1;
+    }
+    if (hi - lo <= 1e-14 * Math.abs(hi) + 1e-14) break;
+  }
+  return 0.5 * (lo + hi);
+}

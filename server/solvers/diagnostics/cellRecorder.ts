@@ -1,0 +1,97 @@
+import { ARRIVAL_RISE, type CellResults } from '../../../shared/case/resultFile';
+import type { Grid } from '../geometry/grid';
+import type { Workspace } from '../workspace';
+
+/** Follows every cell at every step: peaks, their times, arrivals. */
+export interface CellRecorder {
+  follow(time: number): void;
+  /** One entry a cell of this moment, overwritten by the next call */
+  snapshot(): { stage: Float64Array; flow: Float64Array; velocity: Float64Array };
+  results(): CellResults;
+}
+
+export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecorder {
+  const { n, area, stage, bed, dryDepth, fluxArea } = workspace;
+  const initialStage = new Float64Array(n);
+  const peakStage = new Float64Array(n).fill(-Infinity);
+  const peakStageTime = new Float64Array(n);
+  const peakFlow = new Float64Array(n);
+  const peakFlowTime = new Float64Array(n);
+  const peakVelocity = new Float64Array(n);
+  const arrival = new Float64Array(n).fill(NaN);
+  const arrivalStage = new Float64Array(n);
+  const view = {
+    stage: new Float64Array(n),
+    flow: new Float64Array(n),
+    velocity: new Float64Array(n),
+  };
+  let started = false;
+
+  function start(): void {
+    started = true;
+    for (let i = 1; i <= n; i++) {
+      initialStage[i - 1] = wetStage(i);
+      arrivalStage[i - 1] = initialStage[i - 1] + ARRIVAL_RISE;
+    }
+  }
+
+  function wetStage(i: number): number {
+    return stage[i] - bed[i] > dryDepth ? stage[i] : bed[i];
+  }
+
+  return {
+    follow(time) {
+      if (!started) start();
+      for (let i = 1; i <= n; i++) {
+        const k = i - 1;
+        const eta = stage[i];
+        if (eta - bed[i] <= dryDepth) continue;
+        if (eta > peakStage[k]) {
+          peakStage[k] = eta;
+          peakStageTime[k] = time;
+          if (eta >= arrivalStage[k]) {
+            arrivalStage[k] = Infinity;
+            arrival[k] = time;
+          }
+        }
+        const flow = 0.5 * (fluxArea[i - 1] + fluxArea[i]);
+        const size = Math.abs(flow);
+        if (size > Math.abs(peakFlow[k])) {
+          peakFlow[k] = flow;
+          peakFlowTime[k] = time;
+        }
+        const speed = Math.abs(peakVelocity[k]);
+        if (size > speed * area[i]) peakVelocity[k] = flow / area[i];
+      }
+    },
+    snapshot() {
+      for (let i = 1; i <= n; i++) {
+        const k = i - 1;
+        const wet = stage[i] - bed[i] > dryDepth;
+        view.stage[k] = wet ? stage[i] : bed[i];
+        view.flow[k] = wet ? 0.5 * (fluxArea[i - 1] + fluxArea[i]) : 0;
+        view.velocity[k] = wet ? view.flow[k] / area[i] : 0;
+      }
+      return view;
+    },
+    results() {
+      const { stage: finalStage, flow: finalFlow } = this.snapshot();
+      for (let k = 0; k < n; k++) if (peakStage[k] === -Infinity) peakStage[k] = bed[k + 1];
+      return {
+        chainage: [...grid.chainage],
+        bed: [...grid.bed],
+        initialStage: [...initialStage],
+        peakStage: [...peakStage],
+        peakStageTime: [...peakStageTime],
+        peakDepth: Array.from(peakStage, (eta, k) => eta - bed[k + 1]),
+        peakFlow: [...peakFlow],
+        peakFlowTime: [...peakFlowTime],
+        peakVelocity: [...peakVelocity],
+        arrival: Array.from(arrival, (time) => (Number.isNaN(time) ? null : time)),
+        finalStage: [...finalStage],
+        finalDepth: Array.from(finalStage, (eta, k) => eta - bed[k + 1]),
+        finalFlow: [...finalFlow],
+      };
+    },
+  };
+}

@@ -1,0 +1,121 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
+import { ARRIVAL_RISE, type SectionResult } from '../../../shared/case/resultFile';
+import { createCellTables } from '../geometry/cellTables';
+import type { Grid } from '../geometry/grid';
+import { sectionShape } from '../geometry/sectionProperties';
+import { TABLE_STRIDE, writeSectionTable } from '../geometry/sectionTable';
+import type { Workspace } from '../workspace';
+import { placeOf } from './places';
+
+/** Follows the surveyed sections: their series at output times, their peaks and arrivals at every step. */
+export interface SectionRecorder {
+  follow(time: number): void;
+  output(): void;
+  results(): SectionResult[];
+}
+
+export function createSectionRecorder(
+  { sections }: CaseFile,
+  workspace: Workspace,
+  grid: Grid,
+): SectionRecorder {
+  const { stage, bed: cellBed, fluxArea, gravity, dryDepth } = workspace;
+  const count = sections.length;
+  const table = new Float64Array(count * TABLE_STRIDE);
+  const levels = new Int32Array(count);
+  const level = new Int32Array(count);
+  const bed = new Float64Array(count);
+  sections.forEach((section, k) => {
+    const shape = sectionShape(section);
+    bed[k] = shape.bed;
+    levels[k] = writeSectionTable(shape, table, k * TABLE_STRIDE);
+  });
+  const tables = createCellTables({ table, levels, level, gravity });
+  const places = sections.map((section) => placeOf(section, grid));
+
+  const now = { stage: 0, flow: 0, area: 0 };
+  const initial = new Float64Array(count).fill(NaN);
+  const results: SectionResult[] = sections.map(({ id, chainage }, k) => ({
+    id,
+    chainage,
+    bed: bed[k],
+    stage: [],
+    depth: [],
+    flow: [],
+    area: [],
+    velocity: [],
+    froude: [],
+    peak: { stage: -Infinity, stageTime: 0, flow: 0, flowTime: 0, depth: 0, velocity: 0 },
+    arrival: null,
+  }));
+
+  /** Stage, flow and area of section k at this moment, into `now`. */
+  function look(k: number): void {
+    const { left, right, weight, face, faceWeight } = places[k];
+    const leftWet = stage[left] - cellBed[left] > dryDepth;
+    const rightWet = stage[right] - cellBed[right] > dryDepth;
+    now.stage = bed[k];
+    now.flow = 0;
+    now.area = 0;
+    // Beside dry ground the water stands level.
+    const eta =
+      leftWet && rightWet
+        ? (1 - weight) * stage[left] + weight * stage[right]
+        : leftWet
+          ? stage[left]
+          : rightWet
+            ? stage[right]
+            : bed[k];
+    if (eta - bed[k] <= dryDepth) return;
+    now.stage = eta;
+    now.flow = (1 - faceWeight) * fluxArea[face] + faceWeight * fluxArea[face + 1];
+    now.area = tables.areaAt(k, eta);
+    level[k] = (tables.rowAtStage(k, eta) - k * TABLE_STRIDE) / 8;
+  }
+
+  return {
+    follow(time) {
+      for (let k = 0; k < count; k++) {
+        look(k);
+        const result = results[k];
+        const peak = result.peak;
+        if (Number.isNaN(initial[k])) initial[k] = now.stage;
+        if (now.stage > peak.stage) {
+          peak.stage = now.stage;
+          peak.stageTime = time;
+        }
+        if (Math.abs(now.flow) > Math.abs(peak.flow)) {
+          peak.flow = now.flow;
+          peak.flowTime = time;
+        }
+        if (now.area > 0) {
+          const velocity = now.flow / now.area;
+          if (Math.abs(velocity) > Math.abs(peak.velocity)) peak.velocity = velocity;
+        }
+        if (result.arrival === null && now.stage - initial[k] >= ARRIVAL_RISE) {
+          result.arrival = time;
+        }
+      }
+    },
+    output() {
+      for (let k = 0; k < count; k++) {
+        look(k);
+        const result = results[k];
+        const velocity = now.area > 0 ? now.flow / now.area : 0;
+        const width = tables.widthAt(k, now.stage);
+        result.stage.push(now.stage);
+        result.depth.push(now.stage - bed[k]);
+        result.flow.push(now.flow);
+        result.area.push(now.area);
+        result.velocity.push(velocity);
+        result.froude.push(
+          now.area > 0 ? Math.abs(velocity) / Math.sqrt((gravity * now.area) / width) : 0,
+        );
+      }
+    },
+    results() {
+      for (const { peak, bed: lowest } of results) peak.depth = peak.stage - lowest;
+      return results;
+    },
+  };
+}

@@ -1,0 +1,86 @@
+import type { SectionShape } from './sectionShape';
+
+/** Most levels that a section's table can have. */
+export const MAX_LEVELS = 72;
+
+const BASE = 40;
+const KINKS = 20;
+const ABOVE = 10;
+const GROWTH = 1.45;
+
+/**
+ * Elevations (m, ascending, the first at the bed) of the levels of a section's table: graded towards the bed up to the
+ * top of the survey, moved onto the elevations where the top width jumps or bends most, and continued above the survey
+ * to some forty times its height, where only the vertical extension is left.
+ */
+export function tableLevels(shape: SectionShape): number[] {
+  const { z, bed } = shape;
+  let top = bed;
+  for (const elevation of z) if (elevation > top) top = elevation;
+  const height = Math.max(top - bed, 0.5);
+  const kinks = strongestKinks(shape, height / BASE);
+
+  const levels: number[] = [bed];
+  let next = 0;
+  for (let k = 1; k <= BASE; k++) {
+    const level = k === BASE ? bed + height : bed + height * (k / BASE) ** 1.5;
+    const spacing = level - (bed + height * ((k - 1) / BASE) ** 1.5);
+    while (next < kinks.length && kinks[next] < level) levels.push(kinks[next++]);
+    const nearBelow = level - levels[levels.length - 1] < 0.3 * spacing && levels.length > 1;
+    const nearAbove = next < kinks.length && kinks[next] - level < 0.3 * spacing;
+    if (k === BASE || !(nearBelow || nearAbove)) levels.push(level);
+  }
+  for (let k = 1; k <= ABOVE; k++) levels.push(bed + height * GROWTH ** k);
+  return levels;
+}
+
+/** Elevations where B(η) jumps or bends most, ascending, none closer than 2 % of `spacing` to another or to the ends. */
+function strongestKinks(shape: SectionShape, spacing: number): number[] {
+  const { x, z, bed } = shape;
+  const at: number[] = [];
+  const jump: number[] = [];
+  const bend: number[] = [];
+  const reach: number[] = [];
+  const add = (elevation: number, widthJump: number, slope: number, dx: number): void => {
+    at.push(elevation);
+    jump.push(widthJump);
+    bend.push(slope);
+    reach.push(dx);
+  };
+  let top = bed;
+  for (let k = 0; k + 1 < z.length; k++) {
+    const dx = x[k + 1] - x[k];
+    const low = Math.min(z[k], z[k + 1]);
+    const high = Math.max(z[k], z[k + 1]);
+    top = Math.max(top, high);
+    if (dx <= 0) continue;
+    if (high === low) add(low, dx, 0, 0);
+    else {
+      add(low, 0, dx / (high - low), dx);
+      add(high, 0, -dx / (high - low), dx);
+    }
+  }
+  const order = at.map((_, k) => k).sort((a, b) => at[a] - at[b]);
+  const found: { elevation: number; weight: number }[] = [];
+  for (let m = 0; m < order.length; ) {
+    const elevation = at[order[m]];
+    let widthJump = 0;
+    let slope = 0;
+    let dx = 0;
+    for (; m < order.length && at[order[m]] === elevation; m++) {
+      widthJump += jump[order[m]];
+      slope += bend[order[m]];
+      dx += reach[order[m]];
+    }
+    found.push({ elevation, weight: widthJump + Math.min(Math.abs(slope) * spacing, dx) });
+  }
+  const least = 1e-4 * (x[x.length - 1] - x[0]);
+  const apart = 0.02 * spacing;
+  const chosen: number[] = [];
+  for (const { elevation, weight } of found.sort((a, b) => b.weight - a.weight)) {
+    if (chosen.length === KINKS || weight <= least) break;
+    const clear = chosen.every((other) => Math.abs(other - elevation) > apart);
+    if (clear && elevation > bed + apart && elevation < top - apart) chosen.push(elevation);
+  }
+  return chosen.sort((a, b) => a - b);
+}

@@ -1,0 +1,77 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
+import type { RunWarning } from '../../../shared/case/resultFile';
+import type { CellState } from '../geometry/cellState';
+import type { CellTables } from '../geometry/cellTables';
+import type { Grid } from '../geometry/grid';
+import type { Laterals } from '../sources/laterals';
+import { createSeries } from '../sources/series';
+import type { Workspace } from '../workspace';
+import { steadyState } from './steadyState';
+
+/** Puts the initial water into the cells. Tells whether it still has to settle. */
+export function setInitialState(
+  caseFile: CaseFile,
+  workspace: Workspace,
+  tables: CellTables,
+  cellState: CellState,
+  grid: Grid,
+  laterals: Laterals,
+  warn: (warning: RunWarning) => void,
+): boolean {
+  const { n, flow, bed, stage, dryDepth } = workspace;
+  const { initial } = caseFile;
+  const put = (i: number, eta: number, q: number): void => {
+    cellState.placeAtStage(i, Math.max(eta, bed[i]));
+    flow[i] = stage[i] - bed[i] > dryDepth ? q : 0;
+  };
+
+  switch (initial.kind) {
+    case 'still':
+      for (let i = 1; i <= n; i++) put(i, initial.stage, 0);
+      return false;
+    case 'profile': {
+      const stageAt = createSeries(initial.chainages, initial.stages);
+      const flowAt = createSeries(initial.chainages, initial.flows);
+      for (let i = 1; i <= n; i++) {
+        put(i, stageAt(grid.chainage[i - 1]), flowAt(grid.chainage[i - 1]));
+      }
+      return false;
+    }
+    case 'dam': {
+      const above = initial.stageAbove ?? -Infinity;
+      const below = initial.stageBelow ?? -Infinity;
+      for (let i = 1; i <= n; i++) {
+        put(i, grid.chainage[i - 1] < initial.chainage ? above : below, 0);
+      }
+      const face = Math.round((initial.chainage - grid.start) / grid.dx) * grid.dx + grid.start;
+      if (Math.abs(face - initial.chainage) > 1e-6 * grid.dx) {
+        warn({
+          code: 'damMoved',
+          message:
+            `The dam stands at chainage ${initial.chainage.toFixed(2)} m; the nearest boundary between cells is ` +
+            `at ${face.toFixed(2)} m, where the water is parted. Choose a cell size that divides the ` +
+            `distance if that matters.`,
+          chainage: face,
+          time: 0,
+        });
+      }
+      return false;
+    }
+    case 'steady': {
+      const { stages, flows } = steadyState(caseFile, workspace, tables, grid, laterals);
+      for (let i = 1; i <= n; i++) put(i, stages[i], flows[i]);
+      const moves = flows.some((q) => q > 0) || caseFile.upstream.kind === 'stage';
+      if (!moves) {
+        warn({
+          code: 'initialDry',
+          message:
+            'Nothing flows in at the start, so the reach begins with still water up to the outlet stage and dry ' +
+            'beyond it. Start the inflow with a base flow if the river carries water.',
+          chainage: null,
+          time: 0,
+        });
+      }
+      return moves;
+    }
+  }
+}

@@ -1,0 +1,80 @@
+import type { Rhs } from '../rhs';
+import type { Laterals } from '../sources/laterals';
+import type { Steps } from '../time/steps';
+import type { Workspace } from '../workspace';
+
+/** Flows that agree with the steady balance to this share count as steady. */
+const STEADY = 1e-8;
+/** More cell updates than this are not spent on it … */
+const BUDGET = 1e8;
+/** … but so many steps are always. */
+const LEAST_STEPS = 2000;
+const CHECK_EVERY = 50;
+
+export interface Settled {
+  /** Largest difference of the flow from the steady balance, as a share of the largest flow */
+  residual: number;
+  /** Where (m) */
+  chainage: number;
+  steps: number;
+}
+
+/**
+ * Lets the state settle with everything frozen at time 0, until the flow is that of the steady balance, it stops getting
+ * nearer, or the effort is spent.
+ */
+export function settle(
+  workspace: Workspace,
+  rhs: Rhs,
+  steps: Steps,
+  timeStep: (endSpeed: number, time: number) => number,
+  laterals: Laterals,
+  order: 1 | 2,
+  start: number,
+  poll: () => void,
+): Settled {
+  const { n, dx, fluxArea } = workspace;
+  const most = Math.max(LEAST_STEPS, Math.min(200_000, Math.floor(BUDGET / n)));
+  const patience = 2000 + 4 * n;
+  laterals.setTime(0);
+  let best = Infinity;
+  let bestStep = 0;
+  let settled: Settled = { residual: Infinity, chainage: start, steps: 0 };
+
+  for (let step = 0; ; step++) {
+    const endSpeed = rhs(0);
+    if (step % CHECK_EVERY === 0) {
+      poll();
+      settled = { ...imbalance(), steps: step };
+      if (settled.residual < 0.5 * best) {
+        best = settled.residual;
+        bestStep = step;
+      }
+      if (settled.residual <= STEADY || step >= most || step - bestStep > patience) return settled;
+    }
+    const dt = timeStep(endSpeed, 0);
+    if (!(dt < Infinity)) return settled;
+    steps.predict(dt);
+    if (order === 2) {
+      rhs(0);
+      steps.correct(dt);
+    } else steps.accept(dt);
+  }
+
+  function imbalance(): { residual: number; chainage: number } {
+    let expected = fluxArea[0];
+    let scale = Math.abs(expected);
+    let worst = 0;
+    let place = 0;
+    for (let i = 1; i <= n; i++) {
+      expected += laterals.rate[i];
+      scale = Math.max(scale, Math.abs(expected), Math.abs(fluxArea[i]));
+      const off = Math.abs(fluxArea[i] - expected);
+      if (off > worst) {
+        worst = off;
+        place = i;
+      }
+    }
+    return { residual: scale > 0 ? worst / scale : 0, chainage: start + place * dx };
+  }
+}

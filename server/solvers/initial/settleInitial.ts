@@ -1,0 +1,49 @@
+import { createVolumeLedger } from '../diagnostics/volumeLedger';
+import type { RunWarnings } from '../diagnostics/runWarnings';
+import type { CellState } from '../geometry/cellState';
+import type { Grid } from '../geometry/grid';
+import type { Polling } from '../polling';
+import type { Rhs } from '../rhs';
+import type { Laterals } from '../sources/laterals';
+import { createSteps } from '../time/steps';
+import type { Workspace } from '../workspace';
+import { settle } from './settle';
+
+/** A flow that is off by more than this share of the inflow is worth a warning. */
+const WORTH_WARNING = 1e-3;
+
+export interface SettleParts {
+  workspace: Workspace;
+  cellState: CellState;
+  laterals: Laterals;
+  rhs: Rhs;
+  timeStep: (endSpeed: number, time: number) => number;
+  order: 1 | 2;
+  grid: Grid;
+}
+
+/** Lets the initial steady state settle, on books of its own, and warns where it did not. */
+export function settleInitial(parts: SettleParts, polling: Polling, warnings: RunWarnings): void {
+  const { workspace, cellState, laterals, rhs, timeStep, order, grid } = parts;
+  const steps = createSteps(workspace, cellState, laterals, createVolumeLedger(workspace));
+  const { residual, chainage } = settle(
+    workspace,
+    rhs,
+    steps,
+    timeStep,
+    laterals,
+    order,
+    grid.start,
+    polling.pollStart,
+  );
+  if (residual <= WORTH_WARNING) return;
+  warnings.add({
+    code: 'initialNotSettled',
+    message:
+      `The initial steady state did not settle: at chainage ${chainage.toFixed(0)} m the flow is still ` +
+      `${(100 * residual).toPrecision(2)} % off. Begin the inflow with some hours of steady flow, or give the ` +
+      'initial state as a profile.',
+    chainage,
+    time: 0,
+  });
+}

@@ -1,0 +1,74 @@
+import { createEndSection } from '../boundaries/endSection';
+import { risingRoot } from '../boundaries/risingRoot';
+import type { CellTables } from '../geometry/cellTables';
+import type { Workspace } from '../workspace';
+
+/**
+ * The water surface of steady flow, integrated section by section over index 0..n+1:
+ *   [Q²/A] + g mean(A) [η] + g Δx mean(A S) = 0,  S = Q|Q|/K²,
+ * first upstream from `outletStage` on the subcritical branch, with critical depth where there is none; then downstream
+ * from every such control on the supercritical branch, as far as its force Q²/A + g I1 is the greater (the rest is a
+ * hydraulic jump). Chow (1959), chapters 9-10 and 15. Returns stages (m); `flows` are m³/s, not negative.
+ */
+export function steadyProfile(
+  workspace: Workspace,
+  tables: CellTables,
+  flows: Float64Array,
+  outletStage: number,
+): Float64Array {
+  const { n, dx, gravity, bed } = workspace;
+  const stages = new Float64Array(n + 2);
+  const critical = new Float64Array(n + 2);
+  const sections = Array.from({ length: n + 2 }, (_, i) => createEndSection(workspace, tables, i));
+
+  // Momentum flux Q²/A and friction g A S at a stage.
+  const carried = (i: number, eta: number): number => flows[i] ** 2 / tables.areaAt(i, eta);
+  const braked = (i: number, eta: number): number => {
+    const k = tables.conveyanceAt(i, eta);
+    return (gravity * tables.areaAt(i, eta) * flows[i] ** 2) / (k * k);
+  };
+  const distance = (i: number): number => (i === 0 || i === n ? 0.5 * dx : dx);
+  /** Residual of the balance between i and i + 1. */
+  const residual = (i: number, eta: number, etaNext: number): number =>
+    carried(i + 1, etaNext) -
+    carried(i, eta) +
+    0.5 * gravity * (tables.areaAt(i, eta) + tables.areaAt(i + 1, etaNext)) * (etaNext - eta) +
+    0.5 * distance(i) * (braked(i, eta) + braked(i + 1, etaNext));
+
+  for (let i = 0; i < n + 2; i++) {
+    critical[i] = flows[i] > 0 ? sections[i].criticalStage(flows[i]) : bed[i];
+  }
+  stages[n + 1] = Math.max(outletStage, critical[n + 1]);
+  for (let i = n; i >= 0; i--) {
+    const next = stages[i + 1];
+    if (flows[i] > 0 && flows[i + 1] > 0) {
+      stages[i] = risingRoot((eta) => -residual(i, eta, next), critical[i], 0.1);
+    } else {
+      stages[i] = Math.max(next, bed[i]);
+    }
+  }
+
+  let shooting = stages[0] === critical[0] && flows[0] > 0;
+  if (shooting && bed[0] > bed[1]) {
+    const slope = (bed[0] - bed[1]) / (0.5 * dx);
+    stages[0] = Math.min(critical[0], sections[0].normalStage(flows[0], slope));
+  }
+  for (let i = 0; i <= n; i++) {
+    shooting = shooting || stages[i] === critical[i];
+    if (!shooting || !(flows[i] > 0) || !(flows[i + 1] > 0)) continue;
+    const j = i + 1;
+    const here = stages[i];
+    if (residual(i, here, critical[j]) >= 0) {
+      shooting = false;
+      continue;
+    }
+    const floor = bed[j] + 1e-6 * Math.max(critical[j] - bed[j], 1e-6);
+    const fast = risingRoot((eta) => -residual(i, here, eta), floor, 0.5 * (critical[j] - floor));
+    const wins =
+      sections[j].forceAt(fast, flows[j]) > sections[j].forceAt(stages[j], flows[j]) ||
+      stages[j] === critical[j];
+    if (wins && fast < critical[j]) stages[j] = fast;
+    else shooting = false;
+  }
+  return stages;
+}

@@ -1,0 +1,69 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
+import { outletControl } from '../boundaries/downstreamBoundary';
+import { createEndSection } from '../boundaries/endSection';
+import { risingRoot } from '../boundaries/risingRoot';
+import type { CellTables } from '../geometry/cellTables';
+import type { Grid } from '../geometry/grid';
+import type { Laterals } from '../sources/laterals';
+import { createSeries } from '../sources/series';
+import type { Workspace } from '../workspace';
+import { steadyProfile } from './steadyProfile';
+
+export interface SteadyState {
+  /** m and m³/s, index 0..n+1 */
+  stages: Float64Array;
+  flows: Float64Array;
+}
+
+/** Steady flow for what upstream, downstream and laterals say at time 0, by integration of the profile. */
+export function steadyState(
+  caseFile: CaseFile,
+  workspace: Workspace,
+  tables: CellTables,
+  grid: Grid,
+  laterals: Laterals,
+): SteadyState {
+  const { n, bed } = workspace;
+  const { upstream, downstream } = caseFile;
+
+  const flowsFor = (inflow: number): Float64Array =>
+    Float64Array.from({ length: n + 2 }, (_, i) => {
+      const x = i === 0 ? grid.start : i > n ? grid.start + n * grid.dx : grid.chainage[i - 1];
+      return Math.max(0, inflow + laterals.totalAbove(x, 0));
+    });
+  const stateFor = (inflow: number): SteadyState => {
+    const flows = flowsFor(inflow);
+    const outlet = outletStage(flows[n + 1]);
+    return { flows, stages: steadyProfile(workspace, tables, flows, outlet) };
+  };
+
+  switch (upstream.kind) {
+    case 'inflow':
+      return stateFor(createSeries(upstream.times, upstream.flows)(0));
+    case 'wall':
+      return stateFor(0);
+    case 'stage': {
+      const wanted = createSeries(upstream.times, upstream.stages)(0);
+      if (stateFor(0).stages[0] >= wanted) return stateFor(0);
+      const inflow = risingRoot((q) => stateFor(q).stages[0] - wanted, 0, 1);
+      return stateFor(inflow);
+    }
+  }
+
+  function outletStage(flow: number): number {
+    const section = createEndSection(workspace, tables, n + 1);
+    const floor = bed[n + 1];
+    if (downstream.kind === 'stage') {
+      return Math.max(floor, createSeries(downstream.times, downstream.stages)(0));
+    }
+    if (!(flow > 0)) return floor;
+    const control = outletControl(workspace, tables, downstream);
+    if (control) {
+      const released = (eta: number): number =>
+        Math.min(control(eta), section.criticalFlowAt(eta)) - flow;
+      return risingRoot(released, floor, 1);
+    }
+    const slope = (bed[n] - floor) / (0.5 * grid.dx);
+    return slope > 0 ? section.normalStage(flow, slope) : section.criticalStage(flow);
+  }
+}

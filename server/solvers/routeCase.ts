@@ -1,0 +1,139 @@
+import { CASE_DEFAULTS, type CaseFile } from '../../shared/case/caseFile';
+import { ARRIVAL_RISE, RESULT_FORMAT, type ResultFile } from '../../shared/case/resultFile';
+import { createDownstreamBoundary } from './boundaries/downstreamBoundary';
+import { createUpstreamBoundary } from './boundaries/upstreamBoundary';
+import { caseHash } from './caseHash';
+import { createCellRecorder } from './diagnostics/cellRecorder';
+import { createRunWarnings } from './diagnostics/runWarnings';
+import { createSectionRecorder } from './diagnostics/sectionRecorder';
+import { createVolumeLedger } from './diagnostics/volumeLedger';
+import { createCellState } from './geometry/cellState';
+import { createCellTables } from './geometry/cellTables';
+import { shapedGrid } from './geometry/grid';
+import { setInitialState } from './initial/initialState';
+import { settleInitial } from './initial/settleInitial';
+import { createPolling } from './polling';
+import { createRhs } from './rhs';
+import type { RouteOptions } from './routeOptions';
+import { RunFailed } from './runErrors';
+import { createLaterals } from './sources/laterals';
+import { outputTimes, stepTowards } from './time/outputTimes';
+import { createSteps } from './time/steps';
+import { createTimeStep } from './time/timeStep';
+import { SOLVER_VERSION } from './version';
+import { createWorkspace } from './workspace';
+
+/** A step below this share of the duration means that the run would never end. */
+const SMALLEST_STEP = 1e-10;
+
+/**
+ * Routes a case that validateCase accepts. Synchronous, pure, and the same to the bit for the same case, whatever the
+ * caller watches. Throws RunFailed where the computation cannot go on, RunCancelled where `shouldStop` says so.
+ */
+export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): ResultFile {
+  const began = performance.now();
+  const { numerics } = caseFile;
+  const { duration, outputInterval } = numerics;
+  const order = numerics.order ?? CASE_DEFAULTS.order;
+  const courant = numerics.courant ?? CASE_DEFAULTS.courant;
+
+  const grid = shapedGrid(caseFile);
+  const workspace = createWorkspace(
+    grid,
+    caseFile.gravity ?? CASE_DEFAULTS.gravity,
+    numerics.dryDepth ?? CASE_DEFAULTS.dryDepth,
+  );
+  const tables = createCellTables(workspace);
+  const cellState = createCellState(workspace, tables);
+  const laterals = createLaterals(caseFile.laterals, grid);
+  const rhs = createRhs(
+    workspace,
+    tables,
+    createUpstreamBoundary(workspace, tables, caseFile.upstream),
+    createDownstreamBoundary(workspace, tables, caseFile.downstream),
+    order,
+  );
+  const timeStep = createTimeStep(workspace, tables, laterals, courant, grid.chainage);
+  const ledger = createVolumeLedger(workspace);
+  const steps = createSteps(workspace, cellState, laterals, ledger);
+  const warnings = createRunWarnings(caseFile, workspace, grid);
+  const polling = createPolling(options, duration);
+
+  const mustSettle = setInitialState(
+    caseFile,
+    workspace,
+    tables,
+    cellState,
+    grid,
+    laterals,
+    warnings.add,
+  );
+  if (mustSettle) {
+    settleInitial({ workspace, cellState, laterals, rhs, timeStep, order, grid }, polling, warnings);
+  }
+
+  const sectionRecorder = createSectionRecorder(caseFile, workspace, grid);
+  const cellRecorder = createCellRecorder(workspace, grid);
+  const times = outputTimes(duration, outputInterval);
+  ledger.open();
+  let time = 0;
+  let stepCount = 0;
+  let next = 0;
+  for (;;) {
+    if (laterals.any) laterals.setTime(time);
+    const endSpeed = rhs(time);
+    sectionRecorder.follow(time);
+    cellRecorder.follow(time);
+    if (time === times[next]) {
+      sectionRecorder.output();
+      warnings.watch(time);
+      options.onOutput?.({ index: next, time, ...cellRecorder.snapshot() });
+      next++;
+      if (next === times.length) break;
+    }
+    const largest = timeStep(endSpeed, time);
+    if (largest < SMALLEST_STEP * duration) {
+      throw new RunFailed(
+        'the time step became too small to ever reach the end. Use larger cells, or check the inflow for a ' +
+          'mistaken unit',
+        time,
+        null,
+      );
+    }
+    const dt = stepTowards(time, times[next], largest);
+    const until = dt === times[next] - time ? times[next] : time + dt;
+
+    steps.predict(dt);
+    if (order === 2) {
+      if (laterals.any) laterals.setTime(until);
+      rhs(until);
+      steps.correct(dt);
+    } else steps.accept(dt);
+    time = until;
+    stepCount++;
+    polling.poll(time, stepCount);
+  }
+  polling.finish(time, stepCount);
+
+  const sectionResults = sectionRecorder.results();
+  return {
+    format: RESULT_FORMAT,
+    caseHash: caseHash(caseFile),
+    solver: SOLVER_VERSION,
+    times,
+    arrivalThreshold: {
+      text:
+        `The wave has arrived when the stage is ${ARRIVAL_RISE} m above its initial value; ` +
+        `where it was dry, when the water is ${ARRIVAL_RISE} m deep.`,
+      rise: ARRIVAL_RISE,
+      depth: ARRIVAL_RISE,
+    },
+    sections: sectionResults,
+    cells: cellRecorder.results(),
+    volume: ledger.balance(),
+    steps: stepCount,
+    cellUpdates: stepCount * grid.cells * order,
+    seconds: (performance.now() - began) / 1000,
+    warnings: warnings.conclude(sectionResults, steps.missing()),
+  };
+}
