@@ -1,20 +1,32 @@
 import { buildPassport } from './auth/passport';
 import { buildSessions } from './auth/sessions';
+import { buildBackground } from './background';
 import { migrate } from './database/migrate';
 import type { Env } from './env';
+import { buildMailer } from './mail/buildMailer';
 import { authenticateWith } from './middleware/authenticate';
+import { buildRateLimits } from './middleware/rateLimits';
 import { buildPlatform, type Overrides } from './platform';
+import { buildAccounts } from './services/accounts';
 
 /** The only constructor of dependencies: connects, brings the schema up to date, and builds every service once. */
 export async function compose(env: Env, overrides: Overrides = {}) {
   const { platform, close } = buildPlatform(env, overrides);
   try {
     await migrate(platform.sequelize);
+    const mailer = buildMailer(env, platform.now);
+    const background = buildBackground(platform.log);
+    platform.onClose(() => background.idle().finally(mailer.close));
+    const sessions = buildSessions(platform);
     return {
       ...platform,
       close,
       authenticate: authenticateWith(buildPassport(platform)),
-      sessions: buildSessions(platform),
+      background,
+      limits: buildRateLimits(),
+      mailer,
+      sessions,
+      accounts: buildAccounts(platform, { background, mailer, sessions }),
     };
   } catch (error) {
     await close();

@@ -1,4 +1,5 @@
 import type { Request, RequestHandler, Response } from 'express';
+import type { SignedIn } from '../auth/passport';
 import { forbidden, notFound, unauthenticated } from '../errors';
 import { decide } from '../policies/decide';
 import type { Action } from '../policies/policies';
@@ -39,10 +40,13 @@ export const openToAll: DeclaredHandler = Object.assign(
 );
 
 /** Who asks; throws `unauthenticated` where `authenticate` did not run. */
-export function actorOf(res: Response): Actor {
-  const actor = res.locals['actor'] as Actor | undefined;
-  if (!actor) throw unauthenticated();
-  return actor;
+export const actorOf = (res: Response): Actor => signedInOf(res);
+
+/** The same with the session; throws alike. */
+export function signedInOf(res: Response): SignedIn {
+  const signedIn = res.locals['actor'] as SignedIn | undefined;
+  if (!signedIn) throw unauthenticated();
+  return signedIn;
 }
 
 /** What `authorize` loaded. */

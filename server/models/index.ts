@@ -1,6 +1,9 @@
 import type { Sequelize } from 'sequelize';
 import { defineFirm } from './Firm';
+import { defineInvitation } from './Invitation';
+import { defineOneTimeToken } from './OneTimeToken';
 import { defineRefreshToken } from './RefreshToken';
+import { defineSignInAttempt } from './SignInAttempt';
 import { defineStudy } from './Study';
 import { defineStudyMember } from './StudyMember';
 import { defineStation } from './Station';
@@ -16,7 +19,10 @@ import { defineUser } from './User';
 export function defineModels(sequelize: Sequelize) {
   const models = {
     Firm: defineFirm(sequelize),
+    Invitation: defineInvitation(sequelize),
+    OneTimeToken: defineOneTimeToken(sequelize),
     RefreshToken: defineRefreshToken(sequelize),
+    SignInAttempt: defineSignInAttempt(sequelize),
     Study: defineStudy(sequelize),
     StudyMember: defineStudyMember(sequelize),
     Station: defineStation(sequelize),
@@ -29,6 +35,8 @@ export function defineModels(sequelize: Sequelize) {
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
+  models.Invitation.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
+  models.Invitation.belongsTo(models.User, { as: 'invitedBy', foreignKey: 'invitedById' });
   models.Study.belongsTo(models.User, { as: 'creator', foreignKey: 'createdBy' });
   models.StudyMember.belongsTo(models.User, { as: 'user', foreignKey: 'userId' });
   models.SurveyRevision.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
