@@ -1,5 +1,5 @@
 import type { Cell } from '../workbook/types';
-import { parseNumber } from './parseNumber';
+import { parseNumber } from '../../../shared/numbers/parseNumber';
 
 /** Whether a cell holds a number, be it as text and with either decimal mark. */
 export function isNumeric(cell: Cell | undefined): boolean {

@@ -1,7 +1,7 @@
 import type { LengthUnit } from '../../../shared/surveys/types';
 import { inUnit, unitOf } from '../headings/lengthUnits';
-import type { DecimalMark } from './decimalMark';
-import { parseNumber } from './parseNumber';
+import type { DecimalMark } from '../../../shared/numbers/decimalMark';
+import { parseNumber } from '../../../shared/numbers/parseNumber';
 
 /**
  * A length in the unit of its column: a plain number, a number with its own unit (`12.4 km`), or stationing

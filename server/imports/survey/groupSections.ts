@@ -1,6 +1,6 @@
 import { LIMITS } from '../../../shared/limits';
 import { METRES_PER } from '../headings/lengthUnits';
-import type { DecimalMark } from '../numbers/decimalMark';
+import type { DecimalMark } from '../../../shared/numbers/decimalMark';
 import { showNumber } from '../numbers/showNumber';
 import { cellText } from '../workbook/cellText';
 import type { Cell } from '../workbook/types';

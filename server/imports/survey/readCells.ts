@@ -1,7 +1,7 @@
 import type { LengthUnit } from '../../../shared/surveys/types';
-import type { DecimalMark } from '../numbers/decimalMark';
+import type { DecimalMark } from '../../../shared/numbers/decimalMark';
 import { parseLength } from '../numbers/parseLength';
-import { parseNumber } from '../numbers/parseNumber';
+import { parseNumber } from '../../../shared/numbers/parseNumber';
 import type { Cell } from '../workbook/types';
 import type { NumberCell } from './rawTypes';
 

@@ -1,6 +1,6 @@
 import type { LengthUnit } from '../../../shared/surveys/types';
 import { METRES_PER } from '../headings/lengthUnits';
-import type { DecimalMark } from '../numbers/decimalMark';
+import type { DecimalMark } from '../../../shared/numbers/decimalMark';
 import { showNumber } from '../numbers/showNumber';
 import type { FaultList } from './FaultList';
 import { isSkipped, readPoint } from './groupSections';

@@ -1,5 +1,5 @@
 import type { LengthUnit, MatchChoice, SurveyReading } from '../../../shared/surveys/types';
-import { decimalMark, type DecimalMark } from '../numbers/decimalMark';
+import { decimalMark, type DecimalMark } from '../../../shared/numbers/decimalMark';
 import type { Workbook } from '../workbook/types';
 import { readWorkbook } from '../workbook/readWorkbook';
 import { checkBanks, doubtOtherMarks } from './checks/checkBanks';

@@ -2,7 +2,7 @@ import type { LengthUnit } from '../../../shared/surveys/types';
 import { HEADING_WORDS } from '../headings/headingWords';
 import { METRES_PER } from '../headings/lengthUnits';
 import { readHeading } from '../headings/readHeading';
-import type { DecimalMark } from '../numbers/decimalMark';
+import type { DecimalMark } from '../../../shared/numbers/decimalMark';
 import { parseLength } from '../numbers/parseLength';
 import { cellText } from '../workbook/cellText';
 import type { Grid } from '../workbook/types';

@@ -1,0 +1,33 @@
+import type { Fault } from '../errors';
+import type { Section } from '../surveys/types';
+import { checkDownstream } from './checks/checkDownstream';
+import { checkInitial } from './checks/checkInitial';
+import { checkLaterals } from './checks/checkLaterals';
+import { checkNumerics } from './checks/checkNumerics';
+import { checkReachOf } from './checks/checkReachOf';
+import { checkUpstream } from './checks/checkUpstream';
+import { Findings } from './checks/Findings';
+import { reachFacts } from './checks/reachFacts';
+import type { ScenarioBody } from './schemas';
+
+/**
+ * What keeps a scenario from being routed on these sections (faults) and what a careful person would look at (doubts), each
+ * at its path in the body. Pure: the form uses it as one types, the server before a run. Covers all that the solver would refuse.
+ */
+export function checkScenario(
+  body: ScenarioBody,
+  sections: readonly Section[],
+): { faults: Fault[]; doubts: Fault[] } {
+  const findings = new Findings();
+  if (!body.name.trim()) findings.fault('name', 'Name the scenario.');
+  checkReachOf(sections, findings);
+  if (sections.length >= 2) {
+    const reach = reachFacts(sections);
+    checkUpstream(body, reach, findings);
+    checkLaterals(body, reach, findings);
+    checkDownstream(body, reach, findings);
+    checkInitial(body, reach, findings);
+    checkNumerics(body, reach, findings);
+  }
+  return { faults: findings.faults, doubts: findings.doubts };
+}

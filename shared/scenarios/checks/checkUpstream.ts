@@ -1,0 +1,93 @@
+import type { ScenarioBody } from '../schemas';
+import { inflowOf, peakOf } from '../hydrographs';
+import { checkSeries } from './checkSeries';
+import type { Findings } from './Findings';
+import type { ReachFacts } from './reachFacts';
+
+const notNegative = (flow: number) =>
+  flow < 0 ? 'Inflow cannot be negative; water is taken out by a lateral.' : null;
+
+export function checkUpstream(
+  { upstream, numerics }: ScenarioBody,
+  reach: ReachFacts,
+  findings: Findings,
+) {
+  switch (upstream.kind) {
+    case 'generated':
+      checkGenerated(upstream, findings);
+      break;
+    case 'table':
+      checkSeries(findings, {
+        path: 'upstream',
+        names: ['times', 'flows'],
+        columns: [upstream.times, upstream.flows],
+        missing: 'Paste or upload the inflow against time.',
+        first: 'Time',
+        value: notNegative,
+      });
+      break;
+    case 'stage':
+      checkSeries(findings, {
+        path: 'upstream',
+        names: ['times', 'stages'],
+        columns: [upstream.times, upstream.stages],
+        missing: 'Give the stage at the upstream end against time.',
+        first: 'Time',
+      });
+      if (upstream.stages.length > 0 && Math.max(...upstream.stages) <= reach.firstBed)
+        findings.doubt(
+          'upstream.stages',
+          `The stage never rises above the bed of the first section, ${reach.firstBed.toFixed(2)} m: no water comes in.`,
+        );
+      break;
+    case 'wall':
+      findings.doubt('upstream.kind', 'Nothing flows in at the upstream end.');
+  }
+  const peak = peakOf(inflowOf(upstream));
+  if (peak && numerics.duration !== null && peak.time >= numerics.duration)
+    findings.doubt(
+      'numerics.duration',
+      'The run ends before the inflow reaches its peak. Make it longer, or check the times.',
+    );
+  if (peak && peak.flow === 0) findings.doubt('upstream.kind', 'The inflow is nothing throughout.');
+}
+
+function checkGenerated(
+  inflow: Extract<ScenarioBody['upstream'], { kind: 'generated' }>,
+  findings: Findings,
+) {
+  const { baseFlow, peakFlow } = inflow;
+  const hasBase = findings.number(
+    'upstream.baseFlow',
+    baseFlow,
+    'Give the base flow; 0 for none.',
+    {
+      when: (flow) => flow < 0,
+      say: 'Base flow cannot be negative.',
+    },
+  );
+  const hasPeak = findings.number('upstream.peakFlow', peakFlow, 'Give the peak flow.', {
+    when: (flow) => flow <= 0,
+    say: 'Peak flow is above 0.',
+  });
+  if (hasBase && hasPeak && peakFlow! < baseFlow!)
+    findings.fault('upstream.peakFlow', 'The peak includes the base flow and cannot be below it.');
+  findings.number('upstream.timeToPeak', inflow.timeToPeak, 'Give the time from start to peak.', {
+    when: (time) => time <= 0,
+    say: 'Time to peak is above 0.',
+  });
+  if (inflow.shape === 'triangle')
+    findings.number(
+      'upstream.recessionRatio',
+      inflow.recessionRatio,
+      'Give the length of the recession over that of the rise; 1.67 is usual.',
+      { when: (ratio) => ratio <= 0 || ratio > 100, say: 'The ratio lies between 0 and 100.' },
+    );
+  if (inflow.shape === 'gamma')
+    findings.number(
+      'upstream.gammaExponent',
+      inflow.gammaExponent,
+      'Give the exponent of the shape; 3.7 is usual.',
+      { when: (m) => m < 0.1 || m > 100, say: 'The exponent lies between 0.1 and 100.' },
+    );
+}
