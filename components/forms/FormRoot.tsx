@@ -14,16 +14,17 @@ export function useForm(): YupForm {
   return form;
 }
 
-/** The form element: Enter sends it, a password manager knows it. Says below what the server refused. */
-export function FormRoot({
-  form,
-  label,
-  children,
-}: {
+interface FormRootProps {
   form: YupForm;
+  /** Name for screen readers. */
   label: string;
+  /** Heads what the server refused. */
+  failedTitle?: string;
   children: ReactNode;
-}) {
+}
+
+/** The form element: Enter sends it, a password manager knows it. Says below what the server refused. */
+export function FormRoot({ form, label, failedTitle = 'Not saved', children }: FormRootProps) {
   return (
     <FormContext.Provider value={form}>
       <form
@@ -36,17 +37,17 @@ export function FormRoot({
         style={{ display: 'flex', flexDirection: 'column', gap: space.two, minWidth: 0, margin: 0 }}
       >
         {children}
-        {form.failure ? <FormFailure form={form} /> : null}
+        {form.failure ? <FormFailure form={form} title={failedTitle} /> : null}
         <button type="submit" hidden />
       </form>
     </FormContext.Provider>
   );
 }
 
-function FormFailure({ form }: { form: YupForm }) {
-  if (form.looseFaults.length === 0) return <ErrorState error={form.failure} title="Not saved" />;
+function FormFailure({ form, title }: { form: YupForm; title: string }) {
+  if (form.looseFaults.length === 0) return <ErrorState error={form.failure} title={title} />;
   return (
-    <Notice tone="danger" title="Not saved">
+    <Notice tone="danger" title={title}>
       {form.looseFaults.map((fault) => (
         <Txt key={fault.path + fault.message}>{fault.message}</Txt>
       ))}

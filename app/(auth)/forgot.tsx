@@ -1,0 +1,1 @@
+export { ForgotScreen as default } from '@/components/screens/auth/ForgotScreen';

@@ -1,0 +1,1 @@
+export { InvitationScreen as default } from '@/components/screens/auth/InvitationScreen';

@@ -1,0 +1,1 @@
+export { SignInScreen as default } from '@/components/screens/auth/SignInScreen';

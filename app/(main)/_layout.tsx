@@ -1,0 +1,23 @@
+import { Redirect, Slot } from 'expo-router';
+import { Shell } from '@/components/layout/Shell';
+import { useSession } from '@/components/queries/SessionProvider';
+import { SignInAgain } from '@/components/screens/auth/SignInAgain';
+import { Starting } from '@/components/screens/auth/Starting';
+
+/** Everything behind the sign-in. */
+export default function MainLayout() {
+  const { state } = useSession();
+  if (state.is === 'signedOut') {
+    const next = window.location.pathname + window.location.search;
+    return (
+      <Redirect href={next === '/' ? '/sign-in' : { pathname: '/sign-in', params: { next } }} />
+    );
+  }
+  if (state.is === 'starting' || state.is === 'unreachable') return <Starting />;
+  return (
+    <Shell>
+      <Slot />
+      {state.is === 'interrupted' ? <SignInAgain me={state.me} /> : null}
+    </Shell>
+  );
+}

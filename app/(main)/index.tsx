@@ -1,0 +1,1 @@
+export { StudiesScreen as default } from '@/components/screens/studies/StudiesScreen';

@@ -1,0 +1,1 @@
+export { ProfileScreen as default } from '@/components/screens/profile/ProfileScreen';

@@ -1,0 +1,1 @@
+export { StudyScreen as default } from '@/components/screens/studies/StudyScreen';

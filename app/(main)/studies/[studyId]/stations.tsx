@@ -1,0 +1,1 @@
+export { StationsScreen as default } from '@/components/screens/studies/StationsScreen';

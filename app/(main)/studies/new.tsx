@@ -1,0 +1,1 @@
+export { NewStudyScreen as default } from '@/components/screens/studies/NewStudyScreen';

@@ -1,0 +1,49 @@
+import { Link } from 'expo-router';
+import { Pressable, StyleSheet, View } from 'react-native';
+import type { StudyRow } from '@/shared/studies/types';
+import { space, touch } from '@/components/theme/tokens';
+import { formatDay } from '@/components/ui/formatDay';
+import { Txt } from '@/components/ui/Txt';
+
+const runs = (count: number) => (count === 1 ? '1 run' : `${count} runs`);
+
+/** One study of the list: what it is, for whom, and how far it has come. */
+export function StudyLine({ study }: { study: StudyRow }) {
+  const what = [study.place, study.clientName && `for ${study.clientName}`]
+    .filter(Boolean)
+    .join(', ');
+  const state = [
+    study.surveyRevision !== null && `survey revision ${study.surveyRevision}`,
+    study.surveyRevision === null && study.runCount !== null && 'no survey yet',
+    study.runCount !== null && study.runCount > 0 && runs(study.runCount),
+    formatDay(study.updatedAt),
+  ].filter(Boolean);
+  return (
+    <Link href={`/studies/${study.id}`} asChild>
+      <Pressable role="link" style={styles.line}>
+        <View style={styles.names}>
+          <Txt variant="lead" strong>
+            {study.title}
+          </Txt>
+          {what ? <Txt tone="soft">{what}</Txt> : null}
+        </View>
+        <Txt variant="small" tone="soft">
+          {state.join(' · ')}
+        </Txt>
+      </Pressable>
+    </Link>
+  );
+}
+
+const styles = StyleSheet.create({
+  line: {
+    minHeight: touch,
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    justifyContent: 'space-between',
+    alignItems: 'baseline',
+    columnGap: space.three,
+    rowGap: space.half,
+  },
+  names: { flexShrink: 1, minWidth: 0 },
+});
