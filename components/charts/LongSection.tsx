@@ -24,6 +24,8 @@ export interface LongSectionProps {
   stations?: readonly { name: string; chainage: number }[];
   /** Chosen place, m. */
   at: number | null;
+  /** Water at the chosen place where it is known better than from the drawing, m. */
+  reading?: { stage: number; peakStage: number } | null;
   /** Left out: the drawing only shows. */
   onChange?: (chainage: number) => void;
   unitSystem: UnitSystem;
@@ -62,7 +64,16 @@ export function LongSection(props: LongSectionProps) {
 
 type Sized = LongSectionProps & { size: { width: number; height: number } };
 
-function Drawing({ profile, stage, at, unitSystem, sections, stations = NONE, size }: Sized) {
+function Drawing({
+  profile,
+  stage,
+  reading,
+  at,
+  unitSystem,
+  sections,
+  stations = NONE,
+  size,
+}: Sized) {
   const { colours } = useTheme();
   const { width, height } = size;
   const frame = useMemo(
@@ -114,7 +125,11 @@ function Drawing({ profile, stage, at, unitSystem, sections, stations = NONE, si
         {`chainage, ${UNITS[unitSystem].chainage.symbol}`}
       </ChartText>
       {at === null ? null : (
-        <Cursor {...{ frame, profile, stage, at, unitSystem }} lines={lines} surface={surface} />
+        <Cursor
+          {...{ frame, profile, stage, reading, at, unitSystem }}
+          lines={lines}
+          surface={surface}
+        />
       )}
     </>
   );
@@ -166,19 +181,19 @@ const Ground = memo(function Ground({ lines, foot }: { lines: Lines; foot: numbe
   );
 });
 
-interface CursorProps extends Pick<LongSectionProps, 'profile' | 'stage' | 'unitSystem'> {
+interface CursorProps extends ReadingOf {
   at: number;
   frame: ReturnType<typeof longSectionFrame>;
   lines: Lines;
   surface: Float64Array | null;
 }
 
-function Cursor({ at, frame, profile, stage, unitSystem, lines, surface }: CursorProps) {
+function Cursor({ at, frame, profile, stage, reading, unitSystem, lines, surface }: CursorProps) {
   const { colours } = useTheme();
   const x = frame.x(fromSi(at, 'chainage', unitSystem));
-  const level = valueAt(profile.chainages, stage ?? profile.bed, at);
+  const level = reading?.stage ?? valueAt(profile.chainages, stage ?? profile.bed, at);
   const y = frame.y(fromSi(level, 'elevation', unitSystem));
-  const texts = readings({ profile, stage, unitSystem }, at);
+  const texts = readings({ profile, stage, reading, unitSystem }, at);
   const bounds = {
     x: frame.left,
     y: 4,
@@ -199,14 +214,15 @@ function Cursor({ at, frame, profile, stage, unitSystem, lines, surface }: Curso
   );
 }
 
-type ReadingOf = Pick<LongSectionProps, 'profile' | 'stage' | 'unitSystem'>;
+type ReadingOf = Pick<LongSectionProps, 'profile' | 'stage' | 'reading' | 'unitSystem'>;
 
-function readings({ profile, stage, unitSystem }: ReadingOf, at: number): ReadingText[] {
-  const value = (row: ArrayLike<number>) =>
-    formatWithUnit(valueAt(profile.chainages, row, at), 'elevation', unitSystem);
-  if (!stage) return [{ text: `bed ${value(profile.bed)}`, strong: true }];
-  const texts: ReadingText[] = [{ text: value(stage), strong: true }];
-  if (profile.peakStage) texts.push({ text: `peak ${value(profile.peakStage)}` });
+function readings({ profile, stage, reading, unitSystem }: ReadingOf, at: number): ReadingText[] {
+  const show = (m: number) => formatWithUnit(m, 'elevation', unitSystem);
+  const drawn = (row: ArrayLike<number>) => valueAt(profile.chainages, row, at);
+  if (!stage) return [{ text: `bed ${show(drawn(profile.bed))}`, strong: true }];
+  const texts: ReadingText[] = [{ text: show(reading?.stage ?? drawn(stage)), strong: true }];
+  const peak = reading?.peakStage ?? (profile.peakStage ? drawn(profile.peakStage) : null);
+  if (peak !== null) texts.push({ text: `peak ${show(peak)}` });
   return texts;
 }
 

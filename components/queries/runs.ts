@@ -1,0 +1,144 @@
+import {
+  keepPreviousData,
+  useMutation,
+  useQuery,
+  useQueryClient,
+  type QueryClient,
+} from '@tanstack/react-query';
+import { decodeSurface } from '@/shared/runs/surfaceBlock';
+import type { Run, RunRow, RunSeries, RunSummary } from '@/shared/runs/types';
+import type { Section } from '@/shared/surveys/types';
+import { api } from './apiClient';
+import { studyKeys } from './studies';
+
+export const runKeys = {
+  all: ['runs'] as const,
+  list: (studyId: number) => [...runKeys.all, 'ofStudy', studyId] as const,
+  one: (runId: number) => [...runKeys.all, runId] as const,
+  result: (runId: number, ...part: (string | number)[]) =>
+    [...runKeys.one(runId), 'result', ...part] as const,
+};
+
+export const isUnfinished = ({ state }: Pick<RunRow, 'state'>): boolean =>
+  state === 'queued' || state === 'running';
+
+const LOOK_AGAIN_MS = 3000;
+
+/** Newest first; looked at again while one of them is under way. */
+export const useRuns = (studyId: number) =>
+  useQuery({
+    queryKey: runKeys.list(studyId),
+    queryFn: ({ signal }) => api.get<RunRow[]>(`/studies/${studyId}/runs`, { signal }),
+    refetchInterval: ({ state }) => (state.data?.some(isUnfinished) ? LOOK_AGAIN_MS : false),
+  });
+
+export const useRun = (runId: number | null) =>
+  useQuery({
+    queryKey: runKeys.one(runId ?? 0),
+    queryFn: ({ signal }) => api.get<Run>(`/runs/${runId}`, { signal }),
+    enabled: runId !== null,
+  });
+
+/** Results of a routed run never change. */
+const FIXED = { staleTime: Infinity, gcTime: 10 * 60_000 } as const;
+
+export const useRunSummary = (runId: number) =>
+  useQuery({
+    queryKey: runKeys.result(runId, 'summary'),
+    // Stations may be named after the run: the summary is told anew when it is opened anew.
+    queryFn: ({ signal }) => api.get<RunSummary>(`/runs/${runId}/summary`, { signal }),
+  });
+
+/** Values against time at a place, m; the last place stays in view until the next has come. */
+export const useRunSeries = (runId: number, chainage: number | null) =>
+  useQuery({
+    ...FIXED,
+    queryKey: runKeys.result(runId, 'series', chainage ?? 0),
+    queryFn: ({ signal }) =>
+      api.get<RunSeries>(`/runs/${runId}/series`, { signal, query: { chainage } }),
+    enabled: chainage !== null,
+    placeholderData: keepPreviousData,
+  });
+
+/** The whole wave for the long section. */
+export const useRunSurface = (runId: number, places: number, moments: number) =>
+  useQuery({
+    ...FIXED,
+    queryKey: runKeys.result(runId, 'surface', places, moments),
+    queryFn: async ({ signal }) =>
+      decodeSurface(
+        await api.bytes(`/runs/${runId}/surface`, { signal, query: { places, moments } }),
+      ),
+  });
+
+/** The sections as they were frozen with the run: the reach may have changed since. */
+export const useRunSections = (runId: number) =>
+  useQuery({
+    ...FIXED,
+    queryKey: runKeys.result(runId, 'sections'),
+    queryFn: async ({ signal }) =>
+      (await api.get<{ sections: RunSection[] }>(`/runs/${runId}/case.json`, { signal })).sections,
+  });
+
+export type RunSection = Pick<Section, 'id' | 'chainage' | 'points' | 'roughness'> & {
+  banks?: Section['banks'];
+};
+
+/** ApiError `scenarioIncomplete` with the faults where the scenario cannot run. */
+export function useRequestRun(studyId: number) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (scenarioId: number) => api.post<Run>(`/scenarios/${scenarioId}/runs`),
+    onSuccess: (run) => changed(client, studyId, run),
+  });
+}
+
+export function useCancelRun(studyId: number) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (runId: number) => api.post<Run>(`/runs/${runId}/cancel`),
+    onSuccess: (run) => changed(client, studyId, run),
+  });
+}
+
+export function useRetryRun(studyId: number) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (runId: number) => api.post<Run>(`/runs/${runId}/retry`),
+    onSuccess: (run) => changed(client, studyId, run),
+  });
+}
+
+function changed(client: QueryClient, studyId: number, run: Run) {
+  client.setQueryData(runKeys.one(run.id), run);
+  return runsChanged(client, studyId);
+}
+
+const runsChanged = (client: QueryClient, studyId: number) =>
+  Promise.all([
+    client.invalidateQueries({ queryKey: runKeys.list(studyId) }),
+    client.invalidateQueries({ queryKey: studyKeys.one(studyId) }),
+  ]);
+
+/** After the server said that a run has ended. */
+export const runEnded = (client: QueryClient, studyId: number, runId: number) =>
+  Promise.all([
+    client.invalidateQueries({ queryKey: runKeys.one(runId) }),
+    runsChanged(client, studyId),
+  ]);
+
+export const RUN_FILES = {
+  csv: { path: 'results.csv', label: 'Results as CSV' },
+  xlsx: { path: 'results.xlsx', label: 'Results as XLSX' },
+  case: { path: 'case.json', label: 'Case file' },
+} as const;
+export type RunFile = keyof typeof RUN_FILES;
+
+/** Saves a file of the run. */
+export const useRunDownload = (runId: number) =>
+  useMutation({
+    mutationFn: (file: RunFile) => {
+      const { path } = RUN_FILES[file];
+      return api.download(`/runs/${runId}/${path}`, `run-${runId}-${path}`);
+    },
+  });

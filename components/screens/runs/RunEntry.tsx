@@ -1,0 +1,63 @@
+import { Link } from 'expo-router';
+import { Pressable, StyleSheet, View } from 'react-native';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
+import { hairline, space } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/useTheme';
+import { Badge } from '@/components/ui/Badge';
+import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import type { RunRow } from '@/shared/runs/types';
+import { formatWithUnit } from '@/shared/units/format';
+import { RUN_TONES, runStateWords, timeLeftWords, wallClock } from './runWords';
+
+/** One run in the list: what was routed, how far it is, what came out furthest downstream. */
+export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
+  const { colours } = useTheme();
+  const { isWide } = useBreakpoint();
+  const unitSystem = useUnitSystem();
+  const found =
+    run.peakStage === null || run.peakFlow === null
+      ? null
+      : `${formatWithUnit(run.peakStage, 'elevation', unitSystem)}, ${formatWithUnit(run.peakFlow, 'flow', unitSystem)}`;
+  return (
+    <View role="listitem" style={[styles.item, { borderTopColor: colours.line }]}>
+      <Link href={`/studies/${studyId}/runs/${run.id}`} asChild>
+        <Pressable role="link" style={isWide ? styles.wide : styles.phone}>
+          <View style={styles.name}>
+            <Txt variant="lead" strong>{`Run ${run.number}, ${run.scenarioName}`}</Txt>
+            <Txt variant="small" tone="soft">
+              {`Asked for by ${run.requestedBy}, ${wallClock(run.requestedAt)}`}
+            </Txt>
+          </View>
+          <View style={styles.found}>
+            {found ? (
+              <>
+                <Txt strong>{found}</Txt>
+                <Txt variant="small" tone="soft">
+                  peak furthest downstream
+                </Txt>
+              </>
+            ) : null}
+            {run.state === 'running' ? (
+              <Txt variant="small" tone="soft">
+                {timeLeftWords(run.secondsLeft)}
+              </Txt>
+            ) : null}
+          </View>
+          <View style={isWide ? styles.state : null}>
+            <Badge label={runStateWords(run)} tone={RUN_TONES[run.state]} />
+          </View>
+        </Pressable>
+      </Link>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  item: { borderTopWidth: hairline },
+  wide: { flexDirection: 'row', alignItems: 'center', gap: space.two, paddingVertical: space.two },
+  phone: { gap: space.one, paddingVertical: space.two },
+  name: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
+  found: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
+  state: { width: 150 },
+});

@@ -1,0 +1,48 @@
+import { View } from 'react-native';
+import { Screen } from '@/components/layout/Screen';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { useRuns } from '@/components/queries/runs';
+import { Button } from '@/components/ui/Button';
+import { Empty } from '@/components/ui/Empty';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { Loading } from '@/components/ui/Loading';
+import { RunEntry } from './RunEntry';
+
+/** All runs of a study, newest first. */
+export function RunsScreen() {
+  const { study } = useCurrentStudy();
+  const runs = useRuns(study.id);
+  const root = `/studies/${study.id}` as const;
+  return (
+    <Screen
+      title="Runs"
+      crumbs={[{ label: study.title, href: root }, { label: 'Runs' }]}
+      lead="Each run keeps the survey, the roughness and the flood that it was given. A change makes a new run."
+    >
+      {runs.error ? (
+        <ErrorState
+          error={runs.error}
+          title="The runs could not be read"
+          retry={() => void runs.refetch()}
+        />
+      ) : null}
+      {runs.isPending ? <Loading what="Reading the runs…" /> : null}
+      {runs.data?.length === 0 ? (
+        <Empty
+          title="No flood has been routed yet"
+          action={<Button label="Go to the scenarios" href={`${root}/scenarios`} />}
+        >
+          Open a scenario, see that nothing is missing, and route its flood. It then stands here
+          while it computes and when it is done.
+        </Empty>
+      ) : null}
+      {runs.data?.length ? (
+        <View role="list" aria-label="Runs">
+          {runs.data.map((run) => (
+            <RunEntry key={run.id} run={run} studyId={study.id} />
+          ))}
+        </View>
+      ) : null}
+    </Screen>
+  );
+}

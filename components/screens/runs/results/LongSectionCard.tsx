@@ -1,0 +1,74 @@
+import { useMemo } from 'react';
+import { LongSection } from '@/components/charts/LongSection';
+import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
+import { usePlace, useTime } from '@/components/charts/usePlaceAndTime';
+import { valueAt } from '@/components/charts/geometry/interpolate';
+import { surfaceFrame } from '@/components/charts/geometry/surfaceFrame';
+import { timeWords } from '@/components/charts/geometry/timeWords';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
+import { Card } from '@/components/ui/Card';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { Loading } from '@/components/ui/Loading';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import type { Run, RunSummary, RunSurface } from '@/shared/runs/types';
+import type { PlaceResults } from './usePlaceResults';
+import { useResultSurface } from './useResultSurface';
+
+interface Props {
+  run: Run;
+  summary: RunSummary;
+  store: PlaceAndTimeStore;
+  place: PlaceResults;
+}
+
+/** The whole reach at the chosen time. */
+export function LongSectionCard(props: Props) {
+  const surface = useResultSurface(props.run.id);
+  if (surface.data) return <Drawn {...props} surface={surface.data} />;
+  return (
+    <Card title="Long section">
+      {surface.error ? (
+        <ErrorState
+          error={surface.error}
+          title="The water surface could not be read"
+          retry={() => void surface.refetch()}
+        />
+      ) : (
+        <Loading what="Reading the water surface…" />
+      )}
+    </Card>
+  );
+}
+
+function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSurface }) {
+  const unitSystem = useUnitSystem();
+  const { isWide } = useBreakpoint();
+  const at = usePlace(store);
+  const t = useTime(store) ?? summary.times.start;
+  const stage = useMemo(
+    () => surfaceFrame(surface, t, new Float32Array(surface.places)),
+    [surface, t],
+  );
+  const { series, isCurrent, peaks } = place;
+  const reading =
+    isCurrent && series && peaks
+      ? { stage: valueAt(series.times, series.stage, t), peakStage: peaks.peakStage }
+      : null;
+  const moment = `${timeWords(t, run.duration, run.startsAt)} after start`;
+  return (
+    <Card title="Long section" aside={`${moment} · peak dotted · banks dashed`}>
+      <LongSection
+        profile={surface}
+        stage={stage}
+        sections={summary.sections}
+        stations={summary.stations}
+        at={at}
+        onChange={store.setAt}
+        unitSystem={unitSystem}
+        label={moment}
+        reading={reading}
+        height={isWide ? 400 : 300}
+      />
+    </Card>
+  );
+}

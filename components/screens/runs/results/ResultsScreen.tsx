@@ -1,0 +1,101 @@
+import { useEffect } from 'react';
+import { ReachRibbon } from '@/components/charts/ReachRibbon';
+import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
+import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
+import { Screen } from '@/components/layout/Screen';
+import { useRunDownload } from '@/components/queries/runs';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
+import { Badge } from '@/components/ui/Badge';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import type { Run, RunSummary } from '@/shared/runs/types';
+import { Cautions } from '../Cautions';
+import { runCrumbs } from '../runCrumbs';
+import { ComputedCard } from './ComputedCard';
+import { LongSectionCard } from './LongSectionCard';
+import { PeaksCard } from './PeaksCard';
+import { PlaceFigures } from './PlaceFigures';
+import { PlaceSeries } from './PlaceSeries';
+import { firstLook, isOnReach } from './placeOf';
+import { RunDownloads } from './RunDownloads';
+import { SectionCard } from './SectionCard';
+import { TimeBar } from './TimeBar';
+import { usePlaceResults } from './usePlaceResults';
+import { VolumeCard } from './VolumeCard';
+import { WarningsCard } from './WarningsCard';
+
+interface Props {
+  run: Run;
+  summary: RunSummary;
+}
+
+/** The place by the reach ribbon, the time by the flood itself, and every drawing follows both. */
+export function ResultsScreen({ run, summary }: Props) {
+  const store = usePlaceAndTimeStore();
+  useFirstLook(store, summary);
+  const { isWide } = useBreakpoint();
+  const download = useRunDownload(run.id);
+  const place = usePlaceResults(run, summary, usePlace(store));
+  const common = { run, summary, store };
+
+  return (
+    <Screen
+      title={run.scenarioName}
+      crumbs={runCrumbs(run)}
+      badge={<Badge label="Routed, unsigned" tone="ochre" />}
+      ribbon={<Ribbon {...common} />}
+      actions={<RunDownloads download={download} />}
+      side={
+        isWide ? (
+          <>
+            <PlaceFigures {...common} place={place} />
+            <PlaceSeries {...common} place={place} />
+            <SectionCard {...common} />
+          </>
+        ) : null
+      }
+      footer={<TimeBar {...common} />}
+    >
+      {download.error ? (
+        <ErrorState error={download.error} title="The file could not be saved" />
+      ) : null}
+      {isWide ? (
+        <LongSectionCard {...common} place={place} />
+      ) : (
+        <>
+          <PlaceFigures {...common} place={place} />
+          <LongSectionCard {...common} place={place} />
+          <PlaceSeries {...common} place={place} />
+          <SectionCard {...common} />
+        </>
+      )}
+      <PeaksCard {...common} />
+      <WarningsCard {...common} />
+      <VolumeCard summary={summary} />
+      <ComputedCard run={run} summary={summary} />
+      <Cautions />
+    </Screen>
+  );
+}
+
+function Ribbon({ summary, store }: { summary: RunSummary; store: PlaceAndTimeStore }) {
+  return (
+    <ReachRibbon
+      sections={summary.sections}
+      stations={summary.stations}
+      at={usePlace(store)}
+      onChange={store.setAt}
+      unitSystem={useUnitSystem()}
+    />
+  );
+}
+
+/** Where the address says nothing, or speaks of another reach or a longer run. */
+function useFirstLook(store: PlaceAndTimeStore, summary: RunSummary) {
+  useEffect(() => {
+    const { at, t } = store.get();
+    const first = firstLook(summary);
+    if (!isOnReach(summary, at)) store.set({ at: first.at });
+    if (t === null || t < summary.times.start || t > summary.times.end) store.set({ t: first.t });
+  }, [store, summary]);
+}

@@ -1,0 +1,66 @@
+import { useMemo, useState } from 'react';
+import { Hydrograph, type HydrographProps } from '@/components/charts/Hydrograph';
+import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
+import { useTime } from '@/components/charts/usePlaceAndTime';
+import { Button } from '@/components/ui/Button';
+import { Card } from '@/components/ui/Card';
+import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import { StyleSheet, View } from 'react-native';
+import { space } from '@/components/theme/tokens';
+import { UNITS } from '@/shared/units/units';
+import { SeriesTable } from './SeriesTable';
+
+interface Props extends Pick<HydrographProps, 'quantity' | 'series' | 'compare' | 'peak'> {
+  title: string;
+  /** Where, for the names. */
+  place: string;
+  /** Said beside the unit, e.g. what is dashed. */
+  note?: string;
+  store: PlaceAndTimeStore;
+  startsAt: string | null;
+}
+
+/** One quantity against time at the chosen place; the table behind it one press away. */
+export function SeriesCard(props: Props) {
+  const { title, place, note, quantity, series, compare, peak, store, startsAt } = props;
+  const unitSystem = useUnitSystem();
+  const t = useTime(store);
+  const [asTable, setAsTable] = useState(false);
+  const unit = UNITS[unitSystem][quantity].symbol;
+  const name = `${title} at ${place}`;
+  const table = useMemo(
+    () => <SeriesTable {...{ name, title, quantity, series, startsAt }} />,
+    [name, title, quantity, series, startsAt],
+  );
+  return (
+    <Card
+      title={title}
+      aside={
+        <View style={styles.aside}>
+          <Txt tone="soft">{note ? `${unit}, ${note}` : unit}</Txt>
+          <Button
+            kind="quiet"
+            label={asTable ? 'Curve' : 'Table'}
+            name={asTable ? `${name} as a curve` : `${name} as a table`}
+            onPress={() => setAsTable(!asTable)}
+          />
+        </View>
+      }
+    >
+      {asTable ? (
+        table
+      ) : (
+        <Hydrograph
+          label={name}
+          {...{ quantity, series, compare, peak, t, unitSystem }}
+          onChange={store.setT}
+        />
+      )}
+    </Card>
+  );
+}
+
+const styles = StyleSheet.create({
+  aside: { flexDirection: 'row', alignItems: 'center', columnGap: space.one, flexWrap: 'wrap' },
+});
