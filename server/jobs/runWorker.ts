@@ -29,7 +29,8 @@ function route(
   shouldStop: () => boolean,
   post: (message: WorkerMessage) => void,
 ): WorkerResult {
-  const wave = recordWave(outputTimes(caseFile).length);
+  const { duration, outputInterval } = caseFile.numerics;
+  const wave = recordWave(outputTimes(duration, outputInterval).length);
   const picture = liveSurface(caseFile);
   const mayPost = atMostEvery(PROGRESS_INTERVAL);
   const mayDraw = atMostEvery(PROGRESS_INTERVAL);

@@ -36,12 +36,13 @@ export function startWorker(
   file: string,
   caseBytes: Uint8Array,
   onProgress: (progress: Extract<WorkerMessage, { type: 'progress' }>) => void,
+  heapMegabytes = HEAP_MEGABYTES,
 ): RunningWorker {
   const stopFlag = new SharedArrayBuffer(4);
   const worker = new Worker(file, {
     workerData: { caseBytes, stopFlag } satisfies RunWorkerData,
     execArgv: file.endsWith('.ts') ? ['--require', 'tsx/cjs'] : [],
-    resourceLimits: { maxOldGenerationSizeMb: HEAP_MEGABYTES },
+    resourceLimits: { maxOldGenerationSizeMb: heapMegabytes },
   });
   let cancelled = false;
   let force: NodeJS.Timeout | undefined;
