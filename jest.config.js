@@ -37,6 +37,7 @@ module.exports = {
       displayName: 'components',
       preset: 'jest-expo/web',
       // d3 ships modules only.
+      transform: { ...webPreset.transform, '\\.mjs$': webPreset.transform['\\.[jt]sx?$'] },
       transformIgnorePatterns: webPreset.transformIgnorePatterns.map((pattern) =>
         pattern.replace('(.pnpm|', '(.pnpm|d3-|internmap|'),
       ),

@@ -53,9 +53,9 @@ export function timeTicks([low, high]: Extent, lengthPx: number, pxPerTick: numb
   const span = Math.max(high - low, 1e-9);
   const wanted = span / Math.max(1, lengthPx / pxPerTick);
   const step = STEPS.find((each) => each >= wanted) ?? Math.ceil(wanted / 86400) * 86400;
-  const values: number[] = [];
-  for (let at = Math.ceil(low / step - 1e-9) * step; at <= high + 1e-9 * span; at += step)
-    values.push(at);
+  const first = Math.ceil(low / step - 1e-9);
+  const last = Math.floor(high / step + 1e-9);
+  const values = Array.from({ length: last - first + 1 }, (_, i) => (first + i) * step);
   const unit = timeUnit(span);
   return { values, unit, unitSeconds: UNIT_SECONDS[unit] };
 }
