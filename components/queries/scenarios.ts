@@ -3,6 +3,7 @@ import type { ScenarioBody } from '@/shared/scenarios/schemas';
 import type { Scenario, ScenarioRow, TableReading } from '@/shared/scenarios/types';
 import type { UnitSystem } from '@/shared/units/units';
 import { api } from './apiClient';
+import { isApiError } from './ApiError';
 import { studyKeys } from './studies';
 
 export const scenarioKeys = {
@@ -32,13 +33,17 @@ export function useCreateScenario(studyId: number) {
   });
 }
 
-/** ApiError `conflict` where somebody else saved since `version`. */
+/** ApiError `conflict` where somebody else saved since `version`: what they saved is then read. */
 export function useSaveScenario(studyId: number, scenarioId: number) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (change: { version: number; body: ScenarioBody }) =>
       api.put<Scenario>(`/scenarios/${scenarioId}`, change),
     onSuccess: (scenario) => stored(client, studyId, scenario),
+    onError: (error) =>
+      isApiError(error, 'conflict')
+        ? client.invalidateQueries({ queryKey: scenarioKeys.one(scenarioId) })
+        : undefined,
   });
 }
 

@@ -1,3 +1,4 @@
+import { SCS_RECESSION_RATIO, USUAL_GAMMA_EXPONENT } from '@/shared/scenarios/hydrographs';
 import type {
   Downstream,
   InitialState,
@@ -50,8 +51,8 @@ export function toDraft(body: ScenarioBody): Draft {
           baseFlow: null,
           peakFlow: null,
           timeToPeak: null,
-          recessionRatio: null,
-          gammaExponent: null,
+          recessionRatio: SCS_RECESSION_RATIO,
+          gammaExponent: USUAL_GAMMA_EXPONENT,
         },
         table: { kind: 'table', times: [], flows: [] },
         stage: { kind: 'stage', times: [], stages: [] },
@@ -99,4 +100,11 @@ export function toBody(draft: Draft): ScenarioBody {
     initial: draft.initial.byKind[draft.initial.kind],
     numerics: draft.numerics,
   };
+}
+
+/** Whether a number stands in it that could not be read: it shows as NaN where it was typed. */
+export function hasUnreadable(value: unknown): boolean {
+  if (typeof value === 'number') return Number.isNaN(value);
+  if (typeof value !== 'object' || value === null) return false;
+  return Object.values(value).some(hasUnreadable);
 }

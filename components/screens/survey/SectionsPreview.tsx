@@ -4,10 +4,11 @@ import { LongSection } from '@/components/charts/LongSection';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { Card } from '@/components/ui/Card';
 import { useUnitSystem } from '@/components/ui/unitSystem';
+import { thalwegOf } from '@/shared/reaches/sectionGeometry';
 import type { Section } from '@/shared/surveys/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { nearestSection } from '../reach/nearestSection';
-import { thalwegOf } from '../reach/thalwegOf';
+
 
 /** The sections of a survey drawn: along the river, and each across it. */
 export function SectionsPreview({ sections }: { sections: readonly Section[] }) {

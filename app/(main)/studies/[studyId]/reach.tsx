@@ -1,0 +1,1 @@
+export { ReachScreen as default } from '@/components/screens/reach/ReachScreen';

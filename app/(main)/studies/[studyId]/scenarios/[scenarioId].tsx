@@ -1,0 +1,1 @@
+export { ScenarioScreen as default } from '@/components/screens/scenarios/ScenarioScreen';

@@ -1,0 +1,1 @@
+export { ScenariosScreen as default } from '@/components/screens/scenarios/ScenariosScreen';

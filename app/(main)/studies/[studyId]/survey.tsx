@@ -1,0 +1,1 @@
+export { SurveyScreen as default } from '@/components/screens/survey/SurveyScreen';

@@ -1,0 +1,122 @@
+import { router } from 'expo-router';
+import { useState } from 'react';
+import { ReachRibbon } from '@/components/charts/ReachRibbon';
+import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
+import { Screen } from '@/components/layout/Screen';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { useReach } from '@/components/queries/reaches';
+import { useRequestRun } from '@/components/queries/runs';
+import { useStations } from '@/components/queries/stations';
+import { Badge } from '@/components/ui/Badge';
+import { Button } from '@/components/ui/Button';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import type { Scenario } from '@/shared/scenarios/types';
+import { DetailsPart } from './DetailsPart';
+import { EditorProvider } from './editorContext';
+import { InitialPart } from './InitialPart';
+import { LateralsPart } from './LateralsPart';
+import { NumericsPart } from './NumericsPart';
+import { OutletPart } from './OutletPart';
+import { ReadinessCard } from './ReadinessCard';
+import { SaveNotices } from './SaveNotices';
+import { UpstreamPart } from './UpstreamPart';
+import { useScenarioEditor } from './useScenarioEditor';
+import { whyNotRouted } from './whyNotRouted';
+
+/** The whole scenario on one page, checked as it is typed; saving and routing are asked for. */
+export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
+  const { study, may } = useCurrentStudy();
+  const system = useUnitSystem();
+  const { at, setAt } = usePlaceAndTime();
+  const [reachId, setReachId] = useState(scenario.body.reachId);
+  const reach = useReach(reachId);
+  const stations = useStations(study.id).data;
+  const editor = useScenarioEditor(scenario, reach.data);
+  const request = useRequestRun(study.id);
+  const isLocked = !may('scenario.change');
+  // The draft chooses the reach that it is checked against.
+  if (editor.draft.reachId !== reachId) setReachId(editor.draft.reachId);
+
+  const reason = whyNotRouted(editor, reach.data !== undefined);
+  const route = () =>
+    request.mutate(scenario.id, {
+      onSuccess: (run) => router.push(`/studies/${study.id}/runs/${run.id}`),
+    });
+  return (
+    <EditorProvider value={{ editor, scenario, reach: reach.data, isLocked }}>
+      <Screen
+        title={editor.draft.name || 'Scenario without a name'}
+        crumbs={[
+          { label: study.title, href: `/studies/${study.id}` },
+          { label: 'Scenarios', href: `/studies/${study.id}/scenarios` },
+        ]}
+        badge={
+          editor.isDirty ? (
+            <Badge label="Not saved" tone="ochre" />
+          ) : editor.faults.length > 0 ? (
+            <Badge label="Draft" />
+          ) : undefined
+        }
+        actions={
+          isLocked ? undefined : (
+            <>
+              <Button
+                label="Save"
+                busy={editor.isSaving}
+                disabled={!editor.isDirty || editor.unsavable !== null}
+                hint={editor.unsavable ?? undefined}
+                onPress={editor.save}
+              />
+              {may('run.request') ? (
+                <Button
+                  label="Route this flood"
+                  kind="solid"
+                  busy={request.isPending}
+                  disabled={reason !== null}
+                  hint={reason ?? undefined}
+                  onPress={route}
+                />
+              ) : null}
+            </>
+          )
+        }
+        ribbon={
+          reach.data ? (
+            <ReachRibbon
+              sections={reach.data.sections}
+              stations={stations}
+              advice={reach.data.advice}
+              at={at ?? reach.data.firstChainage}
+              onChange={setAt}
+              unitSystem={system}
+            />
+          ) : undefined
+        }
+        side={
+          <>
+            <SaveNotices />
+            {request.isError ? (
+              <ErrorState title="The run was not started" error={request.error} />
+            ) : null}
+            {reach.isError ? (
+              <ErrorState
+                title="The reach could not be read"
+                error={reach.error}
+                retry={() => void reach.refetch()}
+              />
+            ) : null}
+            <ReadinessCard />
+          </>
+        }
+      >
+        <DetailsPart />
+        <UpstreamPart />
+        <LateralsPart />
+        <OutletPart />
+        <InitialPart />
+        <NumericsPart />
+      </Screen>
+    </EditorProvider>
+  );
+}
