@@ -7,4 +7,5 @@ export { criticalDepth, normalDepth } from './geometry/uniformFlow';
 export { routeCase } from './routeCase';
 export type { RouteOptions, RunOutput, RunProgress } from './routeOptions';
 export { RunCancelled, RunFailed } from './runErrors';
+export { outputTimes } from './time/outputTimes';
 export { SOLVER_VERSION } from './version';

@@ -47,7 +47,7 @@ export function createControlBoundary(
     if (velocity >= celerity) {
       const wanted = risingRoot(surplus, bed[section], step);
       const held = wanted > inside.stage && forceAt(wanted, out) > forceAt(inside.stage, out);
-      return endFlux(held ? wanted : inside.stage, inside.flow);
+      return endFlux(held ? wanted : inside.stage, inside.flow, inside.path);
     }
     const eta = risingRoot(mismatch, bed[section], step);
     if (eta <= bed[section]) return endFlux(inside.stage, 0);

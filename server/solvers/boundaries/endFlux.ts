@@ -4,18 +4,18 @@ import type { Workspace } from '../workspace';
 import type { End } from './endState';
 
 /** Makes a boundary state the flux at an end; returns its fastest wave |u| + c (m/s). */
-export type EndFlux = (stage: number, flow: number) => number;
+export type EndFlux = (stage: number, flow: number, path?: number) => number;
 
 /**
  * The exact flux of a known state on the end section: Q, and Q²/A with the pressure g ∫ A dη over the half cell between
- * the end and the middle of the cell, as the cell feels it. The state is kept in the arrays at the end's index.
+ * the end and the middle of the cell, as the cell feels it; `path` is the share of the latter (see endState.ts). The state is kept in the arrays at the end's index.
  */
 export function createEndFlux(workspace: Workspace, tables: CellTables, end: End): EndFlux {
   const { area, flow, stage, level, fluxArea, fluxLeft, fluxRight, gravity } = workspace;
   const { section, cell, face, outward } = end;
   const flux = outward === 1 ? fluxLeft : fluxRight;
 
-  return function endFlux(eta, q) {
+  return function endFlux(eta, q, path = 1) {
     // The next look-up at this section starts its search here.
     level[section] = (tables.rowAtStage(section, eta) - section * TABLE_STRIDE) / LEVEL_FIELDS;
     const a = tables.areaAt(section, eta);
@@ -24,7 +24,7 @@ export function createEndFlux(workspace: Workspace, tables: CellTables, end: End
     stage[section] = eta;
     fluxArea[face] = q;
     const carried = a > 0 ? (q * q) / a : 0;
-    flux[face] = carried + 0.5 * gravity * (eta - stage[cell]) * (area[cell] + a);
+    flux[face] = carried + 0.5 * path * gravity * (eta - stage[cell]) * (area[cell] + a);
     return a > 0 ? Math.abs(q) / a + Math.sqrt((gravity * a) / tables.widthAt(section, eta)) : 0;
   };
 }

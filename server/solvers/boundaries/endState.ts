@@ -8,6 +8,8 @@ export interface EndState {
   flow: number;
   velocity: number;
   celerity: number;
+  /** Share of the pressure along the half cell at the end that its cell is to feel: 1 but on steep, shallow flow */
+  path: number;
 }
 
 export interface End {
@@ -31,13 +33,16 @@ export function downstreamEnd(n: number): End {
 
 /**
  * Extrapolates the state of the last cell over its half to the section at the end. Where that section differs abruptly
- * from the cell's at equal stage (a steep or a stepped bed), the area of the cell is taken along instead of its stage.
- * The returned function fills and returns one object.
+ * from the cell's at equal stage (a steep or a stepped bed) and the water is fast, the area of the cell is taken along
+ * instead of its stage. Where a cell cannot be sloped, the face between two cells gives the whole fall to the lower
+ * one: so must the ends, by `path`. The returned function fills and returns one object.
  */
 export function createEndState(workspace: Workspace, tables: CellTables, end: End): () => EndState {
-  const { area, flow, stage, slopeStage, slopeFlow, bed, gravity, dryDepth } = workspace;
+  const { n, area, flow, stage, celerity, slopeStage, slopeFlow, slopeFloor } = workspace;
+  const { bed, gravity, dryDepth } = workspace;
   const { section, cell, outward } = end;
-  const state: EndState = { stage: 0, area: 0, flow: 0, velocity: 0, celerity: 0 };
+  const inner = Math.min(n, Math.max(1, cell - outward));
+  const state: EndState = { stage: 0, area: 0, flow: 0, velocity: 0, celerity: 0, path: 1 };
 
   return function endState() {
     const etaCell = stage[cell];
@@ -46,12 +51,16 @@ export function createEndState(workspace: Workspace, tables: CellTables, end: En
     state.flow = 0;
     state.velocity = 0;
     state.celerity = 0;
+    state.path = 1;
     if (etaCell - bed[cell] <= dryDepth) return state;
 
-    const level = tables.areaAt(section, etaCell);
     const own = area[cell];
+    const level = tables.areaAt(section, etaCell);
+    const froude = Math.abs(flow[cell]) / (own * celerity[cell]);
+    const isFlat = Math.min(etaCell, stage[inner]) <= Math.max(slopeFloor[cell], slopeFloor[inner]);
     const ratio = level > 0 ? Math.max(level / own, own / level) : Infinity;
-    const mix = Math.min(1, Math.max(0, (ratio - 1.5) / 1.5));
+    const mix = isFlat ? 1 : Math.min(1, Math.max(0, (ratio - 1.5) / 1.5));
+    if (isFlat) state.path = 1 - outward * Math.min(1, Math.max(0, 2 * froude - 1));
     let a = 0;
     let q = 0;
     if (mix < 1) {
@@ -60,11 +69,12 @@ export function createEndState(workspace: Workspace, tables: CellTables, end: En
       q = (1 - mix) * (flow[cell] + 0.5 * outward * slopeFlow[cell]);
     }
     if (mix > 0) {
-      const leaving = outward * flow[cell] > 0;
-      const taken = leaving ? Math.min(own, level) : Math.max(own, level);
+      const leaves = outward * flow[cell] > 0;
+      const falls = leaves ? own < level : own > level;
+      const taken = falls ? level + Math.min(1, froude) * (own - level) : level;
       a += mix * taken;
-      q += mix * (leaving ? (taken / own) * flow[cell] : flow[cell]);
-      state.stage = tables.stageOf(section, a);
+      q += mix * (leaves && !falls ? (taken / own) * flow[cell] : flow[cell]);
+      state.stage = mix === 1 && !falls ? etaCell : tables.stageOf(section, a);
     }
     if (a <= 0) {
       state.stage = etaCell;

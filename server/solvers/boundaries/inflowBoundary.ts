@@ -47,7 +47,7 @@ export function createInflowBoundary(
     const inside = endState();
     if (inside.area <= 0 || inside.velocity >= inside.celerity) {
       knowStages(flow);
-      return endFlux(inside.area > 0 ? shooting : critical, flow);
+      return endFlux(inside.area > 0 ? shooting : critical, flow, inside.path);
     }
     const { area, velocity, celerity } = inside;
     const change = flow - inside.flow;

@@ -14,6 +14,6 @@ export function createOpenBoundary(workspace: Workspace, tables: CellTables, end
     const inside = endState();
     if (inside.area <= 0) return endFlux(stage[end.cell], 0);
     const leaves = end.outward * inside.flow > 0;
-    return endFlux(inside.stage, leaves ? inside.flow : 0);
+    return endFlux(inside.stage, leaves ? inside.flow : 0, inside.path);
   };
 }

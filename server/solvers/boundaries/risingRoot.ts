@@ -15,12 +15,18 @@ export function risingRoot(f: (x: number) => number, lo: number, step: number): 
     fHi = f(hi);
   }
   if (fHi < 0) return hi;
+  let best = -fLo < fHi ? lo : hi;
+  let least = Math.min(-fLo, fHi);
   let side = 0;
-  for (let k = 0; k < 100; k++) {
+  for (let k = 0; k < 100 && hi - lo > 4e-16 * Math.max(Math.abs(lo), Math.abs(hi)); k++) {
     const x = hi - (fHi * (hi - lo)) / (fHi - fLo);
-    if (!(x > lo && x < hi)) return fHi === 0 ? hi : 0.5 * (lo + hi);
+    if (!(x > lo && x < hi)) break;
     const fx = f(x);
-    if (fx === 0) return x;
+    if (Math.abs(fx) < least) {
+      least = Math.abs(fx);
+      best = x;
+    }
+    if (fx === 0) break;
     if (fx < 0) {
       lo = x;
       fLo = fx;
@@ -32,7 +38,6 @@ export function risingRoot(f: (x: number) => number, lo: number, step: number): 
       if (side === 1) fLo *= 0.5;
       side = 1;
     }
-    if (hi - lo <= 1e-14 * Math.abs(hi) + 1e-14) break;
   }
-  return 0.5 * (lo + hi);
+  return best;
 }

@@ -1,6 +1,7 @@
 import { ARRIVAL_RISE, type CellResults } from '../../../shared/case/resultFile';
 import type { Grid } from '../geometry/grid';
 import type { Workspace } from '../workspace';
+import { waterVelocity } from './waterVelocity';
 
 /** Follows every cell at every step: peaks, their times, arrivals. */
 export interface CellRecorder {
@@ -11,7 +12,7 @@ export interface CellRecorder {
 }
 
 export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecorder {
-  const { n, area, stage, bed, dryDepth, fluxArea } = workspace;
+  const { n, area, flow: cellFlow, stage, bed, dryDepth, fluxArea } = workspace;
   const initialStage = new Float64Array(n);
   const peakStage = new Float64Array(n).fill(-Infinity);
   const peakStageTime = new Float64Array(n);
@@ -60,8 +61,10 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
           peakFlow[k] = flow;
           peakFlowTime[k] = time;
         }
-        const speed = Math.abs(peakVelocity[k]);
-        if (size > speed * area[i]) peakVelocity[k] = flow / area[i];
+        const most = Math.abs(peakVelocity[k]) * area[i];
+        if (size > most && Math.abs(cellFlow[i]) > most) {
+          peakVelocity[k] = waterVelocity(flow, cellFlow[i], area[i]);
+        }
       }
     },
     snapshot() {
@@ -70,7 +73,7 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
         const wet = stage[i] - bed[i] > dryDepth;
         view.stage[k] = wet ? stage[i] : bed[i];
         view.flow[k] = wet ? 0.5 * (fluxArea[i - 1] + fluxArea[i]) : 0;
-        view.velocity[k] = wet ? view.flow[k] / area[i] : 0;
+        view.velocity[k] = wet ? waterVelocity(view.flow[k], cellFlow[i], area[i]) : 0;
       }
       return view;
     },

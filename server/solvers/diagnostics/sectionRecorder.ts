@@ -3,9 +3,10 @@ import { ARRIVAL_RISE, type SectionResult } from '../../../shared/case/resultFil
 import { createCellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import { sectionShape } from '../geometry/sectionProperties';
-import { TABLE_STRIDE, writeSectionTable } from '../geometry/sectionTable';
+import { LEVEL_FIELDS, TABLE_STRIDE, writeSectionTable } from '../geometry/sectionTable';
 import type { Workspace } from '../workspace';
 import { placeOf } from './places';
+import { waterVelocity } from './waterVelocity';
 
 /** Follows the surveyed sections: their series at output times, their peaks and arrivals at every step. */
 export interface SectionRecorder {
@@ -19,7 +20,7 @@ export function createSectionRecorder(
   workspace: Workspace,
   grid: Grid,
 ): SectionRecorder {
-  const { stage, bed: cellBed, fluxArea, gravity, dryDepth } = workspace;
+  const { stage, flow: cellFlow, bed: cellBed, fluxArea, gravity, dryDepth } = workspace;
   const count = sections.length;
   const table = new Float64Array(count * TABLE_STRIDE);
   const levels = new Int32Array(count);
@@ -33,7 +34,7 @@ export function createSectionRecorder(
   const tables = createCellTables({ table, levels, level, gravity });
   const places = sections.map((section) => placeOf(section, grid));
 
-  const now = { stage: 0, flow: 0, area: 0 };
+  const now = { stage: 0, flow: 0, area: 0, velocity: 0 };
   const initial = new Float64Array(count).fill(NaN);
   const results: SectionResult[] = sections.map(({ id, chainage }, k) => ({
     id,
@@ -49,7 +50,7 @@ export function createSectionRecorder(
     arrival: null,
   }));
 
-  /** Stage, flow and area of section k at this moment, into `now`. */
+  /** Stage, flow, area and velocity of section k at this moment, into `now`. */
   function look(k: number): void {
     const { left, right, weight, face, faceWeight } = places[k];
     const leftWet = stage[left] - cellBed[left] > dryDepth;
@@ -57,6 +58,7 @@ export function createSectionRecorder(
     now.stage = bed[k];
     now.flow = 0;
     now.area = 0;
+    now.velocity = 0;
     // Beside dry ground the water stands level.
     const eta =
       leftWet && rightWet
@@ -69,8 +71,10 @@ export function createSectionRecorder(
     if (eta - bed[k] <= dryDepth) return;
     now.stage = eta;
     now.flow = (1 - faceWeight) * fluxArea[face] + faceWeight * fluxArea[face + 1];
+    level[k] = (tables.rowAtStage(k, eta) - k * TABLE_STRIDE) / LEVEL_FIELDS;
     now.area = tables.areaAt(k, eta);
-    level[k] = (tables.rowAtStage(k, eta) - k * TABLE_STRIDE) / 8;
+    const inCells = (1 - weight) * cellFlow[left] + weight * cellFlow[right];
+    now.velocity = waterVelocity(now.flow, inCells, now.area);
   }
 
   return {
@@ -88,10 +92,7 @@ export function createSectionRecorder(
           peak.flow = now.flow;
           peak.flowTime = time;
         }
-        if (now.area > 0) {
-          const velocity = now.flow / now.area;
-          if (Math.abs(velocity) > Math.abs(peak.velocity)) peak.velocity = velocity;
-        }
+        if (Math.abs(now.velocity) > Math.abs(peak.velocity)) peak.velocity = now.velocity;
         if (result.arrival === null && now.stage - initial[k] >= ARRIVAL_RISE) {
           result.arrival = time;
         }
@@ -101,7 +102,7 @@ export function createSectionRecorder(
       for (let k = 0; k < count; k++) {
         look(k);
         const result = results[k];
-        const velocity = now.area > 0 ? now.flow / now.area : 0;
+        const { velocity } = now;
         const width = tables.widthAt(k, now.stage);
         result.stage.push(now.stage);
         result.depth.push(now.stage - bed[k]);

@@ -6,7 +6,7 @@ import type { Workspace } from '../workspace';
 /** Flows that agree with the steady balance to this share count as steady. */
 const STEADY = 1e-8;
 /** More cell updates than this are not spent on it … */
-const BUDGET = 1e8;
+const BUDGET = 3e7;
 /** … but so many steps are always. */
 const LEAST_STEPS = 2000;
 const CHECK_EVERY = 50;

@@ -23,17 +23,19 @@ export function createLimitedSlopes(workspace: Workspace): () => void {
 
   function limitEnd(i: number, inner: number): void {
     const [lo, hi] = i < inner ? [i, inner] : [inner, i];
+    const neighbourStage = n > 2 ? slopeStage[inner] : stage[hi] - stage[lo];
+    const neighbourFlow = n > 2 ? slopeFlow[inner] : flow[hi] - flow[lo];
     slopeStage[i] = 0;
     slopeFlow[i] = 0;
     if (Math.min(stage[i], stage[inner]) <= Math.max(slopeFloor[i], slopeFloor[inner])) return;
     const most = 4 * reach[i];
-    const s = oneSided(stage[hi] - stage[lo], slopeStage[inner]);
+    const s = oneSided(stage[hi] - stage[lo], neighbourStage);
     slopeStage[i] = Math.max(-most, Math.min(most, s));
-    slopeFlow[i] = oneSided(flow[hi] - flow[lo], slopeFlow[inner]);
+    slopeFlow[i] = oneSided(flow[hi] - flow[lo], neighbourFlow);
   }
 
   return function limitedSlopes(): void {
-    if (n < 3) return;
+    if (n < 2) return;
     let etaI = stage[1];
     let etaJ = stage[2];
     let lowEta = etaJ - etaI;

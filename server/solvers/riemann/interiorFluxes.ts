@@ -9,6 +9,12 @@ const REGULAR = 1.5;
 const IRREGULAR = 3;
 
 /**
+ * Where the stage slopes by more than this share of A/(2B) over a cell, as in the thin tongue of a front, the velocity
+ * of the cell is taken to the face instead of the flow: two slopes of their own could make any velocity of a small area.
+ */
+const THIN = 0.5;
+
+/**
  * Volume and momentum fluxes at all faces between cells.
  *
  * Regular faces take the mean section of both cells, A(η) = (A_i + A_j)/2, and the HLL solver of Harten, Lax and van
@@ -95,8 +101,18 @@ export function createInteriorFluxes(workspace: Workspace, tables: CellTables): 
 
       const aL = 0.5 * (a1 + b1);
       const aR = 0.5 * (a2 + b2);
-      const qL = flow[i] + 0.5 * slopeFlow[i];
-      const qR = flow[j] - 0.5 * slopeFlow[j];
+      let qL = flow[i] + 0.5 * slopeFlow[i];
+      let qR = flow[j] - 0.5 * slopeFlow[j];
+      const thinI = Math.abs(iL) - THIN * reachI;
+      if (thinI > 0) {
+        const share = Math.min(1, thinI / ((1 - THIN) * reachI));
+        qL += share * ((flow[i] * aL) / areaI - qL);
+      }
+      const thinJ = Math.abs(jR) - THIN * reachJ;
+      if (thinJ > 0) {
+        const share = Math.min(1, thinJ / ((1 - THIN) * reachJ));
+        qR += share * ((flow[j] * aR) / areaJ - qR);
+      }
       const uL = qL / aL;
       const uR = qR / aR;
       const cI = celerity[i];
