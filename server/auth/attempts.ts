@@ -28,11 +28,11 @@ export function buildAttempts({ models, sequelize, now }: Platform) {
   async function begin(email: string): Promise<void> {
     const emailHash = keyOf(email);
     const at = now();
+    // Outside of the transaction: the shared lock of an insert that finds its row there would meet others' in a deadlock.
+    await SignInAttempt.bulkCreate([{ emailHash, count: 0, lastAt: at }], {
+      ignoreDuplicates: true,
+    });
     const wait = await sequelize.transaction(async (transaction) => {
-      await SignInAttempt.bulkCreate([{ emailHash, count: 0, lastAt: at }], {
-        ignoreDuplicates: true,
-        transaction,
-      });
       const kept = await SignInAttempt.findByPk(emailHash, {
         lock: transaction.LOCK.UPDATE,
         transaction,

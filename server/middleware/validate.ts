@@ -2,7 +2,7 @@ import type { RequestHandler } from 'express';
 import { ValidationError, type Schema } from 'yup';
 import { invalid } from '../errors';
 
-/** Checks and casts the body by a schema of `shared/`; all faults at once. Unknown keys are a fault. */
+/** Checks and casts the body by a schema of `shared/`; all faults at once. Unknown keys are dropped. */
 export const validate = (schema: Schema): RequestHandler =>
   async function validateBody(req, _res, next) {
     req.body = await check(schema, req.body ?? {});

@@ -11,6 +11,9 @@ import { readEnv } from '../../server/env';
 import type { UserModel } from '../../server/models/User';
 import type { Overrides } from '../../server/platform';
 
+// A real database and real hashes on a busy machine: a test that hangs is told from one that waits.
+jest.setTimeout(60_000);
+
 export interface TestServer {
   services: Services;
   /** Base address of a listening server, for what supertest does not speak (event streams). */

@@ -19,7 +19,7 @@ export function buildAcceptInvitation(
 ) {
   const { Invitation, StudyMember, User } = models;
 
-  return async ({ token, name, password }: InvitationAcceptBody): Promise<Tokens> => {
+  const accept = async ({ token, name, password }: InvitationAcceptBody): Promise<Tokens> => {
     await links.look('invitation', token);
     const passwordHash = await hashPassword(password);
     try {
@@ -82,4 +82,6 @@ export function buildAcceptInvitation(
       { transaction },
     );
   }
+
+  return accept;
 }

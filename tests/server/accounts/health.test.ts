@@ -1,4 +1,3 @@
-import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 
 let server: TestServer;
@@ -17,12 +16,29 @@ test('an address that is none is a JSON 404', async () => {
   expect(answer.body.error.code).toBe('notFound');
 });
 
-test('a user comes back as it was stored', async () => {
-  const user = await buildUser(server.services, ['modeller', 'client']);
-  const found = await server.services.models.User.findByPk(user.id, { include: 'firm' });
-  expect(found!.id).toBe(user.id);
-  expect(typeof found!.id).toBe('number');
-  expect(found!.roles).toEqual(['modeller', 'client']);
-  expect(found!.active).toBe(true);
-  expect(typeof found!.firm!.id).toBe('number');
+test('a body that is no JSON is told as such, and names the request', async () => {
+  const answer = await server.request
+    .post('/api/auth/sign-in')
+    .set('Content-Type', 'application/json')
+    .send('{"email":')
+    .expect(422);
+  expect(answer.body.error.code).toBe('invalid');
+  expect(answer.body.error.requestId).toBe(answer.headers['x-request-id']);
+});
+
+test('a body larger than is taken is 413', async () => {
+  const answer = await server.request
+    .post('/api/auth/sign-in')
+    .send({ email: 'x'.repeat(5e6), password: 'y' })
+    .expect(413);
+  expect(answer.body.error.code).toBe('tooLarge');
+});
+
+test('answers are nobody’s to keep, and no other site may frame or feed the product', async () => {
+  const { headers } = await server.request.get('/api/health');
+  expect(headers['cache-control']).toBe('no-store');
+  expect(headers['content-security-policy']).toContain("frame-ancestors 'none'");
+  expect(headers['content-security-policy']).toContain("script-src 'self'");
+  expect(headers['referrer-policy']).toBe('no-referrer');
+  expect(headers['x-powered-by']).toBeUndefined();
 });

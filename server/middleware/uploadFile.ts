@@ -1,0 +1,34 @@
+import type { Request, RequestHandler } from 'express';
+import multer, { memoryStorage } from 'multer';
+import { LIMITS } from '../../shared/limits';
+import { invalid } from '../errors';
+
+/** Stands after `authorize`: a stranger's file is not even taken from the wire. */
+export const uploadFile: RequestHandler = multer({
+  storage: memoryStorage(),
+  limits: {
+    fileSize: LIMITS.upload.bytes,
+    files: 1,
+    fields: 10,
+    fieldSize: 64 * 1024,
+    parts: 12,
+  },
+}).single('file');
+
+const MAX_NAME = 200;
+
+/** The file of the form. Throws `invalid` where there is none. */
+export function fileOf(req: Request): { name: string; bytes: Buffer } {
+  if (!req.file) throw invalid([{ path: 'file', message: 'Choose a file.' }]);
+  return { name: plainName(req.file.originalname), bytes: req.file.buffer };
+}
+
+/** The last part of the name, without signs that do something, cut to length. The form sends it as UTF-8 read as Latin-1. */
+function plainName(sent: string): string {
+  const utf8 = Buffer.from(sent, 'latin1').toString('utf8');
+  const name = utf8.includes('\ufffd') ? sent : utf8;
+  const last = name.split(/[/\\]/).at(-1)!;
+  // Control signs and direction marks never reach a page or a header.
+  const plain = last.replace(/[\p{Cc}\p{Cf}]/gu, '').trim();
+  return plain.slice(-MAX_NAME) || 'survey';
+}
