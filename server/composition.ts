@@ -8,6 +8,13 @@ import { authenticateWith } from './middleware/authenticate';
 import { buildRateLimits } from './middleware/rateLimits';
 import { buildPlatform, type Overrides } from './platform';
 import { buildAccounts } from './services/accounts';
+import { buildRuns } from './services/runs';
+import { buildReaches } from './services/reaches/reaches';
+import { buildScenarios } from './services/scenarios/scenarios';
+import { buildMembers } from './services/studies/members';
+import { buildStations } from './services/studies/stations';
+import { buildStudies } from './services/studies/studies';
+import { buildSurveys } from './services/surveys/surveys';
 
 /** The only constructor of dependencies: connects, brings the schema up to date, and builds every service once. */
 export async function compose(env: Env, overrides: Overrides = {}) {
@@ -27,6 +34,13 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       mailer,
       sessions,
       accounts: buildAccounts(platform, { background, mailer, sessions }),
+      studies: buildStudies(platform),
+      members: buildMembers(platform),
+      stations: buildStations(platform),
+      surveys: buildSurveys(platform),
+      reaches: buildReaches(platform),
+      scenarios: buildScenarios(platform),
+      runs: buildRuns(platform),
     };
   } catch (error) {
     await close();

@@ -20,6 +20,7 @@ export async function startServer(env: Env): Promise<RunningServer> {
   const services = await compose(env);
   try {
     const http = await listen(services);
+    services.runs.start();
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);
     sweep();
     const sweeping = setInterval(sweep, SWEEP_MS);

@@ -190,8 +190,8 @@ export function runDispatcher(parts: Parts) {
 function endingOf(outcome: Exclude<Outcome, { type: 'broken' }>): Ending {
   switch (outcome.type) {
     case 'routed': {
-      const { blocks, peakStage, peakFlow } = outcome;
-      return { state: 'routed', blocks, peakStage, peakFlow };
+      const { blocks, solver, peakStage, peakFlow } = outcome;
+      return { state: 'routed', blocks, solver, peakStage, peakFlow };
     }
     case 'failed':
       return { state: 'failed', failure: outcome.reason };

@@ -16,7 +16,7 @@ export interface Claim {
 export type Standing = 'held' | 'cancelRequested' | 'lost';
 
 export type Ending =
-  | { state: 'routed'; blocks: EncodedBlock[]; peakStage: number; peakFlow: number }
+  | { state: 'routed'; blocks: EncodedBlock[]; solver: string; peakStage: number; peakFlow: number }
   | { state: 'failed'; failure: string }
   | { state: 'cancelled' };
 
@@ -94,12 +94,19 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
         const told = run.cancelRequested ? ({ state: 'cancelled' } as const) : ending;
         const finished = { ...noLease, finishedAt: now as unknown as Date };
         if (told.state === 'routed') {
-          const { blocks, peakStage, peakFlow } = told;
+          const { blocks, solver, peakStage, peakFlow } = told;
           for (const { kind, part, bytes } of blocks) {
             const row = { runId, kind, part, bytes: Buffer.from(bytes) };
             await RunBlock.create(row, { transaction });
           }
-          const values = { ...finished, state: told.state, progress: 1, peakStage, peakFlow };
+          const values = {
+            ...finished,
+            state: told.state,
+            progress: 1,
+            solverVersion: solver,
+            peakStage,
+            peakFlow,
+          };
           await run.update(values, { transaction });
         } else {
           const failure = told.state === 'failed' ? told.failure : null;

@@ -51,6 +51,7 @@ function route(
   return {
     type: 'routed',
     blocks: encodeRun(caseFile, result, wave.finish()),
+    solver: result.solver,
     peakStage: outlet.stage,
     peakFlow: outlet.flow,
   };

@@ -30,6 +30,11 @@ export function workerFile(directory: string, name: string): string {
   return existsSync(compiled) ? compiled : path.join(directory, `${name}.ts`);
 }
 
+/** How a thread reads its entry: TypeScript through tsx, as this process does. */
+export const workerOptions = (file: string) => ({
+  execArgv: file.endsWith('.ts') ? ['--require', 'tsx/cjs'] : [],
+});
+
 export const RUN_WORKER = workerFile(__dirname, 'runWorker');
 
 export function startWorker(
@@ -41,7 +46,7 @@ export function startWorker(
   const stopFlag = new SharedArrayBuffer(4);
   const worker = new Worker(file, {
     workerData: { caseBytes, stopFlag } satisfies RunWorkerData,
-    execArgv: file.endsWith('.ts') ? ['--require', 'tsx/cjs'] : [],
+    ...workerOptions(file),
     resourceLimits: { maxOldGenerationSizeMb: heapMegabytes },
   });
   let cancelled = false;

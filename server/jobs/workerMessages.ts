@@ -19,7 +19,7 @@ export interface LiveSurface {
 
 /** How a run ended that was not broken off. */
 export type WorkerResult =
-  | { type: 'routed'; blocks: EncodedBlock[]; peakStage: number; peakFlow: number }
+  | { type: 'routed'; blocks: EncodedBlock[]; solver: string; peakStage: number; peakFlow: number }
   | { type: 'failed'; reason: string }
   | { type: 'cancelled' };
 

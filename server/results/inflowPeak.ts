@@ -17,7 +17,7 @@ export function inflowPeak(caseFile: CaseFile): { flow: number; time: number } |
 }
 
 /** Linear between the given values, held outside. */
-function flowAt(times: number[], flows: number[], t: number): number {
+export function flowAt(times: number[], flows: number[], t: number): number {
   const last = times.length - 1;
   if (t <= times[0]) return flows[0];
   if (t >= times[last]) return flows[last];

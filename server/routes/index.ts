@@ -4,6 +4,14 @@ import { authRoutes } from './auth';
 import { healthRoutes } from './health';
 import { invitationRoutes } from './invitations';
 import { meRoutes } from './me';
+import { runRoutes } from './runs';
+import { reachRoutes } from './reaches';
+import { scenarioRoutes } from './scenarios';
+import { stationRoutes } from './stations';
+import { studyRoutes } from './studies';
+import { surveyRoutes } from './surveys';
+import { tableRoutes } from './tables';
+import { templateRoutes } from './templates';
 import { userRoutes } from './users';
 
 /** Every module of routes; each writes its full addresses below /api. A new one is one line. */
@@ -13,4 +21,12 @@ export const ROUTES: ((services: Services) => Router)[] = [
   meRoutes,
   userRoutes,
   invitationRoutes,
+  runRoutes,
+  reachRoutes,
+  scenarioRoutes,
+  stationRoutes,
+  studyRoutes,
+  surveyRoutes,
+  tableRoutes,
+  templateRoutes,
 ];

@@ -1,5 +1,6 @@
 import { parentPort, workerData } from 'node:worker_threads';
 import { gunzipSync, gzipSync } from 'node:zlib';
+import type { EncodedBlock } from '../../../server/results/blocks/blockTypes';
 import type { RunWorkerData, WorkerMessage } from '../../../server/jobs/workerMessages';
 
 /** What a stand-in for a run does; it travels where the frozen case would. */
@@ -29,7 +30,8 @@ if (stopped()) {
   post({ type: 'cancelled' });
 } else if (does === 'routes') {
   const bytes = gzipSync('{}');
-  post({ type: 'routed', blocks: [{ kind: 'facts', part: 0, bytes }], peakStage: 4, peakFlow: 5 });
+  const blocks: EncodedBlock[] = [{ kind: 'facts', part: 0, bytes }];
+  post({ type: 'routed', blocks, solver: '1.0.0', peakStage: 4, peakFlow: 5 });
 } else if (does === 'fails') {
   post({ type: 'failed', reason: 'The run failed at chainage 10.0 m at 5.0 s: too steep.' });
 } else if (does === 'throws') {

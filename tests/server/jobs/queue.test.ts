@@ -22,7 +22,13 @@ beforeEach(() => server.services.models.Run.destroy({ where: {} }));
 const reload = async (id: number) => (await server.services.models.Run.findByPk(id))!;
 const blockCount = (runId: number) => server.services.models.RunBlock.count({ where: { runId } });
 const block = { kind: 'facts', part: 0, bytes: new Uint8Array([1, 2, 3]) } as const;
-const routed: Ending = { state: 'routed', blocks: [block], peakStage: 1, peakFlow: 2 };
+const routed: Ending = {
+  state: 'routed',
+  blocks: [block],
+  solver: '1.0.1',
+  peakStage: 1,
+  peakFlow: 2,
+};
 
 test('many claimers at once take each run exactly once, the oldest first', async () => {
   for (let k = 0; k < 12; k++) await runs.add(routes);
@@ -75,7 +81,12 @@ test('only who holds the claim can store results, once', async () => {
   expect(rivals.filter(Boolean)).toHaveLength(1);
   expect(await blockCount(id)).toBe(1);
   const run = await reload(id);
-  expect(run).toMatchObject({ state: 'routed', progress: 1, peakStage: 1, leaseOwner: null });
+  expect(run).toMatchObject({
+    state: 'routed',
+    solverVersion: '1.0.1',
+    peakStage: 1,
+    leaseOwner: null,
+  });
   expect(run.finishedAt).toBeInstanceOf(Date);
 });
 

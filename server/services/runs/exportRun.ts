@@ -1,0 +1,77 @@
+import Piscina from 'piscina';
+import type { Platform } from '../../platform';
+import { workerFile, workerOptions } from '../../jobs/startWorker';
+import type { RunModel } from '../../models/Run';
+import type { EncodedBlock } from '../../results/blocks/blockTypes';
+import { csv } from '../../results/exports/csv';
+import type { ExportedRun } from '../../results/exports/exportedRun';
+import type { WorkbookTask } from '../../results/exports/workbookWorker';
+import { thawCase } from './freezeCase';
+import { assertRouted, type buildReadResults } from './readResults';
+
+const IDLE_MILLISECONDS = 30_000;
+const HEAP_MEGABYTES = 2048;
+const WAITING = 20;
+
+/** Files of a run to take away. The workbook is written in a thread of its own, one at a time. */
+export function buildExportRun(
+  { models, onClose }: Platform,
+  results: ReturnType<typeof buildReadResults>,
+) {
+  let threads: Piscina<WorkbookTask, Uint8Array> | undefined;
+  const pool = () => {
+    const file = workerFile(`${__dirname}/../../results/exports`, 'workbookWorker');
+    threads ??= new Piscina<WorkbookTask, Uint8Array>({
+      ...workerOptions(file),
+      filename: file,
+      minThreads: 0,
+      maxThreads: 1,
+      maxQueue: WAITING,
+      idleTimeout: IDLE_MILLISECONDS,
+      resourceLimits: { maxOldGenerationSizeMb: HEAP_MEGABYTES },
+    });
+    return threads;
+  };
+  onClose(() => threads?.destroy());
+
+  const caseBytesOf = async (runId: number): Promise<Buffer> => {
+    const attributes = ['id', 'caseBytes'];
+    return (await models.Run.unscoped().findByPk(runId, { attributes, rejectOnEmpty: true }))
+      .caseBytes;
+  };
+
+  const about = async (run: RunModel): Promise<ExportedRun> => ({
+    number: run.number,
+    studyTitle: run.study!.title,
+    scenarioName: run.scenarioName,
+    verticalDatum: run.study!.verticalDatum,
+    unitSystem: run.study!.unitSystem,
+    requestedBy: run.requester!.name,
+    finishedAt: run.finishedAt!.toISOString(),
+    startsAt: run.startsAt?.toISOString() ?? null,
+    caseHash: run.caseHash,
+    solverVersion: run.solverVersion,
+    stations: await results.stations(run.studyId),
+  });
+
+  return {
+    /** The frozen case, to the byte: of any run, whatever became of it. */
+    caseFile: async (run: RunModel): Promise<Buffer> => thawCase(await caseBytesOf(run.id)),
+
+    /** Pieces of text, made as they are taken. */
+    async csv(run: RunModel): Promise<AsyncGenerator<string>> {
+      return csv(results.open(run), await about(run));
+    },
+
+    async workbook(run: RunModel): Promise<Buffer> {
+      assertRouted(run);
+      const [rows, caseBytes, said] = await Promise.all([
+        models.RunBlock.findAll({ where: { runId: run.id } }),
+        caseBytesOf(run.id),
+        about(run),
+      ]);
+      const blocks = rows.map(({ kind, part, bytes }): EncodedBlock => ({ kind, part, bytes }));
+      return Buffer.from(await pool().run({ blocks, caseBytes, run: said }));
+    },
+  };
+}

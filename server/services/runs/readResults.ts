@@ -1,0 +1,68 @@
+import type { SurfaceQuery } from '../../../shared/runs/schemas';
+import { encodeSurface } from '../../../shared/runs/surfaceBlock';
+import { RUN_STATE_WORDS, type RunSeries, type RunSummary } from '../../../shared/runs/types';
+import type { Station } from '../../../shared/studies/types';
+import { AppError, conflict } from '../../errors';
+import type { Models } from '../../models';
+import type { RunModel } from '../../models/Run';
+import { runBlocks, type ReadBlocks, type RunBlocks } from '../../results/blocks/runBlocks';
+import { seriesAt } from '../../results/seriesAt';
+import { summaryOf } from '../../results/summaryOf';
+import { surfaceOf } from '../../results/surfaceOf';
+
+/** What a screen needs of a routed run. Each throws `conflict` where the run has no results. */
+export function buildReadResults({ RunBlock, Station }: Models) {
+  const readBlocks =
+    (runId: number): ReadBlocks =>
+    async (kind, parts) => {
+      const rows = await RunBlock.findAll({ where: { runId, kind, part: parts } });
+      const stored = new Map(rows.map(({ part, bytes }) => [part, bytes]));
+      return parts.map((part) => {
+        const bytes = stored.get(part);
+        if (!bytes) throw new Error(`Run ${runId} has no block ${kind}/${part}.`);
+        return bytes;
+      });
+    };
+
+  const open = (run: RunModel): RunBlocks => {
+    assertRouted(run);
+    return runBlocks(readBlocks(run.id));
+  };
+
+  const stations = async (studyId: number): Promise<Station[]> =>
+    (await Station.findAll({ where: { studyId }, order: ['chainage'] })).map(
+      ({ id, name, chainage }) => ({ id, name, chainage }),
+    );
+
+  return {
+    open,
+    stations,
+
+    async summary(run: RunModel): Promise<RunSummary> {
+      return summaryOf(run.id, open(run), await stations(run.studyId));
+    },
+
+    /** Throws `invalid` off the reach. */
+    async series(run: RunModel, chainage: number): Promise<RunSeries> {
+      const blocks = open(run);
+      const series = await seriesAt(blocks, chainage);
+      if (series) return series;
+      const { sections } = await blocks.facts();
+      const [from, to] = [sections[0].chainage, sections[sections.length - 1].chainage];
+      const message = `The reach goes from chainage ${from} m to ${to} m; choose a place on it.`;
+      throw new AppError('invalid', message, { faults: [{ path: 'chainage', message }] });
+    },
+
+    async surface(run: RunModel, wanted: SurfaceQuery): Promise<ArrayBuffer> {
+      return encodeSurface(await surfaceOf(open(run), wanted));
+    },
+  };
+}
+
+export function assertRouted({ state, number }: RunModel): void {
+  if (state === 'routed') return;
+  throw conflict(
+    `Run ${number} has no results: it is ${RUN_STATE_WORDS[state].toLowerCase()}. ` +
+      'Results can be read when it is routed.',
+  );
+}

@@ -1,0 +1,75 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
+import type { Fault } from '../../../shared/errors';
+import { buildCase } from '../../../shared/scenarios/buildCase';
+import { checkScenario } from '../../../shared/scenarios/checkScenario';
+import type { Section } from '../../../shared/surveys/types';
+import { unpackJson } from '../../database/packedJson';
+import { AppError } from '../../errors';
+import type { RunModel } from '../../models/Run';
+import type { ScenarioModel } from '../../models/Scenario';
+import type { Platform } from '../../platform';
+import { inflowOutline } from '../../results/inflowOutline';
+import { SOLVER_VERSION } from '../../solvers';
+import { freezeCase } from './freezeCase';
+
+/**
+ * Freezes a scenario as a case file and puts it into the queue as the study's next run.
+ * Throws `scenarioIncomplete` with every fault where it cannot be routed.
+ */
+export function buildRequestRun({ sequelize, models, now }: Platform, queued: () => void) {
+  const { Reach, Run, Study } = models;
+
+  return async (actor: { id: number }, scenario: ScenarioModel): Promise<RunModel> => {
+    const { studyId, reachId, body } = scenario;
+    const [reach, study] = await Promise.all([
+      Reach.scope('withSections').findByPk(reachId, { rejectOnEmpty: true }),
+      Study.findByPk(studyId, { rejectOnEmpty: true }),
+    ]);
+    const sections = await unpackJson<Section[]>(reach.sections);
+    const caseFile = caseOf(scenario, sections, `${study.title}: ${scenario.name}`);
+    const frozen = await freezeCase(caseFile);
+
+    const run = await sequelize.transaction(async (transaction) => {
+      // Whoever holds the study gives the next number.
+      const lock = transaction.LOCK.UPDATE;
+      const held = await Study.findByPk(studyId, { lock, transaction, rejectOnEmpty: true });
+      const last = (await Run.max('number', { where: { studyId }, transaction })) as number | null;
+      held.changed('updatedAt', true);
+      await held.save({ transaction });
+      return Run.create(
+        {
+          studyId,
+          scenarioId: scenario.id,
+          reachId,
+          number: (last ?? 0) + 1,
+          scenarioName: scenario.name,
+          state: 'queued',
+          ...frozen,
+          solverVersion: SOLVER_VERSION,
+          duration: caseFile.numerics.duration,
+          startsAt: body.startsAt === null ? null : new Date(body.startsAt),
+          inflow: inflowOutline(caseFile),
+          requestedBy: actor.id,
+          requestedAt: now(),
+        },
+        { transaction },
+      );
+    });
+    queued();
+    return run;
+  };
+}
+
+function caseOf({ body }: ScenarioModel, sections: Section[], title: string): CaseFile {
+  const { faults } = checkScenario(body, sections);
+  if (faults.length > 0) throw incomplete(faults);
+  return buildCase(body, sections, title);
+}
+
+const incomplete = (faults: Fault[]) =>
+  new AppError(
+    'scenarioIncomplete',
+    `The scenario cannot be routed yet: ${faults.length === 1 ? 'one thing is' : `${faults.length} things are`} ` +
+      'missing or wrong. Nothing was started; mend what is marked and ask again.',
+    { faults },
+  );
