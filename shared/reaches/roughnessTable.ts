@@ -180,6 +180,13 @@ export const ROUGHNESS_TABLE: readonly RoughnessRow[] = [
     max: 0.06,
   },
   {
+    group: 'Major stream, top width above 30 m (100 ft)',
+    description: 'Irregular and rough section',
+    min: 0.035,
+    normal: null,
+    max: 0.1,
+  },
+  {
     group: 'Excavated',
     description: 'Earth, straight, uniform, clean, recently completed',
     min: 0.016,

@@ -26,6 +26,8 @@ const BROKEN =
   'The workbook is damaged: it cannot be unpacked. Open it, save it anew and send that.';
 const BOMB = `The workbook unpacks to more than ${LIMITS.upload.unpackedBytes / 1024 / 1024} MB. Send the sections alone, without pictures and spare sheets.`;
 
+const CONTENTS = '[Content_Types].xml';
+
 interface Entry {
   name: string;
   method: number;
@@ -36,10 +38,8 @@ interface Entry {
 
 /** Pictures, macros, drawings, links and the like are never unpacked. */
 const holdsCells = (name: string) =>
-  /^(\[Content_Types\]\.xml|_rels\/\.rels)$/.test(name) ||
-  /^(xl\/)?(workbook\.xml|_rels\/workbook\.xml\.rels|sharedStrings\.xml|styles\.xml|worksheets\/[^/]+\.xml)$/i.test(
-    name,
-  );
+  /^(\[Content_Types\]\.xml|_rels\/\.rels|docProps\/\w+\.xml)$/.test(name) ||
+  /^(xl\/)?(\w+\.xml|_rels\/workbook\.xml\.rels|(worksheets|theme)\/[^/]+\.xml)$/i.test(name);
 
 export function unzipWorkbook(bytes: Buffer): PackedPart[] {
   const entries = readDirectory(bytes);
@@ -48,11 +48,23 @@ export function unzipWorkbook(bytes: Buffer): PackedPart[] {
   const declared = wanted.reduce((sum, entry) => sum + entry.unpacked, 0);
   if (declared > LIMITS.upload.unpackedBytes) throw tooLarge(BOMB);
   let left: number = LIMITS.upload.unpackedBytes;
-  return wanted.map((entry) => {
+  const parts = wanted.map((entry) => {
     const content = unpack(bytes, entry, left);
     left -= content.length;
     return { name: entry.name, content };
   });
+  return parts.map((part) => (part.name === CONTENTS ? onlyKept(part, parts) : part));
+}
+
+/** The list of contents without the parts that were left packed, lest the reader look for them. */
+function onlyKept(contents: PackedPart, parts: PackedPart[]): PackedPart {
+  const kept = new Set(parts.map(({ name }) => `/${name}`.toLowerCase()));
+  const list = contents.content
+    .toString('utf8')
+    .replace(/<Override\b[^>]*\bPartName="([^"]*)"[^>]*>/g, (entry, name: string) =>
+      kept.has(name.toLowerCase()) ? entry : '',
+    );
+  return { name: contents.name, content: Buffer.from(list, 'utf8') };
 }
 
 function readDirectory(bytes: Buffer): Entry[] {

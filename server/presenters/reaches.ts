@@ -1,0 +1,29 @@
+import type { Reach, ReachRow } from '../../shared/reaches/types';
+import type { Section } from '../../shared/surveys/types';
+import type { ReachModel } from '../models/Reach';
+import { adviseReach } from '../services/reaches/advice/adviseReach';
+import { describeSection } from '../services/reaches/describeSection';
+
+/** Needs the reach's `survey` and `updater`. */
+export const presentReachRow = (reach: ReachModel): ReachRow => ({
+  id: reach.id,
+  name: reach.name,
+  surveyRevisionId: reach.surveyRevisionId,
+  revision: reach.survey!.revision,
+  sectionCount: reach.sectionCount,
+  firstChainage: reach.firstChainage,
+  lastChainage: reach.lastChainage,
+  version: reach.version,
+  updatedAt: reach.updatedAt.toISOString(),
+  updatedBy: reach.updater!.name,
+});
+
+export function presentReach(reach: ReachModel, sections: Section[]): Reach {
+  const described = sections.map(describeSection);
+  return {
+    ...presentReachRow(reach),
+    studyId: reach.studyId,
+    sections: described,
+    advice: adviseReach(described),
+  };
+}

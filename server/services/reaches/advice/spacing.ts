@@ -1,0 +1,38 @@
+import { between, pairs, type AdviceRule } from './types';
+
+/** Share of D/S, and channel widths, that two sections may lie apart. Samuels (1989, 1990); numbers quoted from memory. */
+const DEPTH_RULE = 0.15;
+const WIDTHS = 20;
+/** On steeper reaches the rule of depth over slope asks for sections every few metres; it was made for rivers in subcritical flow. */
+const STEEP = 0.005;
+const SOURCE =
+  'Samuels (1989), Backwater lengths in rivers, Proc. ICE Part 2, 87; Samuels (1990), Cross-section location in 1-D models';
+
+/** Sections far enough apart that what lies between is guessed. */
+export const adviseSpacing: AdviceRule = (sections) => {
+  const [first, last] = [sections[0], sections[sections.length - 1]];
+  const slope = (first.thalweg - last.thalweg) / (last.chainage - first.chainage);
+  return pairs(sections).flatMap(([above, below]) => {
+    const distance = below.chainage - above.chainage;
+    const depth = 0.5 * (above.bankfull.depth + below.bankfull.depth);
+    const width = 0.5 * (above.bankfull.topWidth + below.bankfull.topWidth);
+    const byDepth = slope > 0 && slope <= STEEP ? (DEPTH_RULE * depth) / slope : Infinity;
+    const byWidth = WIDTHS * width;
+    const most = Math.min(byDepth, byWidth);
+    if (!(distance > most)) return [];
+    const reason =
+      byDepth <= byWidth
+        ? `0.15 of bank-full depth over slope: 0.15 × ${depth.toFixed(1)} m ÷ ${slope.toFixed(5)} = ${most.toFixed(0)} m. Backwater is lost between sections that lie further apart.`
+        : `20 bank-full widths of ${width.toFixed(0)} m are ${most.toFixed(0)} m. Storage and bends between sections further apart are guessed.`;
+    return [
+      {
+        code: 'spacing',
+        sectionIds: [above.id, below.id],
+        chainage: between(above, below),
+        message: `${above.id} and ${below.id} lie ${distance.toFixed(0)} m apart; ${most.toFixed(0)} m or less is advised.`,
+        reason,
+        source: SOURCE,
+      },
+    ];
+  });
+};

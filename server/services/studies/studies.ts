@@ -1,0 +1,97 @@
+import { fn, col } from 'sequelize';
+import type { StudyBody } from '../../../shared/studies/schemas';
+import type { StudyCounts } from '../../../shared/studies/types';
+import type { StudyModel } from '../../models/Study';
+import type { Platform } from '../../platform';
+import { may } from '../../policies/decide';
+import type { Actor, Loaded } from '../../policies/subject';
+import { studySubject } from './studySubject';
+
+/** A study in a list, with what the person may know of its work. */
+export interface ListedStudy {
+  study: StudyModel;
+  surveyRevision: number | null;
+  runCount: number | null;
+}
+
+export function buildStudies({ models }: Platform) {
+  const { Study, StudyMember, SurveyRevision, Scenario, Run } = models;
+
+  /** For `authorize`; also of everything that belongs to a study. */
+  async function load(id: number, actor: Actor): Promise<Loaded<StudyModel> | null> {
+    const study = await Study.findByPk(id, { include: 'creator' });
+    return study && { record: study, subject: await studySubject(models, study, actor) };
+  }
+
+  /** What the person may read, newest work first. */
+  async function list(actor: Actor): Promise<ListedStudy[]> {
+    const studies = await Study.findAll({
+      where: { firmId: actor.firmId },
+      order: [
+        ['updatedAt', 'DESC'],
+        ['id', 'DESC'],
+      ],
+    });
+    const memberships = await StudyMember.findAll({ where: { userId: actor.id } });
+    const memberAs = new Map(memberships.map((member) => [member.studyId, member.as]));
+    const visible = studies.filter(({ id, firmId }) =>
+      may(actor, 'study.read', { firmId, memberAs: memberAs.get(id) ?? null }),
+    );
+    const [revisions, runs] = await Promise.all([
+      newestRevisions(visible.map(({ id }) => id)),
+      runCounts(visible.map(({ id }) => id)),
+    ]);
+    return visible.map((study) => {
+      const seesWork = may(actor, 'reach.read', { firmId: study.firmId });
+      return {
+        study,
+        surveyRevision: seesWork ? (revisions.get(study.id) ?? null) : null,
+        runCount: seesWork ? (runs.get(study.id) ?? 0) : null,
+      };
+    });
+  }
+
+  async function create(actor: Actor, body: StudyBody): Promise<StudyModel> {
+    const study = await Study.create({ ...body, firmId: actor.firmId, createdBy: actor.id });
+    return study.reload({ include: 'creator' });
+  }
+
+  const change = (study: StudyModel, body: StudyBody): Promise<StudyModel> => study.update(body);
+
+  /** What stands in the study; for those who may see its work. */
+  async function counts({ id: studyId }: StudyModel): Promise<StudyCounts> {
+    const [newest, scenarios, runs] = await Promise.all([
+      SurveyRevision.findOne({ where: { studyId }, order: [['revision', 'DESC']] }),
+      Scenario.count({ where: { studyId } }),
+      Run.count({ where: { studyId } }),
+    ]);
+    return {
+      surveyRevision: newest?.revision ?? null,
+      sections: newest?.sectionCount ?? null,
+      scenarios,
+      runs,
+    };
+  }
+
+  async function newestRevisions(studyIds: number[]): Promise<Map<number, number>> {
+    const rows = await SurveyRevision.unscoped().findAll({
+      where: { studyId: studyIds },
+      attributes: ['studyId', [fn('MAX', col('revision')), 'revision']],
+      group: ['studyId'],
+    });
+    return new Map(rows.map((row) => [row.studyId, Number(row.revision)]));
+  }
+
+  async function runCounts(studyIds: number[]): Promise<Map<number, number>> {
+    const rows = await Run.unscoped().findAll({
+      where: { studyId: studyIds },
+      attributes: ['studyId', [fn('COUNT', col('id')), 'number']],
+      group: ['studyId'],
+    });
+    return new Map(rows.map((row) => [row.studyId, Number(row.number)]));
+  }
+
+  return { load, list, create, change, counts };
+}
+
+export type StudiesService = ReturnType<typeof buildStudies>;

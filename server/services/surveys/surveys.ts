@@ -1,0 +1,154 @@
+import { createHash } from 'node:crypto';
+import type { MatchChoice, Section, SurveyReading } from '../../../shared/surveys/types';
+import { AppError, conflict } from '../../errors';
+import { packJson, unpackJson } from '../../database/packedJson';
+import type { StudyModel } from '../../models/Study';
+import type { SurveyRefusalModel } from '../../models/SurveyRefusal';
+import type { SurveyRevisionModel } from '../../models/SurveyRevision';
+import type { Platform } from '../../platform';
+import { may } from '../../policies/decide';
+import type { Actor, Loaded, Subject } from '../../policies/subject';
+import { studySubject } from '../studies/studySubject';
+import { touchStudy } from '../studies/touchStudy';
+import { readFile, type SentFile } from '../files/readFile';
+
+interface Sent {
+  study: StudyModel;
+  file: SentFile;
+  choice: MatchChoice | null;
+}
+
+/** Surveys of a study: read, taken in as revisions that never change, or refused. */
+export function buildSurveys(platform: Platform) {
+  const { models, sequelize, now } = platform;
+  const { Reach, Study, SurveyRefusal, SurveyRevision } = models;
+
+  /** For `authorize`. */
+  async function load(id: number, actor: Actor): Promise<Loaded<SurveyRevisionModel> | null> {
+    const revision = await SurveyRevision.scope('withSections').findByPk(id, { include: 'sender' });
+    return revision && { record: revision, subject: await subjectOf(revision, actor) };
+  }
+
+  /** For `authorize`. */
+  async function loadRefusal(id: number, actor: Actor): Promise<Loaded<SurveyRefusalModel> | null> {
+    const refusal = await SurveyRefusal.findByPk(id, { include: 'sender' });
+    return refusal && { record: refusal, subject: await subjectOf(refusal, actor) };
+  }
+
+  async function subjectOf(
+    sent: { studyId: number; sentBy: number },
+    actor: Actor,
+  ): Promise<Subject> {
+    const study = await Study.findByPk(sent.studyId, { rejectOnEmpty: true });
+    return { ...(await studySubject(models, study, actor)), ownerId: sent.sentBy };
+  }
+
+  /** What the person may read of a study's revisions and refusals, newest first. */
+  async function list(study: StudyModel, actor: Actor) {
+    const subject = await studySubject(models, study, actor);
+    const visible = ({ sentBy }: { sentBy: number }) =>
+      may(actor, 'survey.read', { ...subject, ownerId: sentBy });
+    const where = { studyId: study.id };
+    const [revisions, refusals] = await Promise.all([
+      SurveyRevision.findAll({ where, include: 'sender', order: [['revision', 'DESC']] }),
+      SurveyRefusal.findAll({ where, include: 'sender', order: [['id', 'DESC']], limit: 50 }),
+    ]);
+    return { revisions: revisions.filter(visible), refusals: refusals.filter(visible) };
+  }
+
+  /** Reads and stores nothing. Throws `unreadable`, `tooLarge`, `timeout`. */
+  const read = ({ study, file, choice }: Sent): Promise<SurveyReading> =>
+    readFile(file, {
+      kind: 'survey',
+      options: {
+        fileName: file.name,
+        choice,
+        defaultUnit: study.unitSystem === 'usCustomary' ? 'ft' : 'm',
+      },
+    });
+
+  /**
+   * Takes a file in as the study's next revision and makes its reach, both or neither. Throws as `read` does,
+   * `surveyRefused` where it has faults, of which alone a note is kept, and `conflict` where it is the newest revision again.
+   */
+  async function accept(sent: Sent & { actor: Actor; note: string }): Promise<SurveyRevisionModel> {
+    const { actor, study, file } = sent;
+    const reading = await read(sent);
+    const faults = reading.faults.filter(({ severity }) => severity === 'fault');
+    if (faults.length > 0) return refuse(sent, reading);
+    const { sections } = reading;
+    const packed = await packJson(sections);
+    const fileHash = createHash('sha256').update(file.bytes).digest('hex');
+    const extent = {
+      sectionCount: sections.length,
+      firstChainage: sections[0].chainage,
+      lastChainage: sections[sections.length - 1].chainage,
+    };
+    return sequelize.transaction(async (transaction) => {
+      // Numbers are counted under the study's lock, so that two that arrive at once follow each other.
+      await Study.findByPk(study.id, { transaction, lock: transaction.LOCK.UPDATE });
+      const newest = await SurveyRevision.scope('withSections').findOne({
+        where: { studyId: study.id },
+        order: [['revision', 'DESC']],
+        transaction,
+      });
+      if (newest?.fileHash === fileHash && newest.sections.equals(packed))
+        throw conflict(
+          `This file is revision ${newest.revision} already. Nothing was stored twice.`,
+        );
+      const revision = await SurveyRevision.create(
+        {
+          ...extent,
+          studyId: study.id,
+          revision: (newest?.revision ?? 0) + 1,
+          fileName: file.name,
+          fileHash,
+          file: file.bytes,
+          sections: packed,
+          note: sent.note,
+          pointCount: reading.pointCount,
+          sentBy: actor.id,
+          sentAt: now(),
+        },
+        { transaction },
+      );
+      await Reach.create(
+        {
+          ...extent,
+          studyId: study.id,
+          surveyRevisionId: revision.id,
+          name: `Revision ${revision.revision}`,
+          sections: packed,
+          updatedBy: actor.id,
+        },
+        { transaction },
+      );
+      await touchStudy(platform, study.id, transaction);
+      return revision.reload({ include: 'sender', transaction });
+    });
+  }
+
+  async function refuse(sent: Sent & { actor: Actor }, reading: SurveyReading): Promise<never> {
+    const { faults, faultsNotListed } = reading;
+    const count = faults.filter(({ severity }) => severity === 'fault').length + faultsNotListed;
+    await SurveyRefusal.create({
+      studyId: sent.study.id,
+      fileName: sent.file.name,
+      faultCount: count,
+      faults,
+      sentBy: sent.actor.id,
+      sentAt: now(),
+    });
+    throw new AppError(
+      'surveyRefused',
+      `Not taken in: ${count === 1 ? '1 fault' : `${count} faults`}. Nothing of the file was kept. Mend it and send it again.`,
+      { details: reading },
+    );
+  }
+
+  const sectionsOf = (revision: SurveyRevisionModel) => unpackJson<Section[]>(revision.sections);
+
+  return { load, loadRefusal, list, read, accept, sectionsOf };
+}
+
+export type SurveysService = ReturnType<typeof buildSurveys>;
