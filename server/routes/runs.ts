@@ -15,17 +15,17 @@ import type { StudyModel } from '../models/Study';
 import { may } from '../policies/decide';
 import { presentRun, presentRunRow } from '../presenters/runs';
 
-export function runRoutes({ authenticate, runs }: Services): Router {
+export function runRoutes({ authenticate, runs, scenarios, studies }: Services): Router {
   const { find, change, results, exports } = runs;
   const router = Router();
-  const readRun = authorize('run.read', (req) => find.load(pathId(req, 'runId')));
-  const changeRun = authorize('run.change', (req) => find.load(pathId(req, 'runId')));
+  const readRun = authorize('run.read', (req, actor) => find.load(pathId(req, 'runId'), actor));
+  const changeRun = authorize('run.change', (req, actor) => find.load(pathId(req, 'runId'), actor));
   const runOf = (res: Response) => recordOf<RunModel>(res);
 
   router.get(
     '/studies/:studyId/runs',
     authenticate,
-    authorize('run.read', (req) => find.loadStudy(pathId(req, 'studyId'))),
+    authorize('run.read', (req, actor) => studies.load(pathId(req, 'studyId'), actor)),
     async (_req, res) => {
       res.json((await find.list(recordOf<StudyModel>(res).id)).map(presentRunRow));
     },
@@ -34,7 +34,7 @@ export function runRoutes({ authenticate, runs }: Services): Router {
   router.post(
     '/scenarios/:scenarioId/runs',
     authenticate,
-    authorize('run.request', (req) => find.loadScenario(pathId(req, 'scenarioId'))),
+    authorize('run.request', (req, actor) => scenarios.load(pathId(req, 'scenarioId'), actor)),
     async (_req, res) => {
       const actor = actorOf(res);
       const { id } = await runs.request(actor, recordOf<ScenarioModel>(res));
@@ -58,14 +58,16 @@ export function runRoutes({ authenticate, runs }: Services): Router {
 
   router.get('/runs/:runId/events', authenticate, readRun, (req, res) => {
     const run = runOf(res);
-    const subject = { firmId: run.study!.firmId };
     const stream = eventStream(res, () => stop());
     const stop = runs.watch(run.id, {
       send: (event) => {
         if (event.type === 'ended' || !stream.isBehind()) stream.send(event);
       },
-      stillAllowed: async () =>
-        (await stillSignedIn(authenticate, req, res)) && may(actorOf(res), 'run.read', subject),
+      stillAllowed: async () => {
+        if (!(await stillSignedIn(authenticate, req, res))) return false;
+        const now = await find.load(run.id, actorOf(res));
+        return now !== null && may(actorOf(res), 'run.read', now.subject);
+      },
       close: stream.close,
     });
   });

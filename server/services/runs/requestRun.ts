@@ -10,13 +10,15 @@ import type { ScenarioModel } from '../../models/Scenario';
 import type { Platform } from '../../platform';
 import { inflowOutline } from '../../results/inflowOutline';
 import { SOLVER_VERSION } from '../../solvers';
+import { touchStudy } from '../studies/touchStudy';
 import { freezeCase } from './freezeCase';
 
 /**
  * Freezes a scenario as a case file and puts it into the queue as the study's next run.
  * Throws `scenarioIncomplete` with every fault where it cannot be routed.
  */
-export function buildRequestRun({ sequelize, models, now }: Platform, queued: () => void) {
+export function buildRequestRun(platform: Platform, queued: () => void) {
+  const { sequelize, models, now } = platform;
   const { Reach, Run, Study } = models;
 
   return async (actor: { id: number }, scenario: ScenarioModel): Promise<RunModel> => {
@@ -32,10 +34,9 @@ export function buildRequestRun({ sequelize, models, now }: Platform, queued: ()
     const run = await sequelize.transaction(async (transaction) => {
       // Whoever holds the study gives the next number.
       const lock = transaction.LOCK.UPDATE;
-      const held = await Study.findByPk(studyId, { lock, transaction, rejectOnEmpty: true });
+      await Study.findByPk(studyId, { lock, transaction });
       const last = (await Run.max('number', { where: { studyId }, transaction })) as number | null;
-      held.changed('updatedAt', true);
-      await held.save({ transaction });
+      await touchStudy(platform, studyId, transaction);
       return Run.create(
         {
           studyId,
