@@ -68,7 +68,8 @@ export function Button(props: ButtonProps) {
       disabled={off}
       onPress={href ? undefined : onPress}
       {...aria({ 'aria-describedby': hint ? hintId : undefined })}
-      style={box}
+      // A link hands its style on through a slot, which takes no function.
+      style={href ? box({ pressed: false }) : box}
     >
       {busy ? <ActivityIndicator size="small" color={ink} /> : null}
       <Txt strong style={{ color: ink }}>
