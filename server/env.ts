@@ -49,7 +49,10 @@ const settings = object({
     .default('info'),
 });
 
-/** Throws `Error` naming each setting that is wrong and what would be right. */
+/** Settings that cannot be used: the message names each, and what would be right. */
+export class SettingsError extends Error {}
+
+/** Throws `SettingsError` naming each setting that is wrong and what would be right. */
 export function readEnv(source: Record<string, string | undefined> = process.env): Env {
   const given = Object.fromEntries(
     Object.keys(settings.fields).map((key) => [key, source[key] || undefined]),
@@ -60,7 +63,7 @@ export function readEnv(source: Record<string, string | undefined> = process.env
   } catch (error) {
     if (!(error instanceof ValidationError)) throw error;
     const lines = error.inner.map((fault) => `  ${fault.path} ${fault.message}`);
-    throw new Error(`Settings that cannot be used:\n${lines.join('\n')}`, { cause: error });
+    throw new SettingsError(`Settings that cannot be used:\n${lines.join('\n')}`, { cause: error });
   }
   const dataDir = path.resolve(ROOT, checked.DATA_DIR);
   return {

@@ -16,9 +16,13 @@ const SWEEP_MS = 6 * 3600 * 1000;
 const LAST_ANSWERS_MS = 2000;
 
 /** Starts HTTP and workers. Rejects with what the system says when the port cannot be listened on. */
-export async function startServer(env: Env): Promise<RunningServer> {
+export async function startServer(
+  env: Env,
+  { beforeListening }: { beforeListening?: (services: Services) => Promise<void> } = {},
+): Promise<RunningServer> {
   const services = await compose(env);
   try {
+    await beforeListening?.(services);
     const http = await listen(services);
     services.runs.start();
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);

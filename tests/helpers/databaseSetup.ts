@@ -1,8 +1,8 @@
 import { randomBytes } from 'node:crypto';
-import { mkdirSync, readdirSync, rmSync } from 'node:fs';
+import { mkdirSync } from 'node:fs';
 import path from 'node:path';
+import { stopLeftDatabases } from '../../server/bootstrap/leftDatabases';
 import { startDatabase, type OwnDatabase } from '../../server/bootstrap/mariadb/startDatabase';
-import { isAlive } from '../../server/bootstrap/processes';
 
 export const TEST_DATA = path.resolve(__dirname, '../../.data-test');
 
@@ -13,7 +13,7 @@ declare global {
 /** One MariaDB server for a run of the tests, in a directory of its own: runs may go side by side. */
 export default async function databaseSetup(): Promise<void> {
   mkdirSync(TEST_DATA, { recursive: true });
-  forgetTheDead();
+  await stopLeftDatabases(TEST_DATA);
   const dir = path.join(TEST_DATA, `db-${process.pid}`);
   const database = await startDatabase({
     dir,
@@ -28,12 +28,4 @@ export default async function databaseSetup(): Promise<void> {
   });
   globalThis.spateTestDatabase = { database, dir };
   process.env.SPATE_TEST_DATABASE = database.url('');
-}
-
-/** Removes what runs left behind that were killed. */
-function forgetTheDead(): void {
-  for (const name of readdirSync(TEST_DATA)) {
-    const pid = Number(/^db-(\d+)$/.exec(name)?.[1]);
-    if (pid && !isAlive(pid)) rmSync(path.join(TEST_DATA, name), { recursive: true, force: true });
-  }
 }
