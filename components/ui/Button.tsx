@@ -11,6 +11,7 @@ import {
 import { radius, space, touch, type Colours } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
 import { aria } from './aria';
+import { useIsStretched } from './stretchedButtons';
 import { Txt } from './Txt';
 
 export type ButtonKind = 'solid' | 'outline' | 'quiet' | 'danger';
@@ -50,6 +51,7 @@ export function Button(props: ButtonProps) {
   const { label, kind = 'outline', onPress, href, busy, disabled, hint, wide, name } = props;
   const { colours } = useTheme();
   const hintId = useId();
+  const isStretched = useIsStretched() || wide;
   const { ground, edge, ink } = look(kind, colours);
   const off = Boolean(disabled || busy);
 
@@ -69,7 +71,7 @@ export function Button(props: ButtonProps) {
       onPress={href ? undefined : onPress}
       {...aria({ 'aria-describedby': hint ? hintId : undefined })}
       // A link hands its style on through a slot, which takes no function.
-      style={href ? box({ pressed: false }) : box}
+      style={href ? box({ pressed: false, hovered: false }) : box}
     >
       {busy ? <ActivityIndicator size="small" color={ink} /> : null}
       <Txt strong style={{ color: ink }}>
@@ -81,7 +83,7 @@ export function Button(props: ButtonProps) {
     </Pressable>
   );
   return (
-    <View style={wide ? styles.wide : styles.narrow}>
+    <View style={isStretched ? styles.wide : styles.narrow}>
       {href && !off ? (
         <Link href={href} asChild>
           {pressable}

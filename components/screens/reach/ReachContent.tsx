@@ -7,6 +7,7 @@ import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useStations } from '@/components/queries/stations';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Badge } from '@/components/ui/Badge';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
@@ -32,6 +33,7 @@ interface ReachContentProps {
 export function ReachContent({ reach, reaches }: ReachContentProps) {
   const { study, may } = useCurrentStudy();
   const system = useUnitSystem();
+  const { isWide } = useBreakpoint();
   const { at, setAt } = usePlaceAndTime();
   const stations = useStations(study.id).data;
   const [ticked, setTicked] = useState<SectionChoice>([]);
@@ -41,6 +43,18 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
   const profile = useMemo(() => reachProfile(sections), [sections]);
   const place = at ?? section.chainage;
 
+  const beside = (
+    <>
+      <SectionCard
+        {...{ sections, section }}
+        onChoose={setAt}
+        onEdit={may('reach.change') && !editing ? () => setEditing(true) : undefined}
+      />
+      {editing ? (
+        <SectionsFormCard {...{ reach, section, ticked }} onClose={() => setEditing(false)} />
+      ) : null}
+    </>
+  );
   return (
     <Screen
       title="Reach"
@@ -62,18 +76,7 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
           unitSystem={system}
         />
       }
-      side={
-        <>
-          <SectionCard
-            {...{ sections, section }}
-            onChoose={setAt}
-            onEdit={may('reach.change') && !editing ? () => setEditing(true) : undefined}
-          />
-          {editing ? (
-            <SectionsFormCard {...{ reach, section, ticked }} onClose={() => setEditing(false)} />
-          ) : null}
-        </>
-      }
+      side={isWide ? beside : undefined}
     >
       {reaches.length > 1 ? (
         <View style={styles.choice}>
@@ -85,6 +88,7 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
           />
         </View>
       ) : null}
+      {isWide ? null : beside}
       <Card title="Long profile" aside="bed; left bank dashed, right bank dotted">
         <LongSection
           {...{ profile, sections, stations }}

@@ -1,5 +1,6 @@
 import { useState } from 'react';
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
+import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { SelectField, type Option } from '@/components/ui/SelectField';
 import { Table, type Column } from '@/components/ui/Table';
@@ -45,7 +46,7 @@ export function RoughnessTable({ targets, target, onTarget, onTake }: RoughnessT
     },
   });
   return (
-    <View role="group" aria-label="Published values of Manning's n">
+    <View role="group" aria-label="Published values of Manning's n" style={styles.group}>
       <Txt strong heading={3}>
         Published values
       </Txt>
@@ -90,3 +91,5 @@ export function RoughnessTable({ targets, target, onTarget, onTake }: RoughnessT
     </View>
   );
 }
+
+const styles = StyleSheet.create({ group: { gap: space.one } });

@@ -24,5 +24,6 @@ export function FieldRow({ children }: { children: ReactNode }) {
 }
 
 const styles = StyleSheet.create({
-  row: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two },
+  // Hints differ in length: the boxes that are typed into stand on one line.
+  row: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two, alignItems: 'flex-end' },
 });

@@ -5,11 +5,12 @@ import { SelectField } from '@/components/ui/SelectField';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { generateHydrograph, volumeOf } from '@/shared/scenarios/hydrographs';
-import { formatDuration, formatWithUnit } from '@/shared/units/format';
+import { formatDuration } from '@/shared/units/format';
 import { FieldRow } from './EditorPart';
 import { useEditing } from './editorContext';
 import { PlacedField } from './PlacedField';
 import { TimeField } from './TimeField';
+import { volumeWords } from './volumeWords';
 
 /** A flood by its shape, drawn while its numbers are typed. */
 export function GeneratedInflow() {
@@ -105,7 +106,7 @@ export function GeneratedInflow() {
         <>
           <Hydrograph label="Inflow" quantity="flow" series={series} t={null} unitSystem={system} />
           <Txt variant="small" tone="soft">
-            {`${formatWithUnit(volumeOf(flood), 'volume', system)} in ${formatDuration(flood.times[flood.times.length - 1])}, base flow included.`}
+            {`${volumeWords(volumeOf(flood), system)} in ${formatDuration(flood.times[flood.times.length - 1])}, base flow included.`}
           </Txt>
         </>
       ) : (

@@ -8,11 +8,11 @@ import { useReach } from '@/components/queries/reaches';
 import { useRequestRun } from '@/components/queries/runs';
 import { useStations } from '@/components/queries/stations';
 import { Badge } from '@/components/ui/Badge';
-import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Scenario } from '@/shared/scenarios/types';
 import { DetailsPart } from './DetailsPart';
+import { EditorBar } from './EditorBar';
 import { EditorProvider } from './editorContext';
 import { InitialPart } from './InitialPart';
 import { LateralsPart } from './LateralsPart';
@@ -58,28 +58,8 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
             <Badge label="Draft" />
           ) : undefined
         }
-        actions={
-          isLocked ? undefined : (
-            <>
-              <Button
-                label="Save"
-                busy={editor.isSaving}
-                disabled={!editor.isDirty || editor.unsavable !== null}
-                hint={editor.unsavable ?? undefined}
-                onPress={editor.save}
-              />
-              {may('run.request') ? (
-                <Button
-                  label="Route this flood"
-                  kind="solid"
-                  busy={request.isPending}
-                  disabled={reason !== null}
-                  hint={reason ?? undefined}
-                  onPress={route}
-                />
-              ) : null}
-            </>
-          )
+        footer={
+          isLocked ? undefined : <EditorBar {...{ reason, route }} isRouting={request.isPending} />
         }
         ribbon={
           reach.data ? (

@@ -1,6 +1,9 @@
 import { useState } from 'react';
+import { StyleSheet, View } from 'react-native';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
+import { space } from '@/components/theme/tokens';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
@@ -21,6 +24,7 @@ export function HandInScreen({ control }: { control: HandInControl }) {
   const { study } = useCurrentStudy();
   const { state } = control;
   const [note, setNote] = useState('');
+  const { isWide } = useBreakpoint();
   if (state.step === 'choose' || state.step === 'accepted') return null;
 
   const reading =
@@ -32,6 +36,35 @@ export function HandInScreen({ control }: { control: HandInControl }) {
     reading && choice ? (
       <MatchCard {...{ reading, choice, busy }} onChange={control.changeMatch} />
     ) : null;
+  const another = (
+    <FileButton
+      label={refused ? 'Choose the mended file' : 'Choose another file'}
+      kind={refused ? 'solid' : 'outline'}
+      onFile={control.choose}
+    />
+  );
+  // Read again with another match the faults are others.
+  const asSpreadsheet = refused ? (
+    <FaultsDownload
+      key={JSON.stringify(choice)}
+      file={state.file}
+      match={state.step === 'read' && state.changed ? choice : null}
+    />
+  ) : null;
+  const back = <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />;
+  const onWide = (
+    <>
+      {back}
+      {asSpreadsheet}
+      {another}
+    </>
+  );
+  const onPhone = (
+    <>
+      {refused ? null : another}
+      {back}
+    </>
+  );
   return (
     <Screen
       title={titleOf(reading, state.step)}
@@ -40,25 +73,14 @@ export function HandInScreen({ control }: { control: HandInControl }) {
         { label: 'Survey', href: `/studies/${study.id}/survey` },
       ]}
       lead={reading ? leadOf(state.file.name, reading) : state.file.name}
-      actions={
-        <>
-          <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />
-          {reading && refused ? (
-            <FaultsDownload
-              file={state.file}
-              match={state.step === 'read' && state.changed ? choice : null}
-            />
-          ) : null}
-          {reading && !refused ? (
-            <FileButton label="Choose another file" onFile={control.choose} />
-          ) : (
-            <FileButton
-              label={refused ? 'Choose the mended file' : 'Choose another file'}
-              kind={refused ? 'solid' : 'outline'}
-              onFile={control.choose}
-            />
-          )}
-        </>
+      actions={isWide ? onWide : onPhone}
+      footer={
+        refused && !isWide ? (
+          <View style={styles.footer}>
+            {another}
+            {asSpreadsheet}
+          </View>
+        ) : undefined
       }
       side={
         refused ? (
@@ -116,3 +138,5 @@ function leadOf(fileName: string, reading: SurveyReading) {
     </Txt>
   );
 }
+
+const styles = StyleSheet.create({ footer: { gap: space.one } });

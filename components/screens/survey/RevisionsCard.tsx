@@ -1,8 +1,10 @@
 import { router } from 'expo-router';
+import { StyleSheet } from 'react-native';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { Card } from '@/components/ui/Card';
 import { Empty } from '@/components/ui/Empty';
 import { Table, type Column } from '@/components/ui/Table';
+import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { SurveyRevisionRow } from '@/shared/surveys/types';
 import { formatQuantity } from '@/shared/units/format';
@@ -67,5 +69,11 @@ const columns = (system: UnitSystem): Column<SurveyRevisionRow>[] => [
   },
   { key: 'by', title: 'Sent by', render: ({ sentBy }) => sentBy },
   { key: 'on', title: 'Sent', render: ({ sentAt }) => sentOn(sentAt) },
-  { key: 'note', title: 'Note', render: ({ note }) => note || '–' },
+  {
+    key: 'note',
+    title: 'Note',
+    render: ({ note }) => <Txt style={styles.note}>{note || '–'}</Txt>,
+  },
 ];
+
+const styles = StyleSheet.create({ note: { width: 240 } });

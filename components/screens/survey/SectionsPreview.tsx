@@ -3,12 +3,13 @@ import { CrossSection } from '@/components/charts/CrossSection';
 import { LongSection } from '@/components/charts/LongSection';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { Card } from '@/components/ui/Card';
+import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { thalwegOf } from '@/shared/reaches/sectionGeometry';
 import type { Section } from '@/shared/surveys/types';
 import { formatWithUnit } from '@/shared/units/format';
+import { UNITS } from '@/shared/units/units';
 import { nearestSection } from '../reach/nearestSection';
-
 
 /** The sections of a survey drawn: along the river, and each across it. */
 export function SectionsPreview({ sections }: { sections: readonly Section[] }) {
@@ -30,6 +31,10 @@ export function SectionsPreview({ sections }: { sections: readonly Section[] }) 
         aside={`${formatWithUnit(section.chainage, 'chainage', system)} · ${section.points.length} points`}
       >
         <CrossSection label={`Section ${section.id}`} section={section} unitSystem={system} />
+        <Txt variant="small" tone="soft">
+          Elevation in {UNITS[system].elevation.symbol} above datum, offset in{' '}
+          {UNITS[system].length.symbol}, looking downstream.
+        </Txt>
       </Card>
       {sections.length > 1 ? (
         <LongSection

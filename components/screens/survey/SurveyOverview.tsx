@@ -1,6 +1,7 @@
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useSurveys } from '@/components/queries/surveys';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Badge } from '@/components/ui/Badge';
 import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -17,6 +18,8 @@ import type { HandInControl } from './useHandIn';
 export function SurveyOverview({ control }: { control: HandInControl }) {
   const { study, may } = useCurrentStudy();
   const surveys = useSurveys(study.id);
+  const { isWide } = useBreakpoint();
+  const handIn = may('survey.send') ? <HandInCard onFile={control.choose} /> : null;
   const latest = surveys.data?.revisions[0];
   return (
     <Screen
@@ -25,7 +28,7 @@ export function SurveyOverview({ control }: { control: HandInControl }) {
       badge={latest ? <Badge label={`Revision ${latest.revision}`} /> : undefined}
       side={
         <>
-          {may('survey.send') ? <HandInCard onFile={control.choose} /> : null}
+          {isWide ? handIn : null}
           <TemplatesCard />
         </>
       }
@@ -42,6 +45,7 @@ export function SurveyOverview({ control }: { control: HandInControl }) {
           ) : null}
         </Notice>
       ) : null}
+      {isWide ? null : handIn}
       {surveys.isPending ? <Loading what="Reading what was handed in…" /> : null}
       {surveys.isError ? (
         <ErrorState

@@ -1,5 +1,6 @@
 import { useMutation } from '@tanstack/react-query';
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
+import { space } from '@/components/theme/tokens';
 import { downloadTemplate, SURVEY_TEMPLATES } from '@/components/queries/surveys';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
@@ -14,7 +15,7 @@ export function TemplatesCard() {
       <Txt tone="soft">
         Headings may stand in any order and in other usual words; these are the plainest.
       </Txt>
-      <View>
+      <View style={styles.buttons}>
         {SURVEY_TEMPLATES.map(({ path, label }) => (
           <Button
             key={path}
@@ -31,3 +32,7 @@ export function TemplatesCard() {
     </Card>
   );
 }
+
+const styles = StyleSheet.create({
+  buttons: { marginLeft: -space.two, marginVertical: -space.one },
+});

@@ -30,6 +30,10 @@ const LENGTHS: readonly SurveyField[] = ['chainage', 'offset', 'elevation', 'eas
 export const isLength = (field: SurveyField | null): boolean =>
   field !== null && LENGTHS.includes(field);
 
+/** A heading, or the place of a column that has none. */
+export const headingOf = ({ column, heading }: Pick<ColumnMatch, 'column' | 'heading'>): string =>
+  heading || `Column ${column + 1}`;
+
 /** Sheets whose headings stand alike: the person matches them once. */
 export interface SheetGroup {
   key: string;
@@ -95,3 +99,12 @@ export const chooseUnit = (choice: MatchChoice, column: number, unit: LengthUnit
   ...choice,
   columns: choice.columns.map((entry) => (entry.column === column ? { ...entry, unit } : entry)),
 });
+
+/** Whether a needed column was not recognised, so that the person has to say which it is. */
+export function isShort({ layout, columns }: Pick<SheetGroup, 'layout' | 'columns'>): boolean {
+  const needed: SurveyField[] =
+    layout === 'longTable'
+      ? ['section', 'chainage', 'offset', 'elevation']
+      : ['offset', 'elevation'];
+  return needed.some((field) => columns.every((column) => column.field !== field));
+}

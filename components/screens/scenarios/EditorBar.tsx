@@ -1,0 +1,59 @@
+import { StyleSheet, View } from 'react-native';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { space } from '@/components/theme/tokens';
+import { Button } from '@/components/ui/Button';
+import { Txt } from '@/components/ui/Txt';
+import { useEditing } from './editorContext';
+
+interface EditorBarProps {
+  /** Why it cannot be routed yet. */
+  reason: string | null;
+  route: () => void;
+  isRouting: boolean;
+}
+
+/** Always within reach while the long form scrolls: what is missing, save, and what to do next. */
+export function EditorBar({ reason, route, isRouting }: EditorBarProps) {
+  const { may } = useCurrentStudy();
+  const { editor } = useEditing();
+  const words = editor.unsavable ?? reason ?? 'Ready to route.';
+  return (
+    <View style={styles.bar}>
+      <View role="status" style={styles.words}>
+        <Txt variant="small" tone="soft">
+          {words}
+        </Txt>
+      </View>
+      <View style={styles.buttons}>
+        <Button
+          label="Save"
+          busy={editor.isSaving}
+          disabled={!editor.isDirty || editor.unsavable !== null}
+          onPress={editor.save}
+        />
+        {may('run.request') ? (
+          <Button
+            label="Route this flood"
+            kind="solid"
+            busy={isRouting}
+            disabled={reason !== null}
+            onPress={route}
+          />
+        ) : null}
+      </View>
+    </View>
+  );
+}
+
+const styles = StyleSheet.create({
+  bar: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    alignItems: 'center',
+    justifyContent: 'flex-end',
+    columnGap: space.two,
+    rowGap: space.half,
+  },
+  words: { flexShrink: 1 },
+  buttons: { flexDirection: 'row', gap: space.one },
+});
