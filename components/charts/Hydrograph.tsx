@@ -11,7 +11,7 @@ import {
   type HydrographModel,
   type Series,
 } from './geometry/hydrographModel';
-import { valueAt } from './geometry/interpolate';
+import { nearestIndex, valueAt } from './geometry/interpolate';
 import { shortTime } from './geometry/timeWords';
 import { Reading, readingBox } from './Reading';
 import { TimeAxis } from './TimeAxis';
@@ -66,10 +66,15 @@ function useModel({ size, series, compare = null, quantity, unitSystem }: Sized)
   );
 }
 
+/** Rests at the times that the series has values for. */
 function TimeDrag(props: Sized & { onChange: (t: number) => void }) {
-  const x = useModel(props).frame.x.copy().clamp(true);
+  const { x } = useModel(props).frame;
+  const { times } = props.series;
   return (
-    <DragSurface onDrag={(px) => props.onChange(Math.round(x.invert(px)))} style={props.size} />
+    <DragSurface
+      onDrag={(px) => props.onChange(times[nearestIndex(times, x.invert(px))])}
+      style={props.size}
+    />
   );
 }
 

@@ -5,7 +5,7 @@ import { scaleLinear } from 'd3-scale';
 import { useTheme } from '@/components/theme/useTheme';
 import { ChartText } from './ChartText';
 import { extentOf } from './geometry/frame';
-import { valueAt } from './geometry/interpolate';
+import { nearestIndex, valueAt } from './geometry/interpolate';
 import { bandPath, linePath, project } from './geometry/paths';
 import { thinSeries } from './geometry/thinSeries';
 import { timeTicks } from './geometry/ticks';
@@ -42,7 +42,6 @@ export function TimeRibbon({ t, onChange, step, startsAt, ...shape }: TimeRibbon
   const [width, setWidth] = useState(shape.initialWidth ?? 0);
   const stops = useMemo(() => timeStops(start, end, step), [start, end, step]);
   const x = timeScale(start, end, width);
-  const clamp = (value: number) => Math.min(end, Math.max(start, value));
   return (
     <View onLayout={widthOf(setWidth)} style={styles.box}>
       <SliderSurface
@@ -52,7 +51,7 @@ export function TimeRibbon({ t, onChange, step, startsAt, ...shape }: TimeRibbon
         value={t}
         valueText={timeWords(t, end - start, startsAt)}
         onChange={onChange}
-        onDrag={(px) => onChange(clamp(Math.round(x.invert(px))))}
+        onDrag={(px) => onChange(stops[nearestIndex(stops, x.invert(px))])}
       >
         <Flood {...shape} width={width} to={t} knob />
       </SliderSurface>

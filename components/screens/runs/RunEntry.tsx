@@ -19,31 +19,27 @@ export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
     run.peakStage === null || run.peakFlow === null
       ? null
       : `${formatWithUnit(run.peakStage, 'elevation', unitSystem)}, ${formatWithUnit(run.peakFlow, 'flow', unitSystem)}`;
+  const words = found ? 'peak furthest downstream' : runLeftWords(run);
   return (
     <View role="listitem" style={[styles.item, { borderTopColor: colours.line }]}>
       <Link href={`/studies/${studyId}/runs/${run.id}`} asChild>
         <Pressable role="link" style={isWide ? styles.wide : styles.phone}>
-          <View style={styles.name}>
+          <View style={isWide ? styles.column : null}>
             <Txt variant="lead" strong>{`Run ${run.number}, ${run.scenarioName}`}</Txt>
             <Txt variant="small" tone="soft">
               {`Asked for by ${run.requestedBy}, ${wallClock(run.requestedAt)}`}
             </Txt>
           </View>
-          <View style={styles.found}>
-            {found ? (
-              <>
-                <Txt strong>{found}</Txt>
+          {isWide || words ? (
+            <View style={isWide ? styles.column : null}>
+              {found ? <Txt strong>{found}</Txt> : null}
+              {words ? (
                 <Txt variant="small" tone="soft">
-                  peak furthest downstream
+                  {words}
                 </Txt>
-              </>
-            ) : null}
-            {run.state === 'running' ? (
-              <Txt variant="small" tone="soft">
-                {timeLeftWords(run.secondsLeft)}
-              </Txt>
-            ) : null}
-          </View>
+              ) : null}
+            </View>
+          ) : null}
           <View style={isWide ? styles.state : null}>
             <Badge label={runStateWords(run)} tone={RUN_TONES[run.state]} />
           </View>
@@ -53,11 +49,13 @@ export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
   );
 }
 
+const runLeftWords = ({ state, secondsLeft }: RunRow) =>
+  state === 'running' ? timeLeftWords(secondsLeft) : null;
+
 const styles = StyleSheet.create({
   item: { borderTopWidth: hairline },
   wide: { flexDirection: 'row', alignItems: 'center', gap: space.two, paddingVertical: space.two },
   phone: { gap: space.one, paddingVertical: space.two },
-  name: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
-  found: { flexGrow: 1, flexShrink: 1, flexBasis: 0 },
+  column: { flex: 1 },
   state: { width: 150 },
 });

@@ -1,8 +1,9 @@
-import { View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 import { TimeProgress } from '@/components/charts/TimeRibbon';
 import { Screen } from '@/components/layout/Screen';
 import { useCancelRun } from '@/components/queries/runs';
 import { useRunEvents } from '@/components/queries/useRunEvents';
+import { space } from '@/components/theme/tokens';
 import { Badge } from '@/components/ui/Badge';
 import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -29,16 +30,6 @@ export function RunUnderWay({ run }: { run: Run }) {
       title={run.scenarioName}
       crumbs={runCrumbs(run)}
       badge={<Badge label={runStateWords(now)} tone={RUN_TONES[now.state]} />}
-      actions={
-        run.may.includes('run.cancel') ? (
-          <Button
-            label="Cancel the run"
-            kind="danger"
-            busy={cancel.isPending}
-            onPress={() => cancel.mutate(run.id)}
-          />
-        ) : null
-      }
       footer={
         <TimeProgress
           inflow={run.inflow}
@@ -57,13 +48,21 @@ export function RunUnderWay({ run }: { run: Run }) {
       {cancel.error ? (
         <ErrorState error={cancel.error} title="The run could not be cancelled" />
       ) : null}
-      <View>
+      <View style={styles.head}>
         <FigureWithUnit
           value={queued ? 'Queued' : String(Math.min(99, Math.floor(now.progress * 100)))}
           unit={queued ? undefined : '%'}
           label={queued ? words : `of the flood is routed, ${timeLeftWords(now.secondsLeft)}`}
           size="display"
         />
+        {run.may.includes('run.cancel') ? (
+          <Button
+            label="Cancel the run"
+            kind="danger"
+            busy={cancel.isPending}
+            onPress={() => cancel.mutate(run.id)}
+          />
+        ) : null}
         <Spoken words={queued ? words : spokenPercent(now.progress)} />
       </View>
       <LiveWater surface={now.surface} highest={highest} time={now.time} span={run.duration} />
@@ -77,16 +76,19 @@ const spokenPercent = (share: number) => `${Math.floor(share * 10) * 10} % route
 
 function Spoken({ words }: { words: string }) {
   return (
-    <Txt aria-live="polite" style={HIDDEN}>
+    <Txt aria-live="polite" style={styles.hidden}>
       {words}
     </Txt>
   );
 }
 
-const HIDDEN = {
-  position: 'absolute',
-  width: 1,
-  height: 1,
-  overflow: 'hidden',
-  opacity: 0,
-} as const;
+const styles = StyleSheet.create({
+  head: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    gap: space.two,
+    justifyContent: 'space-between',
+    alignItems: 'flex-end',
+  },
+  hidden: { position: 'absolute', width: 1, height: 1, overflow: 'hidden', opacity: 0 },
+});

@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { StyleSheet, View } from 'react-native';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace } from '@/components/charts/usePlaceAndTime';
 import { shortTime } from '@/components/charts/geometry/timeWords';
@@ -33,11 +34,13 @@ export function PeaksCard({ summary, store }: Props) {
       title={all ? 'Peaks at all sections' : 'Peaks at the stations'}
       aside={
         stations.length ? (
-          <Button
-            kind="quiet"
-            label={all ? 'Stations only' : 'All sections'}
-            onPress={() => setAll(!all)}
-          />
+          <View style={styles.aside}>
+            <Button
+              kind="quiet"
+              label={all ? 'Stations only' : 'All sections'}
+              onPress={() => setAll(!all)}
+            />
+          </View>
         ) : undefined
       }
     >
@@ -68,14 +71,14 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
     },
     {
       key: 'stage',
-      title: 'Peak stage',
+      title: 'Stage',
       unit: unit.elevation.symbol,
       align: 'right',
       render: ({ peakStage }) => formatQuantity(peakStage, 'elevation', system),
     },
     {
       key: 'flow',
-      title: 'Peak flow',
+      title: 'Flow',
       unit: unit.flow.symbol,
       align: 'right',
       render: ({ peakFlow }) => formatQuantity(peakFlow, 'flow', system),
@@ -83,7 +86,7 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
     { key: 'arrives', title: 'Arrives', align: 'right', render: ({ arrival }) => time(arrival) },
     {
       key: 'peakAt',
-      title: 'Highest at',
+      title: 'Peak at',
       align: 'right',
       render: ({ peakStageTime }) => time(peakStageTime),
     },
@@ -103,10 +106,13 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
     },
     {
       key: 'attenuation',
-      title: 'Flow less than in',
+      title: 'Attenuation',
       unit: '%',
       align: 'right',
       render: attenuationFigure,
     },
   ];
 }
+
+// Of one line with the title, though the button is taller.
+const styles = StyleSheet.create({ aside: { flexDirection: 'row', alignItems: 'center' } });

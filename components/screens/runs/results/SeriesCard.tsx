@@ -36,6 +36,7 @@ export function SeriesCard(props: Props) {
   return (
     <Card
       title={title}
+      style={styles.card}
       aside={
         <View style={styles.aside}>
           <Txt tone="soft">{note ? `${unit}, ${note}` : unit}</Txt>
@@ -62,5 +63,6 @@ export function SeriesCard(props: Props) {
 }
 
 const styles = StyleSheet.create({
+  card: { gap: 0, paddingTop: space.half },
   aside: { flexDirection: 'row', alignItems: 'center', columnGap: space.one, flexWrap: 'wrap' },
 });

@@ -38,7 +38,7 @@ export function TimeBar({ run, summary, store }: Props) {
         <Button
           kind="quiet"
           label={`in ${PACES[pace]} s`}
-          name={`Pace of play: the whole flood in ${PACES[pace]} seconds. Press to change`}
+          name={`Pace: the whole flood in ${PACES[pace]} s, press to change`}
           onPress={() => setPace((pace + 1) % PACES.length)}
         />
         <Txt strong style={styles.time}>
