@@ -1,4 +1,5 @@
 import { readdirSync } from 'node:fs';
+import { createRequire } from 'node:module';
 import path from 'node:path';
 import { QueryTypes, type QueryInterface, type Sequelize } from 'sequelize';
 import { SequelizeStorage, Umzug } from 'umzug';
@@ -16,6 +17,8 @@ export class NewerSchemaError extends Error {
 }
 
 const STEPS = path.resolve(__dirname, '../migrations');
+// `import()` of a name made at run time would pass by what compiles TypeScript as it is required.
+const requireStep = createRequire(__filename);
 const STEP_FILE = /^(\d{3}-[a-z0-9-]+)\.[jt]s$/;
 
 export function migrator(sequelize: Sequelize): Umzug<QueryInterface> {
@@ -23,11 +26,11 @@ export function migrator(sequelize: Sequelize): Umzug<QueryInterface> {
     .filter((file) => STEP_FILE.test(file))
     .sort()
     .map((file) => {
-      const load = () => import(path.join(STEPS, file)) as Promise<{ up: Step; down: Step }>;
+      const load = () => requireStep(path.join(STEPS, file)) as { up: Step; down: Step };
       return {
         name: file.replace(STEP_FILE, '$1'),
-        up: async (params: { context: QueryInterface }) => (await load()).up(params),
-        down: async (params: { context: QueryInterface }) => (await load()).down(params),
+        up: (params: { context: QueryInterface }) => load().up(params),
+        down: (params: { context: QueryInterface }) => load().down(params),
       };
     });
   return new Umzug<QueryInterface>({
