@@ -69,7 +69,11 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     warnings.add,
   );
   if (mustSettle) {
-    settleInitial({ workspace, cellState, laterals, rhs, timeStep, order, grid }, polling, warnings);
+    settleInitial(
+      { workspace, cellState, laterals, rhs, timeStep, order, grid },
+      polling,
+      warnings,
+    );
   }
 
   const sectionRecorder = createSectionRecorder(caseFile, workspace, grid);

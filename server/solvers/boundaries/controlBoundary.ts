@@ -4,7 +4,7 @@ import type { Boundary } from './boundary';
 import { createEndFlux } from './endFlux';
 import { createEndSection } from './endSection';
 import { createEndState, type End } from './endState';
-import { risingRoot } from './risingRoot';
+import { rootNear } from './rootNear';
 
 /**
  * An outlet whose flow is a rising function R of its stage: normal depth, a rating, critical depth. Stage and flow are
@@ -43,13 +43,14 @@ export function createControlBoundary(
     area = inside.area;
     velocity = outward * inside.velocity;
     celerity = inside.celerity;
-    const step = Math.max(0.5 * (inside.stage - bed[section]), 1e-3);
+    const last = stage[section];
+    const step = 1e-3 * Math.max(inside.stage - bed[section], 1e-3);
     if (velocity >= celerity) {
-      const wanted = risingRoot(surplus, bed[section], step);
+      const wanted = rootNear(surplus, bed[section], last, step);
       const held = wanted > inside.stage && forceAt(wanted, out) > forceAt(inside.stage, out);
       return endFlux(held ? wanted : inside.stage, inside.flow, inside.path);
     }
-    const eta = risingRoot(mismatch, bed[section], step);
+    const eta = rootNear(mismatch, bed[section], last, step);
     if (eta <= bed[section]) return endFlux(inside.stage, 0);
     return endFlux(eta, outward * released(eta));
   };

@@ -1,6 +1,6 @@
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
-import { risingRoot } from './risingRoot';
+import { risingRoot } from './rootNear';
 
 /** Hydraulics of one section of the tables, for boundaries and initial states. Flows in m³/s, stages in m. */
 export interface EndSection {

@@ -36,8 +36,7 @@ export function createStageBoundary(
     }
     const a = tables.areaAt(section, eta);
     const c = celerityAt(eta);
-    const out =
-      outward * inside.flow + (leaving - 0.5 * (inside.celerity + c)) * (a - inside.area);
+    const out = outward * inside.flow + (leaving - 0.5 * (inside.celerity + c)) * (a - inside.area);
     const critical = a * c;
     if (out > critical) return freeFall(time);
     return endFlux(eta, outward * Math.max(out, -critical));

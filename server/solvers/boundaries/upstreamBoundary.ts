@@ -15,11 +15,7 @@ export function createUpstreamBoundary(
 ): Boundary {
   switch (upstream.kind) {
     case 'inflow':
-      return createInflowBoundary(
-        workspace,
-        tables,
-        createSeries(upstream.times, upstream.flows),
-      );
+      return createInflowBoundary(workspace, tables, createSeries(upstream.times, upstream.flows));
     case 'stage':
       return createStageBoundary(
         workspace,

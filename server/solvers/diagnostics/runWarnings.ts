@@ -42,7 +42,8 @@ export function createRunWarnings(
       });
     }
     const unpaired = sections.filter(
-      (section, k) => k > 0 && (section.banks === undefined) !== (sections[k - 1].banks === undefined),
+      (section, k) =>
+        k > 0 && (section.banks === undefined) !== (sections[k - 1].banks === undefined),
     );
     if (unpaired.length > 0) {
       warnings.push({

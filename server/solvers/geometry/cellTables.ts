@@ -1,16 +1,5 @@
 import type { Workspace } from '../workspace';
-import {
-  AREA,
-  B0,
-  B1,
-  LEVEL_FIELDS,
-  TABLE_STRIDE,
-  THRUST,
-  V0,
-  V1,
-  V2,
-  Z,
-} from './sectionTable';
+import { AREA, B0, B1, LEVEL_FIELDS, TABLE_STRIDE, THRUST, V0, V1, V2, Z } from './sectionTable';
 
 /**
  * Looks up any section's table at any stage: for the faces, boundaries and initial states that leave the active level.
@@ -76,9 +65,7 @@ export function createCellTables(
     const s = stage - table[row + Z];
     if (s <= 0) return table[row + THRUST];
     const b0 = table[row + B0];
-    return (
-      table[row + THRUST] + s * (table[row + AREA] + s * (b0 / 2 + (s * table[row + B1]) / 3))
-    );
+    return table[row + THRUST] + s * (table[row + AREA] + s * (b0 / 2 + (s * table[row + B1]) / 3));
   }
 
   function conveyanceAt(i: number, stage: number): number {

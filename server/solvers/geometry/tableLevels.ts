@@ -62,7 +62,7 @@ function strongestKinks(shape: SectionShape, spacing: number): number[] {
   }
   const order = at.map((_, k) => k).sort((a, b) => at[a] - at[b]);
   const found: { elevation: number; weight: number }[] = [];
-  for (let m = 0; m < order.length; ) {
+  for (let m = 0; m < order.length;) {
     const elevation = at[order[m]];
     let widthJump = 0;
     let slope = 0;

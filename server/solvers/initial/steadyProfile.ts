@@ -1,5 +1,5 @@
 import { createEndSection } from '../boundaries/endSection';
-import { risingRoot } from '../boundaries/risingRoot';
+import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
 

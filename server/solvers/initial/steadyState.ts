@@ -1,7 +1,7 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import { outletControl } from '../boundaries/downstreamBoundary';
 import { createEndSection } from '../boundaries/endSection';
-import { risingRoot } from '../boundaries/risingRoot';
+import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import type { Laterals } from '../sources/laterals';

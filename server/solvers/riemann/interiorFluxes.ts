@@ -10,9 +10,11 @@ const IRREGULAR = 3;
 
 /**
  * Where the stage slopes by more than this share of A/(2B) over a cell, as in the thin tongue of a front, the velocity
- * of the cell is taken to the face instead of the flow: two slopes of their own could make any velocity of a small area.
+ * at the face stays within c of those of its cells: slopes of stage and flow apart can make any velocity of a small area.
  */
 const THIN = 0.5;
+
+const THIRD = 1 / 3;
 
 /**
  * Volume and momentum fluxes at all faces between cells.
@@ -63,18 +65,18 @@ export function createInteriorFluxes(workspace: Workspace, tables: CellTables): 
       ) {
         const wI = width[i];
         const wJ = width[j];
-        const cI = levelB1[i];
-        const cJ = levelB1[j];
-        a1 = areaI + iL * (wI + iL * cI);
-        a2 = areaI + iR * (wI + iR * cI);
-        b1 = areaJ + jL * (wJ + jL * cJ);
-        b2 = areaJ + jR * (wJ + jR * cJ);
-        const cI3 = cI / 3;
-        const cJ3 = cJ / 3;
+        const kI = levelB1[i];
+        const kJ = levelB1[j];
+        a1 = areaI + iL * (wI + iL * kI);
+        a2 = areaI + iR * (wI + iR * kI);
+        b1 = areaJ + jL * (wJ + jL * kJ);
+        b2 = areaJ + jR * (wJ + jR * kJ);
         dPi =
-          iR * (areaI + iR * (0.5 * wI + iR * cI3)) - iL * (areaI + iL * (0.5 * wI + iL * cI3));
+          iR * (areaI + iR * (0.5 * wI + iR * THIRD * kI)) -
+          iL * (areaI + iL * (0.5 * wI + iL * THIRD * kI));
         dPj =
-          jR * (areaJ + jR * (0.5 * wJ + jR * cJ3)) - jL * (areaJ + jL * (0.5 * wJ + jL * cJ3));
+          jR * (areaJ + jR * (0.5 * wJ + jR * THIRD * kJ)) -
+          jL * (areaJ + jL * (0.5 * wJ + jL * THIRD * kJ));
       } else {
         faceAreas(i, j, etaL, etaR);
         a1 = face[A1];
@@ -103,20 +105,20 @@ export function createInteriorFluxes(workspace: Workspace, tables: CellTables): 
       const aR = 0.5 * (a2 + b2);
       let qL = flow[i] + 0.5 * slopeFlow[i];
       let qR = flow[j] - 0.5 * slopeFlow[j];
-      const thinI = Math.abs(iL) - THIN * reachI;
-      if (thinI > 0) {
-        const share = Math.min(1, thinI / ((1 - THIN) * reachI));
-        qL += share * ((flow[i] * aL) / areaI - qL);
-      }
-      const thinJ = Math.abs(jR) - THIN * reachJ;
-      if (thinJ > 0) {
-        const share = Math.min(1, thinJ / ((1 - THIN) * reachJ));
-        qR += share * ((flow[j] * aR) / areaJ - qR);
+      const cI = celerity[i];
+      const cJ = celerity[j];
+      const isThinI = iL > THIN * reachI || iL < -THIN * reachI;
+      const isThinJ = jR > THIN * reachJ || jR < -THIN * reachJ;
+      if (isThinI || isThinJ) {
+        const uI = areaI > 0 ? flow[i] / areaI : 0;
+        const uJ = areaJ > 0 ? flow[j] / areaJ : 0;
+        const low = Math.min(uI, uJ);
+        const high = Math.max(uI, uJ);
+        if (isThinI) qL = Math.max((low - cI) * aL, Math.min((high + cI) * aL, qL));
+        if (isThinJ) qR = Math.max((low - cJ) * aR, Math.min((high + cJ) * aR, qR));
       }
       const uL = qL / aL;
       const uR = qR / aR;
-      const cI = celerity[i];
-      const cJ = celerity[j];
       const sL = Math.min(0, uL - cI, uR - cJ);
       const sR = Math.max(0, uL + cI, uR + cJ);
       const dAi = a2 - a1;

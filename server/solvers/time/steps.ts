@@ -107,8 +107,7 @@ export function createSteps(
       a = 0.5 * (old + a);
       const z = dt * Math.abs(flow[i]);
       if (a !== area[i]) place(i, a);
-      flow[i] =
-        stage[i] - bed[i] > dryDepth ? q / (1 + z * friction[i] - explicitFriction[i]) : 0;
+      flow[i] = stage[i] - bed[i] > dryDepth ? q / (1 + z * friction[i] - explicitFriction[i]) : 0;
       if (a < 0.5 * old) drained++;
     }
     if (drained > 0) capDrained();

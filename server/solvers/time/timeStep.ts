@@ -6,6 +6,11 @@ import type { CellTables } from '../geometry/cellTables';
 /** No river flows so fast (m/s): a state that does has left the equations. */
 const IMPOSSIBLE = 1000;
 
+/** Friction makes waves of celerity 5u/3 (Manning, wide section), which beyond Froude 1.5 outrun u + c. */
+const KINEMATIC = 2 / 3;
+/** … where friction takes more than this share of the momentum over a cell. */
+const BRAKED = 0.01;
+
 /**
  * The largest stable step (s) of the present state: courant dx / max(|u| + c), over cells, ends (`endSpeed`, m/s) and
  * what lateral inflow onto dry ground will start with. Throws RunFailed where the state is not finite.
@@ -17,7 +22,7 @@ export function createTimeStep(
   courant: number,
   chainage: Float64Array,
 ): (endSpeed: number, time: number) => number {
-  const { n, dx, area, flow, celerity, bed, gravity } = workspace;
+  const { n, dx, area, flow, celerity, friction, bed, gravity } = workspace;
   let lateralSpeed = 0;
   for (let i = 1; i <= n; i++) {
     const width = tables.widthAt(i, bed[i] + 0.1);
@@ -45,7 +50,11 @@ export function createTimeStep(
     for (let i = 1; i <= n; i++) {
       const a = area[i];
       if (a !== 0) {
-        const speed = Math.abs(flow[i]) / a + celerity[i];
+        const u = Math.abs(flow[i]) / a;
+        const c = celerity[i];
+        let speed = u + c;
+        const isShooting = c < KINEMATIC * u && friction[i] * Math.abs(flow[i]) * dx > BRAKED * u;
+        if (isShooting) speed = (1 + KINEMATIC) * u;
         if (speed > fastest) fastest = speed;
         sum += speed;
       }

@@ -1,7 +1,26 @@
 /**
- * The root of an increasing function at or above `lo`, by the Illinois form of false position (Dowell and Jarratt 1971,
- * BIT 11, 168-174); `lo` itself where the function is not negative there. `step` is the first width of the search.
+ * The root of an increasing function at or above `floor`, searched from `guess` in steps that begin with `step`; the
+ * floor itself where the function is not negative there. Illinois form of false position (Dowell and Jarratt 1971, BIT
+ * 11, 168-174).
  */
+export function rootNear(
+  f: (x: number) => number,
+  floor: number,
+  guess: number,
+  step: number,
+): number {
+  if (!(guess > floor)) return risingRoot(f, floor, step);
+  if (f(guess) < 0) return risingRoot(f, guess, step);
+  let hi = guess;
+  for (;;) {
+    const lo = Math.max(floor, hi - step);
+    if (lo === floor || f(lo) < 0) return risingRoot(f, lo, hi - lo);
+    hi = lo;
+    step *= 4;
+  }
+}
+
+/** The root of an increasing function at or above `lo`; see rootNear. */
 export function risingRoot(f: (x: number) => number, lo: number, step: number): number {
   let fLo = f(lo);
   if (fLo >= 0) return lo;
@@ -10,7 +29,7 @@ export function risingRoot(f: (x: number) => number, lo: number, step: number): 
   for (let k = 0; fHi < 0 && k < 60; k++) {
     lo = hi;
     fLo = fHi;
-    step *= 2;
+    step *= 4;
     hi = lo + step;
     fHi = f(hi);
   }
