@@ -3,6 +3,7 @@ import { ScrollView, StyleSheet, View, type Text } from 'react-native';
 import { hairline, space, widths } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
+import { StretchedButtons } from '../ui/stretchedButtons';
 import { Txt } from '../ui/Txt';
 import { Crumbs, type Crumb } from './Crumbs';
 import { useDocumentTitle, useHeadingFocus } from './screenEffects';
@@ -12,7 +13,7 @@ interface ScreenProps {
   crumbs?: readonly Crumb[];
   /** State beside the title. */
   badge?: ReactNode;
-  /** Buttons of the screen, the solid one last; beside the title on wide, below the work on a phone. */
+  /** Buttons of the screen: beside the title on wide; on a phone within thumb reach, or below the work where the foot is taken. */
   actions?: ReactNode;
   /** A sentence under the title. */
   lead?: ReactNode;
@@ -81,8 +82,13 @@ export function Screen(props: ScreenProps) {
           </View>
           {side ? <View style={isWide ? styles.side : styles.work}>{side}</View> : null}
         </View>
-        {!isWide && actions ? <View style={styles.actionsPhone}>{actions}</View> : null}
+        {!isWide && footer && actions ? <View style={styles.actionsPhone}>{actions}</View> : null}
       </ScrollView>
+      {!isWide && !footer && actions ? (
+        <StretchedButtons value>
+          <View style={styles.foot}>{actions}</View>
+        </StretchedButtons>
+      ) : null}
       {footer ? (
         <View
           style={[
@@ -120,7 +126,8 @@ const styles = StyleSheet.create({
   title: { flexShrink: 1 },
   lead: { maxWidth: widths.prose },
   actions: { flexDirection: 'row', gap: space.one, flexShrink: 0 },
-  actionsPhone: { gap: space.one, marginTop: 'auto', paddingTop: space.one },
+  actionsPhone: { gap: space.one, paddingTop: space.one },
+  foot: { gap: space.one, paddingHorizontal: space.two, paddingVertical: space.one * 1.5 },
   columns: { flexDirection: 'row', gap: space.two, alignItems: 'flex-start', flexGrow: 1 },
   stack: { gap: space.two },
   work: { gap: space.two, minWidth: 0 },

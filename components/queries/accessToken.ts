@@ -23,9 +23,12 @@ async function withLock<T>(task: () => Promise<T>): Promise<T> {
 }
 
 async function refresh(): Promise<Session> {
-  const response = await fetch('/api/auth/refresh', { method: 'POST' }).catch(() => {
-    throw ApiError.unreachable();
-  });
+  // Kept alive over a reload in its middle: the successor of a token that was used must not be lost.
+  const response = await fetch('/api/auth/refresh', { method: 'POST', keepalive: true }).catch(
+    () => {
+      throw ApiError.unreachable();
+    },
+  );
   if (!response.ok) throw await ApiError.of(response);
   const session = (await response.json()) as Session;
   token = session.accessToken;

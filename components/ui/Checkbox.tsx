@@ -22,6 +22,7 @@ export function Checkbox({ label, checked, onChange, disabled, hint, hideLabel }
         gap: space.one,
         alignItems: 'center',
         minHeight: touch,
+        padding: `${space.half}px 0`,
         minWidth: hideLabel ? touch : undefined,
         justifyContent: hideLabel ? 'center' : undefined,
         cursor: disabled ? 'default' : 'pointer',

@@ -8,12 +8,13 @@ export function List({ label, children }: { label: string; children: ReactNode }
   const { colours } = useTheme();
   return (
     <View role="list" aria-label={label}>
-      {Children.toArray(children).map((child, i) => (
+      {Children.toArray(children).map((child, i, all) => (
         <View
           key={i}
           role="listitem"
           style={[
-            styles.item,
+            i > 0 ? styles.notFirst : null,
+            i < all.length - 1 ? styles.notLast : null,
             { borderTopWidth: i > 0 ? hairline : 0, borderTopColor: colours.line },
           ]}
         >
@@ -24,4 +25,7 @@ export function List({ label, children }: { label: string; children: ReactNode }
   );
 }
 
-const styles = StyleSheet.create({ item: { paddingVertical: space.one * 1.5 } });
+const styles = StyleSheet.create({
+  notFirst: { paddingTop: space.one * 1.5 },
+  notLast: { paddingBottom: space.one * 1.5 },
+});

@@ -40,6 +40,7 @@ export function RadioGroup<V extends string>(props: RadioGroupProps<V>) {
             gap: space.one,
             alignItems: 'center',
             minHeight: touch,
+            padding: `${space.half}px 0`,
             cursor: disabled ? 'default' : 'pointer',
             opacity: disabled ? 0.6 : 1,
           }}

@@ -12,7 +12,7 @@ export function ClientStudy({ study, firmName }: { study: Study; firmName: strin
     <Screen title={study.title} crumbs={[{ label: `Shared with you by ${firmName}` }]} narrow>
       <Notice still title="Nothing has been issued yet">
         <Txt>
-          {`${firmName} is still at work on this study. Results are shown to you once a licensed engineer has checked and signed them, and not before: a figure that may still change is of no use to you.`}
+          {`${firmName} is still at work on this study. Results are shown here once a licensed engineer has checked and signed them, so that you never plan on a figure that may still change.`}
         </Txt>
       </Notice>
       <Card title="What will stand here">

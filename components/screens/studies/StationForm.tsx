@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { stationSchema } from '@/shared/studies/schemas';
 import type { Station } from '@/shared/studies/types';
+import { formatWithUnit } from '@/shared/units/format';
 import { FormNumberField } from '@/components/forms/FormNumberField';
 import { FormRoot } from '@/components/forms/FormRoot';
 import { FormSubmit } from '@/components/forms/FormSubmit';
@@ -10,12 +11,15 @@ import { useSaveStation } from '@/components/queries/stations';
 import { Button } from '@/components/ui/Button';
 import { ButtonRow } from '@/components/ui/ButtonRow';
 import { Notice } from '@/components/ui/Notice';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 
 interface StationFormProps {
   studyId: number;
   /** Null: a new one. */
   station: Station | null;
-  onDone: () => void;
+  /** Chosen place on the ribbon, m: offered as its chainage. */
+  at?: number | null;
+  onDone?: () => void;
 }
 
 interface StationValues {
@@ -23,8 +27,9 @@ interface StationValues {
   chainage: number | null;
 }
 
-export function StationForm({ studyId, station, onDone }: StationFormProps) {
+export function StationForm({ studyId, station, at = null, onDone }: StationFormProps) {
   const save = useSaveStation(studyId);
+  const system = useUnitSystem();
   const [saved, setSaved] = useState<string | null>(null);
   const initial: StationValues = { name: station?.name ?? '', chainage: station?.chainage ?? null };
   const form = useYupForm({
@@ -34,7 +39,7 @@ export function StationForm({ studyId, station, onDone }: StationFormProps) {
       await save.mutateAsync({ ...body, id: station?.id });
       setSaved(body.name);
       form.formik.resetForm();
-      onDone();
+      onDone?.();
     },
   });
   return (
@@ -46,6 +51,13 @@ export function StationForm({ studyId, station, onDone }: StationFormProps) {
         quantity="chainage"
         hint="Along the reach, as in the survey."
       />
+      {at !== null && form.formik.values.chainage !== at ? (
+        <Button
+          kind="quiet"
+          label={`Take the place on the ribbon, ${formatWithUnit(at, 'chainage', system)}`}
+          onPress={() => void form.formik.setFieldValue('chainage', at)}
+        />
+      ) : null}
       <ButtonRow>
         <FormSubmit label={station ? 'Save' : 'Add'} />
         {station ? <Button label="Leave as it was" onPress={onDone} /> : null}

@@ -1,15 +1,23 @@
-import { StyleSheet, View } from 'react-native';
+import { Pressable, StyleSheet } from 'react-native';
 import { formatWithUnit } from '@/shared/units/format';
 import { useStations } from '@/components/queries/stations';
-import { space } from '@/components/theme/tokens';
+import { space, touch } from '@/components/theme/tokens';
+import { aria } from '@/components/ui/aria';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { List } from '@/components/ui/List';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 
-/** The named places, in short. */
-export function StationsCard({ studyId }: { studyId: number }) {
+interface StationsCardProps {
+  studyId: number;
+  /** Chosen place, m. */
+  at: number | null;
+  onChoose: (chainage: number) => void;
+}
+
+/** The named places, in short; choosing one moves the ribbon, and with it every screen of the study. */
+export function StationsCard({ studyId, at, onChoose }: StationsCardProps) {
   const { data: stations } = useStations(studyId);
   const system = useUnitSystem();
   return (
@@ -19,11 +27,19 @@ export function StationsCard({ studyId }: { studyId: number }) {
       ) : null}
       {stations?.length ? (
         <List label="Stations">
-          {stations.map((station) => (
-            <View key={station.id} style={styles.line}>
-              <Txt style={styles.name}>{station.name}</Txt>
-              <Txt tone="soft">{formatWithUnit(station.chainage, 'chainage', system)}</Txt>
-            </View>
+          {stations.map(({ id, name, chainage }) => (
+            <Pressable
+              key={id}
+              role="button"
+              onPress={() => onChoose(chainage)}
+              {...aria({ 'aria-current': chainage === at ? 'true' : undefined })}
+              style={styles.line}
+            >
+              <Txt strong={chainage === at} style={styles.name}>
+                {name}
+              </Txt>
+              <Txt tone="soft">{formatWithUnit(chainage, 'chainage', system)}</Txt>
+            </Pressable>
           ))}
         </List>
       ) : null}
@@ -36,6 +52,12 @@ export function StationsCard({ studyId }: { studyId: number }) {
 }
 
 const styles = StyleSheet.create({
-  line: { flexDirection: 'row', justifyContent: 'space-between', gap: space.two },
+  line: {
+    flexDirection: 'row',
+    justifyContent: 'space-between',
+    alignItems: 'center',
+    gap: space.two,
+    minHeight: touch - 3 * space.one,
+  },
   name: { flexShrink: 1 },
 });

@@ -1,43 +1,42 @@
 import { useState } from 'react';
-import type { Station } from '@/shared/studies/types';
-import { formatQuantity } from '@/shared/units/format';
-import { UNITS } from '@/shared/units/units';
+import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
-import { useRemoveStation, useStations } from '@/components/queries/stations';
-import { Button } from '@/components/ui/Button';
-import { ButtonRow } from '@/components/ui/ButtonRow';
+import { useStations } from '@/components/queries/stations';
 import { Card } from '@/components/ui/Card';
-import { ConfirmDialog } from '@/components/ui/ConfirmDialog';
 import { Empty } from '@/components/ui/Empty';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { Table } from '@/components/ui/Table';
 import { Txt } from '@/components/ui/Txt';
+import type { Station } from '@/shared/studies/types';
+import { formatQuantity } from '@/shared/units/format';
+import { UNITS } from '@/shared/units/units';
+import { StationDialog } from './StationDialog';
 import { StationForm } from './StationForm';
+import { StudyRibbon } from './StudyRibbon';
 
 /** The named places of the reach: bridges, gauges, houses. */
 export function StationsScreen() {
   const { study, may } = useCurrentStudy();
+  const { at, setAt } = usePlaceAndTime();
   const { data: stations, error, refetch } = useStations(study.id);
-  const remove = useRemoveStation(study.id);
-  const [editing, setEditing] = useState<Station | null>(null);
-  const [leaving, setLeaving] = useState<Station | null>(null);
+  const [changing, setChanging] = useState<Station | null>(null);
   const mayChange = may('study.change');
+  const choose = (station: Station) => {
+    setAt(station.chainage);
+    if (mayChange) setChanging(station);
+  };
   return (
     <Screen
       title="Stations"
       crumbs={[{ label: study.title, href: `/studies/${study.id}` }]}
-      lead="Places where the flood is told first: the tables of a run, and later the client's page, begin with them."
+      lead="Places where the flood is told first: the tables of a run, and later the client’s page, begin with them."
+      ribbon={<StudyRibbon studyId={study.id} at={at} onChange={setAt} />}
       side={
         mayChange ? (
-          <Card title={editing ? `Change ${editing.name}` : 'New station'}>
-            <StationForm
-              key={editing?.id ?? 'new'}
-              studyId={study.id}
-              station={editing}
-              onDone={() => setEditing(null)}
-            />
+          <Card title="New station">
+            <StationForm studyId={study.id} station={null} at={at} />
           </Card>
         ) : undefined
       }
@@ -62,9 +61,10 @@ export function StationsScreen() {
             label="Stations"
             rows={stations}
             rowKey={(station) => station.id}
-            isChosen={(station) => station.id === editing?.id}
+            isChosen={(station) => station.chainage === at}
+            onRowPress={choose}
             columns={[
-              { key: 'name', title: 'Station', render: (station) => <Txt>{station.name}</Txt> },
+              { key: 'name', title: 'Station', render: (station) => station.name },
               {
                 key: 'chainage',
                 title: 'Chainage',
@@ -72,44 +72,17 @@ export function StationsScreen() {
                 align: 'right',
                 render: (station) => formatQuantity(station.chainage, 'chainage', study.unitSystem),
               },
-              ...(mayChange
-                ? [
-                    {
-                      key: 'change',
-                      title: 'Change',
-                      render: (station: Station) => (
-                        <ButtonRow>
-                          <Button
-                            kind="quiet"
-                            label="Change"
-                            name={`Change ${station.name}`}
-                            onPress={() => setEditing(station)}
-                          />
-                          <Button
-                            kind="quiet"
-                            label="Remove"
-                            name={`Remove ${station.name}`}
-                            onPress={() => setLeaving(station)}
-                          />
-                        </ButtonRow>
-                      ),
-                    },
-                  ]
-                : []),
             ]}
           />
+          {mayChange ? (
+            <Txt variant="small" tone="soft">
+              Choose one to rename, move or remove it.
+            </Txt>
+          ) : null}
         </Card>
       ) : null}
-      {leaving ? (
-        <ConfirmDialog
-          title={`Remove ${leaving.name}?`}
-          confirm="Remove"
-          onClose={() => setLeaving(null)}
-          onConfirm={() => remove.mutateAsync(leaving.id)}
-        >
-          Tables of runs no longer show it. The results themselves stay: they are kept for every
-          place along the reach.
-        </ConfirmDialog>
+      {changing ? (
+        <StationDialog studyId={study.id} station={changing} onClose={() => setChanging(null)} />
       ) : null}
     </Screen>
   );
