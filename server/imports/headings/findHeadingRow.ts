@@ -1,4 +1,3 @@
-import { cellText } from '../workbook/cellText';
 import type { Grid } from '../workbook/types';
 import { isNumeric } from '../numbers/isNumeric';
 import { matchHeadings, type HeadingMatch } from './matchHeadings';

@@ -1,4 +1,4 @@
-import type { LengthUnit, SurveyField } from '../../../shared/surveys/types';
+import type { SurveyField } from '../../../shared/surveys/types';
 import { HEADING_WORDS } from './headingWords';
 import { readHeading, type Heading } from './readHeading';
 
