@@ -1,0 +1,73 @@
+import { CASE_LIMITS } from '../caseLimits';
+import { join, type Faults } from './faults';
+import { checkSeries } from './seriesFaults';
+
+/** Chainages of the first and the last section, where they can be used. */
+export type ReachEnds = [number, number] | null;
+
+export function checkUpstream(faults: Faults, value: unknown): void {
+  const path = 'upstream';
+  const kind = faults.kind(path, value, ['inflow', 'stage', 'wall']);
+  if (kind === 'inflow' && faults.record(path, value, ['kind', 'times', 'flows'])) {
+    const rule = { at: 'times', values: ['flows'], notNegative: ['flows'] } as const;
+    checkSeries(faults, path, value, rule);
+  }
+  if (kind === 'stage' && faults.record(path, value, ['kind', 'times', 'stages'])) {
+    checkSeries(faults, path, value, { at: 'times', values: ['stages'] });
+  }
+  if (kind === 'wall') faults.record(path, value, ['kind']);
+}
+
+export function checkDownstream(faults: Faults, value: unknown): void {
+  const path = 'downstream';
+  const kinds = ['normalDepth', 'stage', 'rating', 'criticalDepth', 'open', 'wall'];
+  const kind = faults.kind(path, value, kinds);
+  if (kind === 'normalDepth') {
+    if (!faults.record(path, value, ['kind', 'slope']) || !('slope' in value)) return;
+    if (!faults.number('downstream.slope', value.slope, 'a slope')) return;
+    if (value.slope <= 0 || value.slope > 1) {
+      faults.add(
+        'downstream.slope',
+        `is ${value.slope}; the slope of normal depth lies above 0 and up to 1 (m fall a m length)`,
+      );
+    }
+  } else if (kind === 'stage') {
+    if (faults.record(path, value, ['kind', 'times', 'stages'])) {
+      checkSeries(faults, path, value, { at: 'times', values: ['stages'] });
+    }
+  } else if (kind === 'rating') {
+    if (!faults.record(path, value, ['kind', 'stages', 'flows'])) return;
+    checkSeries(faults, path, value, {
+      at: 'stages',
+      values: ['flows'],
+      notNegative: ['flows'],
+      notFalling: ['flows'],
+      least: 2,
+    });
+  } else if (kind !== null) faults.record(path, value, ['kind']);
+}
+
+export function checkLaterals(faults: Faults, value: unknown, ends: ReachEnds): void {
+  if (!faults.array('laterals', value, 0, CASE_LIMITS.laterals)) return;
+  value.forEach((lateral, k) => {
+    const path = `laterals[${k}]`;
+    if (!faults.record(path, lateral, ['from', 'to', 'times', 'flows'])) return;
+    checkSeries(faults, path, lateral, { at: 'times', values: ['flows'] });
+    const places = (['from', 'to'] as const).filter((key) => {
+      if (!(key in lateral)) return false;
+      const at = lateral[key];
+      if (!faults.number(join(path, key), at, 'a chainage in m')) return false;
+      if (!ends || (at >= ends[0] && at <= ends[1])) return true;
+      return faults.add(
+        join(path, key),
+        `chainage ${at} m lies outside the reach, ${ends[0]} m to ${ends[1]} m`,
+      );
+    });
+    if (places.length === 2 && (lateral.from as number) > (lateral.to as number)) {
+      faults.add(
+        path,
+        `from ${String(lateral.from)} m lies below to ${String(lateral.to)} m; swap them`,
+      );
+    }
+  });
+}

@@ -1,0 +1,175 @@
+import { CASE_LIMITS } from '../caseLimits';
+import { join, type Faults } from './faults';
+
+/** Largest elevation, offset or chainage (m, either sign) that can be meant. */
+const FARTHEST = 1e7;
+
+/** Two or more sections, chainage strictly increasing, ids unique. */
+export function checkSections(faults: Faults, value: unknown): void {
+  if (!faults.array('sections', value, 2, CASE_LIMITS.sections)) return;
+  const ids = new Map<string, number>();
+  let before: { chainage: number; index: number } | null = null;
+  value.forEach((section, index) => {
+    const path = `sections[${index}]`;
+    checkSection(faults, path, section);
+    if (typeof section !== 'object' || section === null) return;
+    const { id, chainage } = section as { id?: unknown; chainage?: unknown };
+    if (typeof id === 'string') {
+      const first = ids.get(id);
+      if (first !== undefined) {
+        faults.add(
+          join(path, 'id'),
+          `"${id}" is also the id of sections[${first}]; make it unique`,
+        );
+      } else ids.set(id, index);
+    }
+    if (typeof chainage === 'number' && Number.isFinite(chainage)) {
+      if (before && chainage <= before.chainage) {
+        faults.add(
+          join(path, 'chainage'),
+          `is ${chainage} m, not beyond the ${before.chainage} m of sections[${before.index}]; ` +
+            'order the sections downstream, each at a chainage of its own',
+        );
+      }
+      before = { chainage, index };
+    }
+  });
+}
+
+function checkSection(faults: Faults, path: string, value: unknown): void {
+  const required = ['id', 'chainage', 'points', 'roughness'];
+  if (!faults.record(path, value, required, ['banks'])) return;
+  if ('id' in value && faults.text(join(path, 'id'), value.id, 100) && value.id === '') {
+    faults.add(join(path, 'id'), 'is empty; name the section');
+  }
+  if ('chainage' in value)
+    checkMetres(faults, join(path, 'chainage'), value.chainage, 'a chainage');
+  const ends = 'points' in value ? checkPoints(faults, join(path, 'points'), value.points) : null;
+  if ('roughness' in value) checkRoughness(faults, join(path, 'roughness'), value.roughness, ends);
+  if (value.banks !== undefined) checkBanks(faults, join(path, 'banks'), value.banks, ends);
+}
+
+/** First and last offset, where the points can be used. */
+type Ends = [number, number] | null;
+
+function checkPoints(faults: Faults, path: string, value: unknown): Ends {
+  if (!faults.array(path, value, 2, CASE_LIMITS.pointsPerSection)) return null;
+  const count = faults.list.length;
+  const points: [number, number][] = [];
+  value.forEach((point, k) => {
+    const at = `${path}[${k}]`;
+    if (!isPair(point)) {
+      faults.add(at, 'must be [offset, elevation], two numbers in m');
+      return;
+    }
+    const fine =
+      checkMetres(faults, `${at}[0]`, point[0], 'an offset') &&
+      checkMetres(faults, `${at}[1]`, point[1], 'an elevation');
+    if (!fine) return;
+    const before = points[points.length - 1];
+    if (before && (point[0] as number) < before[0]) {
+      faults.add(
+        at,
+        `its offset ${String(point[0])} m lies left of the ${before[0]} m before it; ` +
+          'order the points from left to right',
+      );
+    }
+    points.push([point[0] as number, point[1] as number]);
+  });
+  if (faults.list.length > count) return null;
+  const last = points.length - 1;
+  if (points[last][0] <= points[0][0]) {
+    faults.add(
+      path,
+      'all points have the same offset, so the section has no width; give its true offsets',
+    );
+    return null;
+  }
+  if (points[1][0] === points[0][0] && points[1][1] > points[0][1]) {
+    faults.add(
+      `${path}[0]`,
+      'starts a wall that rises into the section; begin at the top of the wall',
+    );
+  }
+  if (points[last][0] === points[last - 1][0] && points[last][1] < points[last - 1][1]) {
+    faults.add(
+      `${path}[${last}]`,
+      'ends a wall that falls out of the section; end at the top of the wall',
+    );
+  }
+  return [points[0][0], points[last][0]];
+}
+
+function checkRoughness(faults: Faults, path: string, value: unknown, ends: Ends): void {
+  if (!faults.array(path, value, 1, CASE_LIMITS.roughnessZonesPerSection)) return;
+  let before: number | null = null;
+  value.forEach((zone, k) => {
+    const at = `${path}[${k}]`;
+    if (!isPair(zone)) {
+      faults.add(at, 'must be [from offset, Manning n], two numbers');
+      return;
+    }
+    const [from, n] = zone;
+    if (faults.number(`${at}[1]`, n, "Manning's n")) {
+      if (n < 0)
+        faults.add(`${at}[1]`, `Manning's n is ${n}; it cannot be negative (rivers: 0.02 to 0.15)`);
+      if (n > 10)
+        faults.add(`${at}[1]`, `Manning's n is ${n}; it must be below 10 (rivers: 0.02 to 0.15)`);
+    }
+    if (!checkMetres(faults, `${at}[0]`, from, 'an offset')) return;
+    const offset = from as number;
+    if (before !== null && offset <= before) {
+      faults.add(
+        `${at}[0]`,
+        `offset ${offset} m does not lie right of the ${before} m before it; order the zones`,
+      );
+    }
+    if (k === 0 && ends && offset > ends[0]) {
+      faults.add(
+        `${at}[0]`,
+        `the first zone begins at ${offset} m, right of the first point at ${ends[0]} m; begin it there`,
+      );
+    }
+    if (ends && offset > ends[1]) {
+      faults.add(
+        `${at}[0]`,
+        `offset ${offset} m lies right of the last point at ${ends[1]} m; remove the zone`,
+      );
+    }
+    before = offset;
+  });
+}
+
+function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): void {
+  if (!isPair(value)) {
+    faults.add(path, 'must be [left bank offset, right bank offset], two numbers in m');
+    return;
+  }
+  const fine =
+    checkMetres(faults, `${path}[0]`, value[0], 'an offset') &&
+    checkMetres(faults, `${path}[1]`, value[1], 'an offset');
+  if (!fine) return;
+  const [left, right] = value as [number, number];
+  if (left >= right) {
+    faults.add(
+      path,
+      `the left bank at ${left} m does not lie left of the right bank at ${right} m; swap or mend them`,
+    );
+  }
+  if (ends && (left < ends[0] || right > ends[1])) {
+    faults.add(
+      path,
+      `the banks at ${left} m and ${right} m must lie within the section, ${ends[0]} m to ${ends[1]} m`,
+    );
+  }
+}
+
+function isPair(value: unknown): value is [unknown, unknown] {
+  return Array.isArray(value) && value.length === 2;
+}
+
+function checkMetres(faults: Faults, path: string, value: unknown, what: string): value is number {
+  if (!faults.number(path, value, `${what} in m`)) return false;
+  if (Math.abs(value) <= FARTHEST) return true;
+  return faults.add(path, `${value} m is out of range; check the unit`);
+}
