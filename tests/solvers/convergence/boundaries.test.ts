@@ -39,12 +39,21 @@ function route(
 }
 type Cells = ReturnType<typeof route>;
 
-/** Behind a wave the state is even: depth to 2 mm and flow to 0.5 % over the stretch. */
-function expectEven(cells: Cells, from: number, to: number, depth: number, flow: number) {
+/** Away from a front, by sixteen cells, the state is even: to a millimetre of depth and 1 ‰ of flow (of the larger flow
+ *  beside the front, of 1 m²/s at least). What is left is the start of the wave, which takes a few cells to become a
+ *  front, and the ripple behind a slow one. */
+function expectEven(
+  cells: Cells,
+  from: number,
+  to: number,
+  depth: number,
+  flow: number,
+  largestFlow = Math.abs(flow),
+) {
   cells.chainage.forEach((x, i) => {
     if (x < from || x > to) return;
-    expect(Math.abs(cells.finalDepth[i] - depth)).toBeLessThan(2e-3);
-    expect(Math.abs(cells.finalFlow[i] - flow)).toBeLessThan(5e-3 * Math.max(1, Math.abs(flow)));
+    expect(Math.abs(cells.finalDepth[i] - depth)).toBeLessThan(1e-3);
+    expect(Math.abs(cells.finalFlow[i] - flow)).toBeLessThan(1e-3 * Math.max(1, largestFlow));
   });
 }
 
@@ -70,8 +79,8 @@ describe('inflow', () => {
       depth: ahead,
       flow: 0,
     });
-    expectEven(cells, 0, 570, behind, flow);
-    expectEven(cells, 630, LENGTH, ahead, 0);
+    expectEven(cells, 0, 520, behind, flow);
+    expectEven(cells, 680, LENGTH, ahead, 0);
     expect(Math.abs(front(cells, ahead, behind) - 600)).toBeLessThan(2 * CELL);
   });
 
@@ -101,8 +110,8 @@ describe('wall', () => {
       depth,
       flow: depth * velocity,
     });
-    expectEven(cells, 530, LENGTH, surge, 0);
-    expectEven(cells, 0, 470, depth, depth * velocity);
+    expectEven(cells, 580, LENGTH, surge, 0, depth * velocity);
+    expectEven(cells, 0, 420, depth, depth * velocity);
     expect(Math.abs(front(cells, depth, surge) - 500)).toBeLessThan(2 * CELL);
   });
 
@@ -114,8 +123,8 @@ describe('wall', () => {
       depth: 1.5,
       flow: -1.5,
     });
-    expectEven(cells, 0, 470, 1.914065, 0);
-    expectEven(cells, 530, LENGTH, 1.5, -1.5);
+    expectEven(cells, 0, 420, 1.914065, 0);
+    expectEven(cells, 580, LENGTH, 1.5, -1.5);
   });
 });
 
@@ -131,8 +140,8 @@ describe('stage', () => {
       depth: 1,
       flow: 0,
     });
-    expectEven(cells, 530, LENGTH, raised.depth, -raised.flow);
-    expectEven(cells, 0, 470, 1, 0);
+    expectEven(cells, 580, LENGTH, raised.depth, -raised.flow);
+    expectEven(cells, 0, 420, 1, 0);
   });
 
   it('raised at the inlet sends the same bore downstream', () => {
@@ -143,8 +152,8 @@ describe('stage', () => {
       depth: 1,
       flow: 0,
     });
-    expectEven(cells, 0, 470, raised.depth, raised.flow);
-    expectEven(cells, 530, LENGTH, 1, 0);
+    expectEven(cells, 0, 420, raised.depth, raised.flow);
+    expectEven(cells, 580, LENGTH, 1, 0);
   });
 
   it('lowered at either end draws water out by the invariant', () => {
@@ -169,18 +178,19 @@ describe('stage', () => {
 
   it('rising slowly fills a short basin at the rate of its surface', () => {
     // 5000 m² rising a metre an hour takes 1.3889 m³/s at the mouth and half of that in the middle.
+    const rate = 5000 / 3600;
     const { sections } = routeChecked(
       buildCase({
         sections: buildSections(0, 100, 3, 0.02, () => openRectanglePoints(50, 0)),
         upstream: { kind: 'wall' },
         downstream: { kind: 'stage', times: [0, 3600], stages: [2, 3] },
-        initial: { kind: 'still', stage: 2 },
+        // From still water it would sway for hours: a quarter wave of 90 s has nothing to damp it.
+        initial: { kind: 'profile', chainages: [0, 100], stages: [2, 2], flows: [0, -rate] },
         numerics: { cellSize: 5, duration: 3600, outputInterval: 600 },
       }),
     );
-    const rate = 5000 / 3600;
-    expect(sections[2].flow.at(-1)! / -rate).toBeCloseTo(1, 3);
-    expect(sections[1].flow.at(-1)! / -rate).toBeCloseTo(0.5, 3);
+    expect(sections[2].flow.at(-1)! / -rate).toBeCloseTo(1, 2);
+    expect(sections[1].flow.at(-1)! / -rate).toBeCloseTo(0.5, 2);
     expect(sections[0].stage.at(-1)!).toBeCloseTo(3, 3);
   });
 });

@@ -15,6 +15,10 @@ import { routeChecked } from '../../helpers/solvers/routeChecked';
 
 const section = trapezoid(10, 1);
 const [MANNING, SLOPE, LENGTH, INFLOW] = [0.03, 0.001, 1000, 20];
+/** m³/s, of some 20: where the flow bends, the slope limiter goes on switching at this size. */
+const FLOW_ROUNDING = 5e-5;
+/** Long enough for the flow to rest. */
+const DURATION = 7200;
 
 function settle(lateral: Omit<Lateral, 'times' | 'flows'>, flow: number, outletDepth: number) {
   return routeChecked(
@@ -26,7 +30,7 @@ function settle(lateral: Omit<Lateral, 'times' | 'flows'>, flow: number, outletD
       downstream: { kind: 'stage', ...steadyStage(outletDepth) },
       laterals: [{ ...lateral, ...steadyFlow(flow) }],
       initial: { kind: 'steady' },
-      numerics: { cellSize: 5, duration: 3600, outputInterval: 3600 },
+      numerics: { cellSize: 5, duration: DURATION, outputInterval: DURATION },
     }),
   );
 }
@@ -62,12 +66,13 @@ describe('lateral flow', () => {
       const exact = surfaceProfile(reachOn(low), GRAVITY, stops, stage);
       places.forEach((x, k) => {
         const i = cells.chainage.indexOf(x);
-        expect(Math.abs(cells.finalStage[i] - exact[k + 1])).toBeLessThan(1e-3);
-        expect(cells.finalFlow[i]).toBeCloseTo(INFLOW + gain * share(x), 5);
+        // The lateral flow lifts or lowers the surface by some 0.2 m; the kink of the flow costs first order at its ends.
+        expect(Math.abs(cells.finalStage[i] - exact[k + 1])).toBeLessThan(2e-3);
+        expect(Math.abs(cells.finalFlow[i] - INFLOW - gain * share(x))).toBeLessThan(FLOW_ROUNDING);
       });
       stage = exact[exact.length - 1];
     }
-    expect(volume.lateral).toBeCloseTo(3600 * gain, 6);
+    expect(volume.lateral).toBeCloseTo(DURATION * gain, 6);
   });
 
   it('at a point steps the flow by its own amount', () => {
@@ -75,7 +80,7 @@ describe('lateral flow', () => {
     const { cells } = settle({ from: 502.5, to: 502.5 }, 5, outletDepth);
     cells.chainage.forEach((x, i) => {
       if (Math.abs(x - 502.5) < 1) return;
-      expect(cells.finalFlow[i]).toBeCloseTo(x < 502.5 ? 20 : 25, 5);
+      expect(Math.abs(cells.finalFlow[i] - (x < 502.5 ? 20 : 25))).toBeLessThan(FLOW_ROUNDING);
     });
   });
 
@@ -84,8 +89,8 @@ describe('lateral flow', () => {
     expect(warnings.map(({ code }) => code)).toContain('lateralLimited');
     expect(Math.min(...cells.finalDepth)).toBeGreaterThanOrEqual(0);
     // The whole inflow is taken: not 50 m³/s, and what the outlet's stage sends back cannot pass the bed's rise.
-    expect(-volume.lateral).toBeGreaterThan(3600 * 19.9);
-    expect(-volume.lateral).toBeLessThan(3600 * 20 + volume.initial + 1);
+    expect(-volume.lateral).toBeGreaterThan(DURATION * 19.9);
+    expect(-volume.lateral).toBeLessThan(DURATION * 20 + volume.initial + 1);
     expect(sections[1].flow.at(-1)!).toBeLessThanOrEqual(0.1);
   });
 });

@@ -35,27 +35,36 @@ function settle(channel: Channel, upstream: number[], downstream: Downstream, ce
       upstream: { kind: 'inflow', ...steadyFlow(channel.flow) },
       downstream,
       initial: { kind: 'steady' },
-      numerics: { cellSize, duration: 1200, outputInterval: 1200 },
+      numerics: { cellSize, duration: 2400, outputInterval: 2400 },
     }),
   );
-  for (const flow of result.cells.finalFlow) {
-    expect(Math.abs(flow / channel.flow - 1)).toBeLessThan(1e-7);
-  }
   const depthAt = new Map(
     result.sections.map((section) => [length - section.chainage, section.depth.at(-1)!]),
   );
-  return { cells: result.cells, depths: upstream.map((distance) => depthAt.get(distance)!) };
+  const departures = result.cells.finalFlow.map((flow) => Math.abs(flow / channel.flow - 1));
+  return {
+    cells: result.cells,
+    /** Largest departure of the flow from the inflow, relative. */
+    flowError: Math.max(...departures),
+    depths: upstream.map((distance) => depthAt.get(distance)!),
+  };
 }
+
+/** Relative. The flow of a settled run is the same at all faces; what is left dies away by a factor of ten in some ten
+ *  minutes. */
+const FLOW_ROUNDING = 1e-8;
 
 describe('uniform flow', () => {
   it.each([0.001, 0.003, 0.01, 0.03, 0.1, 0.2])('on a slope of %f', (slope) => {
     const channel = { bottom: 10, side: 0, manning: 0.03, slope, flow: 50 };
     const expected = normalDepth(trapezoid(10, 0), 0.03, slope, 50);
-    const { cells } = settle(channel, [0, 1000], { kind: 'normalDepth', slope }, 10);
+    const { cells, flowError } = settle(channel, [0, 1000], { kind: 'normalDepth', slope }, 10);
     // A scheme that reads the bed step between cells as a wall is wrong by tens of percent on steep slopes.
     for (const depth of cells.finalDepth) {
       expect(Math.abs(depth / expected - 1)).toBeLessThan(2e-3);
     }
+    // Faster than Froude 1.5 even flow breaks into roll waves (Vedernikov's limit) that grow from rounding.
+    expect(flowError).toBeLessThan(slope < 0.05 ? FLOW_ROUNDING : 1e-3);
   });
 
   it.each([
