@@ -23,16 +23,17 @@ export function createControlBoundary(
   const endFlux = createEndFlux(workspace, tables, end);
   const { celerityAt, criticalFlowAt, forceAt } = createEndSection(workspace, tables, section);
 
+  const { min } = Math;
   // What the search below reads: set before each search, so that the search makes no closure.
   let out = 0;
   let area = 0;
   let velocity = 0;
   let celerity = 0;
-  const released = (eta: number): number => Math.min(control(eta), criticalFlowAt(eta));
+  const released = (eta: number): number => min(control(eta), criticalFlowAt(eta));
   const surplus = (eta: number): number => released(eta) - out;
   const mismatch = (eta: number): number => {
     const c = 0.5 * (celerity + celerityAt(eta));
-    const speed = Math.min(velocity - c, -0.25 * celerity);
+    const speed = min(velocity - c, -0.25 * celerity);
     return released(eta) - out - speed * (tables.areaAt(section, eta) - area);
   };
 

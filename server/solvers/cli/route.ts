@@ -8,8 +8,6 @@ const USAGE = 'Usage: npm run --silent route -- <case.json | -> [--out <result.j
 /** 0 routed, 1 the run failed, 2 the case or the command is not valid. */
 type ExitCode = 0 | 1 | 2;
 
-process.exitCode = main(process.argv.slice(2));
-
 function main(args: string[]): ExitCode {
   const command = parseArguments(args);
   if (typeof command === 'string') return refuse([command, USAGE]);
@@ -89,3 +87,5 @@ function showProgress({ fraction, time }: { fraction: number; time: number }): v
 function clearProgress(): void {
   if (process.stderr.isTTY) process.stderr.write('\n');
 }
+
+process.exitCode = main(process.argv.slice(2));

@@ -26,6 +26,7 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
     flow: new Float64Array(n),
     velocity: new Float64Array(n),
   };
+  const { abs } = Math;
   let started = false;
 
   function start(): void {
@@ -56,13 +57,13 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
           }
         }
         const flow = 0.5 * (fluxArea[i - 1] + fluxArea[i]);
-        const size = Math.abs(flow);
-        if (size > Math.abs(peakFlow[k])) {
+        const size = abs(flow);
+        if (size > abs(peakFlow[k])) {
           peakFlow[k] = flow;
           peakFlowTime[k] = time;
         }
-        const most = Math.abs(peakVelocity[k]) * area[i];
-        if (size > most && Math.abs(cellFlow[i]) > most) {
+        const most = abs(peakVelocity[k]) * area[i];
+        if (size > most && abs(cellFlow[i]) > most) {
           peakVelocity[k] = waterVelocity(flow, cellFlow[i], area[i]);
         }
       }

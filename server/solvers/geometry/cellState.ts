@@ -1,6 +1,6 @@
 import type { Workspace } from '../workspace';
 import type { CellTables } from './cellTables';
-import { AREA, B0, B1, LEVEL_FIELDS, TABLE_STRIDE, V0, V1, V2, Z } from './sectionTable';
+import { LEVEL_FIELDS, LEVEL_LAYOUT, TABLE_STRIDE } from './sectionTable';
 
 /** Sets the area of a cell and all that follows from it: stage, top width, celerity, friction factor. */
 export interface CellState {
@@ -14,6 +14,8 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
   const { area, stage, width, celerity, reach, friction, bed, gravity } = workspace;
   const { level, levelZ, levelArea, levelEnd, levelB0, levelB1 } = workspace;
   const { levelV0, levelV1, levelV2, levels, table } = workspace;
+  const { Z, AREA, B0, B1, V0, V1, V2 } = LEVEL_LAYOUT;
+  const { sqrt, cbrt } = Math;
   const fourG = 4 * gravity;
 
   function activate(i: number, row: number): void {
@@ -42,7 +44,7 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
   /** Velocity per root of slope (K/A) at s above the foot of the active level. */
   function conveyanceVelocity(i: number, s: number): number {
     if (level[i] > 0) return levelV0[i] + s * (levelV1[i] + s * levelV2[i]);
-    const root = Math.cbrt(s);
+    const root = cbrt(s);
     return levelV0[i] * root * root;
   }
 
@@ -50,7 +52,7 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     if (a < levelArea[i] || a >= levelEnd[i]) activate(i, tables.rowAtArea(i, a));
     const da = a - levelArea[i];
     const b0 = levelB0[i];
-    const b = Math.sqrt(b0 * b0 + 4 * levelB1[i] * da);
+    const b = sqrt(b0 * b0 + 4 * levelB1[i] * da);
     if (a <= 0) {
       dry(i);
       return;
@@ -62,7 +64,7 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     stage[i] = levelZ[i] + s;
     width[i] = b;
     reach[i] = quarter;
-    celerity[i] = Math.sqrt(fourG * quarter);
+    celerity[i] = sqrt(fourG * quarter);
     friction[i] = gravity / (a * v * v);
   }
 

@@ -1,5 +1,5 @@
 import type { Workspace } from '../workspace';
-import { AREA, B0, B1, LEVEL_FIELDS, TABLE_STRIDE, THRUST, V0, V1, V2, Z } from './sectionTable';
+import { LEVEL_FIELDS as FIELDS, LEVEL_LAYOUT, TABLE_STRIDE as STRIDE } from './sectionTable';
 
 /**
  * Looks up any section's table at any stage: for the faces, boundaries and initial states that leave the active level.
@@ -28,6 +28,10 @@ export function createCellTables(
   workspace: Pick<Workspace, 'table' | 'levels' | 'level' | 'gravity'>,
 ): CellTables {
   const { table, levels, level, gravity } = workspace;
+  const { Z, AREA, B0, B1, THRUST, V0, V1, V2 } = LEVEL_LAYOUT;
+  const LEVEL_FIELDS = FIELDS;
+  const TABLE_STRIDE = STRIDE;
+  const { sqrt, cbrt, min } = Math;
 
   function rowAtStage(i: number, stage: number): number {
     const start = i * TABLE_STRIDE;
@@ -76,7 +80,7 @@ export function createCellTables(
     if (row > i * TABLE_STRIDE) {
       return area * (table[row + V0] + s * (table[row + V1] + s * table[row + V2]));
     }
-    const root = Math.cbrt(s);
+    const root = cbrt(s);
     return area * table[row + V0] * root * root;
   }
 
@@ -85,7 +89,7 @@ export function createCellTables(
     const da = area - table[row + AREA];
     if (da <= 0) return table[row + Z];
     const b0 = table[row + B0];
-    return table[row + Z] + (2 * da) / (b0 + Math.sqrt(b0 * b0 + 4 * table[row + B1] * da));
+    return table[row + Z] + (2 * da) / (b0 + sqrt(b0 * b0 + 4 * table[row + B1] * da));
   }
 
   function frontSpeedAt(i: number, stage: number): number {
@@ -93,16 +97,16 @@ export function createCellTables(
     if (stage <= table[start + Z]) return 0;
     const top = rowAtStage(i, stage);
     // In the lowest level A is near a power of the depth, A ~ s^m, for which ω = 2 m c.
-    const end = Math.min(stage, table[start + LEVEL_FIELDS + Z]);
+    const end = min(stage, table[start + LEVEL_FIELDS + Z]);
     const a = areaAt(i, end);
     const b = table[start + B0] + 2 * (end - table[start + Z]) * table[start + B1];
-    let omega = ((2 * b * (end - table[start + Z])) / a) * Math.sqrt((gravity * a) / b);
+    let omega = ((2 * b * (end - table[start + Z])) / a) * sqrt((gravity * a) / b);
     // Above it ω = ∫ sqrt(g B/A) dη, by the trapezoid.
     for (let row = start + LEVEL_FIELDS; row <= top; row += LEVEL_FIELDS) {
       const s = (row === top ? stage : table[row + LEVEL_FIELDS + Z]) - table[row + Z];
       const a1 = table[row + AREA] + s * (table[row + B0] + s * table[row + B1]);
-      const lower = Math.sqrt((gravity * table[row + B0]) / table[row + AREA]);
-      const upper = Math.sqrt((gravity * (table[row + B0] + 2 * s * table[row + B1])) / a1);
+      const lower = sqrt((gravity * table[row + B0]) / table[row + AREA]);
+      const upper = sqrt((gravity * (table[row + B0] + 2 * s * table[row + B1])) / a1);
       omega += 0.5 * s * (lower + upper);
     }
     return omega;

@@ -11,17 +11,22 @@ import { MAX_LEVELS, tableLevels } from './tableLevels';
  */
 export const LEVEL_FIELDS = 8;
 export const TABLE_STRIDE = MAX_LEVELS * LEVEL_FIELDS;
-export const Z = 0;
-export const AREA = 1;
-export const B0 = 2;
-export const B1 = 3;
-export const THRUST = 4;
-export const V0 = 5;
-export const V1 = 6;
-export const V2 = 7;
+
+/** Where each number of a level stands. Take it apart once outside of loops: an import is a call at every use. */
+export const LEVEL_LAYOUT = {
+  Z: 0,
+  AREA: 1,
+  B0: 2,
+  B1: 3,
+  THRUST: 4,
+  V0: 5,
+  V1: 6,
+  V2: 7,
+} as const;
 
 /** Writes the table of `shape` into `table` from `start` on; returns the number of levels. */
 export function writeSectionTable(shape: SectionShape, table: Float64Array, start: number): number {
+  const { Z, AREA, B0, B1, THRUST, V0, V1, V2 } = LEVEL_LAYOUT;
   const levels = tableLevels(shape);
   const count = levels.length;
   const stages = new Float64Array(2 * count - 1);

@@ -1,6 +1,7 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import { outletControl } from '../boundaries/downstreamBoundary';
 import { createEndSection } from '../boundaries/endSection';
+import { openSlope } from '../boundaries/openBoundary';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
@@ -63,7 +64,7 @@ export function steadyState(
         Math.min(control(eta), section.criticalFlowAt(eta)) - flow;
       return risingRoot(released, floor, 1);
     }
-    const slope = (bed[n] - floor) / (0.5 * grid.dx);
+    const slope = openSlope(workspace);
     return slope > 0 ? section.normalStage(flow, slope) : section.criticalStage(flow);
   }
 }

@@ -1,19 +1,29 @@
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
 
-/** Fields of `workspace.face`: areas of the sections of cells i and j at the stages left and right of a face. */
-export const A1 = 0; // A_i(η_L), m²
-export const B1 = 1; // A_j(η_L)
-export const A2 = 2; // A_i(η_R)
-export const B2 = 3; // A_j(η_R)
-export const DP_I = 4; // I1_i(η_R) - I1_i(η_L), m³
-export const DP_J = 5; // I1_j(η_R) - I1_j(η_L)
+/** Fields of `workspace.face`: areas and thrusts of cells i and j at the stages left and right of a face. */
+export const FACE_LAYOUT = {
+  /** A_i(η_L), m² */
+  A1: 0,
+  /** A_j(η_L) */
+  B1: 1,
+  /** A_i(η_R) */
+  A2: 2,
+  /** A_j(η_R) */
+  B2: 3,
+  /** I1_i(η_R) - I1_i(η_L), m³ */
+  DP_I: 4,
+  /** I1_j(η_R) - I1_j(η_L) */
+  DP_J: 5,
+} as const;
 
 /** Fills `workspace.face` from the tables, for stages too far from the cells' own for the local quadratic. */
 export function createFaceAreas(
   { face }: Workspace,
   tables: CellTables,
 ): (i: number, j: number, left: number, right: number) => void {
+  const { A1, B1, A2, B2, DP_I, DP_J } = FACE_LAYOUT;
+
   return function faceAreas(i, j, left, right) {
     face[A1] = tables.areaAt(i, left);
     face[B1] = tables.areaAt(j, left);

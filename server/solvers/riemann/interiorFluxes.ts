@@ -1,6 +1,6 @@
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
-import { A1, A2, B1, B2, DP_I, DP_J, createFaceAreas } from './faceAreas';
+import { FACE_LAYOUT, createFaceAreas } from './faceAreas';
 import { createIrregularFlux } from './irregularFlux';
 
 /** Sections whose areas at equal stage differ by less than this ratio make a regular face … */
@@ -27,8 +27,10 @@ const THIRD = 1 / 3;
 export function createInteriorFluxes(workspace: Workspace, tables: CellTables): () => void {
   const { n, gravity, area, flow, stage, width, celerity, reach, levelB1 } = workspace;
   const { slopeStage, slopeFlow, fluxArea, fluxLeft, fluxRight, face } = workspace;
+  const { A1, B1, A2, B2, DP_I, DP_J } = FACE_LAYOUT;
   const faceAreas = createFaceAreas(workspace, tables);
   const irregularFlux = createIrregularFlux(workspace, tables);
+  const { abs, min, max } = Math;
   const halfG = 0.5 * gravity;
 
   return function interiorFluxes(): void {
@@ -95,7 +97,7 @@ export function createInteriorFluxes(workspace: Workspace, tables: CellTables): 
         b2 <= REGULAR * a2;
       let mix = 0;
       if (!isRegular) {
-        const ratio = Math.max(a1 / b1, b1 / a1, a2 / b2, b2 / a2);
+        const ratio = max(a1 / b1, b1 / a1, a2 / b2, b2 / a2);
         mix = ratio < IRREGULAR ? (ratio - REGULAR) / (IRREGULAR - REGULAR) : 1;
         irregularFlux(i);
         if (mix === 1) continue;
@@ -112,18 +114,18 @@ export function createInteriorFluxes(workspace: Workspace, tables: CellTables): 
       if (isThinI || isThinJ) {
         const uI = areaI > 0 ? flow[i] / areaI : 0;
         const uJ = areaJ > 0 ? flow[j] / areaJ : 0;
-        const low = Math.min(uI, uJ);
-        const high = Math.max(uI, uJ);
-        if (isThinI) qL = Math.max((low - cI) * aL, Math.min((high + cI) * aL, qL));
-        if (isThinJ) qR = Math.max((low - cJ) * aR, Math.min((high + cJ) * aR, qR));
+        const low = min(uI, uJ);
+        const high = max(uI, uJ);
+        if (isThinI) qL = max((low - cI) * aL, min((high + cI) * aL, qL));
+        if (isThinJ) qR = max((low - cJ) * aR, min((high + cJ) * aR, qR));
       }
       const uL = qL / aL;
       const uR = qR / aR;
-      const sL = Math.min(0, uL - cI, uR - cJ);
-      const sR = Math.max(0, uL + cI, uR + cJ);
+      const sL = min(0, uL - cI, uR - cJ);
+      const sR = max(0, uL + cI, uR + cJ);
       const dAi = a2 - a1;
       const dAj = b2 - b1;
-      const dA = Math.abs(dAi) < Math.abs(dAj) ? dAi : dAj;
+      const dA = abs(dAi) < abs(dAj) ? dAi : dAj;
       const dP = halfG * (dPi + dPj);
       const inverse = 1 / (sR - sL);
       const product = sL * sR;

@@ -1,6 +1,6 @@
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
-import { A1, A2, B1, B2, DP_I, DP_J, createFaceAreas } from './faceAreas';
+import { FACE_LAYOUT, createFaceAreas } from './faceAreas';
 
 const STILL = 1e-12;
 
@@ -12,6 +12,8 @@ const STILL = 1e-12;
 export function createIrregularFlux(workspace: Workspace, tables: CellTables): (f: number) => void {
   const { area, flow, stage, celerity, face, fluxArea, fluxLeft, fluxRight } = workspace;
   const { gravity, bed, dryDepth } = workspace;
+  const { abs, min, max } = Math;
+  const { A1, B1, A2, B2, DP_I, DP_J } = FACE_LAYOUT;
   const faceAreas = createFaceAreas(workspace, tables);
 
   return function irregularFlux(f: number): void {
@@ -22,23 +24,23 @@ export function createIrregularFlux(workspace: Workspace, tables: CellTables): (
     faceAreas(i, j, etaI, etaJ);
     const a1 = face[A1];
     const b2 = face[B2];
-    const own = Math.min(a1, b2);
+    const own = min(a1, b2);
     const uI = area[i] > 0 ? flow[i] / area[i] : 0;
     const uJ = area[j] > 0 ? flow[j] / area[j] : 0;
-    let aL = Math.min(a1, face[B1]);
-    let aR = Math.min(face[A2], b2);
+    let aL = min(a1, face[B1]);
+    let aR = min(face[A2], b2);
     if (etaI >= etaJ) {
       if (uJ >= 0) aR = own;
     } else if (uI <= 0) aL = own;
 
     const thrust = gravity * smaller(face[DP_I], face[DP_J]);
     const step = gravity * own * (etaJ - etaI);
-    const dP = Math.abs(thrust) > Math.abs(step) ? thrust : step;
+    const dP = abs(thrust) > abs(step) ? thrust : step;
 
-    let sL = Math.min(0, uI - celerity[i], uJ - celerity[j]);
-    let sR = Math.max(0, uI + celerity[i], uJ + celerity[j]);
-    if (etaJ - bed[j] <= dryDepth) sR = Math.max(sR, uI + tables.frontSpeedAt(i, etaI));
-    if (etaI - bed[i] <= dryDepth) sL = Math.min(sL, uJ - tables.frontSpeedAt(j, etaJ));
+    let sL = min(0, uI - celerity[i], uJ - celerity[j]);
+    let sR = max(0, uI + celerity[i], uJ + celerity[j]);
+    if (etaJ - bed[j] <= dryDepth) sR = max(sR, uI + tables.frontSpeedAt(i, etaI));
+    if (etaI - bed[i] <= dryDepth) sL = min(sL, uJ - tables.frontSpeedAt(j, etaJ));
     const spread = sR - sL;
     const qL = aL * uI;
     const qR = aR * uJ;

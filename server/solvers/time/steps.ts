@@ -36,6 +36,7 @@ export function createSteps(
   const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, explicitFriction } = workspace;
   const { place } = cellState;
   const { rate } = laterals;
+  const { abs } = Math;
   const hasLaterals = laterals.any;
   const limitOutflow = createLimitOutflow(workspace);
 
@@ -74,7 +75,7 @@ export function createSteps(
         a = withLateral(i, a, dt);
         if (a < before) q *= a / before;
       }
-      const speed = dt * Math.abs(q0);
+      const speed = dt * abs(q0);
       const z = 0.5 * speed * friction[i];
       const e = z < MOST_EXPLICIT ? z : MOST_EXPLICIT;
       explicitFriction[i] = e;
@@ -105,7 +106,7 @@ export function createSteps(
         if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
       }
       a = 0.5 * (old + a);
-      const z = dt * Math.abs(flow[i]);
+      const z = dt * abs(flow[i]);
       if (a !== area[i]) place(i, a);
       flow[i] = stage[i] - bed[i] > dryDepth ? q / (1 + z * friction[i] - explicitFriction[i]) : 0;
       if (a < 0.5 * old) drained++;
@@ -141,7 +142,7 @@ export function createSteps(
 
   function frontOf(i: number): number {
     if (i < 1 || i > n || area[i] <= 0) return 2 * celerity[Math.min(n, Math.max(1, i))];
-    return Math.abs(flow[i]) / area[i] + 2 * celerity[i];
+    return abs(flow[i]) / area[i] + 2 * celerity[i];
   }
 
   return { predict, correct, accept, missing: () => missing };

@@ -23,6 +23,7 @@ export function createTimeStep(
   chainage: Float64Array,
 ): (endSpeed: number, time: number) => number {
   const { n, dx, area, flow, celerity, friction, bed, gravity } = workspace;
+  const { abs } = Math;
   let lateralSpeed = 0;
   for (let i = 1; i <= n; i++) {
     const width = tables.widthAt(i, bed[i] + 0.1);
@@ -32,7 +33,7 @@ export function createTimeStep(
   function fail(time: number): never {
     let worst = 1;
     for (let i = 1; i <= n; i++) {
-      const speed = area[i] > 0 ? Math.abs(flow[i]) / area[i] + celerity[i] : 0;
+      const speed = area[i] > 0 ? abs(flow[i]) / area[i] + celerity[i] : 0;
       worst = i;
       if (!(speed < IMPOSSIBLE) || !(area[i] >= 0)) break;
     }
@@ -50,10 +51,10 @@ export function createTimeStep(
     for (let i = 1; i <= n; i++) {
       const a = area[i];
       if (a !== 0) {
-        const u = Math.abs(flow[i]) / a;
+        const u = abs(flow[i]) / a;
         const c = celerity[i];
         let speed = u + c;
-        const isShooting = c < KINEMATIC * u && friction[i] * Math.abs(flow[i]) * dx > BRAKED * u;
+        const isShooting = c < KINEMATIC * u && friction[i] * abs(flow[i]) * dx > BRAKED * u;
         if (isShooting) speed = (1 + KINEMATIC) * u;
         if (speed > fastest) fastest = speed;
         sum += speed;
