@@ -9,9 +9,8 @@ export default function MainLayout() {
   const { state } = useSession();
   if (state.is === 'signedOut') {
     const next = window.location.pathname + window.location.search;
-    return (
-      <Redirect href={next === '/' ? '/sign-in' : { pathname: '/sign-in', params: { next } }} />
-    );
+    const leadsBack = !state.byChoice && next !== '/';
+    return <Redirect href={leadsBack ? { pathname: '/sign-in', params: { next } } : '/sign-in'} />;
   }
   if (state.is === 'starting' || state.is === 'unreachable') return <Starting />;
   return (

@@ -86,7 +86,7 @@ export function Screen(props: ScreenProps) {
       </ScrollView>
       {!isWide && !footer && actions ? (
         <StretchedButtons value>
-          <View style={styles.foot}>{actions}</View>
+          <View style={[styles.foot, { borderTopColor: colours.line }]}>{actions}</View>
         </StretchedButtons>
       ) : null}
       {footer ? (
@@ -127,7 +127,12 @@ const styles = StyleSheet.create({
   lead: { maxWidth: widths.prose },
   actions: { flexDirection: 'row', gap: space.one, flexShrink: 0 },
   actionsPhone: { gap: space.one, paddingTop: space.one },
-  foot: { gap: space.one, paddingHorizontal: space.two, paddingVertical: space.one * 1.5 },
+  foot: {
+    gap: space.one,
+    paddingHorizontal: space.two,
+    paddingVertical: space.one * 1.5,
+    borderTopWidth: hairline,
+  },
   columns: { flexDirection: 'row', gap: space.two, alignItems: 'flex-start', flexGrow: 1 },
   stack: { gap: space.two },
   work: { gap: space.two, minWidth: 0 },

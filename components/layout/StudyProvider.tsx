@@ -6,10 +6,18 @@ import { Loading } from '../ui/Loading';
 import { UnitSystemProvider } from '../ui/unitSystem';
 import { NotThere } from './NotThere';
 import { Screen } from './Screen';
+import { mayEnter } from './studyDoors';
 import { CurrentStudyContext } from './studyContext';
 
+interface StudyProviderProps {
+  studyId: number;
+  /** The place of the study that the address names, e.g. `runs`. */
+  segment: string | undefined;
+  children: ReactNode;
+}
+
 /** Reads the study once for all its screens, and sets the units they speak. */
-export function StudyProvider({ studyId, children }: { studyId: number; children: ReactNode }) {
+export function StudyProvider({ studyId, segment, children }: StudyProviderProps) {
   const { data: study, error, refetch } = useStudy(Number.isInteger(studyId) ? studyId : null);
   const current = useMemo(
     () =>
@@ -36,6 +44,7 @@ export function StudyProvider({ studyId, children }: { studyId: number; children
       </Screen>
     );
   }
+  if (!mayEnter(segment, current.study.may)) return <NotThere />;
   return (
     <CurrentStudyContext.Provider value={current}>
       <UnitSystemProvider value={current.study.unitSystem}>{children}</UnitSystemProvider>

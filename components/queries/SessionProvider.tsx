@@ -9,7 +9,7 @@ import {
   type ReactNode,
 } from 'react';
 import type { Me, Session } from '@/shared/accounts/types';
-import { renewSession, setAccessToken, whenSessionEnds } from './accessToken';
+import { keepSession, renewSession, whenSessionEnds } from './accessToken';
 import { api } from './apiClient';
 import { isApiError } from './ApiError';
 import { sessionReducer, type SessionState } from './sessionState';
@@ -38,7 +38,10 @@ export function SessionProvider({ children }: { children: ReactNode }) {
   const start = useCallback(() => {
     dispatch({ type: 'start' });
     renewSession().then(
-      (session) => dispatch({ type: 'opened', session }),
+      (session) => {
+        keepSession(session);
+        dispatch({ type: 'opened', session });
+      },
       (error: unknown) =>
         dispatch(
           isApiError(error, 'unauthenticated') ? { type: 'noSession' } : { type: 'failed', error },
@@ -47,9 +50,9 @@ export function SessionProvider({ children }: { children: ReactNode }) {
   }, []);
 
   const clear = useCallback(() => {
-    setAccessToken(null);
+    keepSession(null);
     queryClient.clear();
-    dispatch({ type: 'noSession' });
+    dispatch({ type: 'left' });
   }, [queryClient]);
 
   useEffect(() => {
@@ -78,7 +81,7 @@ export function SessionProvider({ children }: { children: ReactNode }) {
       start,
       forget,
       open: (session) => {
-        setAccessToken(session.accessToken);
+        keepSession(session);
         dispatch({ type: 'opened', session });
       },
       signOut: async () => {

@@ -2,14 +2,15 @@ import type { Session } from '@/shared/accounts/types';
 import { ApiError } from './ApiError';
 
 /** The access token lives in memory alone; the refresh token in a cookie that no script can read. */
-let token: string | null = null;
+let current: Pick<Session, 'accessToken' | 'me'> | null = null;
 let renewing: Promise<Session> | null = null;
 let onEnded: () => void = () => undefined;
 
-export const getAccessToken = (): string | null => token;
+export const getAccessToken = (): string | null => current?.accessToken ?? null;
 
-export function setAccessToken(next: string | null): void {
-  token = next;
+/** Whose session this page goes on with; null forgets it. */
+export function keepSession(session: Session | null): void {
+  current = session;
 }
 
 /** Called when the session ends without the person asking for it. */
@@ -30,12 +31,10 @@ async function refresh(): Promise<Session> {
     },
   );
   if (!response.ok) throw await ApiError.of(response);
-  const session = (await response.json()) as Session;
-  token = session.accessToken;
-  return session;
+  return (await response.json()) as Session;
 }
 
-/** A new access token by the cookie. Throws ApiError: `unauthenticated` when there is no session to go on with. */
+/** A new session by the cookie. Throws ApiError: `unauthenticated` when there is none to go on with. */
 export function renewSession(): Promise<Session> {
   renewing ??= withLock(refresh).finally(() => {
     renewing = null;
@@ -45,11 +44,16 @@ export function renewSession(): Promise<Session> {
 
 /** The same in the middle of a call: tells the application when the session is over. */
 export async function renewInFlight(): Promise<void> {
+  const owner = current?.me.id;
   try {
-    await renewSession();
+    const session = await renewSession();
+    // Somebody else has signed in from another tab: what this page holds must not be sent in their name.
+    if (session.me.id !== owner)
+      throw new ApiError('unauthenticated', 'Another person has signed in.');
+    current = session;
   } catch (error) {
     if (error instanceof ApiError && error.code === 'unauthenticated') {
-      token = null;
+      current = null;
       onEnded();
     }
     throw error;

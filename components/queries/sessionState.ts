@@ -6,7 +6,8 @@ export type SessionState =
   | { is: 'starting' }
   /** The server did not answer that. */
   | { is: 'unreachable'; error: unknown }
-  | { is: 'signedOut' }
+  /** `byChoice`: the next to sign in need not be led back to where this person was. */
+  | { is: 'signedOut'; byChoice: boolean }
   | { is: 'signedIn'; me: Me }
   /** Ended under the hands: screens stay as they are until the person is back. */
   | { is: 'interrupted'; me: Me };
@@ -15,6 +16,7 @@ export type SessionEvent =
   | { type: 'start' }
   | { type: 'opened'; session: Session }
   | { type: 'noSession' }
+  | { type: 'left' }
   | { type: 'failed'; error: unknown }
   | { type: 'ended' }
   | { type: 'changed'; me: Me };
@@ -26,7 +28,9 @@ export function sessionReducer(state: SessionState, event: SessionEvent): Sessio
     case 'opened':
       return { is: 'signedIn', me: event.session.me };
     case 'noSession':
-      return { is: 'signedOut' };
+      return { is: 'signedOut', byChoice: false };
+    case 'left':
+      return { is: 'signedOut', byChoice: true };
     case 'failed':
       return { is: 'unreachable', error: event.error };
     case 'ended':

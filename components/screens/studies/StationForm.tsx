@@ -62,9 +62,7 @@ export function StationForm({ studyId, station, at = null, onDone }: StationForm
         <FormSubmit label={station ? 'Save' : 'Add'} />
         {station ? <Button label="Leave as it was" onPress={onDone} /> : null}
       </ButtonRow>
-      {saved && !form.formik.dirty ? (
-        <Notice tone="done">{`${saved} is in the list.`}</Notice>
-      ) : null}
+      {saved && !form.formik.dirty ? <Notice tone="done">{`${saved} was added.`}</Notice> : null}
     </FormRoot>
   );
 }

@@ -36,7 +36,11 @@ export function StationsScreen() {
       side={
         mayChange ? (
           <Card title="New station">
-            <StationForm studyId={study.id} station={null} at={at} />
+            <StationForm
+              studyId={study.id}
+              station={null}
+              at={study.counts?.sections ? at : null}
+            />
           </Card>
         ) : undefined
       }

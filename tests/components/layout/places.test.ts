@@ -5,6 +5,7 @@ import {
   studyPlaces,
   type Place,
 } from '@/components/layout/places';
+import { mayEnter } from '@/components/layout/studyDoors';
 import type { Role } from '@/shared/accounts/roles';
 import type { Me } from '@/shared/accounts/types';
 import { STUDY_ACTIONS, type Study, type StudyAction } from '@/shared/studies/types';
@@ -65,4 +66,15 @@ test('one is at a place also on the screens under it', () => {
   expect(isAt(runs, '/studies/7/runs/12')).toBe(true);
   expect(isAt(overview, '/studies/7/runs/12')).toBe(false);
   expect(isAt(overview, '/studies/7')).toBe(true);
+});
+
+test('a screen opens only for those who may see what is on it', () => {
+  const surveyor: StudyAction[] = ['study.read', 'survey.send'];
+  expect(mayEnter(undefined, ['study.read'])).toBe(true);
+  expect(mayEnter('survey', surveyor)).toBe(true);
+  for (const segment of ['reach', 'stations', 'scenarios', 'runs']) {
+    expect(mayEnter(segment, surveyor)).toBe(false);
+    expect(mayEnter(segment, [...STUDY_ACTIONS])).toBe(true);
+  }
+  expect(mayEnter('survey', ['study.read'])).toBe(false);
 });

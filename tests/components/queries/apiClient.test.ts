@@ -1,4 +1,5 @@
-import { setAccessToken, whenSessionEnds } from '@/components/queries/accessToken';
+import { keepSession, whenSessionEnds } from '@/components/queries/accessToken';
+import type { Session } from '@/shared/accounts/types';
 import { api } from '@/components/queries/apiClient';
 
 type Answer = { status: number; body?: unknown };
@@ -24,17 +25,29 @@ function network(answer: (path: string, token: string | null) => Answer | 'down'
   return calls;
 }
 const refused = (code: string) => ({ error: { code, message: code } });
-const session = { accessToken: 'new', expiresIn: 600, me: { id: 1 } };
+const sessionOf = (id: number, accessToken: string): Session => ({
+  accessToken,
+  expiresIn: 600,
+  me: {
+    id,
+    email: 'a@firm.example',
+    name: 'A',
+    roles: ['modeller'],
+    firm: { id: 1, name: 'Firm' },
+    qualification: null,
+    registrationNumber: null,
+  },
+});
 
 afterEach(() => {
-  setAccessToken(null);
+  keepSession(null);
   whenSessionEnds(() => undefined);
 });
 
 test('a token that ran out is renewed once for all calls under way, and the calls are made again', async () => {
-  setAccessToken('old');
+  keepSession(sessionOf(1, 'old'));
   const calls = network((path, token) => {
-    if (path === '/api/auth/refresh') return { status: 200, body: session };
+    if (path === '/api/auth/refresh') return { status: 200, body: sessionOf(1, 'new') };
     return token === 'Bearer new'
       ? { status: 200, body: path }
       : { status: 401, body: refused('unauthenticated') };
@@ -45,7 +58,7 @@ test('a token that ran out is renewed once for all calls under way, and the call
 });
 
 test('when there is nothing to renew by, the application is told and the call fails', async () => {
-  setAccessToken('old');
+  keepSession(sessionOf(1, 'old'));
   const ended = jest.fn();
   whenSessionEnds(ended);
   network(() => ({ status: 401, body: refused('unauthenticated') }));
@@ -53,8 +66,22 @@ test('when there is nothing to renew by, the application is told and the call fa
   expect(ended).toHaveBeenCalledTimes(1);
 });
 
+test('a renewal that brings somebody else sends nothing in their name', async () => {
+  keepSession(sessionOf(1, 'old'));
+  const ended = jest.fn();
+  whenSessionEnds(ended);
+  const calls = network((path) =>
+    path === '/api/auth/refresh'
+      ? { status: 200, body: sessionOf(2, 'other') }
+      : { status: 401, body: refused('unauthenticated') },
+  );
+  await expect(api.post('/studies', {})).rejects.toMatchObject({ code: 'unauthenticated' });
+  expect(calls).toEqual(['POST /api/studies', 'POST /api/auth/refresh']);
+  expect(ended).toHaveBeenCalledTimes(1);
+});
+
 test('a server that does not answer the renewal does not end the session', async () => {
-  setAccessToken('old');
+  keepSession(sessionOf(1, 'old'));
   const ended = jest.fn();
   whenSessionEnds(ended);
   network((path) =>

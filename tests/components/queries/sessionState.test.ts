@@ -11,6 +11,7 @@ const me: Me = {
   registrationNumber: null,
 };
 const session: Session = { accessToken: 'a', expiresIn: 600, me };
+const nobody: SessionState = { is: 'signedOut', byChoice: false };
 const signedIn: SessionState = { is: 'signedIn', me };
 
 test('a session that ends under the hands keeps the screen, and signing in again goes on', () => {
@@ -20,7 +21,7 @@ test('a session that ends under the hands keeps the screen, and signing in again
 });
 
 test('who was never in is not interrupted', () => {
-  expect(sessionReducer({ is: 'signedOut' }, { type: 'ended' })).toEqual({ is: 'signedOut' });
+  expect(sessionReducer(nobody, { type: 'ended' })).toEqual(nobody);
 });
 
 test('no answer is not the same as no session', () => {
@@ -29,5 +30,9 @@ test('no answer is not the same as no session', () => {
     is: 'unreachable',
     error,
   });
-  expect(sessionReducer({ is: 'starting' }, { type: 'noSession' })).toEqual({ is: 'signedOut' });
+  expect(sessionReducer({ is: 'starting' }, { type: 'noSession' })).toEqual(nobody);
+});
+
+test('who leaves by choice is not led back', () => {
+  expect(sessionReducer(signedIn, { type: 'left' })).toEqual({ is: 'signedOut', byChoice: true });
 });

@@ -1,11 +1,12 @@
-import { Slot, useLocalSearchParams } from 'expo-router';
+import { Slot, useLocalSearchParams, usePathname } from 'expo-router';
 import { StudyProvider } from '@/components/layout/StudyProvider';
 
 /** The screens of one study. */
 export default function StudyLayout() {
   const { studyId } = useLocalSearchParams<{ studyId: string }>();
+  const segment = usePathname().split('/')[3];
   return (
-    <StudyProvider studyId={Number(studyId)}>
+    <StudyProvider studyId={Number(studyId)} segment={segment}>
       <Slot />
     </StudyProvider>
   );
