@@ -1,4 +1,5 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
+import { validateCase } from '../../../shared/case/validateCase';
 import type { Fault } from '../../../shared/errors';
 import { buildCase } from '../../../shared/scenarios/buildCase';
 import { checkScenario } from '../../../shared/scenarios/checkScenario';
@@ -64,7 +65,11 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
 function caseOf({ body }: ScenarioModel, sections: Section[], title: string): CaseFile {
   const { faults } = checkScenario(body, sections);
   if (faults.length > 0) throw incomplete(faults);
-  return buildCase(body, sections, title);
+  const caseFile = buildCase(body, sections, title);
+  // The solver's own check has the last word.
+  const refused = validateCase(caseFile);
+  if (refused.faults.length > 0) throw incomplete(refused.faults);
+  return caseFile;
 }
 
 const incomplete = (faults: Fault[]) =>

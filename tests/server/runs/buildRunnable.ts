@@ -1,9 +1,10 @@
 import type { Services } from '../../../server/composition';
-import { packJson } from '../../../server/database/packedJson';
 import type { UserModel } from '../../../server/models/User';
 import type { ScenarioBody } from '../../../shared/scenarios/schemas';
 import type { Section } from '../../../shared/surveys/types';
-import { buildStudyRows } from '../jobs/queuedRuns';
+import { buildReach } from '../../helpers/factories/buildReach';
+import { buildScenario } from '../../helpers/factories/buildScenario';
+import { buildStudy } from '../../helpers/factories/buildStudy';
 
 /** A straight reach of 2 km, four sections, that falls 1 m a km. */
 export const SECTIONS: Section[] = [0, 600, 1300, 2000].map((chainage, k) => {
@@ -51,9 +52,9 @@ export const scenarioBody = (reachId: number, numerics = {}): ScenarioBody => ({
 
 /** A study of the user's firm with a scenario that can be routed in about a second, and two stations. */
 export async function buildRunnable(services: Services, user: UserModel, numerics = {}) {
-  const { study, reach, scenario } = await buildStudyRows(services, user);
-  await reach.update({ sections: await packJson(SECTIONS), sectionCount: SECTIONS.length });
-  await scenario.update({ body: scenarioBody(reach.id, numerics) });
+  const study = await buildStudy(services, user, { title: 'Lower Veshall' });
+  const reach = await buildReach(services, study, SECTIONS);
+  const scenario = await buildScenario(services, reach, () => scenarioBody(reach.id, numerics));
   for (const [name, chainage] of [
     ['Mill', 1000],
     ['Gauge', 1300],

@@ -169,15 +169,22 @@ test('who goes away is forgotten; whose sign-in ends is shown no more', async ()
 });
 
 test('a run that the solver gives up fails in words, without a second attempt', async () => {
-  const { scenario } = await buildRunnable(server.services, user);
+  // Thirty years in steps of a hundredth of a second: the solver sees that it would not end.
+  const endless = { cellSize: 0.5, duration: 9e8, outputInterval: 1e6 };
+  const { scenario, reach } = await buildRunnable(server.services, user);
+  const body = { ...scenarioBody(reach.id, endless), initial: { kind: 'still', stage: 21 } };
+  await scenario.update({ body: body as typeof scenario.body });
   const { id } = await ask(scenario.id);
-  await untilEnded(server.services, id);
-  const run = await server.services.models.Run.findByPk(id, { rejectOnEmpty: true });
-  await run.update({ state: 'failed', failure: 'The run failed at 5.0 s: too steep.' });
   const watching = await events(id);
   await watching.closed;
-  expect(watching.events).toEqual([
-    { type: 'ended', state: 'failed', failure: 'The run failed at 5.0 s: too steep.' },
-  ]);
-  expect(await get(id)).toMatchObject({ may: ['run.read', 'run.retry'] });
+  const run = await get(id);
+  expect(run).toMatchObject({ state: 'failed', attempts: 1, may: ['run.read', 'run.retry'] });
+  expect(run.failure).toMatch(/^The run failed.* at \d+\.\d s: ./);
+  expect(watching.events[watching.events.length - 1]).toEqual({
+    type: 'ended',
+    state: 'failed',
+    failure: run.failure,
+  });
+  const { error } = (await api.get(`/api/runs/${id}/summary`).expect(409)).body;
+  expect(error.message).toContain('has no results');
 });

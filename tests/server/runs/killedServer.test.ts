@@ -1,0 +1,145 @@
+import { spawn, type ChildProcess } from 'node:child_process';
+import path from 'node:path';
+import type { CaseFile } from '../../../shared/case/caseFile';
+import type { RunSeries } from '../../../shared/runs/types';
+import { routeCase } from '../../../server/solvers';
+import type { UserModel } from '../../../server/models/User';
+import { buildUser } from '../../helpers/factories/buildUser';
+import { startTestServer, type TestServer } from '../../helpers/testServer';
+import { buildRunnable } from './buildRunnable';
+import { untilEnded } from './untilEnded';
+
+jest.setTimeout(300_000);
+
+const ROOT = path.resolve(__dirname, '../../..');
+/** Some seconds of computing: time enough to be killed in the middle. */
+const SECONDS_LONG = { cellSize: 10, duration: 100_000, outputInterval: 1000 };
+
+/** Answers the API and computes nothing itself; the work is done by real server processes beside it. */
+let server: TestServer;
+let user: UserModel;
+let api: Awaited<ReturnType<TestServer['signInAs']>>;
+const children: ChildProcess[] = [];
+
+beforeAll(async () => {
+  server = await startTestServer({ WORKERS: '0' });
+  user = await buildUser(server.services, ['modeller']);
+  api = await server.signInAs(user);
+});
+afterEach(() => Promise.all(children.splice(0).map(kill)));
+afterAll(() => server.stop());
+
+function startProcess(): ChildProcess {
+  const { databaseUrl, dataDir } = server.services.env;
+  const child = spawn(process.execPath, ['--require', 'tsx/cjs', 'server/index.ts'], {
+    cwd: ROOT,
+    env: {
+      PATH: process.env.PATH,
+      DATABASE_URL: databaseUrl,
+      DATA_DIR: dataDir,
+      PORT: '0',
+      WORKERS: '1',
+      LOG_LEVEL: 'silent',
+    },
+    stdio: 'ignore',
+  });
+  children.push(child);
+  return child;
+}
+
+/** kill -9: nothing of the process gets a chance to tidy up. */
+async function kill(child: ChildProcess): Promise<void> {
+  if (child.exitCode !== null || child.signalCode !== null) return;
+  const gone = new Promise((resolve) => child.once('exit', resolve));
+  child.kill('SIGKILL');
+  await gone;
+}
+
+const find = (id: number) => server.services.models.Run.findByPk(id, { rejectOnEmpty: true });
+async function untilUnderWay(id: number, attempts = 1): Promise<void> {
+  for (;;) {
+    const run = await find(id);
+    if (run.state === 'running' && run.attempts === attempts && run.progress > 0.02) return;
+    if (run.state === 'routed' || run.state === 'failed') throw new Error(`Already ${run.state}.`);
+    await new Promise((resolve) => setTimeout(resolve, 20));
+  }
+}
+
+/** Kinds and parts of what is stored of a run. */
+const stored = async (runId: number) =>
+  (
+    await server.services.models.RunBlock.findAll({
+      where: { runId },
+      attributes: ['kind', 'part'],
+      order: ['kind', 'part'],
+    })
+  ).map(({ kind, part }) => `${kind}/${part}`);
+
+test('killed in the middle, the run finishes after the next start, once, with the same bits', async () => {
+  const { scenario } = await buildRunnable(server.services, user, SECONDS_LONG);
+  const { id } = (await api.post(`/api/scenarios/${scenario.id}/runs`).expect(201)).body;
+  const first = startProcess();
+  await untilUnderWay(id);
+  await kill(first);
+  expect(await find(id)).toMatchObject({ state: 'running', attempts: 1 });
+  expect(await stored(id)).toEqual([]);
+
+  startProcess();
+  const run = await untilEnded(server.services, id, 240);
+  expect(run).toMatchObject({ state: 'routed', attempts: 2, failure: null });
+
+  const blocks = await stored(id);
+  expect(new Set(blocks).size).toBe(blocks.length);
+  expect(blocks.filter((name) => name.startsWith('series'))).toHaveLength(4);
+  expect(blocks.filter((name) => name === 'facts/0' || name === 'places/0')).toHaveLength(2);
+
+  const caseFile: CaseFile = (await api.get(`/api/runs/${id}/case.json`).expect(200)).body;
+  const expected = routeCase(caseFile).sections[3];
+  const series: RunSeries = (await api.get(`/api/runs/${id}/series?chainage=2000`)).body;
+  expect(series.stage).toEqual(expected.stage);
+  expect(series.flow).toEqual(expected.flow);
+  expect(series.peaks.peakStage).toBe(expected.peak.stage);
+});
+
+test('of two servers one dies; the other finishes what it left, and each run once', async () => {
+  const { scenario } = await buildRunnable(server.services, user, SECONDS_LONG);
+  const ask = async () =>
+    (await api.post(`/api/scenarios/${scenario.id}/runs`).expect(201)).body.id as number;
+  const doomed = startProcess();
+  const left = await ask();
+  await untilUnderWay(left);
+  startProcess();
+  const others = [await ask(), await ask()];
+  await untilUnderWay(others[0]);
+  await kill(doomed);
+  for (const id of others) {
+    expect(await untilEnded(server.services, id, 240)).toMatchObject({
+      state: 'routed',
+      attempts: 1,
+    });
+  }
+  expect(await untilEnded(server.services, left, 240)).toMatchObject({
+    state: 'routed',
+    attempts: 2,
+  });
+  const counts = await Promise.all([left, ...others].map(async (id) => (await stored(id)).length));
+  expect(new Set(counts).size).toBe(1);
+});
+
+test('a run that takes its server down a third time is not begun again, and says why', async () => {
+  const { scenario } = await buildRunnable(server.services, user, SECONDS_LONG);
+  const { id } = (await api.post(`/api/scenarios/${scenario.id}/runs`).expect(201)).body;
+  for (let attempt = 1; attempt <= 3; attempt++) {
+    const child = startProcess();
+    await untilUnderWay(id, attempt);
+    await kill(child);
+    // The lease of the dead need not be waited out three times.
+    await server.services.models.Run.update({ leaseUntil: new Date(0) }, { where: { id } });
+  }
+  startProcess();
+  const run = await untilEnded(server.services, id, 60);
+  expect(run).toMatchObject({ state: 'failed', attempts: 3 });
+  expect(run.failure).toContain('begun 3 times');
+  expect(run.failure).toContain('the server stopped while it was running');
+  expect(await stored(id)).toEqual([]);
+});
