@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { memo, useMemo } from 'react';
 import { Line, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
 import { formatNumber, formatWithUnit } from '@/shared/units/format';
@@ -26,14 +26,14 @@ export interface CrossSectionProps {
 }
 
 /** A cross-section looking downstream, with the water that stands in it. */
-export function CrossSection(props: CrossSectionProps) {
+export const CrossSection = memo(function CrossSection(props: CrossSectionProps) {
   const { height = 200, initialWidth } = props;
   return (
     <ChartBox label={sentence(props)} height={height} initialWidth={initialWidth}>
       {(size) => <Drawing {...props} size={size} />}
     </ChartBox>
   );
-}
+});
 
 function Drawing(props: CrossSectionProps & { size: ChartSize }) {
   const { section, stage = null, peakStage = null, unitSystem, size } = props;

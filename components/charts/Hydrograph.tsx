@@ -37,7 +37,7 @@ export interface HydrographProps {
 }
 
 /** A value against time, its peak named, its value at the cursor read out beside the curve and never over it. */
-export function Hydrograph(props: HydrographProps) {
+export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
   const { onChange, height = 180, series } = props;
   const peak = props.peak === undefined ? peakOf(series) : props.peak;
   return (
@@ -54,7 +54,7 @@ export function Hydrograph(props: HydrographProps) {
       {(size) => <Drawing {...props} peak={peak} size={size} />}
     </ChartBox>
   );
-}
+});
 
 type Sized = HydrographProps & { size: ChartSize };
 

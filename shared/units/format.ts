@@ -3,12 +3,17 @@ import { fromSi, UNITS, type Quantity, type UnitSystem } from './units';
 /** Digits in groups of three by a comma, a point before the decimals, a true minus sign. */
 export function formatNumber(value: number, decimals: number): string {
   if (!Number.isFinite(value)) return '–';
-  const text = Math.abs(value).toLocaleString('en-GB', {
-    minimumFractionDigits: decimals,
-    maximumFractionDigits: decimals,
-  });
+  const text = plain(decimals).format(Math.abs(value));
   return value < 0 && /[1-9]/.test(text) ? `−${text}` : text;
 }
+
+/** Made once: a chart that plays writes hundreds of numbers a second. */
+const made: Intl.NumberFormat[] = [];
+const plain = (decimals: number) =>
+  (made[decimals] ??= new Intl.NumberFormat('en-GB', {
+    minimumFractionDigits: decimals,
+    maximumFractionDigits: decimals,
+  }));
 
 /** An SI value in the study's units, without the symbol. Flows from 100 up carry no decimals. */
 export function formatQuantity(si: number, quantity: Quantity, system: UnitSystem): string {
@@ -32,12 +37,13 @@ export function formatDuration(seconds: number): string {
 
 /** Clock time of a moment of a run whose study has a start, e.g. `14 Nov 18:12`, in UTC as it was typed. */
 export function formatClock(startIso: string, seconds: number): string {
-  const at = new Date(Date.parse(startIso) + seconds * 1000);
-  return at.toLocaleString('en-GB', {
-    day: 'numeric',
-    month: 'short',
-    hour: '2-digit',
-    minute: '2-digit',
-    timeZone: 'UTC',
-  });
+  return clock.format(Date.parse(startIso) + seconds * 1000);
 }
+
+const clock = new Intl.DateTimeFormat('en-GB', {
+  day: 'numeric',
+  month: 'short',
+  hour: '2-digit',
+  minute: '2-digit',
+  timeZone: 'UTC',
+});

@@ -1,3 +1,5 @@
+import { bracket } from './interpolate';
+
 export interface Box {
   x: number;
   y: number;
@@ -5,7 +7,7 @@ export interface Box {
   height: number;
 }
 
-/** A line as it is drawn, px. */
+/** A line as it is drawn, px; x never falls. */
 export interface Polyline {
   x: ArrayLike<number>;
   y: ArrayLike<number>;
@@ -83,7 +85,7 @@ function crossings({ x, y }: Polyline, box: Box): number {
   const top = box.y - CLEAR;
   const bottom = box.y + box.height + CLEAR;
   let count = 0;
-  for (let i = 1; i < x.length; i++) {
+  for (let i = bracket(x, left) + 1; i < x.length && x[i - 1] <= right; i++) {
     const x0 = Math.max(left, Math.min(x[i - 1], x[i]));
     const x1 = Math.min(right, Math.max(x[i - 1], x[i]));
     if (x0 > x1) continue;

@@ -1,4 +1,4 @@
-import { useMemo, useState } from 'react';
+import { useDeferredValue, useMemo, useState } from 'react';
 import { Hydrograph, type HydrographProps } from '@/components/charts/Hydrograph';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { useTime } from '@/components/charts/usePlaceAndTime';
@@ -25,7 +25,8 @@ interface Props extends Pick<HydrographProps, 'quantity' | 'series' | 'compare' 
 export function SeriesCard(props: Props) {
   const { title, place, note, quantity, series, compare, peak, store, startsAt } = props;
   const unitSystem = useUnitSystem();
-  const t = useTime(store);
+  // While the flood plays, the long section goes first; the curves follow as the machine allows.
+  const t = useDeferredValue(useTime(store));
   const [asTable, setAsTable] = useState(false);
   const unit = UNITS[unitSystem][quantity].symbol;
   const name = `${title} at ${place}`;

@@ -1,4 +1,4 @@
-import { surfaceFrame } from '@/components/charts/geometry/surfaceFrame';
+import { surfaceFrame, surfaceLevel } from '@/components/charts/geometry/surfaceFrame';
 
 const surface = {
   places: 3,
@@ -26,4 +26,11 @@ test('one moment alone is held; none is no water', () => {
   expect(Array.from(surfaceFrame(still, 77, new Float32Array(3)))).toEqual([10, 9, 8]);
   const none = { ...surface, moments: 0 };
   expect(surfaceFrame(none, 77, new Float32Array(3)).every(Number.isNaN)).toBe(true);
+});
+
+test('the level at one place is the frame read at that place', () => {
+  const along = { ...surface, chainages: [0, 100, 300] };
+  expect(surfaceLevel(along, 50, 100)).toBe(9.25);
+  expect(surfaceLevel(along, 50, 50)).toBe((11 + 9.25) / 2);
+  expect(surfaceLevel(along, 1e9, 200)).toBe(9.5);
 });
