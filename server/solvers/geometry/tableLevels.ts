@@ -1,10 +1,13 @@
 import type { SectionShape } from './sectionShape';
 
 /** Most levels that a section's table can have. */
-export const MAX_LEVELS = 72;
+export const MAX_LEVELS = 76;
 
 const BASE = 40;
-const KINKS = 20;
+const KINKS = 15;
+/** Just above the strongest kinks the conveyance bends most: levels there too, at these shares of the spacing. */
+const STRONGEST = 5;
+const ABOVE_KINK = [0.12, 0.4];
 const ABOVE = 10;
 const GROWTH = 1.45;
 
@@ -34,7 +37,7 @@ export function tableLevels(shape: SectionShape): number[] {
   return levels;
 }
 
-/** Elevations where B(η) jumps or bends most, ascending, none closer than 2 % of `spacing` to another or to the ends. */
+/** Elevations where B(η) jumps or bends most and some just above the strongest, ascending, none closer than 2 % of `spacing` to another or to the ends. */
 function strongestKinks(shape: SectionShape, spacing: number): number[] {
   const { x, z, bed } = shape;
   const at: number[] = [];
@@ -77,10 +80,21 @@ function strongestKinks(shape: SectionShape, spacing: number): number[] {
   const least = 1e-4 * (x[x.length - 1] - x[0]);
   const apart = 0.02 * spacing;
   const chosen: number[] = [];
+  const strong: number[] = [];
+  const wide = 0.05 * (x[x.length - 1] - x[0]);
   for (const { elevation, weight } of found.sort((a, b) => b.weight - a.weight)) {
     if (chosen.length === KINKS || weight <= least) break;
     const clear = chosen.every((other) => Math.abs(other - elevation) > apart);
-    if (clear && elevation > bed + apart && elevation < top - apart) chosen.push(elevation);
+    if (!clear || elevation <= bed + apart || elevation >= top - apart) continue;
+    chosen.push(elevation);
+    if (weight > wide && strong.length < STRONGEST) strong.push(elevation);
+  }
+  for (const elevation of strong) {
+    for (const share of ABOVE_KINK) {
+      const level = elevation + share * spacing;
+      const clear = chosen.every((other) => Math.abs(other - level) > apart);
+      if (clear && level < top - apart) chosen.push(level);
+    }
   }
   return chosen.sort((a, b) => a - b);
 }
