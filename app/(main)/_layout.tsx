@@ -1,6 +1,7 @@
 import { Redirect, Slot } from 'expo-router';
 import { Shell } from '@/components/layout/Shell';
 import { useSession } from '@/components/queries/SessionProvider';
+import { entryAddress } from '@/components/screens/auth/entryAddress';
 import { SignInAgain } from '@/components/screens/auth/SignInAgain';
 import { Starting } from '@/components/screens/auth/Starting';
 
@@ -8,7 +9,7 @@ import { Starting } from '@/components/screens/auth/Starting';
 export default function MainLayout() {
   const { state } = useSession();
   if (state.is === 'signedOut') {
-    const next = window.location.pathname + window.location.search;
+    const next = entryAddress;
     const leadsBack = !state.byChoice && next !== '/';
     return <Redirect href={leadsBack ? { pathname: '/sign-in', params: { next } } : '/sign-in'} />;
   }

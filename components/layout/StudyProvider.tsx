@@ -1,3 +1,4 @@
+import { Redirect } from 'expo-router';
 import { useMemo, type ReactNode } from 'react';
 import { useStudy } from '../queries/studies';
 import { isApiError } from '../queries/ApiError';
@@ -44,7 +45,7 @@ export function StudyProvider({ studyId, segment, children }: StudyProviderProps
       </Screen>
     );
   }
-  if (!mayEnter(segment, current.study.may)) return <NotThere />;
+  if (!mayEnter(segment, current.study.may)) return <Redirect href={`/studies/${studyId}`} />;
   return (
     <CurrentStudyContext.Provider value={current}>
       <UnitSystemProvider value={current.study.unitSystem}>{children}</UnitSystemProvider>
