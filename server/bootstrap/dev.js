@@ -1,1 +1,1 @@
-require('./bare/launch').launch('dev');
+require('./bare/launch').launch('develop');

@@ -1,1 +1,1 @@
-require('./bare/launch').launch('start');
+require('./bare/launch').launch('startProduct');

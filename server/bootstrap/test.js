@@ -1,1 +1,1 @@
-require('./bare/launch').launch('test');
+require('./bare/launch').launch('runTests');

@@ -1,15 +1,14 @@
-import { randomBytes } from 'node:crypto';
 import { mkdtempSync, rmSync } from 'node:fs';
 import type { Server } from 'node:http';
 import os from 'node:os';
 import path from 'node:path';
-import { createConnection } from 'mariadb';
 import supertest from 'supertest';
 import { buildApp } from '../../server/app';
 import { compose, type Services } from '../../server/composition';
 import { readEnv } from '../../server/env';
 import type { UserModel } from '../../server/models/User';
 import type { Overrides } from '../../server/platform';
+import { createTestDatabase } from './createTestDatabase';
 
 // A real database and real hashes on a busy machine: a test that hangs is told from one that waits.
 jest.setTimeout(60_000);
@@ -31,13 +30,10 @@ export async function startTestServer(
   settings: Record<string, string> = {},
   overrides: Overrides = {},
 ): Promise<TestServer> {
-  const base = process.env.SPATE_TEST_DATABASE;
-  if (!base) throw new Error('No test database: the project needs databaseSetup.ts.');
-  const name = `spate_test_${randomBytes(6).toString('hex')}`;
-  await runOn(base, `CREATE DATABASE ${name} CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci`);
+  const database = await createTestDatabase();
   const dataDir = mkdtempSync(path.join(os.tmpdir(), 'spate-test-'));
   const env = readEnv({
-    DATABASE_URL: base + name,
+    DATABASE_URL: database.url,
     DATA_DIR: dataDir,
     LOG_LEVEL: 'silent',
     ...settings,
@@ -60,23 +56,8 @@ export async function startTestServer(
       server.closeAllConnections();
       await new Promise((resolve) => server.close(resolve));
       await services.close();
-      await runOn(base, `DROP DATABASE ${name}`);
+      await database.drop();
       rmSync(dataDir, { recursive: true, force: true });
     },
   };
-}
-
-async function runOn(base: string, statement: string): Promise<void> {
-  const { hostname, port, username, password } = new URL(base);
-  const connection = await createConnection({
-    host: hostname,
-    port: Number(port),
-    user: username,
-    password: decodeURIComponent(password),
-  });
-  try {
-    await connection.query(statement);
-  } finally {
-    await connection.end();
-  }
 }

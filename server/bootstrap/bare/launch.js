@@ -4,9 +4,9 @@ const { installPackages } = require('./installPackages');
 
 /**
  * The way in of `npm start`, `npm test` and `npm run dev`. Needs nothing but Node: it installs the packages, and then
- * hands over to the TypeScript of the same name in this very process, so that signals need no passing on.
+ * hands over to TypeScript in this very process, so that signals need no passing on.
  */
-function launch(name) {
+function launch(command) {
   const root = path.dirname(require.resolve('../../../package.json'));
   process.chdir(root);
   try {
@@ -17,7 +17,7 @@ function launch(name) {
     process.exit(1);
   }
   require('tsx/cjs');
-  require(`../${name}.ts`).main(process.argv.slice(2));
+  require(`../${command}.ts`)[command](process.argv.slice(2));
 }
 
 module.exports = { launch };

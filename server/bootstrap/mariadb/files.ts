@@ -7,6 +7,8 @@ export interface Files {
   socket: string;
   pid: string;
   log: string;
+  /** For temporary tables. Its own: a server that starts clears away what looks like one in its directory. */
+  tmp: string;
 }
 
 export const filesOf = (dir: string): Files => ({
@@ -14,6 +16,7 @@ export const filesOf = (dir: string): Files => ({
   socket: socketPath(dir),
   pid: path.join(dir, 'mysql.pid'),
   log: path.join(dir, 'mysql.log'),
+  tmp: path.join(dir, 'mysql.tmp'),
 });
 
 /** MariaDB refuses to run as root unless it is told to. */

@@ -6,7 +6,7 @@ import { asRoot, type Files } from './files';
 import { program } from './program';
 
 /** Makes an empty data directory whose administrator is the owner of this process, known by the socket. */
-export function initialise({ data }: Files): void {
+export function initialise({ data, tmp }: Files): void {
   const unfinished = `${data}.new`;
   rmSync(unfinished, { recursive: true, force: true });
   const made = spawnSync(
@@ -19,7 +19,7 @@ export function initialise({ data }: Files): void {
       `--auth-root-socket-user=${os.userInfo().username}`,
       '--skip-test-db',
     ],
-    { encoding: 'utf8' },
+    { encoding: 'utf8', env: { ...process.env, TMPDIR: tmp } },
   );
   if (made.status !== 0)
     throw new BootstrapError(

@@ -22,6 +22,7 @@ export async function launch(files: Files, args: string[]): Promise<number> {
       `--datadir=${files.data}`,
       `--socket=${files.socket}`,
       `--pid-file=${files.pid}`,
+      `--tmpdir=${files.tmp}`,
       `--port=${port}`,
       '--bind-address=127.0.0.1',
       '--character-set-server=utf8mb4',

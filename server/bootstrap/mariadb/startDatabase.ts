@@ -37,6 +37,7 @@ export async function startDatabase(settings: DatabaseSettings): Promise<OwnData
   const { dir, password, args = [] } = settings;
   mkdirSync(dir, { recursive: true, mode: 0o700 });
   const files = filesOf(dir);
+  mkdirSync(files.tmp, { recursive: true, mode: 0o700 });
   if (existsSync(files.data)) refuseNewerData(files);
   else initialise(files);
 

@@ -15,7 +15,7 @@ const TSX = require.resolve('tsx/cli');
  * `npm run dev`: the client from the bundler with hot reload on PORT (8081), which hands /api to a server that starts anew
  * when its sources change. Its data are its own (`.data/dev`).
  */
-export const main = (): Promise<void> => withCleanup(dev, explain);
+export const develop = (): Promise<void> => withCleanup(dev, explain);
 
 async function dev(cleanup: Cleanup): Promise<void> {
   const dataDir = path.resolve(ROOT, process.env.DATA_DIR ?? '.data/dev');

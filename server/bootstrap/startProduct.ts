@@ -11,7 +11,7 @@ import { ensureWebExport } from './webExport';
 const ROOT = path.resolve(__dirname, '../..');
 
 /** `npm start`. */
-export const main = (): Promise<void> => withCleanup(start, explain);
+export const startProduct = (): Promise<void> => withCleanup(start, explain);
 
 async function start(cleanup: Cleanup): Promise<void> {
   // Read with a database that is not there yet, so that a bad setting is told before anything is started.

@@ -27,7 +27,7 @@ const SETTINGS =
   /^(HOST|PORT|PUBLIC_URL|DATABASE_URL|DATA_DIR|SMTP_URL|MAIL_FROM|MAIL_DIR|WEB_DIR|TRUST_PROXY|WORKERS|DEMO_DATA|LOG_LEVEL|NODE_ENV|CI)$/;
 
 /** `npm test`, `npm test -- server e2e`. The last line tells how many passed and failed over all projects. */
-export const main = (args: string[]): Promise<void> =>
+export const runTests = (args: string[]): Promise<void> =>
   withCleanup((cleanup) => test(args, cleanup), explain);
 
 async function test(args: string[], cleanup: Cleanup): Promise<void> {

@@ -1,0 +1,2 @@
+export function atLeast(version: string, range: string): boolean;
+export function checkNode(version?: string, range?: string): void;
