@@ -92,6 +92,13 @@ export function createCellTables(
     return table[row + Z] + (2 * da) / (b0 + sqrt(b0 * b0 + 4 * table[row + B1] * da));
   }
 
+  /** dω/dη = sqrt(g B/A) at s above the foot of a level */
+  function rateAt(row: number, s: number): number {
+    const b0 = table[row + B0];
+    const b1 = table[row + B1];
+    return sqrt((gravity * (b0 + 2 * s * b1)) / (table[row + AREA] + s * (b0 + s * b1)));
+  }
+
   function frontSpeedAt(i: number, stage: number): number {
     const start = i * TABLE_STRIDE;
     if (stage <= table[start + Z]) return 0;
@@ -101,13 +108,10 @@ export function createCellTables(
     const a = areaAt(i, end);
     const b = table[start + B0] + 2 * (end - table[start + Z]) * table[start + B1];
     let omega = ((2 * b * (end - table[start + Z])) / a) * sqrt((gravity * a) / b);
-    // Above it ω = ∫ sqrt(g B/A) dη, by the trapezoid.
+    // Above it ω = ∫ sqrt(g B/A) dη, by Simpson's rule.
     for (let row = start + LEVEL_FIELDS; row <= top; row += LEVEL_FIELDS) {
       const s = (row === top ? stage : table[row + LEVEL_FIELDS + Z]) - table[row + Z];
-      const a1 = table[row + AREA] + s * (table[row + B0] + s * table[row + B1]);
-      const lower = sqrt((gravity * table[row + B0]) / table[row + AREA]);
-      const upper = sqrt((gravity * (table[row + B0] + 2 * s * table[row + B1])) / a1);
-      omega += 0.5 * s * (lower + upper);
+      omega += (s / 6) * (rateAt(row, 0) + 4 * rateAt(row, 0.5 * s) + rateAt(row, s));
     }
     return omega;
   }

@@ -74,9 +74,6 @@ describe('the table of a section', () => {
     const { tables } = tablesOf(section);
     const h = 4;
     const celerity = Math.sqrt((9.81 * tables.areaAt(0, h)) / tables.widthAt(0, h));
-    const share = tables.frontSpeedAt(0, h) / (factor * celerity);
-    // The trapezoidal sum over levels errs on the fast side, which is the safe one for a wave speed.
-    expect(share).toBeGreaterThan(0.9999);
-    expect(share).toBeLessThan(1.02);
+    expect(tables.frontSpeedAt(0, h) / (factor * celerity)).toBeCloseTo(1, 3);
   });
 });
