@@ -40,19 +40,15 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
   const system = useUnitSystem();
   const [open, setOpen] = useState(false);
   const shown = open ? items : items.slice(0, FEW);
-  const [{ reason, source }] = items;
+  const sources = [...new Set(items.map(({ source }) => source))];
   return (
     <View style={[styles.group, { borderTopColor: colours.line }]}>
       <Txt strong tone="ochre" heading={3}>
         {ADVICE_NAMES[code]}
         {items.length > 1 ? ` · ${items.length} places` : ''}
       </Txt>
-      <Txt tone="soft">{reason}</Txt>
-      <Txt variant="small" tone="soft">
-        Source: {source}
-      </Txt>
       <View role="list" aria-label={ADVICE_NAMES[code]}>
-        {shown.map(({ chainage, sectionIds, message }) => {
+        {shown.map(({ chainage, sectionIds, message, reason }) => {
           const place = formatWithUnit(chainage, 'chainage', system);
           return (
             <View key={`${chainage}${sectionIds.join()}`} role="listitem" style={styles.item}>
@@ -62,17 +58,27 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
                 name={`Go to ${place}, ${sectionIds.join(' to ')}`}
                 onPress={() => onChoose(chainage)}
               />
-              <Txt style={styles.message}>{message}</Txt>
+              <View style={styles.words}>
+                <Txt>{message}</Txt>
+                <Txt variant="small" tone="soft">
+                  {reason}
+                </Txt>
+              </View>
             </View>
           );
         })}
       </View>
+      <Txt variant="small" tone="soft">
+        Source: {sources.join('; ')}
+      </Txt>
       {items.length > FEW ? (
-        <Button
-          kind="quiet"
-          label={open ? 'Show fewer' : `Show all ${items.length}`}
-          onPress={() => setOpen(!open)}
-        />
+        <View style={styles.more}>
+          <Button
+            kind="quiet"
+            label={open ? 'Show fewer' : `Show all ${items.length}`}
+            onPress={() => setOpen(!open)}
+          />
+        </View>
       ) : null}
     </View>
   );
@@ -80,6 +86,7 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
 
 const styles = StyleSheet.create({
   group: { gap: space.half, paddingTop: space.one * 1.5, borderTopWidth: hairline },
-  item: { flexDirection: 'row', alignItems: 'center', marginLeft: -space.two },
-  message: { flex: 1, minWidth: 0 },
+  item: { flexDirection: 'row', alignItems: 'flex-start', marginLeft: -space.two },
+  more: { marginLeft: -space.two },
+  words: { flex: 1, minWidth: 0, paddingVertical: space.one * 1.25 },
 });

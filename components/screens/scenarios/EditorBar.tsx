@@ -4,6 +4,7 @@ import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { Txt } from '@/components/ui/Txt';
 import { useEditing } from './editorContext';
+import { jumpTo } from './jumpTo';
 
 interface EditorBarProps {
   /** Why it cannot be routed yet. */
@@ -16,6 +17,7 @@ interface EditorBarProps {
 export function EditorBar({ reason, route, isRouting }: EditorBarProps) {
   const { may } = useCurrentStudy();
   const { editor } = useEditing();
+  const [first] = editor.faults;
   const words = editor.unsavable ?? reason ?? 'Ready to route.';
   return (
     <View style={styles.bar}>
@@ -25,6 +27,7 @@ export function EditorBar({ reason, route, isRouting }: EditorBarProps) {
         </Txt>
       </View>
       <View style={styles.buttons}>
+        {first ? <Button label="Go there" kind="quiet" onPress={() => jumpTo(first.path)} /> : null}
         <Button
           label="Save"
           busy={editor.isSaving}

@@ -8,7 +8,7 @@ export function whyNotRouted(
 ): string | null {
   if (!isChecked) return 'The reach is being read.';
   const count = new Set(faults.map(({ path }) => placeOf(path))).size;
-  if (count > 0) return count === 1 ? 'One thing is to mend.' : `${count} things are to mend.`;
+  if (count > 0) return count === 1 ? 'One thing to mend.' : `${count} things to mend.`;
   if (isSaving) return 'It is being saved.';
   return isDirty ? 'Save it first.' : null;
 }

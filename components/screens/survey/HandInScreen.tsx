@@ -68,10 +68,7 @@ export function HandInScreen({ control }: { control: HandInControl }) {
   return (
     <Screen
       title={titleOf(reading, state.step)}
-      crumbs={[
-        { label: study.title, href: `/studies/${study.id}` },
-        { label: 'Survey', href: `/studies/${study.id}/survey` },
-      ]}
+      crumbs={[{ label: study.title, href: `/studies/${study.id}` }, { label: 'Survey' }]}
       lead={reading ? leadOf(state.file.name, reading) : state.file.name}
       actions={isWide ? onWide : onPhone}
       footer={

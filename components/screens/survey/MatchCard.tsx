@@ -8,7 +8,7 @@ import { Txt } from '@/components/ui/Txt';
 import type { MatchChoice, SurveyReading } from '@/shared/surveys/types';
 import { MatchFields } from './MatchFields';
 import { MatchTable } from './MatchTable';
-import { groupSheets, isShort, type SheetGroup } from './matchChoice';
+import { groupSheets, isShort, passedOver, type SheetGroup } from './matchChoice';
 
 interface MatchCardProps {
   reading: SurveyReading;
@@ -20,9 +20,8 @@ interface MatchCardProps {
 
 /** How the headings were understood, each open to change; open from the start where something needed is missing. */
 export function MatchCard({ reading, choice, busy, onChange }: MatchCardProps) {
-  const groups = groupSheets(reading.sheets);
-  const used = groups.filter(({ layout }) => layout !== 'ignored');
-  const ignored = groups.filter(({ layout }) => layout === 'ignored');
+  const used = groupSheets(reading.sheets);
+  const others = passedOver(reading.sheets);
   const [isOpen, setOpen] = useState(() => used.some(isShort));
   return (
     <Card title="How the columns were understood" aside={busy ? 'reading again…' : undefined}>
@@ -60,12 +59,14 @@ export function MatchCard({ reading, choice, busy, onChange }: MatchCardProps) {
           Decimal {reading.decimal}.
         </Txt>
       )}
-      {ignored.map(({ key, sheets }) => (
-        <Txt key={key} variant="small" tone="soft">
-          Passed over: {sheets.length > 1 ? 'sheets' : 'sheet'} {sheets.join(', ')}.
+      {others.length > 0 ? (
+        <Txt variant="small" tone="soft">
+          Passed over: {others.length > 1 ? 'sheets' : 'sheet'} {others.join(', ')}.
         </Txt>
-      ))}
-      {isOpen ? null : <Button label="Change the match" onPress={() => setOpen(true)} />}
+      ) : null}
+      {isOpen || used.length === 0 ? null : (
+        <Button label="Change the match" onPress={() => setOpen(true)} />
+      )}
     </Card>
   );
 }
@@ -77,7 +78,12 @@ function nameOf({ sheets }: SheetGroup): string {
 }
 
 function kindOf({ layout, headingRow }: SheetGroup): string {
-  const kind = layout === 'longTable' ? 'one long table' : 'one sheet a section';
+  const kind =
+    layout === 'ignored'
+      ? 'not recognised as a survey yet'
+      : layout === 'longTable'
+        ? 'one long table'
+        : 'one sheet a section';
   return `${kind}, ${headingRow > 0 ? `headings in row ${headingRow}` : 'no heading row'}`;
 }
 

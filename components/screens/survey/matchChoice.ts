@@ -43,33 +43,41 @@ export interface SheetGroup {
   columns: ColumnMatch[];
 }
 
-/** Groups in the order of the workbook, those that were passed over last. */
-export function groupSheets(sheets: SheetMatch[]): SheetGroup[] {
+/**
+ * Sheets that carry the survey, those with the same headings together, in the order of the workbook. Where no sheet could be
+ * taken for a survey, all that have headings: the person says what their columns mean.
+ */
+export function groupSheets(sheets: readonly SheetMatch[]): SheetGroup[] {
   const groups = new Map<string, SheetGroup>();
-  for (const { sheet, layout, headingRow, columns } of sheets) {
-    const key =
-      layout === 'ignored'
-        ? layout
-        : `${layout}:${columns.map(({ column, heading }) => `${column}=${heading}`).join('|')}`;
+  for (const { sheet, layout, headingRow, columns } of matchable(sheets)) {
+    const key = `${layout}:${columns.map(({ column, heading }) => `${column}=${heading}`).join('|')}`;
     const group = groups.get(key);
     if (group) group.sheets.push(sheet);
     else groups.set(key, { key, layout, sheets: [sheet], headingRow, columns });
   }
-  const all = [...groups.values()];
-  return [
-    ...all.filter(({ layout }) => layout !== 'ignored'),
-    ...all.filter(({ layout }) => layout === 'ignored'),
-  ];
+  return [...groups.values()];
+}
+
+/** Names of the sheets that are not among the groups. */
+export function passedOver(sheets: readonly SheetMatch[]): string[] {
+  const used = matchable(sheets);
+  return sheets.filter((sheet) => !used.includes(sheet)).map(({ sheet }) => sheet);
+}
+
+function matchable(sheets: readonly SheetMatch[]): SheetMatch[] {
+  const used = sheets.filter(({ layout }) => layout !== 'ignored');
+  return used.length > 0 ? used : sheets.filter(({ columns }) => columns.length > 0);
 }
 
 /** The match as it was read, as a choice that the person can change. */
-export function choiceOf(sheets: SheetMatch[], decimal: MatchChoice['decimal']): MatchChoice {
+export function choiceOf(
+  sheets: readonly SheetMatch[],
+  decimal: MatchChoice['decimal'],
+): MatchChoice {
   const columns = new Map<number, MatchChoice['columns'][number]>();
-  for (const sheet of sheets) {
-    if (sheet.layout === 'ignored') continue;
+  for (const sheet of matchable(sheets))
     for (const { column, field, unit } of sheet.columns)
       if (!columns.has(column)) columns.set(column, { column, field, unit });
-  }
   return { columns: [...columns.values()].sort((a, b) => a.column - b.column), decimal };
 }
 
@@ -103,8 +111,6 @@ export const chooseUnit = (choice: MatchChoice, column: number, unit: LengthUnit
 /** Whether a needed column was not recognised, so that the person has to say which it is. */
 export function isShort({ layout, columns }: Pick<SheetGroup, 'layout' | 'columns'>): boolean {
   const needed: SurveyField[] =
-    layout === 'longTable'
-      ? ['section', 'chainage', 'offset', 'elevation']
-      : ['offset', 'elevation'];
+    layout === 'section' ? ['offset', 'elevation'] : ['section', 'chainage', 'offset', 'elevation'];
   return needed.some((field) => columns.every((column) => column.field !== field));
 }

@@ -3,6 +3,8 @@ import {
   chooseUnit,
   choiceOf,
   groupSheets,
+  isShort,
+  passedOver,
 } from '@/components/screens/survey/matchChoice';
 import type { ColumnMatch, SheetMatch } from '@/shared/surveys/types';
 
@@ -27,14 +29,34 @@ const columns = [
 ];
 
 describe('the match of a survey file', () => {
-  it('groups sheets with the same headings, and puts those passed over last', () => {
-    const groups = groupSheets([
-      sheet('Cover', [], 'ignored'),
+  it('groups sheets with the same headings and leaves out those passed over', () => {
+    const sheets = [
+      sheet('Cover', [column(0, 'Project', null)], 'ignored'),
       sheet('XS-01', columns),
       sheet('XS-02', columns),
       sheet('XS-03', [column(0, 'Dist', 'offset', 'm'), column(1, 'Level', 'elevation', 'm')]),
+    ];
+    expect(groupSheets(sheets).map((group) => group.sheets)).toEqual([
+      ['XS-01', 'XS-02'],
+      ['XS-03'],
     ]);
-    expect(groups.map((group) => group.sheets)).toEqual([['XS-01', 'XS-02'], ['XS-03'], ['Cover']]);
+    expect(passedOver(sheets)).toEqual(['Cover']);
+  });
+
+  it('offers every sheet with headings where none was taken for a survey', () => {
+    const sheets = [
+      sheet('Notes', [], 'ignored'),
+      sheet('Data', [column(0, 'Weite', null), column(1, 'Hoch', null)], 'ignored'),
+    ];
+    expect(groupSheets(sheets).map((group) => group.sheets)).toEqual([['Data']]);
+    expect(passedOver(sheets)).toEqual(['Notes']);
+    expect(choiceOf(sheets, 'auto').columns).toHaveLength(2);
+  });
+
+  it('knows when a needed column is missing', () => {
+    expect(isShort(sheet('A', columns, 'section'))).toBe(false);
+    expect(isShort(sheet('A', columns, 'longTable'))).toBe(true);
+    expect(isShort(sheet('A', columns.slice(0, 1), 'section'))).toBe(true);
   });
 
   it('starts from what was recognised', () => {
