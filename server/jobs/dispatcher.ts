@@ -32,12 +32,13 @@ interface Active {
 export type RunDispatcher = ReturnType<typeof runDispatcher>;
 
 /** How often the results of a finished run are tried to be stored when the database does not answer. */
-const STORE_TRIES = 5;
+const STORE_TRIES = 4;
 
 /** Takes runs from the queue while there are free slots, watches over their worker threads, and writes how they end. */
 export function runDispatcher(parts: Parts) {
   const { queue, models, hub, log, timing, slots, workerFile } = parts;
-  const active = new Map<number, Active>();
+  /** By the token of the claim: a run that was lost and taken again is another one. */
+  const active = new Map<string, Active>();
   let timer: NodeJS.Timeout | undefined;
   let stopping = false;
   let round: Promise<void> | null = null;
@@ -59,7 +60,6 @@ export function runDispatcher(parts: Parts) {
     const { runId } = claim;
     const left = secondsLeft(Date.now());
     const worker = startWorker(workerFile, claim.caseBytes, ({ fraction, time, surface }) => {
-      if (active.get(runId) !== entry) return;
       entry.progress = fraction;
       entry.secondsLeft = left(fraction, Date.now());
       const event: RunEvent = {
@@ -83,13 +83,13 @@ export function runDispatcher(parts: Parts) {
       secondsLeft: null,
       done: worker.outcome
         .then((outcome) => end(claim, outcome))
-        .catch((error: unknown) => log.error({ err: error, runId }, 'run not stored'))
+        .catch((error: unknown) => notStored(claim, error))
         .finally(() => {
-          active.delete(runId);
+          active.delete(claim.token);
           if (!stopping) wake();
         }),
     };
-    active.set(runId, entry);
+    active.set(claim.token, entry);
     publishState(runId, 'running');
     log.info({ runId, attempt: claim.attempts }, 'run begun');
   }
@@ -104,7 +104,7 @@ export function runDispatcher(parts: Parts) {
     const ending = endingOf(outcome);
     const stored = await persist(() => queue.finish(claim, ending));
     log.info({ runId, state: ending.state, stored }, 'run ended');
-    if (!stored) return;
+    if (!stored) return hub.forget(runId);
     const run = await models.Run.findByPk(runId, { attributes: ['state', 'failure'] });
     if (run) publishEnd(runId, run.state, run.failure);
   }
@@ -119,6 +119,15 @@ export function runDispatcher(parts: Parts) {
         await new Promise((resolve) => setTimeout(resolve, 200 * 2 ** attempt));
       }
     }
+  }
+
+  /** Not the fault of the run: it is begun again, at most twice. */
+  async function notStored(claim: Claim, error: unknown): Promise<void> {
+    const { runId } = claim;
+    log.error({ err: error, runId }, 'run not stored');
+    await queue
+      .abandon(claim, 'its results could not be stored in the database')
+      .catch(() => log.error({ runId }, 'run left to the end of its lease'));
   }
 
   async function renewAll(): Promise<void> {
@@ -173,7 +182,9 @@ export function runDispatcher(parts: Parts) {
     },
     /** Stops a run that is computed here at once; others see the mark in the database at their next beat. */
     cancel(runId: number): void {
-      active.get(runId)?.worker.cancel();
+      for (const { claim, worker } of active.values()) {
+        if (claim.runId === runId) worker.cancel();
+      }
     },
     /** Ends the worker threads and puts their runs back into the queue. */
     async stop(): Promise<void> {

@@ -6,6 +6,8 @@ export interface ProgressHub {
   publish(runId: number, event: RunEvent): void;
   /** The last event of a run that goes on here. */
   latest(runId: number): RunEvent | null;
+  /** The run does not go on here any more, and how it goes is not known here. */
+  forget(runId: number): void;
   /** Answers the way to stop listening. */
   subscribe(runId: number, listener: (event: RunEvent) => void): () => void;
   /** How many listen. */
@@ -22,6 +24,7 @@ export function progressHub(): ProgressHub {
       else last.set(runId, withSurface(event, last.get(runId)));
       emitter.emit(String(runId), event);
     },
+    forget: (runId) => void last.delete(runId),
     latest: (runId) => last.get(runId) ?? null,
     subscribe(runId, listener) {
       emitter.on(String(runId), listener);

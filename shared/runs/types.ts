@@ -26,7 +26,7 @@ export interface RunRow {
   requestedAt: string;
   startedAt: string | null;
   finishedAt: string | null;
-  /** m and m³/s at the outlet-most station or section; null before the run is routed. */
+  /** m and m³/s at the outlet, the last surveyed section; null before the run is routed. */
   peakStage: number | null;
   peakFlow: number | null;
 }

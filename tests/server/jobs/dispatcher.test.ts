@@ -129,6 +129,29 @@ test('a cancel asked of another server is seen at the next beat', async () => {
   expect(Date.now() - asked).toBeLessThan(1000);
 });
 
+test('a run that was given to another server is stopped here and left alone', async () => {
+  const run = await runs.add({ does: 'routes', after: 30_000 });
+  startDispatcher();
+  await until(run.id, ['running']);
+  const leaseUntil = new Date(Date.now() + 3_600_000);
+  await run.update({ leaseOwner: 'another', leaseUntil });
+  const deadline = Date.now() + 5000;
+  while (hub.latest(run.id) && Date.now() < deadline) {
+    await new Promise((resolve) => setTimeout(resolve, 20));
+  }
+  expect(hub.latest(run.id)).toBeNull();
+  expect(await reload(run.id)).toMatchObject({ state: 'running', leaseOwner: 'another' });
+});
+
+test('results that cannot be stored are said to be so, after three attempts', async () => {
+  const run = await runs.add({ does: 'routesTwice', after: 0 });
+  startDispatcher();
+  const failed = await until(run.id, ['failed'], 55);
+  expect(failed.attempts).toBe(3);
+  expect(failed.failure).toContain('could not be stored in the database');
+  expect(await server.services.models.RunBlock.count({ where: { runId: run.id } })).toBe(0);
+});
+
 test('a server that stops in order puts its runs back; the next one finishes them', async () => {
   const run = await runs.add({ does: 'routes', after: 1500 });
   const first = startDispatcher();

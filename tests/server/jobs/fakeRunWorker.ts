@@ -5,7 +5,8 @@ import type { RunWorkerData, WorkerMessage } from '../../../server/jobs/workerMe
 
 /** What a stand-in for a run does; it travels where the frozen case would. */
 export interface FakeCase {
-  does: 'routes' | 'fails' | 'throws' | 'exits' | 'eatsMemory' | 'isStuck';
+  /** `routesTwice` sends the same block twice: it cannot be stored. */
+  does: 'routes' | 'routesTwice' | 'fails' | 'throws' | 'exits' | 'eatsMemory' | 'isStuck';
   /** ms of wall time before it does so, listening to the stop flag unless it is stuck. */
   after: number;
 }
@@ -28,9 +29,10 @@ function stopped(): boolean {
 
 if (stopped()) {
   post({ type: 'cancelled' });
-} else if (does === 'routes') {
+} else if (does === 'routes' || does === 'routesTwice') {
   const bytes = gzipSync('{}');
-  const blocks: EncodedBlock[] = [{ kind: 'facts', part: 0, bytes }];
+  const block: EncodedBlock = { kind: 'facts', part: 0, bytes };
+  const blocks = does === 'routesTwice' ? [block, block] : [block];
   post({ type: 'routed', blocks, solver: '1.0.0', peakStage: 4, peakFlow: 5 });
 } else if (does === 'fails') {
   post({ type: 'failed', reason: 'The run failed at chainage 10.0 m at 5.0 s: too steep.' });
