@@ -23,7 +23,7 @@ export function Dialog({ title, open, onClose, children, actions }: DialogProps)
     <Modal
       visible={open}
       transparent
-      animationType="fade"
+      animationType="none"
       onRequestClose={onClose}
       aria-label={title}
     >

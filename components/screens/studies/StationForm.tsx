@@ -12,6 +12,8 @@ import { Button } from '@/components/ui/Button';
 import { ButtonRow } from '@/components/ui/ButtonRow';
 import { Notice } from '@/components/ui/Notice';
 import { useUnitSystem } from '@/components/ui/unitSystem';
+import { isOutside, spanText } from './reachSpan';
+import { useNewestReachRow } from './useNewestReach';
 
 interface StationFormProps {
   studyId: number;
@@ -30,6 +32,7 @@ interface StationValues {
 export function StationForm({ studyId, station, at = null, onDone }: StationFormProps) {
   const save = useSaveStation(studyId);
   const system = useUnitSystem();
+  const reach = useNewestReachRow(studyId);
   const [saved, setSaved] = useState<string | null>(null);
   const initial: StationValues = { name: station?.name ?? '', chainage: station?.chainage ?? null };
   const form = useYupForm({
@@ -42,6 +45,7 @@ export function StationForm({ studyId, station, at = null, onDone }: StationForm
       onDone?.();
     },
   });
+  const { chainage } = form.formik.values;
   return (
     <FormRoot form={form} label={station ? 'Change the station' : 'New station'}>
       <FormTextField name="name" label="Name" />
@@ -49,14 +53,19 @@ export function StationForm({ studyId, station, at = null, onDone }: StationForm
         name="chainage"
         label="Chainage"
         quantity="chainage"
-        hint="Along the reach, as in the survey."
+        hint={`Along the reach, as in the survey${reach ? `: ${spanText(reach, system)}` : ''}.`}
       />
-      {at !== null && form.formik.values.chainage !== at ? (
+      {at !== null && chainage !== at ? (
         <Button
           kind="quiet"
           label={`Take the place on the ribbon, ${formatWithUnit(at, 'chainage', system)}`}
           onPress={() => void form.formik.setFieldValue('chainage', at)}
         />
+      ) : null}
+      {reach && chainage !== null && isOutside(chainage, reach) ? (
+        <Notice tone="attention">
+          {`Outside the surveyed reach, ${spanText(reach, system)}: nothing is computed there, and no table will show it.`}
+        </Notice>
       ) : null}
       <ButtonRow>
         <FormSubmit label={station ? 'Save' : 'Add'} />

@@ -14,13 +14,16 @@ import { formatQuantity } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
 import { StationDialog } from './StationDialog';
 import { StationForm } from './StationForm';
+import { isOutside } from './reachSpan';
 import { StudyRibbon } from './StudyRibbon';
+import { useNewestReachRow } from './useNewestReach';
 
 /** The named places of the reach: bridges, gauges, houses. */
 export function StationsScreen() {
   const { study, may } = useCurrentStudy();
   const { at, setAt } = usePlaceAndTime();
   const { data: stations, error, refetch } = useStations(study.id);
+  const reach = useNewestReachRow(study.id);
   const [changing, setChanging] = useState<Station | null>(null);
   const mayChange = may('study.change');
   const choose = (station: Station) => {
@@ -36,11 +39,7 @@ export function StationsScreen() {
       side={
         mayChange ? (
           <Card title="New station">
-            <StationForm
-              studyId={study.id}
-              station={null}
-              at={study.counts?.sections ? at : null}
-            />
+            <StationForm studyId={study.id} station={null} at={reach ? at : null} />
           </Card>
         ) : undefined
       }
@@ -68,7 +67,12 @@ export function StationsScreen() {
             isChosen={(station) => station.chainage === at}
             onRowPress={choose}
             columns={[
-              { key: 'name', title: 'Station', render: (station) => station.name },
+              {
+                key: 'name',
+                title: 'Station',
+                render: ({ name, chainage }) =>
+                  isOutside(chainage, reach) ? `${name}, outside the reach` : name,
+              },
               {
                 key: 'chainage',
                 title: 'Chainage',

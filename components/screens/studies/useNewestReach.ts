@@ -1,12 +1,16 @@
 import { useReach, useReaches } from '@/components/queries/reaches';
-import type { Reach } from '@/shared/reaches/types';
+import type { Reach, ReachRow } from '@/shared/reaches/types';
 
-/** The reach of the latest accepted survey, once it is there. */
-export function useNewestReach(studyId: number): Reach | undefined {
+/** The reach of the latest accepted survey in short, once it is there. */
+export function useNewestReachRow(studyId: number): ReachRow | null {
   const rows = useReaches(studyId).data ?? [];
-  const newest = rows.reduce<(typeof rows)[number] | null>(
+  return rows.reduce<ReachRow | null>(
     (best, row) => (best === null || row.revision > best.revision ? row : best),
     null,
   );
-  return useReach(newest?.id ?? null).data;
+}
+
+/** The same with its sections. */
+export function useNewestReach(studyId: number): Reach | undefined {
+  return useReach(useNewestReachRow(studyId)?.id ?? null).data;
 }
