@@ -21,6 +21,9 @@ const STEPS = path.resolve(__dirname, '../migrations');
 const requireStep = createRequire(__filename);
 const STEP_FILE = /^(\d{3}-[a-z0-9-]+)\.[jt]s$/;
 
+const storageOf = (sequelize: Sequelize) =>
+  new SequelizeStorage({ sequelize, tableName: 'schema_steps' });
+
 export function migrator(sequelize: Sequelize): Umzug<QueryInterface> {
   const migrations = readdirSync(STEPS)
     .filter((file) => STEP_FILE.test(file))
@@ -36,7 +39,7 @@ export function migrator(sequelize: Sequelize): Umzug<QueryInterface> {
   return new Umzug<QueryInterface>({
     migrations,
     context: sequelize.getQueryInterface(),
-    storage: new SequelizeStorage({ sequelize, tableName: 'schema_steps' }),
+    storage: storageOf(sequelize),
     logger: undefined,
   });
 }
@@ -55,7 +58,8 @@ export async function migrate(sequelize: Sequelize): Promise<string[]> {
       const known = new Set(
         (await steps.migrations(sequelize.getQueryInterface())).map((step) => step.name),
       );
-      const executed = (await steps.executed()).map((step) => step.name);
+      // Asked of the table itself: Umzug answers only the steps that it knows.
+      const executed = await storageOf(sequelize).executed();
       const unknown = executed.filter((name) => !known.has(name));
       if (unknown.length > 0) throw new NewerSchemaError(unknown);
       return (await steps.up()).map((step) => step.name);

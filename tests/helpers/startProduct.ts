@@ -31,6 +31,8 @@ export interface Product {
   ended: Promise<number | null>;
   /** Resolves when it serves, rejects when it ends before. */
   serving: Promise<void>;
+  /** What it said when it ended with 1; rejects when it serves all the same. */
+  refused: () => Promise<string>;
 }
 
 /** `npm start` as a process of its own. */
@@ -55,7 +57,18 @@ export function startProduct(settings: Record<string, string>): Product {
   });
   // Tests of refusals never wait for it.
   serving.catch(() => undefined);
-  return { process: child, said: () => said, ended, serving };
+  const refused = async () => {
+    const code = await Promise.race([
+      ended,
+      serving.then(
+        () => 'it serves',
+        () => ended,
+      ),
+    ]);
+    if (code !== 1) throw new Error(`Not refused (${code}):\n${said}`);
+    return said;
+  };
+  return { process: child, said: () => said, ended, serving, refused };
 }
 
 /** Process numbers of database servers that work in a directory. */
