@@ -1,7 +1,7 @@
 import { Pressable, StyleSheet } from 'react-native';
 import { formatWithUnit } from '@/shared/units/format';
 import { useStations } from '@/components/queries/stations';
-import { space, touch } from '@/components/theme/tokens';
+import { space } from '@/components/theme/tokens';
 import { aria } from '@/components/ui/aria';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
@@ -57,7 +57,7 @@ const styles = StyleSheet.create({
     justifyContent: 'space-between',
     alignItems: 'center',
     gap: space.two,
-    minHeight: touch - 3 * space.one,
+    minHeight: space.three + space.half,
   },
   name: { flexShrink: 1 },
 });
