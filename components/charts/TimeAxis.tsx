@@ -1,6 +1,7 @@
 import { memo } from 'react';
-import { ChartText } from './ChartText';
+import { ChartText, CHART_TEXT_SIZE } from './ChartText';
 import type { Frame } from './geometry/frame';
+import { textWidth } from './geometry/textWidth';
 import type { TimeTicks } from './geometry/ticks';
 
 interface Props {
@@ -11,9 +12,19 @@ interface Props {
 /** Time from start along the foot of a drawing, its unit at the last value. */
 export const TimeAxis = memo(function TimeAxis({ frame, ticks }: Props) {
   const { values, unit, unitSeconds } = ticks;
-  return values.map((value, i) => (
-    <ChartText key={value} x={frame.x(value)} y={frame.bottom + 18} anchor="middle">
-      {i === values.length - 1 ? `${value / unitSeconds} ${unit}` : String(value / unitSeconds)}
-    </ChartText>
-  ));
+  return values.map((value, i) => {
+    const number = String(value / unitSeconds);
+    const label = i === values.length - 1 ? `${number} ${unit}` : number;
+    const edge = frame.width - textWidth(label, CHART_TEXT_SIZE) / 2;
+    return (
+      <ChartText
+        key={value}
+        x={Math.min(frame.x(value), edge)}
+        y={frame.bottom + 18}
+        anchor="middle"
+      >
+        {label}
+      </ChartText>
+    );
+  });
 });

@@ -4,7 +4,7 @@ import type { Tone } from './textStyle';
 import { Txt } from './Txt';
 
 interface FigureProps {
-  /** Formatted; of a time `6 h 07` the h is set lighter. */
+  /** Formatted; of a time `6 h 07` or `3 min 02` the unit is set lighter. */
   value: string;
   unit?: string;
   label: string;
@@ -18,10 +18,10 @@ export function FigureWithUnit({ value, unit, label, size = 'figure', tone }: Fi
   return (
     <View style={styles.figure}>
       <Txt variant={size} strong tone={tone}>
-        {value.split(/( h )/).map((part, i) =>
-          part === ' h ' ? (
+        {value.split(/( h | min )/).map((part, i) =>
+          part === ' h ' || part === ' min ' ? (
             <Txt key={i} variant={unitSize} tone="soft">
-              {part}
+              {part.replaceAll(' ', NO_BREAK)}
             </Txt>
           ) : (
             part
@@ -29,7 +29,7 @@ export function FigureWithUnit({ value, unit, label, size = 'figure', tone }: Fi
         )}
         {unit ? (
           <Txt variant={unitSize} tone="soft">
-            {` ${unit}`}
+            {`${NO_BREAK}${unit}`}
           </Txt>
         ) : null}
       </Txt>
@@ -39,5 +39,8 @@ export function FigureWithUnit({ value, unit, label, size = 'figure', tone }: Fi
     </View>
   );
 }
+
+/** A figure and its unit stay on one line. */
+const NO_BREAK = '\u00a0';
 
 const styles = StyleSheet.create({ figure: { gap: space.half / 2 } });

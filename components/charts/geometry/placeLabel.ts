@@ -29,35 +29,42 @@ export function placeLabel(
   let bestCost = Infinity;
   const right = point.x + gap;
   const left = point.x - gap - size.width;
-  // Beside the point first; then as far aside as the bounds allow, over or under it.
-  const sides = [
-    right,
-    left,
-    Math.max(left, bounds.x),
-    Math.min(right, bounds.x + bounds.width - size.width),
+  const leftmost = Math.max(left, bounds.x);
+  const rightmost = Math.min(right, bounds.x + bounds.width - size.width);
+  // Beside the point first; then as far aside as the bounds allow, over or under it; then beyond what stands next to it.
+  const columns = [
+    { x: right, shift: 0 },
+    { x: left, shift: 0 },
+    { x: leftmost, shift: leftmost - left },
+    { x: rightmost, shift: right - rightmost },
+    ...SHIFTS.map((shift) => ({ x: right + shift, shift })),
+    ...SHIFTS.map((shift) => ({ x: left - shift, shift })),
   ];
   const rows = Math.ceil(bounds.height / STEP);
-  for (let row = 0; row <= rows; row++) {
-    for (const x of sides) {
+  for (let row = 0; row <= rows && row * STEP < bestCost; row++) {
+    for (const { x, shift } of columns) {
       for (const up of row === 0 ? [0] : [-1, 1]) {
         const box = { x, y: point.y - size.height / 2 + up * row * STEP, ...size };
         if (!within(box, bounds) || covers(box, point)) continue;
         const hidden =
           lines.reduce((sum, each) => sum + crossings(each, box), 0) +
           10 * taken.filter((each) => overlap(each, box)).length;
-        const cost = hidden * 1000 + row;
-        if (cost < bestCost) {
-          best = box;
-          bestCost = cost;
-        }
+        const cost = hidden * HIDING + row * STEP + shift;
+        if (cost >= bestCost) continue;
+        best = box;
+        bestCost = cost;
       }
     }
-    if (bestCost < 1000) break;
   }
   return best ?? clamp({ x: point.x + gap, y: point.y, ...size }, bounds);
 }
 
+/** Steps up and down and shifts aside that are tried, px. */
 const STEP = 4;
+const SHIFTS = [16, 32, 48, 64];
+/** A label on a line is worse than any way off. */
+const HIDING = 10_000;
+/** Air about a label, px. */
 const CLEAR = 3;
 
 const within = (box: Box, bounds: Box) =>

@@ -7,6 +7,12 @@ export function timeWords(t: number, span: number, startsAt: string | null): str
   return startsAt ? `${fromStart}, ${formatClock(startsAt, t)}` : fromStart;
 }
 
+/** The same within a sentence: `22 h 30 after start, 15 Nov, 04:30`. */
+export function momentWords(t: number, span: number, startsAt: string | null): string {
+  const fromStart = `${shortTime(t, span)} after start`;
+  return startsAt ? `${fromStart}, ${formatClock(startsAt, t)}` : fromStart;
+}
+
 /** Time from start with the digits that a run of this length deserves, s. */
 export function shortTime(t: number, span: number): string {
   const unit = timeUnit(span);

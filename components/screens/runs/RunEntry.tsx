@@ -19,7 +19,7 @@ export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
     run.peakStage === null || run.peakFlow === null
       ? null
       : `${formatWithUnit(run.peakStage, 'elevation', unitSystem)}, ${formatWithUnit(run.peakFlow, 'flow', unitSystem)}`;
-  const words = found ? 'peak furthest downstream' : runLeftWords(run);
+  const words = found ? 'peak at the outlet' : runLeftWords(run);
   return (
     <View role="listitem" style={[styles.item, { borderTopColor: colours.line }]}>
       <Link href={`/studies/${studyId}/runs/${run.id}`} asChild>

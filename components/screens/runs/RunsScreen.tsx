@@ -1,6 +1,8 @@
 import { View } from 'react-native';
+import { NotThere } from '@/components/layout/NotThere';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
+import { isApiError } from '@/components/queries/ApiError';
 import { useRuns } from '@/components/queries/runs';
 import { Button } from '@/components/ui/Button';
 import { Empty } from '@/components/ui/Empty';
@@ -12,6 +14,7 @@ import { RunEntry } from './RunEntry';
 export function RunsScreen() {
   const { study } = useCurrentStudy();
   const runs = useRuns(study.id);
+  if (isApiError(runs.error, 'notFound')) return <NotThere />;
   const root = `/studies/${study.id}` as const;
   return (
     <Screen

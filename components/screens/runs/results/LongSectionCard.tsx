@@ -4,7 +4,7 @@ import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, useTime } from '@/components/charts/usePlaceAndTime';
 import { valueAt } from '@/components/charts/geometry/interpolate';
 import { surfaceFrame } from '@/components/charts/geometry/surfaceFrame';
-import { timeWords } from '@/components/charts/geometry/timeWords';
+import { momentWords } from '@/components/charts/geometry/timeWords';
 import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -54,9 +54,13 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
     isCurrent && series && peaks
       ? { stage: valueAt(series.times, series.stage, t), peakStage: peaks.peakStage }
       : null;
-  const moment = `${timeWords(t, run.duration, run.startsAt)} after start`;
+  const moment = momentWords(t, run.duration, run.startsAt);
   return (
-    <Card title="Long section" aside={`${moment} · peak dotted · banks dashed`}>
+    <Card
+      title="Long section"
+      // On a phone the time stands below, at the ribbon.
+      aside={isWide ? `${moment} · ${LEGEND}` : LEGEND}
+    >
       <LongSection
         profile={surface}
         stage={stage}
@@ -72,3 +76,5 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
     </Card>
   );
 }
+
+const LEGEND = 'peak dotted · banks dashed';

@@ -89,6 +89,7 @@ const unbroken = (text: string) => text.replaceAll(' ', '\u00a0');
 
 const styles = StyleSheet.create({
   plain: { gap: space.half },
-  row: { flexDirection: 'row', columnGap: space.two },
-  figure: { flexGrow: 1, flexShrink: 1, flexBasis: 80 },
+  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: 12, rowGap: space.one },
+  // Labels are broken before a figure is.
+  figure: { flexGrow: 1, flexShrink: 1, flexBasis: 80, minWidth: 'min-content' } as object,
 });

@@ -33,15 +33,17 @@ export function TimeBar({ run, summary, store }: Props) {
   };
   return (
     <View style={isWide ? styles.wide : styles.phone}>
-      <View style={isWide ? styles.controlsWide : styles.controls}>
-        <Button label={isPlaying ? 'Pause' : 'Play'} onPress={isPlaying ? pause : play} />
-        <Button
-          kind="quiet"
-          label={`in ${PACES[pace]} s`}
-          name={`Pace: the whole flood in ${PACES[pace]} s, press to change`}
-          onPress={() => setPace((pace + 1) % PACES.length)}
-        />
-        <Txt strong style={styles.time}>
+      <View style={isWide ? styles.aside : styles.controls}>
+        <View style={styles.controls}>
+          <Button label={isPlaying ? 'Pause' : 'Play'} onPress={isPlaying ? pause : play} />
+          <Button
+            kind="quiet"
+            label={`in ${PACES[pace]} s`}
+            name={`Pace: the whole flood in ${PACES[pace]} s, press to change`}
+            onPress={() => setPace((pace + 1) % PACES.length)}
+          />
+        </View>
+        <Txt strong style={isWide ? null : styles.time}>
           {timeWords(t, run.duration, run.startsAt)}
         </Txt>
       </View>
@@ -64,7 +66,7 @@ const styles = StyleSheet.create({
   wide: { flexDirection: 'row', gap: space.two, alignItems: 'center' },
   phone: { gap: space.half },
   controls: { flexDirection: 'row', alignItems: 'center', columnGap: space.one },
-  controlsWide: { width: 190, flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center' },
+  aside: { width: 176, gap: space.half },
   ribbonWide: { flex: 1, minWidth: 0 },
-  time: { marginLeft: 'auto' },
+  time: { marginLeft: 'auto', flexShrink: 1, textAlign: 'right' },
 });

@@ -53,3 +53,12 @@ test('stays in the plot even where there is no free place', () => {
   const hatch = Array.from({ length: 40 }, (_, k) => ({ x: [0, 400], y: [k * 4, k * 4] }));
   expect(inside(placeLabel({ x: 150, y: 80 }, size, bounds, hatch))).toBe(true);
 });
+
+test('steps over a cursor that stands close behind the peak at the left edge', () => {
+  const cursor = { x: [60, 60], y: [0, 160] };
+  const steep = { x: [40, 44, 48, 60, 340], y: [150, 20, 40, 90, 148] };
+  const box = placeLabel({ x: 44, y: 20 }, size, bounds, [steep, cursor]);
+  expect(inside(box)).toBe(true);
+  expect(isClear(box, cursor)).toBe(true);
+  expect(isClear(box, steep)).toBe(true);
+});
