@@ -20,6 +20,8 @@ export interface Env {
   webDir: string | null;
   /** Proxies in front of the server whose X-Forwarded-For is believed. */
   trustProxy: number;
+  /** Whether the demo data are loaded into a database that does not hold them yet. */
+  demoData: boolean;
   /** Worker threads for runs; null: one a core less one. */
   workers: number | null;
   logLevel: string;
@@ -44,6 +46,7 @@ const settings = object({
   WEB_DIR: string().optional(),
   TRUST_PROXY: number().integer().min(0).max(10).default(0),
   WORKERS: number().integer().min(0).max(256).optional(),
+  DEMO_DATA: string().oneOf(['yes', 'no'], 'must be yes or no').default('no'),
   LOG_LEVEL: string()
     .oneOf(['fatal', 'error', 'warn', 'info', 'debug', 'trace', 'silent'])
     .default('info'),
@@ -78,6 +81,7 @@ export function readEnv(source: Record<string, string | undefined> = process.env
     mailDir: path.resolve(ROOT, checked.MAIL_DIR ?? path.join(dataDir, 'mail')),
     webDir: checked.WEB_DIR ? path.resolve(ROOT, checked.WEB_DIR) : null,
     trustProxy: checked.TRUST_PROXY,
+    demoData: checked.DEMO_DATA === 'yes',
     workers: checked.WORKERS ?? null,
     logLevel: checked.LOG_LEVEL,
     secrets: readSecrets(dataDir),

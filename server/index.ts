@@ -2,6 +2,7 @@ import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { buildApp } from './app';
 import { compose, type Services } from './composition';
+import { seedDemo } from '../seed';
 import { addressOf, readEnv, type Env } from './env';
 
 export interface RunningServer {
@@ -16,13 +17,10 @@ const SWEEP_MS = 6 * 3600 * 1000;
 const LAST_ANSWERS_MS = 2000;
 
 /** Starts HTTP and workers. Rejects with what the system says when the port cannot be listened on. */
-export async function startServer(
-  env: Env,
-  { beforeListening }: { beforeListening?: (services: Services) => Promise<void> } = {},
-): Promise<RunningServer> {
+export async function startServer(env: Env): Promise<RunningServer> {
   const services = await compose(env);
   try {
-    await beforeListening?.(services);
+    if (env.demoData) await seedDemo(services);
     const http = await listen(services);
     services.runs.start();
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);

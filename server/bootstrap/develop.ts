@@ -28,6 +28,7 @@ async function dev(cleanup: Cleanup): Promise<void> {
   run(cleanup, [TSX, 'watch', '--clear-screen=false', 'server/index.ts'], {
     DATABASE_URL: databaseUrl,
     DATA_DIR: dataDir,
+    DEMO_DATA: process.env.DEMO_DATA ?? 'yes',
     HOST: '127.0.0.1',
     PORT: String(apiPort),
     PUBLIC_URL: publicUrl,
