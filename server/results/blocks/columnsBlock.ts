@@ -1,10 +1,14 @@
+import { packNumbers, unpackNumbers } from './packNumbers';
+
 /**
  * Named columns of numbers as one compact block, self-describing and versioned, little-endian:
- * Uint32 magic, Uint32 length H of the heading, H bytes of JSON [{name, type, length}], padding to 8 bytes,
- * then each column, padded to 8 bytes.
+ * Uint32 magic, Uint32 length H of the heading, H bytes of JSON [{name, type, length, packed}], padding to 8 bytes,
+ * then each column, long ones packed (`packNumbers.ts`), padded to 8 bytes.
  */
 const MAGIC = 0x31425053; // "SPB1"
 const PREFIX_BYTES = 8;
+/** Shorter columns gain nothing by being packed. */
+const PACKED_FROM = 32;
 
 const TYPES = { f64: Float64Array, f32: Float32Array, i32: Int32Array } as const;
 type ColumnType = keyof typeof TYPES;
@@ -15,13 +19,15 @@ interface Heading {
   name: string;
   type: ColumnType;
   length: number;
+  packed: boolean;
 }
 
 const padded = (bytes: number) => Math.ceil(bytes / 8) * 8;
 
 export function encodeColumns(columns: Columns): Uint8Array {
   const headings = Object.entries(columns).map(([name, column]): Heading => {
-    return { name, type: typeOf(column), length: column.length };
+    const { length } = column;
+    return { name, type: typeOf(column), length, packed: length >= PACKED_FROM };
   });
   const text = new TextEncoder().encode(JSON.stringify(headings));
   const start = padded(PREFIX_BYTES + text.length);
@@ -30,9 +36,11 @@ export function encodeColumns(columns: Columns): Uint8Array {
   new Uint32Array(block.buffer, 0, 2).set([MAGIC, text.length]);
   block.set(text, PREFIX_BYTES);
   let at = start;
-  for (const column of Object.values(columns)) {
-    block.set(new Uint8Array(column.buffer, column.byteOffset, column.byteLength), at);
-    at += padded(column.byteLength);
+  for (const { name, packed, type } of headings) {
+    const { buffer, byteOffset, byteLength } = columns[name];
+    const bytes = new Uint8Array(buffer, byteOffset, byteLength);
+    block.set(packed ? packNumbers(bytes, TYPES[type].BYTES_PER_ELEMENT) : bytes, at);
+    at += padded(byteLength);
   }
   return block;
 }
@@ -50,10 +58,13 @@ export function decodeColumns<C extends Columns>(block: Uint8Array): C {
   const headings = JSON.parse(new TextDecoder().decode(text)) as Heading[];
   const columns: Columns = {};
   let at = padded(PREFIX_BYTES + textLength);
-  for (const { name, type, length } of headings) {
-    const size = length * TYPES[type].BYTES_PER_ELEMENT;
+  for (const { name, type, length, packed } of headings) {
+    const valueBytes = TYPES[type].BYTES_PER_ELEMENT;
+    const size = length * valueBytes;
     if (at + size > bytes.length) throw new Error(`The block is cut short in column ${name}.`);
-    columns[name] = new TYPES[type](bytes.buffer as ArrayBuffer, bytes.byteOffset + at, length);
+    const stored = bytes.subarray(at, at + size);
+    const { buffer, byteOffset } = packed ? unpackNumbers(stored, valueBytes) : stored;
+    columns[name] = new TYPES[type](buffer as ArrayBuffer, byteOffset, length);
     at += padded(size);
   }
   return columns as C;

@@ -11,6 +11,12 @@ describe('a block of columns', () => {
     b: Float32Array.of(1.5, 2.25, 3),
     empty: new Float64Array(0),
     c: Int32Array.of(-1, 7),
+    long: Float64Array.from({ length: 500 }, (_, k) => (k === 7 ? NaN : Math.sin(k / 9) * 1e-3)),
+    flow: Float32Array.from(
+      { length: 333 },
+      (_, k) => -1e6 + 1e3 * Math.exp(-((k - 99) ** 2) / 50),
+    ),
+    index: Int32Array.from({ length: 40 }, (_, k) => (k % 3) - 1),
   };
 
   test('comes back as it was, to the bit', () => {
