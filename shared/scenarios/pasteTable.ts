@@ -109,11 +109,9 @@ function separatorOf(lines: string[]): string | RegExp {
 }
 
 function cells(content: string, separator: string | RegExp): string[] {
-  const parts = content
-    .trim()
-    .split(separator)
-    .map((part) => part.trim().replace(/^"(.*)"$/, '$1'));
-  return joinDate(parts);
+  // An empty last column is one all the same; only where spaces part the columns do they mean nothing at the ends.
+  const line = typeof separator === 'string' ? content : content.trim();
+  return joinDate(line.split(separator).map((part) => part.trim().replace(/^"(.*)"$/, '$1')));
 }
 
 /** A date and its time of day in two columns are one moment. */

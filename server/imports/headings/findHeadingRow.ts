@@ -1,9 +1,11 @@
+import { SURVEY_FIELDS } from '../../../shared/surveys/types';
 import type { Grid } from '../workbook/types';
 import { isNumeric } from '../numbers/isNumeric';
 import { matchHeadings, type HeadingMatch } from './matchHeadings';
 import { unitOf } from './lengthUnits';
 
 const ROWS_LOOKED_AT = 60;
+const ALL_FIELDS = SURVEY_FIELDS.length;
 
 export interface FoundHeadings {
   /** 0-based; -1 where the numbers begin without headings. */
@@ -22,9 +24,11 @@ export function findHeadingRow(grid: Grid): FoundHeadings | null {
   for (let row = 0; row < Math.min(grid.rows.length, ROWS_LOOKED_AT); row++) {
     const headings = matchHeadings(texts(grid, row));
     const fields = new Set(headings.flatMap(({ field }) => field ?? []));
-    const tells = fields.has('elevation') || fields.has('offset');
-    if (tells && fields.size >= 2 && fields.size > (best?.score ?? 0))
-      best = { row, headings, score: fields.size };
+    const telling = Number(fields.has('elevation')) + Number(fields.has('offset'));
+    // A row with both is a table's; a labelled cell above it, like `Section | X`, may look like one of them.
+    const score = fields.size + (telling === 2 ? ALL_FIELDS : 0);
+    if (telling > 0 && fields.size >= 2 && score > (best?.score ?? 0))
+      best = { row, headings, score };
   }
   if (best) return withUnitRow(grid, best.row, best.headings);
 

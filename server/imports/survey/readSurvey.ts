@@ -45,6 +45,7 @@ export function readSurvey(bytes: Buffer, options: SurveyReadingOptions): Survey
     doubtHiddenRows(sheet, faults);
   }
   const sections = [...found.values()];
+  if (sections.length === 0) sayNoPoints(sheets, faults);
   checkSections(sections, faults);
 
   const clean = !faults.refuses && sections.length > 0;
@@ -102,6 +103,17 @@ function* numberTexts(sheets: MatchedSheet[]): Generator<string> {
       }
     }
   }
+}
+
+/** Headings alone: the blank template, sent as it is. */
+function sayNoPoints(sheets: MatchedSheet[], faults: FaultList) {
+  const table = sheets.find(({ match }) => match.layout !== 'ignored');
+  if (table && !faults.refuses)
+    faults.fault(
+      { sheet: table.match.sheet },
+      'The table has no points',
+      'Below the headings nothing stands. Write one point a row.',
+    );
 }
 
 function doubtHiddenRows({ grid, match, firstDataRow }: MatchedSheet, faults: FaultList) {

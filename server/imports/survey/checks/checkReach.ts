@@ -24,7 +24,8 @@ export function checkReach(sections: RawSection[], faults: FaultList) {
       `All points stand under ${first.id}. A reach needs two sections or more.`,
     );
   checkTwins(sections, faults);
-  doubtClimbingBed(sections, faults);
+  // A slipped elevation may turn the bed; it is looked at when the rest is sound.
+  if (!faults.refuses) doubtClimbingBed(sections, faults);
 }
 
 function checkTwins(sections: RawSection[], faults: FaultList) {

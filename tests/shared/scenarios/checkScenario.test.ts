@@ -1,0 +1,213 @@
+import { buildCase } from '../../../shared/scenarios/buildCase';
+import { checkScenario } from '../../../shared/scenarios/checkScenario';
+import { newScenario, outletSlopeOf, proposals } from '../../../shared/scenarios/proposals';
+import { scenarioSchema, type ScenarioBody } from '../../../shared/scenarios/schemas';
+import { plainSections } from '../../helpers/plainSections';
+
+const sections = plainSections(5, 500);
+
+const sound = (change: Partial<ScenarioBody> = {}): ScenarioBody => {
+  const body = newScenario('1 in 100 year', 1, sections);
+  return {
+    ...body,
+    upstream: {
+      ...body.upstream,
+      baseFlow: 10,
+      peakFlow: 60,
+      timeToPeak: 7200,
+    } as ScenarioBody['upstream'],
+    ...change,
+  };
+};
+const faultsOf = (change: Partial<ScenarioBody>) =>
+  checkScenario(sound(change), sections).faults.map(({ path }) => path);
+const doubtsOf = (change: Partial<ScenarioBody>) =>
+  checkScenario(sound(change), sections).doubts.map(({ path }) => path);
+const numerics = (change: Partial<ScenarioBody['numerics']>) => ({
+  numerics: { ...sound().numerics, ...change },
+});
+
+test('a new scenario lacks its flood and nothing else', () => {
+  const { faults } = checkScenario(newScenario('Flood', 1, sections), sections);
+  expect(faults.map(({ path }) => path)).toEqual([
+    'upstream.baseFlow',
+    'upstream.peakFlow',
+    'upstream.timeToPeak',
+  ]);
+});
+test('a sound one has neither faults nor doubts, and passes the schema unchanged', async () => {
+  expect(checkScenario(sound(), sections)).toEqual({ faults: [], doubts: [] });
+  expect(await scenarioSchema.validate(sound())).toEqual(sound());
+});
+
+describe('the upstream end', () => {
+  const generated = sound().upstream as Extract<ScenarioBody['upstream'], { kind: 'generated' }>;
+  test.each([
+    [{ ...generated, baseFlow: -1 }, ['upstream.baseFlow']],
+    [{ ...generated, peakFlow: 5 }, ['upstream.peakFlow']],
+    [{ ...generated, timeToPeak: 0 }, ['upstream.timeToPeak']],
+    [{ ...generated, shape: 'triangle', recessionRatio: null }, ['upstream.recessionRatio']],
+    [{ ...generated, shape: 'gamma', gammaExponent: 0 }, ['upstream.gammaExponent']],
+    [{ kind: 'table', times: [], flows: [] }, ['upstream.times']],
+    [{ kind: 'table', times: [0, 10], flows: [1] }, ['upstream.times']],
+    [
+      { kind: 'table', times: [0, 20, 20, 10], flows: [1, 2, -3, 4] },
+      ['upstream.times[2]', 'upstream.flows[2]', 'upstream.times[3]'],
+    ],
+    [{ kind: 'table', times: [0], flows: [5] }, []],
+    [{ kind: 'stage', times: [], stages: [] }, ['upstream.times']],
+    [{ kind: 'wall' }, []],
+  ] as [ScenarioBody['upstream'], string[]][])('%j', (upstream, paths) => {
+    expect(faultsOf({ upstream })).toEqual(paths);
+  });
+  test('a wrong column is not told a thousand times', () => {
+    const times = Array.from({ length: 5000 }, (_, i) => -i);
+    expect(
+      faultsOf({ upstream: { kind: 'table', times, flows: times.map(() => 1) } }).length,
+    ).toBeLessThan(25);
+  });
+  test('a peak after the end of the run is doubted', () => {
+    expect(doubtsOf(numerics({ duration: 3600, outputInterval: 300 }))).toEqual([
+      'numerics.duration',
+    ]);
+  });
+});
+
+describe('laterals', () => {
+  const lateral = { name: '', from: 100, to: 900, times: [0], flows: [2] };
+  test.each([
+    [{ ...lateral }, []],
+    [{ ...lateral, from: -5 }, ['laterals[0].from']],
+    [{ ...lateral, to: 2001 }, ['laterals[0].to']],
+    [{ ...lateral, from: 900, to: 100 }, ['laterals[0].to']],
+    [{ ...lateral, from: null, to: null }, ['laterals[0].from', 'laterals[0].to']],
+    [{ ...lateral, times: [], flows: [] }, ['laterals[0].times']],
+  ])('%j', (one, paths) => expect(faultsOf({ laterals: [one] })).toEqual(paths));
+  test('one that takes water is doubted', () => {
+    expect(doubtsOf({ laterals: [{ ...lateral, flows: [-2] }] })).toEqual(['laterals[0].flows']);
+  });
+});
+
+describe('the outlet', () => {
+  test.each([
+    [{ kind: 'normalDepth', slope: null }, ['downstream.slope']],
+    [{ kind: 'normalDepth', slope: 0 }, ['downstream.slope']],
+    [{ kind: 'stage', times: [], stages: [] }, ['downstream.times']],
+    [{ kind: 'rating', stages: [8, 9], flows: [0, 30] }, []],
+    [{ kind: 'rating', stages: [8], flows: [5] }, ['downstream.stages']],
+    [{ kind: 'rating', stages: [8, 9, 10], flows: [0, 30, 20] }, ['downstream.flows[2]']],
+    [{ kind: 'rating', stages: [9, 8], flows: [0, 30] }, ['downstream.stages[1]']],
+    [{ kind: 'rating', stages: [8, 9], flows: [0, 0] }, ['downstream.flows']],
+    [{ kind: 'rating', stages: [1, 2], flows: [0, 9] }, ['downstream.stages']],
+    [{ kind: 'criticalDepth' }, []],
+    [{ kind: 'open' }, []],
+    [{ kind: 'wall' }, ['initial.kind']],
+  ] as [ScenarioBody['downstream'], string[]][])('%j', (downstream, paths) => {
+    expect(faultsOf({ downstream })).toEqual(paths);
+  });
+});
+
+describe('the initial state', () => {
+  test.each([
+    [{ kind: 'still', stage: null }, ['initial.stage']],
+    [{ kind: 'profile', chainages: [], stages: [], flows: [] }, ['initial.chainages']],
+    [{ kind: 'profile', chainages: [0, 2000], stages: [12, 10], flows: [5] }, ['initial.flows']],
+    [{ kind: 'dam', chainage: 1000, stageAbove: 14, stageBelow: null }, []],
+    [{ kind: 'dam', chainage: 0, stageAbove: 14, stageBelow: null }, ['initial.chainage']],
+    [{ kind: 'dam', chainage: 1000, stageAbove: 14, stageBelow: 15 }, ['initial.stageBelow']],
+    [{ kind: 'dam', chainage: 1000, stageAbove: 8.9, stageBelow: null }, ['initial.stageAbove']],
+    [
+      { kind: 'dam', chainage: null, stageAbove: null, stageBelow: null },
+      ['initial.chainage', 'initial.stageAbove'],
+    ],
+  ] as [ScenarioBody['initial'], string[]][])('%j', (initial, paths) => {
+    expect(faultsOf({ initial })).toEqual(paths);
+  });
+});
+
+describe('numerical settings', () => {
+  test.each([
+    [{ cellSize: null }, ['numerics.cellSize']],
+    [{ cellSize: 0.01 }, ['numerics.cellSize']],
+    [{ cellSize: 1500 }, ['numerics.cellSize']],
+    [{ duration: -1 }, ['numerics.duration']],
+    [{ outputInterval: 1 }, ['numerics.outputInterval']],
+    [{ duration: 600, outputInterval: 900 }, ['numerics.outputInterval']],
+    [{ courant: 1.2 }, ['numerics.courant']],
+    [{ dryDepth: 0 }, ['numerics.dryDepth']],
+  ])('%j', (change, paths) => expect(faultsOf(numerics(change))).toEqual(paths));
+  test('cells longer than the spacing of the sections are doubted', () => {
+    expect(doubtsOf(numerics({ cellSize: 600 }))).toEqual(['numerics.cellSize']);
+  });
+});
+
+test('sections without roughness cannot be routed', () => {
+  const bare = sections.map((section, i) => (i === 2 ? { ...section, roughness: [] } : section));
+  const { faults } = checkScenario(sound(), bare);
+  expect(faults).toEqual([
+    { path: 'reachId', message: expect.stringMatching(/^Section XS-03 has no roughness/) },
+  ]);
+});
+
+describe('proposals', () => {
+  test('the outlet slope is the fall of the bed', () => {
+    expect(outletSlopeOf(sections)).toBe(0.001);
+  });
+  test('a bed that does not fall gets a small slope, not none', () => {
+    const level = sections.map((section) => ({ ...section, points: sections[0].points }));
+    expect(outletSlopeOf(level)).toBe(1e-4);
+  });
+  test('cells are round, finer than the sections, and not too many', () => {
+    for (const [count, spacing] of [
+      [4, 500],
+      [40, 500],
+      [400, 500],
+      [10, 7],
+      [3, 20_000],
+    ] as const) {
+      const reach = plainSections(count, spacing);
+      const { cellSize } = proposals(reach);
+      const length = spacing * (count - 1);
+      expect(cellSize).toBeLessThanOrEqual(spacing);
+      expect(length / cellSize).toBeLessThanOrEqual(50_000);
+      expect([1, 2, 2.5, 5]).toContain(
+        Number((cellSize / 10 ** Math.floor(Math.log10(cellSize) + 1e-9)).toFixed(6)),
+      );
+    }
+  });
+  test('the run lasts until the flood has passed the outlet', () => {
+    const { duration, outputInterval } = proposals(sections, sound().upstream);
+    expect(duration).toBeGreaterThanOrEqual(5 * 7200 + 2000);
+    expect(duration / outputInterval).toBeLessThanOrEqual(600);
+  });
+});
+
+describe('the case file', () => {
+  test('says everything that the run depends on', () => {
+    const caseFile = buildCase(sound(), sections, 'Study: 1 in 100 year');
+    expect(caseFile).toMatchObject({
+      format: 'spate-case/1',
+      title: 'Study: 1 in 100 year',
+      upstream: { kind: 'inflow' },
+      downstream: { kind: 'normalDepth', slope: 0.001 },
+      initial: { kind: 'steady' },
+      structures: [],
+      numerics: { order: 2, courant: 0.8, dryDepth: 0.001 },
+    });
+    expect(caseFile.sections[0]).toEqual({
+      id: 'XS-01',
+      chainage: 0,
+      points: sections[0].points,
+      roughness: sections[0].roughness,
+      banks: [20, 38],
+    });
+    expect(JSON.parse(JSON.stringify(caseFile))).toEqual(caseFile);
+  });
+  test('leaves out bank marks that are not there', () => {
+    const bare = sections.map((section) => ({ ...section, banks: null }));
+    expect('banks' in buildCase(sound(), bare, 't').sections[0]).toBe(false);
+  });
+  test('is not made of an incomplete scenario', () => {
+    expect(() => buildCase(newScenario('Flood', 1, sections), sections, 't')).toThrow('upstream');
+  });
+});
