@@ -48,7 +48,7 @@ export interface Workspace {
   /** Kept from the start of a step: area, and the parts of the corrector that are known then. */
   oldArea: Float64Array;
   halfFlow: Float64Array;
-  explicitFriction: Float64Array;
+  implicitShare: Float64Array;
 
   /** Areas and thrusts of one face that had to be taken from the tables: see riemann/faceAreas.ts. */
   face: Float64Array;
@@ -95,7 +95,7 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
     fluxRight: pool(),
     oldArea: pool(),
     halfFlow: pool(),
-    explicitFriction: pool(),
+    implicitShare: pool(),
     face: new Float64Array(FACE_FIELDS),
     bed: pool(),
     table: new Float64Array(size * TABLE_STRIDE),

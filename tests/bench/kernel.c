@@ -24,7 +24,7 @@ static double dx, g;
 static double *area, *flow, *stage, *width, *celerity, *reach, *friction, *slopeFloor;
 static double *bed, *levelZ, *levelArea, *levelEnd, *levelB0, *levelB1, *levelV0, *levelV1, *levelV2;
 static double *slopeStage, *slopeFlow, *fluxArea, *fluxLeft, *fluxRight;
-static double *oldArea, *halfFlow, *explicitFriction;
+static double *oldArea, *halfFlow, *implicitShare;
 
 static void place(int i, double a) {
   if (a < levelArea[i] || a >= levelEnd[i] || a <= 0) left++;
@@ -128,11 +128,11 @@ static void predict(double dt) {
     oldArea[i] = old;
     double a = old - ratio * (fluxArea[i] - fluxArea[i - 1]);
     double q = q0 - ratio * (fluxLeft[i] - fluxRight[i - 1]);
-    double speed = dt * fabs(q0), z = 0.5 * speed * friction[i], e = z < 0.25 ? z : 0.25;
-    explicitFriction[i] = e;
+    double half = 0.5 * dt * friction[i] * fabs(q0), e = half < 0.25 ? half : 0.25;
+    implicitShare[i] = half < 0.25 ? 0.5 : 1 - 0.125 / half;
     halfFlow[i] = 0.5 * (q0 + q) - e * q0;
     place(i, a);
-    flow[i] = stage[i] - bed[i] > 0.001 ? q / (1 + speed * friction[i]) : 0;
+    flow[i] = stage[i] - bed[i] > 0.001 ? 2 * q / (1 + sqrt(1 + 4 * dt * friction[i] * fabs(q))) : 0;
   }
 }
 
@@ -142,9 +142,8 @@ static void correct(double dt) {
   for (int i = 1; i <= n; i++) {
     double a = area[i] - ratio * (fluxArea[i] - fluxArea[i - 1]);
     double q = halfFlow[i] - 0.5 * ratio * (fluxLeft[i] - fluxRight[i - 1]);
-    double z = dt * fabs(flow[i]);
     place(i, 0.5 * (oldArea[i] + a));
-    flow[i] = stage[i] - bed[i] > 0.001 ? q / (1 + z * friction[i] - explicitFriction[i]) : 0;
+    flow[i] = stage[i] - bed[i] > 0.001 ? 2 * q / (1 + sqrt(1 + 4 * dt * implicitShare[i] * friction[i] * fabs(q))) : 0;
   }
 }
 
@@ -165,7 +164,7 @@ int main(void) {
   double **given[] = {&area,   &flow,      &stage,    &width,   &slopeFloor, &bed,     &levelZ,
                       &levelArea, &levelEnd, &levelB0, &levelB1, &levelV0,    &levelV1, &levelV2};
   double **own[] = {&celerity, &reach,     &friction,  &slopeStage, &slopeFlow,       &fluxArea,
-                    &fluxLeft, &fluxRight, &oldArea,   &halfFlow,   &explicitFriction};
+                    &fluxLeft, &fluxRight, &oldArea,   &halfFlow,   &implicitShare};
   for (int k = 0; k < 14; k++) *given[k] = array(size, 1);
   for (int k = 0; k < 11; k++) *own[k] = array(size, 0);
   for (int i = 1; i <= n; i++) place(i, area[i]);

@@ -19,7 +19,7 @@ export function createControlBoundary(
 ): Boundary {
   const { section, cell, outward } = end;
   const { bed, stage } = workspace;
-  const endState = createEndState(workspace, tables, end);
+  const endState = createEndState(workspace, tables, end, true);
   const endFlux = createEndFlux(workspace, tables, end);
   const { celerityAt, criticalFlowAt, forceAt } = createEndSection(workspace, tables, section);
 

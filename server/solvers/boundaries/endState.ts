@@ -35,9 +35,15 @@ export function downstreamEnd(n: number): End {
  * Extrapolates the state of the last cell over its half to the section at the end. Where that section differs abruptly
  * from the cell's at equal stage (a steep or a stepped bed) and the water is fast, the area of the cell is taken along
  * instead of its stage. Where a cell cannot be sloped, the face between two cells gives the whole fall to the lower
- * one: so must the ends, by `path`. The returned function fills and returns one object.
+ * one: so must the ends, by `path`. At a free outlet slow water falls over an abrupt end as well; elsewhere it must be
+ * able to stand level. The returned function fills and returns one object.
  */
-export function createEndState(workspace: Workspace, tables: CellTables, end: End): () => EndState {
+export function createEndState(
+  workspace: Workspace,
+  tables: CellTables,
+  end: End,
+  isFree = false,
+): () => EndState {
   const { n, area, flow, stage, celerity, slopeStage, slopeFlow, slopeFloor } = workspace;
   const { bed, gravity, dryDepth } = workspace;
   const { section, cell, outward } = end;
@@ -69,9 +75,10 @@ export function createEndState(workspace: Workspace, tables: CellTables, end: En
       q = (1 - mix) * (flow[cell] + 0.5 * outward * slopeFlow[cell]);
     }
     if (mix > 0) {
-      const leaves = outward * flow[cell] > 0;
+      const leaves = isFree || outward * flow[cell] > 0;
       const falls = leaves ? own < level : own > level;
-      const taken = falls ? level + Math.min(1, froude) * (own - level) : level;
+      const share = isFree ? Math.max(froude, (ratio - 1.5) / 1.5) : froude;
+      const taken = falls ? level + Math.min(1, share) * (own - level) : level;
       a += mix * taken;
       q += mix * (leaves && !falls ? (taken / own) * flow[cell] : flow[cell]);
       state.stage = mix === 1 && !falls ? etaCell : tables.stageOf(section, a);

@@ -18,7 +18,7 @@ export function createOpenBoundary(workspace: Workspace, tables: CellTables, end
   const { section } = end;
   const slope = openSlope(workspace);
   const root = Math.sqrt(Math.max(0, slope));
-  const endState = createEndState(workspace, tables, end);
+  const endState = createEndState(workspace, tables, end, true);
   let isKnown = false;
   let isUniform = false;
   let invariant = 0;

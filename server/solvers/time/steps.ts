@@ -4,16 +4,18 @@ import type { Laterals } from '../sources/laterals';
 import type { Workspace } from '../workspace';
 import { createLimitOutflow } from './limitOutflow';
 
-/** Largest explicit share of friction, z/2 with z = dt g |Q|/(A V²): keeps a strongly braked flow from turning back. */
+/** Largest explicit part of friction, in parts of the flow: keeps a strongly braked flow from turning back. */
 const MOST_EXPLICIT = 0.25;
 
 /**
  * Both halves of a step of the second-order strong-stability-preserving Runge-Kutta method (Heun; Shu and Osher 1988,
  * J. Comput. Phys. 77, 439-471). Each uses the fluxes in the workspace.
  *
- * Friction -g Q|Q|/(A V²) is trapezoidal with its new half linearised and implicit, so that steady flow does not depend
- * on dt: Q' = (Q + dt R - e Q)/(1 + z' - e), e = min(z/2, 1/4), where z belongs to the start and z' to the end of the
- * step and R is the mean of both fluxes. Laterals enter without momentum; withdrawals take theirs along.
+ * Friction -k Q|Q|, k = g/(A V²), is implicit in the predictor, and trapezoidal in the step as a whole with less
+ * explicit part the stiffer it is: with z = dt k|Q| at the start, e = min(z/2, 1/4), R the mean of both fluxes,
+ *   Q' + (1 - e/z) dt k' Q'|Q'| = Q + dt R - e Q,
+ * which is solved for Q' as the quadratic it is. Steady flow does not depend on dt, and stiff flow does not swing.
+ * Laterals enter without momentum; withdrawals take theirs along.
  */
 export interface Steps {
   /** From the state at the start of the step to the whole Euler step. */
@@ -33,10 +35,10 @@ export function createSteps(
   ledger: VolumeLedger,
 ): Steps {
   const { n, dx, area, flow, stage, bed, dryDepth, friction, celerity } = workspace;
-  const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, explicitFriction } = workspace;
+  const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, implicitShare } = workspace;
   const { place } = cellState;
   const { rate } = laterals;
-  const { abs } = Math;
+  const { abs, sqrt } = Math;
   const hasLaterals = laterals.any;
   const limitOutflow = createLimitOutflow(workspace);
 
@@ -61,6 +63,7 @@ export function createSteps(
   function predict(dt: number): void {
     limitOutflow(dt);
     const ratio = dt / dx;
+    const fourDt = 4 * dt;
     stageLateral = 0;
     stageMissing = 0;
     for (let i = 1; i <= n; i++) {
@@ -75,13 +78,13 @@ export function createSteps(
         a = withLateral(i, a, dt);
         if (a < before) q *= a / before;
       }
-      const speed = dt * abs(q0);
-      const z = 0.5 * speed * friction[i];
-      const e = z < MOST_EXPLICIT ? z : MOST_EXPLICIT;
-      explicitFriction[i] = e;
+      const half = 0.5 * dt * friction[i] * abs(q0);
+      const e = half < MOST_EXPLICIT ? half : MOST_EXPLICIT;
+      implicitShare[i] = half < MOST_EXPLICIT ? 0.5 : 1 - (0.5 * MOST_EXPLICIT) / half;
       halfFlow[i] = 0.5 * (q0 + q) - e * q0;
       if (a !== old) place(i, a);
-      flow[i] = stage[i] - bed[i] > dryDepth ? q / (1 + speed * friction[i]) : 0;
+      flow[i] =
+        stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + fourDt * friction[i] * abs(q))) : 0;
     }
     inflow = fluxArea[0];
     outflow = fluxArea[n];
@@ -92,6 +95,7 @@ export function createSteps(
   function correct(dt: number): void {
     limitOutflow(dt);
     const ratio = dt / dx;
+    const fourDt = 4 * dt;
     stageLateral = 0;
     stageMissing = 0;
     let drained = 0;
@@ -106,9 +110,9 @@ export function createSteps(
         if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
       }
       a = 0.5 * (old + a);
-      const z = dt * abs(flow[i]);
       if (a !== area[i]) place(i, a);
-      flow[i] = stage[i] - bed[i] > dryDepth ? q / (1 + z * friction[i] - explicitFriction[i]) : 0;
+      const m = fourDt * implicitShare[i] * friction[i];
+      flow[i] = stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + m * abs(q))) : 0;
       if (a < 0.5 * old) drained++;
     }
     if (drained > 0) capDrained();
