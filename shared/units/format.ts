@@ -38,7 +38,8 @@ export function formatDuration(seconds: number): string {
 /** Clock time of a moment of a run whose study has a start, e.g. `14 Nov 18:12`, in UTC as it was typed. */
 export function formatClock(startIso: string, seconds: number): string {
   // To the whole minute, as `formatDuration` is: the two stand side by side.
-  return clock.format(Date.parse(startIso) + Math.round(seconds / 60) * 60_000);
+  const at = Date.parse(startIso) + Math.round(seconds / 60) * 60_000;
+  return Number.isFinite(at) ? clock.format(at) : '–';
 }
 
 const clock = new Intl.DateTimeFormat('en-GB', {
