@@ -36,7 +36,7 @@ export async function openPage(
     baseURL: productUrl(),
   });
   const page = await context.newPage();
-  page.setDefaultTimeout(20_000);
+  page.setDefaultTimeout(60_000);
   const errors: string[] = [];
   page.on('pageerror', (error) => errors.push(String(error)));
   return { context, page, errors };
@@ -44,6 +44,4 @@ export async function openPage(
 
 /** Pixels by which the page is wider than its window. */
 export const sidewaysOverflow = (page: Page): Promise<number> =>
-  page.evaluate(
-    () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
-  );
+  page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);

@@ -25,8 +25,10 @@ export default async function productSetup(): Promise<void> {
 
   const deadline = Date.now() + 300_000;
   while (!(await serves(url))) {
-    if (exited !== null) throw new Error(`The product ended with ${exited}; see ${dataDir}/product.log`);
-    if (Date.now() > deadline) throw new Error(`The product does not serve; see ${dataDir}/product.log`);
+    if (exited !== null)
+      throw new Error(`The product ended with ${exited}; see ${dataDir}/product.log`);
+    if (Date.now() > deadline)
+      throw new Error(`The product does not serve; see ${dataDir}/product.log`);
     await new Promise((resolve) => setTimeout(resolve, 250));
   }
 }
@@ -44,7 +46,9 @@ function freePort(): Promise<number> {
     server.listen(0, '127.0.0.1', () => {
       const address = server.address();
       server.close(() =>
-        typeof address === 'object' && address ? resolve(address.port) : reject(new Error('No port')),
+        typeof address === 'object' && address
+          ? resolve(address.port)
+          : reject(new Error('No port')),
       );
     });
   });
