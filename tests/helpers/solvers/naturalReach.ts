@@ -67,9 +67,10 @@ export function wildReach(seed: number, count: number, spacing: number): Section
     const base = 6 * random();
     const pointCount = 4 + Math.floor(10 * random());
     let offset = 0;
-    const points = Array.from({ length: pointCount }, (): SectionPoint => {
+    const points = Array.from({ length: pointCount }, (_point, k): SectionPoint => {
       const point: SectionPoint = [offset, base + 5 * random()];
-      offset += random() < 0.1 ? 0 : 1 + 25 * random();
+      const isWall = k > 0 && random() < 0.1;
+      offset += isWall ? 0 : 1 + 25 * random();
       return point;
     });
     points.push([offset + 5, base + 5 * random()]);

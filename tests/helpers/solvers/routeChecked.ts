@@ -1,18 +1,20 @@
 import { routeCase, type RouteOptions } from '@/server/solvers';
 import type { CaseFile } from '@/shared/case/caseFile';
 import type { ResultFile } from '@/shared/case/resultFile';
+import { validateCase } from '@/shared/case/validateCase';
 
 /** Volume may be lost to rounding only. */
 const VOLUME_TOLERANCE = 1e-12;
 
-/** Routes a case and holds it to what every run must keep: finite numbers, no negative depth, nowhere a peak
+/** Routes a valid case and holds it to what every run must keep: finite numbers, no negative depth, nowhere a peak
  *  below the end state, and water neither made nor lost. */
 export function routeChecked(caseFile: CaseFile, options?: RouteOptions): ResultFile {
+  expect(validateCase(caseFile).faults).toEqual([]);
   const result = routeCase(caseFile, options);
   expect(Math.abs(result.volume.relativeError)).toBeLessThanOrEqual(VOLUME_TOLERANCE);
   const { cells, sections, volume, times } = result;
   for (const value of Object.values(volume)) expect(Number.isFinite(value)).toBe(true);
-  for (const [name, values] of Object.entries(cells)) {
+  for (const [name, values] of Object.entries<(number | null)[]>({ ...cells })) {
     const faulty = values.findIndex((value) => value !== null && !Number.isFinite(value));
     expect({ name, faulty }).toEqual({ name, faulty: -1 });
   }

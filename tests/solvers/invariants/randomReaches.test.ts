@@ -34,8 +34,8 @@ function randomCase(seed: number): CaseFile {
     {
       kind: 'profile',
       chainages: [0, length],
-      stages: [crest + 2 * random(), bed + 2 * random()],
-      flows: [base, base],
+      stages: [crest + 1 + 2 * random(), bed + 1 + 2 * random()],
+      flows: [5, 5],
     },
     ...(wild || downstream.kind === 'wall' ? [] : [{ kind: 'steady' } as const]),
   ]);
