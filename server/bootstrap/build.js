@@ -1,0 +1,1 @@
+require('./bare/launch').launch('buildWeb');
