@@ -1,7 +1,7 @@
 /** Stand wherever a result can be read or printed. */
 export const CAUTIONS = [
-  'One-dimensional: one water level across each cross-section, flow along the reach only. Flow across floodplains, at bends and around buildings is not resolved.',
-  'Not represented: moving bed, debris and ice, blockage of bridges and culverts, wind, seepage, and air in the water.',
+  'A computed flood, not a forecast and not a warning: nothing here watches a river or raises an alarm.',
+  'Water is routed along the reach in one dimension: one level and one mean velocity a cross-section. Flow across floodplains, erosion and deposition, debris, ice, wind and blocked structures are not represented.',
   'The result is as good as the survey, the roughness and the inflow that went in. Compare it with observed levels before it is relied on.',
-  'Decisions on flood and dam safety need a licensed engineer and the rules of the local authority. This is not a warning system.',
+  'Decisions about flood and dam safety need a licensed engineer and the rules of the local authority.',
 ] as const;

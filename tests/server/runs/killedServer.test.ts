@@ -8,6 +8,7 @@ import type { UserModel } from '../../../server/models/User';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { buildRunnable } from './buildRunnable';
+import { readEvents } from './eventReader';
 import { untilEnded } from './untilEnded';
 
 jest.setTimeout(300_000);
@@ -79,6 +80,10 @@ const stored = async (runId: number) =>
 test('killed in the middle, the run finishes after the next start, once, with the same bits', async () => {
   const { scenario } = await buildRunnable(server.services, user, SECONDS_LONG);
   const { id } = (await api.post(`/api/scenarios/${scenario.id}/runs`).expect(201)).body;
+  const watching = await readEvents(
+    `${server.url}/api/runs/${id}/events`,
+    await server.tokenOf(user),
+  );
   const first = startProcess();
   await untilUnderWay(id);
   await kill(first);
@@ -88,6 +93,14 @@ test('killed in the middle, the run finishes after the next start, once, with th
   startProcess();
   const run = await untilEnded(server.services, id, 240);
   expect(run).toMatchObject({ state: 'routed', attempts: 2, failure: null });
+
+  // Whoever watched, on a server that did not compute it, saw it begin anew and end once.
+  await watching.closed;
+  const seen = watching.events;
+  expect(seen.some((event) => event.type === 'progress' && event.state === 'running')).toBe(true);
+  expect(seen.filter((event) => event.type === 'ended')).toEqual([
+    { type: 'ended', state: 'routed', failure: null },
+  ]);
 
   const blocks = await stored(id);
   expect(new Set(blocks).size).toBe(blocks.length);

@@ -1,4 +1,6 @@
+import { execFileSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
+import path from 'node:path';
 import { read, utils } from 'xlsx';
 import type { Run, RunRow, RunSeries, RunSummary } from '../../../shared/runs/types';
 import type { CaseFile } from '../../../shared/case/caseFile';
@@ -99,6 +101,23 @@ test('series at the sections are those of the solver in this process, to the bit
       arrival: section.arrival,
     });
   }
+});
+
+test('the command line gives the same result for the downloaded case, to the bit', async () => {
+  const { text } = await api.get(`/api/runs/${run.id}/case.json`).expect(200);
+  const output = execFileSync(
+    process.execPath,
+    ['--require', 'tsx/cjs', 'server/solvers/cli/route.ts', '-'],
+    {
+      cwd: path.resolve(__dirname, '../../..'),
+      input: text,
+      stdio: ['pipe', 'pipe', 'ignore'],
+      maxBuffer: 1e8,
+    },
+  );
+  const { seconds: _mine, ...routed } = JSON.parse(output.toString()) as ResultFile;
+  const { seconds: _theirs, ...here } = expected;
+  expect(routed).toEqual(JSON.parse(JSON.stringify(here)));
 });
 
 test('between sections they lie between the neighbouring cells', async () => {
