@@ -40,8 +40,8 @@ const wall = object({ kind: string().oneOf(['wall']).required() }).noUnknown();
 const byKind = <T extends Record<string, { isType: unknown } | object>>(kinds: T) =>
   lazy((value: { kind?: string } | undefined) => {
     const schema = kinds[value?.kind ?? ''];
-    return (schema ??
-      mixed().oneOf([], `Choose one of: ${Object.keys(kinds).join(', ')}.`)) as never;
+    const choose = `Choose one of: ${Object.keys(kinds).join(', ')}.`;
+    return (schema ?? mixed().oneOf([], choose).required(choose)) as never;
   });
 
 const upstreamKinds = { generated, table, stage: stageTable, wall };
