@@ -85,6 +85,6 @@ export function RoughnessFields({ roughness }: { roughness: 'byBank' | 'byOffset
 
 const styles = StyleSheet.create({
   fields: { gap: space.two },
-  zone: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one, alignItems: 'flex-end' },
+  zone: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one, alignItems: 'flex-start' },
   grow: { flexGrow: 1, flexBasis: 110, minWidth: 0 },
 });

@@ -37,9 +37,8 @@ export function useSectionsForm({ reach, section, ticked, onSaved }: SectionsFor
         await change.mutateAsync(toSectionsChange(values, ids, reach.version));
         onSaved(ids);
       } catch (error) {
-        if (isApiError(error, 'conflict'))
-          await client.invalidateQueries({ queryKey: reachKeys.one(reach.id) });
-        throw error;
+        if (!isApiError(error, 'conflict')) throw error;
+        await client.invalidateQueries({ queryKey: reachKeys.one(reach.id) });
       }
     },
   });

@@ -1,3 +1,4 @@
+import { StyleSheet, View } from 'react-native';
 import { SelectField } from '@/components/ui/SelectField';
 import { TextField } from '@/components/ui/TextField';
 import { Button } from '@/components/ui/Button';
@@ -45,7 +46,9 @@ export function DetailsPart() {
             </>
           )}
         </PlacedField>
-        <PlacedField path="startsAt" half>
+      </FieldRow>
+      <View style={styles.clock}>
+        <PlacedField path="startsAt">
           {(error) => (
             <TextField
               label="Clock time of the start"
@@ -57,7 +60,7 @@ export function DetailsPart() {
             />
           )}
         </PlacedField>
-      </FieldRow>
+      </View>
       <PlacedField path="note">
         {(error) => (
           <TextField
@@ -75,3 +78,5 @@ export function DetailsPart() {
     </EditorPart>
   );
 }
+
+const styles = StyleSheet.create({ clock: { maxWidth: 440 } });

@@ -10,7 +10,7 @@ import { FieldRow } from './EditorPart';
 import { useEditing } from './editorContext';
 import { PlacedField } from './PlacedField';
 import { TimeField } from './TimeField';
-import { volumeWords } from './volumeWords';
+import { spokenVolume } from './spokenVolume';
 
 /** A flood by its shape, drawn while its numbers are typed. */
 export function GeneratedInflow() {
@@ -106,7 +106,7 @@ export function GeneratedInflow() {
         <>
           <Hydrograph label="Inflow" quantity="flow" series={series} t={null} unitSystem={system} />
           <Txt variant="small" tone="soft">
-            {`${volumeWords(volumeOf(flood), system)} in ${formatDuration(flood.times[flood.times.length - 1])}, base flow included.`}
+            {`${spokenVolume(volumeOf(flood), system)} in ${formatDuration(flood.times[flood.times.length - 1])}, base flow included.`}
           </Txt>
         </>
       ) : (

@@ -19,7 +19,7 @@ import { LateralsPart } from './LateralsPart';
 import { NumericsPart } from './NumericsPart';
 import { OutletPart } from './OutletPart';
 import { ReadinessCard } from './ReadinessCard';
-import { SaveNotices } from './SaveNotices';
+import { UnsavedNotice } from './UnsavedNotice';
 import { UpstreamPart } from './UpstreamPart';
 import { useScenarioEditor } from './useScenarioEditor';
 import { whyNotRouted } from './whyNotRouted';
@@ -59,7 +59,13 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
           ) : undefined
         }
         footer={
-          isLocked ? undefined : <EditorBar {...{ reason, route }} isRouting={request.isPending} />
+          isLocked ? undefined : (
+            <EditorBar
+              {...{ reason, route }}
+              isRouting={request.isPending}
+              routeError={request.error}
+            />
+          )
         }
         ribbon={
           reach.data ? (
@@ -75,10 +81,7 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
         }
         side={
           <>
-            <SaveNotices />
-            {request.isError ? (
-              <ErrorState title="The run was not started" error={request.error} />
-            ) : null}
+            <UnsavedNotice />
             {reach.isError ? (
               <ErrorState
                 title="The reach could not be read"

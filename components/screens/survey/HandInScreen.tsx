@@ -51,7 +51,11 @@ export function HandInScreen({ control }: { control: HandInControl }) {
       match={state.step === 'read' && state.changed ? choice : null}
     />
   ) : null;
-  const back = <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />;
+  const back = (
+    <View style={styles.back}>
+      <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />
+    </View>
+  );
   const onWide = (
     <>
       {back}
@@ -136,4 +140,7 @@ function leadOf(fileName: string, reading: SurveyReading) {
   );
 }
 
-const styles = StyleSheet.create({ footer: { gap: space.one } });
+const styles = StyleSheet.create({
+  footer: { gap: space.one },
+  back: { flexDirection: 'row', justifyContent: 'center' },
+});

@@ -6,8 +6,8 @@ import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
 import { useEditing } from './editorContext';
 
-/** What became of saving: refused, overtaken by somebody else, or typed before and here again. */
-export function SaveNotices() {
+/** Saving went wrong: refused, or overtaken by somebody else. */
+export function SaveTrouble() {
   const { editor } = useEditing();
   if (editor.isBehind && editor.isDirty)
     return (
@@ -27,22 +27,7 @@ export function SaveNotices() {
         </View>
       </Notice>
     );
-  return (
-    <>
-      {editor.saveError ? <ErrorState title="Not saved" error={editor.saveError} /> : null}
-      {editor.isDirty ? (
-        <Notice
-          tone="attention"
-          title={editor.wasKept ? 'What you had not saved is here again' : 'Not saved yet'}
-        >
-          <Txt>It stays in this browser tab until you save it or throw it away.</Txt>
-          <View style={styles.buttons}>
-            <Button label="Throw the changes away" kind="danger" onPress={editor.throwAway} />
-          </View>
-        </Notice>
-      ) : null}
-    </>
-  );
+  return editor.saveError ? <ErrorState title="Not saved" error={editor.saveError} /> : null;
 }
 
 const styles = StyleSheet.create({
