@@ -9,24 +9,41 @@ interface Props {
   anchor?: 'start' | 'middle' | 'end';
   tone?: 'soft' | 'ink' | 'earth' | 'ochre';
   strong?: boolean;
+  /** Stays legible where a line runs behind it. */
+  halo?: boolean;
   children: ReactNode;
 }
 
 export const CHART_TEXT_SIZE = type.caption.fontSize;
 
 /** A word or number of a drawing; `y` is its base line. */
-export function ChartText({ x, y, anchor = 'start', tone = 'soft', strong, children }: Props) {
+export function ChartText({
+  x,
+  y,
+  anchor = 'start',
+  tone = 'soft',
+  strong,
+  halo,
+  children,
+}: Props) {
   const { colours } = useTheme();
+  const type = {
+    x,
+    y,
+    textAnchor: anchor,
+    fontFamily: strong ? fonts.semibold : fonts.regular,
+    fontSize: CHART_TEXT_SIZE,
+  };
   return (
-    <Text
-      x={x}
-      y={y}
-      textAnchor={anchor}
-      fill={colours[tone]}
-      fontFamily={strong ? fonts.semibold : fonts.regular}
-      fontSize={CHART_TEXT_SIZE}
-    >
-      {children}
-    </Text>
+    <>
+      {halo ? (
+        <Text {...type} fill={colours.card} stroke={colours.card} strokeWidth={4} aria-hidden>
+          {children}
+        </Text>
+      ) : null}
+      <Text {...type} fill={colours[tone]}>
+        {children}
+      </Text>
+    </>
   );
 }

@@ -137,21 +137,21 @@ function Marks({
     t === null || !series.times.length
       ? null
       : { x: frame.x(t), y: yOf(valueAt(series.times, series.values, t)) };
-  const upright = cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : [];
-  const curves = [model.main, ...(model.compare ? [model.compare] : []), ...upright];
+  const soft = cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : [];
+  const lines = model.compare ? [model.main, model.compare] : [model.main];
 
   const top = peak ? { x: frame.x(peak.time), y: yOf(peak.value) } : null;
   const peakText = peak
     ? [{ text: `${value(peak.value)} at ${shortTime(peak.time, span)}`, strong: true }]
     : [];
-  const peakBox = top ? readingBox(peakText, top, bounds, curves) : null;
+  const peakBox = top ? readingBox(peakText, top, bounds, { lines, soft }) : null;
   // At the peak itself its own label says all.
   const apart = cursor && !(top && Math.hypot(top.x - cursor.x, top.y - cursor.y) < 6);
   const cursorText =
     t === null ? [] : [{ text: value(valueAt(series.times, series.values, t)), strong: false }];
   const cursorBox =
     cursor && apart
-      ? readingBox(cursorText, cursor, bounds, curves, peakBox ? [peakBox] : [])
+      ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: peakBox ? [peakBox] : [] })
       : null;
   return (
     <>

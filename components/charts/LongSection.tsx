@@ -204,7 +204,7 @@ function Cursor({ at, frame, profile, stage, reading, unitSystem, lines, surface
     row ? [{ x: lines.x, y: row }] : [],
   );
   const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };
-  const box = readingBox(texts, { x, y }, bounds, drawn, [axisTitle]);
+  const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken: [axisTitle] });
   return (
     <>
       <Line x1={x} x2={x} y1={10} y2={frame.bottom} stroke={colours.ink} strokeWidth={1.25} />

@@ -1,6 +1,5 @@
 import { ChartText, CHART_TEXT_SIZE } from './ChartText';
-import type { Box, Polyline } from './geometry/placeLabel';
-import { placeLabel } from './geometry/placeLabel';
+import { placeLabel, type Box, type Obstacles } from './geometry/placeLabel';
 import { textWidth } from './geometry/textWidth';
 
 const LINE = 16;
@@ -15,14 +14,13 @@ export function readingBox(
   texts: readonly ReadingText[],
   point: { x: number; y: number },
   bounds: Box,
-  lines: readonly Polyline[],
-  taken: readonly Box[] = [],
+  obstacles: Obstacles,
 ): Box {
   const size = {
     width: Math.max(...texts.map(({ text }) => textWidth(text, CHART_TEXT_SIZE))),
     height: texts.length * LINE,
   };
-  return placeLabel(point, size, bounds, lines, taken);
+  return placeLabel(point, size, bounds, obstacles);
 }
 
 /** One or more lines of a reading in the box that was found for them, written from the side of their point. */
@@ -37,6 +35,7 @@ export function Reading(props: { texts: readonly ReadingText[]; box: Box; from: 
       anchor={leftOfPoint ? 'end' : 'start'}
       tone={strong ? 'ink' : 'soft'}
       strong={strong}
+      halo
     >
       {text}
     </ChartText>

@@ -73,7 +73,7 @@ export function Button(props: ButtonProps) {
       // A link hands its style on through a slot, which takes no function.
       style={href ? box({ pressed: false, hovered: false }) : box}
     >
-      {busy ? <ActivityIndicator size="small" color={ink} /> : null}
+      {busy ? <ActivityIndicator size="small" color={ink} aria-hidden /> : null}
       <Txt strong style={{ color: ink }}>
         {label}
       </Txt>

@@ -8,7 +8,7 @@ export function Loading({ what }: { what: string }) {
   const { colours } = useTheme();
   return (
     <View role="status" style={styles.box}>
-      <ActivityIndicator color={colours.soft} />
+      <ActivityIndicator color={colours.soft} aria-hidden />
       <Txt tone="soft">{what}</Txt>
     </View>
   );

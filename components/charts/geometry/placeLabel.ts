@@ -13,6 +13,15 @@ export interface Polyline {
   y: ArrayLike<number>;
 }
 
+/** What a label keeps clear of. */
+export interface Obstacles {
+  /** Never to be lain on. */
+  lines: readonly Polyline[];
+  /** To be crossed rather than to wander off, e.g. the cursor. */
+  soft?: readonly Polyline[];
+  taken?: readonly Box[];
+}
+
 /**
  * Where a label of a size stands beside a point without lying on a line: the nearest free place of those right and left,
  * above and below, within the bounds; where none is free, the one that hides least.
@@ -21,8 +30,7 @@ export function placeLabel(
   point: { x: number; y: number },
   size: { width: number; height: number },
   bounds: Box,
-  lines: readonly Polyline[],
-  taken: readonly Box[] = [],
+  { lines, soft = [], taken = [] }: Obstacles,
   gap = 8,
 ): Box {
   let best: Box | null = null;
@@ -31,14 +39,12 @@ export function placeLabel(
   const left = point.x - gap - size.width;
   const leftmost = Math.max(left, bounds.x);
   const rightmost = Math.min(right, bounds.x + bounds.width - size.width);
-  // Beside the point first; then as far aside as the bounds allow, over or under it; then beyond what stands next to it.
+  // Beside the point first; then as far aside as the bounds allow, over or under it.
   const columns = [
     { x: right, shift: 0 },
     { x: left, shift: 0 },
     { x: leftmost, shift: leftmost - left },
     { x: rightmost, shift: right - rightmost },
-    ...SHIFTS.map((shift) => ({ x: right + shift, shift })),
-    ...SHIFTS.map((shift) => ({ x: left - shift, shift })),
   ];
   const rows = Math.ceil(bounds.height / STEP);
   for (let row = 0; row <= rows && row * STEP < bestCost; row++) {
@@ -46,10 +52,8 @@ export function placeLabel(
       for (const up of row === 0 ? [0] : [-1, 1]) {
         const box = { x, y: point.y - size.height / 2 + up * row * STEP, ...size };
         if (!within(box, bounds) || covers(box, point)) continue;
-        const hidden =
-          lines.reduce((sum, each) => sum + crossings(each, box), 0) +
-          10 * taken.filter((each) => overlap(each, box)).length;
-        const cost = hidden * HIDING + row * STEP + shift;
+        const hidden = crossed(lines, box) + 10 * taken.filter((each) => overlap(each, box)).length;
+        const cost = hidden * HIDING + crossed(soft, box) * CROSSING + row * STEP + shift;
         if (cost >= bestCost) continue;
         best = box;
         bestCost = cost;
@@ -59,11 +63,11 @@ export function placeLabel(
   return best ?? clamp({ x: point.x + gap, y: point.y, ...size }, bounds);
 }
 
-/** Steps up and down and shifts aside that are tried, px. */
+/** Step up and down that is tried, px. */
 const STEP = 4;
-const SHIFTS = [16, 32, 48, 64];
-/** A label on a line is worse than any way off. */
+/** A label on a line is worse than any way off; one across the cursor as bad as this way off, px. */
 const HIDING = 10_000;
+const CROSSING = 40;
 /** Air about a label, px. */
 const CLEAR = 3;
 
@@ -84,6 +88,9 @@ const clamp = (box: Box, bounds: Box): Box => ({
   x: Math.max(bounds.x, Math.min(box.x, bounds.x + bounds.width - box.width)),
   y: Math.max(bounds.y, Math.min(box.y, bounds.y + bounds.height - box.height)),
 });
+
+const crossed = (lines: readonly Polyline[], box: Box) =>
+  lines.reduce((sum, each) => sum + crossings(each, box), 0);
 
 /** How many stretches of a line pass through the box, with a little air around it. */
 function crossings({ x, y }: Polyline, box: Box): number {
