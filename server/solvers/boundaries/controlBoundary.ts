@@ -49,7 +49,7 @@ export function createControlBoundary(
     if (velocity >= celerity) {
       const wanted = rootNear(surplus, bed[section], last, step);
       const held = wanted > inside.stage && forceAt(wanted, out) > forceAt(inside.stage, out);
-      return endFlux(held ? wanted : inside.stage, inside.flow, inside.path);
+      return held ? endFlux(wanted, inside.flow) : endFlux(inside.stage, inside.flow, inside.path);
     }
     const eta = rootNear(mismatch, bed[section], last, step);
     if (eta <= bed[section]) return endFlux(inside.stage, 0);

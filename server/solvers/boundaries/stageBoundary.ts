@@ -32,7 +32,9 @@ export function createStageBoundary(
     const leaving = outward * inside.velocity;
     if (inside.area > 0 && leaving >= inside.celerity) {
       const held = forceAt(eta, inside.flow) > forceAt(inside.stage, inside.flow);
-      return endFlux(held && eta > inside.stage ? eta : inside.stage, inside.flow, inside.path);
+      return held && eta > inside.stage
+        ? endFlux(eta, inside.flow)
+        : endFlux(inside.stage, inside.flow, inside.path);
     }
     const a = tables.areaAt(section, eta);
     const c = celerityAt(eta);

@@ -2,6 +2,9 @@ import type { Workspace } from '../workspace';
 import type { CellTables } from './cellTables';
 import { LEVEL_FIELDS, LEVEL_LAYOUT, TABLE_STRIDE } from './sectionTable';
 
+/** Keeps the friction factor of the last trace of water finite; far below any A V² that moves. */
+const TINY = 1e-30;
+
 /** Sets the area of a cell and all that follows from it: stage, top width, celerity, friction factor. */
 export interface CellState {
   /** From an area (m², not negative). */
@@ -65,7 +68,7 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     width[i] = b;
     reach[i] = quarter;
     celerity[i] = sqrt(fourG * quarter);
-    friction[i] = gravity / (a * v * v);
+    friction[i] = gravity / (a * v * v + TINY);
   }
 
   function placeAtStage(i: number, eta: number): void {

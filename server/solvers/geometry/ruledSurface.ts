@@ -49,7 +49,8 @@ export function sectionAt(ruled: RuledSurface, w: number): SectionShape {
   for (let k = 0; k < nodes; k++) {
     x[k] = mix(ruled.xa[k], ruled.xb[k], w);
     z[k] = mix(ruled.za[k], ruled.zb[k], w);
-    if (z[k] < bed) bed = z[k];
+    // A slot without width at the foot of a wall holds no water.
+    if (k > 0 && x[k] > x[k - 1]) bed = Math.min(bed, z[k - 1], z[k]);
   }
   const zoneSide: number[] = [];
   for (let k = 0; k < nodes - 1; k++) {

@@ -26,6 +26,7 @@ export function createTimeStep(
   const { abs } = Math;
   let lateralSpeed = 0;
   for (let i = 1; i <= n; i++) {
+    if (laterals.largest[i] === 0) continue;
     const width = tables.widthAt(i, bed[i] + 0.1);
     lateralSpeed = Math.max(lateralSpeed, Math.cbrt((gravity * laterals.largest[i]) / width));
   }

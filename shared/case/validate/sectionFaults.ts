@@ -85,13 +85,15 @@ function checkPoints(faults: Faults, path: string, value: unknown): Ends {
     );
     return null;
   }
-  if (points[1][0] === points[0][0] && points[1][1] > points[0][1]) {
+  const inner = points.findIndex(([offset]) => offset > points[0][0]) - 1;
+  if (points[inner][1] > points[0][1]) {
     faults.add(
       `${path}[0]`,
       'starts a wall that rises into the section; begin at the top of the wall',
     );
   }
-  if (points[last][0] === points[last - 1][0] && points[last][1] < points[last - 1][1]) {
+  const outer = points.findIndex(([offset]) => offset === points[last][0]);
+  if (points[outer][1] > points[last][1]) {
     faults.add(
       `${path}[${last}]`,
       'ends a wall that falls out of the section; end at the top of the wall',
