@@ -1,7 +1,6 @@
 import { Link, type Href } from 'expo-router';
 import { useId } from 'react';
 import {
-  ActivityIndicator,
   Pressable,
   StyleSheet,
   View,
@@ -11,6 +10,7 @@ import {
 import { radius, space, touch, type Colours } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
 import { aria } from './aria';
+import { Spinner } from './Spinner';
 import { useIsStretched } from './stretchedButtons';
 import { Txt } from './Txt';
 
@@ -73,7 +73,7 @@ export function Button(props: ButtonProps) {
       // A link hands its style on through a slot, which takes no function.
       style={href ? box({ pressed: false, hovered: false }) : box}
     >
-      {busy ? <ActivityIndicator size="small" color={ink} aria-hidden /> : null}
+      {busy ? <Spinner size="small" colour={ink} /> : null}
       <Txt strong style={{ color: ink }}>
         {label}
       </Txt>

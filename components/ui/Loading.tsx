@@ -1,6 +1,7 @@
-import { ActivityIndicator, StyleSheet, View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 import { space } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
+import { Spinner } from './Spinner';
 import { Txt } from './Txt';
 
 /** Says what is being waited for, e.g. "Reading the survey…". */
@@ -8,7 +9,7 @@ export function Loading({ what }: { what: string }) {
   const { colours } = useTheme();
   return (
     <View role="status" style={styles.box}>
-      <ActivityIndicator color={colours.soft} aria-hidden />
+      <Spinner colour={colours.soft} />
       <Txt tone="soft">{what}</Txt>
     </View>
   );

@@ -3,8 +3,12 @@ import { mkdtempSync, mkdirSync, openSync } from 'node:fs';
 import { createServer } from 'node:net';
 import path from 'node:path';
 
-/** Starts the whole product as `npm start` does, on its own data directory and port, with the demo data. */
+/**
+ * Starts the whole product as `npm start` does, on its own data directory and port, with the demo data.
+ * With SPATE_E2E_URL the browser tests visit a product that runs already.
+ */
 export default async function productSetup(): Promise<void> {
+  if (process.env.SPATE_E2E_URL) return;
   const root = path.resolve(__dirname, '../..');
   mkdirSync(path.join(root, '.data-test'), { recursive: true });
   const dataDir = mkdtempSync(path.join(root, '.data-test/e2e-'));

@@ -3,6 +3,7 @@ import { rmSync } from 'node:fs';
 /** Stops the product as Ctrl-C does, and waits until it is gone; what it stored goes with it. */
 export default async function productTeardown(): Promise<void> {
   const pid = Number(process.env.SPATE_E2E_PID);
+  if (!pid) return;
   process.kill(pid, 'SIGINT');
   const deadline = Date.now() + 20_000;
   while (alive(pid)) {
