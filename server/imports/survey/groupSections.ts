@@ -1,4 +1,3 @@
-import { LIMITS } from '../../../shared/limits';
 import { METRES_PER } from '../headings/lengthUnits';
 import type { DecimalMark } from '../../../shared/numbers/decimalMark';
 import { showNumber } from '../numbers/showNumber';
@@ -122,7 +121,7 @@ function keyOf(
     if (chainage === null || isBad(chainage)) return current?.id ?? null;
     return showNumber(chainage).replaceAll(',', '');
   }
-  const id = cellText(cells[place.column]).slice(0, LIMITS.textShort);
+  const id = cellText(cells[place.column]);
   if (id) return id;
   const metres = metresOf(chainage, sheet);
   const sameChainage = metres === null || current?.chainage == null || metres === current.chainage;

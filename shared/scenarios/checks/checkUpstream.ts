@@ -4,6 +4,9 @@ import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
 
+/** s; a hundred days, slower than any flood. */
+const MAX_TIME_TO_PEAK = 100 * 86_400;
+
 const notNegative = (flow: number) =>
   flow < 0 ? 'Inflow cannot be negative; water is taken out by a lateral.' : null;
 
@@ -73,8 +76,8 @@ function checkGenerated(
   if (hasBase && hasPeak && peakFlow! < baseFlow!)
     findings.fault('upstream.peakFlow', 'The peak includes the base flow and cannot be below it.');
   findings.number('upstream.timeToPeak', inflow.timeToPeak, 'Give the time from start to peak.', {
-    when: (time) => time <= 0,
-    say: 'Time to peak is above 0.',
+    when: (time) => time <= 0 || time > MAX_TIME_TO_PEAK,
+    say: 'Time to peak is above 0 and at most 100 days.',
   });
   if (inflow.shape === 'triangle')
     findings.number(

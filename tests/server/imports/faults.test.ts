@@ -185,6 +185,26 @@ describe('sections', () => {
   });
 });
 
+test('walls at the ends go up outwards', () => {
+  const rows = soundRows();
+  rows[1][2] = 0;
+  rows[0][3] = 20.5;
+  expect(told(read(sheetOf(rows)))).toEqual(['Main 2: The wall at the left end falls outwards']);
+  const up = soundRows();
+  up[3][2] = 20;
+  expect(told(read(sheetOf(up)))).toEqual([]);
+});
+test('ids and chainages that are too long', () => {
+  const rows = soundRows().map((row): Row =>
+    row[0] === 'XS-02' ? ['X'.repeat(101), ...row.slice(1)] : row,
+  );
+  expect(told(read(sheetOf(rows)))).toEqual(['Main 7: Section id is too long']);
+  const far = soundRows().map((row): Row =>
+    row[0] === 'XS-03' ? [row[0], 2e7, row[2], row[3]] : row,
+  );
+  expect(told(read(sheetOf(far)))).toEqual(['Main 12 B: Chainage 20,000,000 cannot be']);
+});
+
 describe('bank marks', () => {
   const withMarks = (marks: (string | null)[]) =>
     read(

@@ -1,3 +1,4 @@
+import { validateCase } from '../../../shared/case/validateCase';
 import { buildCase } from '../../../shared/scenarios/buildCase';
 import { checkScenario } from '../../../shared/scenarios/checkScenario';
 import { newScenario, outletSlopeOf, proposals } from '../../../shared/scenarios/proposals';
@@ -138,6 +139,77 @@ describe('numerical settings', () => {
   ])('%j', (change, paths) => expect(faultsOf(numerics(change))).toEqual(paths));
   test('cells longer than the spacing of the sections are doubted', () => {
     expect(doubtsOf(numerics({ cellSize: 600 }))).toEqual(['numerics.cellSize']);
+  });
+});
+
+describe('what has no fault here is refused by nobody later', () => {
+  // Each number and list of a sound body is replaced by each of these, in bodies of every kind.
+  const VALUES = [
+    null,
+    -1,
+    0,
+    1e-9,
+    0.5,
+    1,
+    7,
+    2000,
+    1e5,
+    1e9,
+    [],
+    [0],
+    [0, 1],
+    [5, 5],
+    [3, 1],
+    [-1, 2],
+    [0, 10, 20],
+  ];
+  const bodies: Partial<ScenarioBody>[] = [
+    {},
+    {
+      upstream: { kind: 'table', times: [0, 10], flows: [1, 2] },
+      downstream: { kind: 'rating', stages: [8, 9], flows: [0, 5] },
+    },
+    {
+      upstream: { kind: 'stage', times: [0, 9], stages: [12, 13] },
+      downstream: { kind: 'stage', times: [0, 9], stages: [9, 10] },
+    },
+    {
+      laterals: [{ name: '', from: 5, to: 9, times: [0, 1], flows: [1, 2] }],
+      initial: { kind: 'still', stage: 12 },
+    },
+    { initial: { kind: 'profile', chainages: [0, 9], stages: [12, 11], flows: [1, 1] } },
+    {
+      initial: { kind: 'dam', chainage: 700, stageAbove: 15, stageBelow: 12 },
+      upstream: { kind: 'wall' },
+      downstream: { kind: 'wall' },
+    },
+  ];
+  const variants = bodies.flatMap((change) => {
+    const text = JSON.stringify(sound(change));
+    const leaves = [...text.matchAll(/:(-?[\d.e+-]+|null|\[[-\d.,e+]*\])(?=[,}])/g)];
+    return leaves.flatMap((leaf) =>
+      VALUES.map(
+        (value) =>
+          text.slice(0, leaf.index + 1) +
+          JSON.stringify(value) +
+          text.slice(leaf.index + leaf[0].length),
+      ),
+    );
+  });
+  test(`${variants.length} bodies`, () => {
+    let routable = 0;
+    for (const text of variants) {
+      if (!scenarioSchema.isValidSync(JSON.parse(text))) continue;
+      const body = scenarioSchema.cast(JSON.parse(text)) as ScenarioBody;
+      if (checkScenario(body, sections).faults.length > 0) continue;
+      routable++;
+      expect({ text, faults: validateCase(buildCase(body, sections, 't')).faults }).toEqual({
+        text,
+        faults: [],
+      });
+    }
+    expect(routable).toBeGreaterThan(200);
+    expect(routable).toBeLessThan(0.8 * variants.length);
   });
 });
 

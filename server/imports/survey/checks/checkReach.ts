@@ -5,7 +5,9 @@ import { isNumber, type RawSection } from '../rawTypes';
 import { METRES_PER } from '../../headings/lengthUnits';
 
 /** Nearer than this two sections are one place (m). */
-const SAME_PLACE = 1e-6;
+const SAME_PLACE = 1e-3;
+/** Longer than any river. */
+const MAX_CHAINAGE_M = 1e7;
 
 /** What only all sections together show: places taken twice, too few or too many of them, a bed that climbs downstream. */
 export function checkReach(sections: RawSection[], faults: FaultList) {
@@ -23,6 +25,18 @@ export function checkReach(sections: RawSection[], faults: FaultList) {
       'Only one section was found',
       `All points stand under ${first.id}. A reach needs two sections or more.`,
     );
+  for (const section of sections) {
+    if (Math.abs(section.chainage ?? 0) > MAX_CHAINAGE_M)
+      faults.fault(
+        {
+          sheet: section.sheet,
+          row: section.firstRow,
+          column: section.fields.get('chainage')?.column,
+        },
+        `Chainage ${section.chainageText} cannot be`,
+        `Section ${section.id}. Is its unit right?`,
+      );
+  }
   checkTwins(sections, faults);
   // A slipped elevation may turn the bed; it is looked at when the rest is sound.
   if (!faults.refuses) doubtClimbingBed(sections, faults);
