@@ -12,8 +12,19 @@ export function buildCleanup() {
       }
     }
   }
+  const add = (step: () => Promise<void> | void) => void steps.push(step);
+
+  /** Something that is starting will be stopped, even where the end comes before it has started. */
+  function stopLater<T extends { stop: () => Promise<void> }>(starting: Promise<T>): Promise<T> {
+    add(async () => {
+      const started = await starting.catch(() => null);
+      await started?.stop();
+    });
+    return starting;
+  }
   return {
-    add: (step: () => Promise<void> | void) => void steps.push(step),
+    add,
+    stopLater,
     run: (): Promise<void> => (running ??= undo()),
   };
 }

@@ -27,11 +27,12 @@ export async function prepareDatabase(
 
 async function startOwn(dataDir: string, cleanup: Cleanup): Promise<string> {
   ensureDebianPackages(['mariadb-server']);
-  const database = await startDatabase({
-    dir: path.resolve(dataDir),
-    password: readSecrets(dataDir).databasePassword,
-  });
-  cleanup.add(database.stop);
+  const database = await cleanup.stopLater(
+    startDatabase({
+      dir: path.resolve(dataDir),
+      password: readSecrets(dataDir).databasePassword,
+    }),
+  );
   database.sql(
     'CREATE DATABASE IF NOT EXISTS spate CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci',
   );

@@ -31,8 +31,7 @@ async function start(cleanup: Cleanup): Promise<void> {
   const webDir = process.env.WEB_DIR ?? (await ensureWebExport(ROOT, cleanup));
 
   const env = settings(databaseUrl, webDir);
-  const running = await startServer(env);
-  cleanup.add(running.stop);
+  const running = await cleanup.stopLater(startServer(env));
   if (env.demoData) console.log(demoAccounts());
   console.log(`\nSpate serves on ${running.url}   (Ctrl-C stops it)`);
 }

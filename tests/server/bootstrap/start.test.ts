@@ -51,6 +51,16 @@ describe('a start', () => {
     expect(existsSync(path.join(place.dir, 'spate.pid'))).toBe(false);
   });
 
+  test('that is interrupted before it serves leaves nothing running', async () => {
+    const product = startProduct(await settingsOf(place));
+    while (databasesOn(place.dir).length === 0 && product.process.exitCode === null)
+      await new Promise((resolve) => setTimeout(resolve, 20));
+    product.process.kill('SIGINT');
+    expect(await product.ended).toBe(0);
+    expect(product.said()).not.toContain('serves on');
+    expect(databasesOn(place.dir)).toEqual([]);
+  });
+
   test('goes on with its data after it was killed: the database that was left is taken over', async () => {
     const settings = await settingsOf(place);
     const killed = startProduct(settings);
