@@ -1,6 +1,7 @@
-import { useState, type ReactNode } from 'react';
-import { StyleSheet, View, type LayoutChangeEvent } from 'react-native';
+import type { ReactNode } from 'react';
+import { StyleSheet, View } from 'react-native';
 import Svg from 'react-native-svg';
+import { useWidth } from './useWidth';
 
 interface Props {
   /** What the drawing shows, in a sentence: all that a screen reader is told of it. */
@@ -20,11 +21,10 @@ export interface ChartSize {
 }
 
 /** A drawing as wide as the place it is given. */
-export function ChartBox({ label, height, initialWidth = 0, children, over }: Props) {
-  const [width, setWidth] = useState(initialWidth);
-  const measure = (event: LayoutChangeEvent) => setWidth(event.nativeEvent.layout.width);
+export function ChartBox({ label, height, initialWidth, children, over }: Props) {
+  const { width, measured } = useWidth(initialWidth);
   return (
-    <View style={[styles.box, { height }]} onLayout={measure} role="img" aria-label={label}>
+    <View style={[styles.box, { height }]} {...measured} role="img" aria-label={label}>
       {width > 0 ? (
         <Svg width={width} height={height} style={styles.drawing}>
           {children({ width, height })}

@@ -1,5 +1,5 @@
-import { memo, useMemo, useState } from 'react';
-import { StyleSheet, View, type LayoutChangeEvent } from 'react-native';
+import { memo, useMemo } from 'react';
+import { StyleSheet, View } from 'react-native';
 import Svg, { Circle, Line, Path } from 'react-native-svg';
 import { scaleLinear } from 'd3-scale';
 import { touch } from '@/components/theme/tokens';
@@ -10,6 +10,7 @@ import { nearestIndex } from './geometry/interpolate';
 import { reachCurve } from './geometry/reachCurve';
 import { placesAlong, placeName, type ReachPlace } from './geometry/placesAlong';
 import { SliderSurface } from './SliderSurface';
+import { useWidth } from './useWidth';
 
 export interface ReachRibbonProps {
   sections: readonly { id: string; chainage: number }[];
@@ -31,7 +32,7 @@ const SWAY = 7;
 export function ReachRibbon(props: ReachRibbonProps) {
   const { sections, stations = NONE, advice = NONE, at, onChange, unitSystem } = props;
   const { colours } = useTheme();
-  const [width, setWidth] = useState(props.initialWidth ?? 0);
+  const { width, measured } = useWidth(props.initialWidth);
   const places = useMemo(() => placesAlong(sections, stations), [sections, stations]);
   const stops = useMemo(() => places.map((place) => place.chainage), [places]);
   if (!places.length) return null;
@@ -43,9 +44,8 @@ export function ReachRibbon(props: ReachRibbonProps) {
   const curve = reachCurve(INSET, width - INSET, touch / 2, SWAY);
   const value = at ?? stops[0];
   const chosen = x(value);
-  const measure = (event: LayoutChangeEvent) => setWidth(event.nativeEvent.layout.width);
   return (
-    <View onLayout={measure} style={styles.box}>
+    <View {...measured} style={styles.box}>
       <SliderSurface
         label="Place on the reach"
         stops={stops}

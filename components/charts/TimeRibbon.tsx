@@ -1,5 +1,5 @@
-import { memo, useId, useMemo, useState } from 'react';
-import { StyleSheet, View, type LayoutChangeEvent } from 'react-native';
+import { memo, useId, useMemo } from 'react';
+import { StyleSheet, View } from 'react-native';
 import Svg, { Circle, ClipPath, Defs, Line, Path, Rect } from 'react-native-svg';
 import { scaleLinear } from 'd3-scale';
 import { useTheme } from '@/components/theme/useTheme';
@@ -11,6 +11,7 @@ import { thinSeries } from './geometry/thinSeries';
 import { timeTicks } from './geometry/ticks';
 import { timeWords } from './geometry/timeWords';
 import { SliderSurface } from './SliderSurface';
+import { useWidth } from './useWidth';
 
 interface Shape {
   /** Inflow of the run, s and m³/s; empty where the upstream end is not an inflow. */
@@ -39,11 +40,11 @@ const INSET = 8;
 /** The inflow hydrograph is the slider: drag along the flood to move in time. */
 export function TimeRibbon({ t, onChange, step, startsAt, ...shape }: TimeRibbonProps) {
   const { start = 0, end } = shape;
-  const [width, setWidth] = useState(shape.initialWidth ?? 0);
+  const { width, measured } = useWidth(shape.initialWidth);
   const stops = useMemo(() => timeStops(start, end, step), [start, end, step]);
   const x = timeScale(start, end, width);
   return (
-    <View onLayout={widthOf(setWidth)} style={styles.box}>
+    <View {...measured} style={styles.box}>
       <SliderSurface
         label="Time"
         stops={stops}
@@ -69,10 +70,10 @@ export interface TimeProgressProps extends Shape {
 
 /** The same flood filling while it computes. */
 export function TimeProgress({ reached, progress, valueText, ...shape }: TimeProgressProps) {
-  const [width, setWidth] = useState(shape.initialWidth ?? 0);
+  const { width, measured } = useWidth(shape.initialWidth);
   return (
     <View
-      onLayout={widthOf(setWidth)}
+      {...measured}
       style={styles.box}
       role="progressbar"
       aria-label="Progress of the run"
@@ -139,9 +140,6 @@ function anchorOf(px: number, width: number) {
 
 const timeScale = (start: number, end: number, width: number) =>
   scaleLinear([start, end], [INSET, Math.max(INSET + 1, width - INSET)]);
-
-const widthOf = (set: (width: number) => void) => (event: LayoutChangeEvent) =>
-  set(event.nativeEvent.layout.width);
 
 function timeStops(start: number, end: number, step: number): number[] {
   const count = Math.max(1, Math.min(20_000, Math.ceil((end - start) / step - 1e-9)));
