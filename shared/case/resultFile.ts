@@ -72,6 +72,7 @@ export type WarningCode =
   | 'supercritical'
   | 'initialNotSettled'
   | 'initialDry'
+  | 'initialLimited'
   | 'damMoved'
   | 'lateralLimited'
   | 'frictionless'

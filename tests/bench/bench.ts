@@ -1,6 +1,4 @@
-import { existsSync } from 'node:fs';
-import { join } from 'node:path';
-
+import { demoCase } from '../../seed/demoCase';
 import { routeCase } from '../../server/solvers';
 import type { CaseFile } from '../../shared/case/caseFile';
 import { compileKernel, secondsInC } from './kernelInC';
@@ -21,7 +19,7 @@ function main(): void {
   const river = naturalReach(20_000, 25);
   benchCase('20 km of river, 12 h flood, cells of 25 m', river);
   const demo = demoCase();
-  if (demo) benchCase(`Demo: ${demo.title}`, demo);
+  benchCase(`Demo: ${demo.title}`, demo);
 }
 
 function benchKernel(cells: number, program: string | null): void {
@@ -54,11 +52,4 @@ function benchCase(name: string, caseFile: CaseFile): void {
 function median(values: number[]): number {
   const sorted = [...values].sort((a, b) => a - b);
   return sorted[Math.floor(sorted.length / 2)];
-}
-
-/** The demo reach, where the seed data are there. */
-function demoCase(): CaseFile | null {
-  if (!existsSync(join(__dirname, '../../seed/demoCase.ts'))) return null;
-  const seed = require('../../seed/demoCase') as { demoCase(): CaseFile };
-  return seed.demoCase();
 }

@@ -8,6 +8,9 @@ import { createSeries } from '../sources/series';
 import type { Workspace } from '../workspace';
 import { steadyState } from './steadyState';
 
+/** A given initial flow faster than this Froude number is no flow but a slip of the pen. */
+const FASTEST_FROUDE = 10;
+
 /** Puts the initial water into the cells. Tells whether it still has to settle. */
 export function setInitialState(
   caseFile: CaseFile,
@@ -18,7 +21,7 @@ export function setInitialState(
   laterals: Laterals,
   warn: (warning: RunWarning) => void,
 ): boolean {
-  const { n, flow, bed, stage, dryDepth } = workspace;
+  const { n, area, flow, bed, stage, celerity, dryDepth } = workspace;
   const { initial } = caseFile;
   const put = (i: number, eta: number, q: number): void => {
     cellState.placeAtStage(i, Math.max(eta, bed[i]));
@@ -32,8 +35,24 @@ export function setInitialState(
     case 'profile': {
       const stageAt = createSeries(initial.chainages, initial.stages);
       const flowAt = createSeries(initial.chainages, initial.flows);
+      let limited = 0;
       for (let i = 1; i <= n; i++) {
         put(i, stageAt(grid.chainage[i - 1]), flowAt(grid.chainage[i - 1]));
+        const most = FASTEST_FROUDE * area[i] * celerity[i];
+        if (Math.abs(flow[i]) <= most) continue;
+        flow[i] = Math.sign(flow[i]) * most;
+        if (limited === 0) limited = i;
+      }
+      if (limited > 0) {
+        const chainage = grid.chainage[limited - 1];
+        warn({
+          code: 'initialLimited',
+          message:
+            `The initial profile asks for more flow than its water can carry, first at chainage ` +
+            `${chainage.toFixed(0)} m: it was cut to Froude number ${FASTEST_FROUDE}. Check its stages against the bed.`,
+          chainage,
+          time: 0,
+        });
       }
       return false;
     }
@@ -65,8 +84,8 @@ export function setInitialState(
         warn({
           code: 'initialDry',
           message:
-            'Nothing flows in at the start, so the reach begins with still water up to the outlet stage and dry ' +
-            'beyond it. Start the inflow with a base flow if the river carries water.',
+            'Nothing flows in at the start, so the reach begins with still water up to the outlet stage and in ' +
+            'its pools, and dry elsewhere. Start the inflow with a base flow if the river carries water.',
           chainage: null,
           time: 0,
         });
