@@ -20,6 +20,7 @@ async function start(cleanup: Cleanup): Promise<void> {
   const settings = (databaseUrl: string, webDir?: string) =>
     readEnv({
       DEMO_DATA: 'yes',
+      LOG_LEVEL: 'warn',
       ...process.env,
       DATABASE_URL: databaseUrl,
       WEB_DIR: webDir ?? process.env.WEB_DIR,
