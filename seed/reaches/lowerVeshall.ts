@@ -146,7 +146,7 @@ function bridge(id: string, random: () => number): Ground {
   const jitter = (size: number) => size * (2 * random() - 1);
   const bank = bankAbove(BRIDGE);
   const bed = bedAt(BRIDGE);
-  const half = 13;
+  const half = 14.5;
   const road = bank + 3.4;
   const rise: [number, number][] = [
     [half + 0.8, bank + 0.4],
