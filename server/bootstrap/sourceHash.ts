@@ -13,7 +13,6 @@ const SOURCES = [
   'babel.config.js',
   'metro.config.js',
   'tsconfig.json',
-  'package.json',
   'package-lock.json',
 ];
 
