@@ -70,6 +70,17 @@ export function buildSections(
   });
 }
 
+/** Sections at both ends of a reach and in the middle of each of its cells, so that every cell has its exact bed. */
+export function buildSectionsAtCells(
+  length: number,
+  cells: number,
+  manning: number,
+  pointsAt: (chainage: number) => SectionPoint[],
+): SectionInput[] {
+  const middles = Array.from({ length: cells }, (_, i) => ((i + 0.5) * length) / cells);
+  return [0, ...middles, length].map((x) => buildSection(x, pointsAt(x), manning));
+}
+
 /** A flow or stage that never changes, as the series of a boundary. */
 export const steadyFlow = (flow: number) => ({ times: [0], flows: [flow] });
 export const steadyStage = (stage: number) => ({ times: [0], stages: [stage] });

@@ -1,7 +1,7 @@
 import { bumpFlow, type BumpRegime } from '@/server/solvers/exact/bumpFlow';
 import {
   buildCase,
-  buildSections,
+  buildSectionsAtCells,
   GRAVITY,
   openRectanglePoints,
   steadyFlow,
@@ -11,10 +11,8 @@ import { errorNorms } from '../../helpers/solvers/errorNorms';
 import { orderTable } from '../../helpers/solvers/orderTable';
 import { routeChecked } from '../../helpers/solvers/routeChecked';
 
-/** Frictionless flow over a bump, from still water until nothing moves any more. Sections lie at the middles of the
- *  cells of every grid, so that each cell has its exact bed. */
+/** Frictionless flow over a bump, from still water until nothing moves any more. */
 const GRIDS = [50, 100, 200];
-const SECTIONS = 401;
 /** Time until the flow is even, s. */
 const SETTLED = { subcritical: 300, transcritical: 150, jump: 450 };
 
@@ -22,7 +20,7 @@ function settle(regime: BumpRegime, cells: number) {
   const exact = bumpFlow(regime, GRAVITY);
   const result = routeChecked(
     buildCase({
-      sections: buildSections(0, exact.length, SECTIONS, 0, (x) =>
+      sections: buildSectionsAtCells(exact.length, cells, 0, (x) =>
         openRectanglePoints(1, exact.bed(x)),
       ),
       upstream: { kind: 'inflow', ...steadyFlow(exact.flow) },

@@ -1,7 +1,7 @@
 import { macDonald, type MacDonaldCase } from '@/server/solvers/exact/macDonald';
 import {
   buildCase,
-  buildSections,
+  buildSectionsAtCells,
   GRAVITY,
   steadyFlow,
   steadyStage,
@@ -11,17 +11,15 @@ import { errorNorms } from '../../helpers/solvers/errorNorms';
 import { orderTable } from '../../helpers/solvers/orderTable';
 import { routeChecked } from '../../helpers/solvers/routeChecked';
 
-/** Steady flow with Manning friction on a bed made for a known depth. Sections at the middles of the finest cells,
- *  2.5 m or 0.25 m apart. */
+/** Steady flow with Manning friction on a bed made for a known depth. Sections at the cells. */
 function settle(name: MacDonaldCase, cellSize: number) {
   const exact = macDonald(name, GRAVITY);
   const length = exact.to - exact.from;
-  const spacing = name === 'D' ? 0.25 : 2.5;
   const place = (chainage: number) => exact.from + chainage;
   const fastOutlet = name === 'B';
   const result = routeChecked(
     buildCase({
-      sections: buildSections(0, length, length / spacing + 1, exact.manning, (chainage) =>
+      sections: buildSectionsAtCells(length, length / cellSize, exact.manning, (chainage) =>
         trapezoidPoints(exact.width, 0, exact.bed(place(chainage)), 5),
       ),
       upstream: { kind: 'inflow', ...steadyFlow(exact.flow) },

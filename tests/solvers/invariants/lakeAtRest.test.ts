@@ -34,8 +34,9 @@ describe('still water over wild sections with dry islands', () => {
     const dry = cells.bed.filter((bed) => bed >= LEVEL).length;
     expect(dry).toBeGreaterThan(20);
     expect(dry).toBeLessThan(cells.bed.length / 2);
+    // A film thinner than the dry depth of a millimetre counts as dry.
     cells.bed.forEach((bed, i) =>
-      expect(cells.initialStage[i]).toBeCloseTo(Math.max(bed, LEVEL), 9),
+      expect(cells.initialStage[i]).toBeCloseTo(LEVEL - bed > 1e-3 ? LEVEL : bed, 9),
     );
   });
 
