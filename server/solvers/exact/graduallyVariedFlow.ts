@@ -3,11 +3,13 @@ import { solveOde } from './tools/solveOde';
 /** Water surface of steady flow in a channel of any shape. From (Q²/A)_x + g A η_x + g A Q|Q|/K² = 0 with
  *  A = A(x, η), A_x at constant stage, and B = A_η:
  *
- *    η_x = [ (Q/A)² A_x - 2 (Q/A) Q_x - g A Q|Q|/K² ] / [ g A - (Q/A)² B ]
+ *    η_x = [ (Q/A)² A_x - m (Q/A) Q_x - g A Q|Q|/K² ] / [ g A - (Q/A)² B ]
  *
- *  x chainage, m; η stage, m; Q flow, m³/s; Q_x lateral inflow, m²/s (it brings no momentum along the
- *  channel); K conveyance, m³/s. In a prismatic channel this is Chow's (1959) eq. 9-7; with lateral inflow his
- *  eq. 12-12. Singular at critical flow: start beside it and integrate away from the control. */
+ *  x chainage, m; η stage, m; Q flow, m³/s; Q_x lateral inflow, m²/s; K conveyance, m³/s; m = 2 where water comes in,
+ *  without momentum along the channel, and 1 where it goes out, with its own. In a prismatic channel this is V. T. Chow
+ *  (1959), Open-Channel Hydraulics, eq. 9-7, and with lateral flow his equations of spatially varied flow, sec. 12-1 and
+ *  12-2. Singular at critical flow: start beside it and integrate away from the control.
+ */
 export interface SteadyReach {
   area(x: number, stage: number): number;
   topWidth(x: number, stage: number): number;
@@ -28,10 +30,11 @@ export function surfaceSlope(
   const area = reach.area(x, stage);
   const flow = reach.flow(x);
   const velocity = flow / area;
+  const lateral = reach.lateralInflow(x);
   const friction = (flow * Math.abs(flow)) / reach.conveyance(x, stage) ** 2;
   const forcing =
     velocity * velocity * reach.areaGradient(x, stage) -
-    2 * velocity * reach.lateralInflow(x) -
+    (lateral > 0 ? 2 : 1) * velocity * lateral -
     gravity * area * friction;
   return forcing / (gravity * area - velocity * velocity * reach.topWidth(x, stage));
 }

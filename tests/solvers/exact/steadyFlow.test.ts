@@ -91,6 +91,17 @@ describe('gradually varied flow', () => {
     const [, end] = surfaceProfile(collecting, G, [10, 50], 2);
     const force = (flow: number, depth: number) => flow ** 2 / (G * 3 * depth) + 1.5 * depth ** 2;
     expect(force(5, end)).toBeCloseTo(force(1, 2), 9);
+    // Water that leaves sideways takes its own momentum, and the energy head of the rest stays.
+    const losing = prismaticReach(
+      trapezoid(3, 0),
+      0,
+      0,
+      (x) => 6 - 0.1 * x,
+      () => -0.1,
+    );
+    const [, left] = surfaceProfile(losing, G, [0, 40], 2);
+    const energy = (flow: number, depth: number) => depth + (flow / (3 * depth)) ** 2 / (2 * G);
+    expect(energy(2, left)).toBeCloseTo(energy(6, 2), 9);
   });
 });
 
