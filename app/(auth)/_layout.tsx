@@ -3,6 +3,8 @@ import { Starting } from '@/components/screens/auth/Starting';
 import { safeNext } from '@/components/screens/auth/safeNext';
 import { useSession } from '@/components/queries/SessionProvider';
 
+export { BrokenScreen as ErrorBoundary } from '@/components/layout/BrokenScreen';
+
 /** Who is signed in has no business at the sign-in; one-time links work for everybody. */
 export default function AuthLayout() {
   const { state } = useSession();

@@ -5,6 +5,8 @@ import { entryAddress } from '@/components/screens/auth/entryAddress';
 import { SignInAgain } from '@/components/screens/auth/SignInAgain';
 import { Starting } from '@/components/screens/auth/Starting';
 
+export { BrokenScreen as ErrorBoundary } from '@/components/layout/BrokenScreen';
+
 /** Everything behind the sign-in. */
 export default function MainLayout() {
   const { state } = useSession();
