@@ -137,22 +137,31 @@ function Marks({
     t === null || !series.times.length
       ? null
       : { x: frame.x(t), y: yOf(valueAt(series.times, series.values, t)) };
-  const soft = cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : [];
-  const lines = model.compare ? [model.main, model.compare] : [model.main];
+  const soft = [
+    ...(cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : []),
+    ...(model.compare ? [model.compare] : []),
+  ];
+  const lines = [model.main];
 
   const top = peak ? { x: frame.x(peak.time), y: yOf(peak.value) } : null;
   const peakText = peak
     ? [{ text: `${value(peak.value)} at ${shortTime(peak.time, span)}`, strong: true }]
     : [];
-  const peakBox = top ? readingBox(peakText, top, bounds, { lines, soft }) : null;
   // At the peak itself its own label says all.
   const apart = cursor && !(top && Math.hypot(top.x - cursor.x, top.y - cursor.y) < 6);
   const cursorText =
     t === null ? [] : [{ text: value(valueAt(series.times, series.values, t)), strong: false }];
+  // The reading of the cursor goes first, close to its dot; the peak says its own time wherever it stands.
+  const dots = [top, cursor].flatMap((dot) => (dot ? [around(dot)] : []));
   const cursorBox =
-    cursor && apart
-      ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: peakBox ? [peakBox] : [] })
-      : null;
+    cursor && apart ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: dots }) : null;
+  const peakBox = top
+    ? readingBox(peakText, top, bounds, {
+        lines,
+        soft,
+        taken: cursorBox ? [...dots, cursorBox] : dots,
+      })
+    : null;
   return (
     <>
       {cursor ? (
@@ -185,6 +194,14 @@ function Marks({
     </>
   );
 }
+
+/** The box of a dot. */
+const around = ({ x, y }: { x: number; y: number }) => ({
+  x: x - 5,
+  y: y - 5,
+  width: 10,
+  height: 10,
+});
 
 function sentence(props: HydrographProps, peak: HydrographProps['peak']): string {
   const { label, series, quantity, unitSystem, t } = props;

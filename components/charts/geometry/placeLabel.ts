@@ -17,7 +17,7 @@ export interface Polyline {
 export interface Obstacles {
   /** Never to be lain on. */
   lines: readonly Polyline[];
-  /** To be crossed rather than to wander off, e.g. the cursor. */
+  /** To be crossed rather than to wander off, e.g. the cursor; the label then needs a halo. */
   soft?: readonly Polyline[];
   taken?: readonly Box[];
 }
@@ -52,8 +52,14 @@ export function placeLabel(
       for (const up of row === 0 ? [0] : [-1, 1]) {
         const box = { x, y: point.y - size.height / 2 + up * row * STEP, ...size };
         if (!within(box, bounds) || covers(box, point)) continue;
-        const hidden = crossed(lines, box) + 10 * taken.filter((each) => overlap(each, box)).length;
-        const cost = hidden * HIDING + crossed(soft, box) * CROSSING + row * STEP + shift;
+        const hidden =
+          lines.reduce((sum, each) => sum + crossings(each, box), 0) +
+          10 * taken.filter((each) => overlap(each, box)).length;
+        const cost =
+          hidden * HIDING +
+          soft.filter((each) => crossings(each, box) > 0).length * CROSSING +
+          row * STEP +
+          shift;
         if (cost >= bestCost) continue;
         best = box;
         bestCost = cost;
@@ -88,9 +94,6 @@ const clamp = (box: Box, bounds: Box): Box => ({
   x: Math.max(bounds.x, Math.min(box.x, bounds.x + bounds.width - box.width)),
   y: Math.max(bounds.y, Math.min(box.y, bounds.y + bounds.height - box.height)),
 });
-
-const crossed = (lines: readonly Polyline[], box: Box) =>
-  lines.reduce((sum, each) => sum + crossings(each, box), 0);
 
 /** How many stretches of a line pass through the box, with a little air around it. */
 function crossings({ x, y }: Polyline, box: Box): number {
