@@ -8,7 +8,8 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { RunRow } from '@/shared/runs/types';
 import { formatWithUnit } from '@/shared/units/format';
-import { RUN_TONES, runStateWords, timeLeftWords, wallClock } from './runWords';
+import { runBadge } from '../check/reviewWords';
+import { timeLeftWords, wallClock } from './runWords';
 
 /** One run in the list: what was routed, how far it is, what came out furthest downstream. */
 export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
@@ -41,7 +42,7 @@ export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {
             </View>
           ) : null}
           <View style={isWide ? styles.state : null}>
-            <Badge label={runStateWords(run)} tone={RUN_TONES[run.state]} />
+            <Badge {...runBadge(run)} />
           </View>
         </Pressable>
       </Link>

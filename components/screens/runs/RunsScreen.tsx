@@ -1,4 +1,5 @@
 import { View } from 'react-native';
+import { usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
 import { NotThere } from '@/components/layout/NotThere';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
@@ -14,6 +15,8 @@ import { RunEntry } from './RunEntry';
 export function RunsScreen() {
   const { study } = useCurrentStudy();
   const runs = useRuns(study.id);
+  // Nothing here follows place and time, but the address keeps them from screen to screen.
+  usePlaceAndTimeStore();
   if (isApiError(runs.error, 'notFound')) return <NotThere />;
   const root = `/studies/${study.id}` as const;
   return (

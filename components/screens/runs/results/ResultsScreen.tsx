@@ -1,4 +1,3 @@
-import { useEffect } from 'react';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
@@ -9,6 +8,8 @@ import { Badge } from '@/components/ui/Badge';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary } from '@/shared/runs/types';
+import { CheckLink } from '../../check/CheckLink';
+import { runBadge } from '../../check/reviewWords';
 import { Cautions } from '../Cautions';
 import { runCrumbs } from '../runCrumbs';
 import { ComputedCard } from './ComputedCard';
@@ -16,10 +17,10 @@ import { LongSectionCard } from './LongSectionCard';
 import { PeaksCard } from './PeaksCard';
 import { PlaceFigures } from './PlaceFigures';
 import { PlaceSeries } from './PlaceSeries';
-import { firstLook, isOnReach } from './placeOf';
 import { RunDownloads } from './RunDownloads';
 import { SectionCard } from './SectionCard';
 import { TimeBar } from './TimeBar';
+import { useFirstLook } from './useFirstLook';
 import { usePlaceResults } from './usePlaceResults';
 import { VolumeCard } from './VolumeCard';
 import { WarningsCard } from './WarningsCard';
@@ -42,9 +43,14 @@ export function ResultsScreen({ run, summary }: Props) {
     <Screen
       title={run.scenarioName}
       crumbs={runCrumbs(run)}
-      badge={<Badge label="Routed, unsigned" tone="ochre" />}
+      badge={<Badge {...runBadge(run)} />}
       ribbon={<Ribbon {...common} />}
-      actions={<RunDownloads download={download} />}
+      actions={
+        <>
+          <RunDownloads download={download} />
+          <CheckLink run={run} />
+        </>
+      }
       side={
         isWide ? (
           <>
@@ -88,14 +94,4 @@ function Ribbon({ summary, store }: { summary: RunSummary; store: PlaceAndTimeSt
       unitSystem={useUnitSystem()}
     />
   );
-}
-
-/** Where the address says nothing, or speaks of another reach or a longer run. */
-function useFirstLook(store: PlaceAndTimeStore, summary: RunSummary) {
-  useEffect(() => {
-    const { at, t } = store.get();
-    const first = firstLook(summary);
-    if (!isOnReach(summary, at)) store.set({ at: first.at });
-    if (t === null || t < summary.times.start || t > summary.times.end) store.set({ t: first.t });
-  }, [store, summary]);
 }

@@ -4,6 +4,7 @@ import { Badge } from '@/components/ui/Badge';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import type { Run } from '@/shared/runs/types';
+import { runBadge } from '../../check/reviewWords';
 import { runCrumbs } from '../runCrumbs';
 import { ResultsScreen } from './ResultsScreen';
 
@@ -15,7 +16,7 @@ export function RunResults({ run }: { run: Run }) {
     <Screen
       title={run.scenarioName}
       crumbs={runCrumbs(run)}
-      badge={<Badge label="Routed, unsigned" tone="ochre" />}
+      badge={<Badge {...runBadge(run)} />}
     >
       {error ? (
         <ErrorState
