@@ -56,25 +56,20 @@ export function HandInScreen({ control }: { control: HandInControl }) {
       <Button label="Back to the survey" kind="quiet" onPress={control.startAgain} />
     </View>
   );
-  const onWide = (
-    <>
-      {back}
-      {asSpreadsheet}
-      {another}
-    </>
-  );
-  const onPhone = (
-    <>
-      {refused ? null : another}
-      {back}
-    </>
-  );
   return (
     <Screen
       title={titleOf(reading, state.step)}
       crumbs={[{ label: study.title, href: `/studies/${study.id}` }, { label: 'Survey' }]}
       lead={reading ? leadOf(state.file.name, reading) : state.file.name}
-      actions={isWide ? onWide : onPhone}
+      actions={
+        isWide ? (
+          <>
+            {back}
+            {asSpreadsheet}
+            {another}
+          </>
+        ) : undefined
+      }
       footer={
         refused && !isWide ? (
           <View style={styles.footer}>
@@ -84,16 +79,21 @@ export function HandInScreen({ control }: { control: HandInControl }) {
         ) : undefined
       }
       side={
-        refused ? (
-          match
-        ) : reading ? (
-          <AcceptCard
-            {...{ note, busy }}
-            sending={control.isSending}
-            error={control.sendError}
-            onNote={setNote}
-            onAccept={() => void control.handIn(note)}
-          />
+        reading || !isWide ? (
+          <>
+            {refused ? match : null}
+            {reading && !refused ? (
+              <AcceptCard
+                {...{ note, busy }}
+                sending={control.isSending}
+                error={control.sendError}
+                onNote={setNote}
+                onAccept={() => void control.handIn(note)}
+              />
+            ) : null}
+            {isWide || refused ? null : another}
+            {isWide ? null : back}
+          </>
         ) : undefined
       }
     >
