@@ -14,7 +14,7 @@ const swc = {
 const node = {
   testEnvironment: 'node',
   transform: swc,
-  transformIgnorePatterns: ['/node_modules/(?!(d3-[a-z]+|internmap)/)'],
+  transformIgnorePatterns: ['/node_modules/(?!(d3-[a-z-]+|internmap)/)'],
   moduleNameMapper: { '^@/(.*)$': '<rootDir>/$1' },
   modulePathIgnorePatterns: ['<rootDir>/dist', '<rootDir>/build', '<rootDir>/.data'],
 };

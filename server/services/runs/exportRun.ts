@@ -1,6 +1,5 @@
-import Piscina from 'piscina';
 import type { Platform } from '../../platform';
-import { workerFile, workerOptions } from '../../jobs/startWorker';
+import { lazyPool } from '../../jobs/lazyPool';
 import type { RunModel } from '../../models/Run';
 import type { EncodedBlock } from '../../results/blocks/blockTypes';
 import { csv } from '../../results/exports/csv';
@@ -9,30 +8,11 @@ import type { WorkbookTask } from '../../results/exports/workbookWorker';
 import { thawCase } from './freezeCase';
 import { assertRouted, type buildReadResults } from './readResults';
 
-const IDLE_MILLISECONDS = 30_000;
-const HEAP_MEGABYTES = 2048;
-const WAITING = 20;
-
 /** Files of a run to take away. The workbook is written in a thread of its own, one at a time. */
-export function buildExportRun(
-  { models, onClose }: Platform,
-  results: ReturnType<typeof buildReadResults>,
-) {
-  let threads: Piscina<WorkbookTask, Uint8Array> | undefined;
-  const pool = () => {
-    const file = workerFile(`${__dirname}/../../results/exports`, 'workbookWorker');
-    threads ??= new Piscina<WorkbookTask, Uint8Array>({
-      ...workerOptions(file),
-      filename: file,
-      minThreads: 0,
-      maxThreads: 1,
-      maxQueue: WAITING,
-      idleTimeout: IDLE_MILLISECONDS,
-      resourceLimits: { maxOldGenerationSizeMb: HEAP_MEGABYTES },
-    });
-    return threads;
-  };
-  onClose(() => threads?.destroy());
+export function buildExportRun(platform: Platform, results: ReturnType<typeof buildReadResults>) {
+  const { models } = platform;
+  const directory = `${__dirname}/../../results/exports`;
+  const pool = lazyPool<WorkbookTask, Uint8Array>(platform, directory, 'workbookWorker');
 
   const caseBytesOf = async (runId: number): Promise<Buffer> => {
     const attributes = ['id', 'caseBytes'];

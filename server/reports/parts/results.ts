@@ -1,0 +1,125 @@
+import { HAZARD_CLASSES, HAZARD_GUIDELINE } from '../../../shared/hazard/hazardClass';
+import { formatDuration, formatNumber } from '../../../shared/units/format';
+import { hydrograph } from '../charts/hydrograph';
+import { longSection } from '../charts/longSection';
+import { figure } from '../pdf/figure';
+import type { Sheet } from '../pdf/sheet';
+import { table } from '../pdf/table';
+import { heading, note, partHeading } from '../pdf/writing';
+import type { PlaceResult, RunReport } from '../runReport';
+import { momentText, unitsOf } from '../words';
+
+/** The long section, the hydrographs, and every number of them. */
+export function results(sheet: Sheet, report: RunReport): void {
+  const { facts, surface, sections, places, placesAreStations, run } = report;
+  const { unitSystem } = facts.study;
+  partHeading(sheet, 'Results', 'newPage');
+  figure(
+    sheet,
+    [
+      longSection({
+        chainages: surface.chainages,
+        bed: surface.bed,
+        leftBank: surface.leftBank,
+        rightBank: surface.rightBank,
+        peakStage: surface.peakStage,
+        startStage: surface.stage.subarray(0, surface.places),
+        stations: places.map(({ name, peaks }) => ({ name, chainage: peaks.chainage })),
+        system: unitSystem,
+        alt: 'Long section: bed, banks, the water at the start and the highest water at every place.',
+      }),
+    ],
+    250,
+    'The highest water at every place, whenever it was reached: an envelope, at no moment the surface of the river.',
+  );
+  heading(sheet, placesAreStations ? 'At the stations' : 'At the first, middle and last section');
+  peakTable(sheet, report, places, placesAreStations ? 'Station' : 'Section');
+  for (const { name, peaks, series } of places)
+    figure(
+      sheet,
+      [
+        hydrograph(
+          name,
+          { times: series.times, values: series.stage },
+          { value: peaks.peakStage, time: peaks.peakStageTime },
+          'elevation',
+          unitSystem,
+        ),
+        hydrograph(
+          name,
+          { times: series.times, values: series.flow },
+          { value: peaks.peakFlow, time: peaks.peakFlowTime },
+          'flow',
+          unitSystem,
+        ),
+      ],
+      146,
+      '',
+    );
+  heading(sheet, 'At the surveyed sections');
+  peakTable(sheet, report, sections, 'Section');
+  const { startsAt } = facts.run;
+  note(
+    sheet,
+    `Times from the start of the run${startsAt ? `, ${momentText(startsAt)}` : ''}. Arrival: ${run.arrivalThreshold.text}`,
+  );
+  hazardWords(sheet, [...places, ...sections]);
+}
+
+function peakTable(
+  sheet: Sheet,
+  { facts }: RunReport,
+  rows: readonly PlaceResult[],
+  what: string,
+): void {
+  const unit = unitsOf(facts.study.unitSystem);
+  table(
+    sheet,
+    [
+      { heading: what, share: 2.4 },
+      { heading: 'Chainage', share: 1.9, align: 'right' },
+      { heading: 'Highest water', share: 1.8, align: 'right' },
+      { heading: 'Depth', share: 1.6, align: 'right' },
+      { heading: 'Flow', share: 2.1, align: 'right' },
+      { heading: 'Velocity', share: 1.8, align: 'right' },
+      { heading: 'Arrives', share: 2.2, align: 'right' },
+      { heading: 'Highest at', share: 2.2, align: 'right' },
+      { heading: 'Flow lost', share: 1.3, align: 'right' },
+      { heading: 'Hazard', share: 1.5 },
+    ],
+    rows.map(({ name, peaks, hazard }) => [
+      name,
+      unit(peaks.chainage, 'chainage'),
+      unit(peaks.peakStage, 'elevation'),
+      unit(peaks.peakDepth, 'depth'),
+      unit(peaks.peakFlow, 'flow'),
+      unit(peaks.peakVelocity, 'velocity'),
+      peaks.arrival === null ? 'never' : formatDuration(peaks.arrival),
+      formatDuration(peaks.peakStageTime),
+      peaks.attenuation === null ? '–' : `${formatNumber(100 * peaks.attenuation, 1)} %`,
+      hazard?.label ?? 'dry',
+    ]),
+  );
+}
+
+/** The letters alone mean nothing: other authorities use the same for other limits. */
+function hazardWords(sheet: Sheet, places: readonly PlaceResult[]): void {
+  const present = new Set(places.map(({ hazard }) => hazard?.label));
+  heading(sheet, 'Hazard classes');
+  table(
+    sheet,
+    [
+      { heading: 'Class', share: 1 },
+      { heading: 'Meaning by the guideline', share: 7 },
+    ],
+    HAZARD_CLASSES.filter(({ label }) => present.has(label)).map(({ label, meaning }) => [
+      label,
+      meaning,
+    ]),
+  );
+  note(
+    sheet,
+    `By ${HAZARD_GUIDELINE}: the worst class over time, from the depth at the lowest point of the section and the mean ` +
+      'velocity of the same moment. On the floodplain beside the channel it is usually lower. The rules of the local authority go first.',
+  );
+}

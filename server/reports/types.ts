@@ -1,0 +1,65 @@
+import type { Review, SignOff } from '../../shared/review/types';
+import type { Station } from '../../shared/studies/types';
+import type { UnitSystem } from '../../shared/units/units';
+import type { SurveyRevisionRow } from '../../shared/surveys/types';
+
+/** Of the checking, what is fixed by the signature: nothing in it moves afterwards. */
+export type ReviewFacts = Pick<
+  Review,
+  'method' | 'assumptions' | 'limits' | 'checklist' | 'points'
+> & { sentAt: string | null };
+
+/** Of the signature, what never changes. */
+export type SignOffFacts = Pick<
+  SignOff,
+  | 'qualification'
+  | 'registrationNumber'
+  | 'statement'
+  | 'at'
+  | 'verificationCode'
+  | 'supersedesRunNumber'
+> & { by: string };
+
+export type WithdrawalFacts = NonNullable<SignOff['withdrawal']>;
+
+/**
+ * What a report says beside the frozen case and the stored results. Plain data: it travels to a worker thread, and it is
+ * kept with the signed report, so that a later drawing of it tells the same.
+ */
+export interface ReportFacts {
+  firmName: string;
+  study: {
+    title: string;
+    clientName: string;
+    place: string;
+    verticalDatum: string;
+    purpose: string;
+    unitSystem: UnitSystem;
+  };
+  survey: Omit<SurveyRevisionRow, 'id'>;
+  run: {
+    number: number;
+    scenarioName: string;
+    requestedBy: string;
+    requestedAt: string;
+    finishedAt: string;
+    /** Clock time of t = 0, ISO 8601; null where there is none. */
+    startsAt: string | null;
+    caseHash: string;
+    solverVersion: string;
+  };
+  stations: Station[];
+  /** null: never sent for checking. */
+  review: ReviewFacts | null;
+  /** null: preliminary. */
+  signOff: SignOffFacts | null;
+  /** null: it stands. */
+  withdrawal: WithdrawalFacts | null;
+  /** Where the public page of the code is; the code itself is added. */
+  verificationAddress: string;
+}
+
+export type Standing = 'preliminary' | 'signed' | 'withdrawn';
+
+export const standingOf = ({ signOff, withdrawal }: ReportFacts): Standing =>
+  withdrawal ? 'withdrawn' : signOff ? 'signed' : 'preliminary';
