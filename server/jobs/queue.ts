@@ -3,6 +3,7 @@ import { QueryTypes, Transaction, type Sequelize } from 'sequelize';
 import type { Models } from '../models';
 import type { EncodedBlock } from '../results/blocks/blockTypes';
 import type { QueueTiming } from './timing';
+import { retryOnDeadlock } from './retryOnDeadlock';
 
 /** A run taken from the queue. Only who holds `token` may write to it; each claim has a fresh one. */
 export interface Claim {
@@ -70,10 +71,8 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
       secondsLeft: number | null,
     ): Promise<Standing> {
       const where = { id: runId, leaseOwner: token, state: 'running' as const };
-      await Run.update(
-        { leaseUntil: leaseEnd as unknown as Date, progress, secondsLeft },
-        { where },
-      );
+      const change = { leaseUntil: leaseEnd as unknown as Date, progress, secondsLeft };
+      await retryOnDeadlock(() => Run.update(change, { where }));
       const run = await Run.findOne({ where, attributes: ['cancelRequested'] });
       if (!run) return 'lost';
       return run.cancelRequested ? 'cancelRequested' : 'held';
@@ -84,36 +83,38 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
      * lost meanwhile. A cancel that came while it was finishing still counts.
      */
     finish: ({ runId, token }: Claim, ending: Ending): Promise<boolean> =>
-      sequelize.transaction(isolation, async (transaction) => {
-        const run = await Run.findOne({
-          where: { id: runId, leaseOwner: token, state: 'running' },
-          lock: Transaction.LOCK.UPDATE,
-          transaction,
-        });
-        if (!run) return false;
-        const told = run.cancelRequested ? ({ state: 'cancelled' } as const) : ending;
-        const finished = { ...noLease, finishedAt: now as unknown as Date };
-        if (told.state === 'routed') {
-          const { blocks, solver, peakStage, peakFlow } = told;
-          for (const { kind, part, bytes } of blocks) {
-            const row = { runId, kind, part, bytes: Buffer.from(bytes) };
-            await RunBlock.create(row, { transaction });
+      retryOnDeadlock(() =>
+        sequelize.transaction(isolation, async (transaction) => {
+          const run = await Run.findOne({
+            where: { id: runId, leaseOwner: token, state: 'running' },
+            lock: Transaction.LOCK.UPDATE,
+            transaction,
+          });
+          if (!run) return false;
+          const told = run.cancelRequested ? ({ state: 'cancelled' } as const) : ending;
+          const finished = { ...noLease, finishedAt: now as unknown as Date };
+          if (told.state === 'routed') {
+            const { blocks, solver, peakStage, peakFlow } = told;
+            for (const { kind, part, bytes } of blocks) {
+              const row = { runId, kind, part, bytes: Buffer.from(bytes) };
+              await RunBlock.create(row, { transaction });
+            }
+            const values = {
+              ...finished,
+              state: told.state,
+              progress: 1,
+              solverVersion: solver,
+              peakStage,
+              peakFlow,
+            };
+            await run.update(values, { transaction });
+          } else {
+            const failure = told.state === 'failed' ? told.failure : null;
+            await run.update({ ...finished, state: told.state, failure }, { transaction });
           }
-          const values = {
-            ...finished,
-            state: told.state,
-            progress: 1,
-            solverVersion: solver,
-            peakStage,
-            peakFlow,
-          };
-          await run.update(values, { transaction });
-        } else {
-          const failure = told.state === 'failed' ? told.failure : null;
-          await run.update({ ...finished, state: told.state, failure }, { transaction });
-        }
-        return true;
-      }),
+          return true;
+        }),
+      ),
 
     /** Puts a run back that this process will not finish, as if it had not been begun. */
     async release({ runId, token }: Claim): Promise<void> {

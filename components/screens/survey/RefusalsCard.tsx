@@ -52,7 +52,7 @@ function Refusal({ refusal }: { refusal: SurveyRefusal }) {
         <Button
           kind="quiet"
           label="Faults as a spreadsheet"
-          name={`Faults of ${fileName} as a spreadsheet`}
+          name={`Faults as a spreadsheet, of ${fileName}`}
           busy={download.isPending}
           onPress={() => download.mutate(id)}
         />
