@@ -2,6 +2,7 @@ import compression from 'compression';
 import cookieParser from 'cookie-parser';
 import express, { Router, type Express } from 'express';
 import type { Services } from './composition';
+import { followRequests } from './audit/followRequests';
 import { notFound } from './errors';
 import { errorHandler } from './middleware/errorHandler';
 import { noStore } from './middleware/noStore';
@@ -21,6 +22,7 @@ export function buildApp(services: Services): Express {
 
   const api = Router();
   api.use(noStore, sameOrigin(env.publicUrl), cookieParser(), express.json({ limit: '4mb' }));
+  api.use(followRequests(services.audit, log));
   for (const routes of ROUTES) api.use(routes(services));
   api.use(() => {
     throw notFound('This address');

@@ -8,6 +8,11 @@ import { authenticateWith } from './middleware/authenticate';
 import { buildRateLimits } from './middleware/rateLimits';
 import { buildPlatform, type Overrides } from './platform';
 import { buildAccounts } from './services/accounts';
+import { buildReadAudit } from './services/audit/readAudit';
+import { buildIssued } from './services/issued/readIssued';
+import { buildVerify } from './services/issued/verify';
+import { buildReports } from './services/reports';
+import { buildReviews } from './services/review';
 import { buildRuns } from './services/runs';
 import { buildReaches } from './services/reaches/reaches';
 import { buildScenarios } from './services/scenarios/scenarios';
@@ -25,6 +30,17 @@ export async function compose(env: Env, overrides: Overrides = {}) {
     const background = buildBackground(platform.log);
     platform.onClose(() => background.idle().finally(mailer.close));
     const sessions = buildSessions(platform);
+    const runs = buildRuns(platform);
+    const reviews = buildReviews(platform, {
+      background,
+      mailer,
+      runs,
+      standingChanged: ({ id }) =>
+        background.run('drawing a report to keep', async () =>
+          reports.pdf(await runs.find.again(id), 'A4'),
+        ),
+    });
+    const reports = buildReports(platform, { reviews, runs });
     return {
       ...platform,
       close,
@@ -40,7 +56,12 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       surveys: buildSurveys(platform),
       reaches: buildReaches(platform),
       scenarios: buildScenarios(platform),
-      runs: buildRuns(platform),
+      runs,
+      reviews,
+      reports,
+      issued: buildIssued(platform, { reviews, runs }),
+      verify: buildVerify(platform, reviews),
+      auditTrail: buildReadAudit(platform),
     };
   } catch (error) {
     await close();

@@ -1,5 +1,6 @@
 import pino, { type Logger } from 'pino';
 import type { Sequelize } from 'sequelize';
+import { buildAudit, type Audit } from './audit/buildAudit';
 import { connect } from './database/connect';
 import type { Env } from './env';
 import { defineModels, type Models } from './models';
@@ -10,6 +11,7 @@ export interface Platform {
   log: Logger;
   sequelize: Sequelize;
   models: Models;
+  audit: Audit;
   /** Now; tests move it. */
   now: () => Date;
   /** Runs at the end, latest first; whoever starts something that must be stopped adds to it. */
@@ -24,12 +26,15 @@ export function buildPlatform(env: Env, overrides: Overrides = {}) {
   const log = pino({ level: env.logLevel, base: null });
   const sequelize = connect(env.databaseUrl, log);
   const stops: (() => Promise<void> | void)[] = [() => sequelize.close()];
+  const models = defineModels(sequelize);
+  const now = overrides.now ?? (() => new Date());
   const platform: Platform = {
     env,
     log,
     sequelize,
-    models: defineModels(sequelize),
-    now: overrides.now ?? (() => new Date()),
+    models,
+    audit: buildAudit(sequelize, models, now),
+    now,
     onClose: (stop) => void stops.push(stop),
   };
   const close = async () => {

@@ -22,12 +22,15 @@ const RECORD = 'record';
 export function authorize<R>(action: Action, load?: Loader<R>): DeclaredHandler {
   const handler: RequestHandler = async (req, res, next) => {
     const actor = actorOf(res);
+    // For the audit trail, which is written when the routers have let go of the address.
+    Object.assign(res.locals, { action, params: req.params });
     const loaded = load ? await load(req, actor) : { record: null, subject: actor };
     if (!loaded) throw notFound();
     const decision = decide(actor, action, loaded.subject);
+    res.locals['refused'] = decision !== 'allowed';
     if (decision === 'notFound') throw notFound();
-    if (decision === 'forbidden') throw forbidden();
     res.locals[RECORD] = loaded.record;
+    if (decision === 'forbidden') throw forbidden();
     next();
   };
   return Object.assign(handler, { action });

@@ -10,6 +10,7 @@ export function errorHandler(log: Logger): ErrorRequestHandler {
   return (error: unknown, req, res, next) => {
     const requestId = res.locals['requestId'] as string;
     const answer = asAppError(error);
+    res.locals['errorCode'] = answer.code;
     if (answer.status >= 500)
       log.error({ err: error, requestId, method: req.method, path: req.path }, 'request failed');
     // Half an answer is on its way: only cutting the connection tells the other end.

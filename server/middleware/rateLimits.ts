@@ -24,10 +24,13 @@ const byAddress = ({ minutes, requests, failuresOnly = false }: Limit) =>
     },
   });
 
-/** Limits by address of what needs no sign-in, one set a server. Those by account are in `auth/attempts.ts`. */
+/** Limits by address, mostly of what needs no sign-in, one set a server. Those by account are in `auth/attempts.ts`. */
 export const buildRateLimits = () => ({
   signIn: byAddress({ minutes: 10, requests: 30, failuresOnly: true }),
   refresh: byAddress({ minutes: 1, requests: 120 }),
   resetRequest: byAddress({ minutes: 60, requests: 20 }),
   links: byAddress({ minutes: 10, requests: 30, failuresOnly: true }),
+  sign: byAddress({ minutes: 10, requests: 20, failuresOnly: true }),
+  verification: byAddress({ minutes: 10, requests: 60 }),
+  verificationMisses: byAddress({ minutes: 10, requests: 10, failuresOnly: true }),
 });

@@ -9,8 +9,12 @@ import {
 } from 'sequelize';
 import type { Run, RunState } from '../../shared/runs/types';
 import { jsonColumn } from '../database/jsonColumn';
+import type { IssueModel } from './Issue';
+import type { ReviewModel } from './Review';
+import type { SignOffModel } from './SignOff';
 import type { StudyModel } from './Study';
 import type { UserModel } from './User';
+import type { WithdrawalModel } from './Withdrawal';
 
 /** One computation of a scenario with its inputs as they were when it was asked for. */
 export interface RunModel extends Model<
@@ -55,6 +59,10 @@ export interface RunModel extends Model<
   updatedAt: CreationOptional<Date>;
   study?: NonAttribute<StudyModel>;
   requester?: NonAttribute<UserModel>;
+  review?: NonAttribute<ReviewModel | null>;
+  signOff?: NonAttribute<SignOffModel | null>;
+  issue?: NonAttribute<IssueModel | null>;
+  withdrawal?: NonAttribute<WithdrawalModel | null>;
 }
 
 export const defineRun = (sequelize: Sequelize) =>

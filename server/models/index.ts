@@ -13,6 +13,15 @@ import { defineReach } from './Reach';
 import { defineScenario } from './Scenario';
 import { defineRun } from './Run';
 import { defineRunBlock } from './RunBlock';
+import { defineAuditRow } from './AuditRow';
+import { defineClientRead } from './ClientRead';
+import { defineIssue } from './Issue';
+import { defineReport } from './Report';
+import { defineReview } from './Review';
+import { defineReviewPoint } from './ReviewPoint';
+import { defineReviewPointEntry } from './ReviewPointEntry';
+import { defineSignOff } from './SignOff';
+import { defineWithdrawal } from './Withdrawal';
 import { defineUser } from './User';
 
 /** Every table, bound to one connection pool. A new model is one line here, and its ties to others below. */
@@ -32,6 +41,15 @@ export function defineModels(sequelize: Sequelize) {
     Scenario: defineScenario(sequelize),
     Run: defineRun(sequelize),
     RunBlock: defineRunBlock(sequelize),
+    AuditRow: defineAuditRow(sequelize),
+    ClientRead: defineClientRead(sequelize),
+    Issue: defineIssue(sequelize),
+    Report: defineReport(sequelize),
+    Review: defineReview(sequelize),
+    ReviewPoint: defineReviewPoint(sequelize),
+    ReviewPointEntry: defineReviewPointEntry(sequelize),
+    SignOff: defineSignOff(sequelize),
+    Withdrawal: defineWithdrawal(sequelize),
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
@@ -46,6 +64,21 @@ export function defineModels(sequelize: Sequelize) {
   models.Scenario.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
   models.Run.belongsTo(models.Study, { as: 'study', foreignKey: 'studyId' });
   models.Run.belongsTo(models.User, { as: 'requester', foreignKey: 'requestedBy' });
+  models.Run.hasOne(models.Review, { as: 'review', foreignKey: 'runId' });
+  models.Run.hasOne(models.SignOff, { as: 'signOff', foreignKey: 'runId' });
+  models.Run.hasOne(models.Issue, { as: 'issue', foreignKey: 'runId' });
+  models.Run.hasOne(models.Withdrawal, { as: 'withdrawal', foreignKey: 'runId' });
+  models.Review.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
+  models.Review.belongsTo(models.Run, { as: 'outletProbe', foreignKey: 'outletProbeRunId' });
+  models.Review.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
+  models.Review.belongsTo(models.User, { as: 'recipient', foreignKey: 'sentTo' });
+  models.Review.hasMany(models.ReviewPoint, { as: 'points', foreignKey: 'reviewId' });
+  models.ReviewPoint.belongsTo(models.User, { as: 'raiser', foreignKey: 'raisedBy' });
+  models.ReviewPoint.hasMany(models.ReviewPointEntry, { as: 'entries', foreignKey: 'pointId' });
+  models.ReviewPointEntry.belongsTo(models.User, { as: 'writer', foreignKey: 'writtenBy' });
+  models.SignOff.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
+  models.Withdrawal.belongsTo(models.User, { as: 'withdrawer', foreignKey: 'withdrawnBy' });
+  models.ClientRead.belongsTo(models.User, { as: 'reader', foreignKey: 'userId' });
   return models;
 }
 

@@ -1,5 +1,5 @@
 import type { Role } from '../../shared/accounts/roles';
-import { asClient, asSurveyor, both, inFirm, own, type Condition } from './subject';
+import { asClient, asSurveyor, both, inFirm, issued, notOwn, own, type Condition } from './subject';
 
 /** Who may do it, by role and condition. Of several roles of a person one that allows is enough. */
 export interface Policy {
@@ -69,10 +69,35 @@ export const POLICIES = table({
   'scenario.change': { grants: engineers, refusal: 'notFound' },
   'table.read': { grants: engineers, refusal: 'forbidden' },
 
-  // Runs: nothing is issued to clients yet
+  // Runs: clients see what was issued of them by other addresses
   'run.read': { grants: engineers, refusal: 'notFound' },
   'run.request': { grants: engineers, refusal: 'notFound' },
   'run.change': { grants: engineers, refusal: 'notFound' },
+
+  // The check: whoever asked for a run does not sign it
+  'review.read': { grants: engineers, refusal: 'notFound' },
+  'review.send': { grants: { modeller: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.answer': { grants: { modeller: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.probe': { grants: engineers, refusal: 'notFound' },
+  'review.raise': { grants: { seniorEngineer: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.close': { grants: { seniorEngineer: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.return': { grants: { seniorEngineer: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.sign': { grants: { seniorEngineer: notOwn }, refusal: { seenBy: 'review.read' } },
+  'review.issue': { grants: engineers, refusal: 'notFound' },
+  'review.withdraw': { grants: { seniorEngineer: inFirm }, refusal: { seenBy: 'review.read' } },
+  'review.queue': { grants: { seniorEngineer: inFirm }, refusal: 'forbidden' },
+  'review.recipients': { grants: { modeller: inFirm }, refusal: 'forbidden' },
+
+  // What was issued: to the clients of the study, and to the engineers as they see it
+  'issued.list': { grants: { ...engineers, client: asClient }, refusal: 'notFound' },
+  'issued.report': {
+    grants: { modeller: issued, seniorEngineer: issued, client: both(asClient, issued) },
+    refusal: 'notFound',
+  },
+  'issued.confirm': { grants: { client: both(asClient, issued) }, refusal: 'notFound' },
+
+  // The audit trail of the firm
+  'audit.read': { grants: { administrator: inFirm }, refusal: 'forbidden' },
 });
 
 export type Action = keyof typeof POLICIES;

@@ -31,6 +31,8 @@ export const inFirm: Condition = () => true;
 export const asSurveyor: Condition = (_actor, subject) => subject.memberAs === 'surveyor';
 export const asClient: Condition = (_actor, subject) => subject.memberAs === 'client';
 export const own: Condition = (actor, subject) => subject.ownerId === actor.id;
+export const notOwn: Condition = (actor, subject) => subject.ownerId !== actor.id;
+export const issued: Condition = (_actor, subject) => subject.issued === true;
 export const both =
   (first: Condition, second: Condition): Condition =>
   (actor, subject) =>

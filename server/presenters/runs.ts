@@ -2,14 +2,16 @@ import type { Run, RunRow } from '../../shared/runs/types';
 import type { RunModel } from '../models/Run';
 import { may } from '../policies/decide';
 import type { Actor } from '../policies/subject';
+import { reviewStateOf } from './reviewState';
 
-/** Needs the run's `requester`. */
+/** Needs the run's `requester` and what tells of its checking. */
 export const presentRunRow = (run: RunModel): RunRow => ({
   id: run.id,
   number: run.number,
   scenarioId: run.scenarioId,
   scenarioName: run.scenarioName,
   state: run.state,
+  review: reviewStateOf(run),
   progress: run.progress,
   secondsLeft: run.secondsLeft ?? null,
   requestedBy: run.requester!.name,

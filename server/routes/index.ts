@@ -1,11 +1,15 @@
 import type { Router } from 'express';
 import type { Services } from '../composition';
+import { auditRoutes } from './audit';
 import { authRoutes } from './auth';
 import { healthRoutes } from './health';
 import { invitationRoutes } from './invitations';
+import { issuedRoutes } from './issued';
 import { meRoutes } from './me';
 import { runRoutes } from './runs';
 import { reachRoutes } from './reaches';
+import { reportRoutes } from './reports';
+import { reviewRoutes } from './reviews';
 import { scenarioRoutes } from './scenarios';
 import { stationRoutes } from './stations';
 import { studyRoutes } from './studies';
@@ -13,6 +17,7 @@ import { surveyRoutes } from './surveys';
 import { tableRoutes } from './tables';
 import { templateRoutes } from './templates';
 import { userRoutes } from './users';
+import { verificationRoutes } from './verification';
 
 /** Every module of routes; each writes its full addresses below /api. A new one is one line. */
 export const ROUTES: ((services: Services) => Router)[] = [
@@ -29,4 +34,9 @@ export const ROUTES: ((services: Services) => Router)[] = [
   surveyRoutes,
   tableRoutes,
   templateRoutes,
+  reviewRoutes,
+  reportRoutes,
+  issuedRoutes,
+  verificationRoutes,
+  auditRoutes,
 ];

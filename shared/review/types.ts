@@ -71,6 +71,8 @@ export interface Review {
   signOff: SignOff | null;
   /** Station ids that the client sees, chosen before issuing. */
   clientStationIds: number[];
+  /** Clients who confirmed that they read what was issued. */
+  reads: { by: string; at: string }[];
   /** Second run that shows how far the outlet condition reaches; null: not asked for. */
   outletProbe: { runId: number; state: string } | null;
   may: (
@@ -117,6 +119,8 @@ export interface Verification {
   supersededAt: string | null;
   /** SHA-256 of the signed report, hex; the browser compares a dropped PDF with it. */
   reportHash: string | null;
+  /** The same of each paper size that it was made in: a dropped PDF is the very one where its hash is among them. */
+  reportHashes: string[];
 }
 
 /** What a client sees of an issued run: `GET /api/studies/:studyId/issued`. */

@@ -1,3 +1,5 @@
+import type { ReviewState } from '../review/types';
+
 /** States of a run, as stored. The words for them are in `RUN_STATE_WORDS`. */
 export const RUN_STATES = ['queued', 'running', 'routed', 'failed', 'cancelled'] as const;
 export type RunState = (typeof RUN_STATES)[number];
@@ -18,6 +20,8 @@ export interface RunRow {
   scenarioId: number;
   scenarioName: string;
   state: RunState;
+  /** Where its checking stands; null before it was sent. */
+  review: ReviewState | null;
   /** 0..1. */
   progress: number;
   /** s of wall time; null where unknown. */

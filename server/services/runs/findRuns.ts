@@ -3,12 +3,19 @@ import type { Platform } from '../../platform';
 import type { Actor, Loaded } from '../../policies/subject';
 import { studySubject } from '../studies/studySubject';
 
-/** Runs by id or study. They come with their study and who asked for them. */
+/** What tells where the checking of a run stands. */
+const CHECKING = ['review', 'signOff', 'issue', 'withdrawal'].map((association) => ({
+  association,
+  attributes: association === 'review' ? ['id', 'state'] : ['id'],
+}));
+
+/** Runs by id or study. They come with their study, who asked for them, and how their checking stands. */
 export function buildFindRuns({ models }: Platform) {
   const { Run, Study, User } = models;
   const include = [
     { model: Study, as: 'study' },
-    { model: User, as: 'requester', attributes: ['name'] },
+    { model: User, as: 'requester', attributes: ['id', 'name', 'email'] },
+    ...CHECKING,
   ];
   return {
     /** For `authorize`. */

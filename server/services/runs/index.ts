@@ -29,7 +29,7 @@ export function buildRuns(platform: Platform) {
   return {
     /** Begins to take runs from the queue. */
     start: dispatcher.start,
-    request: buildRequestRun(platform, queued),
+    ...buildRequestRun(platform, queued),
     find: buildFindRuns(platform),
     change: buildChangeRuns(platform, { hub, queued, stop: dispatcher.cancel }),
     watch: buildWatchRun(models, hub, log),

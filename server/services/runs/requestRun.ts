@@ -14,24 +14,28 @@ import { SOLVER_VERSION } from '../../solvers';
 import { touchStudy } from '../studies/touchStudy';
 import { freezeCase } from './freezeCase';
 
-/**
- * Freezes a scenario as a case file and puts it into the queue as the study's next run.
- * Throws `scenarioIncomplete` with every fault where it cannot be routed.
- */
+/** What a run is made of beside its case. */
+interface RunOf {
+  studyId: number;
+  scenarioId: number;
+  reachId: number;
+  scenarioName: string;
+  startsAt: Date | null;
+}
+
+/** Puts runs into the queue. `queued` is called once one stands there. */
 export function buildRequestRun(platform: Platform, queued: () => void) {
   const { sequelize, models, now } = platform;
   const { Reach, Run, Study } = models;
 
-  return async (actor: { id: number }, scenario: ScenarioModel): Promise<RunModel> => {
-    const { studyId, reachId, body } = scenario;
-    const [reach, study] = await Promise.all([
-      Reach.scope('withSections').findByPk(reachId, { rejectOnEmpty: true }),
-      Study.findByPk(studyId, { rejectOnEmpty: true }),
-    ]);
-    const sections = await unpackJson<Section[]>(reach.sections);
-    const caseFile = caseOf(scenario, sections, `${study.title}: ${scenario.name}`);
+  /** Freezes a case and puts it into the queue as the study's next run. */
+  async function requestCase(
+    actor: { id: number },
+    of: RunOf,
+    caseFile: CaseFile,
+  ): Promise<RunModel> {
+    const { studyId } = of;
     const frozen = await freezeCase(caseFile);
-
     const run = await sequelize.transaction(async (transaction) => {
       // Whoever holds the study gives the next number.
       const lock = transaction.LOCK.UPDATE;
@@ -40,16 +44,12 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
       await touchStudy(platform, studyId, transaction);
       return Run.create(
         {
-          studyId,
-          scenarioId: scenario.id,
-          reachId,
+          ...of,
           number: (last ?? 0) + 1,
-          scenarioName: scenario.name,
           state: 'queued',
           ...frozen,
           solverVersion: SOLVER_VERSION,
           duration: caseFile.numerics.duration,
-          startsAt: body.startsAt === null ? null : new Date(body.startsAt),
           inflow: inflowOutline(caseFile),
           requestedBy: actor.id,
           requestedAt: now(),
@@ -59,7 +59,23 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
     });
     queued();
     return run;
-  };
+  }
+
+  /** The same of a scenario. Throws `scenarioIncomplete` with every fault where it cannot be routed. */
+  async function request(actor: { id: number }, scenario: ScenarioModel): Promise<RunModel> {
+    const { studyId, reachId, body } = scenario;
+    const [reach, study] = await Promise.all([
+      Reach.scope('withSections').findByPk(reachId, { rejectOnEmpty: true }),
+      Study.findByPk(studyId, { rejectOnEmpty: true }),
+    ]);
+    const sections = await unpackJson<Section[]>(reach.sections);
+    const caseFile = caseOf(scenario, sections, `${study.title}: ${scenario.name}`);
+    const startsAt = body.startsAt === null ? null : new Date(body.startsAt);
+    const of = { studyId, scenarioId: scenario.id, reachId, scenarioName: scenario.name, startsAt };
+    return requestCase(actor, of, caseFile);
+  }
+
+  return { request, requestCase };
 }
 
 function caseOf({ body }: ScenarioModel, sections: Section[], title: string): CaseFile {

@@ -40,7 +40,7 @@ test('a surveyor reads their own surveys only while they are in the study', () =
   expect(decide(actor('surveyor'), 'survey.read', { ...own, memberAs: null })).toBe('notFound');
 });
 
-test('a client sees no run, issued or not, until issuing is built', () => {
+test('a client sees no run itself, issued or not', () => {
   const shared: Subject = { firmId: 10, memberAs: 'client', issued: true };
   expect(decide(actor('client'), 'run.read', shared)).toBe('notFound');
 });

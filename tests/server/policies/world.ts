@@ -1,6 +1,8 @@
 import type { Role } from '../../../shared/accounts/roles';
 import type { Services } from '../../../server/composition';
+import type { RunModel } from '../../../server/models/Run';
 import type { UserModel } from '../../../server/models/User';
+import { makeCode } from '../../../server/services/review/verificationCode';
 import { buildFirm } from '../../helpers/factories/buildFirm';
 import { buildReach } from '../../helpers/factories/buildReach';
 import { buildScenario } from '../../helpers/factories/buildScenario';
@@ -56,7 +58,7 @@ export async function buildWorld(services: Services): Promise<World> {
     reachId: reach.id,
     number: 1,
     scenarioName: scenario.name,
-    state: 'cancelled',
+    state: 'routed',
     caseBytes: Buffer.alloc(0),
     caseHash: `sha256:${'0'.repeat(64)}`,
     solverVersion: 'test',
@@ -66,6 +68,7 @@ export async function buildWorld(services: Services): Promise<World> {
     requestedBy: modeller.id,
     requestedAt: new Date(),
   });
+  const pointId = await issue(services, run, modeller, people.seniorEngineer);
   const invitation = await models.Invitation.create({
     firmId,
     email: 'guest@client.example',
@@ -86,6 +89,62 @@ export async function buildWorld(services: Services): Promise<World> {
       reachId: reach.id,
       scenarioId: scenario.id,
       runId: run.id,
+      pointId,
     },
   };
+}
+
+/** Signs and issues a run as it stands in the tables; answers the id of a point that was raised on it. */
+async function issue(
+  { models }: Services,
+  run: RunModel,
+  modeller: UserModel,
+  senior: UserModel,
+): Promise<number> {
+  const at = new Date();
+  const review = await models.Review.create({
+    runId: run.id,
+    state: 'inCheck',
+    sentBy: modeller.id,
+    sentTo: null,
+    sentAt: at,
+    method: '',
+    assumptions: '',
+    limits: '',
+    answers: {},
+    returnReason: null,
+    outletProbeRunId: null,
+  });
+  const point = await models.ReviewPoint.create({
+    reviewId: review.id,
+    chainage: null,
+    time: null,
+    text: 'Why so?',
+    state: 'closed',
+    raisedBy: senior.id,
+    raisedAt: at,
+  });
+  await models.SignOff.create({
+    runId: run.id,
+    reviewId: review.id,
+    signedBy: senior.id,
+    signerName: senior.name,
+    qualification: 'Engineer',
+    registrationNumber: '1',
+    statement: 'Checked.',
+    at,
+    caseHash: run.caseHash,
+    solverVersion: run.solverVersion,
+    verificationCode: makeCode(),
+    supersedesRunId: null,
+    record: Buffer.alloc(0),
+  });
+  await models.Issue.create({
+    runId: run.id,
+    issuedBy: modeller.id,
+    at,
+    stationIds: [],
+    message: '',
+  });
+  return point.id;
 }

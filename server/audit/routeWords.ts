@@ -1,0 +1,78 @@
+/** What the audit trail says of a route where its service has not said it better: the action, and the words for it. */
+export interface RouteWords {
+  action: string;
+  /** Stands before the name of the record. */
+  words: string;
+}
+
+const say = (action: string, words: string): RouteWords => ({ action, words });
+
+/** Every route that changes something or gives a file away. */
+export const ROUTE_WORDS: Record<string, RouteWords> = {
+  'POST /auth/sign-in': say('session.started', 'Signing in'),
+  'POST /auth/sign-out-everywhere': say('session.endedEverywhere', 'Signed out on every device'),
+  'POST /auth/password': say('password.changed', 'Password changed'),
+  'POST /auth/password-reset/request': say('password.resetAsked', 'New password asked for by mail'),
+  'POST /auth/password-reset/confirm': say('password.reset', 'New password chosen by a link'),
+  'PATCH /me': say('profile.changed', 'Own profile changed'),
+  'PATCH /users/:userId': say('user.changed', 'Roles or activity changed'),
+  'POST /invitations': say('invitation.made', 'Invitation sent'),
+  'DELETE /invitations/:invitationId': say('invitation.withdrawn', 'Invitation withdrawn'),
+  'POST /invitations/:invitationId/resend': say('invitation.resent', 'Invitation sent again'),
+  'POST /invitations/accept': say('invitation.accepted', 'Invitation accepted'),
+
+  'POST /studies': say('study.made', 'Study made'),
+  'PATCH /studies/:studyId': say('study.changed', 'Study changed'),
+  'PUT /studies/:studyId/members': say('study.shared', 'Study shared'),
+  'DELETE /studies/:studyId/members/:userId': say('study.unshared', 'Sharing of the study ended'),
+  'POST /studies/:studyId/stations': say('station.made', 'Station added to'),
+  'PATCH /stations/:stationId': say('station.changed', 'Station changed'),
+  'DELETE /stations/:stationId': say('station.removed', 'Station removed'),
+
+  'POST /studies/:studyId/surveys': say('survey.sent', 'Survey handed in for'),
+  'GET /refusals/:refusalId/faults.xlsx': say(
+    'survey.faultsTaken',
+    'Faults of a survey downloaded',
+  ),
+  'PATCH /reaches/:reachId/sections': say('reach.changed', 'Banks or roughness changed'),
+  'POST /studies/:studyId/scenarios': say('scenario.made', 'Scenario made in'),
+  'PUT /scenarios/:scenarioId': say('scenario.changed', 'Scenario changed'),
+  'POST /scenarios/:scenarioId/duplicate': say('scenario.duplicated', 'Scenario duplicated'),
+  'DELETE /scenarios/:scenarioId': say('scenario.removed', 'Scenario removed'),
+  'POST /scenarios/:scenarioId/runs': say('run.requested', 'Run asked for of'),
+
+  'POST /runs/:runId/cancel': say('run.cancelled', 'Run cancelled'),
+  'POST /runs/:runId/retry': say('run.retried', 'Run put into the queue again'),
+  'GET /runs/:runId/case.json': say('run.caseTaken', 'Case file downloaded'),
+  'GET /runs/:runId/results.csv': say('run.resultsTaken', 'Results downloaded as CSV'),
+  'GET /runs/:runId/results.xlsx': say('run.resultsTaken', 'Results downloaded as XLSX'),
+  'GET /runs/:runId/report.pdf': say('report.taken', 'Report downloaded'),
+
+  'POST /runs/:runId/review': say('review.sent', 'Sent for checking'),
+  'PUT /runs/:runId/review/answers': say('review.answered', 'Checklist answered'),
+  'POST /runs/:runId/review/points': say('point.raised', 'Point raised'),
+  'POST /points/:pointId/answer': say('point.answered', 'Point answered'),
+  'POST /points/:pointId/close': say('point.closed', 'Point closed'),
+  'POST /points/:pointId/reopen': say('point.reopened', 'Point reopened'),
+  'POST /runs/:runId/review/return': say('review.returned', 'Returned'),
+  'POST /runs/:runId/review/sign': say('run.signed', 'Signed'),
+  'POST /runs/:runId/review/issue': say('run.issued', 'Issued'),
+  'POST /runs/:runId/review/withdraw': say('run.withdrawn', 'Withdrawn'),
+  'POST /runs/:runId/review/outlet-probe': say('review.probed', 'Second run for the outlet'),
+
+  'GET /issued/:runId/report.pdf': say('report.taken', 'Issued report downloaded'),
+  'POST /issued/:runId/read': say('issued.read', 'Confirmed as read'),
+  'GET /audit.csv': say('audit.taken', 'Audit trail downloaded'),
+};
+
+/** Nothing changes by these that anybody would ask for later, or nobody is known. */
+export const NOT_TOLD = new Set([
+  'POST /auth/refresh',
+  'POST /auth/sign-out',
+  'POST /invitations/look',
+  'POST /studies/:studyId/surveys/read',
+  'POST /tables/read',
+  'GET /templates/survey.xlsx',
+  'GET /templates/survey-example.xlsx',
+  'GET /templates/survey-sections-example.xlsx',
+]);

@@ -1,0 +1,27 @@
+import { Router } from 'express';
+import { reportQuerySchema } from '../../shared/reports/schemas';
+import type { Services } from '../composition';
+import { authorize, recordOf } from '../middleware/authorize';
+import { pathId } from '../middleware/pathId';
+import { check } from '../middleware/validate';
+import type { RunModel } from '../models/Run';
+
+export function reportRoutes({ authenticate, reports, runs }: Services): Router {
+  const router = Router();
+  const readRun = authorize('run.read', (req, actor) =>
+    runs.find.load(pathId(req, 'runId'), actor),
+  );
+
+  router.get('/runs/:runId/report.pdf', authenticate, readRun, async (req, res) => {
+    const { paper } = await check(reportQuerySchema, req.query);
+    const run = recordOf<RunModel>(res);
+    const pdf = await reports.pdf(run, paper);
+    res.attachment(`run-${run.number}-report.pdf`).type('application/pdf').send(pdf);
+  });
+
+  router.get('/runs/:runId/reports', authenticate, readRun, async (_req, res) => {
+    res.json(await reports.list(recordOf<RunModel>(res)));
+  });
+
+  return router;
+}

@@ -1,0 +1,51 @@
+import { gridConvergence } from '../../../../shared/confidence/gridConvergence';
+import { metres, type ChecklistRule } from './types';
+
+/** m between the finest two grids. */
+const GOOD = 0.05;
+
+export const gridSize: ChecklistRule = ({ grids, run }) => {
+  const item = {
+    id: 'gridSize',
+    title: 'Cell size',
+    rule: 'The same case on three cell sizes, with the grid convergence index (Roache 1994; Celik et al. 2008); 0.05 m between the finest two is good (common practice).',
+  };
+  if (grids.length < 2)
+    return {
+      ...item,
+      outcome: 'asked',
+      finding: `Routed on cells of ${metres(run.cellSize, 1)} alone. Route it on other cell sizes too, or say why these cells are fine enough.`,
+    };
+  const [fine, medium, coarse] = grids;
+  const pairs = fine.peaks.flatMap(({ name, stage }) => {
+    const other = medium.peaks.find((peak) => peak.name === name);
+    return other ? [{ name, fine: stage, medium: other.stage }] : [];
+  });
+  const most = pairs.reduce(
+    (a, b) => (Math.abs(b.fine - b.medium) > Math.abs(a.fine - a.medium) ? b : a),
+    pairs[0],
+  );
+  const difference = most ? Math.abs(most.fine - most.medium) : 0;
+  const sizes = grids.map(({ cellSize }) => metres(cellSize, 1)).join(', ');
+  return {
+    ...item,
+    outcome: difference <= GOOD ? 'good' : 'look',
+    finding:
+      `Cells of ${sizes}: the finest two differ by at most ${metres(difference, 3)}${most ? `, at ${most.name}` : ''}.` +
+      (coarse && most ? orderOf(most.name, [fine, medium, coarse]) : ''),
+  };
+};
+
+type Grid = Parameters<ChecklistRule>[0]['grids'][number];
+
+function orderOf(name: string, grids: [Grid, Grid, Grid]): string {
+  const stages = grids.map(({ peaks }) => peaks.find((peak) => peak.name === name)?.stage);
+  if (stages.some((stage) => stage === undefined)) return '';
+  const { order, gciFine } = gridConvergence(
+    stages as [number, number, number],
+    grids.map(({ cellSize }) => cellSize) as [number, number, number],
+  );
+  return order === null || gciFine === null
+    ? ' The three do not tell an order.'
+    : ` Observed order ${order.toFixed(1)}, grid convergence index of the finest ${(100 * gciFine).toPrecision(2)} % of the stage.`;
+}

@@ -1,0 +1,15 @@
+import { counted, type ChecklistRule } from './types';
+
+export const warnings: ChecklistRule = ({ run }) => ({
+  id: 'warnings',
+  title: 'Warnings of the run',
+  outcome: run.warnings.length === 0 ? 'good' : 'look',
+  finding:
+    run.warnings.length === 0
+      ? 'None.'
+      : `${counted(run.warnings.length, 'warning')}: ${run.warnings
+          .slice(0, 5)
+          .map(({ message }) => message)
+          .join(' ')}${run.warnings.length > 5 ? ` And ${run.warnings.length - 5} more.` : ''}`,
+  rule: 'Each is understood and answered (common practice).',
+});
