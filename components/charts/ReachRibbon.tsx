@@ -20,6 +20,8 @@ export interface ReachRibbonProps {
   /** Chosen place, m; null before one is chosen. */
   at: number | null;
   onChange: (chainage: number) => void;
+  /** Places that can be chosen, m, rising; left out: every section and station. */
+  restAt?: readonly number[];
   unitSystem: UnitSystem;
   /** Width until the layout is known, px. */
   initialWidth?: number;
@@ -30,15 +32,15 @@ const SWAY = 7;
 
 /** The river as one line, a tick a section: choose the place by touch, drag or arrow keys. */
 export function ReachRibbon(props: ReachRibbonProps) {
-  const { sections, stations = NONE, advice = NONE, at, onChange, unitSystem } = props;
+  const { sections, stations = NONE, advice = NONE, at, onChange, restAt, unitSystem } = props;
   const { colours } = useTheme();
   const { width, measured } = useWidth(props.initialWidth);
   const places = useMemo(() => placesAlong(sections, stations), [sections, stations]);
-  const stops = useMemo(() => places.map((place) => place.chainage), [places]);
+  const stops = useMemo(() => restAt ?? places.map((place) => place.chainage), [restAt, places]);
   if (!places.length) return null;
 
   const x = scaleLinear(
-    [stops[0], stops[stops.length - 1]],
+    [places[0].chainage, places[places.length - 1].chainage],
     [INSET, Math.max(INSET, width - INSET)],
   );
   const curve = reachCurve(INSET, width - INSET, touch / 2, SWAY);

@@ -17,12 +17,20 @@ export interface Place {
 /** Whose daily work the studies are: everybody's but that of an administrator alone. */
 export const hasStudies = (me: Me): boolean => me.roles.some((role) => role !== 'administrator');
 
-/** Places outside a study. */
-export function housePlaces(me: Me): Place[] {
+/** Whose signature runs wait for. */
+export const checksRuns = (me: Me): boolean => me.roles.includes('seniorEngineer');
+
+/** Places outside a study; `waiting` is how many runs wait for a check. */
+export function housePlaces(me: Me, waiting?: number): Place[] {
   const places: Place[] = [];
   if (hasStudies(me)) places.push({ label: 'Studies', href: '/', path: '/', exact: true });
+  if (checksRuns(me))
+    places.push({ label: 'To check', href: '/queue', path: '/queue', aside: some(waiting) });
   if (me.roles.includes('administrator'))
-    places.push({ label: 'People', href: '/people', path: '/people' });
+    places.push(
+      { label: 'People', href: '/people', path: '/people' },
+      { label: 'Audit', href: '/audit', path: '/audit' },
+    );
   places.push({ label: 'Profile', href: '/profile', path: '/profile' });
   return places;
 }

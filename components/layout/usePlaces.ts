@@ -1,7 +1,8 @@
 import { useGlobalSearchParams, usePathname } from 'expo-router';
 import { useMe } from '../queries/SessionProvider';
 import { useStudy } from '../queries/studies';
-import { housePlaces, studyPlaces, type Place } from './places';
+import { useCheckQueue } from '../queries/reviews';
+import { checksRuns, housePlaces, studyPlaces, type Place } from './places';
 
 /** Where the person can go from here. */
 export function usePlaces(): { house: Place[]; study: Place[]; pathname: string } {
@@ -10,5 +11,10 @@ export function usePlaces(): { house: Place[]; study: Place[]; pathname: string 
   const { studyId } = useGlobalSearchParams<{ studyId?: string }>();
   const id = pathname.startsWith('/studies/') ? Number(studyId) : NaN;
   const { data } = useStudy(Number.isInteger(id) ? id : null);
-  return { house: housePlaces(me), study: data ? studyPlaces(data) : [], pathname };
+  const queue = useCheckQueue(checksRuns(me));
+  return {
+    house: housePlaces(me, queue.data?.length),
+    study: data ? studyPlaces(data) : [],
+    pathname,
+  };
 }

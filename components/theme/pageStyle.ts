@@ -12,5 +12,18 @@ body { background: ${paper}; color: ${ink}; }
 ::selection { background: ${waterTint}; }
 @media (prefers-reduced-motion: reduce) {
   *, *::before, *::after { animation-duration: 0.01ms !important; transition-duration: 0.01ms !important; }
-}`;
 }
+${PRINT}`;
+}
+
+/** On paper a screen is as long as it is: nothing scrolls, and what is pressed or navigated by is left out. */
+const PRINT = `
+@media print {
+  *:has([role="main"]), [role="main"], [role="main"] > div:first-child {
+    display: block !important; position: static !important; height: auto !important; max-height: none !important;
+    overflow: visible !important; flex: none !important;
+  }
+  [role="navigation"], [role="main"] > div:not(:first-child), button, [role="button"] { display: none !important; }
+  [role="main"] [role="region"], [role="note"], tr { break-inside: avoid; }
+  * { print-color-adjust: exact; -webkit-print-color-adjust: exact; }
+}`;

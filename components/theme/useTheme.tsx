@@ -1,5 +1,6 @@
 import { createContext, useContext, useEffect, useMemo, useState, type ReactNode } from 'react';
 import { useColorScheme } from 'react-native';
+import { usePrinting } from './usePrinting';
 import { pageStyle } from './pageStyle';
 import { keepThemeChoice, readThemeChoice, type ThemeChoice } from './themeChoice';
 import { COLOURS, type Colours, type Scheme } from './tokens';
@@ -18,11 +19,13 @@ const ThemeContext = createContext<Theme>({
   setChoice: () => undefined,
 });
 
-/** Light and dark by the system, or as the person chose. */
+/** Light and dark by the system, or as the person chose; paper is light. */
 export function ThemeProvider({ children }: { children: ReactNode }) {
   const system = useColorScheme();
   const [choice, setState] = useState(readThemeChoice);
-  const scheme: Scheme = choice === 'system' ? (system === 'dark' ? 'dark' : 'light') : choice;
+  const isPrinting = usePrinting();
+  const chosen: Scheme = choice === 'system' ? (system === 'dark' ? 'dark' : 'light') : choice;
+  const scheme = isPrinting ? 'light' : chosen;
 
   useEffect(() => {
     const id = 'spate-page-style';

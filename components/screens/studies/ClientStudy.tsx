@@ -5,9 +5,22 @@ import { Card } from '@/components/ui/Card';
 import { Facts } from '@/components/ui/Facts';
 import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
+import { IssuedPage } from '../issued/IssuedPage';
 
-/** The client's page before anything is issued: says so, and what will stand here. */
+/** The client's page: what was issued, and nothing else. */
 export function ClientStudy({ study, firmName }: { study: Study; firmName: string }) {
+  return (
+    <IssuedPage
+      study={study}
+      crumbs={[{ label: `Shared with you by ${firmName}` }]}
+      isClient
+      empty={<NothingIssued study={study} firmName={firmName} />}
+    />
+  );
+}
+
+/** Before anything is issued: says so, and what will stand here. */
+function NothingIssued({ study, firmName }: { study: Study; firmName: string }) {
   return (
     <Screen title={study.title} crumbs={[{ label: `Shared with you by ${firmName}` }]} narrow>
       <Notice still title="Nothing has been issued yet">

@@ -36,13 +36,21 @@ const study = (may: StudyAction[]): Study => ({
 const labels = (places: Place[]) => places.map((place) => place.label);
 
 test('an administrator alone has people, not studies', () => {
-  expect(labels(housePlaces(person('administrator')))).toEqual(['People', 'Profile']);
+  expect(labels(housePlaces(person('administrator')))).toEqual(['People', 'Audit', 'Profile']);
   expect(labels(housePlaces(person('administrator', 'modeller')))).toEqual([
     'Studies',
     'People',
+    'Audit',
     'Profile',
   ]);
   expect(labels(housePlaces(person('client')))).toEqual(['Studies', 'Profile']);
+});
+
+test('a senior engineer sees how many runs wait for a check', () => {
+  const [, queue] = housePlaces(person('seniorEngineer'), 3);
+  expect(queue).toMatchObject({ label: 'To check', path: '/queue', aside: '3' });
+  expect(housePlaces(person('seniorEngineer'), 0)[1].aside).toBeUndefined();
+  expect(labels(housePlaces(person('modeller')))).not.toContain('To check');
 });
 
 test('a study shows the places that the person may enter, with what is in them', () => {

@@ -13,11 +13,7 @@ export function RunResults({ run }: { run: Run }) {
   const { data: summary, error, refetch } = useRunSummary(run.id);
   if (summary) return <ResultsScreen run={run} summary={summary} />;
   return (
-    <Screen
-      title={run.scenarioName}
-      crumbs={runCrumbs(run)}
-      badge={<Badge {...runBadge(run)} />}
-    >
+    <Screen title={run.scenarioName} crumbs={runCrumbs(run)} badge={<Badge {...runBadge(run)} />}>
       {error ? (
         <ErrorState
           error={error}

@@ -1,0 +1,1 @@
+export { QueueScreen as default } from '@/components/screens/check/QueueScreen';

@@ -1,0 +1,1 @@
+export { IssuedPreview as default } from '@/components/screens/issued/IssuedPreview';

@@ -1,0 +1,1 @@
+export { VerificationPage as default } from '@/components/screens/verification/VerificationPage';
