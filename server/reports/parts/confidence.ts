@@ -22,11 +22,11 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
   heading(sheet, 'What was not done for this run');
   paragraph(
     sheet,
-    'Nothing below is part of this result. Where the modeller did it by other means, the words of the checklist say so.',
+    'None of this is part of the result. Where the modeller did it by other means, the words of the checklist say so.',
   );
   list(sheet, [
-    'Cell-size convergence: the run was not repeated on finer and coarser cells, so its discretisation error is not known in numbers.',
-    'Sensitivity: the run was not repeated with other roughness or another inflow.',
+    'Cell-size convergence: no repetition on finer and coarser cells belongs to this run, so its discretisation error is not known in numbers.',
+    'Sensitivity: no repetition with other roughness or another inflow belongs to this run.',
     'Ensemble: no band of likely results was computed; each number is one outcome of one set of inputs.',
     'Calibration: no observed marks or gauge records were compared with the result.',
   ]);

@@ -62,8 +62,10 @@ export function signOff(sheet: Sheet, { facts }: RunReport): void {
         at,
         doc.y,
         { width: width - CODE - 12, lineGap: 2.5 },
-      )
-      .text(address, { width: width - CODE - 12 }),
+      ),
+  );
+  tagged(sheet, 'Link', () =>
+    doc.text(address, at, doc.y, { width: width - CODE - 12, link: address, underline: true }),
   );
   doc.x = left;
   doc.y = y + CODE + 10;
