@@ -54,11 +54,13 @@ function run(cleanup: Cleanup, args: string[], env: Record<string, string>): voi
   });
   const { pid } = child;
   if (!pid) throw new Error(`${args[0]} could not be started.`);
+  let stopping = false;
   child.once('exit', (code) => {
-    if (code)
+    if (code && !stopping)
       console.error(`${path.basename(args[0]!)} ended with ${code}; Ctrl-C and start again.`);
   });
   cleanup.add(async () => {
+    stopping = true;
     for (const signal of ['SIGTERM', 'SIGKILL'] as const) {
       try {
         process.kill(-pid, signal);
