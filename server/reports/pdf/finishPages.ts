@@ -3,7 +3,7 @@ import { COLOUR } from './colours';
 import { FONT, type Sheet } from './sheet';
 
 const MARKS: Record<Standing, { word: string; line: string } | null> = {
-  preliminary: { word: 'PRELIMINARY', line: 'PRELIMINARY – not checked and not signed' },
+  preliminary: { word: 'PRELIMINARY', line: 'PRELIMINARY – not signed, not to be relied on' },
   signed: null,
   withdrawn: { word: 'WITHDRAWN', line: 'WITHDRAWN – not to be relied on' },
 };

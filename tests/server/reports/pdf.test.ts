@@ -103,7 +103,7 @@ it('is marked preliminary on every page until it is signed', async () => {
     'LETTER',
   );
   const pages = await pdfPages(pdf);
-  for (const page of pages) expect(page).toContain('PRELIMINARY – not checked and not signed');
+  for (const page of pages) expect(page).toContain('PRELIMINARY – not signed, not to be relied on');
   expect(pages.join(' ')).toContain('This run was not sent for checking');
   expect(pages.join(' ')).not.toContain('7K4Q');
   expect(await pdfInfo(pdf)).toMatch(/Page size:\s+612 x 792/);
