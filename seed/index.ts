@@ -13,6 +13,8 @@ import { quenlowValley } from './reaches/quenlowValley';
 import { damFailure, designFlood, largerFlood } from './scenarios';
 import { faultySurveyFile, surveyFile } from './surveyFiles';
 
+export { seedChecks } from './checks';
+
 const VESHALL: StudyBody = {
   title: 'Lower Veshall at Tornick',
   clientName: 'Tornick Town Council',
@@ -70,8 +72,9 @@ export async function seedDemo(services: Services): Promise<void> {
   const river = lowerVeshall();
   await seedRefusal(services, veshall, surveyor, river);
   const flood = await seedScenario(services, veshall, surveyor, modeller, river, designFlood);
-  await seedScenario(services, veshall, surveyor, modeller, river, largerFlood);
+  const larger = await seedScenario(services, veshall, surveyor, modeller, river, largerFlood);
   await seedRun(services, modeller, flood);
+  await seedRun(services, modeller, larger);
 
   const quenlow = await seedStudy(services, modeller, QUENLOW, QUENLOW_STATIONS);
   await share(services, quenlow, surveyor, 'surveyor');

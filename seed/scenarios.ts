@@ -5,9 +5,12 @@ import { QUENLOW_DAM, quenlowReservoir } from './reaches/quenlowValley';
 
 const HOUR = 3600;
 
+export const DESIGN_FLOOD = '1 in 100 year';
+export const LARGER_FLOOD = '1 in 100 year, 20 % more';
+
 /** The design flood of the Lower Veshall. */
 export function designFlood(reachId: number, sections: Section[]): ScenarioBody {
-  const body = newScenario('1 in 100 year', reachId, sections);
+  const body = newScenario(DESIGN_FLOOD, reachId, sections);
   return {
     ...body,
     startsAt: '2026-11-14T00:00:00.000Z',
@@ -31,7 +34,7 @@ export function largerFlood(reachId: number, sections: Section[]): ScenarioBody 
   if (body.upstream.kind !== 'generated') return body;
   return {
     ...body,
-    name: '1 in 100 year, 20 % more',
+    name: LARGER_FLOOD,
     note: 'Allowance for a wetter climate.',
     upstream: { ...body.upstream, peakFlow: 1.2 * 490 },
   };

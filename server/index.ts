@@ -2,7 +2,7 @@ import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { buildApp } from './app';
 import { compose, type Services } from './composition';
-import { seedDemo } from '../seed';
+import { seedChecks, seedDemo } from '../seed';
 import { addressOf, readEnv, type Env } from './env';
 
 export interface RunningServer {
@@ -23,6 +23,7 @@ export async function startServer(env: Env): Promise<RunningServer> {
     if (env.demoData) await seedDemo(services);
     const http = await listen(services);
     services.runs.start();
+    if (env.demoData) services.background.run('checking the demo runs', () => seedChecks(services));
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);
     sweep();
     const sweeping = setInterval(sweep, SWEEP_MS);

@@ -1,0 +1,123 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
+import { changeOutlet, describeOutletChange } from '../../../server/services/review/changeOutlet';
+import { checklistItems } from '../../../server/services/review/checklist/items';
+import type { ChecklistFacts } from '../../../server/services/review/checklist/types';
+import { sampleBlocks } from '../results/sampleRun';
+
+let facts: ChecklistFacts;
+beforeAll(async () => {
+  const { blocks, caseFile } = sampleBlocks();
+  facts = {
+    caseFile,
+    run: { ...(await blocks.facts()), warnings: [] },
+    places: await blocks.places(),
+    sections: caseFile.sections.map(({ chainage, id }) => ({
+      id,
+      chainage,
+      fellDry: false,
+      rewetted: false,
+      peakFroude: 0.4,
+      peakStage: 53,
+      lowerEnd: 55,
+    })),
+    advice: [],
+    probe: null,
+    grids: [{ runNumber: 1, cellSize: 25, peaks: [{ name: 'Mill', stage: 52.5 }] }],
+  };
+});
+
+const item = (id: string, change: Partial<ChecklistFacts> = {}) =>
+  checklistItems({ ...facts, ...change }).find((found) => found.id === id)!;
+
+test.each([
+  [0.0009, 'good'],
+  [-0.0009, 'good'],
+  [0.005, 'look'],
+  [-0.011, 'bad'],
+])('a volume error of %p is %s', (relativeError, outcome) => {
+  // Below 0.1 % good, above 1 % rejected: common practice.
+  const run = { ...facts.run, volume: { ...facts.run.volume, relativeError } };
+  expect(item('volumeBalance', { run }).outcome).toBe(outcome);
+});
+
+test('the shortest step is that of the fastest place: c = v + sqrt(g d)', () => {
+  // By hand: 2 m/s and 3 m deep, g = 9.80665 m/s²: 2 + 5.424 = 7.424 m/s; 0.8 · 25 m / 7.424 m/s = 2.69 s.
+  expect(item('timeStep').finding).toContain('2.69 s on cells of 25');
+  const numerics = { ...facts.caseFile.numerics, courant: 1.2 };
+  expect(item('timeStep', { caseFile: { ...facts.caseFile, numerics } }).outcome).toBe('bad');
+});
+
+test('the supercritical length is half the way to each neighbour', () => {
+  const [a, b, c] = facts.sections;
+  const sections = [a, { ...b, peakFroude: 1.2 }, c];
+  // Sections at 0, 1000 and 2500 m: 500 m above and 750 m below the middle one.
+  expect(item('supercritical', { sections })).toMatchObject({ outcome: 'look' });
+  expect(item('supercritical', { sections }).finding).toContain('1250 m');
+});
+
+test('sections that fall dry, that are overtopped, and roughness that no table knows', () => {
+  const [a, ...rest] = facts.sections;
+  const dry = { sections: [{ ...a, fellDry: true, rewetted: true }, ...rest] };
+  expect(item('dryCells', dry).outcome).toBe('look');
+  expect(item('dryCells').outcome).toBe('good');
+  const high = { sections: [{ ...a, peakStage: 55.25 }, ...rest] };
+  expect(item('sectionEnds', high)).toMatchObject({ outcome: 'bad' });
+  expect(item('sectionEnds', high).finding).toContain('0.25 m');
+  const [section, ...others] = facts.caseFile.sections;
+  const odd = { ...section, roughness: [[0, 0.4]] as [number, number][] };
+  const caseFile: CaseFile = { ...facts.caseFile, sections: [odd, ...others] };
+  expect(item('roughness', { caseFile }).outcome).toBe('look');
+});
+
+test('the outlet is judged by the place that moves most', () => {
+  const probe = (there: number): ChecklistFacts['probe'] => ({
+    runNumber: 2,
+    state: 'routed',
+    change: 'half of the slope at the outlet',
+    peaks: [
+      { name: 'Mill', here: 52.5, there: 52.501 },
+      { name: 'Bridge', here: 52, there },
+    ],
+  });
+  expect(item('outletInfluence').outcome).toBe('asked');
+  expect(item('outletInfluence', { probe: probe(52.01) }).outcome).toBe('good');
+  expect(item('outletInfluence', { probe: probe(51.95) }).outcome).toBe('look');
+  const far = item('outletInfluence', { probe: probe(52.2) });
+  expect(far.outcome).toBe('bad');
+  expect(far.finding).toContain('0.200 m, at Bridge');
+  expect(item('outletInfluence', { probe: { ...probe(52)!, state: 'running' } }).outcome).toBe(
+    'asked',
+  );
+});
+
+test('three grids tell the order and the index', () => {
+  // f = 50 + c h²: order 2. Fine 50.01 at 10 m, 50.04 at 20 m, 50.16 at 40 m; GCI = 1.25 · 0.03 / 50.01 / 3 = 0.025 %.
+  const grids = [
+    [10, 50.01],
+    [20, 50.04],
+    [40, 50.16],
+  ].map(([cellSize, stage], k) => ({
+    runNumber: k + 1,
+    cellSize,
+    peaks: [{ name: 'Mill', stage }],
+  }));
+  const found = item('gridSize', { grids });
+  expect(found.outcome).toBe('good');
+  expect(found.finding).toContain('order 2.0');
+  expect(found.finding).toContain('0.025 %');
+  expect(item('gridSize', { grids: grids.slice(1) }).outcome).toBe('look');
+  expect(item('gridSize').outcome).toBe('asked');
+});
+
+test('every kind of outlet is changed, but for a closed end', () => {
+  const at = (downstream: CaseFile['downstream']) =>
+    changeOutlet({ ...facts.caseFile, downstream })?.downstream;
+  expect(at({ kind: 'normalDepth', slope: 0.001 })).toEqual({ kind: 'normalDepth', slope: 0.0005 });
+  expect(at({ kind: 'stage', times: [0], stages: [10] })).toMatchObject({ stages: [10.5] });
+  expect(at({ kind: 'rating', stages: [1, 2], flows: [0, 9] })).toMatchObject({
+    stages: [1.5, 2.5],
+  });
+  expect(at({ kind: 'open' })).toMatchObject({ kind: 'normalDepth' });
+  expect(at({ kind: 'wall' })).toBeUndefined();
+  expect(describeOutletChange({ kind: 'wall' })).toBeNull();
+});
