@@ -34,7 +34,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
     ['Structures', 'none: bridges, culverts and weirs are not represented'],
   ]);
   const inflow = inflowOutline(caseFile);
-  if (run.inflowPeak)
+  if (run.inflowPeak && inflow.times.length > 0)
     figure(
       sheet,
       [
@@ -80,7 +80,6 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
 const UPSTREAM: Record<CaseFile['upstream']['kind'], string> = {
   inflow: 'inflow hydrograph',
   stage: 'stage against time',
-  reservoir: 'reservoir',
   wall: 'closed',
 };
 const upstreamText = ({ upstream }: CaseFile) => UPSTREAM[upstream.kind];
@@ -91,7 +90,6 @@ const OUTLET: Record<CaseFile['downstream']['kind'], string> = {
   rating: 'rating curve',
   criticalDepth: 'critical depth (free overfall)',
   open: 'open, waves leave',
-  reservoir: 'reservoir',
   wall: 'closed',
 };
 function outletText({ downstream }: CaseFile, unit: Unit): string {
