@@ -17,6 +17,8 @@ import { createRhs } from './rhs';
 import type { RouteOptions } from './routeOptions';
 import { RunFailed } from './runErrors';
 import { createLaterals } from './sources/laterals';
+import { createStructureRecorder } from './structures/structureRecorder';
+import { createStructureSet } from './structures/structureSet';
 import { outputTimes, stepTowards } from './time/outputTimes';
 import { createSteps } from './time/steps';
 import { createTimeStep } from './time/timeStep';
@@ -46,17 +48,19 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   const tables = createCellTables(workspace);
   const cellState = createCellState(workspace, tables);
   const laterals = createLaterals(caseFile.laterals, grid);
+  const warnings = createRunWarnings(caseFile, workspace, grid);
+  const structures = createStructureSet(caseFile, workspace, tables, grid, warnings.add);
   const rhs = createRhs(
     workspace,
     tables,
-    createUpstreamBoundary(workspace, tables, caseFile.upstream),
+    structures?.boundary ?? createUpstreamBoundary(workspace, tables, caseFile.upstream),
     createDownstreamBoundary(workspace, tables, caseFile.downstream),
     order,
+    structures,
   );
   const timeStep = createTimeStep(workspace, tables, laterals, courant, grid.chainage);
   const ledger = createVolumeLedger(workspace);
   const steps = createSteps(workspace, cellState, laterals, ledger);
-  const warnings = createRunWarnings(caseFile, workspace, grid);
   const polling = createPolling(options, duration);
 
   const mustSettle = setInitialState(
@@ -66,6 +70,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     cellState,
     grid,
     laterals,
+    structures,
     warnings.add,
   );
   if (mustSettle) {
@@ -78,6 +83,9 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
 
   const sectionRecorder = createSectionRecorder(caseFile, workspace, grid);
   const cellRecorder = createCellRecorder(workspace, grid);
+  const structureRecorder = structures ? createStructureRecorder(structures) : null;
+  const pool = structures?.pool ?? null;
+  const { fluxArea } = workspace;
   const times = outputTimes(duration, outputInterval);
   ledger.open();
   let time = 0;
@@ -85,11 +93,14 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   let next = 0;
   for (;;) {
     if (laterals.any) laterals.setTime(time);
+    structures?.follow(time);
     const endSpeed = rhs(time);
+    structureRecorder?.follow(time);
     sectionRecorder.follow(time);
     cellRecorder.follow(time);
     if (time === times[next]) {
       sectionRecorder.output();
+      structureRecorder?.output(time);
       warnings.watch(time);
       options.onOutput?.({ index: next, time, ...cellRecorder.snapshot() });
       next++;
@@ -108,17 +119,23 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     const until = dt === times[next] - time ? times[next] : time + dt;
 
     steps.predict(dt);
+    pool?.predict(time, dt, fluxArea[0]);
     if (order === 2) {
       if (laterals.any) laterals.setTime(until);
       rhs(until);
       steps.correct(dt);
-    } else steps.accept(dt);
+      pool?.correct(until, dt, fluxArea[0]);
+    } else {
+      steps.accept(dt);
+      pool?.accept(until, dt, fluxArea[0]);
+    }
     time = until;
     stepCount++;
     polling.poll(time, stepCount);
   }
   polling.finish(time, stepCount);
 
+  const reservoir = structureRecorder?.reservoir() ?? null;
   const sectionResults = sectionRecorder.results();
   return {
     format: RESULT_FORMAT,
@@ -134,6 +151,8 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     },
     sections: sectionResults,
     cells: cellRecorder.results(),
+    ...(structureRecorder ? { structures: structureRecorder.structures() } : {}),
+    ...(reservoir ? { reservoir } : {}),
     volume: ledger.balance(),
     steps: stepCount,
     cellUpdates: stepCount * grid.cells * order,

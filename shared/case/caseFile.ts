@@ -1,3 +1,5 @@
+import type { ReservoirInput, StructureInput } from './structures';
+
 /**
  * The case file: everything that a run depends on, in one JSON document.
  * Units are SI (m, s, m³/s). Stages and elevations are above the datum of the study; chainage grows downstream.
@@ -31,7 +33,10 @@ export interface StageSeries {
 }
 
 export type Upstream =
-  ({ kind: 'inflow' } & FlowSeries) | ({ kind: 'stage' } & StageSeries) | { kind: 'wall' };
+  | ({ kind: 'inflow' } & FlowSeries)
+  | ({ kind: 'stage' } & StageSeries)
+  | ({ kind: 'reservoir' } & ReservoirInput)
+  | { kind: 'wall' };
 
 export type Downstream =
   | { kind: 'normalDepth'; slope: number }
@@ -77,8 +82,7 @@ export interface CaseFile {
   upstream: Upstream;
   downstream: Downstream;
   laterals: Lateral[];
-  /** Always empty in this version of the format. */
-  structures: never[];
+  structures: StructureInput[];
   initial: Initial;
   numerics: Numerics;
 }

@@ -5,6 +5,8 @@ export const CASE_LIMITS = {
   roughnessZonesPerSection: 2000,
   cells: 50_000,
   laterals: 500,
+  structures: 200,
+  crestPoints: 500,
   seriesLength: 100_000,
   outputTimes: 20_000,
   /** Numbers kept in the result of all sections: sections × output times. */

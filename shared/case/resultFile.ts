@@ -67,6 +67,44 @@ export interface VolumeBalance {
   relativeError: number;
 }
 
+export type StructureRegime =
+  'dry' | 'closed' | 'free' | 'drowned' | 'pipe' | 'drownedPipe' | 'rating';
+
+/** One structure; each array has one entry an output time. */
+export interface StructureResult {
+  id: string;
+  kind: string;
+  /** The boundary between cells at which it was computed (m) */
+  chainage: number;
+  /** Positive downstream */
+  flow: number[];
+  stageUp: number[];
+  stageDown: number[];
+  regime: StructureRegime[];
+  /** Of every time step */
+  peak: { flow: number; flowTime: number; stageUp: number; stageUpTime: number };
+  /** Of a breach: bottom width and bottom level (m) */
+  breach?: { width: number[]; bottom: number[] };
+}
+
+/** The level pool at the head of the reach; each array has one entry an output time. */
+export interface ReservoirResult {
+  stage: number[];
+  /** m³ */
+  volume: number[];
+  inflow: number[];
+  release: number[];
+  /** m³; error = final - initial - inflow + release */
+  balance: {
+    initial: number;
+    inflow: number;
+    release: number;
+    final: number;
+    error: number;
+    relativeError: number;
+  };
+}
+
 export type WarningCode =
   | 'aboveSurvey'
   | 'supercritical'
@@ -74,6 +112,7 @@ export type WarningCode =
   | 'initialDry'
   | 'initialLimited'
   | 'damMoved'
+  | 'structureMoved'
   | 'lateralLimited'
   | 'frictionless'
   | 'outletSupercritical'
@@ -95,6 +134,10 @@ export interface ResultFile {
   arrivalThreshold: ArrivalThreshold;
   sections: SectionResult[];
   cells: CellResults;
+  /** Where the case has any. */
+  structures?: StructureResult[];
+  /** Where the upstream end is one. */
+  reservoir?: ReservoirResult;
   volume: VolumeBalance;
   steps: number;
   cellUpdates: number;

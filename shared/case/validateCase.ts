@@ -9,6 +9,7 @@ import { Faults, kindOf, type CaseFault } from './validate/faults';
 import { checkInitial } from './validate/initialFaults';
 import { checkNumerics } from './validate/numericsFaults';
 import { checkSections } from './validate/sectionFaults';
+import { checkStructures } from './validate/structureFaults';
 
 export type { CaseFault } from './validate/faults';
 
@@ -56,18 +57,11 @@ export function validateCase(value: unknown): CheckedCase {
   if (has('upstream')) checkUpstream(faults, value.upstream);
   if (has('downstream')) checkDownstream(faults, value.downstream);
   if (has('laterals')) checkLaterals(faults, value.laterals, ends);
-  if (has('structures')) checkStructures(faults, value.structures);
+  if (has('structures')) checkStructures(faults, value, ends);
   if (has('initial')) checkInitial(faults, value.initial, ends, value.upstream, value.downstream);
   if (has('numerics')) checkNumerics(faults, value.numerics, ends, count);
   const sound = faults.list.length === 0;
   return { faults: faults.list, caseFile: sound ? (value as unknown as CaseFile) : null };
-}
-
-function checkStructures(faults: Faults, value: unknown): void {
-  if (!faults.array('structures', value, 0, Infinity)) return;
-  if (value.length > 0) {
-    faults.add('structures', 'are not computed by this version; leave the list empty');
-  }
 }
 
 function reachEnds(sections: unknown): ReachEnds {

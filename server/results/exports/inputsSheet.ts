@@ -106,6 +106,7 @@ export function inputsSheet(run: ExportedRun, caseFile: CaseFile, facts: RunFact
 const UPSTREAM_WORDS: Record<CaseFile['upstream']['kind'], string> = {
   inflow: 'Inflow hydrograph',
   stage: 'Stage against time',
+  reservoir: 'Reservoir',
   wall: 'Closed',
 };
 const OUTLET_WORDS: Record<CaseFile['downstream']['kind'], string> = {

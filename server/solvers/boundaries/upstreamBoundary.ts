@@ -23,6 +23,8 @@ export function createUpstreamBoundary(
         upstreamEnd(),
         createSeries(upstream.times, upstream.stages),
       );
+    // The pool of a reservoir makes its own end: structures/reservoirBoundary.ts.
+    case 'reservoir':
     case 'wall':
       return createWallBoundary(workspace, tables, upstreamEnd());
   }

@@ -5,6 +5,7 @@ import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import type { Laterals } from '../sources/laterals';
 import { createSeries } from '../sources/series';
+import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 import { steadyState } from './steadyState';
 
@@ -19,6 +20,7 @@ export function setInitialState(
   cellState: CellState,
   grid: Grid,
   laterals: Laterals,
+  structures: StructureSet | null,
   warn: (warning: RunWarning) => void,
 ): boolean {
   const { n, area, flow, bed, stage, celerity, dryDepth } = workspace;
@@ -77,7 +79,14 @@ export function setInitialState(
       return false;
     }
     case 'steady': {
-      const { stages, flows } = steadyState(caseFile, workspace, tables, grid, laterals);
+      const { stages, flows } = steadyState(
+        caseFile,
+        workspace,
+        tables,
+        grid,
+        laterals,
+        structures,
+      );
       for (let i = 1; i <= n; i++) put(i, stages[i], flows[i]);
       const moves = flows.some((q) => q > 0) || caseFile.upstream.kind === 'stage';
       if (!moves) {

@@ -1,6 +1,7 @@
 import { createEndSection } from '../boundaries/endSection';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
+import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 
 /**
@@ -8,13 +9,14 @@ import type { Workspace } from '../workspace';
  *   [Q²/A] + g mean(A) [η] + g Δx mean(A S) = 0,  S = Q|Q|/K²,
  * first upstream from `outletStage` on the subcritical branch, with critical depth where there is none; then downstream
  * from every such control on the supercritical branch, as far as its force Q²/A + g I1 is the greater (the rest is a
- * hydraulic jump). Chow (1959), chapters 9-10 and 15. Returns stages (m); `flows` are m³/s, not negative.
+ * hydraulic jump). Chow (1959), chapters 9-10 and 15. At a structure the stage above is what its flow needs. Returns stages (m); `flows` are m³/s, not negative.
  */
 export function steadyProfile(
   workspace: Workspace,
   tables: CellTables,
   flows: Float64Array,
   outletStage: number,
+  structures: StructureSet | null = null,
 ): Float64Array {
   const { n, dx, gravity, bed } = workspace;
   const stages = new Float64Array(n + 2);
@@ -41,7 +43,9 @@ export function steadyProfile(
   stages[n + 1] = Math.max(outletStage, critical[n + 1]);
   for (let i = n; i >= 0; i--) {
     const next = stages[i + 1];
-    if (flows[i] > 0 && flows[i + 1] > 0) {
+    const held = structures?.stageAbove(i, flows[i], next) ?? null;
+    if (held !== null) stages[i] = Math.max(held, critical[i]);
+    else if (flows[i] > 0 && flows[i + 1] > 0) {
       stages[i] = risingRoot((eta) => -residual(i, eta, next), critical[i], 0.1);
     } else {
       stages[i] = Math.max(next, bed[i]);
@@ -57,6 +61,10 @@ export function steadyProfile(
     shooting = shooting || stages[i] === critical[i];
     if (!shooting || !(flows[i] > 0) || !(flows[i + 1] > 0)) continue;
     const j = i + 1;
+    if (structures?.holds(i)) {
+      shooting = false;
+      continue;
+    }
     const here = stages[i];
     if (residual(i, here, critical[j]) >= 0) {
       shooting = false;

@@ -7,6 +7,7 @@ import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import type { Laterals } from '../sources/laterals';
 import { createSeries } from '../sources/series';
+import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 import { steadyProfile } from './steadyProfile';
 
@@ -23,6 +24,7 @@ export function steadyState(
   tables: CellTables,
   grid: Grid,
   laterals: Laterals,
+  structures: StructureSet | null,
 ): SteadyState {
   const { n, bed } = workspace;
   const { upstream, downstream } = caseFile;
@@ -35,7 +37,7 @@ export function steadyState(
   const stateFor = (inflow: number): SteadyState => {
     const flows = flowsFor(inflow);
     const outlet = outletStage(flows[n + 1]);
-    return { flows, stages: steadyProfile(workspace, tables, flows, outlet) };
+    return { flows, stages: steadyProfile(workspace, tables, flows, outlet, structures) };
   };
 
   switch (upstream.kind) {
@@ -43,6 +45,8 @@ export function steadyState(
       return stateFor(createSeries(upstream.times, upstream.flows)(0));
     case 'wall':
       return stateFor(0);
+    case 'reservoir':
+      return stateFor(structures?.firstRelease() ?? 0);
     case 'stage': {
       const wanted = createSeries(upstream.times, upstream.stages)(0);
       if (stateFor(0).stages[0] >= wanted) return stateFor(0);

@@ -6,6 +6,13 @@ export function vanLeer(a: number, b: number): number {
   return product > 0 ? (2 * product) / (a + b) : 0;
 }
 
+/** End cells know one side only: its difference, at most twice their neighbour's slope and of the same sign. */
+export function oneSided(difference: number, neighbour: number): number {
+  if (difference * neighbour <= 0) return 0;
+  const most = 2 * Math.abs(neighbour);
+  return Math.max(-most, Math.min(most, difference));
+}
+
 /**
  * Second-order reconstruction: limited differences over each cell of stage (m) and flow (m³/s), into `slopeStage` and
  * `slopeFlow`. No slope where a bed of the three cells reaches the water surface; the slope of the stage is at most
@@ -13,13 +20,6 @@ export function vanLeer(a: number, b: number): number {
  */
 export function createLimitedSlopes(workspace: Workspace): () => void {
   const { n, stage, flow, reach, slopeStage, slopeFlow, slopeFloor } = workspace;
-
-  /** End cells know one side only: its difference, at most twice their neighbour's slope and of the same sign. */
-  function oneSided(difference: number, neighbour: number): number {
-    if (difference * neighbour <= 0) return 0;
-    const most = 2 * Math.abs(neighbour);
-    return Math.max(-most, Math.min(most, difference));
-  }
 
   function limitEnd(i: number, inner: number): void {
     const [lo, hi] = i < inner ? [i, inner] : [inner, i];

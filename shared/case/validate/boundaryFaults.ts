@@ -1,5 +1,6 @@
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
+import { checkReservoir } from './reservoirFaults';
 import { checkSeries } from './seriesFaults';
 
 /** Chainages of the first and the last section, where they can be used. */
@@ -7,7 +8,7 @@ export type ReachEnds = [number, number] | null;
 
 export function checkUpstream(faults: Faults, value: unknown): void {
   const path = 'upstream';
-  const kind = faults.kind(path, value, ['inflow', 'stage', 'wall']);
+  const kind = faults.kind(path, value, ['inflow', 'stage', 'reservoir', 'wall']);
   if (kind === 'inflow' && faults.record(path, value, ['kind', 'times', 'flows'])) {
     const rule = { at: 'times', values: ['flows'], notNegative: ['flows'] } as const;
     checkSeries(faults, path, value, rule);
@@ -15,6 +16,7 @@ export function checkUpstream(faults: Faults, value: unknown): void {
   if (kind === 'stage' && faults.record(path, value, ['kind', 'times', 'stages'])) {
     checkSeries(faults, path, value, { at: 'times', values: ['stages'] });
   }
+  if (kind === 'reservoir') checkReservoir(faults, path, value);
   if (kind === 'wall') faults.record(path, value, ['kind']);
 }
 

@@ -10,6 +10,8 @@ export interface SeriesRule {
   notNegative?: readonly string[];
   /** Keys among them whose values cannot fall */
   notFalling?: readonly string[];
+  /** Keys among them whose values must rise */
+  rising?: readonly string[];
   /** Fewest entries; 1 by default */
   least?: number;
 }
@@ -19,6 +21,7 @@ const UNITS: Record<string, string> = {
   chainages: 'm',
   stages: 'm',
   flows: 'm³/s',
+  volumes: 'm³',
 };
 
 /** Parallel lists of places and values in the record at `path`. */
@@ -53,6 +56,9 @@ export function checkSeries(
       if (rule.notNegative?.includes(key) && value < 0) {
         faults.add(at, `is ${value} ${UNITS[key]}; it cannot be negative`);
       }
+      if (rule.rising?.includes(key) && k > 0 && value <= values[k - 1]) {
+        faults.add(at, `is ${value} ${UNITS[key]}, not above the value before it; it must rise`);
+      }
       if (rule.notFalling?.includes(key) && k > 0 && value < values[k - 1]) {
         faults.add(at, `is ${value} ${UNITS[key]}, below the value before it; it must not fall`);
       }
@@ -74,7 +80,7 @@ function numbers(
   value.forEach((entry, k) => {
     if (!faults.number(`${path}[${k}]`, entry, `one of the ${what} in ${UNITS[what]}`))
       fine = false;
-    else if (Math.abs(entry) > 1e9) {
+    else if (Math.abs(entry) > (what === 'volumes' ? 1e13 : 1e9)) {
       fine = faults.add(`${path}[${k}]`, `${entry} is out of range; check the unit`);
     }
   });

@@ -63,7 +63,7 @@ describe('the route command', () => {
     expect(stdout).toBe('');
     expect(stderr.trim().split('\n')).toEqual([
       'title: must be a text, not 5',
-      'structures: are not computed by this version; leave the list empty',
+      expect.stringContaining('structures[0].kind: must be one of weir'),
     ]);
   });
 

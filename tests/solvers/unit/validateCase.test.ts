@@ -143,7 +143,7 @@ describe('validation of a case', () => {
       (d) => d.laterals.push({ from: 90, to: 20, times: [0], flows: [1] }),
       'laterals[0]: from 90 m lies below',
     ],
-    ['a structure', (d) => put(d, 'structures', [{}]), 'structures: are not computed'],
+    ['a structure', (d) => put(d, 'structures', [{}]), 'structures[0].kind: must be one of weir'],
     [
       'a dam outside',
       (d) => (d.initial = { kind: 'dam', chainage: 2000, stageAbove: 5, stageBelow: null }),

@@ -1,0 +1,63 @@
+/** Structures of the case file. SI units; levels are above the datum of the study, offsets run across the river. */
+
+/** [offset, level] in m, offsets never decreasing. */
+export type CrestPoint = [number, number];
+
+interface StructureBase {
+  id: string;
+  /** Where it stands (m): the boundary between two cells nearest to it */
+  chainage: number;
+}
+
+/** Water that flows over a crest, either way. */
+export interface WeirInput extends StructureBase {
+  kind: 'weir';
+  crest: CrestPoint[];
+  form: 'broad' | 'sharp';
+  /** Discharge coefficient C_d; by default 1 for a broad crest, 0.611 + 0.08 h/P for a sharp one */
+  coefficient?: number;
+}
+
+/** What makes a dam begin to fail: a time (s), or the stage (m) of the water above it. */
+export type BreachTrigger = { kind: 'time'; time: number } | { kind: 'stage'; stage: number };
+
+/** A dam that fails: a crest in which a trapezoid grows. */
+export interface BreachInput extends StructureBase {
+  kind: 'breach';
+  /** The top of the dam, over which water flows as over a broad crest */
+  crest: CrestPoint[];
+  trigger: BreachTrigger;
+  mode: 'overtopping' | 'piping';
+  growth: 'linear' | 'sine';
+  /** s; 0: at once */
+  formationTime: number;
+  /** Offset (m) of the middle of the breach; by default of the middle of the crest */
+  centre?: number;
+  /** Of the full breach (m) */
+  bottomWidth: number;
+  /** Of the full breach (m) */
+  bottomLevel: number;
+  /** Horizontal to vertical */
+  sideSlope: number;
+  /** Where it begins (m): by default the crest at its middle; needed for piping */
+  startLevel?: number;
+  /** C of Q = C b h^1.5, m^0.5/s; by default 1.7 */
+  weirCoefficient?: number;
+  /** By default 0.6 */
+  orificeCoefficient?: number;
+}
+
+export type StructureInput = WeirInput | BreachInput;
+
+export type StructureKind = StructureInput['kind'];
+
+/** A level pool at the head of the reach. The structures at the first chainage stand in its dam. */
+export interface ReservoirInput {
+  /** Storage (m³) by stage (m), both rising; linear in between and beyond */
+  stages: number[];
+  volumes: number[];
+  initialStage: number;
+  inflow: { times: number[]; flows: number[] };
+  /** Flow (m³/s) into the reach by stage of the pool (m), beside the structures */
+  spillway?: { stages: number[]; flows: number[] };
+}
