@@ -8,6 +8,7 @@ import { facts as factRows, table } from '../pdf/table';
 import { heading, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
 import { timeText, unitsOf } from '../words';
+import { structures } from './structures';
 
 type Unit = ReturnType<typeof unitsOf>;
 
@@ -31,7 +32,9 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
     ['Outlet', outletText(caseFile, unit)],
     ['Initial state', initialText(caseFile, unit)],
     ['Lateral inflows', laterals.length === 0 ? 'none' : String(laterals.length)],
-    ['Structures', 'none: bridges, culverts and weirs are not represented'],
+    ...(caseFile.structures.length === 0
+      ? ([['Structures', 'none: no bridge, culvert or weir is represented']] as const)
+      : []),
   ]);
   const inflow = inflowOutline(caseFile);
   if (run.inflowPeak && inflow.times.length > 0)
@@ -65,6 +68,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
       ]),
     );
   }
+  structures(sheet, caseFile, facts.study.unitSystem);
   heading(sheet, 'Numerical settings');
   factRows(sheet, [
     ['Cells', `${formatNumber(run.cellCount, 0)} of ${unit(run.cellSize, 'length')}`],
@@ -80,6 +84,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
 const UPSTREAM: Record<CaseFile['upstream']['kind'], string> = {
   inflow: 'inflow hydrograph',
   stage: 'stage against time',
+  reservoir: 'reservoir',
   wall: 'closed',
 };
 const upstreamText = ({ upstream }: CaseFile) => UPSTREAM[upstream.kind];
