@@ -1,5 +1,5 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
-import type { BreachInput, StructureInput } from '../../../shared/case/structures';
+import type { BreachInput, CrestPoint, StructureInput } from '../../../shared/case/structures';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
 import type { UnitSystem } from '../../../shared/units/units';
 import { hydrograph } from '../charts/hydrograph';
@@ -37,13 +37,10 @@ export function structures(
       figure(sheet, [hydrograph('Inflow to the reservoir', series, peak, 'flow', system)], 160, '');
   }
   for (const structure of built) {
-    heading(sheet, `${NAMES[structure.kind]} ${structure.id}`);
+    heading(sheet, `${nameOf(structure)} ${structure.id}`);
     factRows(sheet, [
       ['Chainage', unit(structure.chainage, 'chainage')],
-      ['Lowest crest', unit(lowest(structure), 'elevation')],
-      ...(structure.kind === 'weir'
-        ? [['Crest', structure.form === 'broad' ? 'broad' : 'sharp'] as const]
-        : breachRows(structure, unit)),
+      ...measuresOf(structure, unit),
     ]);
   }
   if (built.some(({ kind }) => kind === 'breach'))
@@ -53,10 +50,26 @@ export function structures(
     );
 }
 
-const NAMES: Record<StructureInput['kind'], string> = { weir: 'Weir', breach: 'Failing dam' };
-const lowest = ({ crest }: StructureInput) => Math.min(...crest.map(([, level]) => level));
+type Rows = (readonly [string, string])[];
 
-function breachRows(breach: BreachInput, unit: Unit): (readonly [string, string])[] {
+function nameOf({ kind }: StructureInput): string {
+  if (kind === 'breach') return 'Failing dam';
+  return kind.charAt(0).toUpperCase() + kind.slice(1);
+}
+
+/** What is told of each kind; of one without words of its own, where its measures stand. */
+function measuresOf(structure: StructureInput, unit: Unit): Rows {
+  if (structure.kind === 'breach')
+    return [crestRow(structure, unit), ...breachRows(structure, unit)];
+  if (structure.kind === 'weir')
+    return [crestRow(structure, unit), ['Crest', structure.form === 'broad' ? 'broad' : 'sharp']];
+  return [['Measures', 'as in the case file of this hash']];
+}
+
+const crestRow = ({ crest }: { crest: CrestPoint[] }, unit: Unit) =>
+  ['Lowest crest', unit(Math.min(...crest.map(([, level]) => level)), 'elevation')] as const;
+
+function breachRows(breach: BreachInput, unit: Unit): Rows {
   const { bottomLevel, bottomWidth, formationTime, mode, sideSlope, trigger } = breach;
   return [
     [
