@@ -21,9 +21,10 @@ const PRINT = `
 @media print {
   *:has([role="main"]), [role="main"], [role="main"] > div:first-child {
     display: block !important; position: static !important; height: auto !important; max-height: none !important;
-    overflow: visible !important; flex: none !important;
+    overflow: visible !important; flex: none !important; background: none !important;
   }
-  [role="navigation"], [role="main"] > div:not(:first-child), button, [role="button"] { display: none !important; }
+  html { background: none; }
+  [role="navigation"]:not([role="main"] *), [role="main"] > div:not(:first-child), [role="button"] { display: none !important; }
   [role="main"] [role="region"], [role="note"], tr { break-inside: avoid; }
   * { print-color-adjust: exact; -webkit-print-color-adjust: exact; }
 }`;

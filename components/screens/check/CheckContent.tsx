@@ -3,7 +3,9 @@ import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
 import { Cautions } from '@/components/layout/Cautions';
 import { Screen } from '@/components/layout/Screen';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Badge } from '@/components/ui/Badge';
+import { ButtonRow } from '@/components/ui/ButtonRow';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Review } from '@/shared/review/types';
 import type { Run, RunSummary } from '@/shared/runs/types';
@@ -35,7 +37,14 @@ export function CheckContent({ run, review, summary }: Props) {
   useFirstLook(store, summary);
   const place = usePlaceResults(run, summary, usePlace(store));
   const common = { run, summary, store };
+  const { isWide } = useBreakpoint();
   const wasSent = review.state !== null;
+  const actions = <CheckActions run={run} review={review} />;
+  const signature = review.signOff ? (
+    <SignOffCard signOff={review.signOff} reads={review.reads} />
+  ) : null;
+  const points = wasSent ? <PointsCard {...common} review={review} /> : null;
+  const report = <ReportCard run={run} />;
   return (
     <Screen
       title={`Check of run ${run.number}`}
@@ -43,22 +52,33 @@ export function CheckContent({ run, review, summary }: Props) {
       badge={<Badge {...runBadge({ ...run, review: review.state })} />}
       lead={`${run.scenarioName}. Asked for by ${run.requestedBy}.`}
       ribbon={<Ribbon summary={summary} review={review} store={store} />}
-      actions={<CheckActions run={run} review={review} />}
+      actions={isWide ? actions : undefined}
       side={
-        <>
-          {review.signOff ? <SignOffCard signOff={review.signOff} reads={review.reads} /> : null}
-          {wasSent ? <PointsCard {...common} review={review} /> : null}
-          <ReportCard run={run} />
-        </>
+        isWide ? (
+          <>
+            {signature}
+            {points}
+            {report}
+          </>
+        ) : null
       }
       footer={<TimeBar {...common} />}
     >
       <StandingNotice review={review} />
+      {/* On a phone the foot is the time ribbon's, and the end of the page is far away. */}
+      {isWide ? null : (
+        <>
+          <ButtonRow>{actions}</ButtonRow>
+          {signature}
+        </>
+      )}
       {review.may.includes('review.send') ? <SendCard run={run} review={review} /> : null}
       <LongSectionCard {...common} place={place} />
       <StageCard {...common} place={place} />
+      {isWide ? null : points}
       <ChecklistCard run={run} review={review} />
       {wasSent ? <NoteCard review={review} /> : null}
+      {isWide ? null : report}
       <Cautions />
     </Screen>
   );

@@ -14,7 +14,7 @@ import { LIMITS } from '@/shared/limits';
 import type { ChecklistItem, Review } from '@/shared/review/types';
 import type { Run } from '@/shared/runs/types';
 import { OutletProbe } from './OutletProbe';
-import { OUTCOMES, unanswered } from './reviewWords';
+import { outcomeBadge, unanswered } from './reviewWords';
 
 /** What the machine found by itself, and what it asks of the modeller. */
 export function ChecklistCard({ run, review }: { run: Run; review: Review }) {
@@ -51,13 +51,15 @@ interface ItemProps {
 
 function Item({ runId, item, mayAnswer, children }: ItemProps) {
   const [isWriting, setIsWriting] = useState(false);
+  const isWaiting = unanswered([item]).length > 0;
+  const label = item.answer ? 'Change the words' : isWaiting ? 'Answer' : 'Add words';
   return (
     <View style={styles.item}>
       <View style={styles.head}>
         <Txt strong heading={3}>
           {item.title}
         </Txt>
-        <Badge {...OUTCOMES[item.outcome]} />
+        <Badge {...outcomeBadge(item)} />
       </View>
       <Txt>{item.finding}</Txt>
       <Txt variant="small" tone="soft">
@@ -74,11 +76,11 @@ function Item({ runId, item, mayAnswer, children }: ItemProps) {
       ) : null}
       {isWriting ? (
         <Answer runId={runId} item={item} onDone={() => setIsWriting(false)} />
-      ) : mayAnswer ? (
+      ) : mayAnswer && (item.outcome !== 'good' || item.answer) ? (
         <Button
-          kind="quiet"
-          label={item.answer ? 'Change the words' : 'Say something to it'}
-          name={`${item.answer ? 'Change the words' : 'Say something'} on ${item.title}`}
+          kind={isWaiting ? 'outline' : 'quiet'}
+          label={label}
+          name={`${label}: ${item.title}`}
           onPress={() => setIsWriting(true)}
         />
       ) : null}
@@ -96,7 +98,7 @@ function Answer({
   const keep = () =>
     save.mutate({ answers: [{ id: item.id, answer: text.trim() }] }, { onSuccess: onDone });
   return (
-    <View style={styles.item}>
+    <View style={styles.writing}>
       <TextField
         label={`Your words on ${item.title}`}
         value={text}
@@ -125,4 +127,5 @@ const styles = StyleSheet.create({
     justifyContent: 'space-between',
   },
   answer: { paddingTop: space.half },
+  writing: { gap: space.one },
 });

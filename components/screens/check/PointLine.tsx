@@ -39,7 +39,9 @@ export function PointLine({ point, run, may, stations, store }: Props) {
   return (
     <View style={styles.point}>
       <View style={styles.head}>
-        <Badge {...POINT_STATES[point.state]} />
+        <View>
+          <Badge {...POINT_STATES[point.state]} />
+        </View>
         {where ? (
           <Button kind="quiet" label={where} name={`Show ${where}`} onPress={show} />
         ) : (

@@ -23,7 +23,12 @@ export function PointsCard({ run, review, summary, store }: Props) {
   const mayRaise = review.may.includes('review.raise');
   const unsettled = review.points.filter(({ state }) => state !== 'closed').length;
   return (
-    <Card title="Points" aside={review.points.length ? `${unsettled} not closed` : undefined}>
+    <Card
+      title="Points"
+      aside={
+        review.points.length ? (unsettled ? `${unsettled} not closed` : 'all closed') : undefined
+      }
+    >
       {review.points.length === 0 && !isRaising ? (
         <Txt tone="soft">
           {mayRaise

@@ -84,14 +84,14 @@ export function SendCard({ run, review }: { run: Run; review: Review }) {
           lines={3}
           maxLength={LIMITS.textLong}
         />
+        {waiting > 0 ? (
+          <Txt variant="small" tone="soft">
+            {`${waiting === 1 ? 'One item of the checklist waits' : `${waiting} items of the checklist wait`} for your words below; without them it cannot be signed.`}
+          </Txt>
+        ) : null}
         <FormSubmit
           label={again ? 'Send for checking again' : 'Send for checking'}
           disabled={nobody}
-          hint={
-            waiting > 0
-              ? `${waiting === 1 ? 'One item of the checklist waits' : `${waiting} items of the checklist wait`} for your words below; they are needed before it can be signed.`
-              : undefined
-          }
         />
       </FormRoot>
     </Card>

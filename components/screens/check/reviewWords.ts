@@ -12,6 +12,11 @@ import { formatWithUnit } from '@/shared/units/format';
 import type { UnitSystem } from '@/shared/units/units';
 import { RUN_TONES, runStateWords } from '../runs/runWords';
 
+interface Badge {
+  label: string;
+  tone: BadgeTone;
+}
+
 const TONES: Record<ReviewState, BadgeTone> = {
   inCheck: 'earth',
   returned: 'ochre',
@@ -21,10 +26,7 @@ const TONES: Record<ReviewState, BadgeTone> = {
 };
 
 /** State of a run with that of its checking: nothing routed looks finished before it is signed. */
-export function runBadge(run: Pick<RunRow, 'state' | 'progress' | 'review'>): {
-  label: string;
-  tone: BadgeTone;
-} {
+export function runBadge(run: Pick<RunRow, 'state' | 'progress' | 'review'>): Badge {
   if (run.state !== 'routed') return { label: runStateWords(run), tone: RUN_TONES[run.state] };
   if (!run.review) return { label: 'Routed, unsigned', tone: 'ochre' };
   return { label: REVIEW_STATE_WORDS[run.review], tone: TONES[run.review] };
@@ -39,12 +41,16 @@ export function checkLabel(review: ReviewState | null, roles: readonly Role[]): 
   return 'Open the check';
 }
 
-export const OUTCOMES: Record<ChecklistItem['outcome'], { label: string; tone: BadgeTone }> = {
+const OUTCOMES: Record<ChecklistItem['outcome'], Badge> = {
   good: { label: 'Good', tone: 'moss' },
   look: { label: 'Worth a look', tone: 'ochre' },
   bad: { label: 'Against the rule', tone: 'brick' },
-  asked: { label: 'Asked', tone: 'earth' },
+  asked: { label: 'Asked', tone: 'ochre' },
 };
+
+/** What came of an item, in a word or two. */
+export const outcomeBadge = ({ outcome, answer }: ChecklistItem): Badge =>
+  outcome === 'asked' && answer?.trim() ? { label: 'Answered', tone: 'earth' } : OUTCOMES[outcome];
 
 /** Items that wait for the modeller's words before the run can be signed. */
 export const unanswered = (checklist: readonly ChecklistItem[]): ChecklistItem[] =>
@@ -52,7 +58,7 @@ export const unanswered = (checklist: readonly ChecklistItem[]): ChecklistItem[]
     ({ outcome, answer }) => (outcome === 'asked' || outcome === 'bad') && !answer?.trim(),
   );
 
-export const POINT_STATES: Record<ReviewPoint['state'], { label: string; tone: BadgeTone }> = {
+export const POINT_STATES: Record<ReviewPoint['state'], Badge> = {
   open: { label: 'Open', tone: 'ochre' },
   answered: { label: 'Answered', tone: 'earth' },
   closed: { label: 'Closed', tone: 'moss' },

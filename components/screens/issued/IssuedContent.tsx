@@ -28,17 +28,14 @@ export function IssuedContent({ study, issued, crumbs, isClient }: Props) {
       title={study.title}
       crumbs={crumbs}
       badge={result.withdrawn ? <Badge label="Withdrawn" tone="brick" /> : null}
-      lead={result.title}
+      lead={result.title.replace(`${study.title}: `, '')}
       actions={
-        <>
-          <Button label="Print this page" onPress={() => window.print()} />
-          <Button
-            kind={result.withdrawn ? 'outline' : 'solid'}
-            label="Read the report, PDF"
-            busy={report.isPending}
-            onPress={() => report.mutate(result.runId)}
-          />
-        </>
+        <Button
+          kind={result.withdrawn ? 'outline' : 'solid'}
+          label="Read the report, PDF"
+          busy={report.isPending}
+          onPress={() => report.mutate(result.runId)}
+        />
       }
     >
       {report.error ? (

@@ -4,6 +4,7 @@ import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndT
 import { Cautions } from '@/components/layout/Cautions';
 import { space } from '@/components/theme/tokens';
 import { useBreakpoint } from '@/components/theme/useBreakpoint';
+import { Button } from '@/components/ui/Button';
 import { formatDay } from '@/components/ui/formatDay';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
@@ -63,6 +64,9 @@ export function IssuedFlood({ study, result, isClient }: Props) {
         />
       ) : null}
       <Txt tone="soft">{`Signed ${formatDay(signedAt)} by ${signedBy}, ${qualification}. Stages are above ${study.verticalDatum}.`}</Txt>
+      <View>
+        <Button label="Print this page" onPress={() => window.print()} />
+      </View>
       {isClient ? <ConfirmRead studyId={study.id} result={result} /> : null}
       <Cautions />
     </>

@@ -34,8 +34,7 @@ export function VerificationPage() {
           <Notice tone="danger" title="No signed report carries this code">
             <Txt>
               Compare it letter by letter with the cover of the report. If it is the same, the
-              report was not signed with this firm&apos;s Spate: do not rely on it, and ask whoever
-              gave it to you.
+              report was not signed here: do not rely on it, and ask whoever gave it to you.
             </Txt>
           </Notice>
           <CodeForm start={code} />

@@ -2,6 +2,7 @@ import { pointSteps } from '@/components/screens/check/pointSteps';
 import {
   ageWords,
   checkLabel,
+  outcomeBadge,
   pointPlace,
   runBadge,
   sortPoints,
@@ -39,6 +40,13 @@ test('what was asked, and what breaks its rule, waits for words; blanks are none
     item('e', 'look', null),
   ];
   expect(unanswered(list).map(({ id }) => id)).toEqual(['b', 'd']);
+  expect(list.map((each) => outcomeBadge(each).label)).toEqual([
+    'Good',
+    'Asked',
+    'Answered',
+    'Against the rule',
+    'Worth a look',
+  ]);
 });
 
 test('a point says where it stands: station, chainage, time, or the whole run', () => {
