@@ -1,6 +1,7 @@
 import { MigrationError } from 'umzug';
 import { NewerSchemaError } from '../database/migrate';
 import { SettingsError } from '../env';
+import { AppError } from '../errors';
 import { BootstrapError } from './BootstrapError';
 
 /** Numbers of MariaDB for a disk or a table that is full. */
@@ -19,6 +20,7 @@ interface Said {
 export function explain(error: unknown): string | null {
   if (
     error instanceof BootstrapError ||
+    error instanceof AppError ||
     error instanceof NewerSchemaError ||
     error instanceof SettingsError
   )

@@ -5,6 +5,7 @@ import type { Background } from '../../background';
 import type { Mailer } from '../../mail/Mailer';
 import type { Platform } from '../../platform';
 import { buildAcceptInvitation } from './acceptInvitation';
+import { buildFirms } from './firms';
 import { buildInvitations } from './invitations';
 import { buildPasswords } from './passwords';
 import { buildSignIn } from './signIn';
@@ -24,6 +25,7 @@ export function buildAccounts(platform: Platform, needs: Needs) {
   return {
     signIn: buildSignIn(platform, attempts, sessions),
     passwords: buildPasswords(platform, { ...needs, attempts, links }),
+    firms: buildFirms(platform, links),
     users: buildUsers(platform, sessions, links),
     invitations: buildInvitations(platform, links, mailer),
     acceptInvitation: buildAcceptInvitation(platform, links, sessions),
