@@ -1,10 +1,10 @@
+import { AsyncResource } from 'node:async_hooks';
 import type { Request, RequestHandler } from 'express';
 import multer, { memoryStorage } from 'multer';
 import { LIMITS } from '../../shared/limits';
 import { invalid } from '../errors';
 
-/** Stands after `authorize`: a stranger's file is not even taken from the wire. */
-export const uploadFile: RequestHandler = multer({
+const takeFile = multer({
   storage: memoryStorage(),
   limits: {
     fileSize: LIMITS.upload.bytes,
@@ -14,6 +14,12 @@ export const uploadFile: RequestHandler = multer({
     parts: 12,
   },
 }).single('file');
+
+/**
+ * Stands after `authorize`: a stranger's file is not even taken from the wire. What follows stays with its request: the form is read from events of the connection.
+ */
+export const uploadFile: RequestHandler = (req, res, next) =>
+  takeFile(req, res, AsyncResource.bind(next));
 
 const MAX_NAME = 200;
 

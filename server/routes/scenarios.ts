@@ -83,7 +83,7 @@ export function scenarioRoutes({ authenticate, scenarios, studies }: Services): 
     authenticate,
     authorize('scenario.change', scenario),
     async (_req, res) => {
-      await scenarios.remove(recordOf(res));
+      await scenarios.remove(recordOf(res), actorOf(res));
       res.status(204).end();
     },
   );

@@ -8,7 +8,7 @@ import type { Actor, Loaded } from '../../policies/subject';
 
 /** People of a firm: their own record, and what administrators change. */
 export function buildUsers(
-  { models, sequelize }: Platform,
+  { audit, models, sequelize }: Platform,
   sessions: Sessions,
   links: OneTimeLinks,
 ) {
@@ -71,6 +71,9 @@ export function buildUsers(
         await sessions.endAll(user.id, transaction);
         await links.end('reset', { userId: user.id }, transaction);
       }
+      const words = `${user.name}: ${active ? roles.join(', ') : 'account closed'}`;
+      const record = { kind: 'user', id: user.id };
+      await audit.note({ action: 'user.changed', words, record }, transaction);
       return user;
     });
   }

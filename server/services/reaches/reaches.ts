@@ -15,7 +15,7 @@ const INCLUDE = ['survey', 'updater'];
 
 /** Reaches: the sections of accepted surveys with the modeller's bank marks and roughness. */
 export function buildReaches(platform: Platform) {
-  const { models, sequelize } = platform;
+  const { audit, models, sequelize } = platform;
   const { Reach, Scenario, Study } = models;
 
   /** For `authorize`. */
@@ -65,6 +65,9 @@ export function buildReaches(platform: Platform) {
           { transaction, silent: true },
         );
       await touchStudy(platform, reach.studyId, transaction);
+      const words = `Banks or roughness changed: ${reach.name}, version ${current.version}`;
+      const record = { kind: 'reach', id: reach.id };
+      await audit.note({ action: 'reach.changed', words, record, actor }, transaction);
     });
     return reach.reload({ include: INCLUDE });
   }

@@ -13,20 +13,26 @@ interface Needs {
 }
 
 /** Cancel and try again. Both throw `conflict` where the run is past it. */
-export function buildChangeRuns({ sequelize, models, now }: Platform, needs: Needs) {
-  const locked = <T>(runId: number, change: (run: RunModel) => Promise<T>): Promise<T> =>
+export function buildChangeRuns({ audit, sequelize, models, now }: Platform, needs: Needs) {
+  const locked = <T>(
+    runId: number,
+    action: 'run.cancelled' | 'run.retried',
+    change: (run: RunModel) => Promise<T>,
+  ): Promise<T> =>
     sequelize.transaction(async (transaction) => {
       const lock = transaction.LOCK.UPDATE;
       const run = await models.Run.findByPk(runId, { lock, transaction, rejectOnEmpty: true });
       const changed = await change(run);
       await run.save({ transaction });
+      const words = `Run ${run.number} ${action === 'run.cancelled' ? 'cancelled' : 'put into the queue again'}`;
+      await audit.note({ action, words, record: { kind: 'run', id: runId } }, transaction);
       return changed;
     });
 
   return {
     /** A queued run is cancelled at once, one that goes on within a second. */
     async cancel({ id }: RunModel): Promise<void> {
-      const state = await locked(id, async (run) => {
+      const state = await locked(id, 'run.cancelled', async (run) => {
         if (run.state === 'queued') {
           run.set({ state: 'cancelled', finishedAt: now() });
         } else if (run.state === 'running') {
@@ -42,7 +48,7 @@ export function buildChangeRuns({ sequelize, models, now }: Platform, needs: Nee
 
     /** The same frozen case once more, by the solver as it is now. */
     async retry({ id }: RunModel): Promise<void> {
-      await locked(id, async (run) => {
+      await locked(id, 'run.retried', async (run) => {
         if (run.state !== 'failed' && run.state !== 'cancelled') {
           throw conflict(
             `Run ${run.number} ${run.state === 'routed' ? 'is routed' : 'has not ended yet'}; ` +

@@ -25,12 +25,12 @@ interface RunOf {
 
 /** Puts runs into the queue. `queued` is called once one stands there. */
 export function buildRequestRun(platform: Platform, queued: () => void) {
-  const { sequelize, models, now } = platform;
+  const { audit, sequelize, models, now } = platform;
   const { Reach, Run, Study } = models;
 
   /** Freezes a case and puts it into the queue as the study's next run. */
   async function requestCase(
-    actor: { id: number },
+    actor: { id: number; firmId: number },
     of: RunOf,
     caseFile: CaseFile,
   ): Promise<RunModel> {
@@ -42,7 +42,7 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
       await Study.findByPk(studyId, { lock, transaction });
       const last = (await Run.max('number', { where: { studyId }, transaction })) as number | null;
       await touchStudy(platform, studyId, transaction);
-      return Run.create(
+      const made = await Run.create(
         {
           ...of,
           number: (last ?? 0) + 1,
@@ -56,13 +56,20 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
         },
         { transaction },
       );
+      const words = `Run ${made.number} asked for: ${made.scenarioName}`;
+      const record = { kind: 'run', id: made.id };
+      await audit.note({ action: 'run.requested', words, record, actor }, transaction);
+      return made;
     });
     queued();
     return run;
   }
 
   /** The same of a scenario. Throws `scenarioIncomplete` with every fault where it cannot be routed. */
-  async function request(actor: { id: number }, scenario: ScenarioModel): Promise<RunModel> {
+  async function request(
+    actor: { id: number; firmId: number },
+    scenario: ScenarioModel,
+  ): Promise<RunModel> {
     const { studyId, reachId, body } = scenario;
     const [reach, study] = await Promise.all([
       Reach.scope('withSections').findByPk(reachId, { rejectOnEmpty: true }),

@@ -16,7 +16,7 @@ import { countFaults } from './countFaults';
 
 /** Scenarios: stored as they are typed, complete or not. */
 export function buildScenarios(platform: Platform) {
-  const { models, sequelize } = platform;
+  const { audit, models, sequelize } = platform;
   const { Reach, Run, Scenario, Study } = models;
 
   /** For `authorize`. */
@@ -98,12 +98,13 @@ export function buildScenarios(platform: Platform) {
         { transaction },
       );
       await touchStudy(platform, scenario.studyId, transaction);
+      await tell('changed', current, actor, transaction);
     });
     return scenario.reload({ include: 'updater' });
   }
 
   /** Throws `conflict` where it has runs: they stand on it. */
-  async function remove(scenario: ScenarioModel): Promise<void> {
+  async function remove(scenario: ScenarioModel, actor: Actor): Promise<void> {
     await sequelize.transaction(async (transaction) => {
       await Scenario.findByPk(scenario.id, { transaction, lock: transaction.LOCK.UPDATE });
       const runs = await Run.count({ where: { scenarioId: scenario.id }, transaction });
@@ -112,18 +113,38 @@ export function buildScenarios(platform: Platform) {
           `${scenario.name} has ${runs === 1 ? 'a run' : `${runs} runs`}, which would lose their inputs. It stays.`,
         );
       await scenario.destroy({ transaction });
+      await tell('removed', scenario, actor, transaction);
     });
   }
 
   async function store(studyId: number, actor: Actor, body: ScenarioBody, sections: Section[]) {
-    const scenario = await Scenario.create({
-      ...told(body, sections),
-      studyId,
-      updatedBy: actor.id,
+    const scenario = await sequelize.transaction(async (transaction) => {
+      const made = await Scenario.create(
+        { ...told(body, sections), studyId, updatedBy: actor.id },
+        { transaction },
+      );
+      await touchStudy(platform, studyId, transaction);
+      await tell('made', made, actor, transaction);
+      return made;
     });
-    await touchStudy(platform, studyId);
     return scenario.reload({ include: 'updater' });
   }
+
+  const tell = (
+    what: 'made' | 'changed' | 'removed',
+    { id, name }: ScenarioModel,
+    actor: Actor,
+    transaction: Transaction,
+  ) =>
+    audit.note(
+      {
+        action: `scenario.${what}`,
+        words: `Scenario ${what}: ${name}`,
+        record: { kind: 'scenario', id },
+        actor,
+      },
+      transaction,
+    );
 
   /** The columns that follow from the body. */
   const told = (body: ScenarioBody, sections: Section[]) => ({

@@ -1,3 +1,4 @@
+import type { Transaction } from 'sequelize';
 import type { MemberBody } from '../../../shared/studies/schemas';
 import { ROLE_NAMES } from '../../../shared/accounts/roles';
 import { invalid, notFound } from '../../errors';
@@ -6,7 +7,7 @@ import type { Platform } from '../../platform';
 import type { StudyModel } from '../../models/Study';
 
 /** Surveyors and clients with whom a study is shared. */
-export function buildMembers({ models }: Platform) {
+export function buildMembers({ audit, models, sequelize }: Platform) {
   const { StudyMember, User } = models;
 
   const list = (study: StudyModel): Promise<StudyMemberModel[]> =>
@@ -32,14 +33,31 @@ export function buildMembers({ models }: Platform) {
           message: `${user.name} is no ${ROLE_NAMES[as].toLowerCase()}. An administrator can give the role.`,
         },
       ]);
-    await StudyMember.upsert({ studyId: study.id, userId, as });
+    await sequelize.transaction(async (transaction) => {
+      await StudyMember.upsert({ studyId: study.id, userId, as }, { transaction });
+      const words = `${study.title} shared with ${user.name} as ${ROLE_NAMES[as].toLowerCase()}`;
+      await tell('study.shared', words, study, transaction);
+    });
     return list(study);
   }
 
   async function remove(study: StudyModel, userId: number): Promise<void> {
-    const count = await StudyMember.destroy({ where: { studyId: study.id, userId } });
-    if (count === 0) throw notFound('This sharing');
+    await sequelize.transaction(async (transaction) => {
+      const where = { studyId: study.id, userId };
+      const member = await StudyMember.findOne({ where, include: 'user', transaction });
+      if (!member) throw notFound('This sharing');
+      await member.destroy({ transaction });
+      const words = `${study.title} no longer shared with ${member.user!.name}`;
+      await tell('study.unshared', words, study, transaction);
+    });
   }
+
+  const tell = (
+    action: string,
+    words: string,
+    { id, firmId }: StudyModel,
+    transaction: Transaction,
+  ) => audit.note({ action, words, record: { kind: 'study', id }, firmId }, transaction);
 
   return { list, put, remove };
 }

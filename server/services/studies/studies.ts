@@ -14,7 +14,7 @@ export interface ListedStudy {
   runCount: number | null;
 }
 
-export function buildStudies({ models }: Platform) {
+export function buildStudies({ audit, models, sequelize }: Platform) {
   const { Study, StudyMember, SurveyRevision, Scenario, Run } = models;
 
   /** For `authorize`; also of everything that belongs to a study. */
@@ -52,11 +52,25 @@ export function buildStudies({ models }: Platform) {
   }
 
   async function create(actor: Actor, body: StudyBody): Promise<StudyModel> {
-    const study = await Study.create({ ...body, firmId: actor.firmId, createdBy: actor.id });
+    const study = await sequelize.transaction(async (transaction) => {
+      const values = { ...body, firmId: actor.firmId, createdBy: actor.id };
+      const made = await Study.create(values, { transaction });
+      const record = { kind: 'study', id: made.id };
+      const words = `Study made: ${made.title}`;
+      await audit.note({ action: 'study.made', words, record, actor }, transaction);
+      return made;
+    });
     return study.reload({ include: 'creator' });
   }
 
-  const change = (study: StudyModel, body: StudyBody): Promise<StudyModel> => study.update(body);
+  const change = (study: StudyModel, body: StudyBody): Promise<StudyModel> =>
+    sequelize.transaction(async (transaction) => {
+      await study.update(body, { transaction });
+      const record = { kind: 'study', id: study.id };
+      const words = `Study changed: ${study.title}`;
+      await audit.note({ action: 'study.changed', words, record }, transaction);
+      return study;
+    });
 
   /** What stands in the study; for those who may see its work. */
   async function counts({ id: studyId }: StudyModel): Promise<StudyCounts> {

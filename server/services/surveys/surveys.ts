@@ -20,7 +20,7 @@ interface Sent {
 
 /** Surveys of a study: read, taken in as revisions that never change, or refused. */
 export function buildSurveys(platform: Platform) {
-  const { models, sequelize, now } = platform;
+  const { audit, models, sequelize, now } = platform;
   const { Reach, Study, SurveyRefusal, SurveyRevision } = models;
 
   /** For `authorize`. */
@@ -124,20 +124,34 @@ export function buildSurveys(platform: Platform) {
         { transaction },
       );
       await touchStudy(platform, study.id, transaction);
-      return revision.reload({ include: 'sender', transaction });
+      const taken = await revision.reload({ include: 'sender', transaction });
+      const words = `Revision ${revision.revision} of ${study.title} taken in`;
+      const record = { kind: 'survey', id: revision.id };
+      await audit.note({ action: 'survey.accepted', words, record, actor }, transaction);
+      return taken;
     });
   }
 
   async function refuse(sent: Sent & { actor: Actor }, reading: SurveyReading): Promise<never> {
     const { faults, faultsNotListed } = reading;
     const count = faults.filter(({ severity }) => severity === 'fault').length + faultsNotListed;
-    await SurveyRefusal.create({
-      studyId: sent.study.id,
-      fileName: sent.file.name,
-      faultCount: count,
-      faults,
-      sentBy: sent.actor.id,
-      sentAt: now(),
+    const { actor, file, study } = sent;
+    await sequelize.transaction(async (transaction) => {
+      const refusal = await SurveyRefusal.create(
+        {
+          studyId: study.id,
+          fileName: file.name,
+          faultCount: count,
+          faults,
+          sentBy: actor.id,
+          sentAt: now(),
+        },
+        { transaction },
+      );
+      const words = `Survey ${file.name} for ${study.title} refused, faults: ${count}`;
+      const record = { kind: 'refusal', id: refusal.id };
+      const told = { action: 'survey.refused', words, record, actor, outcome: 'refused' as const };
+      await audit.note(told, transaction);
     });
     throw new AppError(
       'surveyRefused',

@@ -2,9 +2,13 @@ import type { AuditPage, AuditRow } from '../../../shared/audit/types';
 import { ROUTE_WORDS, NOT_TOLD } from '../../../server/audit/routeWords';
 import { verifyChain } from '../../../server/audit/verifyChain';
 import type { UserModel } from '../../../server/models/User';
+import { lowerVeshall } from '../../../seed/reaches/lowerVeshall';
+import { faultySurveyFile, surveyFile } from '../../../seed/surveyFiles';
 import { buildFirm } from '../../helpers/factories/buildFirm';
 import { buildRoutedRun } from '../../helpers/factories/buildRoutedRun';
+import { buildStudy } from '../../helpers/factories/buildStudy';
 import { buildUser, PASSWORD } from '../../helpers/factories/buildUser';
+import { plainSections } from '../../helpers/plainSections';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { EXPECTED_ROUTES } from '../policies/expectedRoutes';
 
@@ -81,6 +85,26 @@ test('changes, downloads and refusals, by whom and to which record; reading is n
   });
   // What may not be seen is not named either.
   expect(told[3].words).not.toContain('Told study');
+});
+
+test('what was written with the change is not written twice, however it was sent', async () => {
+  const study = await buildStudy(server.services, modeller);
+  const file = surveyFile(plainSections());
+  const send = (bytes: Buffer) =>
+    asModeller
+      .post(`/api/studies/${study.id}/surveys`)
+      .set('X-Forwarded-For', '192.0.2.45')
+      .attach('file', bytes, 'survey.xlsx');
+  await send(file).expect(201);
+  await send(file).expect(409);
+  await send(faultySurveyFile(lowerVeshall())).expect(422);
+  const told = await rows('?action=survey');
+  expect(told.map(({ action, from, outcome }) => [action, from, outcome]).reverse()).toEqual([
+    ['survey.accepted', '192.0.2.45', 'done'],
+    ['survey.sent', '192.0.2.45', 'refused'],
+    ['survey.refused', '192.0.2.45', 'refused'],
+  ]);
+  expect(told[2].words).toBe(`Revision 1 of ${study.title} taken in`);
 });
 
 test('filtered by person and action, page by page, and as CSV', async () => {

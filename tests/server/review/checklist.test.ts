@@ -109,6 +109,43 @@ test('three grids tell the order and the index', () => {
   expect(item('gridSize').outcome).toBe('asked');
 });
 
+test('a breach is held against the regressions for its reservoir', () => {
+  const dam = {
+    id: 'DAM',
+    kind: 'breach' as const,
+    chainage: 0,
+    crest: [
+      [0, 70],
+      [100, 70],
+    ] as [number, number][],
+    trigger: { kind: 'stage' as const, stage: 70 },
+    mode: 'overtopping' as const,
+    growth: 'linear' as const,
+    formationTime: 1800,
+    bottomWidth: 40,
+    bottomLevel: 50,
+    sideSlope: 1,
+  };
+  const upstream = {
+    kind: 'reservoir' as const,
+    stages: [50, 70],
+    volumes: [0, 10e6],
+    initialStage: 69,
+    inflow: { times: [0], flows: [5] },
+  };
+  const found = (change: object, head: CaseFile['upstream'] = upstream) =>
+    item('breach', {
+      caseFile: { ...facts.caseFile, upstream: head, structures: [{ ...dam, ...change }] },
+    });
+  // By hand for 20 m of water and 10 million m³: USBR 1988 gives 3 · 20 = 60 m of width and 0.011 · 60 h = 40 min.
+  expect(found({}).outcome).toBe('good');
+  expect(found({}).finding).toContain('average width 60.0 m');
+  expect(found({ bottomWidth: 2 }).outcome).toBe('look');
+  expect(found({ formationTime: 0 }).outcome).toBe('look');
+  expect(found({}, { kind: 'wall' }).outcome).toBe('asked');
+  expect(item('breach')).toBeUndefined();
+});
+
 test('every kind of outlet is changed, but for a closed end', () => {
   const at = (downstream: CaseFile['downstream']) =>
     changeOutlet({ ...facts.caseFile, downstream })?.downstream;

@@ -12,46 +12,35 @@ import { adviseReach } from '../../reaches/advice/adviseReach';
 import { describeSection } from '../../reaches/describeSection';
 import type { buildRuns } from '../../runs';
 import { describeOutletChange } from '../changeOutlet';
+import { keepAtHand } from './keepAtHand';
 import type { ChecklistFacts, SectionHistory } from './types';
 
 type Runs = ReturnType<typeof buildRuns>;
-type Routed = Pick<ChecklistFacts, 'caseFile' | 'run' | 'places' | 'sections'>;
-
-/** Runs whose results are kept at hand: they never change once they are routed. */
-const KEPT = 30;
 /** Runs of a scenario that are looked through for other cell sizes. */
 const LOOKED_THROUGH = 20;
 
 /** Reads what the checklist is found from. Throws `conflict` where the run is not routed. */
 export function buildGatherFacts({ models }: Platform, runs: Runs) {
-  const kept = new Map<number, Promise<Routed>>();
-
-  function routed(run: RunModel): Promise<Routed> {
-    const known = kept.get(run.id);
-    if (known) return known;
-    const read = readRouted(run);
-    kept.set(run.id, read);
-    read.catch(() => kept.delete(run.id));
-    if (kept.size > KEPT) kept.delete(kept.keys().next().value!);
-    return read;
-  }
-
-  async function readRouted(run: RunModel): Promise<Routed> {
+  const caseOf = keepAtHand(
+    async (run) => JSON.parse((await runs.exports.caseFile(run)).toString('utf8')) as CaseFile,
+  );
+  const peaksAlong = keepAtHand(async (run) => {
     const blocks = runs.results.open(run);
-    const [caseFile, facts, places] = await Promise.all([
-      caseOf(run),
-      blocks.facts(),
-      blocks.places(),
-    ]);
-    return { caseFile, run: facts, places, sections: await histories(blocks, caseFile) };
-  }
-
-  const caseOf = async (run: RunModel): Promise<CaseFile> =>
-    JSON.parse((await runs.exports.caseFile(run)).toString('utf8')) as CaseFile;
+    const [facts, places] = await Promise.all([blocks.facts(), blocks.places()]);
+    return { run: facts, places };
+  });
+  const sectionsOf = keepAtHand(async (run) =>
+    histories(runs.results.open(run), await caseOf(run)),
+  );
+  /** Two runs with the same one differ by their cells alone. */
+  const nameBesideCells = keepAtHand(async (run) => {
+    const caseFile = await caseOf(run);
+    return canonical({ ...caseFile, title: '', numerics: { ...caseFile.numerics, cellSize: 0 } });
+  });
 
   /** Peak stages at the stations, or at the sections where there are none. */
   async function peaksOf(run: RunModel): Promise<{ name: string; stage: number }[]> {
-    const { run: facts, places } = await routed(run);
+    const { run: facts, places } = await peaksAlong(run);
     const stations = await runs.results.stations(run.studyId);
     const named =
       stations.length > 0 ? stations : facts.sections.map((s) => ({ ...s, name: s.id }));
@@ -91,17 +80,11 @@ export function buildGatherFacts({ models }: Platform, runs: Runs) {
     const bySize = new Map<number, ChecklistFacts['grids'][number]>();
     for (const other of [run, ...others.filter(({ id }) => id !== run.id)]) {
       if (other.id !== run.id && (await nameBesideCells(other)) !== name) continue;
-      const { cellSize } = (await routed(other)).run;
+      const { cellSize } = (await peaksAlong(other)).run;
       if (!bySize.has(cellSize))
         bySize.set(cellSize, { runNumber: other.number, cellSize, peaks: await peaksOf(other) });
     }
     return [...bySize.values()].sort((a, b) => a.cellSize - b.cellSize);
-  }
-
-  /** Two runs with the same one differ by their cells alone. */
-  async function nameBesideCells(run: RunModel): Promise<string> {
-    const { caseFile } = await routed(run);
-    return canonical({ ...caseFile, title: '', numerics: { ...caseFile.numerics, cellSize: 0 } });
   }
 
   async function adviceOf({ reachId }: RunModel): Promise<ChecklistFacts['advice']> {
@@ -112,7 +95,9 @@ export function buildGatherFacts({ models }: Platform, runs: Runs) {
   }
 
   return async (run: RunModel, review: ReviewModel | null): Promise<ChecklistFacts> => ({
-    ...(await routed(run)),
+    ...(await peaksAlong(run)),
+    caseFile: await caseOf(run),
+    sections: await sectionsOf(run),
     advice: await adviceOf(run),
     probe: await probeOf(run, review),
     grids: await gridsOf(run),

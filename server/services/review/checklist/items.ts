@@ -1,3 +1,4 @@
+import { breach } from './breach';
 import { dryCells } from './dryCells';
 import { gridSize } from './gridSize';
 import { initialState } from './initialState';
@@ -25,6 +26,7 @@ const RULES: ChecklistRule[] = [
   roughness,
   sectionEnds,
   initialState,
+  breach,
   suddenFailure,
   warnings,
   ...QUESTIONS,
