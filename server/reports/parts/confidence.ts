@@ -1,7 +1,8 @@
+import type { ChecklistItem } from '../../../shared/review/types';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
 import type { Sheet } from '../pdf/sheet';
 import { facts as factRows, table } from '../pdf/table';
-import { heading, list, paragraph, partHeading } from '../pdf/writing';
+import { heading, paragraph, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
 import { unitsOf } from '../words';
 
@@ -19,17 +20,15 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
     ['At the end', unit(volume.final, 'volume')],
     ['Error', `${shareText(volume.relativeError)} (below 0.1 % is good, common practice)`],
   ]);
-  heading(sheet, 'What was not done for this run');
-  paragraph(
+  heading(sheet, 'How far it was tried');
+  const checklist = facts.review?.checklist ?? [];
+  factRows(
     sheet,
-    'None of this is part of the result. Where the modeller did it by other means, the words of the checklist say so.',
+    TRIALS.map(({ title, item, otherwise }) => {
+      const found = checklist.find(({ id }) => id === item);
+      return [title, found ? triedText(found) : otherwise] as const;
+    }),
   );
-  list(sheet, [
-    'Cell-size convergence: no repetition on finer and coarser cells belongs to this run, so its discretisation error is not known in numbers.',
-    'Sensitivity: no repetition with other roughness or another inflow belongs to this run.',
-    'Ensemble: no band of likely results was computed; each number is one outcome of one set of inputs.',
-    'Calibration: no observed marks or gauge records were compared with the result.',
-  ]);
   heading(sheet, 'Warnings of the run');
   if (warnings.length === 0) paragraph(sheet, 'The run gave no warning.');
   else
@@ -46,6 +45,42 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
         message,
       ]),
     );
+}
+
+/** By the item of the checklist that tells of it; without one it was not done. */
+const TRIALS: { title: string; item: string; otherwise: string }[] = [
+  {
+    title: 'Cell-size convergence',
+    item: 'gridSize',
+    otherwise: 'Not done. The error of the discretisation is not known in numbers.',
+  },
+  {
+    title: 'Outlet condition',
+    item: 'outletInfluence',
+    otherwise: 'Not done. How far it reaches upstream is not known in numbers.',
+  },
+  {
+    title: 'Calibration',
+    item: 'calibration',
+    otherwise: 'Not done. No observed marks or gauge records were compared with the result.',
+  },
+  {
+    title: 'Sensitivity',
+    item: 'sensitivity',
+    otherwise: 'Not done. The result was not repeated with other roughness or another inflow.',
+  },
+  {
+    title: 'Ensemble',
+    item: 'ensemble',
+    otherwise:
+      'Not done. There is no band of likely results; each number is one outcome of one set of inputs.',
+  },
+];
+
+/** What the machine found; where it could not, that it was not tried, and the modeller's words on it. */
+function triedText({ outcome, finding, answer }: ChecklistItem): string {
+  const found = outcome === 'asked' ? 'Not computed.' : finding;
+  return answer ? `${found} In the modeller's words: ${answer}` : found;
 }
 
 /** As a percentage with the digits that tell it from nothing. */
