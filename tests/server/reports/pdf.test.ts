@@ -62,7 +62,7 @@ describe('a signed report', () => {
       'AIDR Guideline 7-3 (2017)',
       'Modeller: Two marks of the 2011 flood at the mill, within 0.15 m.',
       'The meadow behind the mill drains through the narrow.',
-      'Calibration Not computed. In the modeller's words: Two marks of the 2011 flood at the mill',
+      "Calibration Not computed. In the modeller's words: Two marks of the 2011 flood at the mill",
       'Sensitivity Not done.',
       'Cell-size convergence Not done.',
       'Fast water.',
