@@ -68,7 +68,18 @@ export interface VolumeBalance {
 }
 
 export type StructureRegime =
-  'dry' | 'closed' | 'free' | 'drowned' | 'pipe' | 'drownedPipe' | 'rating';
+  | 'dry'
+  | 'closed'
+  | 'free'
+  | 'drowned'
+  | 'pipe'
+  | 'drownedPipe'
+  | 'gate'
+  | 'drownedGate'
+  | 'rating'
+  | 'inletControl'
+  | 'outletControl'
+  | 'overtopped';
 
 /** One structure; each array has one entry an output time. */
 export interface StructureResult {

@@ -18,6 +18,60 @@ export interface WeirInput extends StructureBase {
   coefficient?: number;
 }
 
+/** A gate over a level sill, raised and lowered in time. */
+export interface SluiceInput extends StructureBase {
+  kind: 'sluice';
+  /** Clear width of all gates (m) */
+  width: number;
+  /** Level (m) */
+  sill: number;
+  /** Opening above the sill (m) at times (s); 0 is closed */
+  times: number[];
+  openings: number[];
+  /** Coefficient of contraction; by default 0.611 */
+  contraction?: number;
+}
+
+export const CULVERT_INLET_NAMES = [
+  'concretePipeSquareEdge',
+  'concretePipeGrooveHeadwall',
+  'concretePipeGrooveProjecting',
+  'metalPipeHeadwall',
+  'metalPipeMitered',
+  'metalPipeProjecting',
+  'pipeBeveledRing',
+  'boxWingwalls30to75',
+  'boxWingwalls90or15',
+  'boxWingwallsParallel',
+  'boxFlared45Beveled',
+  'boxFlared18to34Beveled',
+] as const;
+
+export type CulvertInlet = (typeof CULVERT_INLET_NAMES)[number];
+
+interface CulvertBase extends StructureBase {
+  kind: 'culvert';
+  /** Number of equal barrels */
+  barrels: number;
+  /** Manning's n of a barrel */
+  n: number;
+  length: number;
+  /** Levels (m) of the inverts at both ends */
+  invertUp: number;
+  invertDown: number;
+  /** Of the end at which water enters, whichever it is */
+  inlet: CulvertInlet;
+  /** What water flows over when the culvert cannot pass it: none where left out */
+  crest?: CrestPoint[];
+  /** C_d of the crest as a broad one; by default 1 */
+  crestCoefficient?: number;
+}
+
+/** Barrels under a road. Sizes are inner ones in m. */
+export type CulvertInput =
+  | (CulvertBase & { shape: 'circular'; diameter: number })
+  | (CulvertBase & { shape: 'box'; width: number; height: number });
+
 /** What makes a dam begin to fail: a time (s), or the stage (m) of the water above it. */
 export type BreachTrigger = { kind: 'time'; time: number } | { kind: 'stage'; stage: number };
 
@@ -47,7 +101,7 @@ export interface BreachInput extends StructureBase {
   orificeCoefficient?: number;
 }
 
-export type StructureInput = WeirInput | BreachInput;
+export type StructureInput = WeirInput | SluiceInput | CulvertInput | BreachInput;
 
 export type StructureKind = StructureInput['kind'];
 

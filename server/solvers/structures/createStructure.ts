@@ -1,6 +1,8 @@
 import type { StructureInput } from '../../../shared/case/structures';
 import type { Workspace } from '../workspace';
 import { createBreach } from './breach';
+import { createCulvert } from './culvert';
+import { createSluice } from './sluice';
 import type { Structure } from './structure';
 import { createWeir } from './weir';
 
@@ -13,6 +15,10 @@ export function createStructure(
   switch (input.kind) {
     case 'weir':
       return createWeir(input, chainage, workspace);
+    case 'sluice':
+      return createSluice(input, chainage, workspace.gravity);
+    case 'culvert':
+      return createCulvert(input, chainage, workspace.gravity);
     case 'breach':
       return createBreach(input, chainage, workspace.gravity);
   }

@@ -54,7 +54,8 @@ export function createRelease(
     const sign = up.isWet() ? (isForward ? 1 : -1) : 0;
     let sum = 0;
     for (let k = 0; k < count; k++) {
-      const flow = sign * structures[k].flow(water);
+      const passed = structures[k].flow(water);
+      const flow = passed === 0 ? 0 : sign * passed;
       flows[k] = flow;
       sum += flow;
     }
@@ -84,7 +85,9 @@ export function createRelease(
       // More flow lowers the water above and raises the one below: the surplus rises with the flow.
       const q =
         most > 0 ? risingRoot(forwardSurplus, 0, most) : -risingRoot(backwardSurplus, 0, -most);
-      flowWith(q);
+      // Where the law of a structure jumps, as from a free to a drowned jet, the flow lies within the jump.
+      const sum = flowWith(q);
+      if (sum !== 0) for (let k = 0; k < count; k++) flows[k] *= q / sum;
       return q;
     },
   };

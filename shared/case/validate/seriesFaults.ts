@@ -22,6 +22,7 @@ const UNITS: Record<string, string> = {
   stages: 'm',
   flows: 'm³/s',
   volumes: 'm³',
+  openings: 'm',
 };
 
 /** Parallel lists of places and values in the record at `path`. */

@@ -2,11 +2,15 @@ import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
 import { join, type Faults } from './faults';
 import { checkBreach } from './structures/breachFaults';
+import { checkCulvert } from './structures/culvertFaults';
+import { checkSluice } from './structures/sluiceFaults';
 import { checkWeir } from './structures/weirFaults';
 
 /** What is checked of each kind beyond id and chainage. */
 const CHECKS: Record<string, (faults: Faults, path: string, value: unknown) => void> = {
   weir: checkWeir,
+  sluice: checkSluice,
+  culvert: checkCulvert,
   breach: checkBreach,
 };
 
