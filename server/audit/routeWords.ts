@@ -12,7 +12,6 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'POST /auth/sign-in': say('session.started', 'Signing in'),
   'POST /auth/sign-out-everywhere': say('session.endedEverywhere', 'Signed out on every device'),
   'POST /auth/password': say('password.changed', 'Password changed'),
-  'POST /auth/password-reset/request': say('password.resetAsked', 'New password asked for by mail'),
   'POST /auth/password-reset/confirm': say('password.reset', 'New password chosen by a link'),
   'PATCH /me': say('profile.changed', 'Own profile changed'),
   'PATCH /users/:userId': say('user.changed', 'Roles or activity changed'),
@@ -69,6 +68,8 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
 export const NOT_TOLD = new Set([
   'POST /auth/refresh',
   'POST /auth/sign-out',
+  // Told where there is an account; the answer is the same.
+  'POST /auth/password-reset/request',
   'POST /invitations/look',
   'POST /studies/:studyId/surveys/read',
   'POST /tables/read',

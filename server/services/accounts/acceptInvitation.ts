@@ -13,7 +13,7 @@ import type { Platform } from '../../platform';
  * address, and signs it in. Throws `gone`, and `conflict` where the address has an account.
  */
 export function buildAcceptInvitation(
-  { models, sequelize, now }: Platform,
+  { audit, models, sequelize, now }: Platform,
   links: OneTimeLinks,
   sessions: Sessions,
 ) {
@@ -47,7 +47,12 @@ export function buildAcceptInvitation(
           { where: { id: open.map(({ id }) => id) }, transaction },
         );
         const user = await created.reload({ include: 'firm', transaction });
-        return sessions.start(user, transaction);
+        const tokens = await sessions.start(user, transaction);
+        const words = `Invitation accepted by ${name}, ${created.roles.join(', ')}`;
+        const record = { kind: 'user', id: created.id };
+        const told = { action: 'invitation.accepted', words, record, actor: created };
+        await audit.note(told, transaction);
+        return tokens;
       });
     } catch (error) {
       if (!(error instanceof UniqueConstraintError)) throw error;

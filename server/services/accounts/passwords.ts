@@ -24,7 +24,7 @@ interface Needs {
 
 /** Change of a password by who knows it, and a new one by mail for who does not. */
 export function buildPasswords(
-  { env, models, sequelize }: Platform,
+  { audit, env, models, sequelize }: Platform,
   { attempts, background, links, mailer, sessions }: Needs,
 ) {
   const { User } = models;
@@ -47,6 +47,8 @@ export function buildPasswords(
       await user.update({ passwordHash }, { transaction });
       await sessions.endAll(user.id, transaction, signedIn.family);
       await links.end('reset', { userId: user.id }, transaction);
+      const told = { action: 'password.changed', words: 'Password changed', actor: user };
+      await audit.note(told, transaction);
     });
     tellOf(user.email);
   }
@@ -56,6 +58,9 @@ export function buildPasswords(
     background.run('sending a reset link', async () => {
       const user = await User.findOne({ where: { email, active: true } });
       if (!user) return;
+      const words = `New password asked for by mail: ${email}`;
+      const { firmId } = user;
+      await audit.note({ action: 'password.resetAsked', words, firmId, actorName: email });
       const link = await links.issue('reset', { userId: user.id });
       await mailer.send(passwordResetMessage(email, link));
     });
@@ -72,6 +77,8 @@ export function buildPasswords(
         throw gone('This account is not active. Ask an administrator of your firm.');
       await found.update({ passwordHash, tokenVersion: found.tokenVersion + 1 }, { transaction });
       await sessions.endAll(found.id, transaction);
+      const words = 'New password chosen by a link';
+      await audit.note({ action: 'password.reset', words, actor: found }, transaction);
       return found;
     });
     await attempts.forget(user.email);

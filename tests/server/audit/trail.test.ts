@@ -8,6 +8,7 @@ import { buildFirm } from '../../helpers/factories/buildFirm';
 import { buildRoutedRun } from '../../helpers/factories/buildRoutedRun';
 import { buildStudy } from '../../helpers/factories/buildStudy';
 import { buildUser, PASSWORD } from '../../helpers/factories/buildUser';
+import { tokenIn } from '../../helpers/keptMail';
 import { plainSections } from '../../helpers/plainSections';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { EXPECTED_ROUTES } from '../policies/expectedRoutes';
@@ -50,6 +51,37 @@ test('signing in, and being refused, with the address that it came from', async 
   const [done, refused] = await rows('?action=session');
   expect(done).toMatchObject({ actor: modeller.name, from: '192.0.2.44', outcome: 'done' });
   expect(refused).toMatchObject({ actor: email, from: '192.0.2.44', outcome: 'refused' });
+});
+
+test('what is done by links in mail is told of the person whose link it was', async () => {
+  const { services } = server;
+  await server.request
+    .post('/api/auth/password-reset/request')
+    .send({ email: modeller.email })
+    .expect(202);
+  const token = await tokenIn(services, modeller.email);
+  const chosen = { token, password: PASSWORD };
+  await server.request.post('/api/auth/password-reset/confirm').send(chosen).expect(204);
+  asModeller = await server.signInAs(await modeller.reload());
+  expect((await rows('?action=password')).map(({ action, actor }) => [action, actor])).toEqual([
+    ['password.reset', modeller.name],
+    ['password.resetAsked', modeller.email],
+  ]);
+  const email = 'new.client@client.example';
+  const { study } = await buildRoutedRun(services, modeller);
+  const offer = { email, roles: ['client'], studyId: study.id };
+  await asModeller.post('/api/invitations').send(offer).expect(201);
+  const accepted = {
+    token: await tokenIn(services, email),
+    name: 'New Client',
+    password: PASSWORD,
+  };
+  await server.request.post('/api/invitations/accept').send(accepted).expect(200);
+  expect((await rows('?action=invitation'))[0]).toMatchObject({
+    action: 'invitation.accepted',
+    actor: 'New Client',
+    words: 'Invitation accepted by New Client, client',
+  });
 });
 
 test('changes, downloads and refusals, by whom and to which record; reading is none of them', async () => {
