@@ -72,6 +72,32 @@ export type CulvertInput =
   | (CulvertBase & { shape: 'circular'; diameter: number })
   | (CulvertBase & { shape: 'box'; width: number; height: number });
 
+export const PIER_SHAPE_NAMES = [
+  'semicircular',
+  'twinCylindersWithDiaphragm',
+  'twinCylinders',
+  'triangular',
+  'square',
+  'tenPileTrestle',
+] as const;
+
+/** A bridge over the river: its piers, its soffit and its deck. */
+export interface BridgeInput extends StructureBase {
+  kind: 'bridge';
+  /** Nose and tail of the piers */
+  piers: (typeof PIER_SHAPE_NAMES)[number];
+  /** Share of the flow area that the piers take, 0 to 0.5 */
+  obstructed: number;
+  /** Level (m) of the underside of the deck */
+  soffit: number;
+  /** Coefficient of contraction under the soffit; by default 0.611 */
+  contraction?: number;
+  /** What water flows over above the deck: none where left out */
+  deck?: CrestPoint[];
+  /** C_d of the deck as a broad crest; by default 1 */
+  deckCoefficient?: number;
+}
+
 /** What makes a dam begin to fail: a time (s), or the stage (m) of the water above it. */
 export type BreachTrigger = { kind: 'time'; time: number } | { kind: 'stage'; stage: number };
 
@@ -101,7 +127,7 @@ export interface BreachInput extends StructureBase {
   orificeCoefficient?: number;
 }
 
-export type StructureInput = WeirInput | SluiceInput | CulvertInput | BreachInput;
+export type StructureInput = WeirInput | SluiceInput | CulvertInput | BridgeInput | BreachInput;
 
 export type StructureKind = StructureInput['kind'];
 

@@ -1,6 +1,8 @@
 import type { StructureInput } from '../../../shared/case/structures';
+import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
 import { createBreach } from './breach';
+import { createBridge } from './bridge';
 import { createCulvert } from './culvert';
 import { createSluice } from './sluice';
 import type { Structure } from './structure';
@@ -11,6 +13,7 @@ export function createStructure(
   input: StructureInput,
   chainage: number,
   workspace: Workspace,
+  tables: CellTables,
 ): Structure {
   switch (input.kind) {
     case 'weir':
@@ -19,6 +22,8 @@ export function createStructure(
       return createSluice(input, chainage, workspace.gravity);
     case 'culvert':
       return createCulvert(input, chainage, workspace.gravity);
+    case 'bridge':
+      return createBridge(input, chainage, workspace, tables);
     case 'breach':
       return createBreach(input, chainage, workspace.gravity);
   }

@@ -1,3 +1,4 @@
+import { risingRoot } from '../boundaries/rootNear';
 import { criticalDepthIn, type Barrel } from './barrel';
 import type { InletConstants } from './culvertInlets';
 
@@ -100,7 +101,8 @@ export function freeSurfaceHeadwater(
   const critical = criticalDepthIn(barrel, flow, gravity);
   const top = barrel.rise * (1 - 1e-6);
   if (critical >= top) return Infinity;
-  const steps = 40;
+  const steps = 25;
+  const step = 0.01 * barrel.rise;
   const dx = length / steps;
   const velocityHead = (depth: number): number => (flow / barrel.area(depth)) ** 2 / (2 * gravity);
   const friction = (depth: number): number => {
@@ -117,14 +119,7 @@ export function freeSurfaceHeadwater(
       depth = critical;
       continue;
     }
-    let lo = critical;
-    let hi = top;
-    for (let m = 0; m < 50; m++) {
-      const middle = 0.5 * (lo + hi);
-      if (excess(middle) < 0) lo = middle;
-      else hi = middle;
-    }
-    depth = 0.5 * (lo + hi);
+    depth = Math.min(top, risingRoot(excess, critical, step));
   }
   if (depth === critical) return 0;
   return depth + (1 + entrance) * velocityHead(depth);

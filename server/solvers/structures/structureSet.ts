@@ -61,7 +61,7 @@ export function createStructureSet(
     if (Math.abs(chainage - input.chainage) > 1e-6 * grid.dx)
       warnMoved(input.id, input.chainage, chainage);
     const list = byFace.get(face) ?? [];
-    list.push(createStructure(input, chainage, workspace));
+    list.push(createStructure(input, chainage, workspace, tables));
     byFace.set(face, list);
   }
 

@@ -2,6 +2,7 @@ import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
 import { join, type Faults } from './faults';
 import { checkBreach } from './structures/breachFaults';
+import { checkBridge } from './structures/bridgeFaults';
 import { checkCulvert } from './structures/culvertFaults';
 import { checkSluice } from './structures/sluiceFaults';
 import { checkWeir } from './structures/weirFaults';
@@ -11,6 +12,7 @@ const CHECKS: Record<string, (faults: Faults, path: string, value: unknown) => v
   weir: checkWeir,
   sluice: checkSluice,
   culvert: checkCulvert,
+  bridge: checkBridge,
   breach: checkBreach,
 };
 
