@@ -77,7 +77,7 @@ function Comparison({ compared, found }: { compared: Compared; found: Verificati
           ? `${name} is the same to the last byte.`
           : `${name} differs from every report kept under this code: it was changed, or it is another report, a preliminary one or a withdrawn one. Do not rely on it.`}
       </Txt>
-      <Txt variant="caption" tone="soft" style={{ overflowWrap: 'anywhere' } as object}>
+      <Txt variant="caption" style={{ overflowWrap: 'anywhere' } as object}>
         {`SHA-256 ${hash}`}
       </Txt>
     </Notice>
