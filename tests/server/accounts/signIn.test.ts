@@ -85,8 +85,9 @@ test('a stranger costs as much work as a wrong password', async () => {
     known.push(await took(passwordHash));
     stranger.push(await took(null));
   }
-  // A hash takes tens of milliseconds; without it the answer would come in a hundredth of one.
-  expect(Math.min(...stranger)).toBeGreaterThan(Math.min(...known) / 2);
+  // A hash takes tens of milliseconds; without it the answer would come in a hundredth of one. A tenth stands clear of both
+  // on a busy machine.
+  expect(Math.min(...stranger)).toBeGreaterThan(Math.min(...known) / 10);
 });
 
 test('every fault of the form is told at its place', async () => {
