@@ -48,9 +48,14 @@ export function createWaterSide(
   let approach = 0;
   let shooting = false;
 
+  /** A trace of water at the bed has no width to be fast over. */
+  const waveSpeed = (a: number, eta: number): number => {
+    const width = tables.widthAt(cell, eta);
+    return a > 0 && width > 0 ? Math.sqrt((gravity * a) / width) : 0;
+  };
   const criticalFlow = (eta: number): number => {
     const a = tables.areaAt(cell, eta);
-    return a > 0 ? a * Math.sqrt((gravity * a) / tables.widthAt(cell, eta)) : 0;
+    return a * waveSpeed(a, eta);
   };
   let wanted = 0;
   const shortOfWanted = (eta: number): number => criticalFlow(eta) - wanted;
@@ -83,7 +88,8 @@ export function createWaterSide(
       const c = celerity[cell];
       const towards = faceArea > 0 ? (outward * faceFlow) / faceArea : 0;
       approach = Math.max(0, towards);
-      speed = Math.max(c - towards, 0.25 * c);
+      // Fast water is stopped by a bore that runs up against it, not by a wave of its own celerity.
+      speed = Math.max(c - towards, 0.5 * (c + towards), 0.25 * c);
       shooting = towards <= -c;
     },
     isWet: () => wet,
@@ -108,7 +114,7 @@ export function createWaterSide(
       const carried = a > 0 ? (q * q) / a : 0;
       flux[face] = carried + 0.5 * gravity * (eta - stage[cell]) * (area[cell] + a);
       if (!(a > 0)) return 0;
-      return Math.abs(q) / a + Math.sqrt((gravity * a) / tables.widthAt(cell, eta));
+      return Math.abs(q) / a + waveSpeed(a, eta);
     },
     slope,
   };
