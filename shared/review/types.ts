@@ -73,6 +73,8 @@ export interface Review {
   clientStationIds: number[];
   /** Clients who confirmed that they read what was issued. */
   reads: { by: string; at: string }[];
+  /** Number of the run whose outlet this one tries; such a run is not checked itself. null: an ordinary run. */
+  triesOutletOf: number | null;
   /** Second run that shows how far the outlet condition reaches; null: not asked for. */
   outletProbe: { runId: number; state: string } | null;
   may: (

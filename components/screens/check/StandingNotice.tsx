@@ -5,7 +5,13 @@ import { wallClock } from '../runs/runWords';
 
 /** What stands between this run and its signature, or what became of it. */
 export function StandingNotice({ review }: { review: Review }) {
-  const { state, returnReason, obstacles, signOff, sentTo, sentAt } = review;
+  const { state, returnReason, obstacles, signOff, sentTo, sentAt, triesOutletOf } = review;
+  if (triesOutletOf !== null)
+    return (
+      <Notice title="Not checked itself" still>
+        {`This run only tries the outlet of run ${triesOutletOf}; what came of it stands in the checklist there.`}
+      </Notice>
+    );
   if (state === null) return null;
   if (state === 'returned')
     return (

@@ -65,8 +65,9 @@ export function buildReadReview(
 
   /** Needs a run read by `find.load`. */
   async function read(run: RunModel, actor: Actor): Promise<Review> {
-    const [review, record, signOff, issue, reads, person] = await Promise.all([
+    const [review, probed, record, signOff, issue, reads, person] = await Promise.all([
       find.of(run),
+      models.Review.findOne({ where: { outletProbeRunId: run.id }, include: 'run' }),
       signedRecord(run.id),
       signOffOf(run),
       models.Issue.findOne({ where: { runId: run.id } }),
@@ -86,7 +87,7 @@ export function buildReadReview(
       points,
     };
     const obstacles = obstaclesOf(standing);
-    const may = run.state === 'routed' ? allowedNow(actor, subject, state) : [];
+    const may = run.state === 'routed' && !probed ? allowedNow(actor, subject, state) : [];
     return {
       runId: run.id,
       state,
@@ -102,6 +103,7 @@ export function buildReadReview(
       signOff,
       clientStationIds: issue?.stationIds ?? [],
       reads,
+      triesOutletOf: probed?.run!.number ?? null,
       outletProbe: review?.outletProbe
         ? { runId: review.outletProbe.id, state: review.outletProbe.state }
         : null,

@@ -29,6 +29,8 @@ test('a second run with a changed outlet is routed, and its effect stands in the
   expect(item(review).finding).toMatch(
     /^Run 2 with half of the slope at the outlet moves the peak stage by at most \d\.\d{3} m, at Gauge\.$/,
   );
+  const own: Review = (await api.get(`/api/runs/${runId}/review`).expect(200)).body;
+  expect(own).toMatchObject({ triesOutletOf: asked.body.number, may: [] });
   const note = { method: 'M', assumptions: 'A', limits: 'L' };
   const refused = await api.post(`/api/runs/${runId}/review`).send(note).expect(409);
   expect(refused.body.error.message).toContain('only tries the outlet');
