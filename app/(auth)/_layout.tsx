@@ -1,5 +1,4 @@
 import { Redirect, Slot, useGlobalSearchParams, usePathname } from 'expo-router';
-import { Starting } from '@/components/screens/auth/Starting';
 import { safeNext } from '@/components/screens/auth/safeNext';
 import { useSession } from '@/components/queries/SessionProvider';
 
@@ -10,9 +9,6 @@ export default function AuthLayout() {
   const { state } = useSession();
   const pathname = usePathname();
   const { next } = useGlobalSearchParams<{ next?: string }>();
-  if (pathname === '/sign-in') {
-    if (state.is === 'starting') return <Starting />;
-    if (state.is === 'signedIn') return <Redirect href={safeNext(next)} />;
-  }
+  if (pathname === '/sign-in' && state.is === 'signedIn') return <Redirect href={safeNext(next)} />;
   return <Slot />;
 }

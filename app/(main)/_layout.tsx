@@ -3,7 +3,6 @@ import { Shell } from '@/components/layout/Shell';
 import { useSession } from '@/components/queries/SessionProvider';
 import { entryAddress } from '@/components/screens/auth/entryAddress';
 import { SignInAgain } from '@/components/screens/auth/SignInAgain';
-import { Starting } from '@/components/screens/auth/Starting';
 
 export { BrokenScreen as ErrorBoundary } from '@/components/layout/BrokenScreen';
 
@@ -15,7 +14,6 @@ export default function MainLayout() {
     const leadsBack = !state.byChoice && next !== '/';
     return <Redirect href={leadsBack ? { pathname: '/sign-in', params: { next } } : '/sign-in'} />;
   }
-  if (state.is === 'starting' || state.is === 'unreachable') return <Starting />;
   return (
     <Shell>
       <Slot />

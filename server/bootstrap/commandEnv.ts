@@ -1,6 +1,7 @@
 import path from 'node:path';
 import { readEnv, type Env } from '../env';
 import type { Cleanup } from './cleanup';
+import { ownSchema } from './mariadb/ownSchema';
 import { startDatabase } from './mariadb/startDatabase';
 
 /**
@@ -17,8 +18,5 @@ export async function commandEnv(cleanup: Cleanup): Promise<Env> {
   });
   // Whoever runs already goes on.
   if (!database.adopted) cleanup.add(database.stop);
-  database.sql(
-    'CREATE DATABASE IF NOT EXISTS spate CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci',
-  );
-  return settings(database.url('spate'));
+  return settings(ownSchema(database));
 }

@@ -4,6 +4,7 @@ import { migrate } from '../database/migrate';
 import { readSecrets } from '../secrets';
 import type { Cleanup } from './cleanup';
 import { ensureDebianPackages } from './debianPackages';
+import { ownSchema } from './mariadb/ownSchema';
 import { startDatabase } from './mariadb/startDatabase';
 
 /**
@@ -33,8 +34,5 @@ async function startOwn(dataDir: string, cleanup: Cleanup): Promise<string> {
       password: readSecrets(dataDir).databasePassword,
     }),
   );
-  database.sql(
-    'CREATE DATABASE IF NOT EXISTS spate CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_ci',
-  );
-  return database.url('spate');
+  return ownSchema(database);
 }

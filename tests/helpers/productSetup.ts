@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process';
 import { mkdtempSync, mkdirSync, openSync } from 'node:fs';
-import { createServer } from 'node:net';
 import path from 'node:path';
+import { freePort } from '../../server/bootstrap/freePort';
 
 /**
  * Starts the whole product as `npm start` does, on its own data directory and port, with the demo data.
@@ -42,18 +42,3 @@ const serves = (url: string) =>
     (answer) => answer.ok,
     () => false,
   );
-
-function freePort(): Promise<number> {
-  return new Promise((resolve, reject) => {
-    const server = createServer();
-    server.on('error', reject);
-    server.listen(0, '127.0.0.1', () => {
-      const address = server.address();
-      server.close(() =>
-        typeof address === 'object' && address
-          ? resolve(address.port)
-          : reject(new Error('No port')),
-      );
-    });
-  });
-}

@@ -10,7 +10,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Review, ReviewPoint } from '@/shared/review/types';
 import type { Run } from '@/shared/runs/types';
-import { wallClock } from '../runs/runWords';
+import { wallClock } from '@/components/ui/wallClock';
 import { PointReply } from './PointReply';
 import { pointSteps } from './pointSteps';
 import { POINT_STATES, pointPlace } from './reviewWords';

@@ -14,7 +14,7 @@ import { List } from '@/components/ui/List';
 import { Loading } from '@/components/ui/Loading';
 import { Txt } from '@/components/ui/Txt';
 import type { QueueRow } from '@/shared/review/types';
-import { wallClock } from '../runs/runWords';
+import { wallClock } from '@/components/ui/wallClock';
 import { ageWords } from './reviewWords';
 
 /** Runs that wait for this senior engineer, oldest first. */

@@ -3,7 +3,7 @@ import { Facts } from '@/components/ui/Facts';
 import { LinkTxt } from '@/components/ui/LinkTxt';
 import { Txt } from '@/components/ui/Txt';
 import type { Review, SignOff } from '@/shared/review/types';
-import { wallClock } from '../runs/runWords';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** What the signature fixed, and what became of it since. */
 export function SignOffCard({ signOff, reads }: { signOff: SignOff; reads: Review['reads'] }) {

@@ -1,7 +1,7 @@
 import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
 import type { Review } from '@/shared/review/types';
-import { wallClock } from '../runs/runWords';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** What stands between this run and its signature, or what became of it. */
 export function StandingNotice({ review }: { review: Review }) {

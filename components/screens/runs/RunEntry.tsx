@@ -9,7 +9,8 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { RunRow } from '@/shared/runs/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { runBadge } from '../check/reviewWords';
-import { timeLeftWords, wallClock } from './runWords';
+import { wallClock } from '@/components/ui/wallClock';
+import { timeLeftWords } from './runWords';
 
 /** One run in the list: what was routed, how far it is, what came out furthest downstream. */
 export function RunEntry({ run, studyId }: { run: RunRow; studyId: number }) {

@@ -2,7 +2,7 @@ import { Card } from '@/components/ui/Card';
 import type { Run } from '@/shared/runs/types';
 import { formatDuration } from '@/shared/units/format';
 import { Facts } from './Facts';
-import { wallClock } from './runWords';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** Who asked for the run, and what was frozen with it. */
 export function RunFacts({ run }: { run: Run }) {

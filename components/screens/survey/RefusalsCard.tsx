@@ -10,7 +10,7 @@ import { ErrorState } from '@/components/ui/ErrorState';
 import { Txt } from '@/components/ui/Txt';
 import type { SurveyRefusal } from '@/shared/surveys/types';
 import { FaultList } from './FaultList';
-import { sentOn } from './sentOn';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** Files that were not taken in: of them only the faults are kept. */
 export function RefusalsCard({ refusals }: { refusals: readonly SurveyRefusal[] }) {
@@ -39,7 +39,7 @@ function Refusal({ refusal }: { refusal: SurveyRefusal }) {
         <Txt strong>{fileName}</Txt>
         <Txt variant="small" tone="soft">
           {faultCount === 1 ? '1 fault' : `${faultCount.toLocaleString('en-GB')} faults`} · sent by{' '}
-          {sentBy} on {sentOn(sentAt)}
+          {sentBy} on {wallClock(sentAt)}
         </Txt>
       </View>
       <View style={styles.actions}>

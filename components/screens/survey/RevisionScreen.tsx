@@ -5,7 +5,7 @@ import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { SectionsPreview } from './SectionsPreview';
-import { sentOn } from './sentOn';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** One accepted revision, as it was handed in. */
 export function RevisionScreen({ surveyId }: { surveyId: number }) {
@@ -21,7 +21,7 @@ export function RevisionScreen({ surveyId }: { surveyId: number }) {
       ]}
       lead={
         survey
-          ? `${survey.fileName}, sent by ${survey.sentBy} on ${sentOn(survey.sentAt)}. ${survey.note}`
+          ? `${survey.fileName}, sent by ${survey.sentBy} on ${wallClock(survey.sentAt)}. ${survey.note}`
           : undefined
       }
       actions={<Button label="All revisions" href={here} />}

@@ -9,7 +9,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { SurveyRevisionRow } from '@/shared/surveys/types';
 import { formatQuantity } from '@/shared/units/format';
 import { UNITS, type UnitSystem } from '@/shared/units/units';
-import { sentOn } from './sentOn';
+import { wallClock } from '@/components/ui/wallClock';
 
 /** What was taken in, the newest first; a press shows the sections of that revision. */
 export function RevisionsCard({ revisions }: { revisions: readonly SurveyRevisionRow[] }) {
@@ -68,7 +68,7 @@ const columns = (system: UnitSystem): Column<SurveyRevisionRow>[] => [
       `${formatQuantity(firstChainage, 'chainage', system)} – ${formatQuantity(lastChainage, 'chainage', system)}`,
   },
   { key: 'by', title: 'Sent by', render: ({ sentBy }) => sentBy },
-  { key: 'on', title: 'Sent', render: ({ sentAt }) => sentOn(sentAt) },
+  { key: 'on', title: 'Sent', render: ({ sentAt }) => wallClock(sentAt) },
   {
     key: 'note',
     title: 'Note',

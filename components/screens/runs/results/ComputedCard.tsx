@@ -3,7 +3,8 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary } from '@/shared/runs/types';
 import { formatDuration, formatNumber, formatWithUnit } from '@/shared/units/format';
 import { Facts } from '../Facts';
-import { tookWords, wallClock } from '../runWords';
+import { wallClock } from '@/components/ui/wallClock';
+import { tookWords } from '../runWords';
 
 /** How the result came about, and the hash that names its inputs. */
 export function ComputedCard({ run, summary }: { run: Run; summary: RunSummary }) {

@@ -1,5 +1,5 @@
-/** When something was handed in, in the clock of whoever reads it: `14 Nov 2026, 18:12`. */
-export const sentOn = (iso: string): string =>
+/** A wall-clock time of the server in the words of the reader's place, e.g. `14 Nov 2025, 18:12`. */
+export const wallClock = (iso: string): string =>
   new Date(iso).toLocaleString('en-GB', {
     day: 'numeric',
     month: 'short',
