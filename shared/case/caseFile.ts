@@ -20,6 +20,44 @@ export interface SectionInput {
   roughness: RoughnessZone[];
   /** Offsets of the left and the right bank. */
   banks?: [number, number];
+  /** Stretches that hold water but do not carry it. */
+  storage?: StoragePart[];
+  /** Ground behind them stays dry until the stage is over the crest. */
+  embankments?: { left?: Embankment; right?: Embankment };
+}
+
+/** Between two offsets water is stored and does not flow along the reach; where `flowsAbove` (m) is given, up to that stage. */
+export interface StoragePart {
+  from: number;
+  to: number;
+  flowsAbove?: number;
+}
+
+/** Keeps the ground from its offset to the end of the section on its side dry while the stage is below its crest (m). */
+export interface Embankment {
+  offset: number;
+  crest: number;
+}
+
+/**
+ * Manning's n of a stretch of the reach (m) is multiplied by a factor, which may vary with depth (m): linear between the
+ * given depths, held beyond them; one depth is a constant factor. Where several cover a place they multiply.
+ */
+export interface RoughnessFactor {
+  from: number;
+  to: number;
+  /** Between the bank marks, outside them, or both; without bank marks the whole section is channel. */
+  part: 'all' | 'channel' | 'overbank';
+  depths: number[];
+  factors: number[];
+}
+
+/** Head lost where the river narrows or widens: these shares of the change of velocity head. */
+export interface LocalLoss {
+  from: number;
+  to: number;
+  contraction: number;
+  expansion: number;
 }
 
 /** Values are linear in time between the given ones, and held before the first and after the last. */
@@ -72,6 +110,8 @@ export interface Numerics {
   order?: 1 | 2;
   courant?: number;
   dryDepth?: number;
+  /** Momentum coefficient: 1, or that of the parts of a compound section by their conveyance. */
+  momentum?: 'uniform' | 'compound';
 }
 
 export interface CaseFile {
@@ -83,6 +123,8 @@ export interface CaseFile {
   downstream: Downstream;
   laterals: Lateral[];
   structures: StructureInput[];
+  roughnessFactors?: RoughnessFactor[];
+  localLosses?: LocalLoss[];
   initial: Initial;
   numerics: Numerics;
 }
@@ -93,4 +135,5 @@ export const CASE_DEFAULTS = {
   order: 2,
   courant: 0.8,
   dryDepth: 0.001,
+  momentum: 'uniform',
 } as const;

@@ -1,0 +1,45 @@
+/** Work beside the runs: a set of tasks, each computed by a worker thread on its own. */
+export const TASK_SET_KINDS = [
+  'convergence',
+  'sensitivity',
+  'ensemble',
+  'calibration',
+  'verification',
+] as const;
+export type TaskSetKind = (typeof TASK_SET_KINDS)[number];
+
+/** `finished` with failed members too: a member that fails does not spoil its set. */
+export const TASK_STATES = ['queued', 'running', 'finished', 'failed', 'cancelled'] as const;
+export type TaskState = (typeof TASK_STATES)[number];
+
+export interface TaskSetRow {
+  id: number;
+  kind: TaskSetKind;
+  /** Verification belongs to no study. */
+  studyId: number | null;
+  scenarioId: number | null;
+  name: string;
+  state: TaskState;
+  /** 0..1 over all tasks. */
+  progress: number;
+  /** s of wall time; null where unknown. */
+  secondsLeft: number | null;
+  total: number;
+  finished: number;
+  failed: number;
+  /** Why the set as a whole gave nothing. */
+  failure: string | null;
+  requestedBy: string;
+  requestedAt: string;
+  finishedAt: string | null;
+}
+
+export interface TaskRow {
+  id: number;
+  /** Order within its set, from 0. */
+  index: number;
+  label: string;
+  state: TaskState;
+  progress: number;
+  failure: string | null;
+}
