@@ -1,7 +1,7 @@
 import { StyleSheet, View } from 'react-native';
+import { CAUTIONS } from '@/shared/runs/cautions';
 import { space, widths } from '../theme/tokens';
 import { Txt } from '../ui/Txt';
-import { CAUTIONS } from './cautionWords';
 
 /** Stands wherever a result can be read. */
 export function Cautions() {

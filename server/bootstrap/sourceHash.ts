@@ -8,6 +8,7 @@ const SOURCES = [
   'components',
   'shared',
   'assets',
+  'public',
   'server/solvers',
   'app.json',
   'babel.config.js',
