@@ -5,7 +5,7 @@ import { conflict } from '../../errors';
 import type { Platform } from '../../platform';
 
 /** New firms. No route leads here: whoever runs the server opens them. */
-export function buildFirms({ models, sequelize }: Platform, links: OneTimeLinks) {
+export function buildFirms({ audit, models, sequelize }: Platform, links: OneTimeLinks) {
   const { Firm, User } = models;
 
   /**
@@ -25,7 +25,16 @@ export function buildFirms({ models, sequelize }: Platform, links: OneTimeLinks)
         { firmId: firm.id, email, name, roles: ['administrator'], passwordHash },
         { transaction },
       );
-      return links.issue('reset', { userId: user.id }, transaction);
+      const link = await links.issue('reset', { userId: user.id }, transaction);
+      const told = {
+        action: 'firm.opened',
+        words: `Firm opened with ${name} as its administrator`,
+        record: { kind: 'firm', id: firm.id },
+        firmId: firm.id,
+        actorName: 'whoever runs the server',
+      };
+      await audit.note(told, transaction);
+      return link;
     });
   }
 

@@ -23,6 +23,10 @@ test('a new firm begins with an administrator who sets the password by a link', 
     .expect(200);
   expect(session.body.me).toMatchObject({ roles: ['administrator'], firm: { name: 'Weirhouse' } });
 
+  const told = await server.services.models.AuditRow.findAll({ where: { action: 'firm.opened' } });
+  expect(told).toHaveLength(1);
+  expect(told[0].words).toBe('Firm opened with Fay First as its administrator');
+
   await expect(firms.open('Weirhouse', 'Other', 'other@weirhouse.example')).rejects.toMatchObject({
     code: 'conflict',
   });
