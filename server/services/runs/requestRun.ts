@@ -5,7 +5,7 @@ import { buildCase } from '../../../shared/scenarios/buildCase';
 import { checkScenario } from '../../../shared/scenarios/checkScenario';
 import type { Section } from '../../../shared/surveys/types';
 import { unpackJson } from '../../database/packedJson';
-import { AppError } from '../../errors';
+import { AppError, conflict } from '../../errors';
 import type { RunModel } from '../../models/Run';
 import type { ScenarioModel } from '../../models/Scenario';
 import type { Platform } from '../../platform';
@@ -26,7 +26,7 @@ interface RunOf {
 /** Puts runs into the queue. `queued` is called once one stands there. */
 export function buildRequestRun(platform: Platform, queued: () => void) {
   const { audit, sequelize, models, now } = platform;
-  const { Reach, Run, Study } = models;
+  const { Reach, Run, Scenario, Study } = models;
 
   /** Freezes a case and puts it into the queue as the study's next run. */
   async function requestCase(
@@ -40,6 +40,8 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
       // Whoever holds the study gives the next number.
       const lock = transaction.LOCK.UPDATE;
       await Study.findByPk(studyId, { lock, transaction });
+      if (!(await Scenario.findByPk(of.scenarioId, { lock, transaction })))
+        throw conflict(`${of.scenarioName} was deleted meanwhile. Nothing was started.`);
       const last = (await Run.max('number', { where: { studyId }, transaction })) as number | null;
       await touchStudy(platform, studyId, transaction);
       const made = await Run.create(

@@ -54,6 +54,14 @@ test('a scenario with faults is refused with each of them, and nothing is queued
   expect((await api.get(`/api/studies/${study.id}/runs`)).body).toEqual([]);
 });
 
+test('a scenario that is deleted while its run is asked for is a conflict, and nothing is queued', async () => {
+  const { scenario, study } = await buildRunnable(server.services, user);
+  const { models, runs } = server.services;
+  await models.Scenario.destroy({ where: { id: scenario.id } });
+  await expect(runs.request(user, scenario)).rejects.toMatchObject({ code: 'conflict' });
+  expect(await models.Run.count({ where: { studyId: study.id } })).toBe(0);
+});
+
 test('the inputs of a run are frozen: what is changed later does not reach it', async () => {
   const { scenario, reach } = await buildRunnable(server.services, user);
   const run = await ask(scenario.id);
