@@ -1,3 +1,5 @@
+import type { Embankment, StoragePart } from '../case/caseFile';
+
 /** A cross-section as it is stored: SI, offsets from left to right looking downstream. */
 export interface Section {
   id: string;
@@ -11,6 +13,10 @@ export interface Section {
   banks: [number, number] | null;
   /** [easting, northing] a point, in the study's own coordinate system, where the survey gave them. */
   coordinates: [number, number][] | null;
+  /** Stretches that hold water but do not carry it: set by the modeller, never surveyed. */
+  storage?: StoragePart[];
+  /** Ground behind them stays dry until the stage is over the crest. */
+  embankments?: { left?: Embankment; right?: Embankment };
 }
 
 /** What a column of the file can mean. */
