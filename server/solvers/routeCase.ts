@@ -4,6 +4,7 @@ import { createDownstreamBoundary } from './boundaries/downstreamBoundary';
 import { createUpstreamBoundary } from './boundaries/upstreamBoundary';
 import { caseHash } from './caseHash';
 import { createCellRecorder } from './diagnostics/cellRecorder';
+import { createFaceFlow } from './diagnostics/faceFlow';
 import { createRunWarnings } from './diagnostics/runWarnings';
 import { createSectionRecorder } from './diagnostics/sectionRecorder';
 import { createVolumeLedger } from './diagnostics/volumeLedger';
@@ -61,6 +62,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   const timeStep = createTimeStep(workspace, tables, laterals, courant, grid.chainage);
   const ledger = createVolumeLedger(workspace);
   const steps = createSteps(workspace, cellState, laterals, ledger);
+  const faceFlow = createFaceFlow(workspace, order);
   const polling = createPolling(options, duration);
 
   const mustSettle = setInitialState(
@@ -75,7 +77,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   );
   if (mustSettle) {
     settleInitial(
-      { workspace, cellState, laterals, rhs, timeStep, order, grid },
+      { workspace, cellState, laterals, rhs, timeStep, order, grid, faceFlow },
       polling,
       warnings,
     );
@@ -83,7 +85,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
 
   const sectionRecorder = createSectionRecorder(caseFile, workspace, grid);
   const cellRecorder = createCellRecorder(workspace, grid);
-  const structureRecorder = structures ? createStructureRecorder(structures) : null;
+  const structureRecorder = structures ? createStructureRecorder(structures, order) : null;
   const pool = structures?.pool ?? null;
   const { fluxArea } = workspace;
   const times = outputTimes(duration, outputInterval);
@@ -95,6 +97,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     if (laterals.any) laterals.setTime(time);
     structures?.follow(time);
     const endSpeed = rhs(time);
+    faceFlow.follow();
     structureRecorder?.follow(time);
     sectionRecorder.follow(time);
     cellRecorder.follow(time);
@@ -129,6 +132,8 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
       steps.accept(dt);
       pool?.accept(until, dt, fluxArea[0]);
     }
+    faceFlow.keep();
+    structureRecorder?.keep();
     time = until;
     stepCount++;
     polling.poll(time, stepCount);

@@ -44,6 +44,9 @@ export interface Workspace {
   fluxArea: Float64Array;
   fluxLeft: Float64Array;
   fluxRight: Float64Array;
+  /** Volume flux of the second stage of the last step, and the flow past each face to report (m³/s): diagnostics/faceFlow.ts. */
+  lateFlux: Float64Array;
+  faceFlow: Float64Array;
 
   /** Kept from the start of a step: area, and the parts of the corrector that are known then. */
   oldArea: Float64Array;
@@ -65,7 +68,7 @@ export const FACE_FIELDS = 6;
 export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: number): Workspace {
   const n = grid.cells;
   const size = n + 2;
-  const pool = pooledArrays(size, 26);
+  const pool = pooledArrays(size, 28);
   const workspace: Workspace = {
     n,
     dx: grid.dx,
@@ -93,6 +96,8 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
     fluxArea: pool(),
     fluxLeft: pool(),
     fluxRight: pool(),
+    lateFlux: pool(),
+    faceFlow: pool(),
     oldArea: pool(),
     halfFlow: pool(),
     implicitShare: pool(),

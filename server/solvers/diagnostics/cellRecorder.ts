@@ -12,7 +12,7 @@ export interface CellRecorder {
 }
 
 export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecorder {
-  const { n, area, flow: cellFlow, stage, bed, dryDepth, fluxArea } = workspace;
+  const { n, area, flow: cellFlow, stage, bed, dryDepth, faceFlow } = workspace;
   const initialStage = new Float64Array(n);
   const peakStage = new Float64Array(n).fill(-Infinity);
   const peakStageTime = new Float64Array(n);
@@ -56,7 +56,7 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
             arrival[k] = time;
           }
         }
-        const flow = 0.5 * (fluxArea[i - 1] + fluxArea[i]);
+        const flow = 0.5 * (faceFlow[i - 1] + faceFlow[i]);
         const size = abs(flow);
         if (size > abs(peakFlow[k])) {
           peakFlow[k] = flow;
@@ -73,7 +73,7 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
         const k = i - 1;
         const wet = stage[i] - bed[i] > dryDepth;
         view.stage[k] = wet ? stage[i] : bed[i];
-        view.flow[k] = wet ? 0.5 * (fluxArea[i - 1] + fluxArea[i]) : 0;
+        view.flow[k] = wet ? 0.5 * (faceFlow[i - 1] + faceFlow[i]) : 0;
         view.velocity[k] = wet ? waterVelocity(view.flow[k], cellFlow[i], area[i]) : 0;
       }
       return view;

@@ -20,7 +20,7 @@ export function createRunWarnings(
   workspace: Workspace,
   grid: Grid,
 ): RunWarnings {
-  const { n, dx, area, flow, stage, celerity, fluxArea, width } = workspace;
+  const { n, dx, area, flow, stage, celerity, faceFlow, width } = workspace;
   const { sections, downstream } = caseFile;
   const warnings: RunWarning[] = [];
   const fast = { length: 0, time: 0, chainage: 0 };
@@ -62,7 +62,7 @@ export function createRunWarnings(
     let count = 0;
     let first = 0;
     for (let i = 1; i <= n; i++) {
-      const q = 0.5 * Math.abs(fluxArea[i - 1] + fluxArea[i]);
+      const q = 0.5 * Math.abs(faceFlow[i - 1] + faceFlow[i]);
       if (area[i] > 0 && flow[i] !== 0 && q > area[i] * celerity[i] * 1.001) {
         if (count === 0) first = i;
         count++;
@@ -85,7 +85,7 @@ export function createRunWarnings(
     }
     const c2 = (workspace.gravity * area[n]) / width[n];
     const u = flow[n] / area[n];
-    if (u > 0 && u * u > 1.01 * c2 && fluxArea[n] > 0) outlet.supercriticalFrom = time;
+    if (u > 0 && u * u > 1.01 * c2 && faceFlow[n] > 0) outlet.supercriticalFrom = time;
   }
 
   return {

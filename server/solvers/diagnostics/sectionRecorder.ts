@@ -20,7 +20,7 @@ export function createSectionRecorder(
   workspace: Workspace,
   grid: Grid,
 ): SectionRecorder {
-  const { stage, flow: cellFlow, bed: cellBed, fluxArea, gravity, dryDepth } = workspace;
+  const { stage, flow: cellFlow, bed: cellBed, faceFlow, gravity, dryDepth } = workspace;
   const count = sections.length;
   const table = new Float64Array(count * TABLE_STRIDE);
   const levels = new Int32Array(count);
@@ -70,7 +70,7 @@ export function createSectionRecorder(
             : bed[k];
     if (eta - bed[k] <= dryDepth) return;
     now.stage = eta;
-    now.flow = (1 - faceWeight) * fluxArea[face] + faceWeight * fluxArea[face + 1];
+    now.flow = (1 - faceWeight) * faceFlow[face] + faceWeight * faceFlow[face + 1];
     level[k] = (tables.rowAtStage(k, eta) - k * TABLE_STRIDE) / LEVEL_FIELDS;
     now.area = tables.areaAt(k, eta);
     const inCells = (1 - weight) * cellFlow[left] + weight * cellFlow[right];

@@ -1,3 +1,4 @@
+import type { FaceFlow } from '../diagnostics/faceFlow';
 import type { Rhs } from '../rhs';
 import type { Laterals } from '../sources/laterals';
 import type { Steps } from '../time/steps';
@@ -31,9 +32,10 @@ export function settle(
   laterals: Laterals,
   order: 1 | 2,
   start: number,
+  faceFlow: FaceFlow,
   poll: () => void,
 ): Settled {
-  const { n, dx, fluxArea } = workspace;
+  const { n, dx, faceFlow: flow } = workspace;
   const most = Math.max(LEAST_STEPS, Math.min(200_000, Math.floor(BUDGET / n)));
   const patience = 2000 + 4 * n;
   laterals.setTime(0);
@@ -45,6 +47,7 @@ export function settle(
     const endSpeed = rhs(0);
     if (step % CHECK_EVERY === 0) {
       poll();
+      faceFlow.follow();
       settled = { ...imbalance(), steps: step };
       if (settled.residual < 0.5 * best) {
         best = settled.residual;
@@ -59,17 +62,18 @@ export function settle(
       rhs(0);
       steps.correct(dt);
     } else steps.accept(dt);
+    faceFlow.keep();
   }
 
   function imbalance(): { residual: number; chainage: number } {
-    let expected = fluxArea[0];
+    let expected = flow[0];
     let scale = Math.abs(expected);
     let worst = 0;
     let place = 0;
     for (let i = 1; i <= n; i++) {
       expected += laterals.rate[i];
-      scale = Math.max(scale, Math.abs(expected), Math.abs(fluxArea[i]));
-      const off = Math.abs(fluxArea[i] - expected);
+      scale = Math.max(scale, Math.abs(expected), Math.abs(flow[i]));
+      const off = Math.abs(flow[i] - expected);
       if (off > worst) {
         worst = off;
         place = i;

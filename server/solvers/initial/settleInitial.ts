@@ -1,3 +1,4 @@
+import type { FaceFlow } from '../diagnostics/faceFlow';
 import { createVolumeLedger } from '../diagnostics/volumeLedger';
 import type { RunWarnings } from '../diagnostics/runWarnings';
 import type { CellState } from '../geometry/cellState';
@@ -20,11 +21,12 @@ export interface SettleParts {
   timeStep: (endSpeed: number, time: number) => number;
   order: 1 | 2;
   grid: Grid;
+  faceFlow: FaceFlow;
 }
 
 /** Lets the initial steady state settle, on books of its own, and warns where it did not. */
 export function settleInitial(parts: SettleParts, polling: Polling, warnings: RunWarnings): void {
-  const { workspace, cellState, laterals, rhs, timeStep, order, grid } = parts;
+  const { workspace, cellState, laterals, rhs, timeStep, order, grid, faceFlow } = parts;
   const steps = createSteps(workspace, cellState, laterals, createVolumeLedger(workspace));
   const { residual, chainage } = settle(
     workspace,
@@ -34,6 +36,7 @@ export function settleInitial(parts: SettleParts, polling: Polling, warnings: Ru
     laterals,
     order,
     grid.start,
+    faceFlow,
     polling.pollStart,
   );
   if (residual <= WORTH_WARNING) return;

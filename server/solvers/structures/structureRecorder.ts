@@ -3,13 +3,17 @@ import type { StructureSet } from './structureSet';
 
 /** Series of all structures and of the reservoir at the output times, and their peaks of every step. */
 export interface StructureRecorder {
+  /** After the last stage of a step */
+  keep(): void;
+  /** After the first fluxes of a step */
   follow(time: number): void;
   output(time: number): void;
   structures(): StructureResult[];
   reservoir(): ReservoirResult | null;
 }
 
-export function createStructureRecorder(set: StructureSet): StructureRecorder {
+/** Flows are the mean of two stages, as those of the reach: see diagnostics/faceFlow.ts. */
+export function createStructureRecorder(set: StructureSet, order: 1 | 2): StructureRecorder {
   const entries = set.groups.flatMap(({ structures, release }) =>
     structures.map((structure, k) => {
       const result: StructureResult = {
@@ -23,18 +27,27 @@ export function createStructureRecorder(set: StructureSet): StructureRecorder {
         peak: { flow: 0, flowTime: 0, stageUp: -Infinity, stageUpTime: 0 },
       };
       if (structure.opening) result.breach = { width: [], bottom: [] };
-      return { structure, release, k, result };
+      return { structure, release, k, result, late: 0, flow: 0 };
     }),
   );
   const { pool } = set;
   const series = { stage: [] as number[], volume: [] as number[] };
   const flows = { inflow: [] as number[], release: [] as number[] };
 
+  let isKept = false;
+
   return {
+    keep() {
+      if (order === 1) return;
+      for (const entry of entries) entry.late = entry.release.flows[entry.k];
+      isKept = true;
+    },
     follow(time) {
-      for (const { release, k, result } of entries) {
+      for (const entry of entries) {
+        const { release, k, result } = entry;
         const { peak } = result;
-        const flow = release.flows[k];
+        const flow = isKept ? 0.5 * (entry.late + release.flows[k]) : release.flows[k];
+        entry.flow = flow;
         if (Math.abs(flow) > Math.abs(peak.flow)) {
           peak.flow = flow;
           peak.flowTime = time;
@@ -46,8 +59,8 @@ export function createStructureRecorder(set: StructureSet): StructureRecorder {
       }
     },
     output(time) {
-      for (const { structure, release, k, result } of entries) {
-        result.flow.push(release.flows[k]);
+      for (const { structure, release, flow, result } of entries) {
+        result.flow.push(flow);
         result.stageUp.push(release.stageUp());
         result.stageDown.push(release.stageDown());
         result.regime.push(structure.regime());
@@ -61,7 +74,8 @@ export function createStructureRecorder(set: StructureSet): StructureRecorder {
       series.stage.push(pool.stage());
       series.volume.push(pool.volume());
       flows.inflow.push(pool.inflow(time));
-      flows.release.push(set.groups[0].release.flows.reduce((sum, flow) => sum + flow, 0));
+      const atHead = entries.filter(({ release }) => release === set.groups[0].release);
+      flows.release.push(atHead.reduce((sum, { flow }) => sum + flow, 0));
     },
     structures: () => entries.map(({ result }) => result),
     reservoir() {

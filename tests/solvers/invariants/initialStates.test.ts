@@ -67,9 +67,9 @@ describe('initial states', () => {
       finalStage.forEach((stage, i) =>
         expect(Math.abs(stage - initialStage[i])).toBeLessThan(1e-3),
       );
-      peakFlow.forEach((peak) => expect(Math.abs(peak / flow - 1)).toBeLessThan(1e-3));
-      // Where a slope limiter switches between the two stages of a step the first, which is shown, is off by 1e-5.
-      finalFlow.forEach((found) => expect(Math.abs(found / flow - 1)).toBeLessThan(1e-4));
+      peakFlow.forEach((peak) => expect(Math.abs(peak / flow - 1)).toBeLessThan(1e-4));
+      // A slope limiter that switches between the stages of a step cancels in their mean; from step to step it does not.
+      finalFlow.forEach((found) => expect(Math.abs(found / flow - 1)).toBeLessThan(1e-5));
       expect(result.warnings.map(({ code }) => code)).not.toContain('initialNotSettled');
     },
   );
