@@ -1,21 +1,9 @@
 import { createInteriorFluxes } from '../../../server/solvers/riemann/interiorFluxes';
-import type { SectionInput } from '../../../shared/case/caseFile';
+import { fluxesBetween } from './fluxesBetween';
 import { at, kernelParts } from './kernelParts';
 import { natural, rectangle, trapezoid } from './sections';
 
 const G = 9.81;
-
-/** Two cells of one section, states left and right given by stage and velocity; the fluxes at their face. */
-function fluxesBetween(section: SectionInput, left: [number, number], right: [number, number]) {
-  const { workspace, tables, state } = kernelParts(at(section, 0), at(section, 20), 2);
-  [left, right].forEach(([stage, velocity], k) => {
-    state.placeAtStage(k + 1, stage);
-    workspace.flow[k + 1] = velocity * workspace.area[k + 1];
-  });
-  createInteriorFluxes(workspace, tables)();
-  const { fluxArea, fluxLeft, fluxRight, area } = workspace;
-  return { volume: fluxArea[1], left: fluxLeft[1], right: fluxRight[1], area: [...area] };
-}
 
 describe('fluxes between cells', () => {
   it.each([
