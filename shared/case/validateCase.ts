@@ -9,6 +9,7 @@ import { Faults, kindOf, type CaseFault } from './validate/faults';
 import { checkInitial } from './validate/initialFaults';
 import { checkNumerics } from './validate/numericsFaults';
 import { checkSections } from './validate/sectionFaults';
+import { checkLocalLosses, checkRoughnessFactors } from './validate/stretchFaults';
 import { checkStructures } from './validate/structureFaults';
 
 export type { CaseFault } from './validate/faults';
@@ -35,7 +36,7 @@ const REQUIRED = [
 /** Checks a parsed case file against everything that the solver relies on. Pure; never throws. */
 export function validateCase(value: unknown): CheckedCase {
   const faults = new Faults();
-  if (!faults.record('', value, REQUIRED, ['gravity'])) {
+  if (!faults.record('', value, REQUIRED, ['gravity', 'roughnessFactors', 'localLosses'])) {
     return { faults: [{ path: '(case)', message: faults.list[0].message }], caseFile: null };
   }
   const has = (key: string): boolean => key in value;
@@ -58,6 +59,10 @@ export function validateCase(value: unknown): CheckedCase {
   if (has('downstream')) checkDownstream(faults, value.downstream);
   if (has('laterals')) checkLaterals(faults, value.laterals, ends);
   if (has('structures')) checkStructures(faults, value, ends);
+  if (value.roughnessFactors !== undefined) {
+    checkRoughnessFactors(faults, value.roughnessFactors, ends);
+  }
+  if (value.localLosses !== undefined) checkLocalLosses(faults, value.localLosses, ends);
   if (has('initial')) checkInitial(faults, value.initial, ends, value.upstream, value.downstream);
   if (has('numerics')) checkNumerics(faults, value.numerics, ends, count);
   const sound = faults.list.length === 0;

@@ -1,6 +1,6 @@
 import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
-import type { Faults } from './faults';
+import { kindOf, type Faults } from './faults';
 
 export function checkNumerics(
   faults: Faults,
@@ -10,7 +10,7 @@ export function checkNumerics(
 ): void {
   const path = 'numerics';
   const required = ['cellSize', 'duration', 'outputInterval'];
-  if (!faults.record(path, value, required, ['order', 'courant', 'dryDepth'])) return;
+  if (!faults.record(path, value, required, ['order', 'courant', 'dryDepth', 'momentum'])) return;
 
   const positive = (key: string, what: string): number | null => {
     if (!(key in value) || !faults.number(`numerics.${key}`, value[key], what)) return null;
@@ -71,5 +71,8 @@ export function checkNumerics(
         `is ${value.dryDepth} m; it must lie above 0 and up to 0.1 m`,
       );
     }
+  }
+  if (value.momentum !== undefined && !['uniform', 'compound'].includes(value.momentum as string)) {
+    faults.add('numerics.momentum', `must be uniform or compound, not ${kindOf(value.momentum)}`);
   }
 }

@@ -1,8 +1,7 @@
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
-
-/** Largest elevation, offset or chainage (m, either sign) that can be meant. */
-const FARTHEST = 1e7;
+import { checkMetres } from './metres';
+import { checkEmbankments, checkStorage } from './sectionPartFaults';
 
 /** Two or more sections, chainage strictly increasing, ids unique. */
 export function checkSections(faults: Faults, value: unknown): void {
@@ -38,21 +37,31 @@ export function checkSections(faults: Faults, value: unknown): void {
 
 function checkSection(faults: Faults, path: string, value: unknown): void {
   const required = ['id', 'chainage', 'points', 'roughness'];
-  if (!faults.record(path, value, required, ['banks'])) return;
+  if (!faults.record(path, value, required, ['banks', 'storage', 'embankments'])) return;
   if ('id' in value && faults.text(join(path, 'id'), value.id, 100) && value.id === '') {
     faults.add(join(path, 'id'), 'is empty; name the section');
   }
   if ('chainage' in value)
     checkMetres(faults, join(path, 'chainage'), value.chainage, 'a chainage');
-  const ends = 'points' in value ? checkPoints(faults, join(path, 'points'), value.points) : null;
+  const points = 'points' in value ? checkPoints(faults, join(path, 'points'), value.points) : null;
+  const ends: Ends = points ? [points[0][0], points[points.length - 1][0]] : null;
   if ('roughness' in value) checkRoughness(faults, join(path, 'roughness'), value.roughness, ends);
-  if (value.banks !== undefined) checkBanks(faults, join(path, 'banks'), value.banks, ends);
+  const banks =
+    value.banks === undefined ? null : checkBanks(faults, join(path, 'banks'), value.banks, ends);
+  const ground = { points, banks };
+  if (value.storage !== undefined) {
+    checkStorage(faults, join(path, 'storage'), value.storage, ground, value.embankments);
+  }
+  if (value.embankments !== undefined) {
+    checkEmbankments(faults, join(path, 'embankments'), value.embankments, ground);
+  }
 }
 
 /** First and last offset, where the points can be used. */
 type Ends = [number, number] | null;
 
-function checkPoints(faults: Faults, path: string, value: unknown): Ends {
+/** The points, where they can be used. */
+function checkPoints(faults: Faults, path: string, value: unknown): [number, number][] | null {
   if (!faults.array(path, value, 2, CASE_LIMITS.pointsPerSection)) return null;
   const count = faults.list.length;
   const points: [number, number][] = [];
@@ -99,7 +108,7 @@ function checkPoints(faults: Faults, path: string, value: unknown): Ends {
       'ends a wall that falls out of the section; end at the top of the wall',
     );
   }
-  return [points[0][0], points[last][0]];
+  return points;
 }
 
 function checkRoughness(faults: Faults, path: string, value: unknown, ends: Ends): void {
@@ -142,15 +151,15 @@ function checkRoughness(faults: Faults, path: string, value: unknown, ends: Ends
   });
 }
 
-function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): void {
+function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): Ends {
   if (!isPair(value)) {
     faults.add(path, 'must be [left bank offset, right bank offset], two numbers in m');
-    return;
+    return null;
   }
   const fine =
     checkMetres(faults, `${path}[0]`, value[0], 'an offset') &&
     checkMetres(faults, `${path}[1]`, value[1], 'an offset');
-  if (!fine) return;
+  if (!fine) return null;
   const [left, right] = value as [number, number];
   if (left >= right) {
     faults.add(
@@ -164,14 +173,9 @@ function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): v
       `the banks at ${left} m and ${right} m must lie within the section, ${ends[0]} m to ${ends[1]} m`,
     );
   }
+  return [left, right];
 }
 
 function isPair(value: unknown): value is [unknown, unknown] {
   return Array.isArray(value) && value.length === 2;
-}
-
-function checkMetres(faults: Faults, path: string, value: unknown, what: string): value is number {
-  if (!faults.number(path, value, `${what} in m`)) return false;
-  if (Math.abs(value) <= FARTHEST) return true;
-  return faults.add(path, `${value} m is out of range; check the unit`);
 }

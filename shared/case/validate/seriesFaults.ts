@@ -3,7 +3,7 @@ import { join, type Faults } from './faults';
 
 export interface SeriesRule {
   /** Key of the places (strictly increasing) and what they are */
-  at: 'times' | 'chainages' | 'stages';
+  at: 'times' | 'chainages' | 'stages' | 'depths';
   /** Keys of the values, each as long as the places */
   values: readonly string[];
   /** Keys among them whose values cannot be negative */
@@ -23,6 +23,8 @@ const UNITS: Record<string, string> = {
   flows: 'm³/s',
   volumes: 'm³',
   openings: 'm',
+  depths: 'm',
+  factors: '',
 };
 
 /** Parallel lists of places and values in the record at `path`. */
@@ -34,6 +36,12 @@ export function checkSeries(
 ): void {
   const places = numbers(faults, join(path, rule.at), record[rule.at], rule.at, rule.least ?? 1);
   if (places) {
+    if (rule.notNegative?.includes(rule.at) && places[0] < 0) {
+      faults.add(
+        `${join(path, rule.at)}[0]`,
+        `is ${places[0]} ${UNITS[rule.at]}; it cannot be negative`,
+      );
+    }
     for (let k = 1; k < places.length; k++) {
       if (places[k] > places[k - 1]) continue;
       faults.add(
@@ -79,7 +87,13 @@ function numbers(
   if (!faults.array(path, value, least, CASE_LIMITS.seriesLength)) return null;
   let fine = true;
   value.forEach((entry, k) => {
-    if (!faults.number(`${path}[${k}]`, entry, `one of the ${what} in ${UNITS[what]}`))
+    if (
+      !faults.number(
+        `${path}[${k}]`,
+        entry,
+        UNITS[what] ? `one of the ${what} in ${UNITS[what]}` : `one of the ${what}`,
+      )
+    )
       fine = false;
     else if (Math.abs(entry) > (what === 'volumes' ? 1e13 : 1e9)) {
       fine = faults.add(`${path}[${k}]`, `${entry} is out of range; check the unit`);
