@@ -9,6 +9,8 @@ import { buildRateLimits } from './middleware/rateLimits';
 import { buildPlatform, type Overrides } from './platform';
 import { buildAccounts } from './services/accounts';
 import { buildReadAudit } from './services/audit/readAudit';
+import { buildCalibration } from './services/calibration';
+import { buildObservations } from './services/observations';
 import { buildIssued } from './services/issued/readIssued';
 import { buildVerify } from './services/issued/verify';
 import { buildReports } from './services/reports';
@@ -20,6 +22,7 @@ import { buildMembers } from './services/studies/members';
 import { buildStations } from './services/studies/stations';
 import { buildStudies } from './services/studies/studies';
 import { buildSurveys } from './services/surveys/surveys';
+import { buildTasks } from './services/tasks';
 
 /** The only constructor of dependencies: connects, brings the schema up to date, and builds every service once. */
 export async function compose(env: Env, overrides: Overrides = {}) {
@@ -31,6 +34,9 @@ export async function compose(env: Env, overrides: Overrides = {}) {
     platform.onClose(() => background.idle().finally(mailer.close));
     const sessions = buildSessions(platform);
     const runs = buildRuns(platform);
+    const observations = buildObservations(platform);
+    const calibration = buildCalibration(platform, { observations, runs });
+    const tasks = buildTasks(platform, runs.busy);
     const reviews = buildReviews(platform, {
       background,
       mailer,
@@ -56,7 +62,10 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       surveys: buildSurveys(platform),
       reaches: buildReaches(platform),
       scenarios: buildScenarios(platform),
+      observations,
+      calibration,
       runs,
+      tasks,
       reviews,
       reports,
       issued: buildIssued(platform, { reviews, runs }),

@@ -23,6 +23,7 @@ export async function startServer(env: Env): Promise<RunningServer> {
     if (env.demoData) await seedDemo(services);
     const http = await listen(services);
     services.runs.start();
+    services.tasks.start();
     if (env.demoData) services.background.run('checking the demo runs', () => seedChecks(services));
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);
     sweep();

@@ -13,7 +13,11 @@ export const LIMITS = {
   },
   hydrographPoints: 20_000,
   laterals: 50,
+  structures: 50,
+  structureName: 60,
   stationsPerStudy: 100,
+  /** Sets of tasks of a firm that wait or run. */
+  openTaskSets: 20,
   textShort: 120,
   textLong: 4000,
   password: { min: 12, max: 200 },

@@ -28,6 +28,14 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'PATCH /stations/:stationId': say('station.changed', 'Station changed'),
   'DELETE /stations/:stationId': say('station.removed', 'Station removed'),
 
+  'POST /studies/:studyId/marks': say('mark.made', 'Marks added to'),
+  'PATCH /marks/:markId': say('mark.changed', 'Mark changed'),
+  'DELETE /marks/:markId': say('mark.removed', 'Mark removed'),
+  'POST /studies/:studyId/gauges': say('gauge.made', 'Gauge record added to'),
+  'PUT /gauges/:gaugeId': say('gauge.changed', 'Gauge record changed'),
+  'DELETE /gauges/:gaugeId': say('gauge.removed', 'Gauge record removed'),
+  'PUT /runs/:runId/observed': say('run.observed', 'Observed flood of the report chosen'),
+
   'POST /studies/:studyId/surveys': say('survey.sent', 'Survey handed in for'),
   'GET /refusals/:refusalId/faults.xlsx': say(
     'survey.faultsTaken',
@@ -46,6 +54,12 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'GET /runs/:runId/results.csv': say('run.resultsTaken', 'Results downloaded as CSV'),
   'GET /runs/:runId/results.xlsx': say('run.resultsTaken', 'Results downloaded as XLSX'),
   'GET /runs/:runId/report.pdf': say('report.taken', 'Report downloaded'),
+
+  'POST /task-sets/:taskSetId/cancel': say('taskSet.cancelled', 'Set of computations cancelled'),
+  'POST /task-sets/:taskSetId/retry': say(
+    'taskSet.retried',
+    'Failed members put into the queue again',
+  ),
 
   'POST /runs/:runId/review': say('review.sent', 'Sent for checking'),
   'PUT /runs/:runId/review/answers': say('review.answered', 'Checklist answered'),
@@ -73,6 +87,7 @@ export const NOT_TOLD = new Set([
   'POST /invitations/look',
   'POST /studies/:studyId/surveys/read',
   'POST /tables/read',
+  'POST /studies/:studyId/marks/read',
   'GET /templates/survey.xlsx',
   'GET /templates/survey-example.xlsx',
   'GET /templates/survey-sections-example.xlsx',

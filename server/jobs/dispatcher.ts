@@ -171,6 +171,8 @@ export function runDispatcher(parts: Parts) {
   }
 
   return {
+    /** Slots that are taken. */
+    busy: (): number => active.size,
     start(): void {
       if (slots === 0 || timer) return;
       timer = setInterval(wake, timing.beat);

@@ -20,8 +20,13 @@ import { defineReport } from './Report';
 import { defineReview } from './Review';
 import { defineReviewPoint } from './ReviewPoint';
 import { defineReviewPointEntry } from './ReviewPointEntry';
+import { defineMark } from './Mark';
+import { defineGauge } from './Gauge';
+import { defineReportedFlood } from './ReportedFlood';
 import { defineSignOff } from './SignOff';
 import { defineWithdrawal } from './Withdrawal';
+import { defineTask } from './Task';
+import { defineTaskSet } from './TaskSet';
 import { defineUser } from './User';
 
 /** Every table, bound to one connection pool. A new model is one line here, and its ties to others below. */
@@ -49,7 +54,12 @@ export function defineModels(sequelize: Sequelize) {
     ReviewPoint: defineReviewPoint(sequelize),
     ReviewPointEntry: defineReviewPointEntry(sequelize),
     SignOff: defineSignOff(sequelize),
+    Mark: defineMark(sequelize),
+    Gauge: defineGauge(sequelize),
+    ReportedFlood: defineReportedFlood(sequelize),
     Withdrawal: defineWithdrawal(sequelize),
+    Task: defineTask(sequelize),
+    TaskSet: defineTaskSet(sequelize),
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
@@ -79,6 +89,8 @@ export function defineModels(sequelize: Sequelize) {
   models.SignOff.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
   models.Withdrawal.belongsTo(models.User, { as: 'withdrawer', foreignKey: 'withdrawnBy' });
   models.ClientRead.belongsTo(models.User, { as: 'reader', foreignKey: 'userId' });
+  models.TaskSet.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
+  models.TaskSet.belongsTo(models.User, { as: 'requester', foreignKey: 'requestedBy' });
   return models;
 }
 

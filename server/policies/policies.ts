@@ -53,6 +53,12 @@ export const POLICIES = table({
   'station.read': { grants: engineers, refusal: 'notFound' },
   'station.change': { grants: engineers, refusal: 'notFound' },
 
+  // What was observed of real floods
+  'observation.read': { grants: engineers, refusal: 'notFound' },
+  'observation.change': { grants: engineers, refusal: 'notFound' },
+  'calibration.read': { grants: engineers, refusal: 'notFound' },
+  'calibration.change': { grants: engineers, refusal: 'notFound' },
+
   // Surveys: surveyors see what they sent themselves
   'survey.list': { grants: { ...engineers, surveyor: asSurveyor }, refusal: 'notFound' },
   'survey.send': {
@@ -73,6 +79,11 @@ export const POLICIES = table({
   'run.read': { grants: engineers, refusal: 'notFound' },
   'run.request': { grants: engineers, refusal: 'notFound' },
   'run.change': { grants: engineers, refusal: 'notFound' },
+
+  // Work beside the runs: convergence, sensitivity, ensembles, calibration, verification
+  'taskSet.read': { grants: engineers, refusal: 'notFound' },
+  'taskSet.request': { grants: engineers, refusal: 'notFound' },
+  'taskSet.change': { grants: engineers, refusal: 'notFound' },
 
   // The check: whoever asked for a run does not sign it
   'review.read': { grants: engineers, refusal: 'notFound' },

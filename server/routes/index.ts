@@ -1,6 +1,8 @@
 import type { Router } from 'express';
 import type { Services } from '../composition';
 import { auditRoutes } from './audit';
+import { calibrationRoutes } from './calibration';
+import { observationRoutes } from './observations';
 import { authRoutes } from './auth';
 import { healthRoutes } from './health';
 import { invitationRoutes } from './invitations';
@@ -15,6 +17,7 @@ import { stationRoutes } from './stations';
 import { studyRoutes } from './studies';
 import { surveyRoutes } from './surveys';
 import { tableRoutes } from './tables';
+import { taskSetRoutes } from './taskSets';
 import { templateRoutes } from './templates';
 import { userRoutes } from './users';
 import { verificationRoutes } from './verification';
@@ -30,9 +33,12 @@ export const ROUTES: ((services: Services) => Router)[] = [
   reachRoutes,
   scenarioRoutes,
   stationRoutes,
+  observationRoutes,
+  calibrationRoutes,
   studyRoutes,
   surveyRoutes,
   tableRoutes,
+  taskSetRoutes,
   templateRoutes,
   reviewRoutes,
   reportRoutes,

@@ -12,12 +12,24 @@ export type TaskSetKind = (typeof TASK_SET_KINDS)[number];
 export const TASK_STATES = ['queued', 'running', 'finished', 'failed', 'cancelled'] as const;
 export type TaskState = (typeof TASK_STATES)[number];
 
+export const TASK_STATE_WORDS: Record<TaskState, string> = {
+  queued: 'Queued',
+  running: 'Running',
+  finished: 'Finished',
+  failed: 'Stopped with a fault',
+  cancelled: 'Cancelled',
+};
+
+/** `GET /api/studies/:studyId/task-sets?kind=…`, newest first. */
 export interface TaskSetRow {
   id: number;
   kind: TaskSetKind;
   /** Verification belongs to no study. */
   studyId: number | null;
   scenarioId: number | null;
+  /** The run whose frozen case the set varies, and its number within the study. */
+  runId: number | null;
+  runNumber: number | null;
   name: string;
   state: TaskState;
   /** 0..1 over all tasks. */
@@ -42,4 +54,15 @@ export interface TaskRow {
   state: TaskState;
   progress: number;
   failure: string | null;
+}
+
+/** `GET /api/task-sets/:taskSetId`. */
+export interface TaskSet extends TaskSetRow {
+  /** `sha256:…` of the case that the members vary. */
+  caseHash: string | null;
+  solverVersion: string;
+  /** What was chosen; its type is that of the kind. */
+  settings: unknown;
+  tasks: TaskRow[];
+  may: ('taskSet.cancel' | 'taskSet.retry')[];
 }

@@ -1,9 +1,9 @@
-import os from 'node:os';
 import { runDispatcher } from '../../jobs/dispatcher';
 import { progressHub } from '../../jobs/progressHub';
 import { runQueue } from '../../jobs/queue';
 import { RUN_WORKER } from '../../jobs/startWorker';
 import { QUEUE_TIMING } from '../../jobs/timing';
+import { workerSlots } from '../../jobs/workerSlots';
 import type { Platform } from '../../platform';
 import { buildChangeRuns } from './changeRuns';
 import { buildExportRun } from './exportRun';
@@ -18,8 +18,7 @@ export function buildRuns(platform: Platform) {
   const timing = QUEUE_TIMING;
   const hub = progressHub();
   const queue = runQueue(sequelize, models, timing);
-  // One core stays free for the server itself.
-  const slots = env.workers ?? Math.max(1, os.availableParallelism() - 1);
+  const slots = workerSlots(env);
   const workerFile = RUN_WORKER;
   const dispatcher = runDispatcher({ queue, models, hub, log, timing, slots, workerFile });
   platform.onClose(dispatcher.stop);
@@ -29,6 +28,7 @@ export function buildRuns(platform: Platform) {
   return {
     /** Begins to take runs from the queue. */
     start: dispatcher.start,
+    busy: dispatcher.busy,
     ...buildRequestRun(platform, queued),
     find: buildFindRuns(platform),
     change: buildChangeRuns(platform, { hub, queued, stop: dispatcher.cancel }),

@@ -35,6 +35,18 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'PATCH /stations/:stationId': 'station.change',
   'DELETE /stations/:stationId': 'station.change',
 
+  'GET /studies/:studyId/observations': 'observation.read',
+  'POST /studies/:studyId/marks/read': 'observation.change',
+  'POST /studies/:studyId/marks': 'observation.change',
+  'PATCH /marks/:markId': 'observation.change',
+  'DELETE /marks/:markId': 'observation.change',
+  'POST /studies/:studyId/gauges': 'observation.change',
+  'GET /gauges/:gaugeId': 'observation.read',
+  'PUT /gauges/:gaugeId': 'observation.change',
+  'DELETE /gauges/:gaugeId': 'observation.change',
+  'GET /runs/:runId/residuals': 'calibration.read',
+  'PUT /runs/:runId/observed': 'calibration.change',
+
   'GET /studies/:studyId/surveys': 'survey.list',
   'POST /studies/:studyId/surveys': 'survey.send',
   'POST /studies/:studyId/surveys/read': 'survey.send',
@@ -68,6 +80,12 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /runs/:runId/case.json': 'run.read',
   'GET /runs/:runId/results.csv': 'run.read',
   'GET /runs/:runId/results.xlsx': 'run.read',
+
+  'GET /studies/:studyId/task-sets': 'taskSet.read',
+  'GET /task-sets/:taskSetId': 'taskSet.read',
+  'GET /task-sets/:taskSetId/result': 'taskSet.read',
+  'POST /task-sets/:taskSetId/cancel': 'taskSet.change',
+  'POST /task-sets/:taskSetId/retry': 'taskSet.change',
 
   'GET /runs/:runId/review': 'review.read',
   'POST /runs/:runId/review': 'review.send',

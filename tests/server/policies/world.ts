@@ -51,6 +51,28 @@ export async function buildWorld(services: Services): Promise<World> {
     sentAt: new Date(),
   });
   const station = await models.Station.create({ studyId: study.id, name: 'Bridge', chainage: 10 });
+  const mark = await models.Mark.create({
+    studyId: study.id,
+    chainage: 10,
+    level: 12,
+    kind: 'debris',
+    confidence: 'good',
+    flood: '',
+    observedOn: null,
+    note: '',
+  });
+  const gauge = await models.Gauge.create({
+    studyId: study.id,
+    name: 'Gauge',
+    chainage: 10,
+    flood: '',
+    startsAt: null,
+    stageCount: 0,
+    flowCount: 0,
+    peakStage: null,
+    peakFlow: null,
+    record: Buffer.alloc(0),
+  });
   const scenario = await buildScenario(services, reach);
   const run = await models.Run.create({
     studyId: study.id,
@@ -65,6 +87,21 @@ export async function buildWorld(services: Services): Promise<World> {
     duration: 1,
     startsAt: null,
     inflow: { times: [], flows: [] },
+    requestedBy: modeller.id,
+    requestedAt: new Date(),
+  });
+  const taskSet = await models.TaskSet.create({
+    firmId,
+    studyId: study.id,
+    scenarioId: scenario.id,
+    runId: run.id,
+    kind: 'ensemble',
+    name: 'Ensemble',
+    state: 'finished',
+    settings: null,
+    input: Buffer.alloc(0),
+    caseHash: run.caseHash,
+    solverVersion: 'test',
     requestedBy: modeller.id,
     requestedAt: new Date(),
   });
@@ -84,12 +121,15 @@ export async function buildWorld(services: Services): Promise<World> {
       invitationId: invitation.id,
       studyId: study.id,
       stationId: station.id,
+      markId: mark.id,
+      gaugeId: gauge.id,
       surveyId: reach.surveyRevisionId,
       refusalId: refusal.id,
       reachId: reach.id,
       scenarioId: scenario.id,
       runId: run.id,
       pointId,
+      taskSetId: taskSet.id,
     },
   };
 }

@@ -1,0 +1,26 @@
+import type { TaskSetKind } from '../../../shared/tasks/types';
+
+/** What a worker thread is given: gzip of JSON throughout. */
+export interface TaskWork {
+  setId: number;
+  kind: TaskSetKind;
+  input: Uint8Array;
+  what:
+    | { part: 'member'; payload: Uint8Array }
+    | {
+        part: 'gather';
+        members: {
+          index: number;
+          label: string;
+          payload: Uint8Array;
+          result: Uint8Array | null;
+        }[];
+      };
+  /** Int32 at 0: not zero means stop. Float64 at 8: how far it is, 0..1. */
+  shared: SharedArrayBuffer;
+}
+
+export type TaskAnswer =
+  | { type: 'finished'; result: Uint8Array }
+  | { type: 'failed'; reason: string; fault?: string }
+  | { type: 'cancelled' };

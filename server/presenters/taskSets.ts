@@ -1,0 +1,64 @@
+import type { TaskRow, TaskSet, TaskSetRow } from '../../shared/tasks/types';
+import type { TaskModel } from '../models/Task';
+import type { TaskSetModel } from '../models/TaskSet';
+import { may } from '../policies/decide';
+import type { Actor } from '../policies/subject';
+import type { CountedTaskSet, TaskCounts } from '../services/tasks/findTaskSets';
+
+/** Needs the set's `requester` and `run`. */
+export const presentTaskSetRow = ({ set, counts }: CountedTaskSet): TaskSetRow => ({
+  id: set.id,
+  kind: set.kind,
+  studyId: set.studyId,
+  scenarioId: set.scenarioId,
+  runId: set.runId,
+  runNumber: set.run?.number ?? null,
+  name: set.name,
+  state: set.state,
+  progress: counts.progress,
+  secondsLeft: secondsLeft(set, counts),
+  total: counts.total,
+  finished: counts.finished,
+  failed: counts.failed,
+  failure: set.failure ?? null,
+  requestedBy: set.requester!.name,
+  requestedAt: set.requestedAt.toISOString(),
+  finishedAt: set.finishedAt?.toISOString() ?? null,
+});
+
+export const presentTaskSet = (
+  set: TaskSetModel,
+  counts: TaskCounts,
+  tasks: TaskModel[],
+  actor: Actor,
+): TaskSet => ({
+  ...presentTaskSetRow({ set, counts }),
+  caseHash: set.caseHash,
+  solverVersion: set.solverVersion,
+  settings: set.settings,
+  tasks: tasks.map(presentTask),
+  may: actionsOf(set, tasks, actor),
+});
+
+const presentTask = ({ id, position, label, state, progress, failure }: TaskModel): TaskRow => ({
+  id,
+  index: position,
+  label,
+  state,
+  progress,
+  failure: failure ?? null,
+});
+
+function actionsOf(set: TaskSetModel, tasks: TaskModel[], actor: Actor): TaskSet['may'] {
+  if (!may(actor, 'taskSet.change', { firmId: set.firmId })) return [];
+  if (set.state === 'queued' || set.state === 'running') return ['taskSet.cancel'];
+  const left = tasks.some(({ state }) => state === 'failed' || state === 'cancelled');
+  return left ? ['taskSet.retry'] : [];
+}
+
+/** By the pace so far; null where there is too little to go by. */
+function secondsLeft({ state, startedAt }: TaskSetModel, { progress }: TaskCounts): number | null {
+  if (state !== 'running' || !startedAt || progress < 0.005) return null;
+  const spent = (Date.now() - startedAt.getTime()) / 1000;
+  return Math.ceil((spent * (1 - progress)) / progress);
+}
