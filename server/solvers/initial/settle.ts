@@ -53,7 +53,9 @@ export function settle(
         best = settled.residual;
         bestStep = step;
       }
-      if (settled.residual <= STEADY || step >= most || step - bestStep > patience) return settled;
+      // The state that comes in has the steady flow by construction: only steps tell whether it stays.
+      const isSteady = step > 0 && settled.residual <= STEADY;
+      if (isSteady || step >= most || step - bestStep > patience) return settled;
     }
     const dt = timeStep(endSpeed, 0);
     if (!(dt < Infinity)) return settled;
