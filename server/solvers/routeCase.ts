@@ -13,6 +13,7 @@ import { createCellTables } from './geometry/cellTables';
 import { shapedGrid } from './geometry/grid';
 import { setInitialState } from './initial/initialState';
 import { settleInitial } from './initial/settleInitial';
+import { createReferenceKernel } from './kernel';
 import { createPolling } from './polling';
 import { createRhs } from './rhs';
 import type { RouteOptions } from './routeOptions';
@@ -48,20 +49,20 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   );
   const tables = createCellTables(workspace);
   const cellState = createCellState(workspace, tables);
-  const laterals = createLaterals(caseFile.laterals, grid);
+  const laterals = createLaterals(caseFile.laterals, grid, workspace.lateralRate);
+  const kernel = createReferenceKernel(workspace, tables, cellState, laterals);
   const warnings = createRunWarnings(caseFile, workspace, grid);
   const structures = createStructureSet(caseFile, workspace, tables, grid, warnings.add);
   const rhs = createRhs(
-    workspace,
-    tables,
+    kernel,
     structures?.boundary ?? createUpstreamBoundary(workspace, tables, caseFile.upstream),
     createDownstreamBoundary(workspace, tables, caseFile.downstream),
     order,
     structures,
   );
-  const timeStep = createTimeStep(workspace, tables, laterals, courant, grid.chainage);
+  const timeStep = createTimeStep(workspace, kernel, tables, laterals, courant, grid.chainage);
   const ledger = createVolumeLedger(workspace);
-  const steps = createSteps(workspace, cellState, laterals, ledger);
+  const steps = createSteps(workspace, kernel, ledger);
   const faceFlow = createFaceFlow(workspace, order);
   const polling = createPolling(options, duration);
 
@@ -77,7 +78,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   );
   if (mustSettle) {
     settleInitial(
-      { workspace, cellState, laterals, rhs, timeStep, order, grid, faceFlow },
+      { workspace, kernel, laterals, rhs, timeStep, order, grid, faceFlow },
       polling,
       warnings,
     );

@@ -53,6 +53,10 @@ export interface Workspace {
   halfFlow: Float64Array;
   implicitShare: Float64Array;
 
+  /** Lateral inflow of each cell (m³/s), and what a half step took of it: see time/stepLoops.ts. */
+  lateralRate: Float64Array;
+  lateralSums: Float64Array;
+
   /** Areas and thrusts of one face that had to be taken from the tables: see riemann/faceAreas.ts. */
   face: Float64Array;
 
@@ -68,7 +72,7 @@ export const FACE_FIELDS = 6;
 export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: number): Workspace {
   const n = grid.cells;
   const size = n + 2;
-  const pool = pooledArrays(size, 28);
+  const pool = pooledArrays(size, 29);
   const workspace: Workspace = {
     n,
     dx: grid.dx,
@@ -101,6 +105,8 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
     oldArea: pool(),
     halfFlow: pool(),
     implicitShare: pool(),
+    lateralRate: pool(),
+    lateralSums: new Float64Array(2),
     face: new Float64Array(FACE_FIELDS),
     bed: pool(),
     table: new Float64Array(size * TABLE_STRIDE),

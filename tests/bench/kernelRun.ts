@@ -4,6 +4,7 @@ import { createVolumeLedger } from '../../server/solvers/diagnostics/volumeLedge
 import { createCellState } from '../../server/solvers/geometry/cellState';
 import { createCellTables } from '../../server/solvers/geometry/cellTables';
 import { shapedGrid } from '../../server/solvers/geometry/grid';
+import { createReferenceKernel } from '../../server/solvers/kernel';
 import { createRhs } from '../../server/solvers/rhs';
 import { createLaterals } from '../../server/solvers/sources/laterals';
 import { createSteps } from '../../server/solvers/time/steps';
@@ -25,12 +26,13 @@ export function createKernelRun(cells: number): KernelRun {
   const { n, bed, flow } = workspace;
   const tables = createCellTables(workspace);
   const state = createCellState(workspace, tables);
-  const laterals = createLaterals([], grid);
-  const steps = createSteps(workspace, state, laterals, createVolumeLedger(workspace));
-  const timeStep = createTimeStep(workspace, tables, laterals, 0.8, grid.chainage);
+  const laterals = createLaterals([], grid, workspace.lateralRate);
+  const kernel = createReferenceKernel(workspace, tables, state, laterals);
+  const steps = createSteps(workspace, kernel, createVolumeLedger(workspace));
+  const timeStep = createTimeStep(workspace, kernel, tables, laterals, 0.8, grid.chainage);
   const upstream = createWallBoundary(workspace, tables, upstreamEnd());
   const downstream = createWallBoundary(workspace, tables, downstreamEnd(n));
-  const rhs = createRhs(workspace, tables, upstream, downstream, 2);
+  const rhs = createRhs(kernel, upstream, downstream, 2);
   for (let i = 1; i <= n; i++) {
     // A smooth surface that follows the fall of the reach, a little within a level of every table.
     state.placeAtStage(i, 103.5 + (n - i) * grid.dx * 0.001 + 0.05 * Math.sin(i / 30));

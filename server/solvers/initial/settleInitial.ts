@@ -1,8 +1,8 @@
 import type { FaceFlow } from '../diagnostics/faceFlow';
 import { createVolumeLedger } from '../diagnostics/volumeLedger';
 import type { RunWarnings } from '../diagnostics/runWarnings';
-import type { CellState } from '../geometry/cellState';
 import type { Grid } from '../geometry/grid';
+import type { Kernel } from '../kernel';
 import type { Polling } from '../polling';
 import type { Rhs } from '../rhs';
 import type { Laterals } from '../sources/laterals';
@@ -15,7 +15,7 @@ const WORTH_WARNING = 1e-3;
 
 export interface SettleParts {
   workspace: Workspace;
-  cellState: CellState;
+  kernel: Kernel;
   laterals: Laterals;
   rhs: Rhs;
   timeStep: (endSpeed: number, time: number) => number;
@@ -26,8 +26,8 @@ export interface SettleParts {
 
 /** Lets the initial steady state settle, on books of its own, and warns where it did not. */
 export function settleInitial(parts: SettleParts, polling: Polling, warnings: RunWarnings): void {
-  const { workspace, cellState, laterals, rhs, timeStep, order, grid, faceFlow } = parts;
-  const steps = createSteps(workspace, cellState, laterals, createVolumeLedger(workspace));
+  const { workspace, kernel, laterals, rhs, timeStep, order, grid, faceFlow } = parts;
+  const steps = createSteps(workspace, kernel, createVolumeLedger(workspace));
   const { residual, chainage } = settle(
     workspace,
     rhs,

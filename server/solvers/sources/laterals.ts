@@ -14,9 +14,12 @@ export interface Laterals {
   totalAbove(x: number, time: number): number;
 }
 
-export function createLaterals(laterals: readonly Lateral[], grid: Grid): Laterals {
+export function createLaterals(
+  laterals: readonly Lateral[],
+  grid: Grid,
+  rate: Float64Array = new Float64Array(grid.cells + 2),
+): Laterals {
   const { cells, dx, start } = grid;
-  const rate = new Float64Array(cells + 2);
   const largest = new Float64Array(cells + 2);
   const parts = laterals.map((lateral) => {
     const first = cellOf(lateral.from);

@@ -1,11 +1,6 @@
 import type { VolumeLedger } from '../diagnostics/volumeLedger';
-import type { CellState } from '../geometry/cellState';
-import type { Laterals } from '../sources/laterals';
+import type { Kernel } from '../kernel';
 import type { Workspace } from '../workspace';
-import { createLimitOutflow } from './limitOutflow';
-
-/** Largest explicit part of friction, in parts of the flow: keeps a strongly braked flow from turning back. */
-const MOST_EXPLICIT = 0.25;
 
 /**
  * Both halves of a step of the second-order strong-stability-preserving Runge-Kutta method (Heun; Shu and Osher 1988,
@@ -15,7 +10,7 @@ const MOST_EXPLICIT = 0.25;
  * explicit part the stiffer it is: with z = dt k|Q| at the start, e = min(z/2, 1/4), R the mean of both fluxes,
  *   Q' + (1 - e/z) dt k' Q'|Q'| = Q + dt R - e Q,
  * which is solved for Q' as the quadratic it is. Steady flow does not depend on dt, and stiff flow does not swing.
- * Laterals enter without momentum; withdrawals take theirs along.
+ * The loops are in stepLoops.ts. Laterals enter without momentum; withdrawals take theirs along.
  */
 export interface Steps {
   /** From the state at the start of the step to the whole Euler step. */
@@ -28,19 +23,9 @@ export interface Steps {
   missing(): number;
 }
 
-export function createSteps(
-  workspace: Workspace,
-  cellState: CellState,
-  laterals: Laterals,
-  ledger: VolumeLedger,
-): Steps {
-  const { n, dx, area, flow, stage, bed, dryDepth, friction, celerity } = workspace;
-  const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, implicitShare } = workspace;
-  const { place } = cellState;
-  const { rate } = laterals;
-  const { abs, sqrt } = Math;
-  const hasLaterals = laterals.any;
-  const limitOutflow = createLimitOutflow(workspace);
+export function createSteps(workspace: Workspace, kernel: Kernel, ledger: VolumeLedger): Steps {
+  const { n, area, flow, celerity, fluxArea, oldArea, lateralSums } = workspace;
+  const { abs } = Math;
 
   // Volumes of the predictor (m³/s), until the step is closed.
   let inflow = 0;
@@ -48,80 +33,25 @@ export function createSteps(
   let lateral = 0;
   let predictedMissing = 0;
   let missing = 0;
-  let stageLateral = 0;
-  let stageMissing = 0;
-
-  /** Area of cell i after what comes from the side in `dt`; counts what was moved. */
-  function withLateral(i: number, a: number, dt: number): number {
-    const wanted = (dt * rate[i]) / dx;
-    const taken = wanted < -a ? -a : wanted;
-    stageLateral += (taken * dx) / dt;
-    stageMissing += ((taken - wanted) * dx) / dt;
-    return a + taken;
-  }
 
   function predict(dt: number): void {
-    limitOutflow(dt);
-    const ratio = dt / dx;
-    const fourDt = 4 * dt;
-    stageLateral = 0;
-    stageMissing = 0;
-    for (let i = 1; i <= n; i++) {
-      const old = area[i];
-      const q0 = flow[i];
-      oldArea[i] = old;
-      let a = old - ratio * (fluxArea[i] - fluxArea[i - 1]);
-      let q = q0 - ratio * (fluxLeft[i] - fluxRight[i - 1]);
-      if (a < 0) a = 0;
-      if (hasLaterals && rate[i] !== 0) {
-        const before = a;
-        a = withLateral(i, a, dt);
-        if (a < before) q *= a / before;
-      }
-      const half = 0.5 * dt * friction[i] * abs(q0);
-      const e = half < MOST_EXPLICIT ? half : MOST_EXPLICIT;
-      implicitShare[i] = half < MOST_EXPLICIT ? 0.5 : 1 - (0.5 * MOST_EXPLICIT) / half;
-      halfFlow[i] = 0.5 * (q0 + q) - e * q0;
-      if (a !== old) place(i, a);
-      flow[i] =
-        stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + fourDt * friction[i] * abs(q))) : 0;
-    }
+    kernel.limitOutflow(dt);
+    kernel.predict(dt);
     inflow = fluxArea[0];
     outflow = fluxArea[n];
-    lateral = stageLateral;
-    predictedMissing = stageMissing;
+    lateral = lateralSums[0];
+    predictedMissing = lateralSums[1];
   }
 
   function correct(dt: number): void {
-    limitOutflow(dt);
-    const ratio = dt / dx;
-    const fourDt = 4 * dt;
-    stageLateral = 0;
-    stageMissing = 0;
-    let drained = 0;
-    for (let i = 1; i <= n; i++) {
-      const old = oldArea[i];
-      let a = area[i] - ratio * (fluxArea[i] - fluxArea[i - 1]);
-      let q = halfFlow[i] - 0.5 * ratio * (fluxLeft[i] - fluxRight[i - 1]);
-      if (a < 0) a = 0;
-      if (hasLaterals && rate[i] !== 0) {
-        const before = a;
-        a = withLateral(i, a, dt);
-        if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
-      }
-      a = 0.5 * (old + a);
-      if (a !== area[i]) place(i, a);
-      const m = fourDt * implicitShare[i] * friction[i];
-      flow[i] = stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + m * abs(q))) : 0;
-      if (a < 0.5 * old) drained++;
-    }
-    if (drained > 0) capDrained();
+    kernel.limitOutflow(dt);
+    if (kernel.correct(dt) > 0) capDrained();
     ledger.enter(
       0.5 * dt * (inflow + fluxArea[0]),
-      0.5 * dt * (lateral + stageLateral),
+      0.5 * dt * (lateral + lateralSums[0]),
       0.5 * dt * (outflow + fluxArea[n]),
     );
-    missing += 0.5 * dt * (predictedMissing + stageMissing);
+    missing += 0.5 * dt * (predictedMissing + lateralSums[1]);
   }
 
   function accept(dt: number): void {

@@ -1,3 +1,4 @@
+import type { Kernel } from '../kernel';
 import { RunFailed } from '../runErrors';
 import type { Laterals } from '../sources/laterals';
 import type { Workspace } from '../workspace';
@@ -6,23 +7,19 @@ import type { CellTables } from '../geometry/cellTables';
 /** No river flows so fast (m/s): a state that does has left the equations. */
 const IMPOSSIBLE = 1000;
 
-/** Friction makes waves of celerity 5u/3 (Manning, wide section), which beyond Froude 1.5 outrun u + c. */
-const KINEMATIC = 2 / 3;
-/** … where friction takes more than this share of the momentum over a cell. */
-const BRAKED = 0.01;
-
 /**
  * The largest stable step (s) of the present state: courant dx / max(|u| + c), over cells, ends (`endSpeed`, m/s) and
  * what lateral inflow onto dry ground will start with. Throws RunFailed where the state is not finite.
  */
 export function createTimeStep(
   workspace: Workspace,
+  kernel: Kernel,
   tables: CellTables,
   laterals: Laterals,
   courant: number,
   chainage: Float64Array,
 ): (endSpeed: number, time: number) => number {
-  const { n, dx, area, flow, celerity, friction, bed, gravity } = workspace;
+  const { n, dx, area, flow, celerity, bed, gravity } = workspace;
   const { abs } = Math;
   let lateralSpeed = 0;
   for (let i = 1; i <= n; i++) {
@@ -47,22 +44,8 @@ export function createTimeStep(
   }
 
   return function timeStep(endSpeed, time) {
-    let fastest = Math.max(endSpeed, lateralSpeed);
-    let sum = fastest;
-    for (let i = 1; i <= n; i++) {
-      const a = area[i];
-      if (a !== 0) {
-        const u = abs(flow[i]) / a;
-        const c = celerity[i];
-        let speed = u + c;
-        const isShooting = c < KINEMATIC * u && friction[i] * abs(flow[i]) * dx > BRAKED * u;
-        if (isShooting) speed = (1 + KINEMATIC) * u;
-        if (speed > fastest) fastest = speed;
-        sum += speed;
-      }
-    }
-    // A sum that is not finite tells of one term that is not, which no comparison above does.
-    if (!(fastest < IMPOSSIBLE) || !(sum < Infinity)) fail(time);
+    const fastest = Math.max(endSpeed, lateralSpeed, kernel.fastestWave());
+    if (!(fastest < IMPOSSIBLE)) fail(time);
     return fastest > 0 ? (courant * dx) / fastest : Infinity;
   };
 }
