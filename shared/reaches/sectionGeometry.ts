@@ -50,6 +50,35 @@ export function topWidthAt(
   return width;
 }
 
+/** Area between the ground and a level (m²), between `from` and `to` (m) where given; ground above the level counts nothing. */
+export function areaBelow(
+  { points }: Pick<Section, 'points'>,
+  level: number,
+  [from, to]: readonly [number, number] = [-Infinity, Infinity],
+): number {
+  let area = 0;
+  for (let i = 1; i < points.length; i++) {
+    const [[y0, z0], [y1, z1]] = [points[i - 1], points[i]];
+    const [left, right] = [Math.max(y0, from), Math.min(y1, to)];
+    if (right <= left) continue;
+    const depthAt = (y: number) => level - (z0 + ((z1 - z0) * (y - y0)) / (y1 - y0));
+    area += wetted(depthAt(left), depthAt(right), right - left);
+  }
+  return area;
+}
+
+/** Area over a straight piece of ground from its depths at both ends. */
+function wetted(d0: number, d1: number, width: number): number {
+  if (d0 <= 0 && d1 <= 0) return 0;
+  if (d0 >= 0 && d1 >= 0) return 0.5 * (d0 + d1) * width;
+  const [deep, dry] = d0 > 0 ? [d0, d1] : [d1, d0];
+  return (0.5 * deep * deep * width) / (deep - dry);
+}
+
+/** Index of the lowest point, the first where there are several. */
+export const lowestIndex = ({ points }: Pick<Section, 'points'>): number =>
+  points.reduce((low, [, z], i) => (z < points[low][1] ? i : low), 0);
+
 /** Width of the channel when it is full, m. */
 export const bankfullWidth = (section: Pick<Section, 'points' | 'banks'>): number =>
   topWidthAt(section, bankfullStage(section), section.banks ?? undefined);
