@@ -1,6 +1,7 @@
 import { parentPort, workerData } from 'node:worker_threads';
 import { ImportError } from './importError';
-import type { ImportAnswer, ImportTask } from './importTasks';
+import type { ImportAnswer, ImportResults, ImportTask } from './importTasks';
+import { readMarkFile } from './marks/readMarkFile';
 import { readSurvey } from './survey/readSurvey';
 import { readTable } from './tables/readTable';
 
@@ -12,14 +13,21 @@ parentPort!.postMessage(answer());
 function answer(): ImportAnswer {
   const buffer = Buffer.from(bytes.buffer, bytes.byteOffset, bytes.byteLength);
   try {
-    const reading =
-      task.kind === 'survey'
-        ? readSurvey(buffer, task.options)
-        : readTable(buffer, task.options.fileName, task.options);
-    return { ok: true, reading };
+    return { ok: true, reading: read(buffer) };
   } catch (error) {
     if (error instanceof ImportError)
       return { ok: false, code: error.code, message: error.message };
     return { ok: false, code: 'internal', message: String((error as Error)?.stack ?? error) };
+  }
+}
+
+function read(buffer: Buffer): ImportResults[keyof ImportResults] {
+  switch (task.kind) {
+    case 'survey':
+      return readSurvey(buffer, task.options);
+    case 'table':
+      return readTable(buffer, task.options.fileName, task.options);
+    case 'marks':
+      return readMarkFile(buffer, task.options.fileName, task.options);
   }
 }
