@@ -98,7 +98,7 @@ export async function buildWorld(services: Services): Promise<World> {
     kind: 'ensemble',
     name: 'Ensemble',
     state: 'finished',
-    settings: null,
+    settings: {},
     input: Buffer.alloc(0),
     caseHash: run.caseHash,
     solverVersion: 'test',
