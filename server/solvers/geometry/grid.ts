@@ -1,4 +1,5 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
+import { zoneRoughness } from './roughnessFactors';
 import { ruledSurface, sectionAt } from './ruledSurface';
 import type { SectionShape } from './sectionShape';
 
@@ -19,9 +20,11 @@ export interface Grid {
 /** Shapes of the end sections and cells: 0 is the upstream end, 1..cells the cells, cells + 1 the downstream end. */
 export interface ShapedGrid extends Grid {
   shapes: SectionShape[];
+  /** Whether the momentum coefficient is that of compound sections */
+  isCompound: boolean;
 }
 
-export function shapedGrid({ sections, numerics }: CaseFile): ShapedGrid {
+export function shapedGrid({ sections, numerics, roughnessFactors }: CaseFile): ShapedGrid {
   const start = sections[0].chainage;
   const length = sections[sections.length - 1].chainage - start;
   const cells = Math.max(1, Math.round(length / numerics.cellSize));
@@ -32,7 +35,11 @@ export function shapedGrid({ sections, numerics }: CaseFile): ShapedGrid {
 
   let k = 0;
   let ruled = ruledSurface(sections[0], sections[1]);
-  shapes.push(sectionAt(ruled, 0));
+  const add = (shape: SectionShape, at: number): void => {
+    const roughness = roughnessFactors && zoneRoughness(roughnessFactors, shape, at);
+    shapes.push(roughness ? { ...shape, roughness } : shape);
+  };
+  add(sectionAt(ruled, 0), start);
   for (let i = 0; i < cells; i++) {
     const x = start + (i + 0.5) * dx;
     while (k + 2 < sections.length && x > sections[k + 1].chainage) {
@@ -45,11 +52,12 @@ export function shapedGrid({ sections, numerics }: CaseFile): ShapedGrid {
     );
     chainage[i] = x;
     bed[i] = shape.bed;
-    shapes.push(shape);
+    add(shape, x);
   }
   const last = sections.length - 1;
-  shapes.push(sectionAt(ruledSurface(sections[last - 1], sections[last]), 1));
-  return { cells, dx, start, chainage, bed, shapes };
+  add(sectionAt(ruledSurface(sections[last - 1], sections[last]), 1), sections[last].chainage);
+  const isCompound = numerics.momentum === 'compound';
+  return { cells, dx, start, chainage, bed, shapes, isCompound };
 }
 
 /** Where the cells of a case lie, and their beds. */

@@ -1,36 +1,82 @@
-import type { RoughnessZone, SectionInput } from '../../../shared/case/caseFile';
+import type {
+  Embankment,
+  RoughnessZone,
+  SectionInput,
+  StoragePart,
+} from '../../../shared/case/caseFile';
 
 /**
- * A surveyed section made ready for interpolation: nodes at every point, roughness change and bank, and the anchors
- * that correspond from section to section: left end, left bank, both ends of the lowest bed, right bank, right end.
+ * A surveyed section made ready for interpolation: nodes at every point, roughness change, bank and end of a part, and
+ * the anchors that correspond from section to section: left end, left embankment, left bank, both ends of the lowest
+ * bed, right bank, right embankment, right end.
  */
 export interface PreparedSection {
   /** Offset (m) and elevation (m) of the nodes; offsets never decreasing, at most two nodes at one offset. */
   x: number[];
   z: number[];
-  /** Indices of nodes: 6 with banks, 4 without. */
+  /** Indices of nodes: left end, lowest bed and right end; banks and embankments where they are paired. */
   anchors: number[];
+  /** Of each part between two anchors: 0 left of bank, 1 between banks, 2 right of bank; all 1 without banks */
+  sides: number[];
+  /** Elevation (m) of the lowest bed */
+  bed: number;
   roughness: RoughnessZone[];
+  storage: readonly StoragePart[];
+  embankments: { left?: Embankment; right?: Embankment };
 }
 
-export function prepareSection(section: SectionInput, useBanks: boolean): PreparedSection {
+/** Which marks both neighbours have, so that they correspond. */
+export interface Pairing {
+  banks: boolean;
+  leftEmbankment: boolean;
+  rightEmbankment: boolean;
+}
+
+export function pairingOf(a: SectionInput, b: SectionInput): Pairing {
+  return {
+    banks: a.banks !== undefined && b.banks !== undefined,
+    leftEmbankment: a.embankments?.left !== undefined && b.embankments?.left !== undefined,
+    rightEmbankment: a.embankments?.right !== undefined && b.embankments?.right !== undefined,
+  };
+}
+
+export function prepareSection(section: SectionInput, pairing: Pairing): PreparedSection {
   const { x, z } = wallEnds(section);
-  const banks = useBanks ? section.banks : undefined;
+  const banks = pairing.banks ? section.banks : undefined;
+  const { storage = [], embankments = {} } = section;
+  const { left: onLeft, right: onRight } = embankments;
   for (const [from] of section.roughness) insertNode(x, z, from);
   for (const bank of banks ?? []) insertNode(x, z, bank);
+  for (const { from, to } of storage) {
+    insertNode(x, z, from);
+    insertNode(x, z, to);
+  }
+  for (const embankment of [onLeft, onRight]) if (embankment) insertNode(x, z, embankment.offset);
 
   const last = x.length - 1;
-  const left = banks ? highestAt(x, z, banks[0], 'first') : 0;
-  const right = banks ? highestAt(x, z, banks[1], 'last') : last;
+  const foot = onLeft ? highestAt(x, z, onLeft.offset, 'first') : 0;
+  const farFoot = onRight ? highestAt(x, z, onRight.offset, 'last') : last;
+  const left = banks ? highestAt(x, z, banks[0], 'first') : foot;
+  const right = banks ? highestAt(x, z, banks[1], 'last') : farFoot;
   let low = left;
   for (let k = left; k <= right; k++) if (z[k] < z[low]) low = k;
   let lowEnd = low;
   while (lowEnd < right && z[lowEnd + 1] === z[low]) lowEnd++;
+
+  const outerLeft = [0, ...(pairing.leftEmbankment ? [foot] : [])];
+  const outerRight = [...(pairing.rightEmbankment ? [farFoot] : []), last];
+  const channel = banks ? [left, low, lowEnd, right] : [low, lowEnd];
   return {
     x,
     z,
-    anchors: banks ? [0, left, low, lowEnd, right, last] : [0, low, lowEnd, last],
+    anchors: [...outerLeft, ...channel, ...outerRight],
+    sides: banks
+      ? [...outerLeft.map(() => 0), 1, 1, 1, ...outerRight.map(() => 2)]
+      : [...outerLeft.map(() => 1), 1, ...outerRight.map(() => 1)],
+    bed: z[low],
     roughness: section.roughness,
+    storage,
+    embankments,
   };
 }
 

@@ -1,5 +1,6 @@
 import type { SectionInput } from '../../../shared/case/caseFile';
-import { prepareSection, type PreparedSection } from './preparedSection';
+import { pairingOf, prepareSection, type PreparedSection } from './preparedSection';
+import { segmentPartsOf, segmentRulesAt, type SegmentParts } from './segmentParts';
 import type { SectionShape } from './sectionShape';
 
 /**
@@ -17,23 +18,32 @@ export interface RuledSurface {
   nb: number[];
   /** 0 left of bank, 1 between banks, 2 right of bank; all 1 without banks */
   side: number[];
+  /** Of each segment on either section, where one of them has embankments or storage parts */
+  parts?: { a: SegmentParts; b: SegmentParts };
 }
 
 const SAME = 1e-9;
 
 export function ruledSurface(a: SectionInput, b: SectionInput): RuledSurface {
-  const useBanks = a.banks !== undefined && b.banks !== undefined;
-  const pa = prepareSection(a, useBanks);
-  const pb = prepareSection(b, useBanks);
+  const pairing = pairingOf(a, b);
+  const pa = prepareSection(a, pairing);
+  const pb = prepareSection(b, pairing);
   const ruled: RuledSurface = { xa: [], za: [], xb: [], zb: [], na: [], nb: [], side: [] };
-  const parts = pa.anchors.length - 1;
-  for (let part = 0; part < parts; part++) {
-    const side = !useBanks ? 1 : part === 0 ? 0 : part === parts - 1 ? 2 : 1;
+  pa.sides.forEach((side, part) => {
     joinPart(ruled, partOf(pa, part), partOf(pb, part), side, part === 0);
-  }
+  });
   for (let k = 0; k < ruled.side.length; k++) {
     ruled.na.push(roughnessOf(pa, ruled.xa, ruled.za, k));
     ruled.nb.push(roughnessOf(pb, ruled.xb, ruled.zb, k));
+  }
+  const isParted = [pa, pb].some(
+    ({ storage, embankments }) => storage.length > 0 || embankments.left || embankments.right,
+  );
+  if (isParted) {
+    ruled.parts = {
+      a: segmentPartsOf(pa, ruled.xa, ruled.za),
+      b: segmentPartsOf(pb, ruled.xb, ruled.zb),
+    };
   }
   return ruled;
 }
@@ -45,20 +55,29 @@ export function sectionAt(ruled: RuledSurface, w: number): SectionShape {
   const z = new Float64Array(nodes);
   const zone = new Int32Array(nodes - 1);
   const zoneN: number[] = [];
+  const segments = ruled.parts && segmentRulesAt(ruled.parts.a, ruled.parts.b, w);
   let bed = Infinity;
   for (let k = 0; k < nodes; k++) {
     x[k] = mix(ruled.xa[k], ruled.xb[k], w);
     z[k] = mix(ruled.za[k], ruled.zb[k], w);
-    // A slot without width at the foot of a wall holds no water.
-    if (k > 0 && x[k] > x[k - 1]) bed = Math.min(bed, z[k - 1], z[k]);
+    // A slot without width at the foot of a wall holds no water; nor does ground behind an embankment at first.
+    const isOpen = k > 0 && x[k] > x[k - 1] && !(segments && segments.guarded[k - 1] === 1);
+    if (isOpen) bed = Math.min(bed, z[k - 1], z[k]);
   }
   const zoneSide: number[] = [];
+  const firstSegment: number[] = [];
   for (let k = 0; k < nodes - 1; k++) {
     const n = mix(ruled.na[k], ruled.nb[k], w);
     const current = zoneN.length - 1;
-    if (current < 0 || zoneN[current] !== n || zoneSide[current] !== ruled.side[k]) {
+    const isNew =
+      current < 0 ||
+      zoneN[current] !== n ||
+      zoneSide[current] !== ruled.side[k] ||
+      (segments && !segments.same(k - 1, k));
+    if (isNew) {
       zoneN.push(n);
       zoneSide.push(ruled.side[k]);
+      firstSegment.push(k);
     }
     zone[k] = zoneN.length - 1;
   }
@@ -69,11 +88,12 @@ export function sectionAt(ruled: RuledSurface, w: number): SectionShape {
     zoneN: Float64Array.from(zoneN),
     zoneSide: Int32Array.from(zoneSide),
     bed,
+    ...(segments && { rules: segments.rulesOf(firstSegment) }),
   };
 }
 
 /** Exact where a = b, which a + w (b - a) also is, and exact at w = 1, which it is not. */
-function mix(a: number, b: number, w: number): number {
+export function mix(a: number, b: number, w: number): number {
   return a === b ? a : (1 - w) * a + w * b;
 }
 

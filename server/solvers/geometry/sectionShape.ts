@@ -1,3 +1,5 @@
+import type { ZoneRules } from './zoneRules';
+
 /**
  * A cross-section as a polyline of nodes (offset x, elevation z), its segments grouped into zones of one Manning's n on
  * one side of the banks. Zones are contiguous and in order. Above its ends a section has frictionless vertical walls.
@@ -11,8 +13,20 @@ export interface SectionShape {
   zoneN: Float64Array;
   /** 0 left of bank, 1 between banks, 2 right of bank */
   zoneSide: Int32Array;
-  /** Lowest elevation (m) */
+  /** Lowest elevation (m) that water can lie on without passing an embankment */
   bed: number;
+  /** Of a section with embankments or storage parts; zones split where they change */
+  rules?: ZoneRules;
+  /** Manning's n at depth: see roughnessFactors.ts */
+  roughness?: ZoneRoughness;
+}
+
+/** How Manning's n of the zones varies with stage. */
+export interface ZoneRoughness {
+  /** By what n of zone q is multiplied at a stage (m) */
+  factorAt(q: number, stage: number): number;
+  /** Stages (m) at which the factors bend */
+  stages: readonly number[];
 }
 
 /** A stand-in for n = 0: its friction slope is below the last digit of any other term. */

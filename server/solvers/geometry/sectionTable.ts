@@ -1,5 +1,5 @@
 import type { SectionShape } from './sectionShape';
-import { sweepStages } from './stageSweep';
+import { sweepStages, type StageSweep } from './stageSweep';
 import { MAX_LEVELS, tableLevels } from './tableLevels';
 
 /**
@@ -24,9 +24,8 @@ export const LEVEL_LAYOUT = {
   V2: 7,
 } as const;
 
-/** Writes the table of `shape` into `table` from `start` on; returns the number of levels. */
-export function writeSectionTable(shape: SectionShape, table: Float64Array, start: number): number {
-  const { Z, AREA, B0, B1, THRUST, V0, V1, V2 } = LEVEL_LAYOUT;
+/** The levels (m) of a section's table and, between each two, the stage half way. */
+export function tableStages(shape: SectionShape): Float64Array {
   const levels = tableLevels(shape);
   const count = levels.length;
   const stages = new Float64Array(2 * count - 1);
@@ -34,7 +33,23 @@ export function writeSectionTable(shape: SectionShape, table: Float64Array, star
     stages[2 * k] = levels[k];
     if (k + 1 < count) stages[2 * k + 1] = 0.5 * (levels[k] + levels[k + 1]);
   }
-  const { area, width, conveyance } = sweepStages(shape, stages);
+  return stages;
+}
+
+/**
+ * Writes the table of `shape` into `table` from `start` on; returns the number of levels. `stages` are those of tableStages,
+ * and `sweep` what the section is there.
+ */
+export function writeSectionTable(
+  shape: SectionShape,
+  table: Float64Array,
+  start: number,
+  stages: Float64Array = tableStages(shape),
+  sweep: StageSweep = sweepStages(shape, stages),
+): number {
+  const { Z, AREA, B0, B1, THRUST, V0, V1, V2 } = LEVEL_LAYOUT;
+  const count = (stages.length + 1) / 2;
+  const { area, width, conveyance } = sweep;
   const velocity = (m: number): number => (area[m] > 0 ? conveyance[m] / area[m] : 0);
 
   let thrust = 0;
@@ -42,20 +57,20 @@ export function writeSectionTable(shape: SectionShape, table: Float64Array, star
     const row = start + k * LEVEL_FIELDS;
     const a = area[2 * k];
     const b0 = width[2 * k];
-    table[row + Z] = levels[k];
+    table[row + Z] = stages[2 * k];
     table[row + AREA] = a;
     table[row + B0] = b0;
     table[row + THRUST] = thrust;
     if (k + 1 === count) {
       const below = row - LEVEL_FIELDS;
-      const d = levels[k] - levels[k - 1];
+      const d = stages[2 * k] - stages[2 * k - 2];
       table[row + B1] = 0;
       table[row + V0] = velocity(2 * k);
       table[row + V1] = Math.max(0, table[below + V1] + 2 * d * table[below + V2]);
       table[row + V2] = 0;
       break;
     }
-    const d = levels[k + 1] - levels[k];
+    const d = stages[2 * k + 2] - stages[2 * k];
     const b1 = Math.max(0, ((area[2 * k + 2] - a) / d - b0) / d);
     table[row + B1] = b1;
     thrust += d * (a + d * (b0 / 2 + (d * b1) / 3));

@@ -8,25 +8,45 @@ export interface StageSweep {
   conveyance: Float64Array;
 }
 
-/**
- * Area, top width and conveyance of a section at `stages` (m, ascending). A segment costs work only at the stages
- * between its ends; what lies wholly under water is summed by differences.
- */
+/** Area, top width and conveyance of a section at `stages` (m, ascending). */
 export function sweepStages(shape: SectionShape, stages: Float64Array): StageSweep {
   const count = stages.length;
   const area = new Float64Array(count);
   const width = new Float64Array(count);
   const conveyance = new Float64Array(count);
+  const { zoneN, roughness } = shape;
+  const sweepZone = createZoneSweep(shape, stages);
+  for (let q = 0; q < zoneN.length; q++) {
+    const { zoneArea, zonePerimeter } = sweepZone(q, width);
+    for (let m = 0; m < count; m++) {
+      area[m] += zoneArea[m];
+      const n = roughness ? zoneN[q] * roughness.factorAt(q, stages[m]) : zoneN[q];
+      conveyance[m] += zoneConveyance(zoneArea[m], zonePerimeter[m], n);
+    }
+  }
+  return { area, width, conveyance };
+}
+
+/**
+ * Sweeps the zones of a section one after the other: area (m²) and wetted perimeter (m) of each at `stages` (ascending);
+ * its top width is added to `width`. A segment costs work only at the stages between its ends; what lies wholly under
+ * water is summed by differences.
+ */
+export function createZoneSweep(
+  { x, z, zone, bed }: SectionShape,
+  stages: Float64Array,
+): (q: number, width: Float64Array) => { zoneArea: Float64Array; zonePerimeter: Float64Array } {
+  const count = stages.length;
   const zoneArea = new Float64Array(count);
   const zonePerimeter = new Float64Array(count);
   // From stage m on: width, width times mean height above the bed, and length that are wholly under water.
   const fullWidth = new Float64Array(count + 1);
   const fullMoment = new Float64Array(count + 1);
   const fullLength = new Float64Array(count + 1);
-  const { x, z, zone, zoneN, bed } = shape;
-
+  const swept = { zoneArea, zonePerimeter };
   let k = 0;
-  for (let q = 0; q < zoneN.length; q++) {
+
+  return function sweepZone(q, width) {
     zoneArea.fill(0);
     zonePerimeter.fill(0);
     fullWidth.fill(0);
@@ -55,13 +75,12 @@ export function sweepStages(shape: SectionShape, stages: Float64Array): StageSwe
       sumWidth += fullWidth[m];
       sumMoment += fullMoment[m];
       sumLength += fullLength[m];
-      const inZone = zoneArea[m] + Math.max(0, sumWidth * (stages[m] - bed) - sumMoment);
-      area[m] += inZone;
+      zoneArea[m] += Math.max(0, sumWidth * (stages[m] - bed) - sumMoment);
+      zonePerimeter[m] += sumLength;
       width[m] += sumWidth;
-      conveyance[m] += zoneConveyance(inZone, zonePerimeter[m] + sumLength, zoneN[q]);
     }
-  }
-  return { area, width, conveyance };
+    return swept;
+  };
 }
 
 /** Index of the first stage at or above `elevation`. */
