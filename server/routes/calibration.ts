@@ -1,12 +1,15 @@
 import { Router } from 'express';
 import { reportedSchema, residualsQuerySchema } from '../../shared/calibration/schemas';
+import { fromSearchSchema, searchSchema } from '../../shared/calibration/search/schemas';
 import type { Services } from '../composition';
-import { authorize, recordOf, type Loader } from '../middleware/authorize';
+import { actorOf, authorize, recordOf, type Loader } from '../middleware/authorize';
 import { pathId } from '../middleware/pathId';
 import { check, validate } from '../middleware/validate';
 import type { RunModel } from '../models/Run';
+import type { TaskSetModel } from '../models/TaskSet';
+import { presentTaskSet } from '../presenters/taskSets';
 
-export function calibrationRoutes({ authenticate, calibration, runs }: Services): Router {
+export function calibrationRoutes({ authenticate, calibration, runs, tasks }: Services): Router {
   const router = Router();
   const run: Loader<RunModel> = (req, actor) => runs.find.load(pathId(req, 'runId'), actor);
 
@@ -29,6 +32,38 @@ export function calibrationRoutes({ authenticate, calibration, runs }: Services)
       const record = recordOf<RunModel>(res);
       await calibration.residuals.report(record, req.body.flood);
       res.json(await calibration.residuals.read(record, req.body.flood ?? undefined));
+    },
+  );
+
+  router.post(
+    '/runs/:runId/calibrations',
+    authenticate,
+    validate(searchSchema),
+    authorize('taskSet.request', run),
+    async (req, res) => {
+      const actor = actorOf(res);
+      const { id } = await calibration.search(actor, recordOf(res), req.body);
+      const set = await tasks.find.again(id);
+      const [counts, members] = await Promise.all([tasks.find.counts(set), tasks.find.tasks(set)]);
+      res.status(201).json(presentTaskSet(set, counts, members, actor));
+    },
+  );
+
+  router.post(
+    '/task-sets/:taskSetId/scenario',
+    authenticate,
+    validate(fromSearchSchema),
+    authorize('calibration.change', (req, actor) =>
+      tasks.find.load(pathId(req, 'taskSetId'), actor),
+    ),
+    async (req, res) => {
+      const set = recordOf<TaskSetModel>(res);
+      const { scenario, changed } = await calibration.scenarioOf.make(
+        set,
+        actorOf(res),
+        req.body.name,
+      );
+      res.status(201).json({ scenarioId: scenario.id, changed });
     },
   );
   return router;

@@ -66,9 +66,14 @@ export function buildScenarios(platform: Platform) {
     return store(study.id, actor, newScenario(name, reachId, sections), sections);
   }
 
-  /** The same under another name; runs stay with the original. */
-  async function duplicate(scenario: ScenarioModel, actor: Actor, name: string) {
-    const body = { ...scenario.body, name };
+  /** The same under another name, with a change where one is given; runs stay with the original. */
+  async function duplicate(
+    scenario: ScenarioModel,
+    actor: Actor,
+    name: string,
+    change: (body: ScenarioBody) => ScenarioBody = (body) => body,
+  ) {
+    const body = change({ ...scenario.body, name });
     return store(scenario.studyId, actor, body, await sectionsOf(scenario));
   }
 
