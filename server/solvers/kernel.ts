@@ -2,10 +2,12 @@ import type { CellState } from './geometry/cellState';
 import type { CellTables } from './geometry/cellTables';
 import { createLimitedSlopes } from './reconstruction/limitedSlopes';
 import { createInteriorFluxes } from './riemann/interiorFluxes';
+import { createPartedFluxes } from './riemann/partedFluxes';
 import type { Laterals } from './sources/laterals';
 import { createLimitOutflow } from './time/limitOutflow';
 import { createStepLoops } from './time/stepLoops';
 import { createFastestWave } from './time/fastestWave';
+import { createPartedFastestWave } from './time/partedFastestWave';
 import type { Workspace } from './workspace';
 
 /**
@@ -32,11 +34,14 @@ export function createReferenceKernel(
   cellState: CellState,
   laterals: Laterals,
 ): Kernel {
+  const { parts } = workspace;
   return {
     slopes: createLimitedSlopes(workspace),
-    fluxes: createInteriorFluxes(workspace, tables),
+    fluxes: parts
+      ? createPartedFluxes(workspace, tables, parts)
+      : createInteriorFluxes(workspace, tables),
     limitOutflow: createLimitOutflow(workspace),
     ...createStepLoops(workspace, cellState, laterals),
-    fastestWave: createFastestWave(workspace),
+    fastestWave: parts ? createPartedFastestWave(workspace, parts) : createFastestWave(workspace),
   };
 }

@@ -1,5 +1,6 @@
 import type { Boundary } from './boundaries/boundary';
 import type { Kernel } from './kernel';
+import type { LocalLosses } from './sources/localLosses';
 import type { StructureSet } from './structures/structureSet';
 
 /**
@@ -14,6 +15,7 @@ export function createRhs(
   downstream: Boundary,
   order: 1 | 2,
   structures: StructureSet | null = null,
+  localLosses: LocalLosses | null = null,
 ): Rhs {
   return function rhs(time) {
     if (order === 2) {
@@ -22,6 +24,8 @@ export function createRhs(
     }
     kernel.fluxes();
     const endSpeed = Math.max(upstream(time), downstream(time));
-    return structures ? Math.max(endSpeed, structures.fluxes(time)) : endSpeed;
+    const fastest = structures ? Math.max(endSpeed, structures.fluxes(time)) : endSpeed;
+    localLosses?.apply();
+    return fastest;
   };
 }

@@ -1,29 +1,32 @@
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Workspace } from '../workspace';
 import { risingRoot } from './rootNear';
 
 /** Hydraulics of one section of the tables, for boundaries and initial states. Flows in m³/s, stages in m. */
 export interface EndSection {
-  celerityAt(stage: number): number;
-  /** A c: the flow that is critical at a stage */
+  /** Of still water, or of a flow */
+  celerityAt(stage: number, flow?: number): number;
+  /** The flow that is critical at a stage; A c where all flows evenly */
   criticalFlowAt(stage: number): number;
   criticalStage(flow: number): number;
   /** Stage of uniform flow on a slope > 0 */
   normalStage(flow: number, slope: number): number;
-  /** Q²/A + g I1 at a stage (m⁴/s²) */
+  /** β Q²/A_f + g I1 at a stage (m⁴/s²) */
   forceAt(stage: number, flow: number): number;
 }
 
 export function createEndSection(workspace: Workspace, tables: CellTables, i: number): EndSection {
   const { gravity, bed } = workspace;
 
-  function celerityAt(stage: number): number {
-    const a = tables.areaAt(i, stage);
-    return a > 0 ? Math.sqrt((gravity * a) / tables.widthAt(i, stage)) : 0;
+  const waves = createSectionWaves(workspace, tables);
+
+  function celerityAt(stage: number, flow = 0): number {
+    return waves.celerityAt(i, stage, tables.areaAt(i, stage), flow);
   }
 
   function criticalFlowAt(stage: number): number {
-    return tables.areaAt(i, stage) * celerityAt(stage);
+    return waves.criticalFlowAt(i, stage);
   }
 
   function criticalStage(flow: number): number {
@@ -36,8 +39,8 @@ export function createEndSection(workspace: Workspace, tables: CellTables, i: nu
   }
 
   function forceAt(stage: number, flow: number): number {
-    const a = tables.areaAt(i, stage);
-    return (a > 0 ? (flow * flow) / a : 0) + gravity * tables.thrustAt(i, stage);
+    const carried = waves.carriedAt(i, stage, tables.areaAt(i, stage), flow);
+    return carried + gravity * tables.thrustAt(i, stage);
   }
 
   return { celerityAt, criticalFlowAt, criticalStage, normalStage, forceAt };

@@ -1,4 +1,5 @@
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Workspace } from '../workspace';
 
 /** What the inside of the reach brings to one of its ends, on the section there. */
@@ -6,6 +7,7 @@ export interface EndState {
   stage: number;
   area: number;
   flow: number;
+  /** Waves run at velocity ± celerity: Q/A where all of the section flows evenly, else β Q/A_f */
   velocity: number;
   celerity: number;
   /** Share of the pressure along the half cell at the end that its cell is to feel: 1 but on steep, shallow flow */
@@ -45,8 +47,10 @@ export function createEndState(
   isFree = false,
 ): () => EndState {
   const { n, area, flow, stage, celerity, slopeStage, slopeFlow, slopeFloor } = workspace;
-  const { bed, gravity, dryDepth } = workspace;
+  const { bed, dryDepth } = workspace;
   const { section, cell, outward } = end;
+  const waves = createSectionWaves(workspace, tables);
+  const { cellFlowArea } = waves;
   const inner = Math.min(n, Math.max(1, cell - outward));
   const state: EndState = { stage: 0, area: 0, flow: 0, velocity: 0, celerity: 0, path: 1 };
 
@@ -62,7 +66,7 @@ export function createEndState(
 
     const own = area[cell];
     const level = tables.areaAt(section, etaCell);
-    const froude = Math.abs(flow[cell]) / (own * celerity[cell]);
+    const froude = Math.abs(flow[cell]) / (cellFlowArea[cell] * celerity[cell]);
     const isFlat = Math.min(etaCell, stage[inner]) <= Math.max(slopeFloor[cell], slopeFloor[inner]);
     const ratio = level > 0 ? Math.max(level / own, own / level) : Infinity;
     const mix = isFlat ? 1 : Math.min(1, Math.max(0, (ratio - 1.5) / 1.5));
@@ -89,8 +93,8 @@ export function createEndState(
     }
     state.area = a;
     state.flow = q;
-    state.velocity = q / a;
-    state.celerity = Math.sqrt((gravity * a) / tables.widthAt(section, state.stage));
+    state.velocity = waves.driftAt(section, state.stage, a, q);
+    state.celerity = waves.celerityAt(section, state.stage, a, q);
     return state;
   };
 }

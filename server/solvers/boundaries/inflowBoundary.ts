@@ -2,6 +2,7 @@ import type { CellTables } from '../geometry/cellTables';
 import type { Series } from '../sources/series';
 import type { Workspace } from '../workspace';
 import type { Boundary } from './boundary';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import { createEndFlux } from './endFlux';
 import { createEndSection } from './endSection';
 import { createEndState, upstreamEnd } from './endState';
@@ -22,6 +23,7 @@ export function createInflowBoundary(
   const { n, dx, bed } = workspace;
   const endState = createEndState(workspace, tables, end);
   const endFlux = createEndFlux(workspace, tables, end);
+  const waves = createSectionWaves(workspace, tables);
   const wall = createWallBoundary(workspace, tables, end);
   const { celerityAt, criticalFlowAt, criticalStage, normalStage } = createEndSection(
     workspace,
@@ -59,7 +61,8 @@ export function createInflowBoundary(
       if (!(a > 0)) break;
       eta = tables.stageOf(section, a);
       if (Math.abs(change) <= 1e-6 * flow) break;
-      speed = 0.5 * (velocity + celerity + flow / a + celerityAt(eta));
+      const drift = waves.driftAt(section, eta, a, flow);
+      speed = 0.5 * (velocity + celerity + drift + celerityAt(eta, flow));
     }
     if (!(a > 0) || criticalFlowAt(eta) < flow) {
       knowStages(flow);

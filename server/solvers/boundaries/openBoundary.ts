@@ -1,6 +1,7 @@
 import type { CellTables } from '../geometry/cellTables';
 import type { Workspace } from '../workspace';
 import type { Boundary } from './boundary';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import { createControlBoundary } from './controlBoundary';
 import { createEndState, type End } from './endState';
 
@@ -19,6 +20,7 @@ export function createOpenBoundary(workspace: Workspace, tables: CellTables, end
   const slope = openSlope(workspace);
   const root = Math.sqrt(Math.max(0, slope));
   const endState = createEndState(workspace, tables, end, true);
+  const waves = createSectionWaves(workspace, tables);
   let isKnown = false;
   let isUniform = false;
   let invariant = 0;
@@ -26,7 +28,7 @@ export function createOpenBoundary(workspace: Workspace, tables: CellTables, end
   const released = (stage: number): number => {
     if (isUniform) return tables.conveyanceAt(section, stage) * root;
     const speed = invariant + tables.frontSpeedAt(section, stage);
-    return speed > 0 ? speed * tables.areaAt(section, stage) : 0;
+    return speed > 0 ? speed * waves.flowAreaAt(section, stage, tables.areaAt(section, stage)) : 0;
   };
   const control = createControlBoundary(workspace, tables, end, released);
 

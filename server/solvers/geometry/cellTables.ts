@@ -1,4 +1,5 @@
 import type { Workspace } from '../workspace';
+import { emptyPart, readPart } from './parts';
 import { LEVEL_FIELDS as FIELDS, LEVEL_LAYOUT, TABLE_STRIDE as STRIDE } from './sectionTable';
 
 /**
@@ -10,7 +11,7 @@ export interface CellTables {
   areaAt(i: number, stage: number): number;
   /** m, just above the stage */
   widthAt(i: number, stage: number): number;
-  /** ∫ A dη from the bed, m³ */
+  /** ∫ A dη from the bed, of the area that flows; m³ */
   thrustAt(i: number, stage: number): number;
   /** m³/s */
   conveyanceAt(i: number, stage: number): number;
@@ -25,9 +26,11 @@ export interface CellTables {
 }
 
 export function createCellTables(
-  workspace: Pick<Workspace, 'table' | 'levels' | 'level' | 'gravity'>,
+  workspace: Pick<Workspace, 'table' | 'levels' | 'level' | 'gravity'> &
+    Partial<Pick<Workspace, 'parts'>>,
 ): CellTables {
-  const { table, levels, level, gravity } = workspace;
+  const { table, levels, level, gravity, parts = null } = workspace;
+  const part = emptyPart();
   const { Z, AREA, B0, B1, THRUST, V0, V1, V2 } = LEVEL_LAYOUT;
   const LEVEL_FIELDS = FIELDS;
   const TABLE_STRIDE = STRIDE;
@@ -68,6 +71,10 @@ export function createCellTables(
     const row = rowAtStage(i, stage);
     const s = stage - table[row + Z];
     if (s <= 0) return table[row + THRUST];
+    if (parts) {
+      readPart(parts, i, row, s, part);
+      return table[row + THRUST] + part.thrust;
+    }
     const b0 = table[row + B0];
     return table[row + THRUST] + s * (table[row + AREA] + s * (b0 / 2 + (s * table[row + B1]) / 3));
   }

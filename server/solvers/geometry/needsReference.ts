@@ -1,7 +1,7 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 
-/** Whether sections of a case have parts that do not flow, or a momentum coefficient: partTable.ts. */
-export function hasParts({ sections, numerics }: CaseFile): boolean {
+/** Whether sections of a case have parts that do not flow, or a momentum coefficient, which only the readable kernel knows. */
+export function needsReference({ sections, numerics }: CaseFile): boolean {
   return (
     numerics.momentum === 'compound' ||
     sections.some(
@@ -9,9 +9,4 @@ export function hasParts({ sections, numerics }: CaseFile): boolean {
         (storage?.length ?? 0) > 0 || embankments?.left || embankments?.right,
     )
   );
-}
-
-/** Whether a case has terms that only the readable kernel knows. */
-export function needsReference(caseFile: CaseFile): boolean {
-  return hasParts(caseFile) || (caseFile.localLosses?.length ?? 0) > 0;
 }

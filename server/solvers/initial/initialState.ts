@@ -4,6 +4,7 @@ import type { CellState } from '../geometry/cellState';
 import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import type { Laterals } from '../sources/laterals';
+import type { LocalLosses } from '../sources/localLosses';
 import { createSeries } from '../sources/series';
 import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
@@ -21,6 +22,7 @@ export function setInitialState(
   grid: Grid,
   laterals: Laterals,
   structures: StructureSet | null,
+  localLosses: LocalLosses | null,
   warn: (warning: RunWarning) => void,
 ): boolean {
   const { n, area, flow, bed, stage, celerity, dryDepth } = workspace;
@@ -86,6 +88,7 @@ export function setInitialState(
         grid,
         laterals,
         structures,
+        localLosses,
       );
       for (let i = 1; i <= n; i++) put(i, stages[i], flows[i]);
       const moves = flows.some((q) => q > 0) || caseFile.upstream.kind === 'stage';

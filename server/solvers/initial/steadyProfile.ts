@@ -1,12 +1,14 @@
 import { createEndSection } from '../boundaries/endSection';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
+import type { LocalLosses } from '../sources/localLosses';
 import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 
 /**
  * The water surface of steady flow, integrated section by section over index 0..n+1:
- *   [Q²/A] + g mean(A) [η] + g Δx mean(A S) = 0,  S = Q|Q|/K²,
+ *   [β Q²/A_f] + g mean(A_f) ([η] + h) + g Δx mean(A_f S) = 0,  S = Q|Q|/K², h what is lost locally,
  * first upstream from `outletStage` on the subcritical branch, with critical depth where there is none; then downstream
  * from every such control on the supercritical branch, as far as its force Q²/A + g I1 is the greater (the rest is a
  * hydraulic jump). Chow (1959), chapters 9-10 and 15. At a structure the stage above is what its flow needs. Returns stages (m); `flows` are m³/s, not negative.
@@ -17,24 +19,39 @@ export function steadyProfile(
   flows: Float64Array,
   outletStage: number,
   structures: StructureSet | null = null,
+  localLosses: LocalLosses | null = null,
 ): Float64Array {
   const { n, dx, gravity, bed } = workspace;
   const stages = new Float64Array(n + 2);
   const critical = new Float64Array(n + 2);
   const sections = Array.from({ length: n + 2 }, (_, i) => createEndSection(workspace, tables, i));
 
-  // Momentum flux Q²/A and friction g A S at a stage.
-  const carried = (i: number, eta: number): number => flows[i] ** 2 / tables.areaAt(i, eta);
+  // Area that flows, momentum flux and friction g A S at a stage.
+  const waves = createSectionWaves(workspace, tables);
+  const areaAt = (i: number, eta: number): number =>
+    waves.flowAreaAt(i, eta, tables.areaAt(i, eta));
+  const carried = (i: number, eta: number): number =>
+    workspace.parts
+      ? waves.carriedAt(i, eta, tables.areaAt(i, eta), flows[i])
+      : flows[i] ** 2 / tables.areaAt(i, eta);
   const braked = (i: number, eta: number): number => {
     const k = tables.conveyanceAt(i, eta);
-    return (gravity * tables.areaAt(i, eta) * flows[i] ** 2) / (k * k);
+    return (gravity * areaAt(i, eta) * flows[i] ** 2) / (k * k);
   };
+  /** Head (m) lost at the face between i and i + 1 */
+  const lost = (i: number, eta: number, etaNext: number): number =>
+    localLosses
+      ? localLosses.headAt(i, flows[i] / areaAt(i, eta), flows[i + 1] / areaAt(i + 1, etaNext), 1)
+      : 0;
   const distance = (i: number): number => (i === 0 || i === n ? 0.5 * dx : dx);
   /** Residual of the balance between i and i + 1. */
   const residual = (i: number, eta: number, etaNext: number): number =>
     carried(i + 1, etaNext) -
     carried(i, eta) +
-    0.5 * gravity * (tables.areaAt(i, eta) + tables.areaAt(i + 1, etaNext)) * (etaNext - eta) +
+    0.5 *
+      gravity *
+      (areaAt(i, eta) + areaAt(i + 1, etaNext)) *
+      (etaNext - eta + lost(i, eta, etaNext)) +
     0.5 * distance(i) * (braked(i, eta) + braked(i + 1, etaNext));
 
   for (let i = 0; i < n + 2; i++) {

@@ -6,6 +6,7 @@ import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
 import type { Laterals } from '../sources/laterals';
+import type { LocalLosses } from '../sources/localLosses';
 import { createSeries } from '../sources/series';
 import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
@@ -25,6 +26,7 @@ export function steadyState(
   grid: Grid,
   laterals: Laterals,
   structures: StructureSet | null,
+  localLosses: LocalLosses | null,
 ): SteadyState {
   const { n, bed } = workspace;
   const { upstream, downstream } = caseFile;
@@ -37,7 +39,10 @@ export function steadyState(
   const stateFor = (inflow: number): SteadyState => {
     const flows = flowsFor(inflow);
     const outlet = outletStage(flows[n + 1]);
-    return { flows, stages: steadyProfile(workspace, tables, flows, outlet, structures) };
+    return {
+      flows,
+      stages: steadyProfile(workspace, tables, flows, outlet, structures, localLosses),
+    };
   };
 
   switch (upstream.kind) {

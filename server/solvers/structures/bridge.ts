@@ -1,5 +1,6 @@
 import type { BridgeInput } from '../../../shared/case/structures';
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Workspace } from '../workspace';
 import { PIER_SHAPES, velocityOfRise } from './bridgeFlow';
 import { broadCoefficient, crestHead, crestOf, drowning } from './crestFlow';
@@ -23,6 +24,9 @@ export function createBridge(
   tables: CellTables,
 ): Structure {
   const { bed, gravity } = workspace;
+  const waves = createSectionWaves(workspace, tables);
+  const flowAreaAt = (cell: number, stage: number): number =>
+    waves.flowAreaAt(cell, stage, tables.areaAt(cell, stage));
   const coefficient = PIER_SHAPES[input.piers];
   const alpha = Math.max(NO_PIERS, input.obstructed);
   const contraction = input.contraction ?? CONTRACTION;
@@ -40,14 +44,14 @@ export function createBridge(
       // Water falls away below the piers at critical depth.
       const least = bed[cellDown] + (2 / 3) * (stageUp - bed[cellDown]);
       const tail = Math.max(stageDown, least);
-      const area = tables.areaAt(cellDown, tail);
+      const area = flowAreaAt(cellDown, tail);
       if (!(area > 0) || !(stageUp > tail)) return 0;
       const depth = area / tables.widthAt(cellDown, tail);
       let flow = area * velocityOfRise(coefficient, alpha, depth, stageUp - tail, gravity);
 
       const { soffit } = input;
       if (stageUp > soffit && soffit > bed[cellUp]) {
-        const opening = tables.areaAt(cellUp, soffit) * (1 - input.obstructed);
+        const opening = flowAreaAt(cellUp, soffit) * (1 - input.obstructed);
         const width = tables.widthAt(cellUp, soffit) * (1 - input.obstructed);
         const height = opening / width;
         const sill = soffit - height;

@@ -3,6 +3,7 @@ import type { RunWarning } from '../../../shared/case/resultFile';
 import type { Boundary } from '../boundaries/boundary';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Grid } from '../geometry/grid';
 import type { Workspace } from '../workspace';
 import { createStructure } from './createStructure';
@@ -52,6 +53,7 @@ export function createStructureSet(
 ): StructureSet | null {
   if (structures.length === 0 && upstream.kind !== 'reservoir') return null;
   const { n, area, stage, bed, gravity } = workspace;
+  const waves = createSectionWaves(workspace, tables);
   const byFace = new Map<number, Structure[]>();
   for (const input of structures) {
     const isHead = upstream.kind === 'reservoir' && input.chainage === grid.start;
@@ -121,7 +123,7 @@ export function createStructureSet(
       const floor = Math.max(stageBelow, bed[face]);
       if (!(flow > 0)) return Math.max(floor, Math.min(lowest, bed[face] + HIGHEST));
       const surplus = (eta: number): number => {
-        const a = tables.areaAt(face, eta);
+        const a = waves.flowAreaAt(face, eta, tables.areaAt(face, eta));
         const velocityHead = a > 0 ? (flow / a) ** 2 / (2 * gravity) : 0;
         const deepest = (0.5 * a) / Math.max(tables.widthAt(face, eta), 1e-9);
         return (

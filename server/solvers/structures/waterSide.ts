@@ -1,5 +1,6 @@
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import { oneSided } from '../reconstruction/limitedSlopes';
 import type { Workspace } from '../workspace';
 
@@ -26,7 +27,7 @@ export interface WaterSide {
  * A = A_c - s (Q - Q_c)/(c - s u), s = +1 above the structure and -1 below: the rise of water that is stopped, the fall of
  * water that is let go. Thus the flow is found together with the stages that it makes, whatever the step.
  *
- * The cell feels Q²/A and the pressure g ∫ A dη between its middle and the structure, as at a wall where Q = 0. Water that
+ * The cell feels β Q²/A_f and the pressure g ∫ A dη between its middle and the structure, as at a wall where Q = 0. Water that
  * leaves the structure faster than it could stand there enters at critical depth.
  */
 export function createWaterSide(
@@ -36,6 +37,8 @@ export function createWaterSide(
   cell: number,
 ): WaterSide {
   const { n, area, flow, stage, bed, celerity, reach, slopeFloor, dryDepth, gravity } = workspace;
+  const waves = createSectionWaves(workspace, tables);
+  const { cellFlowArea } = waves;
   const { slopeStage, slopeFlow, fluxLeft, fluxRight } = workspace;
   const outward = cell === face ? 1 : -1;
   const flux = outward === 1 ? fluxLeft : fluxRight;
@@ -49,14 +52,10 @@ export function createWaterSide(
   let shooting = false;
 
   /** A trace of water at the bed has no width to be fast over. */
-  const waveSpeed = (a: number, eta: number): number => {
-    const width = tables.widthAt(cell, eta);
-    return a > 0 && width > 0 ? Math.sqrt((gravity * a) / width) : 0;
-  };
-  const criticalFlow = (eta: number): number => {
-    const a = tables.areaAt(cell, eta);
-    return a * waveSpeed(a, eta);
-  };
+  const waveSpeed = (a: number, eta: number, q: number): number =>
+    tables.widthAt(cell, eta) > 0 ? waves.celerityAt(cell, eta, a, q) : 0;
+  const criticalFlow = (eta: number): number =>
+    tables.widthAt(cell, eta) > 0 ? waves.criticalFlowAt(cell, eta) : 0;
   let wanted = 0;
   const shortOfWanted = (eta: number): number => criticalFlow(eta) - wanted;
 
@@ -86,7 +85,8 @@ export function createWaterSide(
       faceArea = slopeStage[cell] === 0 ? area[cell] : tables.areaAt(cell, faceStage);
       faceFlow = wet ? flow[cell] + 0.5 * outward * slopeFlow[cell] : 0;
       const c = celerity[cell];
-      const towards = faceArea > 0 ? (outward * faceFlow) / faceArea : 0;
+      const towards =
+        faceArea > 0 ? outward * waves.driftAt(cell, faceStage, faceArea, faceFlow) : 0;
       approach = Math.max(0, towards);
       // Fast water is stopped by a bore that runs up against it, not by a wave of its own celerity.
       speed = Math.max(c - towards, 0.5 * (c + towards), 0.25 * c);
@@ -94,12 +94,18 @@ export function createWaterSide(
     },
     isWet: () => wet,
     stageAt,
-    mostAt: (eta) => Math.max(criticalFlow(eta), approach * tables.areaAt(cell, eta)),
+    mostAt(eta) {
+      const a = waves.flowAreaAt(cell, eta, tables.areaAt(cell, eta));
+      return Math.max(criticalFlow(eta), approach * a);
+    },
     velocityHead(q) {
       if (!(outward * q > 0) || !wet) return 0;
-      const a = Math.max(faceArea - (outward * (q - faceFlow)) / speed, 0);
+      const whole = Math.max(faceArea - (outward * (q - faceFlow)) / speed, 0);
       // No flow approaches with more than the critical velocity head.
-      const most = 0.5 * tables.areaAt(cell, faceStage);
+      const most = 0.5 * waves.flowAreaAt(cell, faceStage, tables.areaAt(cell, faceStage));
+      const a = workspace.parts
+        ? waves.flowAreaAt(cell, tables.stageOf(cell, whole), whole)
+        : whole;
       const u2 = a > 0 ? (q / a) ** 2 : Infinity;
       return Math.min(u2 / (2 * gravity), most / Math.max(tables.widthAt(cell, faceStage), 1e-9));
     },
@@ -111,10 +117,11 @@ export function createWaterSide(
         eta = risingRoot(shortOfWanted, bed[cell], 0.1);
       }
       const a = eta === stage[cell] ? area[cell] : tables.areaAt(cell, eta);
-      const carried = a > 0 ? (q * q) / a : 0;
-      flux[face] = carried + 0.5 * gravity * (eta - stage[cell]) * (area[cell] + a);
+      const carried = waves.carriedAt(cell, eta, a, q);
+      const flows = eta === stage[cell] ? cellFlowArea[cell] : waves.flowAreaAt(cell, eta, a);
+      flux[face] = carried + 0.5 * gravity * (eta - stage[cell]) * (cellFlowArea[cell] + flows);
       if (!(a > 0)) return 0;
-      return Math.abs(q) / a + waveSpeed(a, eta);
+      return Math.abs(waves.driftAt(cell, eta, a, q)) + waveSpeed(a, eta, q);
     },
     slope,
   };
