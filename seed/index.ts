@@ -20,6 +20,7 @@ const VESHALL: StudyBody = {
   clientName: 'Tornick Town Council',
   place: 'Tornick',
   verticalDatum: 'Veshall levelling datum 1974',
+  coordinateSystem: 'Veshall valley grid, metres',
   unitSystem: 'metric',
   purpose:
     'Flood levels and times at Tornick bridge, Sallow Mill and the gauge at Ebbick for the 1 in 100 year flood.',
@@ -34,6 +35,7 @@ const QUENLOW: StudyBody = {
   clientName: 'Quenlow Water Board',
   place: 'Quenlow valley',
   verticalDatum: 'Veshall levelling datum 1974',
+  coordinateSystem: 'Veshall valley grid, metres',
   unitSystem: 'metric',
   purpose: 'Arrival times and depths below the dam for the emergency plan.',
 };
@@ -50,6 +52,7 @@ const OSTRAND: StudyBody = {
   clientName: 'Ostrand County',
   place: 'Ostrand Vale',
   verticalDatum: 'County datum',
+  coordinateSystem: '',
   unitSystem: 'usCustomary',
   purpose: '',
 };

@@ -21,6 +21,8 @@ export function buildApp(services: Services): Express {
   app.use(requestId, securityHeaders(env.publicUrl), compression());
 
   const api = Router();
+  // All sections of a large survey changed at once.
+  api.use('/reaches', express.json({ limit: '16mb' }));
   api.use(noStore, sameOrigin(env.publicUrl), cookieParser(), express.json({ limit: '4mb' }));
   api.use(followRequests(services.audit, log));
   for (const routes of ROUTES) api.use(routes(services));

@@ -16,6 +16,7 @@ import { buildVerify } from './services/issued/verify';
 import { buildReports } from './services/reports';
 import { buildReviews } from './services/review';
 import { buildRuns } from './services/runs';
+import { buildPlans } from './services/reaches/plans';
 import { buildReaches } from './services/reaches/reaches';
 import { buildScenarios } from './services/scenarios/scenarios';
 import { buildMembers } from './services/studies/members';
@@ -61,6 +62,7 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       stations: buildStations(platform),
       surveys: buildSurveys(platform),
       reaches: buildReaches(platform),
+      plans: buildPlans(platform, runs),
       scenarios: buildScenarios(platform),
       observations,
       calibration,

@@ -10,7 +10,7 @@ import {
 import type { SurveyRevisionModel } from './SurveyRevision';
 import type { UserModel } from './User';
 
-/** The geometry that is routed: an accepted survey with bank marks and roughness of the modeller. */
+/** The geometry that is routed: an accepted survey with the modeller's bank marks and roughness, or a working copy of one. */
 export interface ReachModel extends Model<
   InferAttributes<ReachModel>,
   InferCreationAttributes<ReachModel>
@@ -18,6 +18,8 @@ export interface ReachModel extends Model<
   id: CreationOptional<number>;
   studyId: number;
   surveyRevisionId: number;
+  /** The reach that this working geometry was copied from; null for the one made with its survey revision. */
+  copiedFrom: CreationOptional<number | null>;
   name: string;
   /** `Section[]` as gzipped JSON. Large; left out of the default scope. */
   sections: Buffer;
@@ -41,6 +43,7 @@ export const defineReach = (sequelize: Sequelize) =>
       id: { type: DataTypes.BIGINT.UNSIGNED, primaryKey: true, autoIncrement: true },
       studyId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
       surveyRevisionId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
+      copiedFrom: { type: DataTypes.BIGINT.UNSIGNED, allowNull: true, defaultValue: null },
       name: { type: DataTypes.STRING(120), allowNull: false },
       sections: { type: DataTypes.BLOB('long'), allowNull: false },
       sectionCount: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },

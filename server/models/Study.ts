@@ -21,6 +21,7 @@ export interface StudyModel extends Model<
   clientName: string;
   place: string;
   verticalDatum: string;
+  coordinateSystem: CreationOptional<string>;
   unitSystem: UnitSystem;
   purpose: string;
   createdBy: number;
@@ -40,6 +41,7 @@ export const defineStudy = (sequelize: Sequelize) =>
       clientName: { type: DataTypes.STRING(120), allowNull: false },
       place: { type: DataTypes.STRING(120), allowNull: false },
       verticalDatum: { type: DataTypes.STRING(120), allowNull: false },
+      coordinateSystem: { type: DataTypes.STRING(120), allowNull: false, defaultValue: '' },
       unitSystem: {
         type: DataTypes.STRING(16),
         allowNull: false,

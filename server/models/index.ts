@@ -10,6 +10,7 @@ import { defineStation } from './Station';
 import { defineSurveyRevision } from './SurveyRevision';
 import { defineSurveyRefusal } from './SurveyRefusal';
 import { defineReach } from './Reach';
+import { defineReachChange } from './ReachChange';
 import { defineScenario } from './Scenario';
 import { defineRun } from './Run';
 import { defineRunBlock } from './RunBlock';
@@ -43,6 +44,7 @@ export function defineModels(sequelize: Sequelize) {
     SurveyRevision: defineSurveyRevision(sequelize),
     SurveyRefusal: defineSurveyRefusal(sequelize),
     Reach: defineReach(sequelize),
+    ReachChange: defineReachChange(sequelize),
     Scenario: defineScenario(sequelize),
     Run: defineRun(sequelize),
     RunBlock: defineRunBlock(sequelize),
@@ -71,6 +73,7 @@ export function defineModels(sequelize: Sequelize) {
   models.SurveyRefusal.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
   models.Reach.belongsTo(models.SurveyRevision, { as: 'survey', foreignKey: 'surveyRevisionId' });
   models.Reach.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
+  models.ReachChange.belongsTo(models.User, { as: 'changer', foreignKey: 'changedBy' });
   models.Scenario.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });
   models.Run.belongsTo(models.Study, { as: 'study', foreignKey: 'studyId' });
   models.Run.belongsTo(models.User, { as: 'requester', foreignKey: 'requestedBy' });

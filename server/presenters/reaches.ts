@@ -1,6 +1,7 @@
-import type { Reach, ReachRow } from '../../shared/reaches/types';
+import type { Reach, ReachChange, ReachRow } from '../../shared/reaches/types';
 import type { Section } from '../../shared/surveys/types';
 import type { ReachModel } from '../models/Reach';
+import type { ReachChangeModel } from '../models/ReachChange';
 import { adviseReach } from '../services/reaches/advice/adviseReach';
 import { describeSection } from '../services/reaches/describeSection';
 
@@ -9,6 +10,7 @@ export const presentReachRow = (reach: ReachModel): ReachRow => ({
   id: reach.id,
   name: reach.name,
   surveyRevisionId: reach.surveyRevisionId,
+  copiedFrom: reach.copiedFrom,
   revision: reach.survey!.revision,
   sectionCount: reach.sectionCount,
   firstChainage: reach.firstChainage,
@@ -27,3 +29,12 @@ export function presentReach(reach: ReachModel, sections: Section[]): Reach {
     advice: adviseReach(described),
   };
 }
+
+/** Needs the change's `changer`. */
+export const presentReachChange = (change: ReachChangeModel): ReachChange => ({
+  version: change.version,
+  words: change.words,
+  steps: change.steps,
+  changedBy: change.changer!.name,
+  changedAt: change.changedAt.toISOString(),
+});

@@ -43,6 +43,7 @@ export const presentStudy = (
   clientName: study.clientName,
   place: study.place,
   verticalDatum: study.verticalDatum,
+  coordinateSystem: study.coordinateSystem,
   unitSystem: study.unitSystem,
   purpose: study.purpose,
   createdAt: study.createdAt.toISOString(),

@@ -9,6 +9,7 @@ import { invitationRoutes } from './invitations';
 import { issuedRoutes } from './issued';
 import { meRoutes } from './me';
 import { runRoutes } from './runs';
+import { planRoutes } from './plans';
 import { reachRoutes } from './reaches';
 import { reportRoutes } from './reports';
 import { reviewRoutes } from './reviews';
@@ -31,6 +32,7 @@ export const ROUTES: ((services: Services) => Router)[] = [
   invitationRoutes,
   runRoutes,
   reachRoutes,
+  planRoutes,
   scenarioRoutes,
   stationRoutes,
   observationRoutes,

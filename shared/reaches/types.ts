@@ -1,13 +1,15 @@
 import type { Section } from '../surveys/types';
 
 /**
- * The geometry that is routed: the sections of an accepted survey revision with the modeller's bank marks and roughness.
- * The survey itself never changes. `GET /api/studies/:studyId/reaches`.
+ * The geometry that is routed: the sections of an accepted survey revision with the modeller's bank marks and roughness, or
+ * a working copy of them in which everything may be changed. The survey itself never changes. `GET /api/studies/:studyId/reaches`.
  */
 export interface ReachRow {
   id: number;
   name: string;
   surveyRevisionId: number;
+  /** The reach that this working geometry was copied from; null for the one made with its survey revision. */
+  copiedFrom: number | null;
   revision: number;
   sectionCount: number;
   /** m. */
@@ -24,6 +26,17 @@ export interface Reach extends ReachRow {
   studyId: number;
   sections: ReachSection[];
   advice: Advice[];
+}
+
+/** `GET /api/reaches/:reachId/changes`, newest first. */
+export interface ReachChange {
+  version: number;
+  /** What differs from the version before. */
+  words: string;
+  /** What was done, step by step, where the editor told it. */
+  steps: string[];
+  changedBy: string;
+  changedAt: string;
 }
 
 export interface ReachSection extends Section {

@@ -10,6 +10,8 @@ export const studySchema = object({
     .trim()
     .max(LIMITS.textShort)
     .required('Name the datum that the elevations refer to.'),
+  /** Name of what eastings and northings refer to; empty where there are none or nobody has named it. */
+  coordinateSystem: string().trim().max(LIMITS.textShort).default(''),
   unitSystem: string().oneOf(UNIT_SYSTEMS).default('metric').required(),
   purpose: string().trim().max(LIMITS.textLong).default(''),
 }).noUnknown();

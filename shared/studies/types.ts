@@ -21,6 +21,8 @@ export interface Study {
   clientName: string;
   place: string;
   verticalDatum: string;
+  /** Name of what eastings and northings refer to; '' where it is not named. */
+  coordinateSystem: string;
   unitSystem: UnitSystem;
   purpose: string;
   createdAt: string;

@@ -11,10 +11,10 @@ import { StudyFields } from './StudyFields';
 
 export function ChangeStudyDialog({ study, onClose }: { study: Study; onClose: () => void }) {
   const change = useChangeStudy(study.id);
-  const { title, clientName, place, verticalDatum, unitSystem, purpose } = study;
+  const { title, clientName, place, verticalDatum, coordinateSystem, unitSystem, purpose } = study;
   const form = useYupForm({
     schema: studySchema,
-    initial: { title, clientName, place, verticalDatum, unitSystem, purpose },
+    initial: { title, clientName, place, verticalDatum, coordinateSystem, unitSystem, purpose },
     onSubmit: async (body) => {
       await change.mutateAsync(body);
       onClose();

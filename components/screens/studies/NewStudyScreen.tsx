@@ -18,6 +18,7 @@ export function NewStudyScreen() {
       clientName: '',
       place: '',
       verticalDatum: '',
+      coordinateSystem: '',
       unitSystem: 'metric',
       purpose: '',
     },

@@ -22,6 +22,12 @@ export function StudyFields() {
         label="Vertical datum"
         hint="What the elevations of survey and marks refer to."
       />
+      <FormTextField
+        name="coordinateSystem"
+        label="Coordinate system"
+        hint="What eastings and northings refer to, by its usual name or code. It is named in plans; nothing is converted."
+        optional
+      />
       <FormRadioGroup
         name="unitSystem"
         label="Units"

@@ -40,6 +40,7 @@ export function StudyOverview({ study }: { study: Study }) {
             ['Client', study.clientName],
             ['Place', study.place],
             ['Vertical datum', study.verticalDatum],
+            ['Coordinate system', study.coordinateSystem],
             ['Units', UNIT_SYSTEM_NAMES[study.unitSystem]],
             ['Purpose', study.purpose],
             ['Made', `${formatDay(study.createdAt)} by ${study.createdBy}`],

@@ -23,7 +23,11 @@ export function planOf(
     notes: [
       AXES,
       ...(run ? [`Run ${run.number}. ${DRAWN}`] : []),
-      ...(missing > 0 ? [`Without coordinates and left out: ${missing === 1 ? '1 section' : `${missing} sections`}.`] : []),
+      ...(missing > 0
+        ? [
+            `Without coordinates and left out: ${missing === 1 ? '1 section' : `${missing} sections`}.`,
+          ]
+        : []),
       ...(extent.crossing.length > 0
         ? [`Section lines cross, so no extent is drawn between ${extent.crossing.join(', ')}.`]
         : []),

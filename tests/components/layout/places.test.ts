@@ -25,6 +25,7 @@ const study = (may: StudyAction[]): Study => ({
   clientName: '',
   place: '',
   verticalDatum: 'local',
+  coordinateSystem: '',
   unitSystem: 'metric',
   purpose: '',
   createdAt: '2025-11-01T00:00:00Z',

@@ -59,6 +59,13 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /studies/:studyId/reaches': 'reach.read',
   'GET /reaches/:reachId': 'reach.read',
   'PATCH /reaches/:reachId/sections': 'reach.change',
+  'POST /studies/:studyId/reaches': 'reach.change',
+  'PUT /reaches/:reachId/geometry': 'reach.change',
+  'PATCH /reaches/:reachId': 'reach.change',
+  'DELETE /reaches/:reachId': 'reach.change',
+  'GET /reaches/:reachId/changes': 'reach.read',
+  'GET /reaches/:reachId/plan.geojson': 'reach.read',
+  'GET /runs/:runId/plan.geojson': 'run.read',
 
   'GET /studies/:studyId/scenarios': 'scenario.read',
   'POST /studies/:studyId/scenarios': 'scenario.change',

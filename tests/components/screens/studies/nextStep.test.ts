@@ -7,6 +7,7 @@ const withCounts = (counts: StudyCounts): Study => ({
   clientName: '',
   place: '',
   verticalDatum: 'local',
+  coordinateSystem: '',
   unitSystem: 'metric',
   purpose: '',
   createdAt: '',
