@@ -11,6 +11,7 @@ import { buildAccounts } from './services/accounts';
 import { buildReadAudit } from './services/audit/readAudit';
 import { buildCalibration } from './services/calibration';
 import { buildObservations } from './services/observations';
+import { buildConfidence } from './services/confidence';
 import { buildIssued } from './services/issued/readIssued';
 import { buildVerify } from './services/issued/verify';
 import { buildReports } from './services/reports';
@@ -23,6 +24,7 @@ import { buildMembers } from './services/studies/members';
 import { buildStations } from './services/studies/stations';
 import { buildStudies } from './services/studies/studies';
 import { buildSurveys } from './services/surveys/surveys';
+import { buildVerificationCases } from './services/verificationCases';
 import { buildTasks } from './services/tasks';
 
 /** The only constructor of dependencies: connects, brings the schema up to date, and builds every service once. */
@@ -36,8 +38,9 @@ export async function compose(env: Env, overrides: Overrides = {}) {
     const sessions = buildSessions(platform);
     const runs = buildRuns(platform);
     const observations = buildObservations(platform);
-    const calibration = buildCalibration(platform, { observations, runs });
     const tasks = buildTasks(platform, runs.busy);
+    const scenarios = buildScenarios(platform);
+    const confidence = buildConfidence(platform, { runs, tasks });
     const reviews = buildReviews(platform, {
       background,
       mailer,
@@ -63,15 +66,17 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       surveys: buildSurveys(platform),
       reaches: buildReaches(platform),
       plans: buildPlans(platform, runs),
-      scenarios: buildScenarios(platform),
+      scenarios,
       observations,
-      calibration,
+      calibration: buildCalibration(platform, { observations, runs, scenarios, tasks }),
       runs,
       tasks,
+      confidence,
       reviews,
       reports,
       issued: buildIssued(platform, { reviews, runs }),
       verify: buildVerify(platform, reviews),
+      verificationCases: buildVerificationCases(platform, tasks),
       auditTrail: buildReadAudit(platform),
     };
   } catch (error) {

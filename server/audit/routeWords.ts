@@ -34,6 +34,8 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'POST /studies/:studyId/gauges': say('gauge.made', 'Gauge record added to'),
   'PUT /gauges/:gaugeId': say('gauge.changed', 'Gauge record changed'),
   'DELETE /gauges/:gaugeId': say('gauge.removed', 'Gauge record removed'),
+  'POST /runs/:runId/calibrations': say('taskSet.requested', 'Search for roughness asked for of'),
+  'POST /task-sets/:taskSetId/scenario': say('scenario.made', 'Scenario made of the search'),
   'PUT /runs/:runId/observed': say('run.observed', 'Observed flood of the report chosen'),
 
   'POST /studies/:studyId/surveys': say('survey.sent', 'Survey handed in for'),
@@ -61,6 +63,14 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'GET /runs/:runId/results.xlsx': say('run.resultsTaken', 'Results downloaded as XLSX'),
   'GET /runs/:runId/report.pdf': say('report.taken', 'Report downloaded'),
 
+  'POST /runs/:runId/confidence/convergence': say('taskSet.requested', 'Convergence asked for of'),
+  'POST /runs/:runId/confidence/sensitivity': say('taskSet.requested', 'Sensitivity asked for of'),
+  'POST /runs/:runId/confidence/ensemble': say('taskSet.requested', 'Ensemble asked for of'),
+  'GET /task-sets/:taskSetId/result.csv': say('taskSet.resultTaken', 'Result of a set downloaded'),
+  'GET /task-sets/:taskSetId/members/:taskId/case.json': say(
+    'taskSet.caseTaken',
+    'Case file of a member downloaded',
+  ),
   'POST /task-sets/:taskSetId/cancel': say('taskSet.cancelled', 'Set of computations cancelled'),
   'POST /task-sets/:taskSetId/retry': say(
     'taskSet.retried',
@@ -78,6 +88,10 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'POST /runs/:runId/review/issue': say('run.issued', 'Issued'),
   'POST /runs/:runId/review/withdraw': say('run.withdrawn', 'Withdrawn'),
   'POST /runs/:runId/review/outlet-probe': say('review.probed', 'Second run for the outlet'),
+
+  'POST /verification-cases/runs': say('taskSet.requested', 'Published cases asked for'),
+  'GET /verification-cases/annex.pdf': say('proof.taken', 'Annex of published cases downloaded'),
+  'GET /verification-cases/values.csv': say('proof.taken', 'Values of a published case downloaded'),
 
   'GET /issued/:runId/report.pdf': say('report.taken', 'Issued report downloaded'),
   'POST /issued/:runId/read': say('issued.read', 'Confirmed as read'),

@@ -4,6 +4,7 @@ import { auditRoutes } from './audit';
 import { calibrationRoutes } from './calibration';
 import { observationRoutes } from './observations';
 import { authRoutes } from './auth';
+import { confidenceRoutes } from './confidence';
 import { healthRoutes } from './health';
 import { invitationRoutes } from './invitations';
 import { issuedRoutes } from './issued';
@@ -22,6 +23,7 @@ import { taskSetRoutes } from './taskSets';
 import { templateRoutes } from './templates';
 import { userRoutes } from './users';
 import { verificationRoutes } from './verification';
+import { verificationCaseRoutes } from './verificationCases';
 
 /** Every module of routes; each writes its full addresses below /api. A new one is one line. */
 export const ROUTES: ((services: Services) => Router)[] = [
@@ -41,10 +43,12 @@ export const ROUTES: ((services: Services) => Router)[] = [
   surveyRoutes,
   tableRoutes,
   taskSetRoutes,
+  confidenceRoutes,
   templateRoutes,
   reviewRoutes,
   reportRoutes,
   issuedRoutes,
   verificationRoutes,
+  verificationCaseRoutes,
   auditRoutes,
 ];

@@ -104,6 +104,14 @@ export function buildFindTaskSets({ models, sequelize }: Platform) {
       return unpackJson<Outcome>(gathered.result);
     },
 
+    /** What one member was given; null where it is none of the set's. */
+    async payload<Payload>({ id }: TaskSetModel, taskId: number) {
+      const where = { id: taskId, setId: id, part: 'member' as const };
+      const attributes = ['id', 'label', 'payload'];
+      const task = await Task.unscoped().findOne({ where, attributes });
+      return task && { label: task.label, payload: await unpackJson<Payload>(task.payload) };
+    },
+
     /** Payloads and results of the members; `result` is null where one has none. */
     async members<Payload, Result>({ id }: TaskSetModel) {
       const rows = await Task.unscoped().findAll({

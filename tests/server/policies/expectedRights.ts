@@ -78,5 +78,7 @@ export const EXPECTED_RIGHTS: Record<Action, Record<Persona, Answer>> = {
   'issued.list': row('      4     y   y   4      4    4      y      4'),
   'issued.report': row('    4     y   y   4      4    4      y      4'),
   'issued.confirm': row('   4     4   4   4      4    4      y      4'),
+  'verificationCase.read': row('3 y   y   3      3    3      3      3'),
+  'verificationCase.run': row(' 3 y   y   3      3    3      3      3'),
   'audit.read': row('       y     3   3   3      3    3      3      3'),
 };

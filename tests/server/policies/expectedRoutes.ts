@@ -46,6 +46,8 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'DELETE /gauges/:gaugeId': 'observation.change',
   'GET /runs/:runId/residuals': 'calibration.read',
   'PUT /runs/:runId/observed': 'calibration.change',
+  'POST /runs/:runId/calibrations': 'taskSet.request',
+  'POST /task-sets/:taskSetId/scenario': 'calibration.change',
 
   'GET /studies/:studyId/surveys': 'survey.list',
   'POST /studies/:studyId/surveys': 'survey.send',
@@ -88,6 +90,12 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /runs/:runId/results.csv': 'run.read',
   'GET /runs/:runId/results.xlsx': 'run.read',
 
+  'GET /runs/:runId/confidence': 'taskSet.read',
+  'POST /runs/:runId/confidence/convergence': 'taskSet.request',
+  'POST /runs/:runId/confidence/sensitivity': 'taskSet.request',
+  'POST /runs/:runId/confidence/ensemble': 'taskSet.request',
+  'GET /task-sets/:taskSetId/result.csv': 'taskSet.read',
+  'GET /task-sets/:taskSetId/members/:taskId/case.json': 'taskSet.read',
   'GET /studies/:studyId/task-sets': 'taskSet.read',
   'GET /task-sets/:taskSetId': 'taskSet.read',
   'GET /task-sets/:taskSetId/result': 'taskSet.read',
@@ -115,6 +123,12 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /issued/:runId/report.pdf': 'issued.report',
   'POST /issued/:runId/read': 'issued.confirm',
   'GET /verification/:code': 'public',
+
+  'GET /verification-cases': 'verificationCase.read',
+  'GET /verification-cases/annex.pdf': 'verificationCase.read',
+  'GET /verification-cases/result': 'verificationCase.read',
+  'GET /verification-cases/values.csv': 'verificationCase.read',
+  'POST /verification-cases/runs': 'verificationCase.run',
 
   'GET /audit': 'audit.read',
   'GET /audit.csv': 'audit.read',

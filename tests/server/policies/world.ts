@@ -130,6 +130,7 @@ export async function buildWorld(services: Services): Promise<World> {
       runId: run.id,
       pointId,
       taskSetId: taskSet.id,
+      taskId: 1,
     },
   };
 }
