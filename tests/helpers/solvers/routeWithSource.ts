@@ -71,7 +71,7 @@ export function routeWithSource(
     state.placeAtStage(i + 1, start.stage);
     flow[i + 1] = start.flow;
   });
-  for (let time = 0; time < duration; ) {
+  for (let time = 0; time < duration;) {
     const dt = stepTowards(time, duration, timeStep(rhs(time), time));
     time = dt === duration - time ? duration : time + dt;
     steps.predict(dt);
@@ -81,5 +81,10 @@ export function routeWithSource(
     } else steps.accept(dt);
   }
   const cells = (values: Float64Array) => [...values.subarray(1, n + 1)];
-  return { chainage: [...grid.chainage], stage: cells(stage), area: cells(area), flow: cells(flow) };
+  return {
+    chainage: [...grid.chainage],
+    stage: cells(stage),
+    area: cells(area),
+    flow: cells(flow),
+  };
 }
