@@ -107,6 +107,10 @@ export const POLICIES = table({
   },
   'issued.confirm': { grants: { client: both(asClient, issued) }, refusal: 'notFound' },
 
+  // Published cases: what the solver is worth
+  'verificationCase.read': { grants: engineers, refusal: 'forbidden' },
+  'verificationCase.run': { grants: engineers, refusal: 'forbidden' },
+
   // The audit trail of the firm
   'audit.read': { grants: { administrator: inFirm }, refusal: 'forbidden' },
 });

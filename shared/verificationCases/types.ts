@@ -1,3 +1,5 @@
+import type { TaskSetRow, TaskState } from '../tasks/types';
+
 /** Cases with published answers, routed by the solver that routes the floods. SI throughout. */
 
 export const CASE_GROUPS = ['still', 'dam', 'states', 'steady', 'waves'] as const;
@@ -97,4 +99,48 @@ export interface VerificationResult {
   curves: CaseCurves;
   /** s of computing, all grids */
   seconds: number;
+}
+
+/** Of a result, what a list shows. */
+export interface VerificationSummary {
+  within: boolean;
+  solver: string;
+  /** Computed by the version that routes the floods today. */
+  isCurrent: boolean;
+  computedAt: string;
+  requestedBy: string;
+  /** s of computing */
+  seconds: number;
+  /** Norms on the finest grid. */
+  stage: ErrorNorms;
+  flow: ErrorNorms;
+}
+
+/** A case with how its last computation stands, and what the last finished one gave. */
+export interface VerificationCaseRow extends VerificationCase {
+  latest: {
+    state: TaskState;
+    /** 0..1 */
+    progress: number;
+    failure: string | null;
+    taskSetId: number;
+    at: string | null;
+  } | null;
+  result: VerificationSummary | null;
+}
+
+/** `GET /api/verification-cases`. */
+export interface VerificationList {
+  /** The version that routes the floods today. */
+  solver: string;
+  cases: VerificationCaseRow[];
+  /** Sets under way, newest first. */
+  open: TaskSetRow[];
+}
+
+/** `GET /api/verification-cases/result?caseId=…`. */
+export interface VerificationDetail {
+  solver: string;
+  row: VerificationCaseRow;
+  result: VerificationResult | null;
 }

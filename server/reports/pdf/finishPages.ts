@@ -8,11 +8,11 @@ const MARKS: Record<Standing, { word: string; line: string } | null> = {
   withdrawn: { word: 'WITHDRAWN', line: 'WITHDRAWN – not to be relied on' },
 };
 
-/** Foot lines with n of m, and the mark across every page that does not stand as signed. */
-export function finishPages(sheet: Sheet, standing: Standing, foot: string): void {
+/** Foot lines with n of m, and the mark across every page that does not stand as signed; null: of what nobody signs. */
+export function finishPages(sheet: Sheet, standing: Standing | null, foot: string): void {
   const { doc, left, width } = sheet;
   const { start, count } = doc.bufferedPageRange();
-  const mark = MARKS[standing];
+  const mark = standing && MARKS[standing];
   for (let k = 0; k < count; k++) {
     doc.switchToPage(start + k);
     // Text below the margin would otherwise begin a page.
