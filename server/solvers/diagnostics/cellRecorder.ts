@@ -12,7 +12,9 @@ export interface CellRecorder {
 }
 
 export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecorder {
-  const { n, area, flow: cellFlow, stage, bed, dryDepth, faceFlow } = workspace;
+  const { n, flow: cellFlow, stage, bed, dryDepth, faceFlow } = workspace;
+  // Velocity is that of what flows.
+  const area = workspace.parts?.flowArea ?? workspace.area;
   const initialStage = new Float64Array(n);
   const peakStage = new Float64Array(n).fill(-Infinity);
   const peakStageTime = new Float64Array(n);

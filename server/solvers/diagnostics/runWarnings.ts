@@ -1,5 +1,6 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import type { RunWarning, SectionResult } from '../../../shared/case/resultFile';
+import { LEAST_SPREAD } from '../geometry/parts';
 import type { Grid } from '../geometry/grid';
 import type { Workspace } from '../workspace';
 
@@ -20,7 +21,7 @@ export function createRunWarnings(
   workspace: Workspace,
   grid: Grid,
 ): RunWarnings {
-  const { n, dx, area, flow, stage, celerity, faceFlow, width } = workspace;
+  const { n, dx, area, flow, stage, celerity, faceFlow, parts } = workspace;
   const { sections, downstream } = caseFile;
   const warnings: RunWarning[] = [];
   const fast = { length: 0, time: 0, chainage: 0 };
@@ -58,12 +59,22 @@ export function createRunWarnings(
     }
   }
 
+  /** Flow (m³/s) at which a wave against flow `q` would stand in cell i. */
+  function criticalFlow(i: number, q: number): number {
+    if (!parts) return area[i] * celerity[i];
+    const { flowArea, beta, spread } = parts;
+    const c2 = celerity[i] ** 2;
+    const v = q / flowArea[i];
+    const wave = Math.sqrt(Math.max(LEAST_SPREAD * c2, c2 + spread[i] * v * v));
+    return (flowArea[i] * wave) / beta[i];
+  }
+
   function watchSpeed(time: number): void {
     let count = 0;
     let first = 0;
     for (let i = 1; i <= n; i++) {
       const q = 0.5 * Math.abs(faceFlow[i - 1] + faceFlow[i]);
-      if (area[i] > 0 && flow[i] !== 0 && q > area[i] * celerity[i] * 1.001) {
+      if (area[i] > 0 && flow[i] !== 0 && q > 1.001 * criticalFlow(i, q)) {
         if (count === 0) first = i;
         count++;
       }
@@ -83,9 +94,8 @@ export function createRunWarnings(
     if (!isControlled || !(area[outletSection] > 0) || Number.isFinite(outlet.supercriticalFrom)) {
       return;
     }
-    const c2 = (workspace.gravity * area[n]) / width[n];
-    const u = flow[n] / area[n];
-    if (u > 0 && u * u > 1.01 * c2 && faceFlow[n] > 0) outlet.supercriticalFrom = time;
+    const most = Math.sqrt(1.01) * criticalFlow(n, flow[n]);
+    if (flow[n] > most && faceFlow[n] > 0) outlet.supercriticalFrom = time;
   }
 
   return {

@@ -1,6 +1,8 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import { ARRIVAL_RISE, type SectionResult } from '../../../shared/case/resultFile';
 import { createCellTables } from '../geometry/cellTables';
+import { createParts } from '../geometry/parts';
+import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Grid } from '../geometry/grid';
 import { sectionShape } from '../geometry/sectionProperties';
 import { LEVEL_FIELDS, TABLE_STRIDE, writeSectionTable } from '../geometry/sectionTable';
@@ -16,7 +18,7 @@ export interface SectionRecorder {
 }
 
 export function createSectionRecorder(
-  { sections }: CaseFile,
+  { sections, numerics }: CaseFile,
   workspace: Workspace,
   grid: Grid,
 ): SectionRecorder {
@@ -26,12 +28,16 @@ export function createSectionRecorder(
   const levels = new Int32Array(count);
   const level = new Int32Array(count);
   const bed = new Float64Array(count);
-  sections.forEach((section, k) => {
-    const shape = sectionShape(section);
+  const shapes = sections.map(sectionShape);
+  shapes.forEach((shape, k) => {
     bed[k] = shape.bed;
     levels[k] = writeSectionTable(shape, table, k * TABLE_STRIDE);
   });
-  const tables = createCellTables({ table, levels, level, gravity });
+  const isCompound = numerics.momentum === 'compound';
+  const parts = createParts({ shapes, isCompound }, table, levels);
+  const surveyed = { table, levels, level, gravity, parts, area: new Float64Array(count) };
+  const tables = createCellTables(surveyed);
+  const waves = createSectionWaves(surveyed, tables);
   const places = sections.map((section) => placeOf(section, grid));
 
   const now = { stage: 0, flow: 0, area: 0, velocity: 0 };
@@ -74,7 +80,16 @@ export function createSectionRecorder(
     level[k] = (tables.rowAtStage(k, eta) - k * TABLE_STRIDE) / LEVEL_FIELDS;
     now.area = tables.areaAt(k, eta);
     const inCells = (1 - weight) * cellFlow[left] + weight * cellFlow[right];
-    now.velocity = waterVelocity(now.flow, inCells, now.area);
+    now.velocity = waterVelocity(now.flow, inCells, waves.flowAreaAt(k, eta, now.area));
+  }
+
+  /** 1 where a wave against the flow stands. */
+  function froude(k: number): number {
+    const { stage: eta, area, velocity } = now;
+    if (!(area > 0)) return 0;
+    const q = velocity * waves.flowAreaAt(k, eta, area);
+    const drift = parts ? waves.driftAt(k, eta, area, q) : velocity;
+    return Math.abs(drift) / waves.celerityAt(k, eta, area, q);
   }
 
   return {
@@ -103,15 +118,12 @@ export function createSectionRecorder(
         look(k);
         const result = results[k];
         const { velocity } = now;
-        const width = tables.widthAt(k, now.stage);
         result.stage.push(now.stage);
         result.depth.push(now.stage - bed[k]);
         result.flow.push(now.flow);
         result.area.push(now.area);
         result.velocity.push(velocity);
-        result.froude.push(
-          now.area > 0 ? Math.abs(velocity) / Math.sqrt((gravity * now.area) / width) : 0,
-        );
+        result.froude.push(froude(k));
       }
     },
     results() {

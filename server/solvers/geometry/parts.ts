@@ -25,7 +25,7 @@ export const LEAST_SPREAD = 0.04;
 
 /** Rewrites the tables of all sections of a grid for what flows. */
 export function createParts(
-  { shapes, isCompound }: ShapedGrid,
+  { shapes, isCompound }: Pick<ShapedGrid, 'shapes' | 'isCompound'>,
   table: Float64Array,
   levels: Int32Array,
 ): Parts | null {

@@ -25,13 +25,15 @@ export interface SectionWaves {
   cellFlowArea: Float64Array;
 }
 
-export function createSectionWaves(workspace: Workspace, tables: CellTables): SectionWaves {
+type Surveyed = Pick<Workspace, 'gravity' | 'area' | 'table' | 'parts'>;
+
+export function createSectionWaves(workspace: Surveyed, tables: CellTables): SectionWaves {
   return workspace.parts
     ? partedWaves(workspace, tables, workspace.parts)
     : evenWaves(workspace, tables);
 }
 
-function evenWaves({ gravity, area: cellArea }: Workspace, tables: CellTables): SectionWaves {
+function evenWaves({ gravity, area: cellArea }: Surveyed, tables: CellTables): SectionWaves {
   const celerityAt = (i: number, stage: number, area: number): number =>
     area > 0 ? Math.sqrt((gravity * area) / tables.widthAt(i, stage)) : 0;
   return {
@@ -47,11 +49,7 @@ function evenWaves({ gravity, area: cellArea }: Workspace, tables: CellTables): 
   };
 }
 
-function partedWaves(
-  { gravity, table }: Workspace,
-  tables: CellTables,
-  parts: Parts,
-): SectionWaves {
+function partedWaves({ gravity, table }: Surveyed, tables: CellTables, parts: Parts): SectionWaves {
   const part = emptyPart();
   const { sqrt, max } = Math;
   /** Reads section i at a stage into `part`; tells whether there is water. */
