@@ -1,11 +1,11 @@
-import { spawn, type ChildProcess } from 'node:child_process';
-import path from 'node:path';
+import type { ChildProcess } from 'node:child_process';
 import { Op } from 'sequelize';
 import type { CaseFile } from '../../../shared/case/caseFile';
 import type { RunSeries } from '../../../shared/runs/types';
 import { routeCase } from '../../../server/solvers';
 import type { UserModel } from '../../../server/models/User';
 import { buildUser } from '../../helpers/factories/buildUser';
+import { killProcess, startServerProcess } from '../../helpers/serverProcess';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { buildRunnable } from './buildRunnable';
 import { readEvents } from './eventReader';
@@ -13,7 +13,6 @@ import { untilEnded } from './untilEnded';
 
 jest.setTimeout(300_000);
 
-const ROOT = path.resolve(__dirname, '../../..');
 /** Some seconds of computing: time enough to be killed in the middle. */
 const SECONDS_LONG = { cellSize: 10, duration: 100_000, outputInterval: 1000 };
 
@@ -28,33 +27,13 @@ beforeAll(async () => {
   user = await buildUser(server.services, ['modeller']);
   api = await server.signInAs(user);
 });
-afterEach(() => Promise.all(children.splice(0).map(kill)));
+afterEach(() => Promise.all(children.splice(0).map(killProcess)));
 afterAll(() => server.stop());
 
 function startProcess(): ChildProcess {
-  const { databaseUrl, dataDir } = server.services.env;
-  const child = spawn(process.execPath, ['--require', 'tsx/cjs', 'server/index.ts'], {
-    cwd: ROOT,
-    env: {
-      PATH: process.env.PATH,
-      DATABASE_URL: databaseUrl,
-      DATA_DIR: dataDir,
-      PORT: '0',
-      WORKERS: '1',
-      LOG_LEVEL: 'silent',
-    },
-    stdio: 'ignore',
-  });
+  const child = startServerProcess(server);
   children.push(child);
   return child;
-}
-
-/** kill -9: nothing of the process gets a chance to tidy up. */
-async function kill(child: ChildProcess): Promise<void> {
-  if (child.exitCode !== null || child.signalCode !== null) return;
-  const gone = new Promise((resolve) => child.once('exit', resolve));
-  child.kill('SIGKILL');
-  await gone;
 }
 
 const find = (id: number) => server.services.models.Run.findByPk(id, { rejectOnEmpty: true });
@@ -86,7 +65,7 @@ test('killed in the middle, the run finishes after the next start, once, with th
   );
   const first = startProcess();
   await untilUnderWay(id);
-  await kill(first);
+  await killProcess(first);
   expect(await find(id)).toMatchObject({ state: 'running', attempts: 1 });
   expect(await stored(id)).toEqual([]);
 
@@ -126,7 +105,7 @@ test('of two servers one dies; the other finishes what it left, and each run onc
   const underWay = () =>
     server.services.models.Run.count({ where: { state: 'running', progress: { [Op.gt]: 0.02 } } });
   while ((await underWay()) < 2) await new Promise((resolve) => setTimeout(resolve, 20));
-  await kill(doomed);
+  await killProcess(doomed);
   const runs = [];
   for (const id of ids) runs.push(await untilEnded(server.services, id, 240));
   expect(runs.map((run) => run.state)).toEqual(['routed', 'routed', 'routed']);
@@ -142,7 +121,7 @@ test('a run that takes its server down a third time is not begun again, and says
   for (let attempt = 1; attempt <= 3; attempt++) {
     const child = startProcess();
     await untilUnderWay(id, attempt);
-    await kill(child);
+    await killProcess(child);
     // The lease of the dead need not be waited out three times.
     await server.services.models.Run.update({ leaseUntil: new Date(0) }, { where: { id } });
   }
