@@ -7,6 +7,8 @@ interface StructureBase {
   id: string;
   /** Where it stands (m): the boundary between two cells nearest to it */
   chainage: number;
+  /** Where its numbers come from, for the reader of a report; the solver does not look at it */
+  note?: string;
 }
 
 /** Water that flows over a crest, either way. */

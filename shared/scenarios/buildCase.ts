@@ -1,7 +1,8 @@
-import { CASE_DEFAULTS, CASE_FORMAT, type CaseFile } from '../case/caseFile';
+import { CASE_DEFAULTS, CASE_FORMAT, type CaseFile, type RoughnessFactor } from '../case/caseFile';
 import type { Section } from '../surveys/types';
 import { inflowOf } from './hydrographs';
-import type { ScenarioBody } from './schemas';
+import type { RoughnessFactorBody, ScenarioBody } from './schemas';
+import { buildStructure } from './structures/buildStructure';
 
 /**
  * The case file of a scenario: everything that its run depends on. The scenario must be free of faults
@@ -32,7 +33,10 @@ export function buildCase(
       times,
       flows,
     })),
-    structures: [],
+    structures: (body.structures ?? []).map((structure, i) =>
+      buildStructure(structure, `structures[${i}]`),
+    ),
+    ...(body.roughnessFactors?.length && { roughnessFactors: factorsOf(body.roughnessFactors) }),
     initial: initialOf(body),
     numerics: {
       cellSize: given(numerics.cellSize, 'numerics.cellSize'),
@@ -45,12 +49,31 @@ export function buildCase(
   };
 }
 
+const factorsOf = (factors: RoughnessFactorBody[]): RoughnessFactor[] =>
+  factors.map(({ from, to, part, depths, factors: values }, i) => ({
+    from: given(from, `roughnessFactors[${i}].from`),
+    to: given(to, `roughnessFactors[${i}].to`),
+    part,
+    depths,
+    factors: values,
+  }));
+
 function upstreamOf({ upstream }: ScenarioBody): CaseFile['upstream'] {
   if (upstream.kind === 'wall') return { kind: 'wall' };
   if (upstream.kind === 'stage')
     return { kind: 'stage', times: upstream.times, stages: upstream.stages };
   const inflow = inflowOf(upstream);
   if (!inflow) throw new Error('The scenario is incomplete: upstream');
+  if (upstream.kind === 'reservoir') {
+    const { storage, initialStage, spillway } = upstream;
+    return {
+      kind: 'reservoir',
+      ...storage,
+      initialStage: given(initialStage, 'upstream.initialStage'),
+      inflow,
+      ...(spillway.stages.length > 0 && { spillway }),
+    };
+  }
   return { kind: 'inflow', ...inflow };
 }
 

@@ -4,7 +4,9 @@ import { checkDownstream } from './checks/checkDownstream';
 import { checkInitial } from './checks/checkInitial';
 import { checkLaterals } from './checks/checkLaterals';
 import { checkNumerics } from './checks/checkNumerics';
+import { checkRoughness } from './checks/checkRoughness';
 import { checkReachOf } from './checks/checkReachOf';
+import { checkStructures } from './checks/checkStructures';
 import { checkUpstream } from './checks/checkUpstream';
 import { Findings } from './checks/Findings';
 import { reachFacts } from './checks/reachFacts';
@@ -25,6 +27,8 @@ export function checkScenario(
     const reach = reachFacts(sections);
     checkUpstream(body, reach, findings);
     checkLaterals(body, reach, findings);
+    checkStructures(body, reach, findings);
+    checkRoughness(body, reach, findings);
     checkDownstream(body, reach, findings);
     checkInitial(body, reach, findings);
     checkNumerics(body, reach, findings);

@@ -64,9 +64,10 @@ function gammaShape(m: number): [number, number][] | null {
   return [...shape, [shape.length / GAMMA_STEPS_TO_PEAK, 0]];
 }
 
-/** The inflow of an upstream end of any kind; null where it is no inflow or not complete. */
+/** The inflow of an upstream end of any kind, of a reservoir into it; null where it is no inflow or not complete. */
 export function inflowOf(upstream: Upstream): FlowSeries | null {
   if (upstream.kind === 'generated') return generateHydrograph(upstream);
+  if (upstream.kind === 'reservoir') return inflowOf(upstream.inflow);
   if (upstream.kind !== 'table' || upstream.times.length === 0) return null;
   return { times: upstream.times, flows: upstream.flows };
 }

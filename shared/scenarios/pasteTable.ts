@@ -88,6 +88,7 @@ export function pasteTable(text: string, options: TableOptions): TableReading {
   return {
     times: keep ? (times.seconds as number[]) : [],
     values: keep ? (values as number[]) : [],
+    ...(keep && times.startsAt !== undefined && { startsAt: times.startsAt }),
     understood: `${rows.length.toLocaleString('en-GB')} rows; ${times.understood}; values in ${unit.name}${decimal.mark === 'comma' ? '; decimal comma' : ''}.`,
     faults: faults.sort((a, b) => lineOf(a) - lineOf(b)).slice(0, LIMITS.upload.faults),
   };

@@ -54,6 +54,8 @@ export function newScenario(name: string, reachId: number, sections: Sections): 
       gammaExponent: USUAL_GAMMA_EXPONENT,
     },
     laterals: [],
+    structures: [],
+    roughnessFactors: [],
     downstream: { kind: 'normalDepth', slope: outletSlope },
     initial: { kind: 'steady' },
     numerics: { cellSize, duration, outputInterval, order: 2, courant: null, dryDepth: null },

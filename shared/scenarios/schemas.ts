@@ -1,17 +1,12 @@
-import { array, lazy, mixed, number, object, string, type InferType } from 'yup';
+import { array, number, object, string, type InferType, type ISchema } from 'yup';
 import { LIMITS } from '../limits';
+import { byKind, real, series, volumes } from './fields';
+import { structureKinds, type StructureBody } from './structures/schemas';
 
 /**
  * A scenario as it is typed and stored: SI. It may be incomplete (numbers null): it is saved as it is, and
  * `checkScenario` says what is missing before it can run. The schema holds shapes and bounds only.
  */
-const real = () => number().min(-1e9).max(1e9).nullable().default(null);
-const series = () =>
-  array()
-    .of(number().min(-1e9).max(1e9).required())
-    .max(LIMITS.hydrographPoints)
-    .default([])
-    .required();
 
 /** Shape functions are in `hydrographs.ts`; all flows include the base flow. Times in s, flows in m³/s. */
 const generated = object({
@@ -37,14 +32,20 @@ const stageTable = object({
 }).noUnknown();
 const wall = object({ kind: string().oneOf(['wall']).required() }).noUnknown();
 
-const byKind = <T extends Record<string, { isType: unknown } | object>>(kinds: T) =>
-  lazy((value: { kind?: string } | undefined) => {
-    const schema = kinds[value?.kind ?? ''];
-    const choose = `Choose one of: ${Object.keys(kinds).join(', ')}.`;
-    return (schema ?? mixed().oneOf([], choose).required(choose)) as never;
-  });
+/**
+ * A level pool behind a dam at the first section; what stands in the dam are the structures at that chainage. Its inflow
+ * is a flood like any other.
+ */
+const reservoir = object({
+  kind: string().oneOf(['reservoir']).required(),
+  storage: object({ stages: series(), volumes: volumes() }).noUnknown().required(),
+  initialStage: real(),
+  inflow: byKind({ generated, table }),
+  /** Flow beside the structures by stage of the pool; empty: none. */
+  spillway: object({ stages: series(), flows: series() }).noUnknown().required(),
+}).noUnknown();
 
-const upstreamKinds = { generated, table, stage: stageTable, wall };
+const upstreamKinds = { generated, table, stage: stageTable, reservoir, wall };
 const downstreamKinds = {
   normalDepth: object({
     kind: string().oneOf(['normalDepth']).required(),
@@ -86,6 +87,15 @@ const lateral = object({
   flows: series(),
 }).noUnknown();
 
+/** Multiplies Manning's n of a stretch; several depths make it vary with depth, one keeps it. */
+const roughnessFactor = object({
+  from: real(),
+  to: real(),
+  part: string().oneOf(['all', 'channel', 'overbank']).default('all').required(),
+  depths: series(),
+  factors: series(),
+}).noUnknown();
+
 const numerics = object({
   cellSize: real(),
   duration: real(),
@@ -99,7 +109,13 @@ export type Upstream =
   | InferType<typeof generated>
   | InferType<typeof table>
   | InferType<typeof stageTable>
+  | ReservoirEnd
   | InferType<typeof wall>;
+/** The inflow of a reservoir: of a shape, or a table. */
+export type ReservoirInflow = InferType<typeof generated> | InferType<typeof table>;
+export type ReservoirEnd = Omit<InferType<typeof reservoir>, 'inflow'> & {
+  inflow: ReservoirInflow;
+};
 export type Downstream = {
   [K in keyof typeof downstreamKinds]: InferType<(typeof downstreamKinds)[K]>;
 }[keyof typeof downstreamKinds];
@@ -107,6 +123,7 @@ export type InitialState = {
   [K in keyof typeof initialKinds]: InferType<(typeof initialKinds)[K]>;
 }[keyof typeof initialKinds];
 export type LateralInflow = InferType<typeof lateral>;
+export type RoughnessFactorBody = InferType<typeof roughnessFactor>;
 export type NumericsSettings = InferType<typeof numerics>;
 
 export interface ScenarioBody {
@@ -117,6 +134,10 @@ export interface ScenarioBody {
   note: string;
   upstream: Upstream;
   laterals: LateralInflow[];
+  /** Left out in scenarios that were stored before there were any. */
+  structures?: StructureBody[];
+  /** The same. */
+  roughnessFactors?: RoughnessFactorBody[];
   downstream: Downstream;
   initial: InitialState;
   numerics: NumericsSettings;
@@ -136,6 +157,16 @@ export const scenarioSchema = object({
   note: string().trim().max(LIMITS.textLong).default(''),
   upstream: byKind(upstreamKinds),
   laterals: array().of(lateral.required()).max(LIMITS.laterals).default([]).required(),
+  structures: array()
+    .of(byKind(structureKinds) as unknown as ISchema<StructureBody>)
+    .max(LIMITS.structures)
+    .default([])
+    .required(),
+  roughnessFactors: array()
+    .of(roughnessFactor.required())
+    .max(LIMITS.roughnessFactors)
+    .default([])
+    .required(),
   downstream: byKind(downstreamKinds),
   initial: byKind(initialKinds),
   numerics: numerics.required(),

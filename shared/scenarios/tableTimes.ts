@@ -24,6 +24,8 @@ interface Options {
 interface Times {
   /** s; null where the line has none. */
   seconds: (number | null)[];
+  /** Clock time of the first, ISO 8601 in UTC, where there are dates. */
+  startsAt?: string;
   understood: string;
 }
 
@@ -83,8 +85,10 @@ function dateTimes(rows: TimeRow[], { unitSystem }: Options, faults: Fault[]): T
   const order = rows.some(({ time }) => DATE.test(time) && !ISO.test(time))
     ? `, ${monthFirst ? 'month' : 'day'} first`
     : '';
+  const first = seconds.find((value) => value !== null);
   return {
     seconds: fromFirst(seconds),
+    ...(first == null ? {} : { startsAt: new Date(first * 1000).toISOString() }),
     understood: `dates and times${order}, counted from the first`,
   };
 }

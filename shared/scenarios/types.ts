@@ -29,6 +29,8 @@ export interface Scenario extends ScenarioRow {
 export interface TableReading {
   times: number[];
   values: number[];
+  /** Clock time of the first value, ISO 8601 in UTC, where the table has dates. */
+  startsAt?: string;
   /** How the columns were understood, in words for the person. */
   understood: string;
   faults: Fault[];

@@ -30,7 +30,9 @@ export function checkStructures(
     const path = `structures[${k}]`;
     const kind = faults.kind(path, structure, Object.keys(CHECKS));
     if (kind === null || !isRecord(structure)) return;
-    CHECKS[kind](faults, path, structure);
+    const { note, ...rest } = structure;
+    if (note !== undefined) faults.text(join(path, 'note'), note, CASE_LIMITS.note);
+    CHECKS[kind](faults, path, rest);
     const { id, chainage } = structure;
     if ('id' in structure && faults.text(join(path, 'id'), id, 100)) {
       const first = ids.get(id);

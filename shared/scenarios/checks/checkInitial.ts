@@ -32,7 +32,7 @@ function checkSteady({ upstream, downstream }: ScenarioBody, findings: Findings)
   if (upstream.kind === 'wall')
     findings.doubt('initial.kind', 'Nothing flows in: steady flow means still or no water.');
   const first = inflowOf(upstream)?.flows[0];
-  if (first === 0)
+  if (first === 0 && upstream.kind !== 'reservoir')
     findings.doubt(
       'initial.kind',
       'The first inflow is nothing, so the reach starts as good as dry. A small base flow is more like a river.',

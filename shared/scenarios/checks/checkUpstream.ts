@@ -1,5 +1,6 @@
-import type { ScenarioBody } from '../schemas';
+import type { ReservoirInflow, ScenarioBody } from '../schemas';
 import { inflowOf, peakOf } from '../hydrographs';
+import { checkReservoir } from './checkReservoir';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
@@ -17,17 +18,13 @@ export function checkUpstream(
 ) {
   switch (upstream.kind) {
     case 'generated':
-      checkGenerated(upstream, findings);
-      break;
     case 'table':
-      checkSeries(findings, {
-        path: 'upstream',
-        names: ['times', 'flows'],
-        columns: [upstream.times, upstream.flows],
-        missing: 'Paste or upload the inflow against time.',
-        first: 'Time',
-        value: notNegative,
-      });
+      checkInflow(upstream, 'upstream', findings);
+      break;
+    case 'reservoir':
+      checkReservoir(upstream, reach, findings, (inflow, path) =>
+        checkInflow(inflow, path, findings),
+      );
       break;
     case 'stage':
       checkSeries(findings, {
@@ -52,43 +49,54 @@ export function checkUpstream(
       'numerics.duration',
       'The run ends before the inflow reaches its peak. Make it longer, or check the times.',
     );
-  if (peak && peak.flow === 0) findings.doubt('upstream.kind', 'The inflow is nothing throughout.');
+  // A reservoir can empty itself on a dry day.
+  if (peak && peak.flow === 0 && upstream.kind !== 'reservoir')
+    findings.doubt('upstream.kind', 'The inflow is nothing throughout.');
+}
+
+/** A flood of a shape or as a table, at the reach or at its reservoir. */
+function checkInflow(inflow: ReservoirInflow, path: string, findings: Findings) {
+  if (inflow.kind === 'generated') return checkGenerated(inflow, path, findings);
+  checkSeries(findings, {
+    path,
+    names: ['times', 'flows'],
+    columns: [inflow.times, inflow.flows],
+    missing: 'Paste or upload the inflow against time.',
+    first: 'Time',
+    value: notNegative,
+  });
 }
 
 function checkGenerated(
   inflow: Extract<ScenarioBody['upstream'], { kind: 'generated' }>,
+  path: string,
   findings: Findings,
 ) {
   const { baseFlow, peakFlow } = inflow;
-  const hasBase = findings.number(
-    'upstream.baseFlow',
-    baseFlow,
-    'Give the base flow; 0 for none.',
-    {
-      when: (flow) => flow < 0,
-      say: 'Base flow cannot be negative.',
-    },
-  );
-  const hasPeak = findings.number('upstream.peakFlow', peakFlow, 'Give the peak flow.', {
+  const hasBase = findings.number(`${path}.baseFlow`, baseFlow, 'Give the base flow; 0 for none.', {
+    when: (flow) => flow < 0,
+    say: 'Base flow cannot be negative.',
+  });
+  const hasPeak = findings.number(`${path}.peakFlow`, peakFlow, 'Give the peak flow.', {
     when: (flow) => flow <= 0,
     say: 'Peak flow is above 0.',
   });
   if (hasBase && hasPeak && peakFlow! < baseFlow!)
-    findings.fault('upstream.peakFlow', 'The peak includes the base flow and cannot be below it.');
-  findings.number('upstream.timeToPeak', inflow.timeToPeak, 'Give the time from start to peak.', {
+    findings.fault(`${path}.peakFlow`, 'The peak includes the base flow and cannot be below it.');
+  findings.number(`${path}.timeToPeak`, inflow.timeToPeak, 'Give the time from start to peak.', {
     when: (time) => time <= 0 || time > MAX_TIME_TO_PEAK,
     say: 'Time to peak is above 0 and at most 100 days.',
   });
   if (inflow.shape === 'triangle')
     findings.number(
-      'upstream.recessionRatio',
+      `${path}.recessionRatio`,
       inflow.recessionRatio,
       'Give the length of the recession over that of the rise; 1.67 is usual.',
       { when: (ratio) => ratio <= 0 || ratio > 100, say: 'The ratio lies between 0 and 100.' },
     );
   if (inflow.shape === 'gamma')
     findings.number(
-      'upstream.gammaExponent',
+      `${path}.gammaExponent`,
       inflow.gammaExponent,
       'Give the exponent of the shape; 3.7 is usual.',
       { when: (m) => m < 0.1 || m > 100, say: 'The exponent lies between 0.1 and 100.' },
