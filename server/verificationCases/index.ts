@@ -2,6 +2,7 @@ import { backwaters } from './cases/backwaters';
 import { bores } from './cases/bores';
 import { bumps } from './cases/bumps';
 import { damBreaks } from './cases/damBreaks';
+import { floodFront } from './cases/floodFront';
 import { levelPoolBreach } from './cases/levelPoolBreach';
 import { naturalRivers } from './cases/naturalRivers';
 import { parabolicTrough } from './cases/parabolicTrough';
@@ -26,6 +27,7 @@ export const PUBLISHED_CASES: readonly PublishedCase[] = [
   ...backwaters,
   ...naturalRivers,
   parabolicTrough,
+  floodFront,
   ...bores,
   poolOverWeir,
   levelPoolBreach,

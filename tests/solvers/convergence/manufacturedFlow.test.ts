@@ -1,50 +1,14 @@
-import { buildCase, GRAVITY } from '../../helpers/solvers/caseBuilders';
-import { errorNorms } from '../../helpers/solvers/errorNorms';
-import {
-  LENGTH,
-  manufacturedFlow,
-  type ManufacturedFlow,
-} from '../../helpers/solvers/manufacturedFlow';
+import { manufacturedErrors } from '../../helpers/solvers/manufacturedErrors';
+import { manufacturedFlow, type ManufacturedFlow } from '../../helpers/solvers/manufacturedFlow';
 import { orderTable } from '../../helpers/solvers/orderTable';
-import { routeWithSource } from '../../helpers/solvers/routeWithSource';
 
-const DURATION = 2000;
-
-function errorsOn(exact: ManufacturedFlow, cells: number, order: 1 | 2) {
-  const middles = Array.from({ length: cells }, (_, i) => ((i + 0.5) * LENGTH) / cells);
-  const times = Array.from({ length: cells + 1 }, (_, i) => (i * DURATION) / cells);
-  const sources = exact.sourcesAt(middles, GRAVITY);
-  const found = routeWithSource(
-    buildCase({
-      sections: [0, ...middles, LENGTH].map(exact.section),
-      upstream: { kind: 'inflow', times, flows: times.map((time) => exact.flow(0, time).value) },
-      downstream: {
-        kind: 'stage',
-        times,
-        stages: times.map((time) => exact.stage(LENGTH, time).value),
-      },
-      initial: { kind: 'still', stage: 0 },
-      numerics: { cellSize: LENGTH / cells, duration: DURATION, outputInterval: DURATION, order },
-    }),
-    {
-      lateral: (i, time) => sources(i, time).lateral,
-      momentum: (i, time) => sources(i, time).momentum,
-    },
-    (x) => ({ stage: exact.stage(x, 0).value, flow: exact.flow(x, 0).value }),
-  );
-  const { chainage, area, flow } = found;
-  return {
-    area: errorNorms(chainage, area, (x) => exact.area(x, DURATION)).mean,
-    flow: errorNorms(chainage, flow, (x) => exact.flow(x, DURATION).value).mean,
-  };
-}
 /** A chosen unsteady flow in a varying river with banks, plains, friction and lateral flow, kept up by sources in both
  *  equations (manufactured solutions, P. J. Roache 2002). A term that is wrong or missing leaves an error that no grid
  *  removes. */
 const GRIDS = [15, 30, 60, 120];
 
 function tableOf(name: string, exact: ManufacturedFlow, order: 1 | 2) {
-  const errors = new Map(GRIDS.map((cells) => [cells, errorsOn(exact, cells, order)]));
+  const errors = new Map(GRIDS.map((cells) => [cells, manufacturedErrors(exact, cells, order)]));
   const of = (key: 'area' | 'flow') =>
     orderTable(
       `Manufactured flow ${name} order ${order} ${key}`,
