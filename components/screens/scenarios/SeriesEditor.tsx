@@ -25,7 +25,7 @@ interface SeriesEditorProps {
   columns: readonly SeriesColumn[];
   /** One array a column, SI. */
   values: readonly (readonly number[])[];
-  onChange: (values: number[][]) => void;
+  onChange: (values: number[][], reading: ColumnsReading) => void;
   read: (text: string) => ColumnsReading;
   write: (values: readonly (readonly number[])[]) => string;
   /** Left out where no file is read. */
@@ -51,7 +51,7 @@ export function SeriesEditor(props: SeriesEditorProps) {
       const found = await readFile!(chosen);
       if (found.faults.length > 0) return found;
       setText(null);
-      onChange(found.columns);
+      onChange(found.columns, found);
       return found;
     },
   });
@@ -60,7 +60,7 @@ export function SeriesEditor(props: SeriesEditorProps) {
   const type = (next: string) => {
     setText(next);
     const found = read(next);
-    if (found.faults.length === 0) onChange(found.columns);
+    if (found.faults.length === 0) onChange(found.columns, found);
   };
   if (disabled && count === 0) return <Txt tone="soft">No values.</Txt>;
   return (

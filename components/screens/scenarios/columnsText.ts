@@ -11,6 +11,8 @@ export interface TextColumn {
 export interface ColumnsReading {
   /** One array a column, SI. */
   columns: number[][];
+  /** Clock time of the first row, where times are dates. */
+  startsAt?: string;
   /** How the text was understood, in words. */
   understood: string;
   faults: Fault[];

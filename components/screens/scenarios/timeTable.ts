@@ -3,15 +3,26 @@ import type { TableReading } from '@/shared/scenarios/types';
 import { fromSi, UNITS, type Quantity, type UnitSystem } from '@/shared/units/units';
 import { plain, type ColumnsReading } from './columnsText';
 
-export type TableQuantity = 'flow' | 'stage';
+export type TableQuantity = 'flow' | 'stage' | 'opening';
 
-export const QUANTITY_OF: Record<TableQuantity, Extract<Quantity, 'flow' | 'elevation'>> = {
-  flow: 'flow',
-  stage: 'elevation',
-};
+export const QUANTITY_OF: Record<
+  TableQuantity,
+  Extract<Quantity, 'flow' | 'elevation' | 'depth'>
+> = { flow: 'flow', stage: 'elevation', opening: 'depth' };
 
-export const asColumns = ({ times, values, understood, faults }: TableReading): ColumnsReading => ({
+/** An opening is read as a stage is: a length. */
+export const readAs = (quantity: TableQuantity): 'flow' | 'stage' =>
+  quantity === 'flow' ? 'flow' : 'stage';
+
+export const asColumns = ({
+  times,
+  values,
+  startsAt,
+  understood,
+  faults,
+}: TableReading): ColumnsReading => ({
   columns: [times, values],
+  ...(startsAt !== undefined && { startsAt }),
   understood,
   faults,
 });
@@ -24,7 +35,7 @@ export const readTimeTable = (
 ): ColumnsReading =>
   text.trim() === ''
     ? { columns: [[], []], understood: '', faults: [] }
-    : asColumns(pasteTable(text, { quantity, unitSystem }));
+    : asColumns(pasteTable(text, { quantity: readAs(quantity), unitSystem }));
 
 /** As it would be typed: hours and the study's unit, named in a heading line so that it reads back the same. */
 export function writeTimeTable(
