@@ -8,9 +8,12 @@ import { createFaceFlow } from './diagnostics/faceFlow';
 import { createRunWarnings } from './diagnostics/runWarnings';
 import { createSectionRecorder } from './diagnostics/sectionRecorder';
 import { createVolumeLedger } from './diagnostics/volumeLedger';
+import { createFastKernel } from './fast/fastKernel';
+import { runsFast } from './fast/runsFast';
 import { createCellState } from './geometry/cellState';
 import { createCellTables } from './geometry/cellTables';
 import { shapedGrid } from './geometry/grid';
+import { createPartedCellState } from './geometry/partedCellState';
 import { setInitialState } from './initial/initialState';
 import { settleInitial } from './initial/settleInitial';
 import { createReferenceKernel } from './kernel';
@@ -19,6 +22,7 @@ import { createRhs } from './rhs';
 import type { RouteOptions } from './routeOptions';
 import { RunFailed } from './runErrors';
 import { createLaterals } from './sources/laterals';
+import { createLocalLosses } from './sources/localLosses';
 import { createStructureRecorder } from './structures/structureRecorder';
 import { createStructureSet } from './structures/structureSet';
 import { outputTimes, stepTowards } from './time/outputTimes';
@@ -41,24 +45,39 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   const order = numerics.order ?? CASE_DEFAULTS.order;
   const courant = numerics.courant ?? CASE_DEFAULTS.courant;
 
+  const isFast = runsFast(caseFile, options);
+
   const grid = shapedGrid(caseFile);
   const workspace = createWorkspace(
     grid,
     caseFile.gravity ?? CASE_DEFAULTS.gravity,
     numerics.dryDepth ?? CASE_DEFAULTS.dryDepth,
+    isFast,
   );
   const tables = createCellTables(workspace);
-  const cellState = createCellState(workspace, tables);
+  const cellState = workspace.parts
+    ? createPartedCellState(workspace, tables, workspace.parts)
+    : createCellState(workspace, tables);
   const laterals = createLaterals(caseFile.laterals, grid, workspace.lateralRate);
-  const kernel = createReferenceKernel(workspace, tables, cellState, laterals);
+  const kernel = isFast
+    ? createFastKernel(workspace)
+    : createReferenceKernel(workspace, tables, cellState, laterals);
   const warnings = createRunWarnings(caseFile, workspace, grid);
   const structures = createStructureSet(caseFile, workspace, tables, grid, warnings.add);
+  const localLosses = createLocalLosses(
+    caseFile.localLosses ?? [],
+    workspace,
+    tables,
+    grid,
+    (face) => structures?.holds(face) ?? false,
+  );
   const rhs = createRhs(
     kernel,
     structures?.boundary ?? createUpstreamBoundary(workspace, tables, caseFile.upstream),
     createDownstreamBoundary(workspace, tables, caseFile.downstream),
     order,
     structures,
+    localLosses,
   );
   const timeStep = createTimeStep(workspace, kernel, tables, laterals, courant, grid.chainage);
   const ledger = createVolumeLedger(workspace);
@@ -74,6 +93,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
     grid,
     laterals,
     structures,
+    localLosses,
     warnings.add,
   );
   if (mustSettle) {

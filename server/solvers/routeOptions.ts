@@ -15,8 +15,13 @@ export interface RunOutput {
   velocity: Float64Array;
 }
 
-/** What a caller may watch. Nothing here influences the result. */
+/** What a caller may watch, and with which loops. Nothing here influences the result. */
 export interface RouteOptions {
+  /**
+   * Which of two sets of loops runs, of the same bits: `fast` (the default) where the machine and the case allow it, or the
+   * readable `reference`. See kernel.ts.
+   */
+  kernel?: 'fast' | 'reference';
   /** At most about ten times a second of wall time, and once at the end. */
   onProgress?: (progress: RunProgress) => void;
   onOutput?: (output: RunOutput) => void;

@@ -1,15 +1,25 @@
 import type { ShapedGrid } from './geometry/grid';
+import { createParts, type Parts } from './geometry/parts';
 import { writeSectionTable, TABLE_STRIDE } from './geometry/sectionTable';
 
+/** Arrays of the workspace besides the tables, at most; each takes as much as one of a double a cell. */
+const ARRAYS = 40;
+/** Bytes of a page of WebAssembly's memory */
+const PAGE = 65536;
+/** Bytes of a cache line: each array begins on one of its own. */
+const LINE = 64;
+
 /**
- * Every typed array of a run, allocated once. Cells are 1..n; 0 and n + 1 are the sections at the upstream and the
- * downstream end. Face f lies between cell f and f + 1; faces 0 and n are the ends.
+ * Every typed array of a run, allocated once, out of one buffer. Cells are 1..n; 0 and n + 1 are the sections at the
+ * upstream and the downstream end. Face f lies between cell f and f + 1; faces 0 and n are the ends.
  */
 export interface Workspace {
   n: number;
   dx: number;
   gravity: number;
   dryDepth: number;
+  /** What the arrays are views of where the fast kernel may work on them, else null. */
+  memory: WebAssembly.Memory | null;
 
   /** State: wetted area (m²), flow (m³/s), stage (m). Index 0 and n + 1 hold what the boundaries impose. */
   area: Float64Array;
@@ -65,19 +75,38 @@ export interface Workspace {
   /** Tables: TABLE_STRIDE numbers a section, of which the first `levels[i]` levels count. */
   table: Float64Array;
   levels: Int32Array;
+  /** Where sections have parts that do not flow, or a momentum coefficient; null in a plain case. */
+  parts: Parts | null;
 }
 
 export const FACE_FIELDS = 6;
 
-export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: number): Workspace {
+/** `forFast`: in memory that the fast kernel can work on. */
+export function createWorkspace(
+  grid: ShapedGrid,
+  gravity: number,
+  dryDepth: number,
+  forFast = false,
+): Workspace {
   const n = grid.cells;
   const size = n + 2;
-  const pool = pooledArrays(size, 29);
+  const bytes = ARRAYS * lines(8 * size) + lines(8 * size * TABLE_STRIDE);
+  const memory = forFast ? createMemory(bytes) : null;
+  const buffer = memory ? memory.buffer : new ArrayBuffer(bytes);
+  let taken = 0;
+  const take = (length: number): number => {
+    const start = taken;
+    taken += lines(length);
+    return start;
+  };
+  const pool = (length = size): Float64Array => new Float64Array(buffer, take(8 * length), length);
+  const counts = (): Int32Array => new Int32Array(buffer, take(4 * size), size);
   const workspace: Workspace = {
     n,
     dx: grid.dx,
     gravity,
     dryDepth,
+    memory,
     area: pool(),
     flow: pool(),
     stage: pool(),
@@ -85,7 +114,7 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
     celerity: pool(),
     reach: pool(),
     friction: pool(),
-    level: new Int32Array(size),
+    level: counts(),
     levelZ: pool(),
     levelArea: pool(),
     levelEnd: pool(),
@@ -106,17 +135,19 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
     halfFlow: pool(),
     implicitShare: pool(),
     lateralRate: pool(),
-    lateralSums: new Float64Array(2),
-    face: new Float64Array(FACE_FIELDS),
+    lateralSums: pool(2),
+    face: pool(FACE_FIELDS),
     bed: pool(),
-    table: new Float64Array(size * TABLE_STRIDE),
-    levels: new Int32Array(size),
+    table: pool(size * TABLE_STRIDE),
+    levels: counts(),
+    parts: null,
   };
   const { bed, slopeFloor, table, levels } = workspace;
   for (let i = 0; i < size; i++) {
     bed[i] = grid.shapes[i].bed;
     levels[i] = writeSectionTable(grid.shapes[i], table, i * TABLE_STRIDE);
   }
+  workspace.parts = createParts(grid, table, levels);
   for (let i = 1; i <= n; i++) {
     const above = i > 1 ? bed[i - 1] : bed[i];
     const below = i < n ? bed[i + 1] : bed[i];
@@ -125,10 +156,12 @@ export function createWorkspace(grid: ShapedGrid, gravity: number, dryDepth: num
   return workspace;
 }
 
-/** Arrays of one size out of one buffer, each on a cache line of its own. */
-function pooledArrays(size: number, count: number): () => Float64Array {
-  const stride = Math.ceil(size / 8) * 8 + 8;
-  const buffer = new ArrayBuffer(stride * count * 8);
-  let taken = 0;
-  return () => new Float64Array(buffer, 8 * stride * taken++, size);
+/** Bytes that an array takes with the space to the next */
+function lines(bytes: number): number {
+  return Math.ceil(bytes / LINE) * LINE + LINE;
+}
+
+function createMemory(bytes: number): WebAssembly.Memory {
+  const pages = Math.ceil(bytes / PAGE);
+  return new WebAssembly.Memory({ initial: pages, maximum: pages });
 }

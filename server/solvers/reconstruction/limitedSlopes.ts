@@ -20,19 +20,7 @@ export function oneSided(difference: number, neighbour: number): number {
  */
 export function createLimitedSlopes(workspace: Workspace): () => void {
   const { n, stage, flow, reach, slopeStage, slopeFlow, slopeFloor } = workspace;
-
-  function limitEnd(i: number, inner: number): void {
-    const [lo, hi] = i < inner ? [i, inner] : [inner, i];
-    const neighbourStage = n > 2 ? slopeStage[inner] : stage[hi] - stage[lo];
-    const neighbourFlow = n > 2 ? slopeFlow[inner] : flow[hi] - flow[lo];
-    slopeStage[i] = 0;
-    slopeFlow[i] = 0;
-    if (Math.min(stage[i], stage[inner]) <= Math.max(slopeFloor[i], slopeFloor[inner])) return;
-    const most = 4 * reach[i];
-    const s = oneSided(stage[hi] - stage[lo], neighbourStage);
-    slopeStage[i] = Math.max(-most, Math.min(most, s));
-    slopeFlow[i] = oneSided(flow[hi] - flow[lo], neighbourFlow);
-  }
+  const limitedEnds = createLimitedEnds(workspace);
 
   return function limitedSlopes(): void {
     if (n < 2) return;
@@ -65,6 +53,30 @@ export function createLimitedSlopes(workspace: Workspace): () => void {
       lowEta = highEta;
       lowQ = highQ;
     }
+    limitedEnds();
+  };
+}
+
+/** … of the first and the last cell, after those between them. */
+export function createLimitedEnds(workspace: Workspace): () => void {
+  const { n, stage, flow, reach, slopeStage, slopeFlow, slopeFloor } = workspace;
+
+  function limitEnd(i: number, inner: number): void {
+    const lo = i < inner ? i : inner;
+    const hi = i < inner ? inner : i;
+    const neighbourStage = n > 2 ? slopeStage[inner] : stage[hi] - stage[lo];
+    const neighbourFlow = n > 2 ? slopeFlow[inner] : flow[hi] - flow[lo];
+    slopeStage[i] = 0;
+    slopeFlow[i] = 0;
+    if (Math.min(stage[i], stage[inner]) <= Math.max(slopeFloor[i], slopeFloor[inner])) return;
+    const most = 4 * reach[i];
+    const s = oneSided(stage[hi] - stage[lo], neighbourStage);
+    slopeStage[i] = Math.max(-most, Math.min(most, s));
+    slopeFlow[i] = oneSided(flow[hi] - flow[lo], neighbourFlow);
+  }
+
+  return function limitedEnds() {
+    if (n < 2) return;
     limitEnd(1, 2);
     limitEnd(n, n - 1);
   };
