@@ -1,5 +1,6 @@
 import { demoCase } from '../../seed/demoCase';
 import { routeCase } from '../../server/solvers';
+import { hasFastKernel } from '../../server/solvers/fast/fastKernel';
 import type { CaseFile } from '../../shared/case/caseFile';
 import { compileKernel, secondsInC } from './kernelInC';
 import { createKernelRun } from './kernelRun';
@@ -9,6 +10,12 @@ import { naturalReach } from './naturalReach';
 const ROUNDS = 9;
 /** Steps are cut to so short a time (s) that the water hardly moves and every round does the same work. */
 const STEP = 1e-6;
+const KERNELS = ['C', 'reference', 'fast'] as const;
+const NAMES = {
+  C: 'C, -O3 -march=native',
+  reference: 'readable TypeScript',
+  fast: 'fast (WebAssembly, SIMD)',
+};
 
 main();
 
@@ -22,22 +29,32 @@ function main(): void {
   benchCase(`Demo: ${demo.title}`, demo);
 }
 
+/** C, the readable kernel and the fast one in turn, so that what else the machine does hits them alike. */
 function benchKernel(cells: number, program: string | null): void {
   const steps = Math.round(2_000_000 / cells);
-  const run = createKernelRun(cells);
-  run.seconds(STEP, steps);
-  const own: number[] = [];
-  const inC: number[] = [];
-  for (let round = 0; round < ROUNDS; round++) {
-    own.push(run.seconds(STEP, steps));
-    if (program !== null) inC.push(secondsInC(program, run.workspace, STEP, steps));
+  const reference = createKernelRun(cells, 'reference');
+  const fast = hasFastKernel() ? createKernelRun(cells, 'fast') : null;
+  const seconds = { C: [] as number[], reference: [] as number[], fast: [] as number[] };
+  for (let round = -1; round < ROUNDS; round++) {
+    const times = {
+      C: program === null ? NaN : secondsInC(program, reference.workspace, STEP, steps),
+      reference: reference.seconds(STEP, steps),
+      fast: fast === null ? NaN : fast.seconds(STEP, steps),
+    };
+    // The first round is for the compilers.
+    if (round < 0) continue;
+    for (const name of KERNELS) seconds[name].push(times[name]);
   }
   const updates = cells * steps * 2;
-  const rate = (seconds: number): string => `${(updates / seconds / 1e6).toFixed(1)} million/s`;
-  console.log(`${cells} cells: ${rate(median(own))} cell updates (one a cell and stage)`);
-  if (program !== null) {
-    const ratio = median(inC) / median(own);
-    console.log(`  C, -O3 -march=native: ${rate(median(inC))}; ratio ${ratio.toFixed(2)}`);
+  console.log(`${cells} cells, million cell updates a second (one a cell and stage):`);
+  for (const name of KERNELS) {
+    const own = median(seconds[name]);
+    if (Number.isNaN(own)) continue;
+    const ratio = median(seconds.C) / own;
+    const beside = program === null ? '' : `, ${ratio.toFixed(2)} of C`;
+    console.log(
+      `  ${NAMES[name].padEnd(26)}${(updates / own / 1e6).toFixed(1).padStart(6)}${beside}`,
+    );
   }
 }
 

@@ -4,6 +4,7 @@ import { createVolumeLedger } from '../../server/solvers/diagnostics/volumeLedge
 import { createCellState } from '../../server/solvers/geometry/cellState';
 import { createCellTables } from '../../server/solvers/geometry/cellTables';
 import { shapedGrid } from '../../server/solvers/geometry/grid';
+import { createFastKernel } from '../../server/solvers/fast/fastKernel';
 import { createReferenceKernel } from '../../server/solvers/kernel';
 import { createRhs } from '../../server/solvers/rhs';
 import { createLaterals } from '../../server/solvers/sources/laterals';
@@ -12,22 +13,25 @@ import { createTimeStep } from '../../server/solvers/time/timeStep';
 import { createWorkspace, type Workspace } from '../../server/solvers/workspace';
 import { naturalReach } from './naturalReach';
 
-/** The solver's kernel alone, on a river of `cells` cells with walls at its ends. */
+/** One of the solver's kernels alone, on a river of `cells` cells with walls at its ends. */
 export interface KernelRun {
   workspace: Workspace;
   /** Seconds for so many steps of at most `dt` s */
   seconds(dt: number, steps: number): number;
 }
 
-export function createKernelRun(cells: number): KernelRun {
+export function createKernelRun(cells: number, which: 'fast' | 'reference'): KernelRun {
   const length = 20_000;
   const grid = shapedGrid(naturalReach(length, length / cells));
-  const workspace = createWorkspace(grid, 9.81, 0.001);
+  const workspace = createWorkspace(grid, 9.81, 0.001, which === 'fast');
   const { n, bed, flow } = workspace;
   const tables = createCellTables(workspace);
   const state = createCellState(workspace, tables);
   const laterals = createLaterals([], grid, workspace.lateralRate);
-  const kernel = createReferenceKernel(workspace, tables, state, laterals);
+  const kernel =
+    which === 'fast'
+      ? createFastKernel(workspace)
+      : createReferenceKernel(workspace, tables, state, laterals);
   const steps = createSteps(workspace, kernel, createVolumeLedger(workspace));
   const timeStep = createTimeStep(workspace, kernel, tables, laterals, 0.8, grid.chainage);
   const upstream = createWallBoundary(workspace, tables, upstreamEnd());
