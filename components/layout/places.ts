@@ -20,12 +20,17 @@ export const hasStudies = (me: Me): boolean => me.roles.some((role) => role !== 
 /** Whose signature runs wait for. */
 export const checksRuns = (me: Me): boolean => me.roles.includes('seniorEngineer');
 
+/** Who computes floods, and answers for them. */
+export const isEngineer = (me: Me): boolean =>
+  me.roles.includes('modeller') || me.roles.includes('seniorEngineer');
+
 /** Places outside a study; `waiting` is how many runs wait for a check. */
 export function housePlaces(me: Me, waiting?: number): Place[] {
   const places: Place[] = [];
   if (hasStudies(me)) places.push({ label: 'Studies', href: '/', path: '/', exact: true });
   if (checksRuns(me))
     places.push({ label: 'To check', href: '/queue', path: '/queue', aside: some(waiting) });
+  if (isEngineer(me)) places.push({ label: 'Proof', href: '/proof', path: '/proof' });
   if (me.roles.includes('administrator'))
     places.push(
       { label: 'People', href: '/people', path: '/people' },
@@ -70,6 +75,16 @@ export function studyPlaces(study: Study): Place[] {
       path: `${root}/runs`,
       aside: some(counts?.runs),
     },
+    may('run.read') && {
+      label: 'Confidence',
+      href: `${root}/confidence`,
+      path: `${root}/confidence`,
+    },
+    may('run.read') && {
+      label: 'Calibration',
+      href: `${root}/calibration`,
+      path: `${root}/calibration`,
+    },
   ];
   return places.filter((place): place is Place => place !== false);
 }
@@ -80,8 +95,10 @@ export const isAt = (place: Place, pathname: string): boolean =>
 /** What fits below on a phone: at most five, the last of them "More". */
 export function splitForPhone(places: Place[]): { shown: Place[]; more: Place[] } {
   if (places.length <= 5) return { shown: places, more: [] };
-  const shown = ['Survey', 'Reach', 'Scenarios', 'Runs'].flatMap((label) =>
+  const daily = ['Survey', 'Reach', 'Scenarios', 'Runs'].flatMap((label) =>
     places.filter((place) => place.label === label),
   );
+  // Outside a study none of them is there.
+  const shown = daily.length > 0 ? daily : places.slice(0, 4);
   return { shown, more: places.filter((place) => !shown.includes(place)) };
 }

@@ -40,6 +40,7 @@ test('an administrator alone has people, not studies', () => {
   expect(labels(housePlaces(person('administrator')))).toEqual(['People', 'Audit', 'Profile']);
   expect(labels(housePlaces(person('administrator', 'modeller')))).toEqual([
     'Studies',
+    'Proof',
     'People',
     'Audit',
     'Profile',
@@ -56,8 +57,26 @@ test('a senior engineer sees how many runs wait for a check', () => {
 
 test('a study shows the places that the person may enter, with what is in them', () => {
   const all = studyPlaces(study([...STUDY_ACTIONS]));
-  expect(labels(all)).toEqual(['Study', 'Survey', 'Reach', 'Stations', 'Scenarios', 'Runs']);
-  expect(all.map((place) => place.aside)).toEqual([undefined, 'rev 3', '44', undefined, '5', '12']);
+  expect(labels(all)).toEqual([
+    'Study',
+    'Survey',
+    'Reach',
+    'Stations',
+    'Scenarios',
+    'Runs',
+    'Confidence',
+    'Calibration',
+  ]);
+  expect(all.map((place) => place.aside)).toEqual([
+    undefined,
+    'rev 3',
+    '44',
+    undefined,
+    '5',
+    '12',
+    undefined,
+    undefined,
+  ]);
   expect(labels(studyPlaces(study(['study.read', 'survey.send'])))).toEqual(['Study', 'Survey']);
   expect(labels(studyPlaces(study(['study.read'])))).toEqual(['Study']);
 });
@@ -66,8 +85,19 @@ test('a phone shows at most five, and loses none', () => {
   const all = [...studyPlaces(study([...STUDY_ACTIONS])), ...housePlaces(person('modeller'))];
   const { shown, more } = splitForPhone(all);
   expect(labels(shown)).toEqual(['Survey', 'Reach', 'Scenarios', 'Runs']);
-  expect(labels(more)).toEqual(['Study', 'Stations', 'Studies', 'Profile']);
+  expect(labels(more)).toEqual([
+    'Study',
+    'Stations',
+    'Confidence',
+    'Calibration',
+    'Studies',
+    'Proof',
+    'Profile',
+  ]);
   expect(splitForPhone(housePlaces(person('client'))).more).toEqual([]);
+  const house = splitForPhone(housePlaces(person('administrator', 'seniorEngineer')));
+  expect(labels(house.shown)).toEqual(['Studies', 'To check', 'Proof', 'People']);
+  expect(labels(house.more)).toEqual(['Audit', 'Profile']);
 });
 
 test('one is at a place also on the screens under it', () => {

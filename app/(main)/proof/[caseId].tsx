@@ -1,0 +1,1 @@
+export { ProofCaseScreen as default } from '@/components/screens/verificationCases/ProofCaseScreen';

@@ -1,0 +1,1 @@
+export { ProofScreen as default } from '@/components/screens/verificationCases/ProofScreen';
