@@ -7,6 +7,8 @@ const TINY = 1e-30;
 
 /** Sets the area of a cell and all that follows from it: stage, top width, celerity, friction factor. */
 export interface CellState {
+  /** From the area (m², not negative) that `workspace.area` holds. A number handed over would be an object on the heap. */
+  follow(i: number): void;
   /** From an area (m², not negative). */
   place(i: number, area: number): void;
   /** From a stage (m), which is kept to the last bit. Below the bed: dry. */
@@ -51,7 +53,8 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     return levelV0[i] * root * root;
   }
 
-  function place(i: number, a: number): void {
+  function follow(i: number): void {
+    const a = area[i];
     if (a < levelArea[i] || a >= levelEnd[i]) activate(i, tables.rowAtArea(i, a));
     const da = a - levelArea[i];
     const b0 = levelB0[i];
@@ -63,12 +66,16 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     const s = da > 0 ? (2 * da) / (b0 + b) : 0;
     const quarter = (0.25 * a) / b;
     const v = conveyanceVelocity(i, s);
-    area[i] = a;
     stage[i] = levelZ[i] + s;
     width[i] = b;
     reach[i] = quarter;
     celerity[i] = sqrt(fourG * quarter);
     friction[i] = gravity / (a * v * v + TINY);
+  }
+
+  function place(i: number, a: number): void {
+    area[i] = a;
+    follow(i);
   }
 
   function placeAtStage(i: number, eta: number): void {
@@ -77,7 +84,7 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
   }
 
   dryAll();
-  return { place, placeAtStage };
+  return { follow, place, placeAtStage };
 
   function dryAll(): void {
     for (let i = 0; i < area.length; i++) dry(i);

@@ -2,6 +2,7 @@ import type { Workspace } from '../workspace';
 import { createCellState, type CellState } from './cellState';
 import type { CellTables } from './cellTables';
 import { emptyPart, readPart, spreadOf, type Parts } from './parts';
+import { LEAST_FLOWING } from './partedSweep';
 import { TABLE_STRIDE, LEVEL_FIELDS } from './sectionTable';
 
 /** As createCellState, with the celerity and the friction of what flows; keeps the arrays of `parts`. */
@@ -16,9 +17,10 @@ export function createPartedCellState(
   const part = emptyPart();
   const { sqrt } = Math;
 
-  function place(i: number, a: number): void {
-    whole.place(i, a);
-    if (!(area[i] > 0)) {
+  function follow(i: number): void {
+    whole.follow(i);
+    const a = area[i];
+    if (!(a > 0)) {
       flowArea[i] = 0;
       beta[i] = 1;
       spread[i] = 0;
@@ -26,15 +28,23 @@ export function createPartedCellState(
     }
     const row = i * TABLE_STRIDE + level[i] * LEVEL_FIELDS;
     readPart(parts, i, row, stage[i] - levelZ[i], part);
+    // The stage of a trace of water can round to the bed.
+    if (part.area < LEAST_FLOWING * a) part.area = LEAST_FLOWING * a;
     flowArea[i] = part.area;
     beta[i] = part.beta;
     spread[i] = spreadOf(part, width[i]);
-    const share = part.area / area[i];
+    const share = part.area / a;
     celerity[i] *= sqrt(share);
     friction[i] *= share;
   }
 
+  function place(i: number, a: number): void {
+    area[i] = a;
+    follow(i);
+  }
+
   return {
+    follow,
     place,
     placeAtStage(i, eta) {
       place(i, tables.areaAt(i, eta));

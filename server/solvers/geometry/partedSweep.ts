@@ -19,7 +19,7 @@ interface Carrier {
 }
 
 /** Where nothing of some water flows by the rules this share of it does, so that no velocity is without bound. */
-const LEAST_FLOWING = 1e-3;
+export const LEAST_FLOWING = 1e-3;
 
 /**
  * Exact polygon hydraulics of a section with embankments and storage parts at `stages` (m, ascending). `isCompound`: the

@@ -2,13 +2,13 @@ import { createEndSection } from '../boundaries/endSection';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
 import { createSectionWaves } from '../geometry/sectionWaves';
-import type { LocalLosses } from '../sources/localLosses';
+import { lossArea, type LocalLosses } from '../sources/localLosses';
 import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 
 /**
  * The water surface of steady flow, integrated section by section over index 0..n+1:
- *   [β Q²/A_f] + g mean(A_f) ([η] + h) + g Δx mean(A_f S) = 0,  S = Q|Q|/K², h what is lost locally,
+ *   [β Q²/A_f] + g mean(A_f) [η] + g Δx mean(A_f S) + g A_h h = 0,  S = Q|Q|/K², h lost locally (localLosses.ts),
  * first upstream from `outletStage` on the subcritical branch, with critical depth where there is none; then downstream
  * from every such control on the supercritical branch, as far as its force Q²/A + g I1 is the greater (the rest is a
  * hydraulic jump). Chow (1959), chapters 9-10 and 15. At a structure the stage above is what its flow needs. Returns stages (m); `flows` are m³/s, not negative.
@@ -38,20 +38,21 @@ export function steadyProfile(
     const k = tables.conveyanceAt(i, eta);
     return (gravity * areaAt(i, eta) * flows[i] ** 2) / (k * k);
   };
-  /** Head (m) lost at the face between i and i + 1 */
-  const lost = (i: number, eta: number, etaNext: number): number =>
-    localLosses
-      ? localLosses.headAt(i, flows[i] / areaAt(i, eta), flows[i + 1] / areaAt(i + 1, etaNext), 1)
-      : 0;
+  /** Force over density of the loss at the face between i and i + 1 */
+  const lost = (i: number, eta: number, etaNext: number): number => {
+    if (!localLosses) return 0;
+    const above = areaAt(i, eta);
+    const below = areaAt(i + 1, etaNext);
+    const head = localLosses.headAt(i, flows[i] / above, flows[i + 1] / below, 1);
+    return gravity * lossArea(above, below) * head;
+  };
   const distance = (i: number): number => (i === 0 || i === n ? 0.5 * dx : dx);
   /** Residual of the balance between i and i + 1. */
   const residual = (i: number, eta: number, etaNext: number): number =>
     carried(i + 1, etaNext) -
     carried(i, eta) +
-    0.5 *
-      gravity *
-      (areaAt(i, eta) + areaAt(i + 1, etaNext)) *
-      (etaNext - eta + lost(i, eta, etaNext)) +
+    0.5 * gravity * (areaAt(i, eta) + areaAt(i + 1, etaNext)) * (etaNext - eta) +
+    lost(i, eta, etaNext) +
     0.5 * distance(i) * (braked(i, eta) + braked(i + 1, etaNext));
 
   for (let i = 0; i < n + 2; i++) {

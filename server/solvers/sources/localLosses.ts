@@ -7,7 +7,7 @@ import type { Workspace } from '../workspace';
 /**
  * Head lost where the river narrows or widens: at every face of a stretch h = C |v_j² - v_i²|/2g, with the velocity of
  * what flows in the cells on both sides and the coefficient of contraction where the water gains velocity on its way, of
- * expansion where it loses it. It acts as the force g A h against the flow, half on either cell. Over a transition
+ * expansion where it loses it. It acts as the force g A h (lossArea) against the flow, half on either cell. Over a transition
  * the losses of its faces sum to C times the whole change of velocity head, whatever the cells. Still water feels nothing.
  * Where stretches overlap their coefficients add.
  */
@@ -16,6 +16,14 @@ export interface LocalLosses {
   apply(): void;
   /** h (m) at face f for velocities (m/s) in the cells above and below it and a flow of that sign; 0 off the stretches */
   headAt(f: number, above: number, below: number, direction: number): number;
+}
+
+/**
+ * Area (m²) on which a loss between two cells acts: the harmonic mean of theirs, so that fast water in a nearly dry cell
+ * cannot push the water of a full one.
+ */
+export function lossArea(above: number, below: number): number {
+  return above > 0 && below > 0 ? (2 * above * below) / (above + below) : 0;
 }
 
 /** null where a case has none. `holds`: faces at which structures stand have losses of their own. */
@@ -61,8 +69,7 @@ export function createLocalLosses(
         if (stage[i] - bed[i] <= dryDepth || stage[j] - bed[j] <= dryDepth) continue;
         const direction = passing > 0 ? 1 : -1;
         const head = headAt(i, flow[i] / cellFlowArea[i], flow[j] / cellFlowArea[j], direction);
-        const mean = 0.5 * (cellFlowArea[i] + cellFlowArea[j]);
-        const half = 0.5 * direction * gravity * mean * head;
+        const half = 0.5 * direction * gravity * lossArea(cellFlowArea[i], cellFlowArea[j]) * head;
         fluxLeft[i] += half;
         fluxRight[i] -= half;
       }
