@@ -9,11 +9,12 @@ export const reachKeys = {
   one: (reachId: number) => ['reaches', reachId] as const,
 };
 
-/** One reach an accepted revision. */
-export const useReaches = (studyId: number) =>
+/** One reach an accepted revision, and the working geometries; not asked for where they may not be read. */
+export const useReaches = (studyId: number, mayRead = true) =>
   useQuery({
     queryKey: reachKeys.list(studyId),
     queryFn: ({ signal }) => api.get<ReachRow[]>(`/studies/${studyId}/reaches`, { signal }),
+    enabled: mayRead,
   });
 
 /** Null: none to ask for. */

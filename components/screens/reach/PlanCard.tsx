@@ -1,114 +1,77 @@
-import { useMemo } from 'react';
-import { Circle, Line, Path } from 'react-native-svg';
-import { ChartBox, type ChartSize } from '@/components/charts/ChartBox';
-import { ChartText } from '@/components/charts/ChartText';
-import { useTheme } from '@/components/theme/useTheme';
+import { useMemo, useState } from 'react';
+import { ChartBox } from '@/components/charts/ChartBox';
+import { useCurrentStudy } from '@/components/layout/studyContext';
+import { downloadReachPlan, downloadRunPlan, useRunPlan } from '@/components/queries/geometries';
+import { useRuns } from '@/components/queries/runs';
+import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
-import { useUnitSystem } from '@/components/ui/unitSystem';
-import type { ReachSection } from '@/shared/reaches/types';
-import { formatNumber } from '@/shared/units/format';
-import { fromSi, UNITS } from '@/shared/units/units';
-import { planModel, type PlanModel } from './planModel';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { SelectField } from '@/components/ui/SelectField';
+import { Txt } from '@/components/ui/Txt';
+import type { Reach, ReachSection } from '@/shared/reaches/types';
+import { extentRings } from './extentRings';
+import { PlanDrawing } from './PlanDrawing';
 
 interface PlanCardProps {
-  sections: readonly ReachSection[];
+  reach: Reach;
   section: ReachSection;
   onChoose: (chainage: number) => void;
 }
 
-/** The reach from above, where the survey gave coordinates; a press on it chooses the section nearest. */
-export function PlanCard({ sections, section, onChoose }: PlanCardProps) {
+/** The reach from above, where the survey gave coordinates; with the widest water of a run where one is chosen. */
+export function PlanCard({ reach, section, onChoose }: PlanCardProps) {
+  const { study, may } = useCurrentStudy();
+  const { sections } = reach;
   const placed = useMemo(() => sections.filter(({ coordinates }) => coordinates), [sections]);
+  const [runId, setRunId] = useState<number | null>(null);
+  const runs = useRuns(study.id).data ?? [];
+  const routed = runs.filter(({ state }) => state === 'routed');
+  const plan = useRunPlan(study.coordinateSystem === '' ? null : runId);
+  const rings = useMemo(() => extentRings(plan.data), [plan.data]);
   if (placed.length < 2) return null;
   const missing = sections.length - placed.length;
+  const isNamed = study.coordinateSystem !== '';
   return (
     <Card
       title="Plan"
       aside={missing > 0 ? `${missing} sections have no coordinates` : 'north is up'}
     >
       <ChartBox
-        label={`The reach from above, ${placed.length} sections; ${section.id} is chosen`}
+        label={`The reach from above, ${placed.length} sections; ${section.id} is chosen${rings.length > 0 ? '; the widest water of the run is drawn between them' : ''}`}
         height={260}
       >
-        {(size) => <Drawing {...{ placed, section, size, onChoose }} />}
+        {(size) => <PlanDrawing {...{ placed, section, rings, size, onChoose }} />}
       </ChartBox>
-    </Card>
-  );
-}
-
-interface DrawingProps {
-  placed: readonly ReachSection[];
-  section: ReachSection;
-  size: ChartSize;
-  onChoose: (chainage: number) => void;
-}
-
-function Drawing({ placed, section, size, onChoose }: DrawingProps) {
-  const { colours } = useTheme();
-  const { width, height } = size;
-  const model = useMemo(() => planModel(placed, { width, height }), [placed, width, height]);
-  const chosen = model.lines.find(({ id }) => id === section.id);
-  return (
-    <>
-      <Path
-        d={model.river}
-        fill="none"
-        stroke={colours.waterTint}
-        strokeWidth={8}
-        strokeLinecap="round"
-        strokeLinejoin="round"
-      />
-      <Path
-        d={model.river}
-        fill="none"
-        stroke={colours.water}
-        strokeWidth={1.75}
-        strokeLinejoin="round"
-      />
-      {model.lines.map(({ id, chainage, d }) => (
-        <Path
-          key={id}
-          d={d}
-          fill="none"
-          stroke={id === section.id ? colours.ink : colours.soft}
-          strokeWidth={id === section.id ? 2.5 : 1}
-          onPress={() => onChoose(chainage)}
-        />
-      ))}
-      {chosen ? (
-        <Circle
-          cx={chosen.at[0]}
-          cy={chosen.at[1]}
-          r={5}
-          fill={colours.card}
-          stroke={colours.ink}
-          strokeWidth={4}
+      {isNamed && may('run.read') && routed.length > 0 ? (
+        <SelectField
+          label="Widest water of a run"
+          value={String(runId ?? '')}
+          options={[
+            { value: '', label: 'None' },
+            ...routed.map(({ id, number, scenarioName }) => ({
+              value: String(id),
+              label: `Run ${number}, ${scenarioName}`,
+            })),
+          ]}
+          onChange={(value) => setRunId(value === '' ? null : Number(value))}
         />
       ) : null}
-      <ScaleBar model={model} height={height} />
-    </>
-  );
-}
-
-function ScaleBar({ model, height }: { model: PlanModel; height: number }) {
-  const { colours } = useTheme();
-  const system = useUnitSystem();
-  const { symbol, si } = UNITS[system].length;
-  const length = model.scaleBar(si);
-  const y = height - 10;
-  return (
-    <>
-      <Line
-        x1={8}
-        x2={8 + length * si * model.pxPerMetre}
-        y1={y}
-        y2={y}
-        stroke={colours.ink}
-        strokeWidth={2}
+      {plan.error ? <ErrorState title="The run cannot be drawn" error={plan.error} /> : null}
+      {plan.data?.notes.slice(1).map((note) => (
+        <Txt key={note} variant="small" tone="ochre">
+          {note}
+        </Txt>
+      ))}
+      <Txt variant="small" tone="soft">
+        {isNamed
+          ? `Coordinates: ${study.coordinateSystem}. The GeoJSON file names it and gives them as they are, not as longitude and latitude of WGS 84, which RFC 7946 expects: tell the program that reads it.`
+          : 'The study does not name its coordinate system. Name it under Study, then the plan can be taken as GeoJSON and a run be drawn in it.'}
+      </Txt>
+      <Button
+        label={runId === null ? 'Plan as GeoJSON' : 'Plan and water as GeoJSON'}
+        disabled={!isNamed}
+        onPress={() => void (runId === null ? downloadReachPlan(reach.id) : downloadRunPlan(runId))}
       />
-      <ChartText x={8} y={y - 6}>
-        {`${formatNumber(fromSi(length * si, 'length', system), 0)} ${symbol}`}
-      </ChartText>
-    </>
+    </Card>
   );
 }

@@ -1,6 +1,4 @@
-import { router } from 'expo-router';
 import { useMemo, useState } from 'react';
-import { StyleSheet, View } from 'react-native';
 import { LongSection } from '@/components/charts/LongSection';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
@@ -11,11 +9,11 @@ import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Badge } from '@/components/ui/Badge';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
-import { SelectField } from '@/components/ui/SelectField';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Reach, ReachRow } from '@/shared/reaches/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { AdviceCard } from './AdviceCard';
+import { GeometryChoice } from './GeometryChoice';
 import { nearestSection } from './nearestSection';
 import { PlanCard } from './PlanCard';
 import { reachProfile } from './reachProfile';
@@ -78,16 +76,7 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
       }
       side={isWide ? beside : undefined}
     >
-      {reaches.length > 1 ? (
-        <View style={styles.choice}>
-          <SelectField
-            label="Reach"
-            value={String(reach.id)}
-            options={reaches.map(({ id, name }) => ({ value: String(id), label: name }))}
-            onChange={(id) => router.setParams({ reach: id })}
-          />
-        </View>
-      ) : null}
+      <GeometryChoice {...{ reach, reaches }} />
       {isWide ? null : beside}
       <Card title="Long profile" aside="bed; left bank dashed, right bank dotted">
         <LongSection
@@ -98,7 +87,7 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
         />
       </Card>
       <AdviceCard advice={reach.advice} onChoose={setAt} />
-      <PlanCard {...{ sections, section }} onChoose={setAt} />
+      <PlanCard {...{ reach, section }} onChoose={setAt} />
       <SectionsTable
         {...{ sections, section, ticked }}
         onChoose={setAt}
@@ -107,5 +96,3 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
     </Screen>
   );
 }
-
-const styles = StyleSheet.create({ choice: { maxWidth: 320 } });

@@ -6,6 +6,7 @@ import { Button } from '@/components/ui/Button';
 import { Empty } from '@/components/ui/Empty';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
+import { newestReach } from '@/shared/reaches/newestReach';
 import { ReachContent } from './ReachContent';
 
 /** The geometry that is routed: the newest reach, or the one that the address names. */
@@ -15,7 +16,7 @@ export function ReachScreen() {
   const reaches = useReaches(study.id);
   const wanted = Number(params.reach);
   const rows = reaches.data ?? [];
-  const row = rows.find(({ id }) => id === wanted) ?? newest(rows);
+  const row = rows.find(({ id }) => id === wanted) ?? newestReach(rows);
   const reach = useReach(row?.id ?? null);
 
   if (reach.data) return <ReachContent key={reach.data.id} reach={reach.data} reaches={rows} />;
@@ -45,6 +46,3 @@ export function ReachScreen() {
     </Screen>
   );
 }
-
-const newest = <R extends { revision: number }>(rows: readonly R[]): R | undefined =>
-  [...rows].sort((a, b) => b.revision - a.revision)[0];

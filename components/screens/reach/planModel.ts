@@ -7,6 +7,8 @@ export interface PlanModel {
   /** Through the lowest points of the sections, in the order of the reach. */
   river: string;
   lines: { id: string; chainage: number; d: string; at: Px }[];
+  /** Through coordinates of the same system. */
+  pathOf: (places: readonly (readonly [number, number])[]) => string;
   pxPerMetre: number;
   /** A round length of at most a third of the width, in units of `si` metres. */
   scaleBar: (si: number) => number;
@@ -38,6 +40,7 @@ export function planModel(
   return {
     river: path(lines.map(({ at }) => at)),
     lines,
+    pathOf: (places) => path(places.map(px)),
     pxPerMetre: scale,
     scaleBar: (si) => roundBelow(inner.width / 3 / scale / si),
   };

@@ -1,6 +1,8 @@
 import type { ReachSection } from '@/shared/reaches/types';
 import { allSections, sectionsBetween, type SectionChoice } from './sectionChoice';
 
+type Placed = Pick<ReachSection, 'id' | 'chainage'>;
+
 /** Which sections a change goes to. */
 export type Scope = 'here' | 'stretch' | 'ticked' | 'all';
 
@@ -14,8 +16,8 @@ export interface ScopeChoice {
 /** Their ids in the order of the reach; none while the stretch is not told. */
 export function sectionsInScope(
   { scope, from, to }: ScopeChoice,
-  sections: readonly ReachSection[],
-  here: ReachSection,
+  sections: readonly Placed[],
+  here: Placed,
   ticked: SectionChoice,
 ): SectionChoice {
   if (scope === 'here') return [here.id];

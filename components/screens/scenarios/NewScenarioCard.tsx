@@ -8,6 +8,7 @@ import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useCreateScenario } from '@/components/queries/scenarios';
 import { Card } from '@/components/ui/Card';
 import { LIMITS } from '@/shared/limits';
+import { newestReach } from '@/shared/reaches/newestReach';
 import type { ReachRow } from '@/shared/reaches/types';
 import { newScenarioSchema } from '@/shared/scenarios/schemas';
 
@@ -15,7 +16,7 @@ import { newScenarioSchema } from '@/shared/scenarios/schemas';
 export function NewScenarioCard({ reaches }: { reaches: readonly ReachRow[] }) {
   const { study } = useCurrentStudy();
   const create = useCreateScenario(study.id);
-  const newest = [...reaches].sort((a, b) => b.revision - a.revision)[0];
+  const newest = newestReach(reaches) ?? reaches[0];
   const form = useYupForm({
     schema: newScenarioSchema,
     // A select speaks text; the schema casts it back to the number.

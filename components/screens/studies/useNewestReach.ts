@@ -1,13 +1,10 @@
 import { useReach, useReaches } from '@/components/queries/reaches';
+import { newestReach } from '@/shared/reaches/newestReach';
 import type { Reach, ReachRow } from '@/shared/reaches/types';
 
 /** The reach of the latest accepted survey in short, once it is there. */
 export function useNewestReachRow(studyId: number): ReachRow | null {
-  const rows = useReaches(studyId).data ?? [];
-  return rows.reduce<ReachRow | null>(
-    (best, row) => (best === null || row.revision > best.revision ? row : best),
-    null,
-  );
+  return newestReach(useReaches(studyId).data ?? []) ?? null;
 }
 
 /** The same with its sections. */

@@ -1,6 +1,7 @@
 import { router } from 'expo-router';
 import { StyleSheet } from 'react-native';
 import { useCurrentStudy } from '@/components/layout/studyContext';
+import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { Empty } from '@/components/ui/Empty';
 import { Table, type Column } from '@/components/ui/Table';
@@ -40,6 +41,9 @@ export function RevisionsCard({ revisions }: { revisions: readonly SurveyRevisio
           }
         />
       )}
+      {revisions.length > 1 ? (
+        <Button label="Compare two of them" href={`/studies/${study.id}/survey/compare`} />
+      ) : null}
     </Card>
   );
 }

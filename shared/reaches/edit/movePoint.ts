@@ -1,32 +1,10 @@
 import type { Section } from '../../surveys/types';
-import { mapEmbankments } from './mapEmbankments';
-import { withPoints } from './withPoints';
+import { setPoint } from './setPoint';
 
-/**
- * One point moved to another offset and elevation, m; it never passes a neighbour. What stood on the point goes with it:
- * a bank mark, the beginning of a roughness zone, an end of a storage part, an embankment.
- */
-export function movePoint(section: Section, index: number, to: [number, number]): Section {
+/** `setPoint` for a hand that draws: the point never passes a neighbour. */
+export function movePoint(section: Section, index: number, [y, z]: [number, number]): Section {
   const { points } = section;
   const low = points[index - 1]?.[0] ?? -Infinity;
   const high = points[index + 1]?.[0] ?? Infinity;
-  const from = points[index][0];
-  const offset = Math.min(Math.max(to[0], low), high);
-  const moved = withPoints(
-    section,
-    points.map((point, i): [number, number] => (i === index ? [offset, to[1]] : point)),
-  );
-  // Of a wall one end stays behind, and with it what stands on it.
-  if (offset === from || points.some(([y], i) => i !== index && y === from)) return moved;
-  const along = (y: number) => (y === from ? offset : y);
-  const { banks, roughness, storage } = moved;
-  return {
-    ...moved,
-    banks: banks && [along(banks[0]), along(banks[1])],
-    roughness: roughness.map(([y, n]) => [along(y), n]),
-    ...(storage && {
-      storage: storage.map((part) => ({ ...part, from: along(part.from), to: along(part.to) })),
-    }),
-    ...mapEmbankments(moved, (it) => ({ ...it, offset: along(it.offset) })),
-  };
+  return setPoint(section, index, [Math.min(Math.max(y, low), high), z]);
 }

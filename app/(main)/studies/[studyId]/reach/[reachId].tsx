@@ -1,0 +1,1 @@
+export { GeometryScreen as default } from '@/components/screens/reach/edit/GeometryScreen';
