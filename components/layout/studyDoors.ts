@@ -7,6 +7,9 @@ const DOORS: Record<string, readonly StudyAction[]> = {
   stations: ['reach.read'],
   scenarios: ['scenario.read'],
   runs: ['run.read'],
+  confidence: ['run.read'],
+  calibration: ['run.read'],
+  compare: ['run.read'],
 };
 
 /** Screens without a door of their own are open to whoever sees the study. */

@@ -36,6 +36,30 @@ export function valueAt(distribution: Distribution, p: number): number {
 
 const cut = (p: number): number => Math.min(1 - CUT, Math.max(CUT, p));
 
+/** A distribution of another kind that is about as wide, to begin with; three significant digits. */
+export function asKind(distribution: Distribution, kind: DistributionKind): Distribution {
+  if (distribution.kind === kind) return distribution;
+  const at = (p: number) => Number(valueAt(distribution, p).toPrecision(3));
+  switch (kind) {
+    case 'normal':
+      return {
+        kind,
+        mean: at(0.5),
+        deviation: Number(((at(0.841) - at(0.159)) / 2).toPrecision(3)),
+      };
+    case 'lognormal':
+      return {
+        kind,
+        median: at(0.5),
+        spread: Number(Math.sqrt(at(0.841) / at(0.159)).toPrecision(3)),
+      };
+    case 'triangular':
+      return { kind, low: at(0.025), mode: at(0.5), high: at(0.975) };
+    case 'uniform':
+      return { kind, low: at(0.05), high: at(0.95) };
+  }
+}
+
 /** What is wrong with the numbers of a distribution; null: nothing. A factor must stay above 0. */
 export function distributionFault(
   distribution: Distribution,

@@ -1,0 +1,1 @@
+export { ConfidenceSetScreen as default } from '@/components/screens/confidence/ConfidenceSetScreen';

@@ -1,0 +1,1 @@
+export { ConfidenceScreen as default } from '@/components/screens/confidence/ConfidenceScreen';

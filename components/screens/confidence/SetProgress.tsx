@@ -1,0 +1,67 @@
+import { StyleSheet, View } from 'react-native';
+import { useChangeTaskSet } from '@/components/queries/tasks';
+import { radius, space } from '@/components/theme/tokens';
+import { useTheme } from '@/components/theme/useTheme';
+import { Button } from '@/components/ui/Button';
+import { Card } from '@/components/ui/Card';
+import { ErrorState } from '@/components/ui/ErrorState';
+import { FigureWithUnit } from '@/components/ui/FigureWithUnit';
+import { Txt } from '@/components/ui/Txt';
+import type { TaskSet } from '@/shared/tasks/types';
+import { timeLeftWords } from '../runs/runWords';
+
+/** A set that is queued or computing, and the way to stop it. */
+export function SetProgress({ set }: { set: TaskSet }) {
+  const { colours } = useTheme();
+  const cancel = useChangeTaskSet('cancel');
+  const queued = set.state === 'queued';
+  const percent = Math.min(99, Math.floor(set.progress * 100));
+  const done = set.finished + set.failed;
+  const words = queued
+    ? 'Runs go first; then sets take turns.'
+    : `${done} of ${set.total} members computed${set.failed ? `, ${set.failed} of them failed` : ''}; ${timeLeftWords(set.secondsLeft)}`;
+  return (
+    <Card title="Computing">
+      <FigureWithUnit
+        value={queued ? 'Queued' : String(percent)}
+        unit={queued ? undefined : '%'}
+        label={words}
+        size="display"
+      />
+      <View
+        role="progressbar"
+        aria-label="Progress of the set"
+        aria-valuemin={0}
+        aria-valuemax={100}
+        aria-valuenow={queued ? 0 : percent}
+        style={[styles.trough, { backgroundColor: colours.earthTint }]}
+      >
+        <View
+          style={[
+            styles.water,
+            { width: `${100 * set.progress}%`, backgroundColor: colours.water },
+          ]}
+        />
+      </View>
+      {cancel.error ? (
+        <ErrorState error={cancel.error} title="The set could not be cancelled" />
+      ) : null}
+      {set.may.includes('taskSet.cancel') ? (
+        <Button
+          label="Cancel the set"
+          kind="danger"
+          busy={cancel.isPending}
+          onPress={() => cancel.mutate(set.id)}
+        />
+      ) : null}
+      <Txt variant="small" tone="soft">
+        It goes on when this page is closed.
+      </Txt>
+    </Card>
+  );
+}
+
+const styles = StyleSheet.create({
+  trough: { height: space.one, borderRadius: radius.small, overflow: 'hidden' },
+  water: { height: '100%' },
+});
