@@ -20,7 +20,7 @@ export function createStepLoops(
 ): StepLoops {
   const { n, dx, area, flow, stage, bed, dryDepth, friction, lateralSums } = workspace;
   const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, implicitShare } = workspace;
-  const { place } = cellState;
+  const { follow } = cellState;
   const { rate } = laterals;
   const { abs, sqrt } = Math;
   const hasLaterals = laterals.any;
@@ -55,7 +55,10 @@ export function createStepLoops(
       const e = half < MOST_EXPLICIT ? half : MOST_EXPLICIT;
       implicitShare[i] = half < MOST_EXPLICIT ? 0.5 : 1 - (0.5 * MOST_EXPLICIT) / half;
       halfFlow[i] = 0.5 * (q0 + q) - e * q0;
-      if (a !== old) place(i, a);
+      if (a !== old) {
+        area[i] = a;
+        follow(i);
+      }
       flow[i] =
         stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + fourDt * friction[i] * abs(q))) : 0;
     }
@@ -78,7 +81,10 @@ export function createStepLoops(
         if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
       }
       a = 0.5 * (old + a);
-      if (a !== area[i]) place(i, a);
+      if (a !== area[i]) {
+        area[i] = a;
+        follow(i);
+      }
       const m = fourDt * implicitShare[i] * friction[i];
       flow[i] = stage[i] - bed[i] > dryDepth ? (2 * q) / (1 + sqrt(1 + m * abs(q))) : 0;
       if (a < 0.5 * old) drained++;
