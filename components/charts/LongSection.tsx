@@ -1,18 +1,25 @@
 import { memo, useMemo } from 'react';
 import { Circle, Line, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
+import type { StructureMark } from '@/shared/structures/structureMarks';
 import { formatWithUnit } from '@/shared/units/format';
 import { fromSi, UNITS, type UnitSystem } from '@/shared/units/units';
 import { ChartBox } from './ChartBox';
 import { ChartText } from './ChartText';
 import { DragSurface } from './DragSurface';
 import { nearestIndex, valueAt } from './geometry/interpolate';
-import { longSectionFrame, wetSurface, type LongProfile } from './geometry/longProfile';
+import {
+  longSectionFrame,
+  wetSurface,
+  withStructures,
+  type LongProfile,
+} from './geometry/longProfile';
 import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
 import { PlaceAxis } from './PlaceAxis';
 import { Reading, readingBox, type ReadingText } from './Reading';
 import { StationMarks } from './StationMarks';
+import { StructureMarks } from './StructureMarks';
 import { ValueAxis } from './ValueAxis';
 
 export interface LongSectionProps {
@@ -22,6 +29,10 @@ export interface LongSectionProps {
   stage?: ArrayLike<number> | null;
   sections: readonly { id: string; chainage: number }[];
   stations?: readonly { name: string; chainage: number }[];
+  /** What stands in the river; its breaches and its words as of the moment. */
+  structures?: readonly StructureMark[];
+  bottoms?: ReadonlyMap<string, number>;
+  words?: ReadonlyMap<string, string>;
   /** Chosen place, m. */
   at: number | null;
   /** Water at the chosen place where it is known better than from the drawing, m. */
@@ -37,7 +48,11 @@ export interface LongSectionProps {
 
 /** The reach from the side: ground as ground, water as water, the highest water dotted, the chosen place read out. */
 export function LongSection(props: LongSectionProps) {
-  const { profile, sections, stations = NONE, onChange, at, height = 320 } = props;
+  const { sections, stations = NONE, structures = NONE, onChange, at, height = 320 } = props;
+  const profile = useMemo(
+    () => withStructures(props.profile, structures),
+    [props.profile, structures],
+  );
   const stops = useMemo(
     () => placesAlong(sections, stations).map((place) => place.chainage),
     [sections, stations],
@@ -57,7 +72,7 @@ export function LongSection(props: LongSectionProps) {
         return onChange ? <DragSurface onDrag={drag} style={size} /> : null;
       }}
     >
-      {(size) => <Drawing {...props} size={size} />}
+      {(size) => <Drawing {...props} profile={profile} size={size} />}
     </ChartBox>
   );
 }
@@ -72,6 +87,9 @@ function Drawing({
   unitSystem,
   sections,
   stations = NONE,
+  structures = NONE,
+  bottoms,
+  words,
   size,
 }: Sized) {
   const { colours } = useTheme();
@@ -117,6 +135,7 @@ function Drawing({
         frame={frame}
         unitSystem={unitSystem}
       />
+      <StructureMarks {...{ structures, profile, frame, unitSystem, bottoms, words }} />
       <PlaceAxis frame={frame} ticks={frame.xTicks} />
       <ChartText x={frame.left} y={14}>
         {`${stage || profile.peakStage ? 'stage' : 'elevation'}, ${UNITS[unitSystem].elevation.symbol} above datum`}

@@ -17,6 +17,8 @@ export const QUANTITIES = [
   'area',
   'volume',
   'slope',
+  'storage', // what a reservoir holds
+  'weirCoefficient', // C of Q = C b h^1.5
 ] as const;
 export type Quantity = (typeof QUANTITIES)[number];
 
@@ -41,6 +43,8 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     area: { symbol: 'm²', si: 1, decimals: 1 },
     volume: { symbol: 'm³', si: 1, decimals: 0 },
     slope: { symbol: 'm/m', si: 1, decimals: 5 },
+    storage: { symbol: '10⁶ m³', si: 1e6, decimals: 3 },
+    weirCoefficient: { symbol: 'm½/s', si: 1, decimals: 2 },
   },
   usCustomary: {
     chainage: { symbol: 'ft', si: FT, decimals: 0 },
@@ -52,6 +56,8 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     area: { symbol: 'ft²', si: FT ** 2, decimals: 0 },
     volume: { symbol: 'ft³', si: FT ** 3, decimals: 0 },
     slope: { symbol: 'ft/ft', si: 1, decimals: 5 },
+    storage: { symbol: 'acre-ft', si: 43_560 * FT ** 3, decimals: 0 },
+    weirCoefficient: { symbol: 'ft½/s', si: FT ** 0.5, decimals: 2 },
   },
 };
 

@@ -9,6 +9,8 @@ export interface LongProfile {
   leftBank?: ArrayLike<number> | null;
   rightBank?: ArrayLike<number> | null;
   peakStage?: ArrayLike<number> | null;
+  /** Tops of structures: they fit as well. */
+  tops?: readonly number[];
 }
 
 /** Thinner water than this is drawn as dry ground, m. */
@@ -24,7 +26,7 @@ export function longSectionFrame(
   profile: LongProfile,
   system: UnitSystem,
 ): Frame & { xTicks: number[]; yTicks: number[] } {
-  const rows = [profile.bed, profile.leftBank, profile.rightBank, profile.peakStage];
+  const rows = [profile.bed, profile.leftBank, profile.rightBank, profile.peakStage, profile.tops];
   const extent = extentOf(...rows.filter((row) => row != null)) ?? [0, 1];
   const foot = extent[0] - FOOT * (extent[1] - extent[0]);
   const y = roomyExtent(
@@ -44,6 +46,15 @@ export function longSectionFrame(
     yTicks: valueTicks(y, frame.bottom - frame.top, 44),
   };
 }
+
+/** The same profile with room for what stands in it. */
+export const withStructures = (
+  profile: LongProfile,
+  structures: readonly { top: number | null }[],
+): LongProfile =>
+  structures.length === 0
+    ? profile
+    : { ...profile, tops: structures.flatMap(({ top }) => (top === null ? [] : [top])) };
 
 /** The surface where there is water; NaN, which lifts the pen, where there is none. */
 export function wetSurface(bed: ArrayLike<number>, stage: ArrayLike<number>): Float64Array {

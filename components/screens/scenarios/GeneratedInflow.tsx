@@ -4,7 +4,11 @@ import { NumberField } from '@/components/ui/NumberField';
 import { SelectField } from '@/components/ui/SelectField';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
-import { generateHydrograph, volumeOf } from '@/shared/scenarios/hydrographs';
+import {
+  generateHydrograph,
+  volumeOf,
+  type GeneratedInflow as GeneratedShape,
+} from '@/shared/scenarios/hydrographs';
 import { formatDuration } from '@/shared/units/format';
 import { FieldRow } from './EditorPart';
 import { useEditing } from './editorContext';
@@ -12,17 +16,22 @@ import { PlacedField } from './PlacedField';
 import { TimeField } from './TimeField';
 import { spokenVolume } from './spokenVolume';
 
+interface GeneratedInflowProps {
+  /** Path of the inflow in the body, e.g. `upstream`. */
+  path: string;
+  inflow: GeneratedShape;
+  onChange: (change: Partial<GeneratedShape>) => void;
+}
+
 /** A flood by its shape, drawn while its numbers are typed. */
-export function GeneratedInflow() {
-  const { draft, dispatch, isLocked: disabled } = useEditing();
+export function GeneratedInflow({ path, inflow, onChange: change }: GeneratedInflowProps) {
+  const { isLocked: disabled } = useEditing();
   const system = useUnitSystem();
-  const inflow = draft.upstream.byKind.generated;
   const flood = useMemo(() => generateHydrograph(inflow), [inflow]);
   const series = useMemo(() => flood && { times: flood.times, values: flood.flows }, [flood]);
-  const change = (to: Partial<typeof inflow>) => dispatch({ type: 'upstreamChanged', change: to });
   return (
     <>
-      <PlacedField path="upstream.shape">
+      <PlacedField path={`${path}.shape`}>
         {(error) => (
           <SelectField
             label="Shape"
@@ -39,7 +48,7 @@ export function GeneratedInflow() {
         )}
       </PlacedField>
       <FieldRow>
-        <PlacedField path="upstream.peakFlow" half>
+        <PlacedField path={`${path}.peakFlow`} half>
           {(error) => (
             <NumberField
               label="Peak flow"
@@ -51,7 +60,7 @@ export function GeneratedInflow() {
             />
           )}
         </PlacedField>
-        <PlacedField path="upstream.timeToPeak" half>
+        <PlacedField path={`${path}.timeToPeak`} half>
           {(error) => (
             <TimeField
               label="Time to peak"
@@ -63,7 +72,7 @@ export function GeneratedInflow() {
             />
           )}
         </PlacedField>
-        <PlacedField path="upstream.baseFlow" half>
+        <PlacedField path={`${path}.baseFlow`} half>
           {(error) => (
             <NumberField
               label="Base flow"
@@ -76,7 +85,7 @@ export function GeneratedInflow() {
           )}
         </PlacedField>
         {inflow.shape === 'triangle' ? (
-          <PlacedField path="upstream.recessionRatio" half>
+          <PlacedField path={`${path}.recessionRatio`} half>
             {(error) => (
               <NumberField
                 label="Recession over rise"
@@ -89,7 +98,7 @@ export function GeneratedInflow() {
           </PlacedField>
         ) : null}
         {inflow.shape === 'gamma' ? (
-          <PlacedField path="upstream.gammaExponent" half>
+          <PlacedField path={`${path}.gammaExponent`} half>
             {(error) => (
               <NumberField
                 label="Exponent"

@@ -19,6 +19,7 @@ import { LateralsPart } from './LateralsPart';
 import { NumericsPart } from './NumericsPart';
 import { OutletPart } from './OutletPart';
 import { ReadinessCard } from './ReadinessCard';
+import { StructuresPart } from './structures/StructuresPart';
 import { UnsavedNotice } from './UnsavedNotice';
 import { UpstreamPart } from './UpstreamPart';
 import { useScenarioEditor } from './useScenarioEditor';
@@ -96,6 +97,7 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
         <DetailsPart />
         <UpstreamPart />
         <LateralsPart />
+        <StructuresPart at={at} />
         <OutletPart />
         <InitialPart />
         <NumericsPart />

@@ -10,6 +10,7 @@ import { SeriesEditor } from './SeriesEditor';
 import {
   asColumns,
   QUANTITY_OF,
+  readAs,
   readTimeTable,
   writeTimeTable,
   type TableQuantity,
@@ -54,7 +55,7 @@ export function TimeTableEditor(props: TimeTableEditorProps) {
             read={(text) => readTimeTable(text, quantity, system)}
             write={(columns) => writeTimeTable(columns, quantity, system)}
             readFile={async (file) =>
-              asColumns(await readTable({ file, quantity, unitSystem: system }))
+              asColumns(await readTable({ file, quantity: readAs(quantity), unitSystem: system }))
             }
             error={fault}
             disabled={isLocked}

@@ -4,6 +4,7 @@ import { EditorPart } from './EditorPart';
 import { useEditing } from './editorContext';
 import { GeneratedInflow } from './GeneratedInflow';
 import { PlacedField } from './PlacedField';
+import { ReservoirFields } from './ReservoirFields';
 import { TimeTableEditor } from './TimeTableEditor';
 
 /** What comes in at the upstream end. */
@@ -32,12 +33,24 @@ export function UpstreamPart() {
                 label: 'Stage against time',
                 hint: 'Where a level is known and the flow is not.',
               },
+              {
+                value: 'reservoir',
+                label: 'A reservoir behind a dam',
+                hint: 'A level pool; the dam and what stands in it are structures at the first section.',
+              },
               { value: 'wall', label: 'Nothing: a wall' },
             ]}
           />
         )}
       </PlacedField>
-      {kind === 'generated' ? <GeneratedInflow /> : null}
+      {kind === 'generated' ? (
+        <GeneratedInflow
+          path="upstream"
+          inflow={byKind.generated}
+          onChange={(change) => dispatch({ type: 'upstreamChanged', change })}
+        />
+      ) : null}
+      {kind === 'reservoir' ? <ReservoirFields /> : null}
       {kind === 'table' ? (
         <TimeTableEditor
           path="upstream"

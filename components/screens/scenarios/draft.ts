@@ -4,9 +4,12 @@ import type {
   InitialState,
   LateralInflow,
   NumericsSettings,
+  ReservoirEnd,
+  RoughnessFactorBody,
   ScenarioBody,
   Upstream,
 } from '@/shared/scenarios/schemas';
+import type { StructureBody } from '@/shared/scenarios/structures/schemas';
 import { clockFromText, clockToText } from './startClock';
 
 type ByKind<T extends { kind: string }> = { [K in T['kind']]: Extract<T, { kind: K }> };
@@ -22,6 +25,8 @@ export interface Draft {
   note: string;
   upstream: { kind: Upstream['kind']; byKind: ByKind<Upstream> };
   laterals: LateralInflow[];
+  structures: StructureBody[];
+  roughnessFactors: RoughnessFactorBody[];
   downstream: { kind: Downstream['kind']; byKind: ByKind<Downstream> };
   initial: { kind: InitialState['kind']; byKind: ByKind<InitialState> };
   numerics: NumericsSettings;
@@ -33,6 +38,14 @@ export const emptyLateral = (): LateralInflow => ({
   to: null,
   times: [],
   flows: [],
+});
+
+export const emptyReservoir = (): ReservoirEnd => ({
+  kind: 'reservoir',
+  storage: { stages: [], volumes: [] },
+  initialStage: null,
+  inflow: { kind: 'table', times: [], flows: [] },
+  spillway: { stages: [], flows: [] },
 });
 
 export function toDraft(body: ScenarioBody): Draft {
@@ -56,11 +69,14 @@ export function toDraft(body: ScenarioBody): Draft {
         },
         table: { kind: 'table', times: [], flows: [] },
         stage: { kind: 'stage', times: [], stages: [] },
+        reservoir: emptyReservoir(),
         wall: { kind: 'wall' },
         [upstream.kind]: upstream,
       },
     },
     laterals: body.laterals,
+    structures: body.structures ?? [],
+    roughnessFactors: body.roughnessFactors ?? [],
     downstream: {
       kind: downstream.kind,
       byKind: {
@@ -96,6 +112,8 @@ export function toBody(draft: Draft): ScenarioBody {
     note: draft.note.trim(),
     upstream: draft.upstream.byKind[draft.upstream.kind],
     laterals: draft.laterals,
+    structures: draft.structures,
+    roughnessFactors: draft.roughnessFactors,
     downstream: draft.downstream.byKind[draft.downstream.kind],
     initial: draft.initial.byKind[draft.initial.kind],
     numerics: draft.numerics,

@@ -5,6 +5,7 @@ import type {
   NumericsSettings,
   Upstream,
 } from '@/shared/scenarios/schemas';
+import type { StructureBody } from '@/shared/scenarios/structures/schemas';
 import { emptyLateral, type Draft } from './draft';
 
 /** A change to the entry of the kind that stands. */
@@ -22,6 +23,10 @@ export type DraftAction =
   | { type: 'lateralAdded' }
   | { type: 'lateralChanged'; index: number; change: Partial<LateralInflow> }
   | { type: 'lateralRemoved'; index: number }
+  | { type: 'structureAdded'; structure: StructureBody }
+  | { type: 'structureChanged'; index: number; change: Change<StructureBody> }
+  | { type: 'structureDuplicated'; index: number; id: string }
+  | { type: 'structureRemoved'; index: number }
   | { type: 'downstreamChosen'; kind: Downstream['kind'] }
   | { type: 'downstreamChanged'; change: Change<Downstream> }
   | { type: 'initialChosen'; kind: InitialState['kind'] }
@@ -48,6 +53,26 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
       };
     case 'lateralRemoved':
       return { ...draft, laterals: draft.laterals.filter((_, index) => index !== action.index) };
+    case 'structureAdded':
+      return { ...draft, structures: [...draft.structures, action.structure] };
+    case 'structureChanged':
+      return {
+        ...draft,
+        structures: draft.structures.map((structure, index) =>
+          index === action.index
+            ? ({ ...structure, ...action.change } as StructureBody)
+            : structure,
+        ),
+      };
+    case 'structureDuplicated': {
+      const copy = { ...draft.structures[action.index], id: action.id };
+      return { ...draft, structures: [...draft.structures, copy] };
+    }
+    case 'structureRemoved':
+      return {
+        ...draft,
+        structures: draft.structures.filter((_, index) => index !== action.index),
+      };
     case 'downstreamChosen':
       return { ...draft, downstream: { ...draft.downstream, kind: action.kind } };
     case 'downstreamChanged':

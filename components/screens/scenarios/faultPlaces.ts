@@ -5,6 +5,7 @@ export const PARTS = [
   'details',
   'upstream',
   'laterals',
+  'structures',
   'downstream',
   'initial',
   'numerics',
@@ -15,6 +16,7 @@ export const PART_TITLES: Record<Part, string> = {
   details: 'Scenario',
   upstream: 'Upstream end',
   laterals: 'Lateral inflows',
+  structures: 'Structures',
   downstream: 'Outlet',
   initial: 'Initial state',
   numerics: 'Numerical settings',
@@ -25,7 +27,10 @@ export const PART_TITLES: Record<Part, string> = {
  * stands at the table: `upstream.times[2]` at `upstream.values`.
  */
 export const placeOf = (path: string): string =>
-  path.replace(/\.(times|flows|stages|chainages)(\[\d+\].*)?$/, '.values');
+  path.replace(
+    /\.(times|flows|stages|chainages|volumes|openings|offsets|levels)(\[\d+\].*)?$/,
+    '.values',
+  );
 
 /** Identifier of the place in the document, for jumping to it. */
 export const anchorOf = (path: string): string =>

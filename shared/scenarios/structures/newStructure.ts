@@ -162,7 +162,7 @@ const NAMES: Record<StructureBody['kind'], string> = {
   breach: 'Dam',
 };
 
-function freeName(kind: StructureBody['kind'], taken: readonly string[]): string {
+export function freeName(kind: StructureBody['kind'], taken: readonly string[]): string {
   for (let number = 1; ; number++) {
     const name = `${NAMES[kind]} ${number}`;
     if (!taken.includes(name)) return name;

@@ -1,5 +1,7 @@
 import { toBody, toDraft, type Draft } from '@/components/screens/scenarios/draft';
 import { draftReducer, type DraftAction } from '@/components/screens/scenarios/draftReducer';
+import { newStructure } from '@/shared/scenarios/structures/newStructure';
+import { plainSections } from '../../../helpers/plainSections';
 import { scenarioSchema, type ScenarioBody } from '@/shared/scenarios/schemas';
 
 const body: ScenarioBody = {
@@ -17,6 +19,8 @@ const body: ScenarioBody = {
     gammaExponent: null,
   },
   laterals: [],
+  structures: [],
+  roughnessFactors: [],
   downstream: { kind: 'normalDepth', slope: 0.0009 },
   initial: { kind: 'steady' },
   numerics: {
@@ -81,7 +85,24 @@ describe('the draft of a scenario', () => {
     ]);
   });
 
-  it.each(['generated', 'table', 'stage', 'wall'] as const)(
+  it('adds, changes, copies and takes out structures one by one', () => {
+    const weir = newStructure('weir', {
+      chainage: 500,
+      sections: plainSections(4, 500),
+      upstream: body.upstream,
+      taken: [],
+    });
+    const draft = after(
+      { type: 'structureAdded', structure: weir },
+      { type: 'structureChanged', index: 0, change: { chainage: 700 } },
+      { type: 'structureDuplicated', index: 0, id: 'Weir 2' },
+      { type: 'structureChanged', index: 1, change: { chainage: 900 } },
+      { type: 'structureRemoved', index: 0 },
+    );
+    expect(toBody(draft).structures).toEqual([{ ...weir, id: 'Weir 2', chainage: 900 }]);
+  });
+
+  it.each(['generated', 'table', 'stage', 'reservoir', 'wall'] as const)(
     'makes a body that can be stored though incomplete: upstream %s',
     async (kind) => {
       const draft = after({ type: 'upstreamChosen', kind });

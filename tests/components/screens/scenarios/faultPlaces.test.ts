@@ -8,6 +8,24 @@ describe('where a fault of a scenario is shown', () => {
     ['laterals[1].flows[2]', 'laterals[1].values', 'laterals', 'scenario-laterals-1-values'],
     ['laterals[1].from', 'laterals[1].from', 'laterals', 'scenario-laterals-1-from'],
     ['initial.stageAbove', 'initial.stageAbove', 'initial', 'scenario-initial-stageAbove'],
+    [
+      'structures[0].offsets[1]',
+      'structures[0].values',
+      'structures',
+      'scenario-structures-0-values',
+    ],
+    [
+      'structures[2].dam.height',
+      'structures[2].dam.height',
+      'structures',
+      'scenario-structures-2-dam-height',
+    ],
+    [
+      'upstream.storage.volumes[4]',
+      'upstream.storage.values',
+      'upstream',
+      'scenario-upstream-storage-values',
+    ],
     ['name', 'name', 'details', 'scenario-name'],
   ])('%s', (path, place, part, anchor) => {
     expect(placeOf(path)).toBe(place);
