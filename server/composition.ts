@@ -10,6 +10,7 @@ import { buildPlatform, type Overrides } from './platform';
 import { buildAccounts } from './services/accounts';
 import { buildReadAudit } from './services/audit/readAudit';
 import { buildCalibration } from './services/calibration';
+import { buildComparison } from './services/comparison';
 import { buildObservations } from './services/observations';
 import { buildConfidence } from './services/confidence';
 import { buildIssued } from './services/issued/readIssued';
@@ -24,6 +25,7 @@ import { buildMembers } from './services/studies/members';
 import { buildStations } from './services/studies/stations';
 import { buildStudies } from './services/studies/studies';
 import { buildSurveys } from './services/surveys/surveys';
+import { buildUploads } from './services/uploads/uploads';
 import { buildVerificationCases } from './services/verificationCases';
 import { buildTasks } from './services/tasks';
 
@@ -63,11 +65,13 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       studies: buildStudies(platform),
       members: buildMembers(platform),
       stations: buildStations(platform),
-      surveys: buildSurveys(platform),
+      surveys: buildSurveys(platform, { background, mailer }),
+      uploads: buildUploads(platform),
       reaches: buildReaches(platform),
       plans: buildPlans(platform, runs),
       scenarios,
       observations,
+      comparison: buildComparison(platform, runs),
       calibration: buildCalibration(platform, { observations, runs, scenarios, tasks }),
       runs,
       tasks,

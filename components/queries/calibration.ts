@@ -6,6 +6,7 @@ import { api } from './apiClient';
 import { runKeys } from './runs';
 import { scenarioKeys } from './scenarios';
 import { studyKeys } from './studies';
+import { taskSetChanged } from './tasks';
 
 /** A run against an observed flood; without a name against the one that is reported, else the first. */
 export const useResiduals = (runId: number, flood: string | null) =>
@@ -41,7 +42,7 @@ export function useRequestSearch(runId: number) {
   const client = useQueryClient();
   return useMutation({
     mutationFn: (body: SearchBody) => api.post<TaskSet>(`/runs/${runId}/calibrations`, body),
-    onSuccess: () => client.invalidateQueries({ queryKey: ['taskSets'] }),
+    onSuccess: (set) => taskSetChanged(client, set),
   });
 }
 

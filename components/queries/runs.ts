@@ -1,6 +1,8 @@
 import {
   keepPreviousData,
+  queryOptions,
   useMutation,
+  useQueries,
   useQuery,
   useQueryClient,
   type QueryClient,
@@ -49,26 +51,57 @@ export const useRunSummary = (runId: number) =>
     queryFn: ({ signal }) => api.get<RunSummary>(`/runs/${runId}/summary`, { signal }),
   });
 
-/** Values against time at a place, m; the last place stays in view until the next has come. */
-export const useRunSeries = (runId: number, chainage: number | null) =>
-  useQuery({
+const seriesQuery = (runId: number, chainage: number) =>
+  queryOptions({
     ...FIXED,
-    queryKey: runKeys.result(runId, 'series', chainage ?? 0),
+    queryKey: runKeys.result(runId, 'series', chainage),
     queryFn: ({ signal }) =>
       api.get<RunSeries>(`/runs/${runId}/series`, { signal, query: { chainage } }),
-    enabled: chainage !== null,
-    placeholderData: keepPreviousData,
   });
 
-/** The whole wave for the long section. */
-export const useRunSurface = (runId: number, places: number, moments: number) =>
-  useQuery({
+const surfaceQuery = (runId: number, places: number, moments: number) =>
+  queryOptions({
     ...FIXED,
     queryKey: runKeys.result(runId, 'surface', places, moments),
     queryFn: async ({ signal }) =>
       decodeSurface(
         await api.bytes(`/runs/${runId}/surface`, { signal, query: { places, moments } }),
       ),
+  });
+
+/** Values against time at a place, m; the last place stays in view until the next has come. */
+export const useRunSeries = (runId: number, chainage: number | null) =>
+  useQuery({
+    ...seriesQuery(runId, chainage ?? 0),
+    enabled: chainage !== null,
+    placeholderData: keepPreviousData,
+  });
+
+/** The whole wave for the long section. */
+export const useRunSurface = (runId: number, places: number, moments: number) =>
+  useQuery(surfaceQuery(runId, places, moments));
+
+/** The highest water of several runs; null until all are read. */
+export function useRunSurfaces(runIds: readonly number[], places: number) {
+  const moments = 2;
+  return useQueries({
+    queries: runIds.map((runId) => surfaceQuery(runId, places, moments)),
+    combine: (results) => ({
+      surfaces: results.every(({ data }) => data) ? results.map(({ data }) => data!) : null,
+      error: results.find(({ error }) => error)?.error ?? null,
+      retry: () => void Promise.all(results.map(({ refetch }) => refetch())),
+    }),
+  });
+}
+
+/** Values of several runs at one place; null for a run that does not have it, or until it is read. */
+export const useSeriesOfRuns = (runIds: readonly number[], chainage: number) =>
+  useQueries({
+    queries: runIds.map((runId) => seriesQuery(runId, chainage)),
+    combine: (results) => ({
+      series: results.map(({ data }) => data ?? null),
+      isPending: results.some(({ isPending }) => isPending),
+    }),
   });
 
 /** The sections as they were frozen with the run: the reach may have changed since. */

@@ -36,9 +36,11 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'DELETE /gauges/:gaugeId': say('gauge.removed', 'Gauge record removed'),
   'POST /runs/:runId/calibrations': say('taskSet.requested', 'Search for roughness asked for of'),
   'POST /task-sets/:taskSetId/scenario': say('scenario.made', 'Scenario made of the search'),
+  'GET /runs/:runId/residuals.csv': say('run.residualsTaken', 'Residuals downloaded as CSV'),
   'PUT /runs/:runId/observed': say('run.observed', 'Observed flood of the report chosen'),
 
   'POST /studies/:studyId/surveys': say('survey.sent', 'Survey handed in for'),
+  'POST /surveys/:surveyId/decision': say('survey.decided', 'Survey decided on'),
   'GET /refusals/:refusalId/faults.xlsx': say(
     'survey.faultsTaken',
     'Faults of a survey downloaded',
@@ -106,6 +108,10 @@ export const NOT_TOLD = new Set([
   'POST /auth/password-reset/request',
   'POST /invitations/look',
   'POST /studies/:studyId/surveys/read',
+  // The hand-in that they end in is told.
+  'POST /studies/:studyId/uploads',
+  'PATCH /uploads/:uploadId',
+  'DELETE /uploads/:uploadId',
   'POST /tables/read',
   'POST /studies/:studyId/marks/read',
   'GET /templates/survey.xlsx',

@@ -6,6 +6,8 @@ import { actorOf, authorize, recordOf, type Loader } from '../middleware/authori
 import { pathId } from '../middleware/pathId';
 import { check, validate } from '../middleware/validate';
 import type { RunModel } from '../models/Run';
+import { csvLine } from '../results/exports/csvField';
+import { residualRows } from '../results/exports/residualRows';
 import type { TaskSetModel } from '../models/TaskSet';
 import { presentTaskSet } from '../presenters/taskSets';
 
@@ -20,6 +22,20 @@ export function calibrationRoutes({ authenticate, calibration, runs, tasks }: Se
     async (req, res) => {
       const { flood } = await check(residualsQuerySchema, req.query);
       res.json(await calibration.residuals.read(recordOf(res), flood));
+    },
+  );
+
+  router.get(
+    '/runs/:runId/residuals.csv',
+    authenticate,
+    authorize('calibration.read', run),
+    async (req, res) => {
+      const { flood } = await check(residualsQuerySchema, req.query);
+      const record = recordOf<RunModel>(res);
+      const residuals = await calibration.residuals.read(record, flood);
+      const rows = residualRows(residuals, record.study!.unitSystem);
+      res.attachment(`run-${record.number}-residuals.csv`).type('text/csv; charset=utf-8');
+      res.send(rows.map(csvLine).join(''));
     },
   );
 

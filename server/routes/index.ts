@@ -2,6 +2,7 @@ import type { Router } from 'express';
 import type { Services } from '../composition';
 import { auditRoutes } from './audit';
 import { calibrationRoutes } from './calibration';
+import { comparisonRoutes } from './comparison';
 import { observationRoutes } from './observations';
 import { authRoutes } from './auth';
 import { confidenceRoutes } from './confidence';
@@ -21,6 +22,7 @@ import { surveyRoutes } from './surveys';
 import { tableRoutes } from './tables';
 import { taskSetRoutes } from './taskSets';
 import { templateRoutes } from './templates';
+import { uploadRoutes } from './uploads';
 import { userRoutes } from './users';
 import { verificationRoutes } from './verification';
 import { verificationCaseRoutes } from './verificationCases';
@@ -39,8 +41,10 @@ export const ROUTES: ((services: Services) => Router)[] = [
   stationRoutes,
   observationRoutes,
   calibrationRoutes,
+  comparisonRoutes,
   studyRoutes,
   surveyRoutes,
+  uploadRoutes,
   tableRoutes,
   taskSetRoutes,
   confidenceRoutes,

@@ -19,10 +19,12 @@ export function RunsScreen() {
   usePlaceAndTimeStore();
   if (isApiError(runs.error, 'notFound')) return <NotThere />;
   const root = `/studies/${study.id}` as const;
+  const routed = runs.data?.filter(({ state }) => state === 'routed').length ?? 0;
   return (
     <Screen
       title="Runs"
       crumbs={[{ label: study.title, href: root }, { label: 'Runs' }]}
+      actions={routed >= 2 ? <Button label="Compare runs" href={`${root}/compare`} /> : undefined}
       lead="Each run keeps the survey, the roughness and the flood that it was given. A change makes a new run."
     >
       {runs.error ? (

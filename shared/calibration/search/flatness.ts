@@ -2,8 +2,8 @@ import type { Flatness, SearchStretch } from './types';
 
 /** Multipliers that are tried beside the best, as factors of it; those beyond the bounds are left out. */
 const STEPS = [0.8, 0.9, 1.1, 1.25];
-/** The range is that of the multipliers whose misfit is at most this much above the best. */
-export const NEAR_BEST = 1.1;
+/** As good as the best: a tenth above it, or a tenth of the tolerance where the best is very small. */
+export const nearBest = (misfit: number): number => misfit + Math.max(0.1 * misfit, 0.1);
 /** A bound is reached where the best lies this near to it. */
 const AT_BOUND = 0.002;
 
@@ -68,7 +68,7 @@ function curvatureAt(points: Point[], best: number): number | null {
 
 /** Outwards from the best as far as the misfit, straight between the points, stays near it. */
 function rangeOf(points: Point[], best: Point): Flatness['range'] {
-  const limit = NEAR_BEST * best.misfit;
+  const limit = nearBest(best.misfit);
   const at = points.findIndex(({ factor }) => factor === best.factor);
   if (at < 0) return null;
   const walk = (step: 1 | -1) => {

@@ -33,7 +33,7 @@ export interface Flatness {
    * points; null where fewer than three are known. Near 0: the observations do not tell.
    */
   curvature: number | null;
-  /** Multipliers whose misfit is at most 10 % above the best; open where it goes on beyond what was tried. */
+  /** Multipliers as good as the best (`nearBest`); open where they go on beyond what was tried. */
   range: { low: number; high: number; lowOpen: boolean; highOpen: boolean } | null;
   /** The best lies on a bound: the search wanted to go further. */
   atBound: 'low' | 'high' | null;

@@ -19,7 +19,7 @@ test('curvature of a parabola in the logarithm is given back exactly', () => {
   expect(flat.atBound).toBeNull();
 });
 
-test('the range ends where the misfit is a tenth above the best, or is open', () => {
+test('the range ends where the misfit is a tenth of the tolerance above the best, or is open', () => {
   const points = [
     { factor: 0.8, misfit: 0.9 },
     { factor: 0.9, misfit: 0.5 },
@@ -27,9 +27,9 @@ test('the range ends where the misfit is a tenth above the best, or is open', ()
     { factor: 1.25, misfit: 0.54 },
   ];
   const { range } = flatnessOf(points, { factor: 1, misfit: 0.5 }, bounds);
-  // 0.55 lies an eighth of the way from 0.5 at 0.9 to 0.9 at 0.8.
+  // 0.6 lies a quarter of the way from 0.5 at 0.9 to 0.9 at 0.8.
   expect(range).toEqual({
-    low: expect.closeTo(0.8875, 9),
+    low: expect.closeTo(0.875, 9),
     high: 1.25,
     lowOpen: false,
     highOpen: true,

@@ -1,0 +1,1 @@
+export { CalibrationScreen as default } from '@/components/screens/calibration/CalibrationScreen';

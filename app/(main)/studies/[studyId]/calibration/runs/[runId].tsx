@@ -1,0 +1,1 @@
+export { ResidualsScreen as default } from '@/components/screens/calibration/ResidualsScreen';

@@ -1,0 +1,1 @@
+export { SearchFormScreen as default } from '@/components/screens/calibration/SearchFormScreen';
