@@ -14,6 +14,7 @@ import { damFailure, designFlood, largerFlood } from './scenarios';
 import { faultySurveyFile, surveyFile } from './surveyFiles';
 
 export { seedChecks } from './checks';
+export { seedConfidence } from './confidence';
 
 const VESHALL: StudyBody = {
   title: 'Lower Veshall at Tornick',
@@ -160,7 +161,15 @@ async function seedScenario(
   const studyId = study.id;
   if ((await models.SurveyRevision.count({ where: { studyId } })) === 0) {
     const file = { name: FILE_NAMES[study.title], bytes: surveyFile(sections) };
-    await surveys.accept({ study, actor: surveyor, file, choice: null, note: 'November survey.' });
+    const note = 'November survey.';
+    await surveys.accept({ study, actor: surveyor, file, choice: null, note });
+  }
+  if ((await models.Reach.count({ where: { studyId } })) === 0) {
+    const revision = await models.SurveyRevision.findOne({
+      where: { studyId },
+      rejectOnEmpty: true,
+    });
+    await surveys.decide(revision, modeller, { decision: 'accepted', remarks: '' });
   }
   const reach = await models.Reach.findOne({ where: { studyId }, rejectOnEmpty: true });
   const body = bodyOf(reach.id, sections);

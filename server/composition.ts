@@ -52,7 +52,7 @@ export async function compose(env: Env, overrides: Overrides = {}) {
           reports.pdf(await runs.find.again(id), 'A4'),
         ),
     });
-    const reports = buildReports(platform, { reviews, runs });
+    const reports = buildReports(platform, { confidence, reviews, runs });
     return {
       ...platform,
       close,

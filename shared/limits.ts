@@ -10,6 +10,12 @@ export const LIMITS = {
     parseSeconds: 30,
     /** Faults reported of one file; the rest is counted. */
     faults: 500,
+    /** Bytes of a file that travel at a time. */
+    partBytes: 256 * 1024,
+    /** Of one person, under way at once. */
+    openPerUser: 10,
+    /** After which an upload that nobody goes on with is forgotten. */
+    keptHours: 24,
   },
   hydrographPoints: 20_000,
   laterals: 50,

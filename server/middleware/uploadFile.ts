@@ -3,6 +3,7 @@ import type { Request, RequestHandler } from 'express';
 import multer, { memoryStorage } from 'multer';
 import { LIMITS } from '../../shared/limits';
 import { invalid } from '../errors';
+import { plainFileName } from '../services/files/plainFileName';
 
 const takeFile = multer({
   storage: memoryStorage(),
@@ -21,20 +22,14 @@ const takeFile = multer({
 export const uploadFile: RequestHandler = (req, res, next) =>
   takeFile(req, res, AsyncResource.bind(next));
 
-const MAX_NAME = 200;
-
 /** The file of the form. Throws `invalid` where there is none. */
 export function fileOf(req: Request): { name: string; bytes: Buffer } {
   if (!req.file) throw invalid([{ path: 'file', message: 'Choose a file.' }]);
   return { name: plainName(req.file.originalname), bytes: req.file.buffer };
 }
 
-/** The last part of the name, without signs that do something, cut to length. The form sends it as UTF-8 read as Latin-1. */
+/** The form sends its name as UTF-8 read as Latin-1. */
 function plainName(sent: string): string {
   const utf8 = Buffer.from(sent, 'latin1').toString('utf8');
-  const name = utf8.includes('\ufffd') ? sent : utf8;
-  const last = name.split(/[/\\]/).at(-1)!;
-  // Control signs and direction marks never reach a page or a header.
-  const plain = last.replace(/[\p{Cc}\p{Cf}]/gu, '').trim();
-  return plain.slice(-MAX_NAME) || 'survey';
+  return plainFileName(utf8.includes('\ufffd') ? sent : utf8);
 }

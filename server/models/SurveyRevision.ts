@@ -7,6 +7,7 @@ import {
   type NonAttribute,
   type Sequelize,
 } from 'sequelize';
+import type { SurveyDecisionModel } from './SurveyDecision';
 import type { UserModel } from './User';
 
 /** A survey as it was accepted. Rows are written once and never changed. */
@@ -34,6 +35,7 @@ export interface SurveyRevisionModel extends Model<
   sentBy: number;
   sentAt: Date;
   sender?: NonAttribute<UserModel>;
+  decisions?: NonAttribute<SurveyDecisionModel[]>;
 }
 
 export const defineSurveyRevision = (sequelize: Sequelize) =>

@@ -7,6 +7,7 @@ import { defineSignInAttempt } from './SignInAttempt';
 import { defineStudy } from './Study';
 import { defineStudyMember } from './StudyMember';
 import { defineStation } from './Station';
+import { defineSurveyDecision } from './SurveyDecision';
 import { defineSurveyRevision } from './SurveyRevision';
 import { defineSurveyRefusal } from './SurveyRefusal';
 import { defineReach } from './Reach';
@@ -28,6 +29,8 @@ import { defineSignOff } from './SignOff';
 import { defineWithdrawal } from './Withdrawal';
 import { defineTask } from './Task';
 import { defineTaskSet } from './TaskSet';
+import { defineUpload } from './Upload';
+import { defineUploadPart } from './UploadPart';
 import { defineUser } from './User';
 
 /** Every table, bound to one connection pool. A new model is one line here, and its ties to others below. */
@@ -41,6 +44,7 @@ export function defineModels(sequelize: Sequelize) {
     Study: defineStudy(sequelize),
     StudyMember: defineStudyMember(sequelize),
     Station: defineStation(sequelize),
+    SurveyDecision: defineSurveyDecision(sequelize),
     SurveyRevision: defineSurveyRevision(sequelize),
     SurveyRefusal: defineSurveyRefusal(sequelize),
     Reach: defineReach(sequelize),
@@ -62,6 +66,8 @@ export function defineModels(sequelize: Sequelize) {
     Withdrawal: defineWithdrawal(sequelize),
     Task: defineTask(sequelize),
     TaskSet: defineTaskSet(sequelize),
+    Upload: defineUpload(sequelize),
+    UploadPart: defineUploadPart(sequelize),
     User: defineUser(sequelize),
   };
   models.User.belongsTo(models.Firm, { as: 'firm', foreignKey: 'firmId' });
@@ -70,6 +76,11 @@ export function defineModels(sequelize: Sequelize) {
   models.Study.belongsTo(models.User, { as: 'creator', foreignKey: 'createdBy' });
   models.StudyMember.belongsTo(models.User, { as: 'user', foreignKey: 'userId' });
   models.SurveyRevision.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
+  models.SurveyRevision.hasMany(models.SurveyDecision, {
+    as: 'decisions',
+    foreignKey: 'surveyRevisionId',
+  });
+  models.SurveyDecision.belongsTo(models.User, { as: 'decider', foreignKey: 'decidedBy' });
   models.SurveyRefusal.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
   models.Reach.belongsTo(models.SurveyRevision, { as: 'survey', foreignKey: 'surveyRevisionId' });
   models.Reach.belongsTo(models.User, { as: 'updater', foreignKey: 'updatedBy' });

@@ -66,6 +66,11 @@ export const POLICIES = table({
     refusal: { seenBy: 'study.read' },
   },
   'survey.read': { grants: { ...engineers, surveyor: both(asSurveyor, own) }, refusal: 'notFound' },
+  'survey.decide': { grants: engineers, refusal: { seenBy: 'survey.read' } },
+  'upload.change': {
+    grants: { modeller: own, seniorEngineer: own, surveyor: both(asSurveyor, own) },
+    refusal: 'notFound',
+  },
   'template.read': { grants: { ...engineers, surveyor: inFirm }, refusal: 'forbidden' },
 
   // Reaches and scenarios

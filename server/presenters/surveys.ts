@@ -1,13 +1,15 @@
 import type {
   Section,
+  SurveyDecision,
   SurveyRefusal,
   SurveyRevision,
   SurveyRevisionRow,
 } from '../../shared/surveys/types';
 import type { SurveyRefusalModel } from '../models/SurveyRefusal';
 import type { SurveyRevisionModel } from '../models/SurveyRevision';
+import { decisionOf } from '../services/surveys/decideSurvey';
 
-/** Needs the revision's `sender`. */
+/** Needs the revision's `sender` and its `decisions` with their `decider`. */
 export const presentRevisionRow = (revision: SurveyRevisionModel): SurveyRevisionRow => ({
   id: revision.id,
   revision: revision.revision,
@@ -20,7 +22,15 @@ export const presentRevisionRow = (revision: SurveyRevisionModel): SurveyRevisio
   lastChainage: revision.lastChainage,
   sentBy: revision.sender!.name,
   sentAt: revision.sentAt.toISOString(),
+  decision: presentDecision(revision),
 });
+
+function presentDecision(revision: SurveyRevisionModel): SurveyDecision | null {
+  const held = decisionOf(revision);
+  if (!held) return null;
+  const { decision, remarks, decider, decidedAt } = held;
+  return { decision, remarks, by: decider!.name, at: decidedAt.toISOString() };
+}
 
 export const presentRevision = (
   revision: SurveyRevisionModel,

@@ -1,3 +1,5 @@
+import type { ConfidenceKind } from '../../shared/confidence/schemas';
+import type { ConfidenceResult } from '../../shared/confidence/types';
 import type { Review, SignOff } from '../../shared/review/types';
 import type { Station } from '../../shared/studies/types';
 import type { UnitSystem } from '../../shared/units/units';
@@ -20,6 +22,18 @@ export type SignOffFacts = Pick<
   | 'supersedesRunNumber'
 > & { by: string };
 
+/** A finished set of the run's frozen case. */
+export interface ConfidenceFacts {
+  name: string;
+  kind: ConfidenceKind;
+  finishedAt: string;
+  total: number;
+  failed: number;
+  /** What was chosen, in words. */
+  settings: [string, string | null][];
+  result: ConfidenceResult;
+}
+
 export type WithdrawalFacts = NonNullable<SignOff['withdrawal']>;
 
 /**
@@ -36,7 +50,7 @@ export interface ReportFacts {
     purpose: string;
     unitSystem: UnitSystem;
   };
-  survey: Omit<SurveyRevisionRow, 'id'>;
+  survey: Omit<SurveyRevisionRow, 'id' | 'decision'>;
   run: {
     number: number;
     scenarioName: string;
@@ -49,6 +63,8 @@ export interface ReportFacts {
     solverVersion: string;
   };
   stations: Station[];
+  /** The latest finished set of each kind of this very case; of a signed run those that its signature saw. */
+  confidence: ConfidenceFacts[];
   /** null: never sent for checking. */
   review: ReviewFacts | null;
   /** null: preliminary. */

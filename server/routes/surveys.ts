@@ -1,8 +1,12 @@
-import { Router, type Request } from 'express';
-import { matchChoiceSchema, surveyFormSchema } from '../../shared/surveys/schemas';
+import { Router, type Request, type Response } from 'express';
+import {
+  matchChoiceSchema,
+  surveyDecisionSchema,
+  surveyFormSchema,
+} from '../../shared/surveys/schemas';
 import type { MatchChoice } from '../../shared/surveys/types';
 import type { Services } from '../composition';
-import { invalid } from '../errors';
+import { AppError, invalid } from '../errors';
 import { actorOf, authorize, recordOf, type Loader } from '../middleware/authorize';
 import { pathId } from '../middleware/pathId';
 import { sendWorkbook } from '../middleware/sendWorkbook';
@@ -14,13 +18,21 @@ import type { SurveyRevisionModel } from '../models/SurveyRevision';
 import { presentRefusal, presentRevision, presentRevisionRow } from '../presenters/surveys';
 import { faultsWorkbook } from '../workbooks/faultsWorkbook';
 
-export function surveyRoutes({ authenticate, studies, surveys }: Services): Router {
+export function surveyRoutes({ authenticate, studies, surveys, uploads }: Services): Router {
   const router = Router();
   const study: Loader<StudyModel> = (req, actor) => studies.load(pathId(req, 'studyId'), actor);
   const revision: Loader<SurveyRevisionModel> = (req, actor) =>
     surveys.load(pathId(req, 'surveyId'), actor);
   const refusal: Loader<SurveyRefusalModel> = (req, actor) =>
     surveys.loadRefusal(pathId(req, 'refusalId'), actor);
+
+  /** What was sent: a file in the form, or one that arrived before part by part. */
+  const sent = async (req: Request, res: Response) => {
+    const study = recordOf<StudyModel>(res);
+    const { uploadId } = req.body as { uploadId?: number };
+    const file = uploadId ? await uploads.fileOf(uploadId, study, actorOf(res)) : fileOf(req);
+    return { study, file, choice: await choiceOf(req) };
+  };
 
   router.get(
     '/studies/:studyId/surveys',
@@ -42,12 +54,7 @@ export function surveyRoutes({ authenticate, studies, surveys }: Services): Rout
     uploadFile,
     validate(surveyFormSchema),
     async (req, res) => {
-      const sent = {
-        study: recordOf<StudyModel>(res),
-        file: fileOf(req),
-        choice: await choiceOf(req),
-      };
-      res.json(await surveys.read(sent));
+      res.json(await surveys.read(await sent(req, res)));
     },
   );
 
@@ -58,14 +65,18 @@ export function surveyRoutes({ authenticate, studies, surveys }: Services): Rout
     uploadFile,
     validate(surveyFormSchema),
     async (req, res) => {
-      const accepted = await surveys.accept({
-        study: recordOf<StudyModel>(res),
-        actor: actorOf(res),
-        file: fileOf(req),
-        choice: await choiceOf(req),
-        note: req.body.note,
-      });
-      res.status(201).json(presentRevisionRow(accepted));
+      const { note, uploadId } = req.body as { note: string; uploadId?: number };
+      const actor = actorOf(res);
+      try {
+        const taken = await surveys.accept({ ...(await sent(req, res)), actor, note });
+        if (uploadId) await uploads.remove(uploadId);
+        res.status(201).json(presentRevisionRow(taken));
+      } catch (error) {
+        // Nothing is kept of a file that is refused.
+        const refused = error instanceof AppError && error.code === 'surveyRefused';
+        if (refused && uploadId) await uploads.remove(uploadId);
+        throw error;
+      }
     },
   );
 
@@ -76,6 +87,20 @@ export function surveyRoutes({ authenticate, studies, surveys }: Services): Rout
     async (_req, res) => {
       const record = recordOf<SurveyRevisionModel>(res);
       res.json(presentRevision(record, await surveys.sectionsOf(record)));
+    },
+  );
+
+  router.post(
+    '/surveys/:surveyId/decision',
+    authenticate,
+    authorize('survey.decide', revision),
+    validate(surveyDecisionSchema),
+    async (req, res) => {
+      const record = recordOf<SurveyRevisionModel>(res);
+      const actor = actorOf(res);
+      await surveys.decide(record, actor, req.body);
+      const again = (await surveys.load(record.id, actor))!.record;
+      res.json(presentRevisionRow(again));
     },
   );
 

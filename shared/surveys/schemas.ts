@@ -17,10 +17,25 @@ export const matchChoiceSchema = object({
   decimal: string().oneOf(['auto', 'point', 'comma']).default('auto').required(),
 }).noUnknown();
 
-/** The other fields of the multipart body. */
+/** The other fields of the multipart body; with `uploadId` in the place of the file the body is JSON. */
 export const surveyFormSchema = object({
+  uploadId: number().integer().positive().optional(),
   match: string().max(20_000).optional(),
   note: string().trim().max(LIMITS.textLong).default(''),
 }).noUnknown();
 
+/** `POST /api/surveys/:surveyId/decision`. */
+export const surveyDecisionSchema = object({
+  decision: string().oneOf(['accepted', 'returned']).required(),
+  remarks: string()
+    .trim()
+    .max(LIMITS.textLong)
+    .default('')
+    .when('decision', {
+      is: 'returned',
+      then: (remarks) => remarks.required('Say what is to be mended.'),
+    }),
+}).noUnknown();
+
+export type SurveyDecisionBody = InferType<typeof surveyDecisionSchema>;
 export type MatchChoiceBody = InferType<typeof matchChoiceSchema>;

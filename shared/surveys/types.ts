@@ -94,7 +94,16 @@ export interface SurveyReading {
   sections: Section[];
 }
 
-/** An accepted revision; never changes. `GET /api/studies/:studyId/surveys`. */
+/** What an engineer said of a revision that was handed in. */
+export interface SurveyDecision {
+  decision: 'accepted' | 'returned';
+  /** For the surveyor; never empty where it was returned. */
+  remarks: string;
+  by: string;
+  at: string;
+}
+
+/** A revision that was handed in; never changes. `GET /api/studies/:studyId/surveys`. */
 export interface SurveyRevisionRow {
   id: number;
   revision: number;
@@ -109,6 +118,8 @@ export interface SurveyRevisionRow {
   lastChainage: number;
   sentBy: string;
   sentAt: string;
+  /** null: an engineer has not decided yet. */
+  decision: SurveyDecision | null;
 }
 export interface SurveyRevision extends SurveyRevisionRow {
   sections: Section[];

@@ -5,12 +5,16 @@ import { packJson, unpackJson } from '../../database/packedJson';
 import type { StudyModel } from '../../models/Study';
 import type { SurveyRefusalModel } from '../../models/SurveyRefusal';
 import type { SurveyRevisionModel } from '../../models/SurveyRevision';
+import type { Background } from '../../background';
+import type { Mailer } from '../../mail/Mailer';
 import type { Platform } from '../../platform';
 import { may } from '../../policies/decide';
 import type { Actor, Loaded, Subject } from '../../policies/subject';
 import { studySubject } from '../studies/studySubject';
 import { touchStudy } from '../studies/touchStudy';
 import { readFile, type SentFile } from '../files/readFile';
+import { buildDecideSurvey, decisionOf } from './decideSurvey';
+import { buildTellOfSurveys } from './tellOfSurveys';
 
 interface Sent {
   study: StudyModel;
@@ -19,13 +23,16 @@ interface Sent {
 }
 
 /** Surveys of a study: read, taken in as revisions that never change, or refused. */
-export function buildSurveys(platform: Platform) {
+export function buildSurveys(platform: Platform, mail: { background: Background; mailer: Mailer }) {
   const { audit, models, sequelize, now } = platform;
-  const { Reach, Study, SurveyRefusal, SurveyRevision } = models;
+  const { Study, SurveyDecision, SurveyRefusal, SurveyRevision } = models;
+  const tell = buildTellOfSurveys(platform, mail);
+  const { note: noteDecision, decide } = buildDecideSurvey(platform, tell);
+  const people = ['sender', { model: SurveyDecision, as: 'decisions', include: ['decider'] }];
 
   /** For `authorize`. */
   async function load(id: number, actor: Actor): Promise<Loaded<SurveyRevisionModel> | null> {
-    const revision = await SurveyRevision.scope('withSections').findByPk(id, { include: 'sender' });
+    const revision = await SurveyRevision.scope('withSections').findByPk(id, { include: people });
     return revision && { record: revision, subject: await subjectOf(revision, actor) };
   }
 
@@ -50,7 +57,7 @@ export function buildSurveys(platform: Platform) {
       may(actor, 'survey.read', { ...subject, ownerId: sentBy });
     const where = { studyId: study.id };
     const [revisions, refusals] = await Promise.all([
-      SurveyRevision.findAll({ where, include: 'sender', order: [['revision', 'DESC']] }),
+      SurveyRevision.findAll({ where, include: people, order: [['revision', 'DESC']] }),
       SurveyRefusal.findAll({ where, include: 'sender', order: [['id', 'DESC']], limit: 50 }),
     ]);
     return { revisions: revisions.filter(visible), refusals: refusals.filter(visible) };
@@ -68,7 +75,8 @@ export function buildSurveys(platform: Platform) {
     });
 
   /**
-   * Takes a file in as the study's next revision and makes its reach, both or neither. Throws as `read` does,
+   * Takes a file in as the study's next revision. Whoever may decide on surveys accepts their own with it; that of a
+   * surveyor waits for an engineer. Throws as `read` does,
    * `surveyRefused` where it has faults, of which alone a note is kept, and `conflict` where it is the newest revision again.
    */
   async function accept(sent: Sent & { actor: Actor; note: string }): Promise<SurveyRevisionModel> {
@@ -84,15 +92,19 @@ export function buildSurveys(platform: Platform) {
       firstChainage: sections[0].chainage,
       lastChainage: sections[sections.length - 1].chainage,
     };
-    return sequelize.transaction(async (transaction) => {
+    const subject = await studySubject(models, study, actor);
+    const accepts = may(actor, 'survey.decide', { ...subject, ownerId: actor.id });
+    const revision = await sequelize.transaction(async (transaction) => {
       // Numbers are counted under the study's lock, so that two that arrive at once follow each other.
       await Study.findByPk(study.id, { transaction, lock: transaction.LOCK.UPDATE });
       const newest = await SurveyRevision.scope('withSections').findOne({
         where: { studyId: study.id },
+        include: 'decisions',
         order: [['revision', 'DESC']],
         transaction,
       });
-      if (newest?.fileHash === fileHash && newest.sections.equals(packed))
+      const stands = newest && decisionOf(newest)?.decision !== 'returned';
+      if (stands && newest.fileHash === fileHash && newest.sections.equals(packed))
         throw conflict(
           `This file is revision ${newest.revision} already. Nothing was stored twice.`,
         );
@@ -112,24 +124,17 @@ export function buildSurveys(platform: Platform) {
         },
         { transaction },
       );
-      await Reach.create(
-        {
-          ...extent,
-          studyId: study.id,
-          surveyRevisionId: revision.id,
-          name: `Revision ${revision.revision}`,
-          sections: packed,
-          updatedBy: actor.id,
-        },
-        { transaction },
-      );
+      if (accepts) await noteDecision(revision, actor, 'accepted', '', transaction);
       await touchStudy(platform, study.id, transaction);
-      const taken = await revision.reload({ include: 'sender', transaction });
-      const words = `Revision ${revision.revision} of ${study.title} taken in`;
+      const taken = await revision.reload({ include: people, transaction });
+      const words = `Revision ${revision.revision} of ${study.title} ${accepts ? 'taken in' : 'handed in'}`;
       const record = { kind: 'survey', id: revision.id };
-      await audit.note({ action: 'survey.accepted', words, record, actor }, transaction);
+      const action = accepts ? 'survey.accepted' : 'survey.handedIn';
+      await audit.note({ action, words, record, actor }, transaction);
       return taken;
     });
+    tell.handedIn(study, revision);
+    return revision;
   }
 
   async function refuse(sent: Sent & { actor: Actor }, reading: SurveyReading): Promise<never> {
@@ -162,7 +167,7 @@ export function buildSurveys(platform: Platform) {
 
   const sectionsOf = (revision: SurveyRevisionModel) => unpackJson<Section[]>(revision.sections);
 
-  return { load, loadRefusal, list, read, accept, sectionsOf };
+  return { load, loadRefusal, list, read, accept, decide, sectionsOf };
 }
 
 export type SurveysService = ReturnType<typeof buildSurveys>;

@@ -50,6 +50,9 @@ export const EXPECTED_RIGHTS: Record<Action, Record<Persona, Answer>> = {
   'survey.list': row('      4     y   y   y      y    4      4      4'),
   'survey.send': row('      4     y   y   y      y    4      3      4'),
   'survey.read': row('      4     y   y   y      4    4      4      4'),
+  'survey.decide': row('    4     y   y   3      4    4      4      4'),
+  // The record's upload is the sender's.
+  'upload.change': row('    4     4   4   y      4    4      4      4'),
   'template.read': row('    3     y   y   y      y    y      3      3'),
   'reach.read': row('       4     y   y   4      4    4      4      4'),
   'reach.change': row('     4     y   y   4      4    4      4      4'),

@@ -50,6 +50,14 @@ export async function buildWorld(services: Services): Promise<World> {
     sentBy: sender.id,
     sentAt: new Date(),
   });
+  const upload = await models.Upload.create({
+    studyId: study.id,
+    userId: sender.id,
+    fileName: 'survey.xlsx',
+    size: 100,
+    startedAt: new Date(),
+    expiresAt: new Date(Date.now() + 1e8),
+  });
   const station = await models.Station.create({ studyId: study.id, name: 'Bridge', chainage: 10 });
   const mark = await models.Mark.create({
     studyId: study.id,
@@ -125,6 +133,7 @@ export async function buildWorld(services: Services): Promise<World> {
       gaugeId: gauge.id,
       surveyId: reach.surveyRevisionId,
       refusalId: refusal.id,
+      uploadId: upload.id,
       reachId: reach.id,
       scenarioId: scenario.id,
       runId: run.id,

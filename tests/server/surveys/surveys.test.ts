@@ -5,6 +5,7 @@ import type { UserModel } from '../../../server/models/User';
 import { unpackJson } from '../../../server/database/packedJson';
 import { buildMember, buildStudy } from '../../helpers/factories/buildStudy';
 import { buildUser } from '../../helpers/factories/buildUser';
+import { keptMail } from '../../helpers/keptMail';
 import { sheetOf, soundRows, HEADINGS } from '../../helpers/surveyRows';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 
@@ -239,4 +240,48 @@ test('an accepted revision does not change when its reach does', async () => {
   const revision = await server.services.models.SurveyRevision.unscoped().findByPk(made.body.id);
   const [section] = await unpackJson<{ banks: unknown }[]>(revision!.sections);
   expect(section.banks).toBeNull();
+});
+
+test('a hand-in of a surveyor waits for an engineer, who accepts it or returns it with remarks', async () => {
+  const [own, engineer] = [await server.signInAs(surveyor), await server.signInAs(modeller)];
+  const reaches = async () => (await engineer.get(`/api/studies/${study.id}/reaches`)).body;
+  const first = await send(own, sheetOf(soundRows()), { note: 'High water' }).expect(201);
+  expect(first.body.decision).toBeNull();
+  expect(await reaches()).toEqual([]);
+  const [told] = (await keptMail(server.services, modeller.email)).slice(-1);
+  expect(told.subject).toBe(`Survey handed in: ${study.title}`);
+  expect(told.text).toContain('High water');
+  expect(told.links[0]).toMatch(
+    new RegExp(`/studies/${study.id}/survey\\?revision=${first.body.id}$`),
+  );
+
+  const decide = (id: number, body: object, api = engineer) =>
+    api.post(`/api/surveys/${id}/decision`).send(body);
+  await decide(first.body.id, { decision: 'accepted' }, own).expect(403);
+  const bare = await decide(first.body.id, { decision: 'returned', remarks: ' ' }).expect(422);
+  expect(bare.body.error.faults[0].path).toBe('remarks');
+  const remarks = 'XS-02 stands 0.4 m too high: check the instrument height.';
+  const returned = await decide(first.body.id, { decision: 'returned', remarks }).expect(200);
+  expect(returned.body.decision).toMatchObject({
+    decision: 'returned',
+    remarks,
+    by: modeller.name,
+  });
+  expect(await reaches()).toEqual([]);
+  const mail = (await keptMail(server.services, surveyor.email)).at(-1)!;
+  expect(mail.subject).toBe(`Survey returned: ${study.title}`);
+  expect(mail.text).toContain(remarks);
+  expect((await own.get(surveys())).body.revisions[0].decision.remarks).toBe(remarks);
+
+  // The same file may come again after a return, but not while it waits.
+  const second = await send(own, sheetOf(soundRows())).expect(201);
+  await send(own, sheetOf(soundRows())).expect(409);
+  await decide(second.body.id, { decision: 'accepted' }).expect(200);
+  expect(await reaches()).toHaveLength(1);
+  const good = (await keptMail(server.services, surveyor.email)).at(-1)!;
+  expect(good.subject).toBe(`Survey accepted: ${study.title}`);
+  await decide(second.body.id, { decision: 'returned', remarks }).expect(409);
+  // What was returned may be accepted after all.
+  await decide(first.body.id, { decision: 'accepted' }).expect(200);
+  expect(await reaches()).toHaveLength(2);
 });
