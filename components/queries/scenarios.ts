@@ -1,4 +1,5 @@
 import { useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
+import type { ScenarioChange } from '@/shared/scenarios/changeScenario';
 import type { ScenarioBody } from '@/shared/scenarios/schemas';
 import type { Scenario, ScenarioRow, TableReading } from '@/shared/scenarios/types';
 import type { UnitSystem } from '@/shared/units/units';
@@ -47,11 +48,16 @@ export function useSaveScenario(studyId: number, scenarioId: number) {
   });
 }
 
+interface DuplicateBody {
+  name: string;
+  change: ScenarioChange | null;
+}
+
 export function useDuplicateScenario(studyId: number) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: ({ scenarioId, name }: { scenarioId: number; name: string }) =>
-      api.post<Scenario>(`/scenarios/${scenarioId}/duplicate`, { name }),
+    mutationFn: ({ scenarioId, ...body }: DuplicateBody & { scenarioId: number }) =>
+      api.post<Scenario>(`/scenarios/${scenarioId}/duplicate`, body),
     onSuccess: (scenario) => stored(client, studyId, scenario),
   });
 }

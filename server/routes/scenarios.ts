@@ -73,7 +73,8 @@ export function scenarioRoutes({ authenticate, scenarios, studies }: Services): 
     validate(duplicateScenarioSchema),
     authorize('scenario.change', scenario),
     async (req, res) => {
-      const made = await scenarios.duplicate(recordOf(res), actorOf(res), req.body.name);
+      const { name, change } = req.body;
+      const made = await scenarios.duplicateChanged(recordOf(res), actorOf(res), name, change);
       res.status(201).json(await present(made));
     },
   );

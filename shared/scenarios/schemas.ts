@@ -1,5 +1,6 @@
 import { array, number, object, string, type InferType, type ISchema } from 'yup';
 import { LIMITS } from '../limits';
+import { SCENARIO_CHANGES } from './changeScenario';
 import { byKind, real, series, volumes } from './fields';
 import { structureKinds, type StructureBody } from './structures/schemas';
 
@@ -186,4 +187,16 @@ export const scenarioChangeSchema = object({
 
 export const duplicateScenarioSchema = object({
   name: string().trim().max(LIMITS.textShort).required('Name the copy.'),
+  /** Made in the copy at once; null for none. */
+  change: object({
+    kind: string().oneOf(SCENARIO_CHANGES).required('Choose what changes.'),
+    value: number()
+      .typeError('Give a number.')
+      .moreThan(0, 'Above 0.')
+      .max(1e5, 'This is too much.')
+      .required('Give a number.'),
+  })
+    .noUnknown()
+    .nullable()
+    .default(null),
 }).noUnknown();

@@ -1,3 +1,5 @@
+import { useState } from 'react';
+import { FormNumberField } from '@/components/forms/FormNumberField';
 import { FormRoot } from '@/components/forms/FormRoot';
 import { FormSubmit } from '@/components/forms/FormSubmit';
 import { FormTextField } from '@/components/forms/FormTextField';
@@ -6,29 +8,44 @@ import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useDuplicateScenario } from '@/components/queries/scenarios';
 import { Button } from '@/components/ui/Button';
 import { Dialog } from '@/components/ui/Dialog';
+import { SelectField } from '@/components/ui/SelectField';
 import { LIMITS } from '@/shared/limits';
+import { CHANGED_AT, type ScenarioChange } from '@/shared/scenarios/changeScenario';
 import { duplicateScenarioSchema } from '@/shared/scenarios/schemas';
 import type { ScenarioRow } from '@/shared/scenarios/types';
+import { CHANGE_FIELDS, CHANGE_OPTIONS, type ChangeOption } from './changeWords';
 
 interface DuplicateDialogProps {
   row: ScenarioRow;
   onClose: () => void;
-  onMade: (scenarioId: number) => void;
+  /** `part` is where the change is seen; null where nothing was changed yet. */
+  onMade: (scenarioId: number, part: string | null) => void;
 }
 
-/** A copy under another name, to vary. */
+interface Values {
+  name: string;
+  change: ScenarioChange | { kind: string; value: null } | null;
+}
+
+/** A copy under another name, to vary; the usual changes are made at once. */
 export function DuplicateDialog({ row, onClose, onMade }: DuplicateDialogProps) {
   const { study } = useCurrentStudy();
   const duplicate = useDuplicateScenario(study.id);
+  const [kind, setKind] = useState<ChangeOption>('none');
+  const initial: Values = { name: `${row.name}, varied`.slice(0, LIMITS.textShort), change: null };
   const form = useYupForm({
     schema: duplicateScenarioSchema,
-    initial: { name: `${row.name}, varied`.slice(0, LIMITS.textShort) },
-    onSubmit: async ({ name }) => {
-      const copy = await duplicate.mutateAsync({ scenarioId: row.id, name });
+    initial,
+    onSubmit: async ({ name, change }) => {
+      const copy = await duplicate.mutateAsync({ scenarioId: row.id, name, change });
       onClose();
-      onMade(copy.id);
+      onMade(copy.id, change && CHANGED_AT[change.kind]);
     },
   });
+  const choose = (next: ChangeOption) => {
+    setKind(next);
+    void form.formik.setFieldValue('change', next === 'none' ? null : { kind: next, value: null });
+  };
   return (
     <Dialog title={`Duplicate ${row.name}`} open onClose={onClose}>
       <FormRoot form={form} label={`Duplicate ${row.name}`}>
@@ -38,6 +55,16 @@ export function DuplicateDialog({ row, onClose, onMade }: DuplicateDialogProps) 
           maxLength={LIMITS.textShort}
           autoFocus
         />
+        <SelectField
+          label="Change at once"
+          value={kind}
+          options={CHANGE_OPTIONS}
+          onChange={choose}
+          error={form.errorOf('change.kind')}
+        />
+        {kind === 'none' ? null : (
+          <FormNumberField key={kind} name="change.value" {...CHANGE_FIELDS[kind]} />
+        )}
         <FormSubmit label="Make the copy" wide />
         <Button label="Close" wide onPress={onClose} />
       </FormRoot>

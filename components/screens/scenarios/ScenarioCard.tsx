@@ -67,7 +67,12 @@ export function ScenarioCard({ row, reachName }: ScenarioCardProps) {
         <DuplicateDialog
           row={row}
           onClose={() => setAsking(null)}
-          onMade={(copyId) => router.push(`/studies/${study.id}/scenarios/${copyId}`)}
+          onMade={(copyId, part) =>
+            router.push({
+              pathname: '/studies/[studyId]/scenarios/[scenarioId]',
+              params: { studyId: study.id, scenarioId: copyId, ...(part && { part }) },
+            })
+          }
         />
       ) : null}
       <Dialog

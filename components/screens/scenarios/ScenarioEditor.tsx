@@ -22,6 +22,7 @@ import { ReadinessCard } from './ReadinessCard';
 import { StructuresPart } from './structures/StructuresPart';
 import { UnsavedNotice } from './UnsavedNotice';
 import { UpstreamPart } from './UpstreamPart';
+import { usePartOfAddress } from './usePartOfAddress';
 import { useScenarioEditor } from './useScenarioEditor';
 import { whyNotRouted } from './whyNotRouted';
 
@@ -36,6 +37,7 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
   const editor = useScenarioEditor(scenario, reach.data);
   const request = useRequestRun(study.id);
   const isLocked = !may('scenario.change');
+  usePartOfAddress();
   // The draft chooses the reach that it is checked against.
   if (editor.draft.reachId !== reachId) setReachId(editor.draft.reachId);
 

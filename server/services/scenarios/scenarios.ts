@@ -1,5 +1,6 @@
 import { fn, col, type Transaction } from 'sequelize';
 import { LIMITS } from '../../../shared/limits';
+import { changeScenario, type ScenarioChange } from '../../../shared/scenarios/changeScenario';
 import { inflowOf, peakOf } from '../../../shared/scenarios/hydrographs';
 import { newScenario } from '../../../shared/scenarios/proposals';
 import type { ScenarioBody } from '../../../shared/scenarios/schemas';
@@ -75,6 +76,21 @@ export function buildScenarios(platform: Platform) {
   ) {
     const body = change({ ...scenario.body, name });
     return store(scenario.studyId, actor, body, await sectionsOf(scenario));
+  }
+
+  /** The same with one of the usual changes. Throws `invalid` where the scenario has nothing to change so. */
+  async function duplicateChanged(
+    scenario: ScenarioModel,
+    actor: Actor,
+    name: string,
+    change: ScenarioChange | null,
+  ) {
+    if (change === null) return duplicate(scenario, actor, name);
+    const sections = await sectionsOf(scenario);
+    const reach = { from: sections[0].chainage, to: sections[sections.length - 1].chainage };
+    const { faults } = changeScenario(scenario.body, change, reach);
+    if (faults.length > 0) throw invalid(faults);
+    return duplicate(scenario, actor, name, (body) => changeScenario(body, change, reach).body);
   }
 
   /**
@@ -167,7 +183,7 @@ export function buildScenarios(platform: Platform) {
     return sectionsOf({ reachId });
   }
 
-  return { load, list, runCounts, sectionsOf, create, duplicate, save, remove };
+  return { load, list, runCounts, sectionsOf, create, duplicate, duplicateChanged, save, remove };
 }
 
 export type ScenariosService = ReturnType<typeof buildScenarios>;
