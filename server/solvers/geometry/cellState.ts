@@ -46,13 +46,6 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     friction[i] = 0;
   }
 
-  /** Velocity per root of slope (K/A) at s above the foot of the active level. */
-  function conveyanceVelocity(i: number, s: number): number {
-    if (level[i] > 0) return levelV0[i] + s * (levelV1[i] + s * levelV2[i]);
-    const root = cbrt(s);
-    return levelV0[i] * root * root;
-  }
-
   function follow(i: number): void {
     const a = area[i];
     if (a < levelArea[i] || a >= levelEnd[i]) activate(i, tables.rowAtArea(i, a));
@@ -65,7 +58,13 @@ export function createCellState(workspace: Workspace, tables: CellTables): CellS
     }
     const s = da > 0 ? (2 * da) / (b0 + b) : 0;
     const quarter = (0.25 * a) / b;
-    const v = conveyanceVelocity(i, s);
+    // K/A, the velocity for each root of slope
+    let v = levelV0[i];
+    if (level[i] > 0) v += s * (levelV1[i] + s * levelV2[i]);
+    else {
+      const root = cbrt(s);
+      v = v * root * root;
+    }
     stage[i] = levelZ[i] + s;
     width[i] = b;
     reach[i] = quarter;

@@ -22,7 +22,7 @@ export function createStepLoops(
   const { fluxArea, fluxLeft, fluxRight, oldArea, halfFlow, implicitShare } = workspace;
   const { follow } = cellState;
   const { rate } = laterals;
-  const { abs, sqrt } = Math;
+  const { abs, min, sqrt } = Math;
   const hasLaterals = laterals.any;
 
   /** Area of cell i after what comes from the side in `dt`; counts what was moved. */
@@ -52,7 +52,7 @@ export function createStepLoops(
         if (a < before) q *= a / before;
       }
       const half = 0.5 * dt * friction[i] * abs(q0);
-      const e = half < MOST_EXPLICIT ? half : MOST_EXPLICIT;
+      const e = min(half, MOST_EXPLICIT);
       implicitShare[i] = half < MOST_EXPLICIT ? 0.5 : 1 - (0.5 * MOST_EXPLICIT) / half;
       halfFlow[i] = 0.5 * (q0 + q) - e * q0;
       if (a !== old) {
