@@ -4,11 +4,12 @@ export interface GridRow {
   errors: [water: number, flow: number];
 }
 
-/** Observed order log(e1/e2)/log(n2/n1) between two grids; null where rounding is all that is left. */
+/** Observed order log(e1/e2)/log(n2/n1) between two grids; null where what is left is rounding, or the
+ *  last of a flow that settles. */
 export function orderBetween(coarse: GridRow, fine: GridRow, which: 0 | 1): number | null {
   const [e1, e2] = [coarse.errors[which], fine.errors[which]];
-  if (!(e1 > ROUNDING) || !(e2 > ROUNDING)) return null;
+  if (!(e1 > SETTLED) || !(e2 > SETTLED)) return null;
   return Math.log(e1 / e2) / Math.log(fine.cells / coarse.cells);
 }
 
-const ROUNDING = 1e-9;
+const SETTLED = 1e-6;

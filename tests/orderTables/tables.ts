@@ -19,6 +19,10 @@ export interface OrderTableCase {
 /** Cases without an order: water at rest leaves rounding, pools have no grid to speak of. */
 const WITHOUT_ORDER = /^(still|lake|pool|level-pool)/;
 
+/** A case with three grids gets a coarser fourth. */
+const fourGrids = (grids: readonly number[]) =>
+  grids.length > 3 ? grids : [Math.ceil(grids[0] / 2), ...grids];
+
 const published = PUBLISHED_CASES.filter(
   ({ id, grids }) => grids.length > 2 && !WITHOUT_ORDER.test(id),
 ).map((each): OrderTableCase => ({
@@ -26,8 +30,8 @@ const published = PUBLISHED_CASES.filter(
   title: each.title,
   source: each.source,
   water: 'surface, m',
-  grids: each.grids,
-  errors: (scheme, grids) => publishedErrors(each, scheme, grids),
+  grids: fourGrids(each.grids),
+  errors: (scheme, grids) => publishedErrors(each, scheme, grids ?? fourGrids(each.grids)),
 }));
 
 function manufactured(id: string, title: string, bankHeight: number, gain: number): OrderTableCase {

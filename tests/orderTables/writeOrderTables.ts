@@ -14,7 +14,9 @@ log(e1/e2)/log(n2/n1). Written by \`npm run order-tables\` with solver ${SOLVER_
 numbers. Where a jump stands its surroundings are left out.
 
 What to expect: 1 and 2 in smooth flow. A shock or a dry front holds every scheme to order 1 in the mean, first-order HLL to
-0.6 to 0.9; near 1e-4 of the water depth the tables of the sections end the fall. A dash: rounding is all that is left.
+0.6 to 0.9; the dry tip in a triangle is thinner than any cell for longer. Near 1e-4 of the depth the tables of the sections
+end the fall, and on natural sections the edges of the ground. The flow of a steady case is even to what its settling leaves.
+A dash: rounding, or the last of the settling, is all that is left.
 `;
 
 const sections = ORDER_TABLES.map((table) => {
