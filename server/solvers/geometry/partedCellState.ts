@@ -28,8 +28,8 @@ export function createPartedCellState(
     }
     const row = i * TABLE_STRIDE + level[i] * LEVEL_FIELDS;
     readPart(parts, i, row, stage[i] - levelZ[i], part);
-    // The stage of a trace of water can round to the bed.
-    if (part.area < LEAST_FLOWING * a) part.area = LEAST_FLOWING * a;
+    // The stage of a trace of water can round to the bed, where nothing would flow.
+    if (!(part.area > 0.5 * LEAST_FLOWING * a)) part.area = a;
     flowArea[i] = part.area;
     beta[i] = part.beta;
     spread[i] = spreadOf(part, width[i]);

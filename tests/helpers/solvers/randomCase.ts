@@ -231,8 +231,8 @@ function addValley(caseFile: CaseFile, chance: Chance): void {
     const last = points[points.length - 1][0];
     if (!banks || !(banks[0] > first + 1) || !(banks[1] < last - 1)) continue;
     // The channel must be the lowest ground that water reaches first.
-    const inside = points.filter(([x]) => x >= banks[0] && x <= banks[1]).map(([, z]) => z);
-    if (Math.min(...inside) > lowest(section)) continue;
+    const inside = points.filter(([x]) => x > banks[0] && x < banks[1]).map(([, z]) => z);
+    if (!(Math.min(...inside) <= lowest(section))) continue;
     if (withStorage && random() < 0.8) {
       const level = random() < 0.4 ? { flowsAbove: lowest(section) + between(2, 7) } : {};
       const left = { from: first, to: between(first + 0.5, banks[0]), ...level };
