@@ -9,6 +9,7 @@ import { crossSectionModel, type SectionShape } from './geometry/crossSectionMod
 import { sectionWater } from './geometry/sectionWater';
 import { textWidth } from './geometry/textWidth';
 import { PlaceAxis } from './PlaceAxis';
+import { SectionParts } from './SectionParts';
 import { ValueAxis } from './ValueAxis';
 
 export interface CrossSectionProps {
@@ -86,6 +87,7 @@ function Drawing(props: CrossSectionProps & { size: ChartSize }) {
           strokeWidth={2}
         />
       ))}
+      <SectionParts {...{ section, frame, px, py }} />
       {model.banks.map(({ x, y }) => (
         <Line
           key={x}
@@ -139,5 +141,8 @@ function sentence({ label, section, stage, peakStage, unitSystem }: CrossSection
     );
     parts.push(`banks at ${left} and ${right} ${UNITS[unitSystem].length.symbol}`);
   }
+  if (section.storage?.length) parts.push(`storage parts: ${section.storage.length}`);
+  for (const [side, post] of Object.entries(section.embankments ?? {}))
+    parts.push(`${side} embankment up to ${elevation(post.crest)}`);
   return parts.join('; ');
 }

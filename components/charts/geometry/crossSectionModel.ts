@@ -1,3 +1,4 @@
+import type { Embankment, StoragePart } from '@/shared/case/caseFile';
 import { fromSi, type UnitSystem } from '@/shared/units/units';
 import { extentOf, makeFrame, roomyExtent, type Frame } from './frame';
 import { valueAt } from './interpolate';
@@ -9,6 +10,8 @@ export interface SectionShape {
   points: readonly (readonly [number, number])[];
   roughness?: readonly (readonly [number, number])[];
   banks?: readonly [number, number] | null;
+  storage?: readonly StoragePart[];
+  embankments?: { left?: Embankment; right?: Embankment };
 }
 
 export interface CrossSectionModel {
@@ -39,7 +42,8 @@ export function crossSectionModel(
   const offsets = section.points.map(([offset]) => offset);
   const ground = section.points.map(([, elevation]) => elevation);
   const unit = (m: number) => fromSi(m, 'elevation', system);
-  const [low, high] = extentOf(ground, highest === null ? [] : [highest]) ?? [0, 1];
+  const crests = Object.values(section.embankments ?? {}).map(({ crest }) => crest);
+  const [low, high] = extentOf(ground, crests, highest === null ? [] : [highest]) ?? [0, 1];
   const y = roomyExtent([unit(low - FOOT * (high - low)), unit(high)], unit(1), 5);
   const [first, last] = extentOf(offsets) ?? [0, 1];
   const x: [number, number] = [

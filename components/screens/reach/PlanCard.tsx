@@ -1,8 +1,10 @@
 import { useMemo, useState } from 'react';
+import { StyleSheet, View } from 'react-native';
 import { ChartBox } from '@/components/charts/ChartBox';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { downloadReachPlan, downloadRunPlan, useRunPlan } from '@/components/queries/geometries';
 import { useRuns } from '@/components/queries/runs';
+import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -28,6 +30,11 @@ export function PlanCard({ reach, section, onChoose }: PlanCardProps) {
   const routed = runs.filter(({ state }) => state === 'routed');
   const plan = useRunPlan(study.coordinateSystem === '' ? null : runId);
   const rings = useMemo(() => extentRings(plan.data), [plan.data]);
+  const [isNear, setIsNear] = useState(false);
+  const inView = useMemo(
+    () => (isNear ? neighboursOf(placed, section) : placed),
+    [isNear, placed, section],
+  );
   if (placed.length < 2) return null;
   const missing = sections.length - placed.length;
   const isNamed = study.coordinateSystem !== '';
@@ -40,8 +47,15 @@ export function PlanCard({ reach, section, onChoose }: PlanCardProps) {
         label={`The reach from above, ${placed.length} sections; ${section.id} is chosen${rings.length > 0 ? '; the widest water of the run is drawn between them' : ''}`}
         height={260}
       >
-        {(size) => <PlanDrawing {...{ placed, section, rings, size, onChoose }} />}
+        {(size) => <PlanDrawing {...{ placed, inView, section, rings, size, onChoose }} />}
       </ChartBox>
+      <View style={styles.view}>
+        <Button
+          kind="quiet"
+          label={isNear ? 'Whole reach' : `Around ${section.id}`}
+          onPress={() => setIsNear(!isNear)}
+        />
+      </View>
       {isNamed && may('run.read') && routed.length > 0 ? (
         <SelectField
           label="Widest water of a run"
@@ -75,3 +89,14 @@ export function PlanCard({ reach, section, onChoose }: PlanCardProps) {
     </Card>
   );
 }
+
+/** Sections on either side of the one shown when the plan is seen from near. */
+const AROUND = 3;
+
+function neighboursOf(placed: readonly ReachSection[], { chainage }: ReachSection) {
+  const at = placed.findIndex((one) => one.chainage >= chainage);
+  const middle = at < 0 ? placed.length - 1 : at;
+  return placed.slice(Math.max(0, middle - AROUND), middle + AROUND + 1);
+}
+
+const styles = StyleSheet.create({ view: { marginLeft: -space.two, marginVertical: -space.one } });

@@ -13,6 +13,8 @@ import { planModel, type PlanModel } from './planModel';
 interface PlanDrawingProps {
   /** Those with coordinates. */
   placed: readonly ReachSection[];
+  /** Those that the drawing is as large as. */
+  inView: readonly ReachSection[];
   section: ReachSection;
   /** Outlines of water, in the coordinates of the sections. */
   rings: readonly Position[][];
@@ -21,10 +23,13 @@ interface PlanDrawingProps {
 }
 
 /** The sections and the river from above, at one scale both ways; a press on a section chooses it. */
-export function PlanDrawing({ placed, section, rings, size, onChoose }: PlanDrawingProps) {
+export function PlanDrawing({ placed, inView, section, rings, size, onChoose }: PlanDrawingProps) {
   const { colours } = useTheme();
   const { width, height } = size;
-  const model = useMemo(() => planModel(placed, { width, height }), [placed, width, height]);
+  const model = useMemo(
+    () => planModel(placed, { width, height }, inView),
+    [placed, inView, width, height],
+  );
   const chosen = model.lines.find(({ id }) => id === section.id);
   return (
     <>
@@ -37,14 +42,16 @@ export function PlanDrawing({ placed, section, rings, size, onChoose }: PlanDraw
           strokeWidth={1}
         />
       ))}
-      <Path
-        d={model.river}
-        fill="none"
-        stroke={colours.waterTint}
-        strokeWidth={8}
-        strokeLinecap="round"
-        strokeLinejoin="round"
-      />
+      {rings.length > 0 ? null : (
+        <Path
+          d={model.river}
+          fill="none"
+          stroke={colours.waterTint}
+          strokeWidth={8}
+          strokeLinecap="round"
+          strokeLinejoin="round"
+        />
+      )}
       <Path
         d={model.river}
         fill="none"

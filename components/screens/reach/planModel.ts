@@ -16,12 +16,13 @@ export interface PlanModel {
 
 const MARGIN = 24;
 
-/** The sections from above at one scale both ways, north up, in the middle of the box. Sections have coordinates. */
+/** The sections from above at one scale both ways, north up, those in view in the middle of the box. Sections have coordinates. */
 export function planModel(
   sections: readonly Placed[],
   { width, height }: { width: number; height: number },
+  inView: readonly Placed[] = sections,
 ): PlanModel {
-  const all = sections.flatMap(({ coordinates }) => coordinates ?? []);
+  const all = inView.flatMap(({ coordinates }) => coordinates ?? []);
   const [west, east] = extent(all.map(([easting]) => easting));
   const [south, north] = extent(all.map(([, northing]) => northing));
   const inner = {

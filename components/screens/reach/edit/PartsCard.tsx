@@ -45,7 +45,7 @@ function Storage() {
       ...(banks ? [[Math.max(banks[1], end ?? banks[1]), last] as [number, number]] : []),
       [first + (last - first) / 3, first + (2 * (last - first)) / 3],
     ];
-    const [from, to] = room.find(([a, b]) => b > a) ?? room[0];
+    const [from, to] = (room.find(([a, b]) => b > a) ?? room[0]).map(toCentimetre);
     store([...parts, { from, to }], 'storage part added');
   };
   return (
@@ -107,6 +107,9 @@ function Storage() {
   );
 }
 
+/** A proposal carries no tail of digits, m. */
+const toCentimetre = (metres: number) => Math.round(100 * metres) / 100;
+
 const TITLES = { left: 'Left embankment', right: 'Right embankment' } as const;
 
 function EmbankmentFields({ side }: { side: 'left' | 'right' }) {
@@ -128,8 +131,11 @@ function EmbankmentFields({ side }: { side: 'left' | 'right' }) {
             const end = points[side === 'left' ? 0 : points.length - 1][0];
             const bank =
               banks?.[side === 'left' ? 0 : 1] ?? (points[0][0] + points[points.length - 1][0]) / 2;
-            const offset = (end + bank) / 2;
-            set({ offset, crest: groundAt(section, offset) + 1 }, `${side} embankment added`);
+            const offset = toCentimetre((end + bank) / 2);
+            set(
+              { offset, crest: toCentimetre(groundAt(section, offset) + 1) },
+              `${side} embankment added`,
+            );
           }}
         />
       </View>

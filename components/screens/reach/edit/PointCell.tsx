@@ -27,7 +27,10 @@ export function PointCell({ row, column, onFocus, onPaste }: PointCellProps) {
   const [typed, setTyped] = useState<string | null>(null);
   const cell = { sectionId: section.id, row, column };
   const unread = editor.unread.at(cell);
-  const stored = shown(fromSi(section.points[row][column], QUANTITY[column], system));
+  const stored = shown(
+    fromSi(section.points[row][column], QUANTITY[column], system),
+    UNITS[system][QUANTITY[column]].decimals,
+  );
   const fault =
     unread === undefined
       ? faultAt(`points[${row}][${column}]`)
@@ -81,6 +84,8 @@ export function PointCell({ row, column, onFocus, onPaste }: PointCellProps) {
   );
 }
 
-/** To the millimetre, without needless zeros. */
-const shown = (value: number): string =>
-  Number.isFinite(value) ? String(Number(value.toFixed(3))) : '';
+/** At least the decimals that the quantity deserves, so that figures line up; at most three. */
+const shown = (value: number, least: number): string =>
+  Number.isFinite(value)
+    ? value.toFixed(Math.max(least, String(Number(value.toFixed(3))).split('.')[1]?.length ?? 0))
+    : '';

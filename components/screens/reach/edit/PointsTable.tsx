@@ -68,7 +68,7 @@ export function PointsTable({ chosen, onChoose, onPaste }: PointsTableProps) {
                 Elevation, {UNITS[system].elevation.symbol}
               </th>
               <th scope="col" style={head}>
-                Here
+                Mark
               </th>
             </tr>
           </thead>

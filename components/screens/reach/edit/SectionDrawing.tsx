@@ -2,6 +2,7 @@ import { useMemo, useRef, useState, type KeyboardEvent, type PointerEvent } from
 import { StyleSheet, View } from 'react-native';
 import Svg, { Circle, ClipPath, Defs, G, Line, Path, Rect } from 'react-native-svg';
 import { PlaceAxis } from '@/components/charts/PlaceAxis';
+import { SectionParts } from '@/components/charts/SectionParts';
 import { useWidth } from '@/components/charts/useWidth';
 import { ValueAxis } from '@/components/charts/ValueAxis';
 import { touch } from '@/components/theme/tokens';
@@ -11,7 +12,6 @@ import { groundAt } from '@/shared/reaches/sectionGeometry';
 import type { Section } from '@/shared/surveys/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
-import { SectionParts } from '../SectionParts';
 import {
   editDrawingModel,
   groundPaths,
@@ -204,7 +204,7 @@ function Ground(props: SectionDrawingProps & { model: EditDrawingModel }) {
             strokeWidth={1.25}
           />
         ))}
-        <SectionParts {...{ section, px, py }} top={frame.top} />
+        <SectionParts {...{ section, frame, px, py }} />
         {points.map(([y, z], i) => (
           <Circle
             key={i}

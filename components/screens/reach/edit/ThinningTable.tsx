@@ -32,6 +32,7 @@ const percent = (share: number) => `${formatNumber(100 * share, 2)} %`;
 
 const columns = (system: UnitSystem): Column<Row>[] => [
   { key: 'id', title: 'Section', render: ({ id }) => id },
+  { key: 'share', title: 'Area', align: 'right', render: ({ cost }) => percent(cost.relative) },
   {
     key: 'points',
     title: 'Points',
@@ -40,10 +41,9 @@ const columns = (system: UnitSystem): Column<Row>[] => [
   },
   {
     key: 'area',
-    title: 'Area',
+    title: 'that is',
     unit: UNITS[system].area.symbol,
     align: 'right',
     render: ({ cost }) => formatNumber(fromSi(cost.areaChange, 'area', system), 2),
   },
-  { key: 'share', title: 'of it', align: 'right', render: ({ cost }) => percent(cost.relative) },
 ];

@@ -1,29 +1,32 @@
 import { Line, Rect } from 'react-native-svg';
-import { ChartText } from '@/components/charts/ChartText';
 import { useTheme } from '@/components/theme/useTheme';
 import { groundAt } from '@/shared/reaches/sectionGeometry';
-import type { Section } from '@/shared/surveys/types';
+import { ChartText } from './ChartText';
+import type { SectionShape } from './geometry/crossSectionModel';
+import type { Frame } from './geometry/frame';
 
 interface SectionPartsProps {
-  section: Pick<Section, 'points' | 'storage' | 'embankments'>;
+  section: SectionShape;
+  frame: Frame;
   /** px of an offset and of an elevation, m. */
   px: (offset: number) => number;
   py: (elevation: number) => number;
-  /** Where the band of the storage parts lies, px. */
-  top: number;
 }
 
 /** Storage parts as a band above the ground, embankments as posts up to their crest. */
-export function SectionParts({ section, px, py, top }: SectionPartsProps) {
+export function SectionParts({ section, frame, px, py }: SectionPartsProps) {
   const { colours } = useTheme();
   const { storage = [], embankments = {} } = section;
+  const inside = (x: number) => Math.min(Math.max(x, frame.left), frame.right);
   const posts = [embankments.left, embankments.right].flatMap((post) => (post ? [post] : []));
   return (
     <>
       {storage.map(({ from, to, flowsAbove }) => (
         <StorageBand
           key={from}
-          {...{ from: px(from), to: px(to), top }}
+          from={inside(px(from))}
+          to={inside(px(to))}
+          top={frame.top}
           lower={flowsAbove === undefined ? null : py(flowsAbove)}
         />
       ))}
@@ -32,7 +35,7 @@ export function SectionParts({ section, px, py, top }: SectionPartsProps) {
           key={offset}
           x1={px(offset)}
           x2={px(offset)}
-          y1={py(groundAt(section, offset))}
+          y1={py(groundAt({ points: section.points.map(([y, z]) => [y, z]) }, offset))}
           y2={py(crest)}
           stroke={colours.earth}
           strokeWidth={5}
