@@ -59,6 +59,7 @@ export const formatOrder = (order: number | null): string =>
 /** `0.00754 m`. */
 export function measuredText({ measure, value }: Criterion): string {
   if (value === null) return 'not measurable';
+  if (measure === 'volume' && value === 0) return 'none';
   return withUnit(measure, value);
 }
 

@@ -66,6 +66,7 @@ const styles = StyleSheet.create({
     flexWrap: 'wrap',
     justifyContent: 'space-between',
     alignItems: 'center',
+    alignContent: 'center',
     columnGap: space.two,
     rowGap: space.half,
   },

@@ -1,3 +1,4 @@
+import { StyleSheet, View } from 'react-native';
 import { Badge } from '@/components/ui/Badge';
 import { Card } from '@/components/ui/Card';
 import { Table, type Column } from '@/components/ui/Table';
@@ -7,15 +8,17 @@ import { boundText, measuredText, MEASURE_WORDS } from '@/shared/verificationCas
 
 const COLUMNS: Column<Criterion>[] = [
   { key: 'measure', title: 'On the finest grid', render: ({ measure }) => MEASURE_WORDS[measure] },
-  { key: 'value', title: 'Found', align: 'right', render: measuredText },
-  { key: 'bound', title: 'Bound', align: 'right', render: boundText },
   {
     key: 'within',
     title: 'Verdict',
     render: ({ within }) => (
-      <Badge label={within ? 'Within' : 'Outside'} tone={within ? 'moss' : 'brick'} />
+      <View style={styles.badge}>
+        <Badge label={within ? 'Within' : 'Outside'} tone={within ? 'moss' : 'brick'} />
+      </View>
     ),
   },
+  { key: 'value', title: 'Found', align: 'right', render: measuredText },
+  { key: 'bound', title: 'Bound', align: 'right', render: boundText },
 ];
 
 /** Each bound, what was found, and why the bound stands there. */
@@ -40,3 +43,5 @@ export function VerdictCard({
     </Card>
   );
 }
+
+const styles = StyleSheet.create({ badge: { flexDirection: 'row' } });

@@ -34,6 +34,8 @@ export function errorWords({ result }: VerificationCaseRow): string | null {
 export function countWords(cases: readonly VerificationCaseRow[]): string {
   const count = (test: (row: VerificationCaseRow) => boolean) => cases.filter(test).length;
   const within = count(({ result }) => result?.within === true);
+  if (cases.every((row) => row.result === null && row.latest === null))
+    return `None of the ${cases.length} cases has been run yet.`;
   const others = [
     [count(({ result }) => result?.within === false), 'outside'],
     [count(goesOn), 'under way'],

@@ -45,9 +45,9 @@ export const levelPoolBreach: PublishedCase = {
     'A rectangular breach opens from nothing to 50 m in half an hour down to a sill 10 m below a pool of 1 km²; the reach lies far ' +
     'below. Stage of the pool and flow through the breach for four hours.',
   source:
-    'Level-pool routing with the law of the broad-crested weir, Q = 1.7 b h^1.5, in V. T. Chow, D. R. Maidment and L. W. Mays ' +
-    '(1988), Applied Hydrology, McGraw-Hill, section 8.2 [reference from memory]; with b = b1 t/t_f in closed form, h = (h0^-½ + ' +
-    'C ∫b dt/(2 A))^-2.',
+    'Level-pool routing with the law of the broad-crested weir, Q = 1.7 b h√h, in V. T. Chow, D. R. Maidment and L. W. Mays ' +
+    '(1988), Applied Hydrology, McGraw-Hill, section 8.2 [reference from memory]; with b = b1 t/t_f in closed form, 1/√h = 1/√h₀ + ' +
+    'C ∫b dt/(2 A), h over the sill.',
   shows: 'The peak of the flow out of a failing dam, its time, and the emptying of the pool.',
   doesNotShow:
     'How wide a real breach becomes, and how fast: that is the largest uncertainty of a dam-break study. Tailwater that drowns ' +

@@ -15,11 +15,11 @@ export const poolOverWeir: PublishedCase = {
   group: 'waves',
   title: 'A pool that empties over a weir',
   setup:
-    'A pool of 1 km² with 10 m over the crest of a weir 50 m long, Q = 1.7 b h^1.5 as the rating of the outlet; stage and flow until ' +
+    'A pool of 1 km² with 10 m over the crest of a weir 50 m long, Q = 1.7 b h√h as the rating of the outlet; stage and flow until ' +
     'two hours after its opening.',
   source:
     'Level-pool routing, in V. T. Chow, D. R. Maidment and L. W. Mays (1988), Applied Hydrology, McGraw-Hill, section 8.2 ' +
-    '[reference from memory]; with this rating in closed form, h = (h0^-½ + C b t/(2 A))^-2.',
+    '[reference from memory]; with this rating in closed form, 1/√h = 1/√h₀ + C b t/(2 A).',
   shows: 'Storage and a rating over hours: the volume that leaves, and when.',
   doesNotShow: 'The slope of the water in a long reservoir.',
   boundReason:

@@ -38,7 +38,7 @@ function prescribed(given: Prescribed): PublishedCase {
     source:
       'I. MacDonald, M. J. Baines, N. K. Nichols and P. G. Samuels (1997), Analytic benchmark solutions for open-channel ' +
       'flows, ASCE Journal of Hydraulic Engineering 123(11), 1041-1045; the same authors (1995), University of Reading, ' +
-      'Numerical Analysis Report 3/95 [constants from memory; the jump relation confirms them to 1e-6 m].',
+      'Numerical Analysis Report 3/95 [constants from memory; the jump relation confirms them to a micrometre].',
     shows,
     doesNotShow: 'Water that rises and falls; sections that change along the reach.',
     boundReason:

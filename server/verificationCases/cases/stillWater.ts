@@ -4,7 +4,7 @@ import type { PublishedCase } from '../publishedCase';
 import { wildReach } from '../reaches/naturalReach';
 
 const boundReason =
-  'Only the rounding of double precision may remain: 1e-12 m on stages of some metres, and 1e-9 m³/s in sections that ' +
+  'Only the rounding of double precision may remain: 10⁻¹² m on stages of some metres, and 10⁻⁹ m³/s in sections that ' +
   'carry up to a thousand.';
 const bounds = { stageMax: 1e-12, flowMax: 1e-9, volume: 1e-12 };
 

@@ -61,6 +61,10 @@ test('all cases in a sentence, each kind counted', () => {
   );
 });
 
+test('before the first run', () => {
+  expect(countWords([row({}), row({})])).toBe('None of the 2 cases has been run yet.');
+});
+
 test('errors with three digits, small ones by their power of ten', () => {
   expect(formatError(0)).toBe('0');
   expect(formatError(7.54e-3)).toBe('0.00754');
