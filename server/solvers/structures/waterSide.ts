@@ -4,6 +4,9 @@ import { createSectionWaves } from '../geometry/sectionWaves';
 import { oneSided } from '../reconstruction/limitedSlopes';
 import type { Workspace } from '../workspace';
 
+/** A structure that would raise the area beside it more than so many times sends a bore. */
+const BORE = 1.25;
+
 /** The water on one side of a structure, and how its stage answers to the flow through the structure. */
 export interface WaterSide {
   /** Gives the cell slopes that know nothing of what lies beyond the structure. */
@@ -75,7 +78,20 @@ export function createWaterSide(
   function stageAt(q: number): number {
     const change = q - faceFlow;
     if (change === 0 || !wet || (shooting && outward * change < 0)) return faceStage;
-    return tables.stageOf(cell, Math.max(0, faceArea - (outward * change) / speed));
+    return tables.stageOf(cell, areaWith(q));
+  }
+
+  /** Area (m²) at the structure if a flow passes it. */
+  function areaWith(q: number): number {
+    const change = outward * (q - faceFlow);
+    let a = faceArea - change / speed;
+    if (a <= BORE * faceArea) return Math.max(0, a);
+    // A bore runs with the mean of the waves before and behind it: those of a film before it alone would pile it up.
+    for (let k = 0; k < 4; k++) {
+      const behind = waveSpeed(a, tables.stageOf(cell, a), q) - (outward * q) / a;
+      a = faceArea - change / Math.max(0.5 * (speed + behind), 0.5 * speed);
+    }
+    return a;
   }
 
   return {
