@@ -49,7 +49,10 @@ export function createStepLoops(
       if (hasLaterals && rate[i] !== 0) {
         const before = a;
         a = withLateral(i, a, dt);
-        if (a < before) q *= a / before;
+        if (a < before) {
+          if (a > 0.5 * before && old > 0) q += ((a - before) * q0) / old;
+          else q *= a / before;
+        }
       }
       const half = 0.5 * dt * friction[i] * abs(q0);
       const e = min(half, MOST_EXPLICIT);
@@ -78,7 +81,10 @@ export function createStepLoops(
       if (hasLaterals && rate[i] !== 0) {
         const before = a;
         a = withLateral(i, a, dt);
-        if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
+        if (a < before) {
+          if (a > 0.5 * before && area[i] > 0) q += (0.5 * (a - before) * flow[i]) / area[i];
+          else q *= (old + a) / (old + before);
+        }
       }
       a = 0.5 * (old + a);
       if (a !== area[i]) {

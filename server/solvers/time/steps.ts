@@ -10,7 +10,8 @@ import type { Workspace } from '../workspace';
  * explicit part the stiffer it is: with z = dt k|Q| at the start, e = min(z/2, 1/4), R the mean of both fluxes,
  *   Q' + (1 - e/z) dt k' Q'|Q'| = Q + dt R - e Q,
  * which is solved for Q' as the quadratic it is. Steady flow does not depend on dt, and stiff flow does not swing.
- * The loops are in stepLoops.ts. Laterals enter without momentum; withdrawals take theirs along.
+ * The loops are in stepLoops.ts. Laterals enter without momentum. A withdrawal takes the velocity of the
+ * state of each half along, which keeps second order; one that takes more than half of the water, its share of the flow.
  */
 export interface Steps {
   /** From the state at the start of the step to the whole Euler step. */

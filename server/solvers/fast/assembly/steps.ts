@@ -72,7 +72,10 @@ function predictOne(i: i32, dt: f64): void {
   if (at(ws.lateralRate, i) !== 0) {
     const before = a;
     a = withLateral(i, a, dt);
-    if (a < before) q *= a / before;
+    if (a < before) {
+      if (a > 0.5 * before && old > 0) q += ((a - before) * q0) / old;
+      else q *= a / before;
+    }
   }
   const half = 0.5 * dt * at(ws.friction, i) * abs<f64>(q0);
   const e = half < MOST_EXPLICIT ? half : MOST_EXPLICIT;
@@ -92,7 +95,12 @@ function correctOne(i: i32, dt: f64): bool {
   if (at(ws.lateralRate, i) !== 0) {
     const before = a;
     a = withLateral(i, a, dt);
-    if (a < before) q *= (0.5 * (old + a)) / (0.5 * (old + before));
+    if (a < before) {
+      const predicted = at(ws.area, i);
+      if (a > 0.5 * before && predicted > 0) {
+        q += (0.5 * (a - before) * at(ws.flow, i)) / predicted;
+      } else q *= (old + a) / (old + before);
+    }
   }
   a = 0.5 * (old + a);
   if (a !== at(ws.area, i)) place(i, a);
