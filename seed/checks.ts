@@ -34,13 +34,14 @@ interface People {
   senior: UserModel;
 }
 
-const person = ({ models }: Services, name: string): Promise<UserModel | null> =>
+/** One of the demo people; null where they are gone. */
+export const person = ({ models }: Services, name: string): Promise<UserModel | null> =>
   models.User.findOne({
     where: { email: DEMO_ACCOUNTS.find((account) => account.name === name)!.email, active: true },
   });
 
 /** The modeller's first run of a scenario, once it is routed; null where it comes to another end, or the server stops. */
-async function routed(
+export async function routed(
   { models, runs }: Services,
   { id: requestedBy }: UserModel,
   scenarioName: string,

@@ -8,6 +8,7 @@ import type { ScenarioModel } from '../server/models/Scenario';
 import type { StudyModel } from '../server/models/Study';
 import type { UserModel } from '../server/models/User';
 import { DEMO_ACCOUNTS, DEMO_FIRM, DEMO_PASSWORD, OTHER_FIRM, type DemoAccount } from './accounts';
+import { OBSERVED_GAUGE, OBSERVED_MARKS } from './observations';
 import { lowerVeshall } from './reaches/lowerVeshall';
 import { quenlowValley } from './reaches/quenlowValley';
 import { damFailure, designFlood, largerFlood } from './scenarios';
@@ -79,6 +80,7 @@ export async function seedDemo(services: Services): Promise<void> {
   const larger = await seedScenario(services, veshall, surveyor, modeller, river, largerFlood);
   await seedRun(services, modeller, flood);
   await seedRun(services, modeller, larger);
+  await seedObservations(services, veshall);
 
   const quenlow = await seedStudy(services, modeller, QUENLOW, QUENLOW_STATIONS);
   await share(services, quenlow, surveyor, 'surveyor');
@@ -181,6 +183,15 @@ async function seedScenario(
     known ?? (await scenarios.create(study, modeller, { name: body.name, reachId: reach.id }));
   if (scenario.version > 1) return scenario;
   return scenarios.save(scenario, modeller, { version: scenario.version, body });
+}
+
+/** What an earlier flood left behind, where the study has nothing observed yet. */
+async function seedObservations({ models, observations }: Services, study: StudyModel) {
+  const where = { studyId: study.id };
+  if ((await models.Mark.count({ where })) === 0)
+    await observations.marks.add(study, OBSERVED_MARKS);
+  if ((await models.Gauge.count({ where })) === 0)
+    await observations.gauges.create(study, OBSERVED_GAUGE);
 }
 
 async function seedRun({ models, runs }: Services, modeller: UserModel, scenario: ScenarioModel) {

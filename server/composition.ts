@@ -46,6 +46,7 @@ export async function compose(env: Env, overrides: Overrides = {}) {
     const reviews = buildReviews(platform, {
       background,
       mailer,
+      confidence,
       runs,
       standingChanged: ({ id }) =>
         background.run('drawing a report to keep', async () =>

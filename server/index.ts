@@ -2,7 +2,7 @@ import type { Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
 import { buildApp } from './app';
 import { compose, type Services } from './composition';
-import { seedChecks, seedDemo } from '../seed';
+import { seedChecks, seedConfidence, seedDemo } from '../seed';
 import { addressOf, readEnv, type Env } from './env';
 
 export interface RunningServer {
@@ -24,7 +24,10 @@ export async function startServer(env: Env): Promise<RunningServer> {
     const http = await listen(services);
     services.runs.start();
     services.tasks.start();
-    if (env.demoData) services.background.run('checking the demo runs', () => seedChecks(services));
+    if (env.demoData) {
+      services.background.run('checking the demo runs', () => seedChecks(services));
+      services.background.run('asking for the demo sets', () => seedConfidence(services));
+    }
     const sweep = () => services.background.run('sweeping', services.accounts.sweep);
     sweep();
     const sweeping = setInterval(sweep, SWEEP_MS);

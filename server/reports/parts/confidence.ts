@@ -1,10 +1,16 @@
+import type { ConfidenceKind } from '../../../shared/confidence/schemas';
 import type { ChecklistItem } from '../../../shared/review/types';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
+import type { UnitSystem } from '../../../shared/units/units';
 import type { Sheet } from '../pdf/sheet';
 import { facts as factRows, table } from '../pdf/table';
 import { heading, paragraph, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
-import { unitsOf } from '../words';
+import type { ConfidenceFacts } from '../types';
+import { momentText, unitsOf } from '../words';
+import { convergencePart } from './confidence/convergence';
+import { ensemblePart } from './confidence/ensemble';
+import { sensitivityPart } from './confidence/sensitivity';
 
 /** How far the numbers carry: what was done to find out, and plainly what was not. */
 export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
@@ -20,13 +26,16 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
     ['At the end', unit(volume.final, 'volume')],
     ['Error', `${shareText(volume.relativeError)} (below 0.1 % is good, common practice)`],
   ]);
+  for (const set of facts.confidence) setPart(sheet, set, facts.study.unitSystem);
   heading(sheet, 'How far it was tried');
   const checklist = facts.review?.checklist ?? [];
   factRows(
     sheet,
-    TRIALS.map(({ title, item, otherwise }) => {
+    TRIALS.map(({ title, item, set: kind, otherwise }) => {
       const found = checklist.find(({ id }) => id === item);
-      return [title, found ? triedText(found) : otherwise] as const;
+      const set = facts.confidence.find((one) => one.kind === kind);
+      const text = found ? triedText(found) : set ? `Done: ${set.name}, above.` : otherwise;
+      return [title, text] as const;
     }),
   );
   heading(sheet, 'Warnings of the run');
@@ -47,11 +56,29 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
     );
 }
 
-/** By the item of the checklist that tells of it; without one it was not done. */
-const TRIALS: { title: string; item: string; otherwise: string }[] = [
+/** One set of the case: what was asked for and what it found. */
+function setPart(sheet: Sheet, set: ConfidenceFacts, system: UnitSystem): void {
+  const { result } = set;
+  heading(sheet, set.name, 120);
+  paragraph(
+    sheet,
+    `${set.settings.map(([name, value]) => `${name}: ${value}`).join('; ')}. Computed ${momentText(set.finishedAt)}${
+      set.failed > 0
+        ? `; ${set.failed} of ${set.total} members failed and are left out`
+        : `, ${set.total} members`
+    }.`,
+  );
+  if (result.kind === 'convergence') convergencePart(sheet, result, system);
+  else if (result.kind === 'sensitivity') sensitivityPart(sheet, result, system);
+  else ensemblePart(sheet, result, system);
+}
+
+/** By the item of the checklist or the set that tells of it; without either it was not done. */
+const TRIALS: { title: string; item?: string; set?: ConfidenceKind; otherwise: string }[] = [
   {
     title: 'Cell-size convergence',
     item: 'gridSize',
+    set: 'convergence',
     otherwise: 'Not done. The error of the discretisation is not known in numbers.',
   },
   {
@@ -66,12 +93,12 @@ const TRIALS: { title: string; item: string; otherwise: string }[] = [
   },
   {
     title: 'Sensitivity',
-    item: 'sensitivity',
+    set: 'sensitivity',
     otherwise: 'Not done. The result was not repeated with other roughness or another inflow.',
   },
   {
     title: 'Ensemble',
-    item: 'ensemble',
+    set: 'ensemble',
     otherwise:
       'Not done. There is no band of likely results; each number is one outcome of one set of inputs.',
   },

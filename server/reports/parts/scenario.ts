@@ -68,7 +68,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
       ]),
     );
   }
-  structures(sheet, caseFile, facts.study.unitSystem);
+  structures(sheet, { facts, caseFile, run });
   heading(sheet, 'Numerical settings');
   factRows(sheet, [
     ['Cells', `${formatNumber(run.cellCount, 0)} of ${unit(run.cellSize, 'length')}`],

@@ -4,6 +4,7 @@ import type {
   ConfidenceInput,
   ConfidencePayload,
   ConfidenceResult,
+  ConvergenceResult,
 } from '../../../shared/confidence/types';
 import { varyCase } from '../../../shared/confidence/varyCase';
 import { notFound } from '../../errors';
@@ -43,6 +44,19 @@ export function buildReadConfidence({ find }: ReturnType<typeof buildTasks>) {
           result: await result(set),
         })),
       );
+    },
+
+    /** The latest finished convergence set of a case of the firm; null where there is none. */
+    async latestConvergence(firmId: number, caseHash: string) {
+      const [found] = await find.list({
+        firmId,
+        caseHash,
+        kind: 'convergence',
+        state: 'finished',
+      });
+      if (!found) return null;
+      const { set } = found;
+      return { set, result: await find.result<ConvergenceResult>(set) };
     },
 
     /** The case of one member, canonical JSON: it can be routed again without the server. Throws `notFound`. */

@@ -2,15 +2,21 @@ import type { RunModel } from '../../models/Run';
 import type { Platform } from '../../platform';
 import type { ReportFacts } from '../../reports/types';
 import type { ReviewsService } from '../review';
+import type { buildConfidence } from '../confidence';
+import { confidenceFacts } from './confidenceFacts';
 import type { buildRuns } from '../runs';
 
 export interface FactsNeeds {
   reviews: Pick<ReviewsService, 'read' | 'signedRecord'>;
   runs: ReturnType<typeof buildRuns>;
+  confidence: ReturnType<typeof buildConfidence>;
 }
 
 /** What a report says of a run: as it was fixed by the signature, or before it as it stands. */
-export function buildCollectFacts({ env, models }: Platform, { reviews, runs }: FactsNeeds) {
+export function buildCollectFacts(
+  { env, models }: Platform,
+  { confidence, reviews, runs }: FactsNeeds,
+) {
   const { Firm, Reach, SurveyRevision } = models;
 
   /** Needs a run read by `find.load`. */
@@ -56,6 +62,11 @@ export function buildCollectFacts({ env, models }: Platform, { reviews, runs }: 
         solverVersion: run.solverVersion,
       },
       stations: record?.stations ?? (await runs.results.stations(run.studyId)),
+      confidence: confidenceFacts(
+        await confidence.read.ofCase(study.firmId, run.caseHash),
+        record?.study.unitSystem ?? unitSystem,
+        signOff?.at ?? null,
+      ),
       review:
         review.state === null
           ? null

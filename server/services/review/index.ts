@@ -3,6 +3,7 @@ import type { Background } from '../../background';
 import type { Mailer } from '../../mail/Mailer';
 import type { RunModel } from '../../models/Run';
 import type { Platform } from '../../platform';
+import type { buildConfidence } from '../confidence';
 import type { buildRuns } from '../runs';
 import { buildAfterSigning } from './afterSigning';
 import { buildChangeReview } from './changeReview';
@@ -20,6 +21,7 @@ interface Needs {
   background: Background;
   mailer: Mailer;
   runs: ReturnType<typeof buildRuns>;
+  confidence: ReturnType<typeof buildConfidence>;
   /** A run was signed, or its signature withdrawn: its report is drawn and kept. */
   standingChanged: (run: RunModel) => void;
 }
@@ -29,7 +31,7 @@ export function buildReviews(platform: Platform, needs: Needs) {
   const { runs, standingChanged } = needs;
   const find = buildFindReviews(platform, runs);
   const change = buildChangeReview(platform);
-  const reading = buildReadReview(platform, runs, find);
+  const reading = buildReadReview(platform, needs, find);
   const tell = buildTellOthers(platform, needs);
   const attempts = buildAttempts(platform);
   return {

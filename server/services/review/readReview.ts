@@ -6,8 +6,7 @@ import type { Platform } from '../../platform';
 import type { Actor } from '../../policies/subject';
 import { reviewStateOf } from '../../presenters/reviewState';
 import { presentPoint, presentSignOff } from '../../presenters/reviews';
-import type { buildRuns } from '../runs';
-import { buildGatherFacts } from './checklist/gatherFacts';
+import { buildGatherFacts, type FactsNeeds } from './checklist/gatherFacts';
 import { checklistItems } from './checklist/items';
 import type { FindReviews } from './findReviews';
 import type { SignedRecord } from './signedRecord';
@@ -16,11 +15,11 @@ import { allowedNow, obstaclesOf, signerObstacles } from './standing';
 /** The check of a run as it stands, or as it was fixed by the signature. */
 export function buildReadReview(
   platform: Platform,
-  runs: ReturnType<typeof buildRuns>,
+  { confidence, runs }: FactsNeeds,
   find: FindReviews,
 ) {
   const { models } = platform;
-  const gather = buildGatherFacts(platform, runs);
+  const gather = buildGatherFacts(platform, { confidence, runs });
 
   /** Empty before the run is routed. */
   async function checklistOf(run: RunModel, review: ReviewModel | null): Promise<ChecklistItem[]> {

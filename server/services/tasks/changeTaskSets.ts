@@ -1,3 +1,4 @@
+import type { Transaction } from 'sequelize';
 import { TASK_STATE_WORDS } from '../../../shared/tasks/types';
 import { conflict } from '../../errors';
 import type { TaskSetModel } from '../../models/TaskSet';
@@ -12,7 +13,13 @@ interface Needs {
 
 /** Cancel and try again. Both throw `conflict` where the set is past it. */
 export function buildChangeTaskSets({ audit, sequelize, models, now }: Platform, needs: Needs) {
-  const { Task, TaskSet } = models;
+  const { SignOff, Task, TaskSet } = models;
+
+  /** Whether the run was signed with what the set had found. */
+  const signedWith = async ({ runId, state }: TaskSetModel, transaction: Transaction) =>
+    state === 'finished' &&
+    runId !== null &&
+    (await SignOff.count({ where: { runId }, transaction })) > 0;
 
   return {
     /** What waits is cancelled at once, what goes on within a second or two; what has finished stays readable. */
@@ -47,6 +54,10 @@ export function buildChangeTaskSets({ audit, sequelize, models, now }: Platform,
         if (left === 0)
           throw conflict(
             `The set is ${TASK_STATE_WORDS[set.state].toLowerCase()} and none of its members failed; there is nothing to try again.`,
+          );
+        if (await signedWith(set, transaction))
+          throw conflict(
+            'The report of the signed run tells this set as it is. Ask for a new set instead.',
           );
         await Task.destroy({ where: { setId: id, part: 'gather' }, transaction });
         await Task.update(

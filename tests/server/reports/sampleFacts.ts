@@ -38,6 +38,7 @@ export function sampleFacts(given: Partial<ReportFacts> = {}): ReportFacts {
       { id: 1, name: 'Mill bridge', chainage: 1000 },
       { id: 2, name: 'Ferrin quay', chainage: 1700 },
     ],
+    confidence: [],
     review: {
       sentAt: '2026-11-03T10:00:00.000Z',
       method: 'Routed unsteady over the whole reach with the outlet well below the town.',

@@ -22,6 +22,7 @@ beforeAll(async () => {
     })),
     advice: [],
     probe: null,
+    convergence: null,
     grids: [{ runNumber: 1, cellSize: 25, peaks: [{ name: 'Mill', stage: 52.5 }] }],
   };
 });
@@ -106,6 +107,31 @@ test('three grids tell the order and the index', () => {
   expect(found.finding).toContain('order 2.0');
   expect(found.finding).toContain('0.025 %');
   expect(item('gridSize', { grids: grids.slice(1) }).outcome).toBe('look');
+  // A convergence set of the case goes before runs that happen to be there.
+  const set = (difference: number) => ({
+    name: 'Three grids',
+    result: {
+      kind: 'convergence' as const,
+      grids: [25, 50, 100].map((cellSize) => ({ cellSize, cells: 1000 / cellSize, seconds: 1 })),
+      stations: [],
+      along: {
+        chainage: [0],
+        bed: [0],
+        peakStage: [1],
+        difference: [difference],
+        band: [null],
+        order: 1.9,
+        monotone: 1,
+      },
+      widest: { chainage: 400, difference },
+    },
+  });
+  expect(item('gridSize', { convergence: set(-0.012) })).toMatchObject({
+    outcome: 'good',
+    finding:
+      'Three grids: cells of 25.0 m, 50.0 m, 100.0 m; the finest two differ in peak stage by at most 0.012 m, at chainage 400 m. Observed order of the peak stage 1.9.',
+  });
+  expect(item('gridSize', { convergence: set(0.06) }).outcome).toBe('look');
   expect(item('gridSize').outcome).toBe('asked');
 });
 

@@ -6,7 +6,7 @@ import { bandOf } from '@/shared/confidence/quantile';
 import type { EnsembleResult, EnsembleStation, PlaceValues } from '@/shared/confidence/types';
 import { formatWithUnit } from '@/shared/units/format';
 import type { UnitSystem } from '@/shared/units/units';
-import { VALUE_NAMES, valueText } from './placeValueWords';
+import { VALUE_NAMES, valueText } from '@/shared/confidence/placeValueWords';
 
 interface Row {
   station: string;

@@ -8,7 +8,7 @@ import { PARAMETERS } from '@/shared/confidence/parameters';
 import { valueWords } from '@/shared/confidence/planMembers';
 import type { PlaceValues, SensitivityResult } from '@/shared/confidence/types';
 import { formatWithUnit } from '@/shared/units/format';
-import { changeWords, VALUE_NAMES, valueText } from './placeValueWords';
+import { changeWords, VALUE_NAMES, valueText } from '@/shared/confidence/placeValueWords';
 import { SensitivityTable } from './SensitivityTable';
 import { StationField } from './StationField';
 

@@ -5,7 +5,7 @@ import { PARAMETERS } from '@/shared/confidence/parameters';
 import { valueWords } from '@/shared/confidence/planMembers';
 import type { PlaceValues, SensitivityResult } from '@/shared/confidence/types';
 import type { UnitSystem } from '@/shared/units/units';
-import { changeWords, VALUE_NAMES, valueText } from './placeValueWords';
+import { changeWords, VALUE_NAMES, valueText } from '@/shared/confidence/placeValueWords';
 
 interface Row {
   station: string;

@@ -9,7 +9,7 @@ import {
   type DistributionKind,
 } from '@/shared/confidence/distributions';
 import type { Parameter } from '@/shared/confidence/parameters';
-import { DISTRIBUTION_FIELDS, DISTRIBUTION_NAMES } from '../confidenceWords';
+import { DISTRIBUTION_FIELDS, DISTRIBUTION_NAMES } from '@/shared/confidence/settingWords';
 import { FieldRow } from './FieldRow';
 
 interface Props {

@@ -10,17 +10,22 @@ import type { RunBlocks } from '../../../results/blocks/runBlocks';
 import { peaksAt } from '../../../results/peaksAt';
 import { adviseReach } from '../../reaches/advice/adviseReach';
 import { describeSection } from '../../reaches/describeSection';
+import type { buildConfidence } from '../../confidence';
 import type { buildRuns } from '../../runs';
 import { describeOutletChange } from '../changeOutlet';
 import { keepAtHand } from './keepAtHand';
 import type { ChecklistFacts, SectionHistory } from './types';
 
-type Runs = ReturnType<typeof buildRuns>;
+export interface FactsNeeds {
+  confidence: ReturnType<typeof buildConfidence>;
+  runs: ReturnType<typeof buildRuns>;
+}
+
 /** Runs of a scenario that are looked through for other cell sizes. */
 const LOOKED_THROUGH = 20;
 
 /** Reads what the checklist is found from. Throws `conflict` where the run is not routed. */
-export function buildGatherFacts({ models }: Platform, runs: Runs) {
+export function buildGatherFacts({ models }: Platform, { confidence, runs }: FactsNeeds) {
   const caseOf = keepAtHand(
     async (run) => JSON.parse((await runs.exports.caseFile(run)).toString('utf8')) as CaseFile,
   );
@@ -87,6 +92,13 @@ export function buildGatherFacts({ models }: Platform, runs: Runs) {
     return [...bySize.values()].sort((a, b) => a.cellSize - b.cellSize);
   }
 
+  /** The latest convergence set of this very case. */
+  async function convergenceOf(run: RunModel): Promise<ChecklistFacts['convergence']> {
+    const { firmId } = run.study!;
+    const set = await confidence.read.latestConvergence(firmId, run.caseHash);
+    return set && { name: set.set.name, result: set.result };
+  }
+
   async function adviceOf({ reachId }: RunModel): Promise<ChecklistFacts['advice']> {
     const reach = await models.Reach.scope('withSections').findByPk(reachId, {
       rejectOnEmpty: true,
@@ -101,6 +113,7 @@ export function buildGatherFacts({ models }: Platform, runs: Runs) {
     advice: await adviceOf(run),
     probe: await probeOf(run, review),
     grids: await gridsOf(run),
+    convergence: await convergenceOf(run),
   });
 }
 

@@ -4,17 +4,18 @@ import { metres, type ChecklistRule } from './types';
 /** m between the finest two grids. */
 const GOOD = 0.05;
 
-export const gridSize: ChecklistRule = ({ grids, run }) => {
+export const gridSize: ChecklistRule = ({ convergence, grids, run }) => {
   const item = {
     id: 'gridSize',
     title: 'Cell size',
     rule: 'The same case on three cell sizes, with the grid convergence index (Roache 1994; Celik et al. 2008); 0.05 m between the finest two is good (common practice).',
   };
+  if (convergence) return { ...item, ...ofSet(convergence) };
   if (grids.length < 2)
     return {
       ...item,
       outcome: 'asked',
-      finding: `Routed on cells of ${metres(run.cellSize, 1)} alone. Route it on other cell sizes too, or say why these cells are fine enough.`,
+      finding: `Routed on cells of ${metres(run.cellSize, 1)} alone. Compute a convergence set of it, or say why these cells are fine enough.`,
     };
   const [fine, medium, coarse] = grids;
   const pairs = fine.peaks.flatMap(({ name, stage }) => {
@@ -35,6 +36,21 @@ export const gridSize: ChecklistRule = ({ grids, run }) => {
       (coarse && most ? orderOf(most.name, [fine, medium, coarse]) : ''),
   };
 };
+
+/** A set of three grids of this very case says more than runs that happen to be there. */
+function ofSet({ name, result }: NonNullable<Parameters<ChecklistRule>[0]['convergence']>) {
+  const { along, grids, widest } = result;
+  const difference = Math.abs(widest.difference);
+  const sizes = grids.map(({ cellSize }) => (cellSize === null ? 'failed' : metres(cellSize, 1)));
+  const order =
+    along.order === null ? '' : ` Observed order of the peak stage ${along.order.toFixed(1)}.`;
+  return {
+    outcome: difference <= GOOD ? ('good' as const) : ('look' as const),
+    finding:
+      `${name}: cells of ${sizes.join(', ')}; the finest two differ in peak stage by at most ` +
+      `${metres(difference, 3)}, at chainage ${metres(widest.chainage, 0)}.${order}`,
+  };
+}
 
 type Grid = Parameters<ChecklistRule>[0]['grids'][number];
 

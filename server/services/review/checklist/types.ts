@@ -1,4 +1,5 @@
 import type { CaseFile } from '../../../../shared/case/caseFile';
+import type { ConvergenceResult } from '../../../../shared/confidence/types';
 import type { Advice } from '../../../../shared/reaches/types';
 import type { ChecklistItem } from '../../../../shared/review/types';
 import type { RunState } from '../../../../shared/runs/types';
@@ -35,6 +36,8 @@ export interface ChecklistFacts {
   advice: Advice[];
   /** The same case with a changed outlet; null: not asked for. */
   probe: { runNumber: number; state: RunState; change: string; peaks: PeakPair[] } | null;
+  /** The latest finished convergence set of this very case; null: none. */
+  convergence: { name: string; result: ConvergenceResult } | null;
   /** Routed runs of the same case with other cells, finest first; this run is among them. */
   grids: { runNumber: number; cellSize: number; peaks: { name: string; stage: number }[] }[];
 }

@@ -1,0 +1,67 @@
+import { PARAMETERS } from '../../../../shared/confidence/parameters';
+import { changeWords, VALUE_NAMES, valueText } from '../../../../shared/confidence/placeValueWords';
+import { valueWords } from '../../../../shared/confidence/planMembers';
+import type { PlaceValues, SensitivityResult } from '../../../../shared/confidence/types';
+import type { UnitSystem } from '../../../../shared/units/units';
+import { tornado, tornadoHeight } from '../../charts/tornado';
+import { figure } from '../../pdf/figure';
+import type { Sheet } from '../../pdf/sheet';
+import { table } from '../../pdf/table';
+
+const QUANTITIES = Object.keys(VALUE_NAMES) as (keyof PlaceValues)[];
+
+/** What each input changes by itself at the stations. */
+export function sensitivityPart(sheet: Sheet, result: SensitivityResult, system: UnitSystem): void {
+  const { base, rows, stations } = result;
+  stations.forEach(({ name }, k) => {
+    const bars = rows.map(({ parameter, low, high }) => ({
+      label: PARAMETERS[parameter].label,
+      low: sideOf(low, parameter, k, base[k]),
+      high: sideOf(high, parameter, k, base[k]),
+    }));
+    const drawing = tornado(`Change of peak stage at ${name}`, bars, (change) =>
+      changeWords('peakStage', change, system),
+    );
+    figure(sheet, [drawing], tornadoHeight(bars), '');
+  });
+  table(
+    sheet,
+    [
+      { heading: 'Station', share: 2.6 },
+      { heading: 'Input', share: 3.6 },
+      ...QUANTITIES.map((quantity) => ({
+        heading: VALUE_NAMES[quantity],
+        share: 2,
+        align: 'right' as const,
+      })),
+    ],
+    stations.flatMap(({ name }, k) => [
+      [name, 'Base case', ...QUANTITIES.map((one) => valueText(one, base[k][one], system))],
+      ...rows.flatMap(({ parameter, low, high }) =>
+        [low, high].map((side) => [
+          name,
+          `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value)}`,
+          ...QUANTITIES.map((one) => {
+            const [here, there] = [side.stations?.[k][one] ?? null, base[k][one]];
+            return here === null || there === null
+              ? 'no result'
+              : changeWords(one, here - there, system);
+          }),
+        ]),
+      ),
+    ]),
+  );
+}
+
+function sideOf(
+  side: SensitivityResult['rows'][number]['low'],
+  parameter: SensitivityResult['rows'][number]['parameter'],
+  k: number,
+  base: PlaceValues,
+) {
+  const there = side.stations?.[k].peakStage;
+  return {
+    words: valueWords(parameter, side.value),
+    change: there === undefined ? null : there - base.peakStage,
+  };
+}
