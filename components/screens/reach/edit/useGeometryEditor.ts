@@ -59,8 +59,12 @@ export function useGeometryEditor(reach: Reach) {
       { version, ...change, steps: steps.slice(-STEPS_TOLD) },
       {
         onSuccess: (saved) => {
-          // What was done meanwhile stays, and all of it can still be taken back.
-          setBase({ ...baseOf(saved), told: count });
+          const stored = baseOf(saved);
+          const isTheirsToo = version !== base.version;
+          // Over theirs: what they changed elsewhere is there now, and taking a step back would lose it.
+          if (isTheirsToo) dispatch({ type: 'restored', sections: stored.sections });
+          // Else what was done meanwhile stays, and all of it can still be taken back.
+          setBase({ ...stored, told: isTheirsToo ? 0 : count });
           setKept(null);
           setEarlier([]);
         },
