@@ -10,6 +10,7 @@ import { api } from './apiClient';
 import { isApiError } from './ApiError';
 import { reachKeys } from './reaches';
 import { studyKeys } from './studies';
+import { forgetArrived, sendFile, type Transfer } from './uploads';
 
 export const surveyKeys = {
   list: (studyId: number) => ['surveys', 'ofStudy', studyId] as const,
@@ -23,13 +24,12 @@ export const useSurveys = (studyId: number) =>
     queryFn: ({ signal }) => api.get<SurveyList>(`/studies/${studyId}/surveys`, { signal }),
   });
 
-/** Null: none to ask for. A revision never changes, so it is asked for once. */
+/** Null: none to ask for. */
 export const useSurveyRevision = (surveyId: number | null) =>
   useQuery({
     queryKey: surveyKeys.one(surveyId ?? 0),
     queryFn: ({ signal }) => api.get<SurveyRevision>(`/surveys/${surveyId}`, { signal }),
     enabled: surveyId !== null,
-    staleTime: Infinity,
   });
 
 interface SurveyFile {
@@ -39,27 +39,65 @@ interface SurveyFile {
   note?: string;
 }
 
-function formOf({ file, match, note }: SurveyFile): FormData {
-  const form = new FormData();
-  // Fields before the file: the server knows the match when the bytes arrive.
-  if (match) form.append('match', JSON.stringify(match));
-  if (note) form.append('note', note);
-  form.append('file', file, file.name);
-  return form;
+/**
+ * Hands a file over with `path`, once it has arrived. One that the server has forgotten meanwhile is sent once more.
+ */
+async function hand<T>(
+  studyId: number,
+  path: string,
+  { file, match, note }: SurveyFile,
+  { signal, onTransfer = () => undefined }: { signal?: AbortSignal; onTransfer?: OnTransfer } = {},
+): Promise<T> {
+  const post = async () => {
+    const uploadId = await sendFile(studyId, file, { signal, onTransfer });
+    const body = {
+      uploadId,
+      ...(match && { match: JSON.stringify(match) }),
+      ...(note && { note }),
+    };
+    return api.post<T>(`/studies/${studyId}${path}`, body, { signal });
+  };
+  try {
+    return await post();
+  } catch (error) {
+    if (!isApiError(error, 'notFound') || !forgetArrived(file)) throw error;
+    return post();
+  }
 }
 
+type OnTransfer = (transfer: Transfer) => void;
+
 /** Reads a file without storing anything of it. */
-export const readSurvey = (studyId: number, file: SurveyFile, signal?: AbortSignal) =>
-  api.upload<SurveyReading>(`/studies/${studyId}/surveys/read`, formOf(file), { signal });
+export const readSurvey = (
+  studyId: number,
+  file: SurveyFile,
+  options: { signal?: AbortSignal; onTransfer?: OnTransfer } = {},
+) => hand<SurveyReading>(studyId, '/surveys/read', file, options);
 
 /** Hands a file in: a new revision and its reach, or an ApiError `surveyRefused` whose details are the reading. */
 export function useSendSurvey(studyId: number) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (file: SurveyFile) =>
-      api.upload<SurveyRevisionRow>(`/studies/${studyId}/surveys`, formOf(file)),
+    mutationFn: (file: SurveyFile) => hand<SurveyRevisionRow>(studyId, '/surveys', file),
     onSettled: () =>
       Promise.all([
+        client.invalidateQueries({ queryKey: surveyKeys.list(studyId) }),
+        client.invalidateQueries({ queryKey: reachKeys.list(studyId) }),
+        client.invalidateQueries({ queryKey: studyKeys.all }),
+        client.invalidateQueries({ queryKey: ['uploads', studyId] }),
+      ]),
+  });
+}
+
+/** An engineer accepts a revision that was handed in, or returns it with remarks. */
+export function useDecideSurvey({ id, studyId }: { id: number; studyId: number }) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (body: { decision: 'accepted' | 'returned'; remarks: string }) =>
+      api.post<SurveyRevisionRow>(`/surveys/${id}/decision`, body),
+    onSettled: () =>
+      Promise.all([
+        client.invalidateQueries({ queryKey: surveyKeys.one(id) }),
         client.invalidateQueries({ queryKey: surveyKeys.list(studyId) }),
         client.invalidateQueries({ queryKey: reachKeys.list(studyId) }),
         client.invalidateQueries({ queryKey: studyKeys.all }),
@@ -77,7 +115,7 @@ export function useKeepRefusal(studyId: number) {
   return useMutation({
     mutationFn: async (file: SurveyFile): Promise<number | null> => {
       try {
-        await api.upload<SurveyRevisionRow>(`/studies/${studyId}/surveys`, formOf(file));
+        await hand<SurveyRevisionRow>(studyId, '/surveys', file);
         return null;
       } catch (error) {
         if (!isApiError(error, 'surveyRefused')) throw error;

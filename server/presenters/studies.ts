@@ -15,13 +15,19 @@ import type { Action } from '../policies/policies';
 import type { Actor, Subject } from '../policies/subject';
 import type { ListedStudy } from '../services/studies/studies';
 
-export const presentStudyRow = ({ study, surveyRevision, runCount }: ListedStudy): StudyRow => ({
+export const presentStudyRow = ({
+  study,
+  surveyRevision,
+  surveyStanding,
+  runCount,
+}: ListedStudy): StudyRow => ({
   id: study.id,
   title: study.title,
   clientName: study.clientName,
   place: study.place,
   unitSystem: study.unitSystem,
   surveyRevision,
+  surveyStanding,
   runCount,
   updatedAt: study.updatedAt.toISOString(),
 });

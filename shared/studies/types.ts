@@ -1,6 +1,9 @@
 import type { Role } from '../accounts/roles';
 import type { UnitSystem } from '../units/units';
 
+/** Nothing handed in, waiting for an engineer, or what became of it. */
+export type SurveyStanding = 'none' | 'waiting' | 'returned' | 'accepted';
+
 /** `GET /api/studies`: what a person may see of, newest work first. */
 export interface StudyRow {
   id: number;
@@ -10,6 +13,8 @@ export interface StudyRow {
   unitSystem: UnitSystem;
   /** Latest accepted revision; null before the first. Null too for those who may not see the survey. */
   surveyRevision: number | null;
+  /** Of the newest survey that one may see: for surveyors their own. null for those who may see none. */
+  surveyStanding: SurveyStanding | null;
   runCount: number | null;
   updatedAt: string;
 }
@@ -34,7 +39,10 @@ export interface Study {
 }
 
 export interface StudyCounts {
+  /** Newest accepted revision. */
   surveyRevision: number | null;
+  /** Revisions that wait for an engineer. */
+  surveysWaiting: number;
   sections: number | null;
   scenarios: number;
   runs: number;
@@ -46,6 +54,7 @@ export const STUDY_ACTIONS = [
   'study.share',
   'survey.read',
   'survey.send',
+  'survey.decide',
   'reach.read',
   'reach.change',
   'scenario.read',

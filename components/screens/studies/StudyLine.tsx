@@ -7,6 +7,23 @@ import { Txt } from '@/components/ui/Txt';
 
 const runs = (count: number) => (count === 1 ? '1 run' : `${count} runs`);
 
+/** Engineers see what waits for them; surveyors what became of what they sent. */
+function surveyWords({ surveyStanding, runCount }: StudyRow): string | false {
+  const forEngineers = runCount !== null;
+  switch (surveyStanding) {
+    case 'none':
+      return forEngineers ? 'no survey yet' : 'nothing handed in yet';
+    case 'waiting':
+      return forEngineers ? 'a survey waits for you' : 'handed in, waits for an engineer';
+    case 'returned':
+      return 'survey returned to be mended';
+    case 'accepted':
+      return !forEngineers && 'survey accepted';
+    default:
+      return false;
+  }
+}
+
 /** One study of the list: what it is, for whom, and how far it has come. */
 export function StudyLine({ study }: { study: StudyRow }) {
   const what = [study.place, study.clientName && `for ${study.clientName}`]
@@ -14,7 +31,7 @@ export function StudyLine({ study }: { study: StudyRow }) {
     .join(', ');
   const state = [
     study.surveyRevision !== null && `survey revision ${study.surveyRevision}`,
-    study.surveyRevision === null && study.runCount !== null && 'no survey yet',
+    surveyWords(study),
     study.runCount !== null && study.runCount > 0 && runs(study.runCount),
     formatDay(study.updatedAt),
   ].filter(Boolean);

@@ -12,6 +12,13 @@ export interface PathStep {
 const counted = (count: number, one: string, many: string): string =>
   count === 1 ? `1 ${one}` : `${count} ${many}`;
 
+function surveyState(revision: number | null, waiting: number): string {
+  const accepted = revision && `revision ${revision} accepted`;
+  const waits = waiting > 0 && `${waiting === 1 ? 'one' : waiting} handed in, to accept or return`;
+  const words = [accepted, waits].filter(Boolean).join('; ') || 'no file handed in yet';
+  return words[0].toUpperCase() + words.slice(1);
+}
+
 /** The path of a study from the surveyor's file to the routed flood. */
 export function pathSteps(study: Study): PathStep[] {
   const root = `/studies/${study.id}` as const;
@@ -23,7 +30,7 @@ export function pathSteps(study: Study): PathStep[] {
     {
       name: 'Survey',
       href: `${root}/survey`,
-      state: revision ? `Revision ${revision} accepted` : 'No file handed in yet',
+      state: surveyState(revision, study.counts?.surveysWaiting ?? 0),
       isDone: revision !== null,
     },
     {

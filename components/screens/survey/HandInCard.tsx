@@ -5,7 +5,9 @@ import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
 import { LIMITS } from '@/shared/limits';
 
-export const SURVEY_ENDINGS = '.xlsx,.csv,.tsv,.txt';
+/** Endings, and the kinds by which a phone knows such files. */
+export const SURVEY_ENDINGS =
+  '.xlsx,.csv,.tsv,.txt,application/vnd.openxmlformats-officedocument.spreadsheetml.sheet,text/csv,text/plain';
 
 /** The file that is handed in; one too large is said at once, before it travels. */
 export function HandInCard({ onFile }: { onFile: (file: File) => void }) {

@@ -17,6 +17,7 @@ import { FaultsDownload } from './FaultsDownload';
 import { refuses } from './handInState';
 import { MatchCard } from './MatchCard';
 import { SectionsPreview } from './SectionsPreview';
+import { TransferCard } from './TransferCard';
 import type { HandInControl } from './useHandIn';
 
 /** What was read of a file: its faults, or its sections and the button that takes them in. */
@@ -58,7 +59,7 @@ export function HandInScreen({ control }: { control: HandInControl }) {
   );
   return (
     <Screen
-      title={titleOf(reading, state.step)}
+      title={control.transfer ? 'Sending the survey' : titleOf(reading, state.step)}
       crumbs={[{ label: study.title, href: `/studies/${study.id}` }, { label: 'Survey' }]}
       lead={reading ? leadOf(state.file.name, reading) : state.file.name}
       actions={
@@ -97,7 +98,12 @@ export function HandInScreen({ control }: { control: HandInControl }) {
         ) : undefined
       }
     >
-      {busy && !reading ? <Loading what={`Reading ${state.file.name}…`} /> : null}
+      {busy && !reading && control.transfer ? (
+        <TransferCard fileName={state.file.name} transfer={control.transfer} />
+      ) : null}
+      {busy && !reading && !control.transfer ? (
+        <Loading what={`Reading ${state.file.name}…`} />
+      ) : null}
       {state.step === 'unread' ? (
         <ErrorState
           title={`${state.file.name} could not be read`}

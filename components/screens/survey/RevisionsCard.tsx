@@ -11,14 +11,15 @@ import type { SurveyRevisionRow } from '@/shared/surveys/types';
 import { formatQuantity } from '@/shared/units/format';
 import { UNITS, type UnitSystem } from '@/shared/units/units';
 import { wallClock } from '@/components/ui/wallClock';
+import { decisionWords } from './decisionWords';
 
-/** What was taken in, the newest first; a press shows the sections of that revision. */
+/** What was handed in without faults, the newest first; a press shows the sections of that revision. */
 export function RevisionsCard({ revisions }: { revisions: readonly SurveyRevisionRow[] }) {
   const { study, may } = useCurrentStudy();
   const system = useUnitSystem();
   return (
     <Card
-      title="Taken in"
+      title="Handed in"
       aside={revisions.length > 1 ? `${revisions.length} revisions` : undefined}
     >
       {revisions.length === 0 ? (
@@ -50,6 +51,7 @@ export function RevisionsCard({ revisions }: { revisions: readonly SurveyRevisio
 
 const columns = (system: UnitSystem): Column<SurveyRevisionRow>[] => [
   { key: 'revision', title: 'Revision', render: ({ revision }) => `Revision ${revision}` },
+  { key: 'standing', title: 'Standing', render: (row) => decisionWords(row) },
   { key: 'file', title: 'File', render: ({ fileName }) => fileName },
   {
     key: 'sections',

@@ -1,18 +1,21 @@
-import { useEffect, useReducer } from 'react';
+import { useEffect, useReducer, useState } from 'react';
 import { readSurvey, refusedReading, useSendSurvey } from '@/components/queries/surveys';
+import type { Transfer } from '@/components/queries/uploads';
 import type { MatchChoice } from '@/shared/surveys/types';
 import { handInReducer, START } from './handInState';
 
-/** Choose, read, look, hand in. Reading again begins whenever the file or the match changes. */
+/** Choose, send, read, look, hand in. Reading again begins whenever the file or the match changes. */
 export function useHandIn(studyId: number) {
   const [state, dispatch] = useReducer(handInReducer, START);
   const send = useSendSurvey(studyId);
+  const [transfer, setTransfer] = useState<Transfer | null>(null);
 
   useEffect(() => {
     if (state.step !== 'reading') return;
     const { file, choice } = state;
     const stop = new AbortController();
-    readSurvey(studyId, { file, match: choice }, stop.signal).then(
+    const options = { signal: stop.signal, onTransfer: setTransfer };
+    readSurvey(studyId, { file, match: choice }, options).then(
       (reading) => dispatch({ type: 'readingArrived', file, choice, reading }),
       (error: Error) => {
         if (!stop.signal.aborted) dispatch({ type: 'readingFailed', file, choice, error });
@@ -36,8 +39,11 @@ export function useHandIn(studyId: number) {
 
   return {
     state,
+    /** While the file travels; null once it has arrived. */
+    transfer: transfer && transfer.arrived < transfer.size ? transfer : null,
     choose: (file: File) => {
       send.reset();
+      setTransfer(null);
       dispatch({ type: 'fileChosen', file });
     },
     changeMatch: (choice: MatchChoice) => dispatch({ type: 'matchChanged', choice }),

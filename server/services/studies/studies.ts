@@ -1,21 +1,23 @@
 import { fn, col } from 'sequelize';
 import type { StudyBody } from '../../../shared/studies/schemas';
-import type { StudyCounts } from '../../../shared/studies/types';
+import type { StudyCounts, SurveyStanding } from '../../../shared/studies/types';
 import type { StudyModel } from '../../models/Study';
 import type { Platform } from '../../platform';
 import { may } from '../../policies/decide';
 import type { Actor, Loaded } from '../../policies/subject';
 import { studySubject } from './studySubject';
+import { surveyStandings } from './surveyStandings';
 
 /** A study in a list, with what the person may know of its work. */
 export interface ListedStudy {
   study: StudyModel;
   surveyRevision: number | null;
+  surveyStanding: SurveyStanding | null;
   runCount: number | null;
 }
 
 export function buildStudies({ audit, models, sequelize }: Platform) {
-  const { Study, StudyMember, SurveyRevision, Scenario, Run } = models;
+  const { Study, StudyMember, Scenario, Run } = models;
 
   /** For `authorize`; also of everything that belongs to a study. */
   async function load(id: number, actor: Actor): Promise<Loaded<StudyModel> | null> {
@@ -37,15 +39,22 @@ export function buildStudies({ audit, models, sequelize }: Platform) {
     const visible = studies.filter(({ id, firmId }) =>
       may(actor, 'study.read', { firmId, memberAs: memberAs.get(id) ?? null }),
     );
-    const [revisions, runs] = await Promise.all([
-      newestRevisions(visible.map(({ id }) => id)),
-      runCounts(visible.map(({ id }) => id)),
+    const ids = visible.map(({ id }) => id);
+    const [surveys, own, runs] = await Promise.all([
+      surveyStandings(models, ids),
+      surveyStandings(models, ids, actor.id),
+      runCounts(ids),
     ]);
     return visible.map((study) => {
       const seesWork = may(actor, 'reach.read', { firmId: study.firmId });
       return {
         study,
-        surveyRevision: seesWork ? (revisions.get(study.id) ?? null) : null,
+        surveyRevision: seesWork ? (surveys.get(study.id)?.accepted?.revision ?? null) : null,
+        surveyStanding: seesWork
+          ? (surveys.get(study.id)?.standing ?? 'none')
+          : memberAs.get(study.id) === 'surveyor'
+            ? (own.get(study.id)?.standing ?? 'none')
+            : null,
         runCount: seesWork ? (runs.get(study.id) ?? 0) : null,
       };
     });
@@ -74,26 +83,19 @@ export function buildStudies({ audit, models, sequelize }: Platform) {
 
   /** What stands in the study; for those who may see its work. */
   async function counts({ id: studyId }: StudyModel): Promise<StudyCounts> {
-    const [newest, scenarios, runs] = await Promise.all([
-      SurveyRevision.findOne({ where: { studyId }, order: [['revision', 'DESC']] }),
+    const [surveys, scenarios, runs] = await Promise.all([
+      surveyStandings(models, [studyId]),
       Scenario.count({ where: { studyId } }),
       Run.count({ where: { studyId } }),
     ]);
+    const { accepted = null, waiting = 0 } = surveys.get(studyId) ?? {};
     return {
-      surveyRevision: newest?.revision ?? null,
-      sections: newest?.sectionCount ?? null,
+      surveyRevision: accepted?.revision ?? null,
+      surveysWaiting: waiting,
+      sections: accepted?.sectionCount ?? null,
       scenarios,
       runs,
     };
-  }
-
-  async function newestRevisions(studyIds: number[]): Promise<Map<number, number>> {
-    const rows = await SurveyRevision.unscoped().findAll({
-      where: { studyId: studyIds },
-      attributes: ['studyId', [fn('MAX', col('revision')), 'revision']],
-      group: ['studyId'],
-    });
-    return new Map(rows.map((row) => [row.studyId, Number(row.revision)]));
   }
 
   async function runCounts(studyIds: number[]): Promise<Map<number, number>> {

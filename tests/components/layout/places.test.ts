@@ -32,7 +32,7 @@ const study = (may: StudyAction[]): Study => ({
   updatedAt: '2025-11-01T00:00:00Z',
   createdBy: 'Ines Corrow',
   may,
-  counts: { surveyRevision: 3, sections: 44, scenarios: 5, runs: 12 },
+  counts: { surveyRevision: 3, surveysWaiting: 0, sections: 44, scenarios: 5, runs: 12 },
 });
 const labels = (places: Place[]) => places.map((place) => place.label);
 

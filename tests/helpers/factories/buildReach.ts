@@ -31,6 +31,13 @@ export async function buildReach(
     sentBy: study.createdBy,
     sentAt: new Date(),
   });
+  await models.SurveyDecision.create({
+    surveyRevisionId: survey.id,
+    decision: 'accepted',
+    remarks: '',
+    decidedBy: study.createdBy,
+    decidedAt: new Date(),
+  });
   return models.Reach.create({
     ...extent,
     studyId: study.id,

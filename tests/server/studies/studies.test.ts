@@ -27,7 +27,13 @@ test('a study is made, read, changed and listed', async () => {
   const api = await server.signInAs(modeller);
   const made = await api.post('/api/studies').send(BODY).expect(201);
   expect(made.body).toMatchObject({ ...BODY, createdBy: modeller.name });
-  expect(made.body.counts).toEqual({ surveyRevision: null, sections: null, scenarios: 0, runs: 0 });
+  expect(made.body.counts).toEqual({
+    surveyRevision: null,
+    surveysWaiting: 0,
+    sections: null,
+    scenarios: 0,
+    runs: 0,
+  });
   expect(made.body.may).toEqual(
     expect.arrayContaining(['study.change', 'survey.send', 'run.request']),
   );

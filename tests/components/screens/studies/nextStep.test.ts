@@ -19,21 +19,25 @@ const withCounts = (counts: StudyCounts): Study => ({
 
 test.each([
   [
-    { surveyRevision: null, sections: null, scenarios: 0, runs: 0 },
+    { surveyRevision: null, surveysWaiting: 0, sections: null, scenarios: 0, runs: 0 },
     'Hand in the survey',
     '/studies/7/survey',
   ],
   [
-    { surveyRevision: 1, sections: 44, scenarios: 0, runs: 0 },
+    { surveyRevision: 1, surveysWaiting: 0, sections: 44, scenarios: 0, runs: 0 },
     'Set up a scenario',
     '/studies/7/scenarios',
   ],
   [
-    { surveyRevision: 1, sections: 44, scenarios: 2, runs: 0 },
+    { surveyRevision: 1, surveysWaiting: 0, sections: 44, scenarios: 2, runs: 0 },
     'Route a flood',
     '/studies/7/scenarios',
   ],
-  [{ surveyRevision: 1, sections: 44, scenarios: 2, runs: 3 }, 'See the runs', '/studies/7/runs'],
+  [
+    { surveyRevision: 1, surveysWaiting: 0, sections: 44, scenarios: 2, runs: 3 },
+    'See the runs',
+    '/studies/7/runs',
+  ],
 ])('%j: %s', (counts, label, href) => {
   expect(nextStep(withCounts(counts))).toEqual({ label, href });
 });

@@ -15,6 +15,17 @@ jest.mock('expo-router', () => ({
 jest.mock('expo-router/head', () => ({ __esModule: true, default: () => null }));
 jest.mock('expo-router/react-navigation', () => ({ useIsFocused: () => true }));
 
+// Many roles are looked up in a large tree, which takes seconds on a busy machine.
+jest.setTimeout(30_000);
+
+/** Files arrive at once; how they do is tried in a real browser. */
+jest.mock('@/components/queries/uploads', () => ({
+  sendFile: async () => 41,
+  forgetArrived: () => false,
+  useUploads: () => ({ data: [] }),
+  useForgetUpload: () => ({}),
+}));
+
 const fault: SurveyFault = {
   sheet: 'Main',
   row: 218,
@@ -49,12 +60,12 @@ const reading = (faults: SurveyFault[]): SurveyReading => ({
   sections: faults.length > 0 ? [] : plainSections(),
 });
 
-let sent: { path: string; form: FormData }[];
+let sent: { path: string; body: Record<string, unknown> }[];
 function server(...answers: { status: number; body: unknown }[]) {
   sent = [];
   global.fetch = jest.fn(async (path: RequestInfo | URL, options?: RequestInit) => {
     const isList = options?.method === 'GET';
-    if (!isList) sent.push({ path: String(path), form: options?.body as FormData });
+    if (!isList) sent.push({ path: String(path), body: JSON.parse(String(options?.body)) });
     const answer = isList
       ? { status: 200, body: { revisions: [], refusals: [] } }
       : answers.shift()!;
@@ -65,6 +76,13 @@ function server(...answers: { status: number; body: unknown }[]) {
     } as Response;
   });
 }
+const row = (revision: number) => ({
+  revision,
+  fileName: 'reach.xlsx',
+  sectionCount: 4,
+  pointCount: 32,
+  decision: { decision: 'accepted', remarks: '', by: 'Ines', at: '2026-12-01T08:00:00Z' },
+});
 const read = (faults: SurveyFault[] = []) => ({ status: 200, body: reading(faults) });
 
 function open() {
@@ -87,7 +105,7 @@ describe('handing in a survey', () => {
   it('shows each fault with its place, and takes in the mended file with its note', async () => {
     server(read([fault]), read(), {
       status: 201,
-      body: { revision: 1, fileName: 'reach.xlsx', sectionCount: 4, pointCount: 32 },
+      body: row(1),
     });
     open();
     choose();
@@ -108,14 +126,13 @@ describe('handing in a survey', () => {
       '/api/studies/3/surveys/read',
       '/api/studies/3/surveys',
     ]);
-    expect(sent[2].form.get('note')).toBe('Bridge measured again.');
-    expect(sent[2].form.get('match')).toBeNull();
+    expect(sent[2].body).toEqual({ uploadId: 41, note: 'Bridge measured again.' });
   });
 
   it('reads again with another match and sends that match along', async () => {
     server(read([fault]), read(), {
       status: 201,
-      body: { revision: 2, fileName: '', sectionCount: 4, pointCount: 32 },
+      body: row(2),
     });
     open();
     choose();
@@ -124,9 +141,9 @@ describe('handing in a survey', () => {
     await screen.findByRole('heading', { name: 'Read without faults' });
     fireEvent.click(screen.getByRole('button', { name: 'Take in this survey' }));
     await screen.findByText('Taken in as revision 2');
-    const match = JSON.parse(String(sent[2].form.get('match')));
+    const match = JSON.parse(String(sent[2].body['match']));
     expect(match.columns[3]).toEqual({ column: 3, field: null, unit: null });
-    expect(sent[1].form.get('match')).toBe(sent[2].form.get('match'));
+    expect(sent[1].body['match']).toBe(sent[2].body['match']);
   });
 
   it('says what happened when the file cannot be read, and reads it again when asked to', async () => {
