@@ -203,8 +203,8 @@ export function runDispatcher(parts: Parts) {
 function endingOf(outcome: Exclude<Outcome, { type: 'broken' }>): Ending {
   switch (outcome.type) {
     case 'routed': {
-      const { blocks, solver, peakStage, peakFlow } = outcome;
-      return { state: 'routed', blocks, solver, peakStage, peakFlow };
+      const { blocks, solver, peakStage, peakFlow, inflow } = outcome;
+      return { state: 'routed', blocks, solver, peakStage, peakFlow, inflow };
     }
     case 'failed':
       return { state: 'failed', failure: outcome.reason };

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { QueryTypes, Transaction, type Sequelize } from 'sequelize';
+import type { Run as RunTold } from '../../shared/runs/types';
 import type { Models } from '../models';
 import type { EncodedBlock } from '../results/blocks/blockTypes';
 import type { QueueTiming } from './timing';
@@ -17,7 +18,15 @@ export interface Claim {
 export type Standing = 'held' | 'cancelRequested' | 'lost';
 
 export type Ending =
-  | { state: 'routed'; blocks: EncodedBlock[]; solver: string; peakStage: number; peakFlow: number }
+  | {
+      state: 'routed';
+      blocks: EncodedBlock[];
+      solver: string;
+      peakStage: number;
+      peakFlow: number;
+      /** Into the reach; null: as it was asked for. */
+      inflow?: RunTold['inflow'] | null;
+    }
   | { state: 'failed'; failure: string }
   | { state: 'cancelled' };
 
@@ -94,7 +103,7 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
           const told = run.cancelRequested ? ({ state: 'cancelled' } as const) : ending;
           const finished = { ...noLease, finishedAt: now as unknown as Date };
           if (told.state === 'routed') {
-            const { blocks, solver, peakStage, peakFlow } = told;
+            const { blocks, solver, peakStage, peakFlow, inflow } = told;
             for (const { kind, part, bytes } of blocks) {
               const row = { runId, kind, part, bytes: Buffer.from(bytes) };
               await RunBlock.create(row, { transaction });
@@ -106,6 +115,7 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
               solverVersion: solver,
               peakStage,
               peakFlow,
+              ...(inflow && { inflow }),
             };
             await run.update(values, { transaction });
           } else {

@@ -1,6 +1,7 @@
 import { parentPort, workerData } from 'node:worker_threads';
 import { gunzipSync } from 'node:zlib';
 import type { CaseFile } from '../../shared/case/caseFile';
+import { releaseOutline } from '../results/inflowOutline';
 import { encodeRun } from '../results/blocks/encodeRun';
 import { recordWave } from '../results/blocks/waveRecorder';
 import { RunCancelled, RunFailed, outputTimes, routeCase } from '../solvers';
@@ -54,6 +55,7 @@ function route(
     solver: result.solver,
     peakStage: outlet.stage,
     peakFlow: outlet.flow,
+    inflow: releaseOutline(result),
   };
 }
 

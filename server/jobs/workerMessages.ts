@@ -1,3 +1,4 @@
+import type { Run } from '../../shared/runs/types';
 import type { EncodedBlock } from '../results/blocks/blockTypes';
 
 /** What a run's worker thread is started with. */
@@ -19,7 +20,15 @@ export interface LiveSurface {
 
 /** How a run ended that was not broken off. */
 export type WorkerResult =
-  | { type: 'routed'; blocks: EncodedBlock[]; solver: string; peakStage: number; peakFlow: number }
+  | {
+      type: 'routed';
+      blocks: EncodedBlock[];
+      solver: string;
+      peakStage: number;
+      peakFlow: number;
+      /** Into the reach, where it came of the routing itself: from a reservoir. */
+      inflow: Run['inflow'] | null;
+    }
   | { type: 'failed'; reason: string }
   | { type: 'cancelled' };
 

@@ -1,4 +1,5 @@
 import type { CaseFile } from '../../shared/case/caseFile';
+import type { ResultFile } from '../../shared/case/resultFile';
 
 /** Largest inflow at the upstream end within the run, m³/s, and when, s; null where that end is not an inflow. */
 export function inflowPeak(caseFile: CaseFile): { flow: number; time: number } | null {
@@ -14,6 +15,13 @@ export function inflowPeak(caseFile: CaseFile): { flow: number; time: number } |
   });
   consider(flowAt(times, flows, numerics.duration), numerics.duration);
   return peak;
+}
+
+/** Largest release of a reservoir into the reach at the output times; null where there is none. */
+export function releasePeak({ reservoir, times }: ResultFile) {
+  if (!reservoir) return null;
+  const flow = Math.max(...reservoir.release);
+  return { flow, time: times[reservoir.release.indexOf(flow)] };
 }
 
 /** Linear between the given values, held outside. */

@@ -24,6 +24,8 @@ export async function summaryOf(
     sections: withPeaks(facts.sections, peaks, ({ id }) => ({ id })),
     stations: withPeaks(stations, peaks, ({ id, name }) => ({ stationId: id, name })),
     volume: facts.volume,
+    structures: facts.structures ?? [],
+    reservoir: facts.reservoir ?? null,
     warnings: facts.warnings,
     arrivalRule: facts.arrivalThreshold.text,
     steps: facts.steps,

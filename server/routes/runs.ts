@@ -84,6 +84,21 @@ export function runRoutes({ authenticate, runs, scenarios, studies }: Services):
     res.json(await results.series(run, chainage));
   });
 
+  router.get('/runs/:runId/structures/:structure', authenticate, readRun, async (req, res) => {
+    const structure = pathId(req, 'structure');
+    const run = runOf(res);
+    results.open(run);
+    if (unchanged(req, res, run.caseHash, run.id, 'structure', structure)) return;
+    res.json(await results.structure(run, structure - 1));
+  });
+
+  router.get('/runs/:runId/reservoir', authenticate, readRun, async (req, res) => {
+    const run = runOf(res);
+    results.open(run);
+    if (unchanged(req, res, run.caseHash, run.id, 'reservoir')) return;
+    res.json(await results.reservoir(run));
+  });
+
   router.get('/runs/:runId/surface', authenticate, readRun, async (req, res) => {
     const wanted = await check(surfaceQuerySchema, req.query);
     const run = runOf(res);
@@ -104,6 +119,13 @@ export function runRoutes({ authenticate, runs, scenarios, studies }: Services):
     const run = runOf(res);
     const rows = await exports.csv(run);
     res.attachment(`run-${run.number}-results.csv`).type('text/csv; charset=utf-8');
+    await pipeline(rows, res);
+  });
+
+  router.get('/runs/:runId/structures.csv', authenticate, readRun, async (_req, res) => {
+    const run = runOf(res);
+    const rows = await exports.structuresCsv(run);
+    res.attachment(`run-${run.number}-structures.csv`).type('text/csv; charset=utf-8');
     await pipeline(rows, res);
   });
 

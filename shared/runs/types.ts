@@ -1,4 +1,6 @@
+import type { ReservoirResult, StructureRegime, StructureResult } from '../case/resultFile';
 import type { ReviewState } from '../review/types';
+import type { StructureMark } from '../structures/structureMarks';
 
 /** States of a run, as stored. The words for them are in `RUN_STATE_WORDS`. */
 export const RUN_STATES = ['queued', 'running', 'routed', 'failed', 'cancelled'] as const;
@@ -50,7 +52,7 @@ export interface Run extends RunRow {
   attempts: number;
   /** Where, when and why it stopped, and what to change. */
   failure: string | null;
-  /** Inflow for the time ribbon, at most 400 points: s and m³/s. */
+  /** Inflow of the reach for the time ribbon, at most 400 points: s and m³/s. From a reservoir it is known once it is routed. */
   inflow: { times: number[]; flows: number[] };
   may: ('run.cancel' | 'run.retry' | 'run.read')[];
 }
@@ -90,6 +92,10 @@ export interface RunSummary {
     error: number;
     relativeError: number;
   };
+  /** In the order of the case; empty where nothing stands in the river. */
+  structures: RunStructure[];
+  /** null where the upstream end is no reservoir. */
+  reservoir: RunReservoir | null;
   warnings: { code: string; message: string; chainage: number | null; time: number | null }[];
   /** The rule by which arrival was told, in words. */
   arrivalRule: string;
@@ -99,6 +105,47 @@ export interface RunSummary {
   cellCount: number;
   /** m. */
   cellSize: number;
+}
+
+/** What is read first of a structure. SI; times in s from start. */
+export interface RunStructure extends StructureMark {
+  /** Where its numbers come from. */
+  note: string;
+  /** Of every time step. */
+  peak: StructureResult['peak'];
+  /** How the water passes it: from each time on, until the next. */
+  regimes: { time: number; regime: StructureRegime }[];
+  /** Of a failing dam: when it began (null: never), its width and bottom at the end. */
+  breach?: { begins: number | null; width: number; bottom: number };
+}
+
+/** Peaks at the output times. */
+export interface RunReservoir {
+  peakStage: number;
+  peakStageTime: number;
+  peakRelease: number;
+  peakReleaseTime: number;
+  balance: ReservoirResult['balance'];
+}
+
+/** `GET /api/runs/:runId/structures/:structure`, counted from 1 in the order of the summary. */
+export interface RunStructureSeries {
+  times: number[];
+  flow: number[];
+  stageUp: number[];
+  stageDown: number[];
+  regime: StructureRegime[];
+  /** Of a failing dam: width and level of the bottom. */
+  breach?: { width: number[]; bottom: number[] };
+}
+
+/** `GET /api/runs/:runId/reservoir`. */
+export interface RunReservoirSeries {
+  times: number[];
+  stage: number[];
+  volume: number[];
+  inflow: number[];
+  release: number[];
 }
 
 /** `GET /api/runs/:runId/series?chainage=…`: at the cells nearest the place, linear between; exact at a section. */

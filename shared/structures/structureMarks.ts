@@ -1,11 +1,12 @@
-import type { StructureInput, StructureKind } from '../case/structures';
+import type { StructureInput } from '../case/structures';
 import type { StructureBody } from '../scenarios/structures/schemas';
 import { crestPoints, lowestOf } from './crests';
+import type { StandingKind } from './structureWords';
 
 /** A structure as a drawing from the side has it, m. */
 export interface StructureMark {
   id: string;
-  kind: StructureKind;
+  kind: StandingKind;
   chainage: number;
   /** Where water passes last and first: sill, invert or bottom of the breach; null where the bed is it. */
   foot: number | null;

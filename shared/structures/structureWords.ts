@@ -1,13 +1,17 @@
 import type { CulvertInlet, BridgeInput, StructureKind } from '../case/structures';
 import type { StructureRegime } from '../case/resultFile';
 
-/** Names of what stands in the river, as every screen, file and report tells them. */
-export const STRUCTURE_NAMES: Record<StructureKind, string> = {
+/** What stands in the river of a run: its structures, and the spillway of a reservoir beside them. */
+export type StandingKind = StructureKind | 'spillway';
+
+/** Names of it, as every screen, file and report tells them. */
+export const STRUCTURE_NAMES: Record<StandingKind, string> = {
   weir: 'Weir',
   sluice: 'Sluice',
   culvert: 'Culvert',
   bridge: 'Bridge',
   breach: 'Failing dam',
+  spillway: 'Spillway',
 };
 
 export const CULVERT_INLET_WORDS: Record<CulvertInlet, string> = {

@@ -1,13 +1,16 @@
 import type { ArrivalThreshold, RunWarning, VolumeBalance } from '../../../shared/case/resultFile';
+import type { RunReservoir, RunStructure } from '../../../shared/runs/types';
 
 /**
  * How a routed run is stored, one row a block, each gzipped:
  * - facts: JSON, everything that is not an array over places (`RunFacts`);
  * - places: columns, every cell and every surveyed section by chainage with its exact peaks (`PlaceColumns`);
  * - series, one part a surveyed section: columns, exact at every output time (`SeriesColumns`);
- * - wave, one part for each `PLACES_PER_PART` places of the wave: columns, decimated (`WaveColumns`).
+ * - wave, one part for each `PLACES_PER_PART` places of the wave: columns, decimated (`WaveColumns`);
+ * - structure, one part a structure: columns, exact at every output time (`StructureColumns`);
+ * - reservoir: the same of the pool at the head (`ReservoirColumns`).
  */
-export const BLOCK_KINDS = ['facts', 'places', 'series', 'wave'] as const;
+export const BLOCK_KINDS = ['facts', 'places', 'series', 'wave', 'structure', 'reservoir'] as const;
 export type BlockKind = (typeof BLOCK_KINDS)[number];
 
 export interface EncodedBlock {
@@ -33,6 +36,9 @@ export interface RunFacts {
   cellSize: number;
   inflowPeak: { flow: number; time: number } | null;
   sections: { id: string; chainage: number }[];
+  /** Left out in runs that were stored before there were any. */
+  structures?: RunStructure[];
+  reservoir?: RunReservoir | null;
   /** Indexes into `times` of the moments that the wave keeps. */
   moments: number[];
 }
@@ -61,6 +67,16 @@ export type SeriesColumns = Record<
   'stage' | 'depth' | 'flow' | 'area' | 'velocity' | 'froude',
   Float64Array
 >;
+
+/** One entry an output time; `regime` counts in `REGIMES`; width and bottom of a breach alone. */
+export type StructureColumns = Record<'flow' | 'stageUp' | 'stageDown', Float64Array> & {
+  regime: Int32Array;
+  width?: Float64Array;
+  bottom?: Float64Array;
+};
+
+/** One entry an output time. */
+export type ReservoirColumns = Record<'stage' | 'volume' | 'inflow' | 'release', Float64Array>;
 
 /** [place of the part * moments + moment] */
 export type WaveColumns = Record<'depth' | 'flow' | 'velocity', Float32Array>;

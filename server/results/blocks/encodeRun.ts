@@ -1,14 +1,23 @@
 import { gzipSync } from 'node:zlib';
 import type { CaseFile } from '../../../shared/case/caseFile';
-import type { ResultFile, SectionResult } from '../../../shared/case/resultFile';
-import { inflowPeak } from '../inflowPeak';
+import type {
+  ReservoirResult,
+  ResultFile,
+  SectionResult,
+  StructureResult,
+} from '../../../shared/case/resultFile';
+import { REGIMES } from '../../../shared/structures/structureWords';
+import { inflowPeak, releasePeak } from '../inflowPeak';
+import { reservoirOf, structuresOf } from '../structuresOf';
 import {
   WAVE_LIMITS,
   type BlockKind,
   type EncodedBlock,
   type PlaceColumns,
+  type ReservoirColumns,
   type RunFacts,
   type SeriesColumns,
+  type StructureColumns,
   type WaveColumns,
 } from './blockTypes';
 import { encodeColumns, type Columns } from './columnsBlock';
@@ -33,6 +42,10 @@ export function encodeRun(
     columnsBlock('places', 0, places satisfies PlaceColumns),
     ...result.sections.map((section, part) => columnsBlock('series', part, seriesOf(section))),
     ...waveParts(merged, kept, result, wave),
+    ...(result.structures ?? []).map((of, part) =>
+      columnsBlock('structure', part, structureColumns(of)),
+    ),
+    ...(result.reservoir ? [columnsBlock('reservoir', 0, reservoirColumns(result.reservoir))] : []),
   ];
 }
 
@@ -56,8 +69,10 @@ function facts(caseFile: CaseFile, result: ResultFile, wave: RecordedWave): RunF
     seconds: result.seconds,
     cellCount,
     cellSize: length / cellCount,
-    inflowPeak: inflowPeak(caseFile),
+    inflowPeak: releasePeak(result) ?? inflowPeak(caseFile),
     sections: result.sections.map(({ id, chainage }) => ({ id, chainage })),
+    structures: structuresOf(caseFile, result),
+    reservoir: reservoirOf(result),
     moments: Array.from(wave.moments),
   };
 }
@@ -72,6 +87,27 @@ function seriesOf(section: SectionResult): SeriesColumns {
     froude: Float64Array.from(section.froude),
   };
 }
+
+function structureColumns({ flow, stageUp, stageDown, regime, breach }: StructureResult) {
+  return {
+    flow: Float64Array.from(flow),
+    stageUp: Float64Array.from(stageUp),
+    stageDown: Float64Array.from(stageDown),
+    regime: Int32Array.from(regime, (one) => REGIMES.indexOf(one)),
+    ...(breach && {
+      width: Float64Array.from(breach.width),
+      bottom: Float64Array.from(breach.bottom),
+    }),
+  } satisfies StructureColumns;
+}
+
+const reservoirColumns = ({ stage, volume, inflow, release }: ReservoirResult) =>
+  ({
+    stage: Float64Array.from(stage),
+    volume: Float64Array.from(volume),
+    inflow: Float64Array.from(inflow),
+    release: Float64Array.from(release),
+  }) satisfies ReservoirColumns;
 
 /** Indexes into the places of the surveyed sections and of the cells that were recorded. */
 function placesOfWave(merged: MergedPlaces, wave: RecordedWave): number[] {

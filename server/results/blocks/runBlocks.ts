@@ -4,8 +4,10 @@ import {
   WAVE_LIMITS,
   type BlockKind,
   type PlaceColumns,
+  type ReservoirColumns,
   type RunFacts,
   type SeriesColumns,
+  type StructureColumns,
   type WaveColumns,
 } from './blockTypes';
 import { decodeColumns } from './columnsBlock';
@@ -20,6 +22,8 @@ export interface RunBlocks {
   facts(): Promise<RunFacts>;
   places(): Promise<PlaceColumns>;
   series(section: number): Promise<SeriesColumns>;
+  structure(part: number): Promise<StructureColumns>;
+  reservoir(): Promise<ReservoirColumns>;
   /** Depth, flow and velocity at the given places of the wave, each over all moments. */
   wave(places: number[]): Promise<WaveRow[]>;
 }
@@ -34,6 +38,8 @@ export function runBlocks(read: ReadBlocks): RunBlocks {
     facts,
     places: once(async () => decodeColumns<PlaceColumns>(await one('places', 0))),
     series: async (section) => decodeColumns<SeriesColumns>(await one('series', section)),
+    structure: async (part) => decodeColumns(await one('structure', part)) as StructureColumns,
+    reservoir: async () => decodeColumns<ReservoirColumns>(await one('reservoir', 0)),
     async wave(places) {
       const partOf = (place: number) => Math.floor(place / WAVE_LIMITS.placesPerPart);
       const parts = [...new Set(places.map(partOf))];

@@ -8,6 +8,7 @@ import { clockTime, type ExportedRun } from './exportedRun';
 import { exportPlaces, type ExportPlace } from './exportPlaces';
 import { EXPORT_UNITS, type ExportUnit } from './exportUnits';
 import { inputsSheet } from './inputsSheet';
+import { structuresSheets } from './structuresSheets';
 
 type Cell = string | number | null;
 const HOUR = 3600;
@@ -35,6 +36,8 @@ export async function workbook(
   add('Stage', sheet('stage', length, '0.000'));
   add('Flow', sheet('flow', flow, '0.00'));
   add('Velocity', sheet('velocity', velocity, '0.000'));
+  for (const { name, rows } of await structuresSheets(blocks, run))
+    add(name, columnsOf(rows, [22, 16, 16, 16, 16, 16, 16, 30, 16, 16]));
   add('Inputs', columnsOf(inputsSheet(run, caseFile, facts), [34, 22, 22, 22]));
   add('Warnings', columnsOf(warningsSheet(facts, run), [28, 18, 18, 110]));
   return new Uint8Array(

@@ -4,6 +4,7 @@ import type { RunModel } from '../../models/Run';
 import type { EncodedBlock } from '../../results/blocks/blockTypes';
 import { csv } from '../../results/exports/csv';
 import type { ExportedRun } from '../../results/exports/exportedRun';
+import { structuresCsv } from '../../results/exports/structuresCsv';
 import type { WorkbookTask } from '../../results/exports/workbookWorker';
 import { thawCase } from './freezeCase';
 import { assertRouted, type buildReadResults } from './readResults';
@@ -41,6 +42,11 @@ export function buildExportRun(platform: Platform, results: ReturnType<typeof bu
     /** Pieces of text, made as they are taken. */
     async csv(run: RunModel): Promise<AsyncGenerator<string>> {
       return csv(results.open(run), await about(run));
+    },
+
+    /** The same of what stands in the river. */
+    async structuresCsv(run: RunModel): Promise<AsyncGenerator<string>> {
+      return structuresCsv(results.open(run), await about(run));
     },
 
     async workbook(run: RunModel): Promise<Buffer> {

@@ -1,12 +1,19 @@
 import type { SurfaceQuery } from '../../../shared/runs/schemas';
 import { encodeSurface } from '../../../shared/runs/surfaceBlock';
-import { RUN_STATE_WORDS, type RunSeries, type RunSummary } from '../../../shared/runs/types';
+import {
+  RUN_STATE_WORDS,
+  type RunReservoirSeries,
+  type RunSeries,
+  type RunStructureSeries,
+  type RunSummary,
+} from '../../../shared/runs/types';
 import type { Station } from '../../../shared/studies/types';
-import { AppError, conflict } from '../../errors';
+import { AppError, conflict, notFound } from '../../errors';
 import type { Models } from '../../models';
 import type { RunModel } from '../../models/Run';
 import { runBlocks, type ReadBlocks, type RunBlocks } from '../../results/blocks/runBlocks';
 import { seriesAt } from '../../results/seriesAt';
+import { reservoirSeries, structureSeries } from '../../results/structureSeries';
 import { summaryOf } from '../../results/summaryOf';
 import { surfaceOf } from '../../results/surfaceOf';
 
@@ -51,6 +58,20 @@ export function buildReadResults({ RunBlock, Station }: Models) {
       const [from, to] = [sections[0].chainage, sections[sections.length - 1].chainage];
       const message = `The reach goes from chainage ${from} m to ${to} m; choose a place on it.`;
       throw new AppError('invalid', message, { faults: [{ path: 'chainage', message }] });
+    },
+
+    /** Throws `notFound` where the run has no structure of this number. */
+    async structure(run: RunModel, part: number): Promise<RunStructureSeries> {
+      const series = await structureSeries(open(run), part);
+      if (!series) throw notFound();
+      return series;
+    },
+
+    /** Throws `notFound` where the upstream end is no reservoir. */
+    async reservoir(run: RunModel): Promise<RunReservoirSeries> {
+      const series = await reservoirSeries(open(run));
+      if (!series) throw notFound();
+      return series;
     },
 
     async surface(run: RunModel, wanted: SurfaceQuery): Promise<ArrayBuffer> {

@@ -33,7 +33,7 @@ if (stopped()) {
   const bytes = gzipSync('{}');
   const block: EncodedBlock = { kind: 'facts', part: 0, bytes };
   const blocks = does === 'routesTwice' ? [block, block] : [block];
-  post({ type: 'routed', blocks, solver: '1.0.0', peakStage: 4, peakFlow: 5 });
+  post({ type: 'routed', blocks, solver: '1.0.0', peakStage: 4, peakFlow: 5, inflow: null });
 } else if (does === 'fails') {
   post({ type: 'failed', reason: 'The run failed at chainage 10.0 m at 5.0 s: too steep.' });
 } else if (does === 'throws') {

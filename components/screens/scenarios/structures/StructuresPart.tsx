@@ -7,7 +7,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import { space } from '@/components/theme/tokens';
 import { LIMITS } from '@/shared/limits';
 import { freeName, newStructure } from '@/shared/scenarios/structures/newStructure';
-import type { StructureBody } from '@/shared/scenarios/structures/schemas';
+import { structureKinds, type StructureBody } from '@/shared/scenarios/structures/schemas';
 import { STRUCTURE_NAMES } from '@/shared/structures/structureWords';
 import { formatWithUnit } from '@/shared/units/format';
 import { EditorPart } from '../EditorPart';
@@ -16,7 +16,7 @@ import { StructureEditor } from './StructureEditor';
 import { StructuresAlong } from './StructuresAlong';
 
 type Kind = StructureBody['kind'];
-const KINDS = Object.keys(STRUCTURE_NAMES) as Kind[];
+const KINDS = Object.keys(structureKinds) as Kind[];
 
 interface Props {
   /** The place chosen on the ribbon, m. */
