@@ -22,7 +22,7 @@ import { ValueAxis } from './ValueAxis';
 export interface CurveSetProps extends CurveSetInput {
   /** What is drawn, e.g. `Stage at Tornick bridge`. */
   label: string;
-  /** Name of the values with their unit, over the axis; of plain numbers only. */
+  /** Name of the values over the axis where it is not their own. */
   valueName?: string;
   footName?: string;
   /** Place, time or number of the cursor, SI; null for none. */
@@ -81,8 +81,7 @@ function Drawing(props: Sized) {
   const model = useModel(props);
   const { colours } = useTheme();
   const { frame, footOf } = model;
-  const { foot, value, unitSystem, at = null } = props;
-  const unit = value === 'number' ? props.valueName : UNITS[unitSystem][value].symbol;
+  const { foot, unitSystem, at = null } = props;
   const x = at === null ? null : footOf(at);
   return (
     <>
@@ -94,11 +93,7 @@ function Drawing(props: Sized) {
       )}
       <Curves model={model} />
       <ChartText x={frame.left} y={14}>
-        {value === 'elevation'
-          ? `stage, ${unit} above datum`
-          : value === 'flow'
-            ? `flow, ${unit}`
-            : (unit ?? '')}
+        {valueTitle(props)}
       </ChartText>
       {foot === 'time' ? null : (
         <ChartText x={frame.right} y={frame.bottom - 6} anchor="end">
@@ -112,6 +107,13 @@ function Drawing(props: Sized) {
       ) : null}
     </>
   );
+}
+
+function valueTitle({ value, valueName, unitSystem }: CurveSetProps): string {
+  if (value === 'number') return valueName ?? '';
+  const { symbol } = UNITS[unitSystem][value];
+  if (valueName) return `${valueName}, ${symbol}`;
+  return value === 'elevation' ? `stage, ${symbol} above datum` : `${value}, ${symbol}`;
 }
 
 /** What does not follow the cursor. */

@@ -54,6 +54,8 @@ export interface CurveSetInput {
 
 const LEAST: Record<ValueKind, number> = { elevation: 0.5, depth: 0.2, flow: 1, number: 0.01 };
 const MARGINS = { top: 26, right: 16, bottom: 28, left: 50 };
+/** Ground below the lowest bed, as a share of the height. */
+const FOOT = 0.12;
 /** Marks along a line. */
 const MARKS = 7;
 
@@ -70,7 +72,9 @@ export function curveSetModel(
   );
   const rows = [...curves.map(({ y }) => y), ...bars, ...(ground ? [ground.y] : [])];
   const [low, high] = extentOf(...rows, ...(fromZero ? [[0]] : [])) ?? [0, 1];
-  const y = roomyExtent([inUnit(low), inUnit(high)], inUnit(LEAST[value]), 5);
+  // Room below the ground for the name of the axis.
+  const lowest = ground ? low - FOOT * (high - low) : low;
+  const y = roomyExtent([inUnit(lowest), inUnit(high)], inUnit(LEAST[value]), 5);
   const lines = [...curves.map((curve) => curve.x), ...(ground ? [ground.x] : [])];
   const [from, to] = extentOf(...lines) ?? [0, 1];
   const x: [number, number] =

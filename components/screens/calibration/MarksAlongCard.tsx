@@ -10,6 +10,7 @@ import { Loading } from '@/components/ui/Loading';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { RunResiduals } from '@/shared/calibration/types';
 import type { Run } from '@/shared/runs/types';
+import { Txt } from '@/components/ui/Txt';
 import { useResultSurface } from '../runs/results/useResultSurface';
 
 interface Props {
@@ -39,6 +40,7 @@ export function MarksAlongCard({ run, residuals }: Props) {
       },
     ];
   }, [surface.data, residuals]);
+  const off = useMemo(() => residualCurves(residuals), [residuals]);
   const ground = useMemo(
     () => surface.data && { x: surface.data.chainages, y: surface.data.bed },
     [surface.data],
@@ -46,17 +48,37 @@ export function MarksAlongCard({ run, residuals }: Props) {
   return (
     <Card title="Marks on the long section">
       {surface.data ? (
-        <CurveSet
-          label="Marks on the long section"
-          curves={curves}
-          ground={ground}
-          foot="place"
-          value="elevation"
-          unitSystem={system}
-          at={at}
-          onChange={setAt}
-          height={isWide ? 360 : 280}
-        />
+        <>
+          <CurveSet
+            label="Marks on the long section"
+            curves={curves}
+            ground={ground}
+            foot="place"
+            value="elevation"
+            unitSystem={system}
+            at={at}
+            onChange={setAt}
+            height={isWide ? 360 : 280}
+          />
+          {off.length > 1 ? (
+            <>
+              <Txt variant="small" tone="soft">
+                The same as residuals: a bar that reaches zero lies within its tolerance.
+              </Txt>
+              <CurveSet
+                label="Residuals along the reach"
+                curves={off}
+                foot="place"
+                value="depth"
+                valueName="residual"
+                unitSystem={system}
+                at={at}
+                onChange={setAt}
+                height={200}
+              />
+            </>
+          ) : null}
+        </>
       ) : surface.error ? (
         <ErrorState
           error={surface.error}
@@ -68,4 +90,22 @@ export function MarksAlongCard({ run, residuals }: Props) {
       )}
     </Card>
   );
+}
+
+/** Residuals by chainage about a line at zero; nothing where no mark can be compared. */
+function residualCurves({ marks }: RunResiduals): SetCurve[] {
+  const known = marks.filter(({ residual }) => residual !== null);
+  if (known.length === 0) return [];
+  const x = known.map(({ mark }) => mark.chainage);
+  return [
+    { name: 'No difference', x: [x[0], x[x.length - 1]], y: [0, 0], look: 3 },
+    {
+      name: 'Residual with its tolerance',
+      x,
+      y: known.map(({ residual }) => residual!),
+      reach: known.map(({ tolerance }) => tolerance),
+      look: OBSERVED_LOOK,
+      dots: true,
+    },
+  ];
 }

@@ -4,6 +4,7 @@ import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useResiduals, useResidualsDownload } from '@/components/queries/calibration';
 import { useObservations } from '@/components/queries/observations';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Button } from '@/components/ui/Button';
 import { Empty } from '@/components/ui/Empty';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -26,6 +27,7 @@ export const ResidualsScreen = () => (
 
 function Against({ run }: { run: Run }) {
   const { study, may } = useCurrentStudy();
+  const { isWide } = useBreakpoint();
   const router = useRouter();
   const params = useLocalSearchParams<{ flood?: string }>();
   const observed = useObservations(study.id);
@@ -66,9 +68,9 @@ function Against({ run }: { run: Run }) {
         ) : undefined
       }
       side={
-        hasSome ? (
+        hasSome && isWide ? (
           <>
-            <ResidualGroupsCard residuals={data} />
+            <ResidualFigures residuals={data} />
             <ReportedCard run={run} residuals={data} />
           </>
         ) : undefined
@@ -104,16 +106,18 @@ function Against({ run }: { run: Run }) {
       ) : null}
       {hasSome ? (
         <>
-          <ResidualFigures residuals={data} />
+          {isWide ? null : <ResidualFigures residuals={data} />}
           {data.marks.length > 0 ? (
             <>
               <MarksAlongCard run={run} residuals={data} />
               <MarkResidualsCard marks={data.marks} />
+              <ResidualGroupsCard residuals={data} />
             </>
           ) : null}
           {data.gauges.map((fit) => (
             <GaugeFitCard key={`${fit.gaugeId} ${fit.quantity}`} fit={fit} run={run} />
           ))}
+          {isWide ? null : <ReportedCard run={run} residuals={data} />}
         </>
       ) : null}
       <Cautions />

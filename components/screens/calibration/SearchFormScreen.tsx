@@ -20,7 +20,7 @@ import type { Run, RunSummary } from '@/shared/runs/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { RunGate } from '../runs/RunGate';
 import { floodName } from './floodWords';
-import { firstStretches } from './searchForm';
+import { firstCells, firstStretches } from './searchForm';
 import { SearchCost } from './SearchCost';
 import { StretchFields } from './StretchFields';
 
@@ -69,7 +69,7 @@ function Form({ run, residuals, summary }: Props) {
       use: { marks: marks.length > 0, gaugeStage: has('stage'), gaugeFlow: false },
       stretches: firstStretches(summary.sections),
       evaluations: 40 as number | null,
-      coarser: 2,
+      coarser: firstCells(summary.seconds),
     },
     onSubmit: async (body) => {
       const { id } = await request.mutateAsync({ ...body, coarser: Number(body.coarser) });

@@ -25,4 +25,11 @@ export const nextStretch = (sections: Sections): SearchStretch => ({
 export const searchSeconds = (seconds: number, coarser: number, runs: number): number =>
   (runs * seconds) / coarser ** 2;
 
+/** Runs of a usual search with two multipliers, and how long one likes to wait for them, s. */
+const USUAL = { runs: 48, wait: 240 };
+
+/** Cells to begin with: those of the run where they are quick, coarser ones where they are not. */
+export const firstCells = (seconds: number): number =>
+  [1, 2].find((coarser) => searchSeconds(seconds, coarser, USUAL.runs) <= USUAL.wait) ?? 4;
+
 export const hasRoom = (count: number): boolean => count < SEARCH_LIMITS.stretches;

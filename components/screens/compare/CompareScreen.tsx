@@ -5,6 +5,7 @@ import { Cautions } from '@/components/layout/Cautions';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useComparison } from '@/components/queries/comparison';
+import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { Notice } from '@/components/ui/Notice';
@@ -21,11 +22,15 @@ import { readRunIds } from './runIds';
 export function CompareScreen() {
   const { study } = useCurrentStudy();
   const router = useRouter();
+  const { isWide } = useBreakpoint();
   const params = useLocalSearchParams<{ runs?: string }>();
   const runIds = readRunIds(params.runs);
   const { data, error, refetch } = useComparison(study.id, runIds);
   const isEnough = runIds.length >= COMPARED_RUNS.min;
   const root = `/studies/${study.id}` as const;
+  const choose = (
+    <ChooseRuns chosen={runIds} onChange={(ids) => router.setParams({ runs: ids.join(',') })} />
+  );
   return (
     <Screen
       title="Compare runs"
@@ -36,10 +41,9 @@ export function CompareScreen() {
       ]}
       lead="The first run is what the others are measured against."
       ribbon={isEnough && data ? <Ribbon comparison={data} /> : undefined}
-      side={
-        <ChooseRuns chosen={runIds} onChange={(ids) => router.setParams({ runs: ids.join(',') })} />
-      }
+      side={isWide || isEnough ? choose : undefined}
     >
+      {isWide || isEnough ? null : choose}
       {error ? (
         <ErrorState
           error={error}
