@@ -43,17 +43,20 @@ export async function compose(env: Env, overrides: Overrides = {}) {
     const tasks = buildTasks(platform, runs.busy);
     const scenarios = buildScenarios(platform);
     const confidence = buildConfidence(platform, { runs, tasks });
+    const calibration = buildCalibration(platform, { observations, runs, scenarios, tasks });
+    const observedOf = calibration.residuals.ofReport;
     const reviews = buildReviews(platform, {
       background,
       mailer,
       confidence,
+      observedOf,
       runs,
       standingChanged: ({ id }) =>
         background.run('drawing a report to keep', async () =>
           reports.pdf(await runs.find.again(id), 'A4'),
         ),
     });
-    const reports = buildReports(platform, { confidence, reviews, runs });
+    const reports = buildReports(platform, { confidence, observedOf, reviews, runs });
     return {
       ...platform,
       close,
@@ -73,7 +76,7 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       scenarios,
       observations,
       comparison: buildComparison(platform, runs),
-      calibration: buildCalibration(platform, { observations, runs, scenarios, tasks }),
+      calibration,
       runs,
       tasks,
       confidence,

@@ -3,6 +3,7 @@ import { cautions } from './parts/cautions';
 import { check } from './parts/check';
 import { confidence } from './parts/confidence';
 import { cover } from './parts/cover';
+import { observed } from './parts/observed';
 import { method } from './parts/method';
 import { question } from './parts/question';
 import { results } from './parts/results';
@@ -23,6 +24,7 @@ const PARTS = [
   scenario,
   method,
   results,
+  observed,
   confidence,
   check,
   cautions,

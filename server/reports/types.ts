@@ -1,3 +1,4 @@
+import type { RunResiduals } from '../../shared/calibration/types';
 import type { ConfidenceKind } from '../../shared/confidence/schemas';
 import type { ConfidenceResult } from '../../shared/confidence/types';
 import type { Review, SignOff } from '../../shared/review/types';
@@ -65,6 +66,8 @@ export interface ReportFacts {
   stations: Station[];
   /** The latest finished set of each kind of this very case; of a signed run those that its signature saw. */
   confidence: ConfidenceFacts[];
+  /** Against the observed flood that was chosen; null: none was. */
+  observed: RunResiduals | null;
   /** null: never sent for checking. */
   review: ReviewFacts | null;
   /** null: preliminary. */

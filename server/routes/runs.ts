@@ -15,7 +15,13 @@ import type { StudyModel } from '../models/Study';
 import { may } from '../policies/decide';
 import { presentRun, presentRunRow } from '../presenters/runs';
 
-export function runRoutes({ authenticate, runs, scenarios, studies }: Services): Router {
+export function runRoutes({
+  authenticate,
+  calibration,
+  runs,
+  scenarios,
+  studies,
+}: Services): Router {
   const { find, change, results, exports } = runs;
   const router = Router();
   const readRun = authorize('run.read', (req, actor) => find.load(pathId(req, 'runId'), actor));
@@ -131,7 +137,8 @@ export function runRoutes({ authenticate, runs, scenarios, studies }: Services):
 
   router.get('/runs/:runId/results.xlsx', authenticate, readRun, async (_req, res) => {
     const run = runOf(res);
-    const workbook = await exports.workbook(run);
+    results.open(run);
+    const workbook = await exports.workbook(run, await calibration.residuals.ofReport(run));
     res.attachment(`run-${run.number}-results.xlsx`).send(workbook);
   });
 

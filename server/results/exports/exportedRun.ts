@@ -1,4 +1,5 @@
 import type { UnitSystem } from '../../../shared/units/units';
+import type { RunResiduals } from '../../../shared/calibration/types';
 import type { Station } from '../../../shared/studies/types';
 
 /** What an export says of a run beside its numbers. Plain data: it travels to a worker thread. */
@@ -16,6 +17,8 @@ export interface ExportedRun {
   caseHash: string;
   solverVersion: string;
   stations: Station[];
+  /** Against the observed flood of its report. */
+  observed?: RunResiduals | null;
 }
 
 /** Clock time of a moment, ISO 8601 in UTC to the second. */

@@ -8,6 +8,7 @@ import { clockTime, type ExportedRun } from './exportedRun';
 import { exportPlaces, type ExportPlace } from './exportPlaces';
 import { EXPORT_UNITS, type ExportUnit } from './exportUnits';
 import { inputsSheet } from './inputsSheet';
+import { residualRows } from './residualRows';
 import { structuresSheets } from './structuresSheets';
 
 type Cell = string | number | null;
@@ -38,6 +39,11 @@ export async function workbook(
   add('Velocity', sheet('velocity', velocity, '0.000'));
   for (const { name, rows } of await structuresSheets(blocks, run))
     add(name, columnsOf(rows, [22, 16, 16, 16, 16, 16, 16, 30, 16, 16]));
+  if (run.observed)
+    add(
+      'Observed',
+      columnsOf(residualRows(run.observed, run.unitSystem), [26, 16, 20, 22, 16, 18]),
+    );
   add('Inputs', columnsOf(inputsSheet(run, caseFile, facts), [34, 22, 22, 22]));
   add('Warnings', columnsOf(warningsSheet(facts, run), [28, 18, 18, 110]));
   return new Uint8Array(

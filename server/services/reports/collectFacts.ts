@@ -10,12 +10,14 @@ export interface FactsNeeds {
   reviews: Pick<ReviewsService, 'read' | 'signedRecord'>;
   runs: ReturnType<typeof buildRuns>;
   confidence: ReturnType<typeof buildConfidence>;
+  /** Against the observed flood that was chosen for the report. */
+  observedOf: (run: RunModel) => Promise<ReportFacts['observed']>;
 }
 
 /** What a report says of a run: as it was fixed by the signature, or before it as it stands. */
 export function buildCollectFacts(
   { env, models }: Platform,
-  { confidence, reviews, runs }: FactsNeeds,
+  { confidence, observedOf, reviews, runs }: FactsNeeds,
 ) {
   const { Firm, Reach, SurveyRevision } = models;
 
@@ -67,6 +69,7 @@ export function buildCollectFacts(
         record?.study.unitSystem ?? unitSystem,
         signOff?.at ?? null,
       ),
+      observed: record ? (record.observed ?? null) : await observedOf(run),
       review:
         review.state === null
           ? null

@@ -15,6 +15,7 @@ import { buildReadReview } from './readReview';
 import { buildReturnRun } from './returnRun';
 import { buildSendForCheck } from './sendForCheck';
 import { buildSignRun } from './signRun';
+import type { SignedRecord } from './signedRecord';
 import { buildTellOthers } from './tellOthers';
 
 interface Needs {
@@ -22,13 +23,15 @@ interface Needs {
   mailer: Mailer;
   runs: ReturnType<typeof buildRuns>;
   confidence: ReturnType<typeof buildConfidence>;
+  /** Against the observed flood of its report. */
+  observedOf: (run: RunModel) => Promise<SignedRecord['observed']>;
   /** A run was signed, or its signature withdrawn: its report is drawn and kept. */
   standingChanged: (run: RunModel) => void;
 }
 
 /** The checking of runs: from sending for check to the signature, and what is added to it. */
 export function buildReviews(platform: Platform, needs: Needs) {
-  const { runs, standingChanged } = needs;
+  const { observedOf, runs, standingChanged } = needs;
   const find = buildFindReviews(platform, runs);
   const change = buildChangeReview(platform);
   const reading = buildReadReview(platform, needs, find);
@@ -46,6 +49,7 @@ export function buildReviews(platform: Platform, needs: Needs) {
       attempts,
       change,
       find,
+      observedOf,
       reading,
       runs,
       standingChanged,

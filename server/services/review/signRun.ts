@@ -24,6 +24,8 @@ interface Needs {
   attempts: Attempts;
   change: ChangeReview;
   find: FindReviews;
+  /** Against the observed flood of its report. */
+  observedOf: (run: RunModel) => Promise<SignedRecord['observed']>;
   reading: ReadReview;
   runs: ReturnType<typeof buildRuns>;
   standingChanged: (run: RunModel) => void;
@@ -36,7 +38,7 @@ interface Needs {
  */
 export function buildSignRun(platform: Platform, needs: Needs) {
   const { audit, models, now } = platform;
-  const { attempts, change, find, reading, runs, standingChanged, tell } = needs;
+  const { attempts, change, find, observedOf, reading, runs, standingChanged, tell } = needs;
 
   return async (run: RunModel, actor: Actor, body: SignBody): Promise<void> => {
     const signer = await models.User.findByPk(actor.id, { rejectOnEmpty: true });
@@ -59,6 +61,7 @@ export function buildSignRun(platform: Platform, needs: Needs) {
 
     const firm = await models.Firm.findByPk(signer.firmId, { rejectOnEmpty: true });
     const stations = await runs.results.stations(run.studyId);
+    const observed = await observedOf(run);
     let sentBy: number | null = null;
     await change(run, async (review, transaction) => {
       assertInCheck(review, run);
@@ -88,6 +91,7 @@ export function buildSignRun(platform: Platform, needs: Needs) {
         limits: review.limits,
         checklist,
         points,
+        observed,
       };
       const at = now();
       await models.SignOff.create(

@@ -1,3 +1,4 @@
+import type { RunResiduals } from '../../../shared/calibration/types';
 import type { ChecklistItem, ReviewPoint } from '../../../shared/review/types';
 import type { Station, Study } from '../../../shared/studies/types';
 
@@ -13,4 +14,6 @@ export interface SignedRecord {
   limits: string;
   checklist: ChecklistItem[];
   points: ReviewPoint[];
+  /** Left out in signatures that were given before there was any. */
+  observed?: RunResiduals | null;
 }

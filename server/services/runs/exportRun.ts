@@ -1,3 +1,4 @@
+import type { RunResiduals } from '../../../shared/calibration/types';
 import type { Platform } from '../../platform';
 import { lazyPool } from '../../jobs/lazyPool';
 import type { RunModel } from '../../models/Run';
@@ -49,7 +50,8 @@ export function buildExportRun(platform: Platform, results: ReturnType<typeof bu
       return structuresCsv(results.open(run), await about(run));
     },
 
-    async workbook(run: RunModel): Promise<Buffer> {
+    /** With what the run is compared to, where there is something. */
+    async workbook(run: RunModel, observed: RunResiduals | null): Promise<Buffer> {
       assertRouted(run);
       const [rows, caseBytes, said] = await Promise.all([
         models.RunBlock.findAll({ where: { runId: run.id } }),
@@ -57,7 +59,7 @@ export function buildExportRun(platform: Platform, results: ReturnType<typeof bu
         about(run),
       ]);
       const blocks = rows.map(({ kind, part, bytes }): EncodedBlock => ({ kind, part, bytes }));
-      return Buffer.from(await pool().run({ blocks, caseBytes, run: said }));
+      return Buffer.from(await pool().run({ blocks, caseBytes, run: { ...said, observed } }));
     },
   };
 }

@@ -83,6 +83,7 @@ export function sampleFacts(given: Partial<ReportFacts> = {}): ReportFacts {
         },
       ],
     },
+    observed: null,
     signOff: {
       by: 'Rurik Tesk',
       qualification: 'Chartered Engineer',
