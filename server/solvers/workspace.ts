@@ -143,9 +143,11 @@ export function createWorkspace(
     parts: null,
   };
   const { bed, slopeFloor, table, levels } = workspace;
-  for (let i = 0; i < size; i++) {
-    bed[i] = grid.shapes[i].bed;
-    levels[i] = writeSectionTable(grid.shapes[i], table, i * TABLE_STRIDE);
+  let at = 0;
+  for (const shape of grid.shapes) {
+    bed[at] = shape.bed;
+    levels[at] = writeSectionTable(shape, table, at * TABLE_STRIDE);
+    at++;
   }
   workspace.parts = createParts(grid, table, levels);
   for (let i = 1; i <= n; i++) {

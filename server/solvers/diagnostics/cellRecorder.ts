@@ -85,7 +85,7 @@ export function createCellRecorder(workspace: Workspace, grid: Grid): CellRecord
       for (let k = 0; k < n; k++) if (peakStage[k] === -Infinity) peakStage[k] = bed[k + 1];
       return {
         chainage: [...grid.chainage],
-        bed: [...grid.bed],
+        bed: Array.from(bed.subarray(1, n + 1)),
         initialStage: [...initialStage],
         peakStage: [...peakStage],
         peakStageTime: [...peakStageTime],

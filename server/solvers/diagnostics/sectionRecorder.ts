@@ -1,6 +1,7 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import { ARRIVAL_RISE, type SectionResult } from '../../../shared/case/resultFile';
 import { createCellTables } from '../geometry/cellTables';
+import { needsReference } from '../geometry/needsReference';
 import { createParts } from '../geometry/parts';
 import { createSectionWaves } from '../geometry/sectionWaves';
 import type { Grid } from '../geometry/grid';
@@ -18,10 +19,11 @@ export interface SectionRecorder {
 }
 
 export function createSectionRecorder(
-  { sections, numerics }: CaseFile,
+  caseFile: CaseFile,
   workspace: Workspace,
   grid: Grid,
 ): SectionRecorder {
+  const { sections, numerics } = caseFile;
   const { stage, flow: cellFlow, bed: cellBed, faceFlow, gravity, dryDepth } = workspace;
   const count = sections.length;
   const table = new Float64Array(count * TABLE_STRIDE);
@@ -34,7 +36,8 @@ export function createSectionRecorder(
     levels[k] = writeSectionTable(shape, table, k * TABLE_STRIDE);
   });
   const isCompound = numerics.momentum === 'compound';
-  const parts = createParts({ shapes, isCompound }, table, levels);
+  const isParted = needsReference(caseFile);
+  const parts = createParts({ shapes, isCompound, isParted }, table, levels);
   const surveyed = { table, levels, level, gravity, parts, area: new Float64Array(count) };
   const tables = createCellTables(surveyed);
   const waves = createSectionWaves(surveyed, tables);

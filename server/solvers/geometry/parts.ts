@@ -25,27 +25,29 @@ export const LEAST_SPREAD = 0.04;
 
 /** Rewrites the tables of all sections of a grid for what flows. */
 export function createParts(
-  { shapes, isCompound }: Pick<ShapedGrid, 'shapes' | 'isCompound'>,
+  { shapes, isCompound, isParted }: Pick<ShapedGrid, 'shapes' | 'isCompound' | 'isParted'>,
   table: Float64Array,
   levels: Int32Array,
 ): Parts | null {
-  if (!isCompound && shapes.every(({ rules }) => rules === undefined)) return null;
-  const size = shapes.length;
+  if (!isParted) return null;
+  const size = levels.length;
   const parts: Parts = {
     table: new Float64Array(size * PART_STRIDE),
     flowArea: new Float64Array(size),
     beta: new Float64Array(size).fill(1),
     spread: new Float64Array(size),
   };
-  for (let i = 0; i < size; i++) {
+  let i = 0;
+  for (const shape of shapes) {
     levels[i] = writePartedTable(
-      shapes[i],
+      shape,
       isCompound,
       table,
       i * TABLE_STRIDE,
       parts.table,
       i * PART_STRIDE,
     );
+    i++;
   }
   return parts;
 }

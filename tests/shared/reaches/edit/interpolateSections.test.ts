@@ -67,7 +67,7 @@ test('on a natural reach the solver finds the same cross-section there without i
   const body = newScenario('Middle', 1, [a, b]);
   body.numerics.cellSize = (b.chainage - a.chainage) / 3;
   body.upstream = { kind: 'wall' };
-  const { shapes } = shapedGrid(buildCase(body, [a, b], 'Middle'));
+  const shapes = [...shapedGrid(buildCase(body, [a, b], 'Middle')).shapes];
   for (const depth of [0.5, 2, 4, 6]) {
     const stage = thalwegOf(made) + depth;
     const mine = sectionProperties(caseSection(made), stage);
