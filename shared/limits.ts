@@ -20,6 +20,7 @@ export const LIMITS = {
   hydrographPoints: 20_000,
   laterals: 50,
   roughnessFactors: 50,
+  localLosses: 50,
   structures: 50,
   structureName: 60,
   stationsPerStudy: 100,

@@ -1,7 +1,13 @@
-import { CASE_DEFAULTS, CASE_FORMAT, type CaseFile, type RoughnessFactor } from '../case/caseFile';
+import {
+  CASE_DEFAULTS,
+  CASE_FORMAT,
+  type CaseFile,
+  type LocalLoss,
+  type RoughnessFactor,
+} from '../case/caseFile';
 import type { Section } from '../surveys/types';
 import { inflowOf } from './hydrographs';
-import type { RoughnessFactorBody, ScenarioBody } from './schemas';
+import type { LocalLossBody, RoughnessFactorBody, ScenarioBody } from './schemas';
 import { buildStructure } from './structures/buildStructure';
 
 /**
@@ -18,12 +24,14 @@ export function buildCase(
     format: CASE_FORMAT,
     title,
     gravity: CASE_DEFAULTS.gravity,
-    sections: sections.map(({ id, chainage, points, roughness, banks }) => ({
+    sections: sections.map(({ id, chainage, points, roughness, banks, storage, embankments }) => ({
       id,
       chainage,
       points,
       roughness,
       ...(banks && { banks }),
+      ...(storage?.length && { storage }),
+      ...((embankments?.left || embankments?.right) && { embankments }),
     })),
     upstream: upstreamOf(body),
     downstream: downstreamOf(body),
@@ -37,6 +45,7 @@ export function buildCase(
       buildStructure(structure, `structures[${i}]`),
     ),
     ...(body.roughnessFactors?.length && { roughnessFactors: factorsOf(body.roughnessFactors) }),
+    ...(body.localLosses?.length && { localLosses: lossesOf(body.localLosses) }),
     initial: initialOf(body),
     numerics: {
       cellSize: given(numerics.cellSize, 'numerics.cellSize'),
@@ -45,6 +54,7 @@ export function buildCase(
       order: numerics.order as 1 | 2,
       courant: numerics.courant ?? CASE_DEFAULTS.courant,
       dryDepth: numerics.dryDepth ?? CASE_DEFAULTS.dryDepth,
+      ...(numerics.momentum === 'compound' && { momentum: 'compound' as const }),
     },
   };
 }
@@ -56,6 +66,14 @@ const factorsOf = (factors: RoughnessFactorBody[]): RoughnessFactor[] =>
     part,
     depths,
     factors: values,
+  }));
+
+const lossesOf = (losses: LocalLossBody[]): LocalLoss[] =>
+  losses.map(({ from, to, contraction, expansion }, i) => ({
+    from: given(from, `localLosses[${i}].from`),
+    to: given(to, `localLosses[${i}].to`),
+    contraction: given(contraction, `localLosses[${i}].contraction`),
+    expansion: given(expansion, `localLosses[${i}].expansion`),
   }));
 
 function upstreamOf({ upstream }: ScenarioBody): CaseFile['upstream'] {

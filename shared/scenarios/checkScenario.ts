@@ -3,6 +3,7 @@ import type { Section } from '../surveys/types';
 import { checkDownstream } from './checks/checkDownstream';
 import { checkInitial } from './checks/checkInitial';
 import { checkLaterals } from './checks/checkLaterals';
+import { checkLocalLosses } from './checks/checkLocalLosses';
 import { checkNumerics } from './checks/checkNumerics';
 import { checkRoughness } from './checks/checkRoughness';
 import { checkReachOf } from './checks/checkReachOf';
@@ -29,6 +30,7 @@ export function checkScenario(
     checkLaterals(body, reach, findings);
     checkStructures(body, reach, findings);
     checkRoughness(body, reach, findings);
+    checkLocalLosses(body, reach, findings);
     checkDownstream(body, reach, findings);
     checkInitial(body, reach, findings);
     checkNumerics(body, reach, findings);

@@ -56,6 +56,7 @@ export function newScenario(name: string, reachId: number, sections: Sections): 
     laterals: [],
     structures: [],
     roughnessFactors: [],
+    localLosses: [],
     downstream: { kind: 'normalDepth', slope: outletSlope },
     initial: { kind: 'steady' },
     numerics: { cellSize, duration, outputInterval, order: 2, courant: null, dryDepth: null },

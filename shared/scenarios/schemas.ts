@@ -97,6 +97,14 @@ const roughnessFactor = object({
   factors: series(),
 }).noUnknown();
 
+/** Shares of the change of velocity head that a stretch loses where it narrows and where it widens. */
+const localLoss = object({
+  from: real(),
+  to: real(),
+  contraction: real(),
+  expansion: real(),
+}).noUnknown();
+
 const numerics = object({
   cellSize: real(),
   duration: real(),
@@ -104,6 +112,8 @@ const numerics = object({
   order: number().oneOf([1, 2]).default(2).required(),
   courant: real(),
   dryDepth: real(),
+  /** Left out in scenarios that were stored before there was a choice: uniform. */
+  momentum: string().oneOf(['uniform', 'compound'] as const),
 }).noUnknown();
 
 export type Upstream =
@@ -125,6 +135,7 @@ export type InitialState = {
 }[keyof typeof initialKinds];
 export type LateralInflow = InferType<typeof lateral>;
 export type RoughnessFactorBody = InferType<typeof roughnessFactor>;
+export type LocalLossBody = InferType<typeof localLoss>;
 export type NumericsSettings = InferType<typeof numerics>;
 
 export interface ScenarioBody {
@@ -139,6 +150,8 @@ export interface ScenarioBody {
   structures?: StructureBody[];
   /** The same. */
   roughnessFactors?: RoughnessFactorBody[];
+  /** The same. */
+  localLosses?: LocalLossBody[];
   downstream: Downstream;
   initial: InitialState;
   numerics: NumericsSettings;
@@ -168,6 +181,7 @@ export const scenarioSchema = object({
     .max(LIMITS.roughnessFactors)
     .default([])
     .required(),
+  localLosses: array().of(localLoss.required()).max(LIMITS.localLosses).default([]).required(),
   downstream: byKind(downstreamKinds),
   initial: byKind(initialKinds),
   numerics: numerics.required(),

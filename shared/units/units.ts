@@ -19,6 +19,7 @@ export const QUANTITIES = [
   'slope',
   'storage', // what a reservoir holds
   'weirCoefficient', // C of Q = C b h^1.5
+  'multiplier', // of Manning's n
 ] as const;
 export type Quantity = (typeof QUANTITIES)[number];
 
@@ -45,6 +46,7 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     slope: { symbol: 'm/m', si: 1, decimals: 5 },
     storage: { symbol: '10⁶ m³', si: 1e6, decimals: 3 },
     weirCoefficient: { symbol: 'm½/s', si: 1, decimals: 2 },
+    multiplier: { symbol: '× n', si: 1, decimals: 2 },
   },
   usCustomary: {
     chainage: { symbol: 'ft', si: FT, decimals: 0 },
@@ -58,6 +60,7 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     slope: { symbol: 'ft/ft', si: 1, decimals: 5 },
     storage: { symbol: 'acre-ft', si: 43_560 * FT ** 3, decimals: 0 },
     weirCoefficient: { symbol: 'ft½/s', si: FT ** 0.5, decimals: 2 },
+    multiplier: { symbol: '× n', si: 1, decimals: 2 },
   },
 };
 

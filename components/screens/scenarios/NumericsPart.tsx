@@ -135,6 +135,23 @@ export function NumericsPart() {
           )}
         </PlacedField>
       </FieldRow>
+      <FieldRow>
+        <PlacedField path="numerics.momentum">
+          {(error) => (
+            <SelectField
+              label="Momentum of the flow"
+              hint="By its parts, channel and overbank run at their own velocities; it matters where overbank flow speeds up or slows down."
+              value={numerics.momentum ?? CASE_DEFAULTS.momentum}
+              options={[
+                { value: 'uniform', label: 'One velocity over the section' },
+                { value: 'compound', label: 'By the parts of the section' },
+              ]}
+              onChange={(momentum) => change({ momentum: momentum as 'uniform' | 'compound' })}
+              {...{ error, disabled }}
+            />
+          )}
+        </PlacedField>
+      </FieldRow>
     </EditorPart>
   );
 }

@@ -16,9 +16,11 @@ import { EditorBar } from './EditorBar';
 import { EditorProvider } from './editorContext';
 import { InitialPart } from './InitialPart';
 import { LateralsPart } from './LateralsPart';
+import { LocalLossesPart } from './LocalLossesPart';
 import { NumericsPart } from './NumericsPart';
 import { OutletPart } from './OutletPart';
 import { ReadinessCard } from './ReadinessCard';
+import { RoughnessPart } from './RoughnessPart';
 import { StructuresPart } from './structures/StructuresPart';
 import { UnsavedNotice } from './UnsavedNotice';
 import { UpstreamPart } from './UpstreamPart';
@@ -100,6 +102,8 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
         <UpstreamPart />
         <LateralsPart />
         <StructuresPart at={at} />
+        <RoughnessPart />
+        <LocalLossesPart />
         <OutletPart />
         <InitialPart />
         <NumericsPart />

@@ -3,6 +3,7 @@ import type {
   Downstream,
   InitialState,
   LateralInflow,
+  LocalLossBody,
   NumericsSettings,
   ReservoirEnd,
   RoughnessFactorBody,
@@ -27,6 +28,7 @@ export interface Draft {
   laterals: LateralInflow[];
   structures: StructureBody[];
   roughnessFactors: RoughnessFactorBody[];
+  localLosses: LocalLossBody[];
   downstream: { kind: Downstream['kind']; byKind: ByKind<Downstream> };
   initial: { kind: InitialState['kind']; byKind: ByKind<InitialState> };
   numerics: NumericsSettings;
@@ -38,6 +40,23 @@ export const emptyLateral = (): LateralInflow => ({
   to: null,
   times: [],
   flows: [],
+});
+
+/** n as it is in a stretch that is still to be named. */
+export const emptyRoughnessFactor = (): RoughnessFactorBody => ({
+  from: null,
+  to: null,
+  part: 'all',
+  depths: [0],
+  factors: [1],
+});
+
+/** Gradual transitions: common practice. */
+export const emptyLocalLoss = (): LocalLossBody => ({
+  from: null,
+  to: null,
+  contraction: 0.1,
+  expansion: 0.3,
 });
 
 export const emptyReservoir = (): ReservoirEnd => ({
@@ -77,6 +96,7 @@ export function toDraft(body: ScenarioBody): Draft {
     laterals: body.laterals,
     structures: body.structures ?? [],
     roughnessFactors: body.roughnessFactors ?? [],
+    localLosses: body.localLosses ?? [],
     downstream: {
       kind: downstream.kind,
       byKind: {
@@ -114,6 +134,7 @@ export function toBody(draft: Draft): ScenarioBody {
     laterals: draft.laterals,
     structures: draft.structures,
     roughnessFactors: draft.roughnessFactors,
+    localLosses: draft.localLosses,
     downstream: draft.downstream.byKind[draft.downstream.kind],
     initial: draft.initial.byKind[draft.initial.kind],
     numerics: draft.numerics,

@@ -2,11 +2,13 @@ import type {
   Downstream,
   InitialState,
   LateralInflow,
+  LocalLossBody,
   NumericsSettings,
+  RoughnessFactorBody,
   Upstream,
 } from '@/shared/scenarios/schemas';
 import type { StructureBody } from '@/shared/scenarios/structures/schemas';
-import { emptyLateral, type Draft } from './draft';
+import { emptyLateral, emptyLocalLoss, emptyRoughnessFactor, type Draft } from './draft';
 
 /** A change to the entry of the kind that stands. */
 export type Change<T extends { kind: string }> = T extends unknown
@@ -27,6 +29,12 @@ export type DraftAction =
   | { type: 'structureChanged'; index: number; change: Change<StructureBody> }
   | { type: 'structureDuplicated'; index: number; id: string }
   | { type: 'structureRemoved'; index: number }
+  | { type: 'roughnessFactorAdded' }
+  | { type: 'roughnessFactorChanged'; index: number; change: Partial<RoughnessFactorBody> }
+  | { type: 'roughnessFactorRemoved'; index: number }
+  | { type: 'localLossAdded' }
+  | { type: 'localLossChanged'; index: number; change: Partial<LocalLossBody> }
+  | { type: 'localLossRemoved'; index: number }
   | { type: 'downstreamChosen'; kind: Downstream['kind'] }
   | { type: 'downstreamChanged'; change: Change<Downstream> }
   | { type: 'initialChosen'; kind: InitialState['kind'] }
@@ -73,6 +81,18 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
         ...draft,
         structures: draft.structures.filter((_, index) => index !== action.index),
       };
+    case 'roughnessFactorAdded':
+      return { ...draft, roughnessFactors: [...draft.roughnessFactors, emptyRoughnessFactor()] };
+    case 'roughnessFactorChanged':
+      return { ...draft, roughnessFactors: changedAt(draft.roughnessFactors, action) };
+    case 'roughnessFactorRemoved':
+      return { ...draft, roughnessFactors: without(draft.roughnessFactors, action.index) };
+    case 'localLossAdded':
+      return { ...draft, localLosses: [...draft.localLosses, emptyLocalLoss()] };
+    case 'localLossChanged':
+      return { ...draft, localLosses: changedAt(draft.localLosses, action) };
+    case 'localLossRemoved':
+      return { ...draft, localLosses: without(draft.localLosses, action.index) };
     case 'downstreamChosen':
       return { ...draft, downstream: { ...draft.downstream, kind: action.kind } };
     case 'downstreamChanged':
@@ -87,6 +107,13 @@ export function draftReducer(draft: Draft, action: DraftAction): Draft {
       return action.draft;
   }
 }
+
+const changedAt = <T extends object>(
+  list: T[],
+  { index, change }: { index: number; change: Partial<T> },
+): T[] => list.map((one, k) => (k === index ? { ...one, ...change } : one));
+
+const without = <T>(list: T[], index: number): T[] => list.filter((_, k) => k !== index);
 
 const changed = <P extends { kind: string; byKind: Record<string, object> }>(
   part: P,

@@ -6,6 +6,8 @@ export const PARTS = [
   'upstream',
   'laterals',
   'structures',
+  'roughnessFactors',
+  'localLosses',
   'downstream',
   'initial',
   'numerics',
@@ -17,6 +19,8 @@ export const PART_TITLES: Record<Part, string> = {
   upstream: 'Upstream end',
   laterals: 'Lateral inflows',
   structures: 'Structures',
+  roughnessFactors: 'Roughness by stretch and depth',
+  localLosses: 'Losses at narrows and widenings',
   downstream: 'Outlet',
   initial: 'Initial state',
   numerics: 'Numerical settings',
@@ -28,7 +32,7 @@ export const PART_TITLES: Record<Part, string> = {
  */
 export const placeOf = (path: string): string =>
   path.replace(
-    /\.(times|flows|stages|chainages|volumes|openings|offsets|levels)(\[\d+\].*)?$/,
+    /\.(times|flows|stages|chainages|volumes|openings|offsets|levels|depths|factors)(\[\d+\].*)?$/,
     '.values',
   );
 

@@ -89,7 +89,8 @@ export function checkStorage(
   value.forEach((part, k) => {
     const at = `${path}[${k}]`;
     if (!faults.record(at, part, ['from', 'to'], ['flowsAbove'])) return;
-    const level = part.flowsAbove === undefined ? {} : { flowsAbove: 'a stage' };
+    const level: Record<string, string> =
+      part.flowsAbove === undefined ? {} : { flowsAbove: 'a stage' };
     const fine = metresIn(faults, at, part, { from: 'an offset', to: 'an offset', ...level });
     if (!fine) return;
     const from = part.from as number;

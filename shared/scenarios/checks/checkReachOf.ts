@@ -1,3 +1,5 @@
+import { Faults } from '../../case/validate/faults';
+import { checkEmbankments, checkStorage } from '../../case/validate/sectionPartFaults';
 import type { Section } from '../../surveys/types';
 import type { Findings } from './Findings';
 
@@ -13,6 +15,17 @@ export function checkReachOf(sections: readonly Section[], findings: Findings) {
   const late = sections.filter(({ roughness, points }) => roughness[0]?.[0] > points[0][0]);
   if (late.length > 0)
     findings.fault('reachId', `${named(late)} no roughness at the left end. Mend it under Reach.`);
+  for (const section of sections) checkParts(section, findings);
+}
+
+/** Storage parts and embankments by the rules of the solver itself. */
+function checkParts({ id, points, banks, storage, embankments }: Section, findings: Findings) {
+  const faults = new Faults();
+  const ground = { points, banks };
+  if (storage) checkStorage(faults, 'storage', storage, ground, embankments);
+  if (embankments) checkEmbankments(faults, 'embankments', embankments, ground);
+  for (const { path, message } of faults.list)
+    findings.fault('reachId', `Section ${id}, ${path}: ${message}. Mend it under Reach.`);
 }
 
 function named(sections: readonly Section[]): string {

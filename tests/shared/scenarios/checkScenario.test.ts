@@ -254,6 +254,64 @@ describe('proposals', () => {
   });
 });
 
+describe('rough valleys', () => {
+  const loss = { from: 500, to: 1500, contraction: 0.1, expansion: 0.3 };
+
+  test.each([
+    [{ ...loss, to: 9999 }, ['localLosses[0].to']],
+    [{ ...loss, from: null }, ['localLosses[0].from']],
+    [{ ...loss, from: 1500 }, ['localLosses[0].to']],
+    [
+      { ...loss, contraction: -0.1, expansion: 2 },
+      ['localLosses[0].contraction', 'localLosses[0].expansion'],
+    ],
+  ])('losses %#', (one, paths) => {
+    expect(faultsOf({ localLosses: [one] })).toEqual(paths);
+  });
+
+  test('high coefficients are doubted', () => {
+    expect(doubtsOf({ localLosses: [{ ...loss, expansion: 0.9 }] })).toEqual([
+      'localLosses[0].expansion',
+    ]);
+  });
+
+  test('reach the case file, which is sound; without them it is what it was', () => {
+    const parted = sections.map((section, k) =>
+      k === 2
+        ? {
+            ...section,
+            storage: [{ from: section.points[0][0], to: section.points[1][0] }],
+            embankments: { left: { offset: section.points[0][0], crest: 99 } },
+          }
+        : section,
+    );
+    const body = sound({ localLosses: [loss], ...numerics({ momentum: 'compound' }) });
+    expect(checkScenario(body, parted).faults).toEqual([]);
+    const caseFile = buildCase(body, parted, 't');
+    expect(validateCase(caseFile).faults).toEqual([]);
+    expect(caseFile.localLosses).toEqual([loss]);
+    expect(caseFile.numerics.momentum).toBe('compound');
+    expect(caseFile.sections[2]).toMatchObject({ storage: parted[2].storage });
+    expect(caseFile.sections[2].embankments).toEqual(parted[2].embankments);
+
+    const plain = buildCase(sound(), sections, 't');
+    expect('localLosses' in plain || 'momentum' in plain.numerics).toBe(false);
+    expect('storage' in plain.sections[2] || 'embankments' in plain.sections[2]).toBe(false);
+  });
+
+  test('parts of a section that the solver would refuse are faults of the reach', () => {
+    const { points } = sections[2];
+    const dammed = sections.map((section, k) =>
+      k === 2
+        ? { ...section, storage: [{ from: points[0][0], to: points[points.length - 1][0] }] }
+        : section,
+    );
+    const [fault] = checkScenario(sound(), dammed).faults;
+    expect(fault.path).toBe('reachId');
+    expect(fault.message).toContain('covers the lowest bed');
+  });
+});
+
 describe('the case file', () => {
   test('says everything that the run depends on', () => {
     const caseFile = buildCase(sound(), sections, 'Study: 1 in 100 year');

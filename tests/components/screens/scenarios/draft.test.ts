@@ -21,6 +21,7 @@ const body: ScenarioBody = {
   laterals: [],
   structures: [],
   roughnessFactors: [],
+  localLosses: [],
   downstream: { kind: 'normalDepth', slope: 0.0009 },
   initial: { kind: 'steady' },
   numerics: {
@@ -54,6 +55,24 @@ describe('the draft of a scenario', () => {
     });
     const back = draftReducer(draft, { type: 'upstreamChosen', kind: 'table' });
     expect(toBody(back).upstream).toEqual({ kind: 'table', times: [0, 3600], flows: [10, 20] });
+  });
+
+  it('adds, changes and removes multipliers and losses one by one', () => {
+    const draft = after(
+      { type: 'roughnessFactorAdded' },
+      { type: 'roughnessFactorAdded' },
+      { type: 'roughnessFactorChanged', index: 1, change: { factors: [1.3], part: 'overbank' } },
+      { type: 'roughnessFactorRemoved', index: 0 },
+      { type: 'localLossAdded' },
+      { type: 'localLossChanged', index: 0, change: { from: 100, to: 200 } },
+    );
+    expect(toBody(draft).roughnessFactors).toEqual([
+      { from: null, to: null, part: 'overbank', depths: [0], factors: [1.3] },
+    ]);
+    expect(toBody(draft).localLosses).toEqual([
+      { from: 100, to: 200, contraction: 0.1, expansion: 0.3 },
+    ]);
+    expect(scenarioSchema.validateSync(toBody(draft)).localLosses).toHaveLength(1);
   });
 
   it('changes only the kind that stands', () => {
