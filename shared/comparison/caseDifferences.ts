@@ -8,15 +8,21 @@ import type { InputDifference } from './types';
 export function caseDifferences(cases: readonly CaseFile[], system: UnitSystem): InputDifference[] {
   const told = cases.map((caseFile) => caseFacts(caseFile, system));
   const lines = new Map<string, (CaseFact | null)[]>();
+  const order: string[] = [];
   told.forEach((facts, k) => {
+    let before = -1;
     for (const fact of facts) {
       const key = `${fact.part}\n${fact.what}`;
       const line = lines.get(key) ?? cases.map(() => null);
       line[k] = fact;
+      // What only a later case has stands where it has it, not at the end.
+      if (lines.has(key)) before = order.indexOf(key);
+      else order.splice(++before, 0, key);
       lines.set(key, line);
     }
   });
-  return [...lines.values()].filter(differs).map((line) => {
+  const inOrder = order.map((key) => lines.get(key)!);
+  return inOrder.filter(differs).map((line) => {
     const { part, what } = line.find((fact) => fact !== null)!;
     const texts = line.map((fact) => fact?.text ?? null);
     // Where the words are alike though the values are not, they say so.

@@ -40,10 +40,12 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
       await page.goto('/studies/1/calibration');
       await page.getByRole('button', { name: 'Add marks' }).click();
       await page.getByLabel('Flood', { exact: true }).fill(flood);
-      await page.getByLabel('Marks', { exact: true }).fill([...MARKS, '99\tno\tx\ty'].join('\n'));
+      await page
+        .getByRole('textbox', { name: 'Marks' })
+        .fill([...MARKS, '99\tno\tx\ty'].join('\n'));
       await page.getByText('Line 3 has “no” for the level, which is no number.').waitFor();
       await page
-        .getByLabel('Marks', { exact: true })
+        .getByRole('textbox', { name: 'Marks' })
         .fill([...MARKS, '17350\t35.08\tgauge peak\tgood'].join('\n'));
       await page.getByText('2 marks; chainages in m, levels in m.').waitFor();
       await isSound(page);
@@ -51,7 +53,7 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
       await page.getByText(flood).first().waitFor();
 
       await page.getByRole('link', { name: `Run ${run.number}, ${run.scenarioName}` }).click();
-      await page.getByLabel('Flood').selectOption(flood);
+      await page.getByLabel('Flood', { exact: true }).selectOption(flood);
       const residuals = page.getByRole('table', { name: 'Residuals of the marks' });
       await residuals.getByText('42.07').waitFor();
       expect(await residuals.getByRole('row').count()).toBe(3);

@@ -1,4 +1,4 @@
-import { utils, write } from 'xlsx';
+import { read, utils, write } from 'xlsx';
 import type { SearchResult } from '../../../shared/calibration/search/types';
 import { withFactors } from '../../../shared/calibration/search/withFactors';
 import type {
@@ -15,6 +15,7 @@ import type { TaskSet } from '../../../shared/tasks/types';
 import { routeCase } from '../../../server/solvers';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
+import { pdfPages } from '../reports/pdfText';
 import { buildRunnable } from '../runs/buildRunnable';
 import { untilEnded } from '../runs/untilEnded';
 
@@ -72,7 +73,7 @@ test('a file of marks is read row by row and nothing of it is stored', async () 
     [700, 'wet', 'stain', 'poor', ''],
   ];
   utils.book_append_sheet(book, utils.aoa_to_sheet(rows.slice(2)), 'Marks');
-  const read = async (sheet: Buffer) =>
+  const readSheet = async (sheet: Buffer) =>
     (
       await api
         .post(`/api/studies/${studyId}/marks/read`)
@@ -80,7 +81,7 @@ test('a file of marks is read row by row and nothing of it is stored', async () 
         .attach('file', sheet, 'marks.xlsx')
         .expect(200)
     ).body as MarksReading;
-  const refused = await read(write(book, { type: 'buffer', bookType: 'xlsx' }));
+  const refused = await readSheet(write(book, { type: 'buffer', bookType: 'xlsx' }));
   expect(refused.marks).toEqual([]);
   expect(refused.faults.map(({ message }) => message)).toEqual([
     'Line 3 lies off the reach, which goes from 0 m to 2000 m.',
@@ -88,7 +89,7 @@ test('a file of marks is read row by row and nothing of it is stored', async () 
   ]);
   const good = utils.book_new();
   utils.book_append_sheet(good, utils.aoa_to_sheet(rows.slice(2, 4)), 'Marks');
-  const reading = await read(write(good, { type: 'buffer', bookType: 'xlsx' }));
+  const reading = await readSheet(write(good, { type: 'buffer', bookType: 'xlsx' }));
   expect(reading.faults).toEqual([]);
   expect(reading.marks).toEqual([mark({ level: 22.4 })]);
   expect((await observations()).marks).toEqual([]);
@@ -190,13 +191,33 @@ describe('with what a rougher river left behind', () => {
     await strangers.get(`/api/runs/${runId}/residuals`).expect(404);
   });
 
-  test('what the report prints is chosen', async () => {
+  test('what is chosen stands in the report and in the workbook; the CSV has every mark', async () => {
     const put = (flood: string | null) => api.put(`/api/runs/${runId}/observed`).send({ flood });
     await put('Nobody saw it').expect(422);
     await put(FLOOD).expect(200);
     expect((await residuals()).reported).toBe(FLOOD);
-    const run = await server.services.runs.find.again(runId);
-    expect((await server.services.calibration.residuals.ofReport(run))!.marks).toHaveLength(4);
+    const pdf = await binary(`/api/runs/${runId}/report.pdf`);
+    const text = (await pdfPages(pdf)).join(' ');
+    for (const words of [
+      'Observed against computed',
+      FLOOD,
+      'Nash and Sutcliffe',
+      'Stage at Gauge',
+    ])
+      expect(text).toContain(words);
+    const book = read(await binary(`/api/runs/${runId}/results.xlsx`), { type: 'buffer' });
+    expect(book.SheetNames).toContain('Observed');
+    const { text: csv } = await api.get(`/api/runs/${runId}/residuals.csv`).expect(200);
+    const rows = csv.split('\r\n').map((line) => line.split(','));
+    const first = rows.findIndex(([head]) => head.startsWith('Mark at chainage')) + 1;
+    const { marks } = await residuals();
+    expect(rows.slice(first, first + 4).map((row) => Number(row[3]))).toEqual(
+      marks.map(({ residual }) => residual),
+    );
+    await put(null).expect(200);
+    expect(read(await binary(`/api/runs/${runId}/results.xlsx`)).SheetNames).not.toContain(
+      'Observed',
+    );
   });
 
   test('a search finds the roughness that made them, and only a person applies it', async () => {
@@ -252,6 +273,19 @@ describe('with what a rougher river left behind', () => {
     ]);
   });
 });
+
+async function binary(path: string): Promise<Buffer> {
+  const { body } = await api
+    .get(path)
+    .buffer(true)
+    .parse((res, done) => {
+      const pieces: Buffer[] = [];
+      res.on('data', (piece: Buffer) => pieces.push(piece));
+      res.on('end', () => done(null, Buffer.concat(pieces)));
+    })
+    .expect(200);
+  return body;
+}
 
 async function untilDone(id: number): Promise<TaskSet> {
   const deadline = Date.now() + 60_000;
