@@ -17,6 +17,8 @@ export interface ReachRibbonProps {
   stations?: readonly { name: string; chainage: number }[];
   /** What asks for attention by place, e.g. survey advice. */
   advice?: readonly { chainage: number }[];
+  /** What stands in the river. */
+  structures?: readonly { id: string; chainage: number }[];
   /** Chosen place, m; null before one is chosen. */
   at: number | null;
   onChange: (chainage: number) => void;
@@ -32,7 +34,8 @@ const SWAY = 7;
 
 /** The river as one line, a tick a section: choose the place by touch, drag or arrow keys. */
 export function ReachRibbon(props: ReachRibbonProps) {
-  const { sections, stations = NONE, advice = NONE, at, onChange, restAt, unitSystem } = props;
+  const { sections, stations = NONE, advice = NONE, structures = NONE } = props;
+  const { at, onChange, restAt, unitSystem } = props;
   const { colours } = useTheme();
   const { width, measured } = useWidth(props.initialWidth);
   const places = useMemo(() => placesAlong(sections, stations), [sections, stations]);
@@ -88,6 +91,11 @@ export function ReachRibbon(props: ReachRibbonProps) {
             const px = x(chainage);
             const y = curve.yAt(px) - 9;
             return <Path key={i} d={`M${px},${y}l-4,-7h8z`} fill={colours.ochre} />;
+          })}
+          {structures.map(({ id, chainage }) => {
+            const px = x(chainage);
+            const y = curve.yAt(px);
+            return <Path key={id} d={`M${px},${y - 9}v18`} stroke={colours.ink} strokeWidth={4} />;
           })}
           {at === null ? null : (
             <Circle

@@ -8,7 +8,14 @@ import {
   type QueryClient,
 } from '@tanstack/react-query';
 import { decodeSurface } from '@/shared/runs/surfaceBlock';
-import type { Run, RunRow, RunSeries, RunSummary } from '@/shared/runs/types';
+import type {
+  Run,
+  RunReservoirSeries,
+  RunRow,
+  RunSeries,
+  RunStructureSeries,
+  RunSummary,
+} from '@/shared/runs/types';
 import type { Section } from '@/shared/surveys/types';
 import { api } from './apiClient';
 import { studyKeys } from './studies';
@@ -104,6 +111,32 @@ export const useSeriesOfRuns = (runIds: readonly number[], chainage: number) =>
     }),
   });
 
+const structureQuery = (runId: number, structure: number) => ({
+  ...FIXED,
+  queryKey: runKeys.result(runId, 'structure', structure),
+  queryFn: ({ signal }: { signal: AbortSignal }) =>
+    api.get<RunStructureSeries>(`/runs/${runId}/structures/${structure}`, { signal }),
+});
+
+/** What passes a structure, counted from 1 in the order of the summary. */
+export const useRunStructure = (runId: number, structure: number) =>
+  useQuery(structureQuery(runId, structure));
+
+/** The same of several; what has not come yet is left out. */
+export const useRunStructures = (runId: number, structures: readonly number[]) =>
+  useQueries({
+    queries: structures.map((structure) => structureQuery(runId, structure)),
+    combine: dataOf,
+  });
+const dataOf = (results: { data?: RunStructureSeries }[]) => results.map(({ data }) => data);
+
+export const useRunReservoir = (runId: number) =>
+  useQuery({
+    ...FIXED,
+    queryKey: runKeys.result(runId, 'reservoir'),
+    queryFn: ({ signal }) => api.get<RunReservoirSeries>(`/runs/${runId}/reservoir`, { signal }),
+  });
+
 /** The sections as they were frozen with the run: the reach may have changed since. */
 export const useRunSections = (runId: number) =>
   useQuery({
@@ -163,6 +196,7 @@ export const runEnded = (client: QueryClient, studyId: number, runId: number) =>
 export const RUN_FILES = {
   csv: { path: 'results.csv', label: 'Results as CSV' },
   xlsx: { path: 'results.xlsx', label: 'Results as XLSX' },
+  structures: { path: 'structures.csv', label: 'Structures as CSV' },
   case: { path: 'case.json', label: 'Case file' },
 } as const;
 export type RunFile = keyof typeof RUN_FILES;

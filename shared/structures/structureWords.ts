@@ -54,4 +54,20 @@ export const REGIME_WORDS: Record<StructureRegime, string> = {
   overtopped: 'overtopped',
 };
 
+/** The same in a word or two, for drawings. */
+export const REGIME_LABELS: Record<StructureRegime, string> = {
+  dry: 'dry',
+  closed: 'closed',
+  free: 'free',
+  drowned: 'drowned',
+  pipe: 'pipe',
+  drownedPipe: 'drowned pipe',
+  gate: 'free jet',
+  drownedGate: 'drowned jet',
+  rating: 'spilling',
+  inletControl: 'inlet control',
+  outletControl: 'outlet control',
+  overtopped: 'overtopped',
+};
+
 export const REGIMES = Object.keys(REGIME_WORDS) as StructureRegime[];

@@ -12,6 +12,7 @@ import { Loading } from '@/components/ui/Loading';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary, RunSurface } from '@/shared/runs/types';
 import type { PlaceResults } from './usePlaceResults';
+import { useStructuresAt } from './useStructuresAt';
 import { useResultSurface } from './useResultSurface';
 
 interface Props {
@@ -54,6 +55,7 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
     isCurrent && series && peaks
       ? { stage: valueAt(series.times, series.stage, t), peakStage: peaks.peakStage }
       : null;
+  const standing = useStructuresAt(run.id, summary.structures, t);
   const moment = momentWords(t, run.duration, run.startsAt);
   return (
     <Card
@@ -66,6 +68,8 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
         stage={stage}
         sections={summary.sections}
         stations={summary.stations}
+        structures={summary.structures}
+        {...standing}
         at={at}
         onChange={store.setAt}
         unitSystem={unitSystem}

@@ -17,8 +17,10 @@ import { LongSectionCard } from './LongSectionCard';
 import { PeaksCard } from './PeaksCard';
 import { PlaceFigures } from './PlaceFigures';
 import { PlaceSeries } from './PlaceSeries';
+import { ReservoirCard } from './ReservoirCard';
 import { RunDownloads } from './RunDownloads';
 import { SectionCard } from './SectionCard';
+import { StructuresCard } from './StructuresCard';
 import { TimeBar } from './TimeBar';
 import { useFirstLook } from './useFirstLook';
 import { usePlaceResults } from './usePlaceResults';
@@ -47,7 +49,7 @@ export function ResultsScreen({ run, summary }: Props) {
       ribbon={<Ribbon {...common} />}
       actions={
         <>
-          <RunDownloads download={download} />
+          <RunDownloads download={download} hasStructures={summary.structures.length > 0} />
           <CheckLink run={run} />
         </>
       }
@@ -75,6 +77,8 @@ export function ResultsScreen({ run, summary }: Props) {
           <SectionCard {...common} />
         </>
       )}
+      {summary.structures.length > 0 ? <StructuresCard {...common} /> : null}
+      {summary.reservoir ? <ReservoirCard {...common} reservoir={summary.reservoir} /> : null}
       <PeaksCard {...common} />
       <WarningsCard {...common} />
       <VolumeCard summary={summary} />
@@ -89,6 +93,7 @@ function Ribbon({ summary, store }: { summary: RunSummary; store: PlaceAndTimeSt
     <ReachRibbon
       sections={summary.sections}
       stations={summary.stations}
+      structures={summary.structures}
       at={usePlace(store)}
       onChange={store.setAt}
       unitSystem={useUnitSystem()}

@@ -2,10 +2,17 @@ import { RUN_FILES, type RunFile, type useRunDownload } from '@/components/queri
 import { Button } from '@/components/ui/Button';
 
 const FILES: RunFile[] = ['case', 'csv', 'xlsx'];
+const WITH_STRUCTURES: RunFile[] = ['case', 'csv', 'structures', 'xlsx'];
+
+interface Props {
+  download: ReturnType<typeof useRunDownload>;
+  /** Something stands in the river. */
+  hasStructures: boolean;
+}
 
 /** The run as files. */
-export function RunDownloads({ download }: { download: ReturnType<typeof useRunDownload> }) {
-  return FILES.map((file) => (
+export function RunDownloads({ download, hasStructures }: Props) {
+  return (hasStructures ? WITH_STRUCTURES : FILES).map((file) => (
     <Button
       key={file}
       label={RUN_FILES[file].label}

@@ -29,6 +29,8 @@ export const summary = (change: Partial<RunSummary> = {}): RunSummary => ({
     error: 1e-6,
     relativeError: 2e-14,
   },
+  structures: [],
+  reservoir: null,
   warnings: [],
   arrivalRule: 'Arrival: 0.1 m above the first stage.',
   steps: 34_120,
