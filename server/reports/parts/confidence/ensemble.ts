@@ -12,6 +12,7 @@ import { figure } from '../../pdf/figure';
 import type { Sheet } from '../../pdf/sheet';
 import { table } from '../../pdf/table';
 import { note } from '../../pdf/writing';
+import { DRAWN_STATIONS } from './drawnStations';
 
 /** Bands over time and along the reach, and their numbers. */
 export function ensemblePart(sheet: Sheet, result: EnsembleResult, system: UnitSystem): void {
@@ -21,7 +22,7 @@ export function ensemblePart(sheet: Sheet, result: EnsembleResult, system: UnitS
     line: p50,
     band: { low: p5, high: p95 },
   });
-  for (const { name, stage, flow } of stations)
+  for (const { name, stage, flow } of stations.slice(0, DRAWN_STATIONS))
     figure(
       sheet,
       [

@@ -7,13 +7,14 @@ import { tornado, tornadoHeight } from '../../charts/tornado';
 import { figure } from '../../pdf/figure';
 import type { Sheet } from '../../pdf/sheet';
 import { table } from '../../pdf/table';
+import { DRAWN_STATIONS } from './drawnStations';
 
 const QUANTITIES = Object.keys(VALUE_NAMES) as (keyof PlaceValues)[];
 
 /** What each input changes by itself at the stations. */
 export function sensitivityPart(sheet: Sheet, result: SensitivityResult, system: UnitSystem): void {
   const { base, rows, stations } = result;
-  stations.forEach(({ name }, k) => {
+  stations.slice(0, DRAWN_STATIONS).forEach(({ name }, k) => {
     const bars = rows.map(({ parameter, low, high }) => ({
       label: PARAMETERS[parameter].label,
       low: sideOf(low, parameter, k, base[k]),
