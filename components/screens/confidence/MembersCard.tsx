@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { useMemberCase } from '@/components/queries/confidence';
 import { Button } from '@/components/ui/Button';
+import { ButtonRow } from '@/components/ui/ButtonRow';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Table, type Column } from '@/components/ui/Table';
@@ -26,13 +27,15 @@ export function MembersCard({ set }: { set: TaskSet }) {
       key: 'case',
       title: 'Case file',
       render: ({ id, label }) => (
-        <Button
-          kind="quiet"
-          label="Save"
-          name={`Save the case file of ${label}`}
-          busy={save.isPending && save.variables === id}
-          onPress={() => save.mutate(id)}
-        />
+        <ButtonRow>
+          <Button
+            kind="quiet"
+            label="Save"
+            name={`Save the case file of ${label}`}
+            busy={save.isPending && save.variables === id}
+            onPress={() => save.mutate(id)}
+          />
+        </ButtonRow>
       ),
     },
   ];

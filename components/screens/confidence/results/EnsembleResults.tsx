@@ -1,8 +1,10 @@
 import { useEffect, useMemo } from 'react';
+import { StyleSheet, View } from 'react-native';
 import { BandChart } from '@/components/charts/BandChart';
 import { nearestIndex } from '@/components/charts/geometry/interpolate';
 import { usePlace, usePlaceAndTimeStore, useTime } from '@/components/charts/usePlaceAndTime';
 import { useCurrentStudy } from '@/components/layout/studyContext';
+import { space } from '@/components/theme/tokens';
 import { Card } from '@/components/ui/Card';
 import { Notice } from '@/components/ui/Notice';
 import { useUnitSystem } from '@/components/ui/unitSystem';
@@ -27,8 +29,13 @@ export function EnsembleResults({ result }: { result: EnsembleResult }) {
   const chosen = nearestStation(stations, at);
   const station = stations[chosen];
   useEffect(() => {
-    if (store.get().at === null) store.setAt(stations[0].chainage);
-  }, [store, stations]);
+    const { at: place, t: moment } = store.get();
+    const first = stations[nearestStation(stations, place)];
+    if (place === null) store.setAt(first.chainage);
+    // Where the address says nothing: the highest water of the median.
+    const { p50 } = first.stage;
+    if (moment === null) store.setT(times[p50.indexOf(Math.max(...p50))]);
+  }, [store, stations, times]);
 
   const stage = useBand(times, station.stage);
   const flow = useBand(times, station.flow);
@@ -57,30 +64,32 @@ export function EnsembleResults({ result }: { result: EnsembleResult }) {
           onChange={(k) => store.setAt(stations[k].chainage)}
         />
       </Card>
-      <Card title={`Stage at ${station.name}`} aside={unit.elevation.symbol}>
-        <BandChart
-          label={`Stage at ${station.name} with its band`}
-          axis="time"
-          quantity="elevation"
-          data={stage}
-          names={NAMES}
-          at={time}
-          onChange={store.setT}
-          unitSystem={system}
-        />
-      </Card>
-      <Card title={`Flow at ${station.name}`} aside={unit.flow.symbol}>
-        <BandChart
-          label={`Flow at ${station.name} with its band`}
-          axis="time"
-          quantity="flow"
-          data={flow}
-          names={NAMES}
-          at={time}
-          onChange={store.setT}
-          unitSystem={system}
-        />
-      </Card>
+      <View style={styles.pair}>
+        <Card title={`Stage at ${station.name}`} style={styles.half} aside={unit.elevation.symbol}>
+          <BandChart
+            label={`Stage at ${station.name} with its band`}
+            axis="time"
+            quantity="elevation"
+            data={stage}
+            names={NAMES}
+            at={time}
+            onChange={store.setT}
+            unitSystem={system}
+          />
+        </Card>
+        <Card title={`Flow at ${station.name}`} style={styles.half} aside={unit.flow.symbol}>
+          <BandChart
+            label={`Flow at ${station.name} with its band`}
+            axis="time"
+            quantity="flow"
+            data={flow}
+            names={NAMES}
+            at={time}
+            onChange={store.setT}
+            unitSystem={system}
+          />
+        </Card>
+      </View>
       <ExceedanceCard key={station.name} station={station} />
       <Card
         title="Peak stage along the reach"
@@ -119,3 +128,8 @@ function nearestStation(stations: EnsembleResult['stations'], at: number | null)
     )
   ];
 }
+
+const styles = StyleSheet.create({
+  pair: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two },
+  half: { flexGrow: 1, flexBasis: 340 },
+});
