@@ -9,6 +9,7 @@ import { parabolicTrough } from './cases/parabolicTrough';
 import { poolOverWeir } from './cases/poolOverWeir';
 import { prescribedDepths } from './cases/prescribedDepths';
 import { riemannTests } from './cases/riemannTests';
+import { smallWave } from './cases/smallWave';
 import { stillWater } from './cases/stillWater';
 import { uniformFlows } from './cases/uniformFlows';
 import type { PublishedCase } from './publishedCase';
@@ -28,6 +29,7 @@ export const PUBLISHED_CASES: readonly PublishedCase[] = [
   ...naturalRivers,
   parabolicTrough,
   floodFront,
+  smallWave,
   ...bores,
   poolOverWeir,
   levelPoolBreach,
