@@ -11,7 +11,7 @@ import { DEMO_ACCOUNTS, DEMO_FIRM, DEMO_PASSWORD, OTHER_FIRM, type DemoAccount }
 import { OBSERVED_GAUGE, OBSERVED_MARKS } from './observations';
 import { lowerVeshall } from './reaches/lowerVeshall';
 import { quenlowValley } from './reaches/quenlowValley';
-import { damFailure, designFlood, largerFlood } from './scenarios';
+import { damFailure, designFlood, gradualFailure, largerFlood } from './scenarios';
 import { faultySurveyFile, surveyFile } from './surveyFiles';
 
 export { seedChecks } from './checks';
@@ -87,6 +87,8 @@ export async function seedDemo(services: Services): Promise<void> {
   const valley = quenlowValley();
   const failure = await seedScenario(services, quenlow, surveyor, modeller, valley, damFailure);
   await seedRun(services, modeller, failure);
+  const piping = await seedScenario(services, quenlow, surveyor, modeller, valley, gradualFailure);
+  await seedRun(services, modeller, piping);
 
   await seedStudy(services, person('Lena Ostrand'), OSTRAND, []);
 }

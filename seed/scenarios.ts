@@ -2,6 +2,7 @@ import { newScenario, proposals } from '../shared/scenarios/proposals';
 import type { ScenarioBody } from '../shared/scenarios/schemas';
 import type { Section } from '../shared/surveys/types';
 import { QUENLOW_DAM, quenlowReservoir } from './reaches/quenlowValley';
+import { failingDam } from './failingDam';
 
 const HOUR = 3600;
 
@@ -55,5 +56,19 @@ export function damFailure(reachId: number, sections: Section[]): ScenarioBody {
       stageBelow: null,
     },
     numerics: { ...body.numerics, cellSize: 10, duration: 1.5 * HOUR, outputInterval: 15 },
+  };
+}
+
+export const GRADUAL_FAILURE = 'Failure by piping, dry day';
+
+/** The same dam eroded from its crest down, its breach by a published regression. */
+export function gradualFailure(reachId: number, sections: Section[]): ScenarioBody {
+  const body = damFailure(reachId, sections);
+  return {
+    ...body,
+    name: GRADUAL_FAILURE,
+    note: 'What an eroding fill makes of it, beside the sudden failure as the upper bound.',
+    structures: [failingDam(sections)],
+    numerics: { ...body.numerics, duration: 2 * HOUR, outputInterval: 30 },
   };
 }

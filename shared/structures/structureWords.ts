@@ -40,7 +40,7 @@ export const PIER_WORDS: Record<BridgeInput['piers'], string> = {
 
 /** How the water passes, in words that end a sentence: `from 2 h 10 drowned`. */
 export const REGIME_WORDS: Record<StructureRegime, string> = {
-  dry: 'dry',
+  dry: 'no water passes',
   closed: 'closed',
   free: 'free flow over the crest',
   drowned: 'drowned from below',
@@ -56,7 +56,7 @@ export const REGIME_WORDS: Record<StructureRegime, string> = {
 
 /** The same in a word or two, for drawings. */
 export const REGIME_LABELS: Record<StructureRegime, string> = {
-  dry: 'dry',
+  dry: 'no flow',
   closed: 'closed',
   free: 'free',
   drowned: 'drowned',
