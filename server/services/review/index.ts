@@ -1,3 +1,4 @@
+import type { RunResiduals } from '../../../shared/calibration/types';
 import { buildAttempts } from '../../auth/attempts';
 import type { Background } from '../../background';
 import type { Mailer } from '../../mail/Mailer';
@@ -15,7 +16,6 @@ import { buildReadReview } from './readReview';
 import { buildReturnRun } from './returnRun';
 import { buildSendForCheck } from './sendForCheck';
 import { buildSignRun } from './signRun';
-import type { SignedRecord } from './signedRecord';
 import { buildTellOthers } from './tellOthers';
 
 interface Needs {
@@ -24,7 +24,7 @@ interface Needs {
   runs: ReturnType<typeof buildRuns>;
   confidence: ReturnType<typeof buildConfidence>;
   /** Against the observed flood of its report. */
-  observedOf: (run: RunModel) => Promise<SignedRecord['observed']>;
+  observedOf: (run: RunModel) => Promise<RunResiduals | null>;
   /** A run was signed, or its signature withdrawn: its report is drawn and kept. */
   standingChanged: (run: RunModel) => void;
 }

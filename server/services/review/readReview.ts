@@ -15,11 +15,11 @@ import { allowedNow, obstaclesOf, signerObstacles } from './standing';
 /** The check of a run as it stands, or as it was fixed by the signature. */
 export function buildReadReview(
   platform: Platform,
-  { confidence, runs }: FactsNeeds,
+  { confidence, observedOf, runs }: FactsNeeds,
   find: FindReviews,
 ) {
   const { models } = platform;
-  const gather = buildGatherFacts(platform, { confidence, runs });
+  const gather = buildGatherFacts(platform, { confidence, observedOf, runs });
 
   /** Empty before the run is routed. */
   async function checklistOf(run: RunModel, review: ReviewModel | null): Promise<ChecklistItem[]> {

@@ -23,6 +23,7 @@ beforeAll(async () => {
     advice: [],
     probe: null,
     convergence: null,
+    observed: null,
     grids: [{ runNumber: 1, cellSize: 25, peaks: [{ name: 'Mill', stage: 52.5 }] }],
   };
 });
@@ -183,4 +184,26 @@ test('every kind of outlet is changed, but for a closed end', () => {
   expect(at({ kind: 'open' })).toMatchObject({ kind: 'normalDepth' });
   expect(at({ kind: 'wall' })).toBeUndefined();
   expect(describeOutletChange({ kind: 'wall' })).toBeNull();
+});
+
+test('a run against observed marks says how far off it is; without any it is asked', () => {
+  const summary = { count: 5, mean: -0.1, rms: 0.2, largest: 0.4, within: 4 };
+  const observed = {
+    runId: 1,
+    flood: 'January 2024',
+    reported: 'January 2024',
+    marks: [],
+    all: summary,
+    byKind: [],
+    byConfidence: [],
+    gauges: [],
+    misfit: 0.7,
+  };
+  expect(item('calibration').outcome).toBe('asked');
+  expect(item('calibration', { observed })).toMatchObject({
+    outcome: 'good',
+    finding:
+      'Against January 2024: 4 of 5 marks within their tolerance, mean error -0.10 m, root mean square 0.20 m; misfit 0.70 tolerances.',
+  });
+  expect(item('calibration', { observed: { ...observed, misfit: 1.2 } }).outcome).toBe('look');
 });

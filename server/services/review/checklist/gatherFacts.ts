@@ -19,13 +19,18 @@ import type { ChecklistFacts, SectionHistory } from './types';
 export interface FactsNeeds {
   confidence: ReturnType<typeof buildConfidence>;
   runs: ReturnType<typeof buildRuns>;
+  /** Against the observed flood of its report. */
+  observedOf: (run: RunModel) => Promise<ChecklistFacts['observed']>;
 }
 
 /** Runs of a scenario that are looked through for other cell sizes. */
 const LOOKED_THROUGH = 20;
 
 /** Reads what the checklist is found from. Throws `conflict` where the run is not routed. */
-export function buildGatherFacts({ models }: Platform, { confidence, runs }: FactsNeeds) {
+export function buildGatherFacts(
+  { models }: Platform,
+  { confidence, observedOf, runs }: FactsNeeds,
+) {
   const caseOf = keepAtHand(
     async (run) => JSON.parse((await runs.exports.caseFile(run)).toString('utf8')) as CaseFile,
   );
@@ -114,6 +119,7 @@ export function buildGatherFacts({ models }: Platform, { confidence, runs }: Fac
     probe: await probeOf(run, review),
     grids: await gridsOf(run),
     convergence: await convergenceOf(run),
+    observed: await observedOf(run),
   });
 }
 

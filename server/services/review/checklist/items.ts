@@ -1,4 +1,5 @@
 import { breach } from './breach';
+import { calibration } from './calibration';
 import { dryCells } from './dryCells';
 import { gridSize } from './gridSize';
 import { initialState } from './initialState';
@@ -23,6 +24,7 @@ const RULES: ChecklistRule[] = [
   outletInfluence,
   surveyAdvice,
   gridSize,
+  calibration,
   roughness,
   sectionEnds,
   initialState,

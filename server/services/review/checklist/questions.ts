@@ -19,12 +19,6 @@ export const QUESTIONS: ChecklistRule[] = [
     'Inflows are traced to a named source (common practice).',
   ),
   ask(
-    'calibration',
-    'Calibration',
-    'Against which marks or gauge records was the roughness set, and how far off is the result? If none: why not, and what follows?',
-    'A model without observations says so (common practice).',
-  ),
-  ask(
     'leftOut',
     'Structures and storage left out',
     'Which bridges, weirs, culverts, embankments and side storage are not in the model, and what would they change?',

@@ -1,3 +1,4 @@
+import type { RunResiduals } from '../../../../shared/calibration/types';
 import type { CaseFile } from '../../../../shared/case/caseFile';
 import type { ConvergenceResult } from '../../../../shared/confidence/types';
 import type { Advice } from '../../../../shared/reaches/types';
@@ -38,6 +39,8 @@ export interface ChecklistFacts {
   probe: { runNumber: number; state: RunState; change: string; peaks: PeakPair[] } | null;
   /** The latest finished convergence set of this very case; null: none. */
   convergence: { name: string; result: ConvergenceResult } | null;
+  /** Against the observed flood of its report; null: none was chosen. */
+  observed: RunResiduals | null;
   /** Routed runs of the same case with other cells, finest first; this run is among them. */
   grids: { runNumber: number; cellSize: number; peaks: { name: string; stage: number }[] }[];
 }
