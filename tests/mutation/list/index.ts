@@ -1,0 +1,7 @@
+import type { Mutation } from '../mutation';
+import { CELLS } from './cells';
+import { ENDS } from './ends';
+import { FLUXES } from './fluxes';
+import { STRUCTURES } from './structures';
+
+export const MUTATIONS: readonly Mutation[] = [...FLUXES, ...CELLS, ...ENDS, ...STRUCTURES];
