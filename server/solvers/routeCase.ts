@@ -25,6 +25,7 @@ import { createLaterals } from './sources/laterals';
 import { createLocalLosses } from './sources/localLosses';
 import { createStructureRecorder } from './structures/structureRecorder';
 import { createStructureSet } from './structures/structureSet';
+import { createLookAhead } from './time/lookAhead';
 import { outputTimes, stepTowards } from './time/outputTimes';
 import { createSteps } from './time/steps';
 import { createTimeStep } from './time/timeStep';
@@ -108,6 +109,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   const cellRecorder = createCellRecorder(workspace, grid);
   const structureRecorder = structures ? createStructureRecorder(structures, order) : null;
   const pool = structures?.pool ?? null;
+  const lookAhead = createLookAhead(caseFile, workspace, tables, courant, pool);
   const { fluxArea } = workspace;
   const times = outputTimes(duration, outputInterval);
   ledger.open();
@@ -139,7 +141,7 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
         null,
       );
     }
-    const dt = stepTowards(time, times[next], largest);
+    const dt = stepTowards(time, times[next], lookAhead(time, largest, times[next]));
     const until = dt === times[next] - time ? times[next] : time + dt;
 
     steps.predict(dt);

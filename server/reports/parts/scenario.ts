@@ -9,6 +9,7 @@ import { heading, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
 import { timeText, unitsOf } from '../words';
 import { structures } from './structures';
+import { momentumText, valley } from './valley';
 
 type Unit = ReturnType<typeof unitsOf>;
 
@@ -68,6 +69,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
       ]),
     );
   }
+  valley(sheet, caseFile, unit);
   structures(sheet, { facts, caseFile, run });
   heading(sheet, 'Numerical settings');
   factRows(sheet, [
@@ -77,6 +79,7 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
     ['Order in space and time', String(numerics.order ?? CASE_DEFAULTS.order)],
     ['Courant number', formatNumber(numerics.courant ?? CASE_DEFAULTS.courant, 2)],
     ['Dry depth', `${formatNumber((numerics.dryDepth ?? CASE_DEFAULTS.dryDepth) * 1000, 1)} mm`],
+    ['Momentum of the flow', momentumText(caseFile)],
     ['Time steps taken', formatNumber(run.steps, 0)],
   ]);
 }
