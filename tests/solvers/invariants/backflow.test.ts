@@ -26,7 +26,7 @@ describe('water that flows up the reach', () => {
     ).cells;
 
   it('is the mirror image of the same water flowing down: friction, banks, tributary and all', () => {
-    const high = { kind: 'stage', times: [0, 1800], stages: [4.5, 5.2] } as const;
+    const high = { kind: 'stage' as const, times: [0, 1800], stages: [4.5, 5.2] };
     const low = { kind: 'stage', ...steadyStage(4.5) } as const;
     const down = between(sections, { upstream: high, downstream: low }, 1000);
     const up = between(mirrored, { upstream: low, downstream: high }, LENGTH - 1400);
