@@ -4,6 +4,7 @@ import { useReportDownload, useReports } from '@/components/queries/reports';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
+import { LinkTxt } from '@/components/ui/LinkTxt';
 import { List } from '@/components/ui/List';
 import { RadioGroup } from '@/components/ui/RadioGroup';
 import { Txt } from '@/components/ui/Txt';
@@ -35,6 +36,12 @@ export function ReportCard({ run }: { run: Run }) {
       {download.error ? (
         <ErrorState error={download.error} title="The report could not be saved" />
       ) : null}
+      <Txt variant="small">
+        What the solver is worth goes with it as a file of its own:{' '}
+        <LinkTxt variant="small" href="/proof">
+          annex of published cases
+        </LinkTxt>
+      </Txt>
       {reports?.length ? (
         <List label="Reports kept">
           {reports.map((report) => (

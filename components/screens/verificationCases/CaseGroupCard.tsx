@@ -70,6 +70,6 @@ const styles = StyleSheet.create({
     columnGap: space.two,
     rowGap: space.half,
   },
-  names: { flexGrow: 1, flexShrink: 1, flexBasis: 220, minWidth: 0 },
+  names: { flexGrow: 1, flexShrink: 1, flexBasis: 180, minWidth: 0 },
   state: { flexDirection: 'row', flexWrap: 'wrap', gap: space.half },
 });
