@@ -50,7 +50,11 @@ export function EvaluationsCard({
         <Button
           kind="quiet"
           label={isShown ? 'Hide them' : `Show all ${evaluations.length}`}
-          name={isShown ? 'Hide the runs of the search' : 'Show the runs of the search'}
+          name={
+            isShown
+              ? 'Hide them, the runs of the search'
+              : `Show all ${evaluations.length} runs of the search`
+          }
           onPress={() => setShown(!isShown)}
         />
       }

@@ -26,7 +26,7 @@ export function ReportedCard({ run, residuals }: { run: Run; residuals: RunResid
       {may('scenario.change') ? (
         <Button
           label={isHere ? 'Leave it out' : 'Put it in'}
-          name={isHere ? 'Leave it out of the report' : 'Put it into the report'}
+          name={isHere ? 'Leave it out of the report' : 'Put it in the report'}
           busy={report.isPending}
           onPress={() => report.mutate(isHere ? null : flood)}
         />
