@@ -4,7 +4,7 @@ import type { ConfidenceResult } from '../../shared/confidence/types';
 import type { Review, SignOff } from '../../shared/review/types';
 import type { Station } from '../../shared/studies/types';
 import type { UnitSystem } from '../../shared/units/units';
-import type { SurveyRevisionRow } from '../../shared/surveys/types';
+import type { Section, SurveyRevisionRow } from '../../shared/surveys/types';
 
 /** Of the checking, what is fixed by the signature: nothing in it moves afterwards. */
 export type ReviewFacts = Pick<
@@ -52,6 +52,8 @@ export interface ReportFacts {
     unitSystem: UnitSystem;
   };
   survey: Omit<SurveyRevisionRow, 'id' | 'decision'>;
+  /** Sections of that revision, to tell what was routed from what was surveyed. */
+  surveyed: Section[];
   run: {
     number: number;
     scenarioName: string;

@@ -5,7 +5,6 @@ import { useCurrentStudy } from '@/components/layout/studyContext';
 import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { SelectField } from '@/components/ui/SelectField';
-import { Txt } from '@/components/ui/Txt';
 import type { ReachRow } from '@/shared/reaches/types';
 import { CopyGeometryDialog } from './CopyGeometryDialog';
 
@@ -35,16 +34,15 @@ export function GeometryChoice({ reach, reaches }: GeometryChoiceProps) {
         </View>
       ) : null}
       {may('reach.change') ? (
-        <View style={styles.change}>
+        <View>
           {isWorking ? (
             <Button label="Change its sections" href={`/studies/${study.id}/reach/${reach.id}`} />
           ) : (
-            <>
-              <Button label="Make a working geometry" onPress={() => setIsCopying(true)} />
-              <Txt variant="small" tone="soft" style={styles.words}>
-                A copy in which sections may be changed; the survey stays as it is.
-              </Txt>
-            </>
+            <Button
+              label="Make a working geometry"
+              hint="A copy in which sections may be changed; the survey stays as it is."
+              onPress={() => setIsCopying(true)}
+            />
           )}
         </View>
       ) : null}
@@ -56,6 +54,4 @@ export function GeometryChoice({ reach, reaches }: GeometryChoiceProps) {
 const styles = StyleSheet.create({
   box: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two, alignItems: 'flex-end' },
   choice: { flexGrow: 1, flexBasis: 220, maxWidth: 360 },
-  change: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.one },
-  words: { maxWidth: 320 },
 });

@@ -1,3 +1,4 @@
+import { departureWords } from '../../../shared/reaches/compare/departures';
 import { formatNumber } from '../../../shared/units/format';
 import { longSection } from '../charts/longSection';
 import { figure } from '../pdf/figure';
@@ -23,6 +24,7 @@ export function survey(sheet: Sheet, { facts, caseFile, surface }: RunReport): v
     ['Handed in', `${revision.sentBy}, ${momentText(revision.sentAt)}`],
     ...(revision.note ? ([['Note', revision.note]] as const) : []),
     ['Sections', `${sections.length}, with ${formatNumber(pointsOf(sections), 0)} points`],
+    ['Ground', departureWords(facts.surveyed, sections)],
     ['Chainage', `${unit(first, 'chainage')} to ${unit(last, 'chainage')}`],
     ['Greatest distance between sections', unit(widestGap(sections), 'length')],
     ["Manning's n", `${formatNumber(Math.min(...n), 3)} to ${formatNumber(Math.max(...n), 3)}`],

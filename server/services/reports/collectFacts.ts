@@ -1,3 +1,5 @@
+import type { Section } from '../../../shared/surveys/types';
+import { unpackJson } from '../../database/packedJson';
 import type { RunModel } from '../../models/Run';
 import type { Platform } from '../../platform';
 import type { ReportFacts } from '../../reports/types';
@@ -32,7 +34,7 @@ export function buildCollectFacts(
       Firm.findByPk(study.firmId, { rejectOnEmpty: true }),
       Reach.findByPk(run.reachId, { rejectOnEmpty: true }),
     ]);
-    const survey = await SurveyRevision.findByPk(reach.surveyRevisionId, {
+    const survey = await SurveyRevision.scope('withSections').findByPk(reach.surveyRevisionId, {
       include: 'sender',
       rejectOnEmpty: true,
     });
@@ -53,6 +55,7 @@ export function buildCollectFacts(
         sentBy: survey.sender!.name,
         sentAt: survey.sentAt.toISOString(),
       },
+      surveyed: await unpackJson<Section[]>(survey.sections),
       run: {
         number: run.number,
         scenarioName: run.scenarioName,

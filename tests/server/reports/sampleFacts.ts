@@ -24,6 +24,7 @@ export function sampleFacts(given: Partial<ReportFacts> = {}): ReportFacts {
       sentBy: 'Ilse Quand',
       sentAt: '2026-09-02T08:15:00.000Z',
     },
+    surveyed: [],
     run: {
       number: 3,
       scenarioName: '1 in 100 year',

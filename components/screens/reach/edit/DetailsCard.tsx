@@ -41,7 +41,7 @@ export function DetailsCard() {
         <Button
           kind="danger"
           label="Take the section out"
-          name={`Take section ${section.id} out`}
+          name={`Take the section out, ${section.id}`}
           disabled={sections.length <= 2}
           hint={sections.length <= 2 ? 'A reach needs two sections.' : undefined}
           onPress={takeOut}

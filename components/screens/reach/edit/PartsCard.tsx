@@ -89,7 +89,7 @@ function Storage() {
             <Button
               kind="quiet"
               label="Take it away"
-              name={`Take storage part ${i + 1} away`}
+              name={`Take it away, storage part ${i + 1}`}
               onPress={() =>
                 store(
                   parts.filter((_, at) => at !== i),
@@ -174,7 +174,7 @@ function EmbankmentFields({ side }: { side: 'left' | 'right' }) {
         <Button
           kind="quiet"
           label="Take it away"
-          name={`Take the ${side} embankment away`}
+          name={`Take it away, ${side} embankment`}
           onPress={() => set(undefined, `${side} embankment taken away`)}
         />
       </View>
