@@ -10,6 +10,7 @@ import { poolOverWeir } from './cases/poolOverWeir';
 import { prescribedDepths } from './cases/prescribedDepths';
 import { riemannTests } from './cases/riemannTests';
 import { smallWave } from './cases/smallWave';
+import { roughDamBreak } from './cases/roughDamBreak';
 import { stillWater } from './cases/stillWater';
 import { uniformFlows } from './cases/uniformFlows';
 import type { PublishedCase } from './publishedCase';
@@ -21,6 +22,7 @@ export type { PublishedCase } from './publishedCase';
 export const PUBLISHED_CASES: readonly PublishedCase[] = [
   ...stillWater,
   ...damBreaks,
+  roughDamBreak,
   ...riemannTests,
   ...bumps,
   ...prescribedDepths,

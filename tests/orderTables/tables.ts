@@ -16,8 +16,8 @@ export interface OrderTableCase {
   errors(scheme: Scheme, grids?: readonly number[]): GridRow[];
 }
 
-/** Cases without an order: water at rest leaves rounding, pools have no grid to speak of, the small wave has its floor. */
-const WITHOUT_ORDER = /^(still|lake|pool|level-pool|small-wave)/;
+/** Cases without an order: water at rest leaves rounding, pools have no grid to speak of, approximate theories have their floor. */
+const WITHOUT_ORDER = /^(still|lake|pool|level-pool|small-wave|dam-rough)/;
 
 /** A case with three grids gets a coarser fourth. */
 const fourGrids = (grids: readonly number[]) =>
