@@ -3,12 +3,16 @@ import type { StudyModel } from '../../../server/models/Study';
 import type { UserModel } from '../../../server/models/User';
 import { changeBetween } from '../../../shared/reaches/edit/geometryChange';
 import { movePoint } from '../../../shared/reaches/edit/movePoint';
+import type { PlanFeature } from '../../../shared/reaches/plan/geoJson';
 import type { Section } from '../../../shared/surveys/types';
+import { packJson } from '../../../server/database/packedJson';
 import { buildReach } from '../../helpers/factories/buildReach';
+import { buildRoutedRun } from '../../helpers/factories/buildRoutedRun';
 import { buildScenario } from '../../helpers/factories/buildScenario';
 import { buildMember, buildStudy } from '../../helpers/factories/buildStudy';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { plainSections } from '../../helpers/plainSections';
+import { sampleCase } from '../results/sampleRun';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 
 let server: TestServer;
@@ -218,4 +222,31 @@ test('the plan is given once the study names its coordinate system', async () =>
   expect(plan.features).toHaveLength(5);
   const bare = await (await api()).get(`/api/reaches/${surveyed.id}/plan.geojson`).expect(422);
   expect(bare.body.error.faults[0].path).toBe('sections');
+});
+
+test('the plan of a run joins the edges of its highest water, on the sections as they were routed', async () => {
+  const { run, study: routed, reach } = await buildRoutedRun(server.services, modeller);
+  await routed.update({ coordinateSystem: 'Local grid' });
+  const placed = sampleCase().sections.map((section) => ({
+    ...section,
+    // Changed since: the run keeps the points it was routed on.
+    points: section.points.map(([y, z]): [number, number] => [y, z + 3]),
+    coordinates: section.points.map(([y]): [number, number] => [y, section.chainage]),
+  }));
+  await reach.update({ sections: await packJson(placed) });
+  const given = await (await api()).get(`/api/runs/${run.id}/plan.geojson`).expect(200);
+  const plan = JSON.parse(given.text ?? given.body.toString('utf8'));
+  const kinds = plan.features.map((feature: PlanFeature) => feature.properties.kind);
+  expect(kinds.filter((kind: string) => kind === 'peakExtent')).toHaveLength(2);
+  expect(plan.notes.join(' ')).toMatch(/drawn by straight lines, not computed/);
+  const { body: summary } = await (await api()).get(`/api/runs/${run.id}/summary`);
+  const extent = plan.features.find((f: PlanFeature) => f.properties.kind === 'peakExtent');
+  const stage = summary.sections[0].peakStage;
+  expect(extent.properties.fromPeakStage).toBe(stage);
+  // The left bank falls 4 m over 2 m from 10 m on: the edge by hand, on the ground that was routed.
+  const edge = 10 + (54 - stage) / 2;
+  expect(stage).toBeLessThan(54);
+  expect(extent.geometry.coordinates[0][0][0]).toBeCloseTo(edge, 9);
+  const stranger = await server.signInAs(await buildUser(server.services, ['modeller']));
+  await stranger.get(`/api/runs/${run.id}/plan.geojson`).expect(404);
 });
