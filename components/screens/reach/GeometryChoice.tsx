@@ -34,7 +34,7 @@ export function GeometryChoice({ reach, reaches }: GeometryChoiceProps) {
         </View>
       ) : null}
       {may('reach.change') ? (
-        <View>
+        <View style={styles.change}>
           {isWorking ? (
             <Button label="Change its sections" href={`/studies/${study.id}/reach/${reach.id}`} />
           ) : (
@@ -53,5 +53,6 @@ export function GeometryChoice({ reach, reaches }: GeometryChoiceProps) {
 
 const styles = StyleSheet.create({
   box: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two, alignItems: 'flex-end' },
+  change: { flexShrink: 1, minWidth: 0, maxWidth: '100%' },
   choice: { flexGrow: 1, flexBasis: 220, maxWidth: 360 },
 });
