@@ -40,7 +40,9 @@ function SetLine({ set, studyId }: { set: TaskSetRow; studyId: number }) {
         <Txt variant="small" tone="soft">
           {set.state === 'running' ? `${done}, ${timeLeftWords(set.secondsLeft)}` : done}
         </Txt>
-        <Badge {...setBadge(set)} />
+        <View>
+          <Badge {...setBadge(set)} />
+        </View>
       </Pressable>
     </Link>
   );

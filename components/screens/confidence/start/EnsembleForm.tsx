@@ -62,7 +62,7 @@ export function EnsembleForm(props: SetFormProps) {
               <FormNumberField
                 name="seed"
                 label="Seed"
-                hint="The same seed draws the same members."
+                hint="Draws the same again."
               />
             </FieldRow>
             <ParameterRows parameters={options.parameters} begin={begin}>
