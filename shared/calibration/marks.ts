@@ -1,3 +1,5 @@
+import { formatWithUnit } from '../units/format';
+import type { UnitSystem } from '../units/units';
 import type { MarkConfidence, MarkKind } from './types';
 
 export const MARK_KINDS = ['debris', 'stain', 'eyewitness', 'gaugePeak', 'other'] as const;
@@ -27,5 +29,11 @@ export const GAUGE_STAGE_TOLERANCE = 0.15;
 /** Flow of a gauge within ±10 % of its observed peak: what a rating curve is trusted with in flood, common practice. */
 export const GAUGE_FLOW_TOLERANCE = 0.1;
 
-export const TOLERANCE_SOURCE =
-  'Tolerances: ±0.30 m for good marks and ±0.15 m for the stage of gauges are common practice; fair (±0.50 m) and poor (±1.00 m) marks and the flow of gauges (±10 % of the observed peak) are allowed what is usual for them.';
+/** Where the tolerances come from, in the study's units. */
+export function toleranceSource(system: UnitSystem): string {
+  const within = (metres: number) => `±${formatWithUnit(metres, 'depth', system)}`;
+  return (
+    `Tolerances: ${within(MARK_TOLERANCE.good)} for good marks and ${within(GAUGE_STAGE_TOLERANCE)} for the stage of gauges are common practice; ` +
+    `fair (${within(MARK_TOLERANCE.fair)}) and poor (${within(MARK_TOLERANCE.poor)}) marks are allowed more, and the flow of gauges ±${100 * GAUGE_FLOW_TOLERANCE} % of the observed peak.`
+  );
+}

@@ -3,7 +3,7 @@ import { useCurrentStudy } from '@/components/layout/studyContext';
 import { Card } from '@/components/ui/Card';
 import { Table } from '@/components/ui/Table';
 import { Txt } from '@/components/ui/Txt';
-import { TOLERANCE_SOURCE } from '@/shared/calibration/marks';
+import { toleranceSource } from '@/shared/calibration/marks';
 import type { Mark } from '@/shared/calibration/types';
 import { markColumns } from './markColumns';
 import { MarkDialog } from './MarkDialog';
@@ -35,7 +35,7 @@ export function MarksCard({ marks, at, onChoose }: Props) {
         maxHeight={420}
       />
       <Txt variant="small" tone="soft">
-        {`${mayChange ? 'Choose one to change or remove it. ' : ''}${TOLERANCE_SOURCE}`}
+        {`${mayChange ? 'Choose one to change or remove it. ' : ''}${toleranceSource(study.unitSystem)}`}
       </Txt>
       {changing ? (
         <MarkDialog mark={changing} floods={floods} onClose={() => setChanging(null)} />

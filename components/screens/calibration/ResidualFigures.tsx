@@ -4,7 +4,7 @@ import { Card } from '@/components/ui/Card';
 import { FigureWithUnit } from '@/components/ui/FigureWithUnit';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
-import { TOLERANCE_SOURCE } from '@/shared/calibration/marks';
+import { toleranceSource } from '@/shared/calibration/marks';
 import type { RunResiduals } from '@/shared/calibration/types';
 import { formatNumber, formatQuantity } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
@@ -18,7 +18,7 @@ export function ResidualFigures({ residuals }: { residuals: Shown & { flood: str
     <Card title={floodName(residuals.flood)}>
       <Figures residuals={residuals} />
       <Txt variant="small" tone="soft">
-        {TOLERANCE_SOURCE}
+        {toleranceSource(useUnitSystem())}
       </Txt>
     </Card>
   );

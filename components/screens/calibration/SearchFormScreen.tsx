@@ -14,6 +14,7 @@ import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { Txt } from '@/components/ui/Txt';
+import { GAUGE_STAGE_TOLERANCE } from '@/shared/calibration/marks';
 import type { RunResiduals } from '@/shared/calibration/types';
 import { searchSchema, SEARCH_LIMITS } from '@/shared/calibration/search/schemas';
 import type { Run, RunSummary } from '@/shared/runs/types';
@@ -106,7 +107,7 @@ function Form({ run, residuals, summary }: Props) {
               <FormCheckbox
                 name="use.gaugeStage"
                 label="Stage of the gauges"
-                hint="Each by its root mean square error over 0.15 m."
+                hint={`Each by its root mean square error over ${formatWithUnit(GAUGE_STAGE_TOLERANCE, 'depth', study.unitSystem)}.`}
               />
             ) : null}
             {has('flow') ? (

@@ -1,4 +1,4 @@
-import { CONFIDENCE_WORDS, KIND_WORDS, TOLERANCE_SOURCE } from '../../../shared/calibration/marks';
+import { CONFIDENCE_WORDS, KIND_WORDS, toleranceSource } from '../../../shared/calibration/marks';
 import type { GaugeFit, MarkResidual, RunResiduals } from '../../../shared/calibration/types';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
 import { observedGauge } from '../charts/observedGauge';
@@ -25,7 +25,7 @@ export function observed(sheet: Sheet, { facts }: RunReport): void {
   for (const fit of residuals.gauges) gauge(sheet, fit, facts.study.unitSystem, say);
   note(
     sheet,
-    `${TOLERANCE_SOURCE}${residuals.misfit === null ? '' : ` Misfit ${formatNumber(residuals.misfit, 2)}: the root of the mean square of all deviations over their tolerances; 1 means off by the tolerance on average.`}`,
+    `${toleranceSource(facts.study.unitSystem)}${residuals.misfit === null ? '' : ` Misfit ${formatNumber(residuals.misfit, 2)}: the root of the mean square of all deviations over their tolerances; 1 means off by the tolerance on average.`}`,
   );
 }
 
