@@ -16,6 +16,8 @@ export function createVolumeLedger(workspace: Workspace): VolumeLedger {
   const inflow = compensatedSum();
   const lateral = compensatedSum();
   const outflow = compensatedSum();
+  /** All that passed either way: where as much came as went the sums above tell of little. */
+  let moved = 0;
 
   function stored(): number {
     const sum = compensatedSum();
@@ -31,6 +33,7 @@ export function createVolumeLedger(workspace: Workspace): VolumeLedger {
       inflow.add(inV);
       lateral.add(latV);
       outflow.add(outV);
+      moved += Math.abs(inV) + Math.abs(latV) + Math.abs(outV);
     },
     balance() {
       const final = stored();
@@ -39,6 +42,7 @@ export function createVolumeLedger(workspace: Workspace): VolumeLedger {
       const turnover = Math.max(
         initial + Math.abs(volumes[0]) + Math.abs(volumes[1]),
         final + Math.abs(volumes[2]),
+        0.5 * moved,
       );
       return {
         initial,

@@ -136,7 +136,8 @@ export function createWaterSide(
       const carried = waves.carriedAt(cell, eta, a, q);
       const flows = eta === stage[cell] ? cellFlowArea[cell] : waves.flowAreaAt(cell, eta, a);
       flux[face] = carried + 0.5 * gravity * (eta - stage[cell]) * (cellFlowArea[cell] + flows);
-      if (!(a > 0)) return 0;
+      // A trickle that does not lift the stage off the bed has no velocity to be told.
+      if (!(a > 0) || eta - bed[cell] <= 1e-3 * dryDepth) return 0;
       return Math.abs(waves.driftAt(cell, eta, a, q)) + waveSpeed(a, eta, q);
     },
     slope,

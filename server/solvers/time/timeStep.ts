@@ -30,8 +30,11 @@ export function createTimeStep(
 
   function fail(time: number): never {
     let worst = 1;
+    let fastest = 0;
     for (let i = 1; i <= n; i++) {
       const speed = area[i] > 0 ? abs(flow[i]) / area[i] + celerity[i] : 0;
+      if (speed <= fastest) continue;
+      fastest = speed;
       worst = i;
       if (!(speed < IMPOSSIBLE) || !(area[i] >= 0)) break;
     }

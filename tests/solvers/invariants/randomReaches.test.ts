@@ -12,13 +12,11 @@ import { routeChecked } from '../../helpers/solvers/routeChecked';
  */
 const COUNT = Number(process.env.REACHES ?? 100);
 
-/** m/s. Falling 20 m gives 20 m/s, a dry front from 15 m depth 24 m/s; more comes from a fault, or from a higher fall. */
-const FASTEST = 30;
-const fastestOf = (cells: CellResults): number =>
-  Math.max(
-    FASTEST,
-    Math.sqrt(2 * GRAVITY * (Math.max(...cells.peakStage) - Math.min(...cells.bed))),
-  );
+/** m/s. No front is faster than Ritter's (1892), 2 √(g H), of all the height that there is; more comes from a fault. */
+const fastestOf = (cells: CellResults): number => {
+  const height = Math.max(...cells.peakStage) - Math.min(...cells.bed);
+  return Math.max(10, 2 * Math.sqrt(GRAVITY * height));
+};
 
 /** Mean step (s): cells of 20 m at the fastest speed above and Courant number 0.8 give 0.5 s; the last of each interval is cut. */
 const SHORTEST = 0.1;
