@@ -8,8 +8,10 @@ import {
   type QueryClient,
 } from '@tanstack/react-query';
 import { decodeSurface } from '@/shared/runs/surfaceBlock';
+import type { AlongQuery } from '@/shared/runs/schemas';
 import type {
   Run,
+  RunAlong,
   RunReservoirSeries,
   RunRow,
   RunSeries,
@@ -64,6 +66,21 @@ const seriesQuery = (runId: number, chainage: number) =>
     queryKey: runKeys.result(runId, 'series', chainage),
     queryFn: ({ signal }) =>
       api.get<RunSeries>(`/runs/${runId}/series`, { signal, query: { chainage } }),
+  });
+
+/** Hazard and arrival along the reach by a threshold, SI; null: none is given. */
+export const useRunAlong = (
+  runId: number,
+  threshold: AlongQuery['threshold'],
+  value: number | null,
+) =>
+  useQuery({
+    ...FIXED,
+    queryKey: runKeys.result(runId, 'along', threshold, value ?? 'none'),
+    queryFn: ({ signal }) =>
+      api.get<RunAlong>(`/runs/${runId}/along`, { signal, query: { threshold, value } }),
+    enabled: value !== null,
+    placeholderData: keepPreviousData,
   });
 
 const surfaceQuery = (runId: number, places: number, moments: number) =>

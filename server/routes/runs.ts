@@ -1,6 +1,6 @@
 import { pipeline } from 'node:stream/promises';
 import { Router, type Response } from 'express';
-import { seriesQuerySchema, surfaceQuerySchema } from '../../shared/runs/schemas';
+import { alongQuerySchema, seriesQuerySchema, surfaceQuerySchema } from '../../shared/runs/schemas';
 import type { Services } from '../composition';
 import { actorOf, authorize, recordOf } from '../middleware/authorize';
 import { eventStream } from '../middleware/eventStream';
@@ -88,6 +88,10 @@ export function runRoutes({
     results.open(run);
     if (unchanged(req, res, run.caseHash, run.id, 'series', chainage)) return;
     res.json(await results.series(run, chainage));
+  });
+
+  router.get('/runs/:runId/along', authenticate, readRun, async (req, res) => {
+    res.json(await results.along(runOf(res), await check(alongQuerySchema, req.query)));
   });
 
   router.get('/runs/:runId/structures/:structure', authenticate, readRun, async (req, res) => {

@@ -1,5 +1,8 @@
 import type { ReservoirResult, StructureRegime, StructureResult } from '../case/resultFile';
+import type { HazardClass } from '../hazard/hazardClass';
 import type { ReviewState } from '../review/types';
+import type { LevelResult } from './levelResult';
+import type { AlongQuery } from './schemas';
 import type { StructureMark } from '../structures/structureMarks';
 
 /** States of a run, as stored. The words for them are in `RUN_STATE_WORDS`. */
@@ -83,6 +86,8 @@ export interface RunSummary {
   sections: (PlacePeaks & { id: string })[];
   /** At the study's stations that lie on the reach. */
   stations: (PlacePeaks & { stationId: number; name: string })[];
+  /** At those of them that levels were given for. */
+  levels: LevelResult[];
   volume: {
     initial: number;
     inflow: number;
@@ -158,6 +163,27 @@ export interface RunSeries {
   flow: number[];
   velocity: number[];
   peaks: PlacePeaks;
+}
+
+/** Hazard and arrival at a place, from the stored moments. */
+export interface PlaceAlong {
+  chainage: number;
+  /** Class of `HAZARD_GUIDELINE`; null where it stays dry. */
+  hazard: HazardClass['label'] | null;
+  /** When that class is first reached, s. */
+  hazardFrom: number | null;
+  /** When the threshold is first passed, s; null: never. */
+  arrival: number | null;
+}
+
+/** `GET /api/runs/:runId/along?threshold=…&value=…`. */
+export interface RunAlong {
+  threshold: AlongQuery['threshold'];
+  value: number;
+  /** Between the moments that it is told from, s. */
+  interval: number;
+  sections: (PlaceAlong & { id: string })[];
+  stations: (PlaceAlong & { stationId: number; name: string })[];
 }
 
 /**

@@ -1,7 +1,8 @@
-import type { SurfaceQuery } from '../../../shared/runs/schemas';
+import type { AlongQuery, SurfaceQuery } from '../../../shared/runs/schemas';
 import { encodeSurface } from '../../../shared/runs/surfaceBlock';
 import {
   RUN_STATE_WORDS,
+  type RunAlong,
   type RunReservoirSeries,
   type RunSeries,
   type RunStructureSeries,
@@ -11,6 +12,7 @@ import type { Station } from '../../../shared/studies/types';
 import { AppError, conflict, notFound } from '../../errors';
 import type { Models } from '../../models';
 import type { RunModel } from '../../models/Run';
+import { alongReach } from '../../results/alongReach';
 import { runBlocks, type ReadBlocks, type RunBlocks } from '../../results/blocks/runBlocks';
 import { seriesAt } from '../../results/seriesAt';
 import { reservoirSeries, structureSeries } from '../../results/structureSeries';
@@ -38,7 +40,7 @@ export function buildReadResults({ RunBlock, Station }: Models) {
 
   const stations = async (studyId: number): Promise<Station[]> =>
     (await Station.findAll({ where: { studyId }, order: ['chainage'] })).map(
-      ({ id, name, chainage }) => ({ id, name, chainage }),
+      ({ id, name, chainage, levels }) => ({ id, name, chainage, levels: levels ?? [] }),
     );
 
   return {
@@ -47,6 +49,10 @@ export function buildReadResults({ RunBlock, Station }: Models) {
 
     async summary(run: RunModel): Promise<RunSummary> {
       return summaryOf(run.id, open(run), await stations(run.studyId));
+    },
+
+    async along(run: RunModel, query: AlongQuery): Promise<RunAlong> {
+      return alongReach(open(run), await stations(run.studyId), query);
     },
 
     /** Throws `invalid` off the reach. */

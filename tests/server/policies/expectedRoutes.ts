@@ -93,6 +93,7 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /runs/:runId/events': 'run.read',
   'GET /runs/:runId/summary': 'run.read',
   'GET /runs/:runId/series': 'run.read',
+  'GET /runs/:runId/along': 'run.read',
   'GET /runs/:runId/structures/:structure': 'run.read',
   'GET /runs/:runId/reservoir': 'run.read',
   'GET /runs/:runId/structures.csv': 'run.read',

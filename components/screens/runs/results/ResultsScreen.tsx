@@ -12,6 +12,7 @@ import { CheckLink } from '../../check/CheckLink';
 import { runBadge } from '../../check/reviewWords';
 import { Cautions } from '../Cautions';
 import { runCrumbs } from '../runCrumbs';
+import { AlongCard } from './AlongCard';
 import { ComputedCard } from './ComputedCard';
 import { LongSectionCard } from './LongSectionCard';
 import { PeaksCard } from './PeaksCard';
@@ -80,6 +81,7 @@ export function ResultsScreen({ run, summary }: Props) {
       {summary.structures.length > 0 ? <StructuresCard {...common} /> : null}
       {summary.reservoir ? <ReservoirCard {...common} reservoir={summary.reservoir} /> : null}
       <PeaksCard {...common} />
+      <AlongCard {...common} />
       <WarningsCard {...common} />
       <VolumeCard summary={summary} />
       <ComputedCard run={run} summary={summary} />

@@ -1,0 +1,57 @@
+import { hazardClass, type HazardClass } from '../../shared/hazard/hazardClass';
+import { firstAbove } from '../../shared/runs/crossings';
+import type { AlongQuery } from '../../shared/runs/schemas';
+import type { PlaceAlong, RunAlong, RunSeries } from '../../shared/runs/types';
+import type { Station } from '../../shared/studies/types';
+import type { RunBlocks } from './blocks/runBlocks';
+import { seriesAt } from './seriesAt';
+
+/** Hazard, and arrival by a threshold of one's own, at every surveyed section and station, from the stored moments. */
+export async function alongReach(
+  blocks: RunBlocks,
+  stations: Station[],
+  { threshold, value }: AlongQuery,
+): Promise<RunAlong> {
+  const { sections, times } = await blocks.facts();
+  const of = async (chainage: number): Promise<PlaceAlong | null> => {
+    const series = await seriesAt(blocks, chainage);
+    return (
+      series && { chainage, ...worstMoment(series), arrival: arrivalOf(series, threshold, value) }
+    );
+  };
+  const along: RunAlong = {
+    threshold,
+    value,
+    interval: times.length > 1 ? times[1] - times[0] : 0,
+    sections: [],
+    stations: [],
+  };
+  for (const { id, chainage } of sections) {
+    const found = await of(chainage);
+    if (found) along.sections.push({ id, ...found });
+  }
+  for (const { id: stationId, name, chainage } of stations) {
+    const found = await of(chainage);
+    if (found) along.stations.push({ stationId, name, ...found });
+  }
+  return along;
+}
+
+/** The worst class, from depth and mean velocity of the same moment, and when it is first reached. */
+function worstMoment({ times, depth, velocity }: RunSeries) {
+  let worst: HazardClass | null = null;
+  let at: number | null = null;
+  for (let k = 0; k < times.length; k++) {
+    const now = hazardClass(depth[k], velocity[k]);
+    if (!now || (worst && now.label <= worst.label)) continue;
+    worst = now;
+    at = times[k];
+  }
+  return { hazard: worst && worst.label, hazardFrom: at };
+}
+
+function arrivalOf(series: RunSeries, threshold: AlongQuery['threshold'], value: number) {
+  const { times, stage, flow } = series;
+  if (threshold === 'flow') return firstAbove(times, flow, value);
+  return firstAbove(times, stage, threshold === 'rise' ? stage[0] + value : value);
+}
