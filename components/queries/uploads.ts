@@ -29,6 +29,13 @@ const arrived = new WeakMap<File, number>();
 
 export const forgetArrived = (file: File): boolean => arrived.delete(file);
 
+/** Lets the server forget a file that is not handed in after all; where that fails it does so by itself in a day. */
+export function dropFile(file: File): void {
+  const id = arrived.get(file);
+  arrived.delete(file);
+  if (id !== undefined) void api.delete(`/uploads/${id}`).catch(() => undefined);
+}
+
 /**
  * Sends a file part by part, and goes on where it stopped: after a lost connection by itself, after a reload when the
  * same file is chosen again. Gives the id of the upload. Throws ApiError where the server refuses it.

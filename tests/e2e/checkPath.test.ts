@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process';
-import { mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import type { Browser, Page } from 'playwright-core';
@@ -7,6 +7,7 @@ import { DEMO_PASSWORD } from '@/seed/accounts';
 import { emailOf } from '../helpers/accounts';
 import { axeViolations } from '../helpers/axe';
 import { launchBrowser, sidewaysOverflow, SIZES, visit, type Size } from '../helpers/browser';
+import { mailTo } from '../helpers/mailTo';
 import { signIn } from '../helpers/steps';
 
 jest.setTimeout(600_000);
@@ -164,16 +165,6 @@ async function save(page: Page, button: string, file: string): Promise<void> {
     page.getByRole('button', { name: button }).click(),
   ]);
   await download.saveAs(file);
-}
-
-/** What was sent to an address, by the mailbox that the product keeps. */
-function mailTo(email: string): string {
-  const mailbox = path.join(process.env.SPATE_E2E_DATA_DIR!, 'mail');
-  return readdirSync(mailbox)
-    .filter((name) => name.endsWith('.json'))
-    .map((name) => readFileSync(path.join(mailbox, name), 'utf8'))
-    .filter((message) => JSON.parse(message).to === email)
-    .join('\n');
 }
 
 /** Without an account: the report is the very one, one changed byte is found, a guessed code tells nothing. */

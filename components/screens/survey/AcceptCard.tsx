@@ -1,3 +1,4 @@
+import { useCurrentStudy } from '@/components/layout/studyContext';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
@@ -16,11 +17,14 @@ interface AcceptCardProps {
 
 /** Takes in what was read, with a note for whoever works with it. */
 export function AcceptCard({ note, busy, sending, error, onNote, onAccept }: AcceptCardProps) {
+  const { may } = useCurrentStudy();
+  const accepts = may('survey.decide');
   return (
-    <Card title="Take it in">
+    <Card title={accepts ? 'Take it in' : 'Hand it in'}>
       <Txt tone="soft">
-        It becomes a numbered revision that never changes again, and a reach of its own to set bank
-        marks and roughness on.
+        {accepts
+          ? 'It becomes a numbered revision that never changes again, and a reach of its own to set bank marks and roughness on.'
+          : 'It becomes a numbered revision that never changes again. An engineer looks at it, and accepts it or returns it to you with remarks.'}
       </Txt>
       <TextField
         label="Note"
@@ -33,7 +37,7 @@ export function AcceptCard({ note, busy, sending, error, onNote, onAccept }: Acc
         disabled={sending}
       />
       <Button
-        label="Take in this survey"
+        label={accepts ? 'Take in this survey' : 'Hand in this survey'}
         kind="solid"
         wide
         busy={sending}

@@ -32,7 +32,7 @@ export function UnfinishedCard({ studyId }: { studyId: number }) {
             </View>
             <Button
               kind="quiet"
-              label="Forget it"
+              label="Forget"
               name={`Forget ${fileName}`}
               onPress={() => forget.mutate(id)}
             />

@@ -1,6 +1,6 @@
 import { useEffect, useReducer, useState } from 'react';
 import { readSurvey, refusedReading, useSendSurvey } from '@/components/queries/surveys';
-import type { Transfer } from '@/components/queries/uploads';
+import { dropFile, type Transfer } from '@/components/queries/uploads';
 import type { MatchChoice } from '@/shared/surveys/types';
 import { handInReducer, START } from './handInState';
 
@@ -37,11 +37,17 @@ export function useHandIn(studyId: number) {
     }
   };
 
+  /** Whoever turns to another file leaves nothing of this one behind. */
+  const drop = () => {
+    if ('file' in state) dropFile(state.file);
+  };
+
   return {
     state,
     /** While the file travels; null once it has arrived. */
     transfer: transfer && transfer.arrived < transfer.size ? transfer : null,
     choose: (file: File) => {
+      drop();
       send.reset();
       setTransfer(null);
       dispatch({ type: 'fileChosen', file });
@@ -49,6 +55,7 @@ export function useHandIn(studyId: number) {
     changeMatch: (choice: MatchChoice) => dispatch({ type: 'matchChanged', choice }),
     readAgain: () => dispatch({ type: 'readAgain' }),
     startAgain: () => {
+      drop();
       send.reset();
       dispatch({ type: 'startedAgain' });
     },

@@ -22,6 +22,7 @@ jest.setTimeout(30_000);
 jest.mock('@/components/queries/uploads', () => ({
   sendFile: async () => 41,
   forgetArrived: () => false,
+  dropFile: () => undefined,
   useUploads: () => ({ data: [] }),
   useForgetUpload: () => ({}),
 }));
