@@ -39,10 +39,7 @@ export function PlanCard({ reach, section, onChoose }: PlanCardProps) {
   const missing = sections.length - placed.length;
   const isNamed = study.coordinateSystem !== '';
   return (
-    <Card
-      title="Plan"
-      aside={missing > 0 ? `${missing} sections have no coordinates` : 'north is up'}
-    >
+    <Card title="Plan" aside={missing > 0 ? `without coordinates: ${missing}` : 'north is up'}>
       <ChartBox
         label={`The reach from above, ${placed.length} sections; ${section.id} is chosen${rings.length > 0 ? '; the widest water of the run is drawn between them' : ''}`}
         height={260}

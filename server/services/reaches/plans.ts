@@ -29,10 +29,10 @@ export function buildPlans(
     const reach = await Reach.scope('withSections').findByPk(run.reachId, { rejectOnEmpty: true });
     const known = new Map((await unpackJson<Section[]>(reach.sections)).map((s) => [s.id, s]));
     const routed = JSON.parse((await runs.exports.caseFile(run)).toString('utf8')) as CaseFile;
-    const sections = routed.sections.map(({ id, chainage, points }): Section => {
+    const sections = routed.sections.map(({ id, chainage, points, embankments }): Section => {
       const section = known.get(id);
       const bare = { id, chainage, points, roughness: [], banks: null, coordinates: null };
-      return section ? { ...withPoints(section, points), chainage } : bare;
+      return section ? { ...withPoints(section, points), chainage, embankments } : bare;
     });
     const peakStages = new Map(peaks.map(({ id, peakStage }) => [id, peakStage]));
     return planOf(placed(sections), coordinateSystem, { number: run.number, peakStages });

@@ -1,4 +1,5 @@
 import type { Section } from '../../surveys/types';
+import { groundAt } from '../sectionGeometry';
 import { coordinateAt } from '../edit/coordinateAt';
 import type { PlanFeature, Position } from './geoJson';
 
@@ -20,12 +21,24 @@ export interface FloodExtent {
 
 /**
  * Outermost edges of the water at a stage, placed on the section's own coordinates; as the solver has it, ground below the
- * stage is wet wherever it lies. null where the section is dry or has no coordinates.
+ * stage is wet wherever it lies, but for what an embankment that is not overtopped keeps dry. null where the section is dry
+ * or has no coordinates.
  */
 export function wetEdges(section: Section, stage: number): WetEdges | null {
-  const offsets = edgeOffsets(section.points, stage);
+  const offsets = edgeOffsets(openGround(section, stage), stage);
   const [left, right] = offsets?.map((offset) => coordinateAt(section, offset)) ?? [];
   return left && right ? { id: section.id, chainage: section.chainage, stage, left, right } : null;
+}
+
+/** The ground between those embankments whose crest the stage does not reach. */
+function openGround(section: Section, stage: number): Section['points'] {
+  const { points, embankments = {} } = section;
+  const { left, right } = embankments;
+  const from = left && stage <= left.crest ? left.offset : -Infinity;
+  const to = right && stage <= right.crest ? right.offset : Infinity;
+  const at = (offset: number): Section['points'] =>
+    Number.isFinite(offset) ? [[offset, groundAt(section, offset)]] : [];
+  return [...at(from), ...points.filter(([y]) => y > from && y < to), ...at(to)];
 }
 
 function edgeOffsets(points: Section['points'], stage: number): [number, number] | null {

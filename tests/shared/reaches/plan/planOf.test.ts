@@ -27,6 +27,14 @@ test('the edges of the water stand where the ground meets the stage', () => {
   expect(wetEdges(placed()[0], 9)).toBeNull();
 });
 
+test('behind an embankment it stays dry until the water is over its crest', () => {
+  const section = { ...placed()[0], embankments: { left: { offset: 15, crest: 14 } } };
+  // The ground at 15 m lies 0.1 m above the bank of 13 m.
+  expect(wetEdges(section, 13.5)).toMatchObject({ left: [5015, 7000] });
+  // Over the crest the water reaches the slope of 2.8 m over 10 m: 10 − 10·(14.6 − 13.2)/2.8 = 5 m.
+  expect(wetEdges(section, 14.6)?.left[0]).toBeCloseTo(5005, 9);
+});
+
 test('neighbouring edges are joined, anticlockwise and closed; nothing is drawn to a dry section', () => {
   const stages = new Map([
     ['XS-01', 11.5],
