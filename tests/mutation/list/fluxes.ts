@@ -66,7 +66,7 @@ export const FLUXES: Mutation[] = [
     file: REGULAR,
     find: 'abs(dAi) < abs(dAj) ? dAi',
     put: 'abs(dAi) > abs(dAj) ? dAi',
-    tests: ['convergence/manufacturedFlow', 'convergence/naturalSteady'],
+    tests: ['unit/interiorFluxes'],
   },
   {
     what: 'pressure: the right cell with the wrong sign',

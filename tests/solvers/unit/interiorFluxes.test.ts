@@ -84,6 +84,22 @@ describe('fluxes between cells', () => {
     expect(workspace.fluxLeft[1] + 0).toBe(0);
   });
 
+  it('are driven by the smaller of both differences of area where the sections differ', () => {
+    // Cells of a reach that widens from 10 m to 13 m: the first is 10.75 m wide, the second 12.25 m.
+    const { workspace, tables, state } = kernelParts(
+      at(rectangle(10), 0),
+      at(rectangle(13), 20),
+      2,
+    );
+    const bed = workspace.bed[1];
+    state.placeAtStage(1, bed + 2.1);
+    state.placeAtStage(2, bed + 2);
+    createInteriorFluxes(workspace, tables)();
+    // HLL of still water, s = ±√(g h) of the deeper: s_L s_R ΔA/(s_R - s_L) = c ΔA/2, with ΔA = 10.75 m × 0.1 m.
+    const c = Math.sqrt(G * 2.1);
+    expect(workspace.fluxArea[1] / (0.5 * c * 1.075)).toBeCloseTo(1, 6);
+  });
+
   it('let water fall onto a dry bed', () => {
     const section = rectangle(1);
     const { volume } = fluxesBetween(section, [1, 0], [0, 0]);
