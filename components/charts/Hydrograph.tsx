@@ -11,8 +11,10 @@ import {
   type HydrographModel,
   type Series,
 } from './geometry/hydrographModel';
+import type { NamedLevel } from './geometry/levelLines';
 import { nearestIndex, valueAt } from './geometry/interpolate';
 import { shortTime } from './geometry/timeWords';
+import { LevelLines } from './LevelLines';
 import { Reading, readingBox } from './Reading';
 import { TimeAxis } from './TimeAxis';
 import { ValueAxis } from './ValueAxis';
@@ -25,10 +27,14 @@ export interface HydrographProps {
   series: Series;
   /** A second curve to compare with, dashed; its name goes into the heading. */
   compare?: Series | null;
+  /** Levels to hold a stage against, SI. Keep the same array while only the cursor moves. */
+  levels?: readonly NamedLevel[];
   /** Highest value with its time where it is known better than from the series. */
   peak?: { value: number; time: number } | null;
   /** Time of the cursor, s; null for none. */
   t: number | null;
+  /** Of ground or a dam, not of water. */
+  isGround?: boolean;
   /** Left out: the drawing only shows. */
   onChange?: (t: number) => void;
   unitSystem: UnitSystem;
@@ -58,11 +64,11 @@ export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
 
 type Sized = HydrographProps & { size: ChartSize };
 
-function useModel({ size, series, compare = null, quantity, unitSystem }: Sized) {
+function useModel({ size, series, compare = null, quantity, unitSystem, levels }: Sized) {
   const { width, height } = size;
   return useMemo(
-    () => hydrographModel({ width, height }, series, compare, quantity, unitSystem),
-    [width, height, series, compare, quantity, unitSystem],
+    () => hydrographModel({ width, height }, series, compare, quantity, unitSystem, levels),
+    [width, height, series, compare, quantity, unitSystem, levels],
   );
 }
 
@@ -84,13 +90,19 @@ function Drawing(props: Sized) {
     <>
       <ValueAxis frame={model.frame} ticks={model.valueTicks} />
       <TimeAxis frame={model.frame} ticks={model.timeTicks} />
-      <Curves model={model} />
+      <LevelLines lines={model.levels} frame={model.frame} />
+      <Curves model={model} isGround={props.isGround} />
       <Marks {...props} model={model} />
     </>
   );
 }
 
-const Curves = memo(function Curves({ model }: { model: HydrographModel }) {
+interface CurvesProps {
+  model: HydrographModel;
+  isGround?: boolean;
+}
+
+const Curves = memo(function Curves({ model, isGround }: CurvesProps) {
   const { colours } = useTheme();
   return (
     <>
@@ -106,7 +118,7 @@ const Curves = memo(function Curves({ model }: { model: HydrographModel }) {
       <Path
         d={model.main.path}
         fill="none"
-        stroke={colours.water}
+        stroke={isGround ? colours.earth : colours.water}
         strokeWidth={2}
         strokeLinejoin="round"
       />
@@ -152,7 +164,10 @@ function Marks({
   const cursorText =
     t === null ? [] : [{ text: value(valueAt(series.times, series.values, t)), strong: false }];
   // The reading of the cursor goes first, close to its dot; the peak says its own time wherever it stands.
-  const dots = [top, cursor].flatMap((dot) => (dot ? [around(dot)] : []));
+  const dots = [
+    ...[top, cursor].flatMap((dot) => (dot ? [around(dot)] : [])),
+    ...model.levels.flatMap(({ box }) => (box ? [box] : [])),
+  ];
   const cursorBox =
     cursor && apart ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: dots }) : null;
   const peakBox = top

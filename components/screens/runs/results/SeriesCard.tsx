@@ -11,7 +11,10 @@ import { space } from '@/components/theme/tokens';
 import { UNITS } from '@/shared/units/units';
 import { SeriesTable } from './SeriesTable';
 
-interface Props extends Pick<HydrographProps, 'quantity' | 'series' | 'compare' | 'peak'> {
+interface Props extends Pick<
+  HydrographProps,
+  'quantity' | 'series' | 'compare' | 'peak' | 'isGround' | 'levels'
+> {
   title: string;
   /** Where, for the names. */
   place: string;
@@ -23,7 +26,8 @@ interface Props extends Pick<HydrographProps, 'quantity' | 'series' | 'compare' 
 
 /** One quantity against time at the chosen place; the table behind it one press away. */
 export function SeriesCard(props: Props) {
-  const { title, place, note, quantity, series, compare, peak, store, startsAt } = props;
+  const { title, place, note, quantity, series, compare, peak, isGround, store, startsAt } = props;
+  const { levels } = props;
   const unitSystem = useUnitSystem();
   // While the flood plays, the long section goes first; the curves follow as the machine allows.
   const t = useDeferredValue(useTime(store));
@@ -55,7 +59,7 @@ export function SeriesCard(props: Props) {
       ) : (
         <Hydrograph
           label={name}
-          {...{ quantity, series, compare, peak, t, unitSystem }}
+          {...{ quantity, series, compare, peak, levels, isGround, t, unitSystem }}
           onChange={store.setT}
         />
       )}

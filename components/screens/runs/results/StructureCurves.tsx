@@ -48,6 +48,7 @@ export function StructureCurves({ structure, series, store, startsAt }: Props) {
           quantity="elevation"
           series={curves.bottom}
           peak={null}
+          isGround
         />
       ) : null}
     </>
