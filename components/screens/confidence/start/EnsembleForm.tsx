@@ -59,11 +59,7 @@ export function EnsembleForm(props: SetFormProps) {
           <>
             <FieldRow>
               <FormNumberField name="members" label="Members" hint="20 to 500." />
-              <FormNumberField
-                name="seed"
-                label="Seed"
-                hint="Draws the same again."
-              />
+              <FormNumberField name="seed" label="Seed" hint="Draws the same again." />
             </FieldRow>
             <ParameterRows parameters={options.parameters} begin={begin}>
               {(parameter, path, { distribution }) => (
