@@ -201,3 +201,25 @@ test('what is asked off the reach or without sense is said to be so', async () =
   await api.get(`/api/runs/${run.id}/series?chainage=abc`).expect(422);
   await api.get(`/api/runs/${run.id}/surface?places=1000000`).expect(422);
 });
+
+test('hazard and arrival by a threshold of one’s own stand at every section and station', async () => {
+  const along = (query: object) => api.get(`/api/runs/${run.id}/along`).query(query);
+  const { body } = await along({ threshold: 'rise', value: 0.1 }).expect(200);
+  expect(body).toMatchObject({ threshold: 'rise', value: 0.1, interval: 120 });
+  expect(body.stations.map(({ name }: { name: string }) => name)).toEqual(['Mill', 'Gauge']);
+  // The run's own rule is the same rise, told at every step: apart by less than an output interval.
+  expected.sections.forEach(({ id, arrival }, i) => {
+    expect(body.sections[i].id).toBe(id);
+    expect(Math.abs(body.sections[i].arrival - arrival!)).toBeLessThan(120);
+    expect(body.sections[i].hazard).toMatch(/^H[1-6]$/);
+  });
+  const byFlow = (await along({ threshold: 'flow', value: 95 }).expect(200)).body.sections;
+  const [first] = expected.sections;
+  const k = first.flow.findIndex((flow) => flow > 95);
+  expect(byFlow[0].arrival).toBeGreaterThan(expected.times[k - 1]);
+  expect(byFlow[0].arrival).toBeLessThanOrEqual(expected.times[k]);
+  const never = (await along({ threshold: 'stage', value: 1000 }).expect(200)).body.sections;
+  expect(never.every(({ arrival }: { arrival: number | null }) => arrival === null)).toBe(true);
+  await along({ threshold: 'rise', value: 0 }).expect(422);
+  await along({ threshold: 'colour', value: 1 }).expect(422);
+});
