@@ -24,6 +24,7 @@ export const LIMITS = {
   structures: 50,
   structureName: 60,
   stationsPerStudy: 100,
+  levelsPerStation: 10,
   /** Sets of tasks of a firm that wait or run. */
   openTaskSets: 20,
   textShort: 120,

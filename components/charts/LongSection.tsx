@@ -16,6 +16,7 @@ import {
 } from './geometry/longProfile';
 import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
+import { LevelMarks } from './LevelMarks';
 import { PlaceAxis } from './PlaceAxis';
 import { Reading, readingBox, type ReadingText } from './Reading';
 import { StationMarks } from './StationMarks';
@@ -29,6 +30,8 @@ export interface LongSectionProps {
   stage?: ArrayLike<number> | null;
   sections: readonly { id: string; chainage: number }[];
   stations?: readonly { name: string; chainage: number }[];
+  /** Levels named at stations, m. */
+  levels?: readonly { chainage: number; level: number }[];
   /** What stands in the river; its breaches and its words as of the moment. */
   structures?: readonly StructureMark[];
   bottoms?: ReadonlyMap<string, number>;
@@ -87,6 +90,7 @@ function Drawing({
   unitSystem,
   sections,
   stations = NONE,
+  levels = NONE,
   structures = NONE,
   bottoms,
   words,
@@ -135,6 +139,7 @@ function Drawing({
         frame={frame}
         unitSystem={unitSystem}
       />
+      <LevelMarks {...{ levels, frame, unitSystem }} />
       <StructureMarks {...{ structures, profile, frame, unitSystem, bottoms, words }} />
       <PlaceAxis frame={frame} ticks={frame.xTicks} />
       <ChartText x={frame.left} y={14}>

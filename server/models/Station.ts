@@ -6,6 +6,8 @@ import {
   type Model,
   type Sequelize,
 } from 'sequelize';
+import type { StationLevel } from '../../shared/studies/stationLevels';
+import { jsonColumn } from '../database/jsonColumn';
 
 /** A named place on the reach of a study. */
 export interface StationModel extends Model<
@@ -17,6 +19,8 @@ export interface StationModel extends Model<
   name: string;
   /** m. */
   chainage: number;
+  /** null: none. */
+  levels: CreationOptional<StationLevel[] | null>;
   createdAt: CreationOptional<Date>;
   updatedAt: CreationOptional<Date>;
 }
@@ -29,6 +33,7 @@ export const defineStation = (sequelize: Sequelize) =>
       studyId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
       name: { type: DataTypes.STRING(120), allowNull: false },
       chainage: { type: DataTypes.DOUBLE, allowNull: false },
+      levels: jsonColumn<StationLevel[]>('levels', true),
       createdAt: DataTypes.DATE(3),
       updatedAt: DataTypes.DATE(3),
     },

@@ -68,8 +68,9 @@ export const presentMember = ({ user, as, createdAt }: StudyMemberModel): StudyM
   since: createdAt.toISOString(),
 });
 
-export const presentStation = ({ id, name, chainage }: StationModel): Station => ({
+export const presentStation = ({ id, name, chainage, levels }: StationModel): Station => ({
   id,
   name,
   chainage,
+  levels: levels ?? [],
 });

@@ -1,8 +1,10 @@
 import type { CaseFile } from '../../shared/case/caseFile';
 import { worstHazard, type HazardClass } from '../../shared/hazard/hazardClass';
+import type { LevelResult } from '../../shared/runs/levelResult';
 import type { PlacePeaks, RunSeries, RunSurface } from '../../shared/runs/types';
 import type { RunFacts } from '../results/blocks/blockTypes';
 import type { RunBlocks } from '../results/blocks/runBlocks';
+import { levelsAt } from '../results/levelsAt';
 import { peaksAt } from '../results/peaksAt';
 import { seriesAt } from '../results/seriesAt';
 import { surfaceOf } from '../results/surfaceOf';
@@ -32,6 +34,8 @@ export interface RunReport {
   /** The study's stations on the reach; without any, the first, the middle and the last section. */
   places: PlaceSeries[];
   placesAreStations: boolean;
+  /** Levels at the stations against the highest water. */
+  levels: LevelResult[];
 }
 
 /** Places along the long section: more than a page resolves. */
@@ -63,6 +67,7 @@ export async function runReport(
     sections,
     places,
     placesAreStations: stations.length > 0,
+    levels: await levelsAt(blocks, facts.stations),
   };
 }
 

@@ -1,6 +1,7 @@
 import type { PlacePeaks, RunSummary } from '../../shared/runs/types';
 import type { Station } from '../../shared/studies/types';
 import type { RunBlocks } from './blocks/runBlocks';
+import { levelsAt } from './levelsAt';
 import { peaksAt } from './peaksAt';
 
 /** What is read first of a run: peaks at the sections and at the stations, volume balance, warnings. */
@@ -23,6 +24,7 @@ export async function summaryOf(
     inflowPeak: facts.inflowPeak,
     sections: withPeaks(facts.sections, peaks, ({ id }) => ({ id })),
     stations: withPeaks(stations, peaks, ({ id, name }) => ({ stationId: id, name })),
+    levels: await levelsAt(blocks, stations),
     volume: facts.volume,
     structures: facts.structures ?? [],
     reservoir: facts.reservoir ?? null,

@@ -1,3 +1,4 @@
+import type { LevelResult } from '../runs/levelResult';
 /** States of the checking of a routed run, as stored. A run that was never sent has none. */
 export const REVIEW_STATES = ['inCheck', 'returned', 'signed', 'issued', 'withdrawn'] as const;
 export type ReviewState = (typeof REVIEW_STATES)[number];
@@ -158,4 +159,6 @@ export interface IssuedStation {
   withinBanksAgain: number | null;
   leavesBanks: boolean;
   hazard: { label: string; meaning: string } | null;
+  /** As they were when it was signed. */
+  levels: LevelResult[];
 }

@@ -1,6 +1,7 @@
-import { number, object, string, type InferType } from 'yup';
+import { array, number, object, string, type InferType } from 'yup';
 import { LIMITS } from '../limits';
 import { UNIT_SYSTEMS } from '../units/units';
+import { LEVEL_KINDS, type LevelKind } from './stationLevels';
 
 export const studySchema = object({
   title: string().trim().max(LIMITS.textShort).required('Give the study a title.'),
@@ -24,6 +25,22 @@ export const memberSchema = object({
 export const stationSchema = object({
   name: string().trim().max(LIMITS.textShort).required('Name the place.'),
   chainage: number().min(-1e7).max(1e7).required('Give its chainage.'),
+  /** Left out: as they are. */
+  levels: array()
+    .of(
+      object({
+        kind: string()
+          .oneOf(Object.keys(LEVEL_KINDS) as LevelKind[])
+          .required('Choose what it is the level of.'),
+        level: number()
+          .min(-500)
+          .max(9000)
+          .required('Give the level above datum, or remove this line.'),
+        note: string().trim().max(LIMITS.textShort).default(''),
+      }).noUnknown(),
+    )
+    .max(LIMITS.levelsPerStation)
+    .optional(),
 }).noUnknown();
 
 export type StudyBody = InferType<typeof studySchema>;

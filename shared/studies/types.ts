@@ -1,5 +1,6 @@
 import type { Role } from '../accounts/roles';
 import type { UnitSystem } from '../units/units';
+import type { StationLevel } from './stationLevels';
 
 /** Nothing handed in, waiting for an engineer, or what became of it. */
 export type SurveyStanding = 'none' | 'waiting' | 'returned' | 'accepted';
@@ -79,4 +80,6 @@ export interface Station {
   name: string;
   /** m. */
   chainage: number;
+  /** What the water is held against there. Left out in signatures that were given before there was any. */
+  levels?: StationLevel[];
 }

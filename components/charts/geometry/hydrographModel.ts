@@ -1,5 +1,7 @@
+import { type } from '@/components/theme/tokens';
 import { fromSi, type Quantity, type UnitSystem } from '@/shared/units/units';
 import { extentOf, makeFrame, roomyExtent, type Frame } from './frame';
+import { levelLines, levelsNear, type LevelLine, type NamedLevel } from './levelLines';
 import { linePath, project } from './paths';
 import type { Polyline } from './placeLabel';
 import { thinSeries } from './thinSeries';
@@ -21,6 +23,7 @@ export interface HydrographModel {
   valueTicks: number[];
   main: Curve;
   compare: Curve | null;
+  levels: LevelLine[];
   /** px of an SI value. */
   yOf: (value: number) => number;
 }
@@ -35,10 +38,17 @@ export function hydrographModel(
   compare: Series | null,
   quantity: Quantity,
   unitSystem: UnitSystem,
+  levels: readonly NamedLevel[] = [],
 ): HydrographModel {
   const unit = (value: number) => fromSi(value, quantity, unitSystem);
   const rows = compare ? [series.values, compare.values] : [series.values];
-  const [low, high] = extentOf(...rows, ...(quantity === 'elevation' ? [] : [[0]])) ?? [0, 1];
+  const zero = quantity === 'elevation' ? [] : [[0]];
+  const drawn: [number, number] = extentOf(...rows, ...zero) ?? [0, 1];
+  const near = levelsNear(levels, ...drawn, LEAST[quantity] ?? 1);
+  const [low, high] = extentOf(
+    drawn,
+    near.map(({ level }) => level),
+  )!;
   const y = roomyExtent([unit(low), unit(high)], unit(LEAST[quantity] ?? 1), 4);
   const x = extentOf(series.times) ?? [0, 1];
   const frame = makeFrame(size, MARGINS, x, y);
@@ -54,6 +64,7 @@ export function hydrographModel(
     valueTicks: valueTicks(y, frame.bottom - frame.top, 26),
     main: curve(series),
     compare: compare ? curve(within(compare, x)) : null,
+    levels: levelLines(near, yOf, frame.left, type.caption.fontSize),
     yOf,
   };
 }

@@ -6,7 +6,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { IssuedStation } from '@/shared/review/types';
 import { formatQuantity, formatWithUnit } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
-import { floodSentence, hazardTone } from './issuedWords';
+import { floodSentence, freeboardSentence, hazardTone } from './issuedWords';
 
 interface Props {
   station: IssuedStation;
@@ -17,7 +17,7 @@ interface Props {
 /** Peak and arrival in large type, and how dangerous it gets in the guideline's own words. */
 export function StationWords({ station, startsAt, guideline }: Props) {
   const system = useUnitSystem();
-  const { name, chainage, peakStage, peakFlow, depth, hazard } = station;
+  const { name, chainage, peakStage, peakFlow, depth, hazard, levels, times } = station;
   const deepest = depth.reduce((most, value) => Math.max(most, value), 0);
   return (
     <View role="region" aria-label={name} style={styles.block}>
@@ -45,6 +45,11 @@ export function StationWords({ station, startsAt, guideline }: Props) {
           </Txt>
         ))}
       </Txt>
+      {levels.map((result, k) => (
+        <Notice key={k} tone={result.freeboard < 0 ? 'danger' : 'info'} still>
+          <Txt>{freeboardSentence(result, times[times.length - 1] - times[0], system)}</Txt>
+        </Notice>
+      ))}
       {hazard ? (
         <Notice tone={hazardTone(hazard.label)} still>
           <Txt variant="lead" tone={hazardTone(hazard.label) === 'danger' ? 'brick' : 'ink'}>

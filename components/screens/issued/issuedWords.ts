@@ -1,7 +1,10 @@
 import { shortTime } from '@/components/charts/geometry/timeWords';
 import type { NoticeTone } from '@/components/ui/Notice';
 import type { IssuedStation } from '@/shared/review/types';
-import { formatClock } from '@/shared/units/format';
+import type { LevelResult } from '@/shared/runs/levelResult';
+import { levelName } from '@/shared/studies/stationLevels';
+import { formatClock, formatDuration, formatWithUnit } from '@/shared/units/format';
+import type { UnitSystem } from '@/shared/units/units';
 
 /** A piece of a sentence; times stand out. */
 export interface Words {
@@ -49,4 +52,16 @@ export function nearestStation(
 ): IssuedStation | undefined {
   if (at === null) return stations[0];
   return [...stations].sort((a, b) => Math.abs(a.chainage - at) - Math.abs(b.chainage - at))[0];
+}
+
+/** How far the flood stays below a level, or by how much and for how long it passes it. */
+export function freeboardSentence(result: LevelResult, span: number, system: UnitSystem): string {
+  const { freeboard, level, passedAt, passedFor } = result;
+  const name = `${levelName(result)} (${formatWithUnit(level, 'elevation', system)})`;
+  const height = formatWithUnit(Math.abs(freeboard), 'depth', system);
+  const words =
+    passedAt === null
+      ? `${name}: the computed flood stays ${height} below it.`
+      : `${name}: the water passes it at ${shortTime(passedAt, span)}, stands up to ${height} above it, and for ${formatDuration(passedFor)} in all.`;
+  return words;
 }

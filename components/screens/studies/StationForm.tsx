@@ -13,6 +13,7 @@ import { ButtonRow } from '@/components/ui/ButtonRow';
 import { Notice } from '@/components/ui/Notice';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { isOutside, spanText } from './reachSpan';
+import { StationLevels, type TypedLevel } from './StationLevels';
 import { useNewestReachRow } from './useNewestReach';
 
 interface StationFormProps {
@@ -27,6 +28,7 @@ interface StationFormProps {
 interface StationValues {
   name: string;
   chainage: number | null;
+  levels: TypedLevel[];
 }
 
 export function StationForm({ studyId, station, at = null, onDone }: StationFormProps) {
@@ -34,7 +36,11 @@ export function StationForm({ studyId, station, at = null, onDone }: StationForm
   const system = useUnitSystem();
   const reach = useNewestReachRow(studyId);
   const [saved, setSaved] = useState<string | null>(null);
-  const initial: StationValues = { name: station?.name ?? '', chainage: station?.chainage ?? null };
+  const initial: StationValues = {
+    name: station?.name ?? '',
+    chainage: station?.chainage ?? null,
+    levels: station?.levels ?? [],
+  };
   const form = useYupForm({
     schema: stationSchema,
     initial,
@@ -67,6 +73,7 @@ export function StationForm({ studyId, station, at = null, onDone }: StationForm
           {`Outside the surveyed reach, ${spanText(reach, system)}: nothing is computed there, and no table will show it.`}
         </Notice>
       ) : null}
+      <StationLevels />
       <ButtonRow>
         <FormSubmit label={station ? 'Save' : 'Add'} />
         {station ? <Button label="Leave as it was" onPress={onDone} /> : null}

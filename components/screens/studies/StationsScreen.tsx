@@ -10,6 +10,7 @@ import { Loading } from '@/components/ui/Loading';
 import { Table } from '@/components/ui/Table';
 import { Txt } from '@/components/ui/Txt';
 import type { Station } from '@/shared/studies/types';
+import { levelName } from '@/shared/studies/stationLevels';
 import { formatQuantity } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
 import { StationDialog } from './StationDialog';
@@ -80,11 +81,16 @@ export function StationsScreen() {
                 align: 'right',
                 render: (station) => formatQuantity(station.chainage, 'chainage', study.unitSystem),
               },
+              {
+                key: 'levels',
+                title: 'Levels',
+                render: ({ levels = [] }) => levels.map(levelName).join('; ') || '–',
+              },
             ]}
           />
           {mayChange ? (
             <Txt variant="small" tone="soft">
-              Choose one to rename, move or remove it.
+              Choose one to rename, move or remove it, or to change its levels.
             </Txt>
           ) : null}
         </Card>

@@ -1,4 +1,5 @@
 import { HAZARD_CLASSES, HAZARD_GUIDELINE } from '../../../shared/hazard/hazardClass';
+import { levelName } from '../../../shared/studies/stationLevels';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
 import { hydrograph } from '../charts/hydrograph';
 import { longSection } from '../charts/longSection';
@@ -34,6 +35,7 @@ export function results(sheet: Sheet, report: RunReport): void {
   );
   heading(sheet, placesAreStations ? 'At the stations' : 'At the first, middle and last section');
   peakTable(sheet, report, places, placesAreStations ? 'Station' : 'Section');
+  levelTable(sheet, report);
   for (const { name, peaks, series } of places)
     figure(
       sheet,
@@ -99,6 +101,39 @@ function peakTable(
       peaks.attenuation === null ? '–' : `${formatNumber(100 * peaks.attenuation, 1)} %`,
       hazard?.label ?? 'dry',
     ]),
+  );
+}
+
+/** Freeboard of what was named at the stations. */
+function levelTable(sheet: Sheet, { facts, levels }: RunReport): void {
+  if (levels.length === 0) return;
+  const unit = unitsOf(facts.study.unitSystem);
+  heading(sheet, 'Levels at the stations');
+  table(
+    sheet,
+    [
+      { heading: 'Station', share: 2.4 },
+      { heading: 'Level of', share: 3.2 },
+      { heading: 'Level', share: 1.8, align: 'right' },
+      { heading: 'Highest water', share: 1.8, align: 'right' },
+      { heading: 'Freeboard', share: 1.8, align: 'right' },
+      { heading: 'Passed at', share: 1.8, align: 'right' },
+      { heading: 'Passed for', share: 1.8, align: 'right' },
+    ],
+    levels.map((result) => [
+      result.name,
+      levelName(result),
+      unit(result.level, 'elevation'),
+      unit(result.peakStage, 'elevation'),
+      unit(result.freeboard, 'depth'),
+      result.passedAt === null ? 'never' : formatDuration(result.passedAt),
+      result.passedAt === null ? '–' : formatDuration(result.passedFor),
+    ]),
+  );
+  note(
+    sheet,
+    'Freeboard is the level less the highest water; where it is below zero the water stands above the level. The water ' +
+      'surface is level across a section: at a bridge or a house it can stand higher by velocity head, waves or blockage.',
   );
 }
 

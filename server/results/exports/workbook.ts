@@ -3,11 +3,13 @@ import type { CaseFile } from '../../../shared/case/caseFile';
 import { CAUTIONS } from '../../../shared/runs/cautions';
 import type { RunFacts } from '../blocks/blockTypes';
 import type { RunBlocks } from '../blocks/runBlocks';
+import { levelsAt } from '../levelsAt';
 import { seriesAt } from '../seriesAt';
 import { clockTime, type ExportedRun } from './exportedRun';
 import { exportPlaces, type ExportPlace } from './exportPlaces';
 import { EXPORT_UNITS, type ExportUnit } from './exportUnits';
 import { inputsSheet } from './inputsSheet';
+import { levelsSheet } from './levelsSheet';
 import { residualRows } from './residualRows';
 import { structuresSheets } from './structuresSheets';
 
@@ -34,6 +36,9 @@ export async function workbook(
   const book = utils.book_new();
   const add = (name: string, rows: WorkSheet) => utils.book_append_sheet(book, rows, name);
   add('Peaks', peaksSheet(places, run));
+  const levels = await levelsAt(blocks, run.stations);
+  if (levels.length)
+    add('Levels', columnsOf(levelsSheet(levels, run.unitSystem), [26, 16, 36, 14, 16, 16, 16, 16]));
   add('Stage', sheet('stage', length, '0.000'));
   add('Flow', sheet('flow', flow, '0.00'));
   add('Velocity', sheet('velocity', velocity, '0.000'));
@@ -163,6 +168,14 @@ function warningsSheet(facts: RunFacts, run: ExportedRun): Cell[][] {
     ['Error, relative', volume.relativeError],
     [],
     ['Arrival', facts.arrivalThreshold.text],
+    ...(facts.moments.length < facts.times.length
+      ? [
+          [
+            'Moments',
+            `The sheets Stage, Flow and Velocity hold ${facts.moments.length} of the ${facts.times.length} output times, evenly taken. The CSV file holds all of them at the surveyed sections; peaks are of every time step.`,
+          ],
+        ]
+      : []),
     [],
     ...CAUTIONS.map((caution, k): Cell[] => [k === 0 ? 'Cautions' : '', caution]),
   ];

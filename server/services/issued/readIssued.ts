@@ -6,6 +6,7 @@ import type { StudyModel } from '../../models/Study';
 import type { Platform } from '../../platform';
 import type { Actor, Loaded } from '../../policies/subject';
 import type { RunBlocks } from '../../results/blocks/runBlocks';
+import { levelsAt } from '../../results/levelsAt';
 import { mix, placeBetween } from '../../results/placeBetween';
 import { seriesAt } from '../../results/seriesAt';
 import type { ReviewsService } from '../review';
@@ -110,6 +111,7 @@ async function stationOf(blocks: RunBlocks, station: Station): Promise<IssuedSta
     arrival: peaks.arrival,
     ...aboveBanks(times, stage, bank, peaks.peakStage),
     hazard: hazard && { label: hazard.label, meaning: hazard.meaning },
+    levels: await levelsAt(blocks, [station]),
   };
 }
 

@@ -68,6 +68,7 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
         stage={stage}
         sections={summary.sections}
         stations={summary.stations}
+        levels={summary.levels}
         structures={summary.structures}
         {...standing}
         at={at}

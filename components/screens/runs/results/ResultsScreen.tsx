@@ -14,6 +14,7 @@ import { Cautions } from '../Cautions';
 import { runCrumbs } from '../runCrumbs';
 import { AlongCard } from './AlongCard';
 import { ComputedCard } from './ComputedCard';
+import { LevelsCard } from './LevelsCard';
 import { LongSectionCard } from './LongSectionCard';
 import { PeaksCard } from './PeaksCard';
 import { PlaceFigures } from './PlaceFigures';
@@ -81,6 +82,7 @@ export function ResultsScreen({ run, summary }: Props) {
       {summary.structures.length > 0 ? <StructuresCard {...common} /> : null}
       {summary.reservoir ? <ReservoirCard {...common} reservoir={summary.reservoir} /> : null}
       <PeaksCard {...common} />
+      {summary.levels.length > 0 ? <LevelsCard {...common} /> : null}
       <AlongCard {...common} />
       <WarningsCard {...common} />
       <VolumeCard summary={summary} />

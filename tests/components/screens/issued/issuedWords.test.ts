@@ -18,6 +18,7 @@ const station = (change: Partial<IssuedStation> = {}): IssuedStation => ({
   withinBanksAgain: 34 * H,
   leavesBanks: true,
   hazard: null,
+  levels: [],
   ...change,
 });
 const said = (of: IssuedStation, startsAt: string | null = null) =>

@@ -20,6 +20,7 @@ export const summary = (change: Partial<RunSummary> = {}): RunSummary => ({
   inflowPeak: { flow: 490, time: 43_200 },
   sections: [0, 500, 900].map((chainage, i) => ({ ...peaks(chainage), id: `XS-0${i + 1}` })),
   stations: [{ ...peaks(700), stationId: 1, name: 'Sallow Mill' }],
+  levels: [],
   volume: {
     initial: 1000,
     inflow: 45_000_000,
