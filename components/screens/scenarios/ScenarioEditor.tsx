@@ -11,6 +11,7 @@ import { Badge } from '@/components/ui/Badge';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Scenario } from '@/shared/scenarios/types';
+import { structureMarks } from '@/shared/structures/structureMarks';
 import { DetailsPart } from './DetailsPart';
 import { EditorBar } from './EditorBar';
 import { EditorProvider } from './editorContext';
@@ -78,6 +79,7 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
               sections={reach.data.sections}
               stations={stations}
               advice={reach.data.advice}
+              structures={structureMarks(editor.draft.structures)}
               at={at ?? reach.data.firstChainage}
               onChange={setAt}
               unitSystem={system}
