@@ -11,6 +11,7 @@ import { canonical } from '../../../shared/case/canonical';
 import { routeCase } from '../../../server/solvers';
 import type { TaskSet, TaskSetRow } from '../../../shared/tasks/types';
 import type { UserModel } from '../../../server/models/User';
+import { makeCode } from '../../../server/services/review/verificationCode';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { buildRunnable } from '../runs/buildRunnable';
@@ -207,4 +208,45 @@ test('nobody of another firm, no surveyor and no client sees that there is a set
     await theirs.get(`/api/studies/${studyId}/task-sets`).expect(404);
   }
   await ended(id);
+});
+
+test('what a signed run reports of a set stays as it is', async () => {
+  const { models } = server.services;
+  const parameters = [{ key: 'outletSlope', low: 0.5, high: 5000 }];
+  const asked = await ask('sensitivity', { cellSize: 100, parameters }).expect(201);
+  const set = await ended(asked.body.id);
+  expect(set).toMatchObject({ state: 'finished', failed: 1, may: ['taskSet.retry'] });
+  const senior = await buildUser(server.services, ['seniorEngineer'], { firmId: modeller.firmId });
+  const run = await models.Run.findByPk(runId, { rejectOnEmpty: true });
+  const at = new Date();
+  const review = await models.Review.create({
+    runId,
+    state: 'inCheck',
+    sentBy: modeller.id,
+    sentTo: null,
+    sentAt: at,
+    method: '',
+    assumptions: '',
+    limits: '',
+    answers: {},
+    returnReason: null,
+    outletProbeRunId: null,
+  });
+  await models.SignOff.create({
+    runId,
+    reviewId: review.id,
+    signedBy: senior.id,
+    signerName: senior.name,
+    qualification: 'Engineer',
+    registrationNumber: '1',
+    statement: 'Checked.',
+    at,
+    caseHash: run.caseHash,
+    solverVersion: run.solverVersion,
+    verificationCode: makeCode(),
+    supersedesRunId: null,
+    record: Buffer.alloc(0),
+  });
+  const refused = await api.post(`/api/task-sets/${set.id}/retry`).expect(409);
+  expect(refused.body.error.message).toContain('Ask for a new set instead');
 });
