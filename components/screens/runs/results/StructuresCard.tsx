@@ -36,7 +36,7 @@ export function StructuresCard({ run, summary, store }: Props) {
         <Button
           kind="quiet"
           label="Show on the reach"
-          name={`Show ${structure.id} on the reach`}
+          name={`Show on the reach: ${structure.id}`}
           onPress={() => store.setAt(structure.chainage)}
         />
       }

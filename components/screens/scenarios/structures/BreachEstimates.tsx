@@ -42,7 +42,7 @@ export function BreachEstimates() {
       <Button
         kind="quiet"
         label={peaksShown ? 'Hide the peak flows' : 'Show published peak flows'}
-        name={`${peaksShown ? 'Hide' : 'Show'} published peak flows for ${structure.id}`}
+        name={`${peaksShown ? 'Hide the peak flows' : 'Show published peak flows'}: ${structure.id}`}
         onPress={() => showPeaks(!peaksShown)}
       />
       {peaksShown ? (

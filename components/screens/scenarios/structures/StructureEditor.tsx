@@ -104,7 +104,7 @@ export function StructureEditor({ structure, index, copyName, onRemove }: Props)
             <Button
               kind="quiet"
               label="Put it into the dam of the reservoir"
-              name={`Put ${title} into the dam of the reservoir`}
+              name={`Put it into the dam of the reservoir: ${title}`}
               onPress={() => change({ chainage: head })}
             />
           ) : null}
