@@ -1,4 +1,5 @@
 import { Card } from '@/components/ui/Card';
+import { LinkTxt } from '@/components/ui/LinkTxt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary } from '@/shared/runs/types';
 import { formatDuration, formatNumber, formatWithUnit } from '@/shared/units/format';
@@ -28,6 +29,9 @@ export function ComputedCard({ run, summary }: { run: Run; summary: RunSummary }
   return (
     <Card title="How it was computed">
       <Facts facts={facts} />
+      <LinkTxt href={`/studies/${run.studyId}/confidence?run=${run.id}`}>
+        How far these numbers carry
+      </LinkTxt>
     </Card>
   );
 }
