@@ -78,22 +78,26 @@ function Factor({ factor, index }: { factor: RoughnessFactorBody; index: number 
             />
           )}
         </PlacedField>
-        <SelectField
-          label="Multiplier"
-          value={isConstant ? 'constant' : 'depth'}
-          options={[
-            { value: 'constant', label: 'The same at every depth' },
-            { value: 'depth', label: 'By depth' },
-          ]}
-          disabled={disabled}
-          onChange={(kind) =>
-            change(
-              kind === 'constant'
-                ? { depths: [0], factors: factors.slice(0, 1) }
-                : { depths: [0, 2], factors: [factors[0] ?? 1, factors[0] ?? 1] },
-            )
-          }
-        />
+        <PlacedField path={`${path}.kind`} half>
+          {() => (
+            <SelectField
+              label="Multiplier"
+              value={isConstant ? 'constant' : 'depth'}
+              options={[
+                { value: 'constant', label: 'The same at every depth' },
+                { value: 'depth', label: 'By depth' },
+              ]}
+              disabled={disabled}
+              onChange={(kind) =>
+                change(
+                  kind === 'constant'
+                    ? { depths: [0], factors: factors.slice(0, 1) }
+                    : { depths: [0, 2], factors: [factors[0] ?? 1, factors[0] ?? 1] },
+                )
+              }
+            />
+          )}
+        </PlacedField>
         {isConstant ? (
           <PlacedField path={`${path}.factors`} half>
             {(error) => (

@@ -5,6 +5,8 @@ import {
   type CrestPoint,
   type StructureInput,
 } from '@/shared/case/structures';
+import { Faults } from '@/shared/case/validate/faults';
+import { checkStorage } from '@/shared/case/validate/sectionPartFaults';
 import { buildCase, steadyStage } from './caseBuilders';
 import { naturalReach, wildReach } from './naturalReach';
 import { seededRandom } from './seededRandom';
@@ -238,6 +240,10 @@ function addValley(caseFile: CaseFile, chance: Chance): void {
       const left = { from: first, to: between(first + 0.5, banks[0]), ...level };
       const right = { from: between(banks[1], last - 0.5), to: last };
       section.storage = pick([[left], [right], [left, right]]);
+      // A slot without width at the bed can leave a storage part as the lowest ground.
+      const faults = new Faults();
+      checkStorage(faults, 'storage', section.storage, { points, banks }, undefined);
+      if (faults.list.length > 0) delete section.storage;
     }
     if (withEmbankments && random() < 0.8) {
       const at = (x: number) => ({ offset: x, crest: groundAt(points, x) + between(0, 1.5) });

@@ -15,7 +15,7 @@ const COUNT = Number(process.env.REACHES ?? 100);
 /** m/s. No front is faster than Ritter's (1892), 2 √(g H), of all the height that there is; more comes from a fault. */
 const fastestOf = (cells: CellResults): number => {
   const height = Math.max(...cells.peakStage) - Math.min(...cells.bed);
-  return Math.max(10, 2 * Math.sqrt(GRAVITY * height));
+  return Math.max(30, 2 * Math.sqrt(GRAVITY * height));
 };
 
 /** Mean step (s): cells of 20 m at the fastest speed above and Courant number 0.8 give 0.5 s; the last of each interval is cut. */
