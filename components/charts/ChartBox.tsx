@@ -1,11 +1,15 @@
-import type { ReactNode } from 'react';
+import { useRef, type ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 import Svg from 'react-native-svg';
+import { PictureButton } from './picture/PictureButton';
+import { usePictureSource } from './picture/pictureContext';
 import { useWidth } from './useWidth';
 
 interface Props {
   /** What the drawing shows, in a sentence: all that a screen reader is told of it. */
   label: string;
+  /** Symbol of the values' unit, for its picture; left out where the drawing itself tells it. */
+  unit?: string;
   height: number;
   /** Width until the layout is known, px. */
   initialWidth?: number;
@@ -20,10 +24,12 @@ export interface ChartSize {
   height: number;
 }
 
-/** A drawing as wide as the place it is given. */
-export function ChartBox({ label, height, initialWidth, children, over }: Props) {
+/** A drawing as wide as the place it is given; under it, where its source is known, a picture of it to take away. */
+export function ChartBox({ label, unit, height, initialWidth, children, over }: Props) {
   const { width, measured } = useWidth(initialWidth);
-  return (
+  const source = usePictureSource();
+  const outer = useRef<View>(null);
+  const box = (
     <View style={[styles.box, { height }]} {...measured} role="img" aria-label={label}>
       {width > 0 ? (
         <Svg width={width} height={height} style={styles.drawing}>
@@ -33,9 +39,19 @@ export function ChartBox({ label, height, initialWidth, children, over }: Props)
       {width > 0 ? over?.({ width, height }) : null}
     </View>
   );
+  if (!source) return box;
+  const drawing = () =>
+    (outer.current as unknown as HTMLElement | null)?.querySelector('svg') ?? null;
+  return (
+    <View ref={outer} style={styles.outer}>
+      {box}
+      <PictureButton {...{ label, unit, source, drawing }} />
+    </View>
+  );
 }
 
 const styles = StyleSheet.create({
+  outer: { alignSelf: 'stretch' },
   box: { alignSelf: 'stretch' },
   // Out of the flow, so that the drawing never holds its box open when the window narrows.
   drawing: { position: 'absolute', left: 0, top: 0 },

@@ -2,7 +2,7 @@ import { memo, useMemo } from 'react';
 import { Circle, Line, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
 import { formatWithUnit } from '@/shared/units/format';
-import type { Quantity, UnitSystem } from '@/shared/units/units';
+import { UNITS, type Quantity, type UnitSystem } from '@/shared/units/units';
 import { ChartBox, type ChartSize } from './ChartBox';
 import { DragSurface } from './DragSurface';
 import {
@@ -49,6 +49,7 @@ export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
   return (
     <ChartBox
       label={sentence(props, peak)}
+      unit={UNITS[props.unitSystem][props.quantity].symbol}
       height={height}
       initialWidth={props.initialWidth}
       over={(size) =>

@@ -1,4 +1,6 @@
+import { useMemo } from 'react';
 import { StyleSheet, View } from 'react-native';
+import { PictureProvider } from '@/components/charts/picture/pictureContext';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
 import { Cautions } from '@/components/layout/Cautions';
@@ -31,6 +33,15 @@ export function IssuedFlood({ study, result, isClient }: Props) {
   const station = nearestStation(result.stations, at);
   const { sections, stations, startsAt, hazardGuideline, signedAt, signedBy, qualification } =
     result;
+  const source = useMemo(
+    () => ({
+      stem: result.title,
+      study: result.title,
+      run: `By ${signedBy}, ${formatDay(signedAt)}`,
+      state: 'Signed',
+    }),
+    [result.title, signedBy, signedAt],
+  );
   return (
     <>
       {sections.length && station ? (
@@ -49,7 +60,9 @@ export function IssuedFlood({ study, result, isClient }: Props) {
             <StationWords station={station} startsAt={startsAt} guideline={hazardGuideline} />
           </View>
           <View style={isWide ? styles.curves : styles.phone}>
-            <IssuedCurves key={station.stationId} {...{ station, startsAt, store }} />
+            <PictureProvider value={source}>
+              <IssuedCurves key={station.stationId} {...{ station, startsAt, store }} />
+            </PictureProvider>
           </View>
         </View>
       ) : (

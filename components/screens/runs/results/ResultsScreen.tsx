@@ -1,3 +1,6 @@
+import { useMemo } from 'react';
+import { PictureProvider } from '@/components/charts/picture/pictureContext';
+import { pictureSource } from '@/components/charts/picture/pictureSource';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
@@ -35,7 +38,16 @@ interface Props {
 }
 
 /** The place by the reach ribbon, the time by the flood itself, and every drawing follows both. */
-export function ResultsScreen({ run, summary }: Props) {
+export function ResultsScreen(props: Props) {
+  const { run } = props;
+  return (
+    <PictureProvider value={useMemo(() => pictureSource(run), [run])}>
+      <Results {...props} />
+    </PictureProvider>
+  );
+}
+
+function Results({ run, summary }: Props) {
   const store = usePlaceAndTimeStore();
   useFirstLook(store, summary);
   const { isWide } = useBreakpoint();

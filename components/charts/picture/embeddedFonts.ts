@@ -1,0 +1,38 @@
+import { fonts } from '@/components/theme/tokens';
+
+/** An image sees no font of the page: rules that carry the two weights of the drawings within them. */
+export async function embeddedFonts(): Promise<string> {
+  const wanted: [string, number][] = [
+    [fonts.regular, 400],
+    [fonts.semibold, 600],
+  ];
+  const rules = await Promise.all(
+    wanted.map(async ([family, weight]) => {
+      const address = addressOf(family);
+      if (!address) return '';
+      const url = await asDataUrl(await (await fetch(address)).blob());
+      return `@font-face{font-family:"Source Sans 3";font-weight:${weight};src:url(${url})}`;
+    }),
+  );
+  return rules.join('');
+}
+
+/** Where the page has a font from; null where it has none of the name. */
+function addressOf(family: string): string | null {
+  for (const sheet of document.styleSheets)
+    for (const rule of sheet.cssRules) {
+      if (!(rule instanceof CSSFontFaceRule)) continue;
+      if (!rule.style.getPropertyValue('font-family').includes(family)) continue;
+      const found = rule.style.getPropertyValue('src').match(/url\(["']?([^"')]+)/);
+      if (found) return new URL(found[1], sheet.href ?? document.baseURI).href;
+    }
+  return null;
+}
+
+const asDataUrl = (blob: Blob): Promise<string> =>
+  new Promise((resolve, reject) => {
+    const reader = new FileReader();
+    reader.onload = () => resolve(reader.result as string);
+    reader.onerror = () => reject(reader.error ?? new Error('The font could not be read.'));
+    reader.readAsDataURL(blob);
+  });
