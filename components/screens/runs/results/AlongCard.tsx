@@ -60,12 +60,14 @@ export function AlongCard({ summary, store }: Props) {
       title="Hazard and arrival"
       aside={
         summary.stations.length ? (
-          <Button
-            kind="quiet"
-            label={all ? 'Stations only' : 'All sections'}
-            name={all ? 'Hazard at the stations only' : 'Hazard at all sections'}
-            onPress={() => setAll(!all)}
-          />
+          <View style={styles.aside}>
+            <Button
+              kind="quiet"
+              label={all ? 'Stations only' : 'All sections'}
+              name={all ? 'Stations only: hazard' : 'All sections: hazard'}
+              onPress={() => setAll(!all)}
+            />
+          </View>
         ) : undefined
       }
     >
@@ -155,6 +157,8 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
 }
 
 const styles = StyleSheet.create({
+  // Of one line with the title, though the button is taller.
+  aside: { flexDirection: 'row', alignItems: 'center' },
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two },
   field: { flexGrow: 1, flexBasis: 160, minWidth: 0 },
 });
