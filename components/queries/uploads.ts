@@ -63,6 +63,7 @@ function transfer(studyId: number, file: File, { signal, onTransfer }: SendOptio
       retryDelays: null,
       metadata: { filename: file.name },
       removeFingerprintOnSuccess: true,
+      fingerprint: () => fingerprintOf(studyId, file),
       onBeforeRequest: (request) => {
         const token = getAccessToken();
         if (token) request.setHeader('Authorization', `Bearer ${token}`);
@@ -107,6 +108,19 @@ function transfer(studyId: number, file: File, { signal, onTransfer }: SendOptio
       })
       .catch(reject);
   });
+}
+
+/**
+ * By what a file is known again after a reload: its content, for phones tell another date of it each time it is chosen.
+ * Where the page may not hash (no secure connection) its date must do.
+ */
+async function fingerprintOf(studyId: number, file: File): Promise<string> {
+  const content = crypto.subtle
+    ? [...new Uint8Array(await crypto.subtle.digest('SHA-256', await file.arrayBuffer()))]
+        .map((byte) => byte.toString(16).padStart(2, '0'))
+        .join('')
+    : String(file.lastModified);
+  return ['spate', studyId, file.name, file.size, content].join('-');
 }
 
 function refusalOf(error: DetailedError): ApiError {
