@@ -60,6 +60,8 @@ export interface RunModel extends Model<
   study?: NonAttribute<StudyModel>;
   requester?: NonAttribute<UserModel>;
   review?: NonAttribute<ReviewModel | null>;
+  /** The check whose outlet this run tries. */
+  triedFor?: NonAttribute<ReviewModel | null>;
   signOff?: NonAttribute<SignOffModel | null>;
   issue?: NonAttribute<IssueModel | null>;
   withdrawal?: NonAttribute<WithdrawalModel | null>;

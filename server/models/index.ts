@@ -93,6 +93,7 @@ export function defineModels(sequelize: Sequelize) {
   models.Run.hasOne(models.Issue, { as: 'issue', foreignKey: 'runId' });
   models.Run.hasOne(models.Withdrawal, { as: 'withdrawal', foreignKey: 'runId' });
   models.Review.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
+  models.Run.hasOne(models.Review, { as: 'triedFor', foreignKey: 'outletProbeRunId' });
   models.Review.belongsTo(models.Run, { as: 'outletProbe', foreignKey: 'outletProbeRunId' });
   models.Review.belongsTo(models.User, { as: 'sender', foreignKey: 'sentBy' });
   models.Review.belongsTo(models.User, { as: 'recipient', foreignKey: 'sentTo' });

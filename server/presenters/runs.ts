@@ -35,6 +35,7 @@ export const presentRun = (run: RunModel, actor: Actor): Run => ({
   attempts: run.attempts,
   failure: run.failure ?? null,
   inflow: run.inflow,
+  triesOutlet: Boolean(run.triedFor),
   may: actionsOf(run, actor),
 });
 

@@ -3,6 +3,7 @@ import type { HazardClass } from '../hazard/hazardClass';
 import type { ReviewState } from '../review/types';
 import type { LevelResult } from './levelResult';
 import type { AlongQuery } from './schemas';
+import type { Said } from '../units/message';
 import type { StructureMark } from '../structures/structureMarks';
 
 /** States of a run, as stored. The words for them are in `RUN_STATE_WORDS`. */
@@ -57,6 +58,8 @@ export interface Run extends RunRow {
   failure: string | null;
   /** Inflow of the reach for the time ribbon, at most 400 points: s and m³/s. From a reservoir it is known once it is routed. */
   inflow: { times: number[]; flows: number[] };
+  /** It only tries the outlet of another run and is not checked itself. */
+  triesOutlet: boolean;
   may: ('run.cancel' | 'run.retry' | 'run.read')[];
 }
 
@@ -101,9 +104,9 @@ export interface RunSummary {
   structures: RunStructure[];
   /** null where the upstream end is no reservoir. */
   reservoir: RunReservoir | null;
-  warnings: { code: string; message: string; chainage: number | null; time: number | null }[];
-  /** The rule by which arrival was told, in words. */
-  arrivalRule: string;
+  warnings: (Said & { code: string; chainage: number | null; time: number | null })[];
+  /** The rule by which arrival was told. */
+  arrivalRule: Said;
   steps: number;
   cellUpdates: number;
   seconds: number;

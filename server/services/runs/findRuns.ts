@@ -4,7 +4,7 @@ import type { Actor, Loaded } from '../../policies/subject';
 import { studySubject } from '../studies/studySubject';
 
 /** What tells where the checking of a run stands. */
-const CHECKING = ['review', 'signOff', 'issue', 'withdrawal'].map((association) => ({
+const CHECKING = ['review', 'triedFor', 'signOff', 'issue', 'withdrawal'].map((association) => ({
   association,
   attributes: association === 'review' ? ['id', 'state'] : ['id'],
 }));

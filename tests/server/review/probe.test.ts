@@ -31,6 +31,7 @@ test('a second run with a changed outlet is routed, and its effect stands in the
   );
   const own: Review = (await api.get(`/api/runs/${runId}/review`).expect(200)).body;
   expect(own).toMatchObject({ triesOutletOf: asked.body.number, may: [] });
+  expect((await api.get(`/api/runs/${runId}`).expect(200)).body.triesOutlet).toBe(true);
   const note = { method: 'M', assumptions: 'A', limits: 'L' };
   const refused = await api.post(`/api/runs/${runId}/review`).send(note).expect(409);
   expect(refused.body.error.message).toContain('only tries the outlet');
