@@ -66,6 +66,8 @@ describe('a signed report', () => {
       'Sensitivity Not done.',
       'Cell-size convergence Not done.',
       'Fast water.',
+      'Mill bridge Bridge soffit',
+      '52.40 m 52.00 m 0.40 m never',
       ...CAUTIONS,
     ])
       expect(text).toContain(words);

@@ -36,7 +36,12 @@ export function sampleFacts(given: Partial<ReportFacts> = {}): ReportFacts {
       solverVersion: '1.0.0',
     },
     stations: [
-      { id: 1, name: 'Mill bridge', chainage: 1000 },
+      {
+        id: 1,
+        name: 'Mill bridge',
+        chainage: 1000,
+        levels: [{ kind: 'soffit', level: 52.4, note: '' }],
+      },
       { id: 2, name: 'Ferrin quay', chainage: 1700 },
     ],
     confidence: [],
