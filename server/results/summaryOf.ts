@@ -1,3 +1,4 @@
+import { arrivalRule } from '../../shared/runs/arrivalRule';
 import type { PlacePeaks, RunSummary } from '../../shared/runs/types';
 import type { Station } from '../../shared/studies/types';
 import type { RunBlocks } from './blocks/runBlocks';
@@ -29,7 +30,7 @@ export async function summaryOf(
     structures: facts.structures ?? [],
     reservoir: facts.reservoir ?? null,
     warnings: facts.warnings,
-    arrivalRule: facts.arrivalThreshold.text,
+    arrivalRule: arrivalRule(facts.arrivalThreshold),
     steps: facts.steps,
     cellUpdates: facts.cellUpdates,
     seconds: facts.seconds,

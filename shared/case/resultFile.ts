@@ -1,3 +1,5 @@
+import type { Said } from '../units/message';
+
 /** The result file: what a run gives back. SI throughout; see caseFile.ts. */
 
 export const RESULT_FORMAT = 'spate-result/1';
@@ -130,9 +132,8 @@ export type WarningCode =
   | 'ratingExceeded'
   | 'banksUnpaired';
 
-export interface RunWarning {
+export interface RunWarning extends Said {
   code: WarningCode;
-  message: string;
   chainage: number | null;
   time: number | null;
 }

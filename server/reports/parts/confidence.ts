@@ -2,6 +2,7 @@ import type { ConfidenceKind } from '../../../shared/confidence/schemas';
 import type { ChecklistItem } from '../../../shared/review/types';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
 import type { UnitSystem } from '../../../shared/units/units';
+import { sayIn } from '../../../shared/units/message';
 import type { Sheet } from '../pdf/sheet';
 import { facts as factRows, table } from '../pdf/table';
 import { heading, paragraph, partHeading } from '../pdf/writing';
@@ -48,10 +49,10 @@ export function confidence(sheet: Sheet, { facts, run }: RunReport): void {
         { heading: 'Time', share: 1.6, align: 'right' },
         { heading: 'In words', share: 8 },
       ],
-      warnings.map(({ message, chainage, time }) => [
-        chainage === null ? 'whole reach' : unit(chainage, 'chainage'),
-        time === null ? '–' : formatDuration(time),
-        message,
+      warnings.map((warning) => [
+        warning.chainage === null ? 'whole reach' : unit(warning.chainage, 'chainage'),
+        warning.time === null ? '–' : formatDuration(warning.time),
+        sayIn(facts.study.unitSystem, warning),
       ]),
     );
 }

@@ -1,4 +1,6 @@
 import { ROUGHNESS_SOURCE } from '../../../shared/reaches/roughnessTable';
+import { arrivalRule } from '../../../shared/runs/arrivalRule';
+import { sayIn } from '../../../shared/units/message';
 import type { Sheet } from '../pdf/sheet';
 import { heading, list, paragraph, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
@@ -22,7 +24,7 @@ export function method(sheet: Sheet, { facts, run }: RunReport): void {
   );
   paragraph(
     sheet,
-    `Arrival is told by this rule: ${run.arrivalThreshold.text} Peaks are taken over every time step, not over the output ` +
+    `Arrival is told by this rule: ${sayIn(facts.study.unitSystem, arrivalRule(run.arrivalThreshold))} Peaks are taken over every time step, not over the output ` +
       `times alone. Solver version ${facts.run.solverVersion}: the same case gives the same result.`,
   );
   heading(sheet, 'Sources');

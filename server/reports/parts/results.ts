@@ -1,6 +1,8 @@
 import { HAZARD_CLASSES, HAZARD_GUIDELINE } from '../../../shared/hazard/hazardClass';
 import { levelName } from '../../../shared/studies/stationLevels';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
+import { arrivalRule } from '../../../shared/runs/arrivalRule';
+import { sayIn } from '../../../shared/units/message';
 import { hydrograph } from '../charts/hydrograph';
 import { longSection } from '../charts/longSection';
 import { figure } from '../pdf/figure';
@@ -63,7 +65,7 @@ export function results(sheet: Sheet, report: RunReport): void {
   const { startsAt } = facts.run;
   note(
     sheet,
-    `Times from the start of the run${startsAt ? `, ${momentText(startsAt)}` : ''}. Arrival: ${run.arrivalThreshold.text}`,
+    `Times from the start of the run${startsAt ? `, ${momentText(startsAt)}` : ''}. Arrival: ${sayIn(facts.study.unitSystem, arrivalRule(run.arrivalThreshold))}`,
   );
   hazardWords(sheet, [...places, ...sections]);
 }

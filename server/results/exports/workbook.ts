@@ -1,6 +1,8 @@
 import { utils, write, type WorkSheet } from 'xlsx';
 import type { CaseFile } from '../../../shared/case/caseFile';
 import { CAUTIONS } from '../../../shared/runs/cautions';
+import { arrivalRule } from '../../../shared/runs/arrivalRule';
+import { sayIn } from '../../../shared/units/message';
 import type { RunFacts } from '../blocks/blockTypes';
 import type { RunBlocks } from '../blocks/runBlocks';
 import { levelsAt } from '../levelsAt';
@@ -148,11 +150,11 @@ function format(sheet: WorkSheet, firstColumn: number, formats: string[], headin
 function warningsSheet(facts: RunFacts, run: ExportedRun): Cell[][] {
   const { length, volume: cubic } = EXPORT_UNITS[run.unitSystem];
   const { volume } = facts;
-  const warnings = facts.warnings.map(({ code, message, chainage, time }): Cell[] => [
-    code,
-    chainage === null ? null : chainage / length.si,
-    time === null ? null : time / HOUR,
-    message,
+  const warnings = facts.warnings.map((warning): Cell[] => [
+    warning.code,
+    warning.chainage === null ? null : warning.chainage / length.si,
+    warning.time === null ? null : warning.time / HOUR,
+    sayIn(run.unitSystem, warning),
   ]);
   return [
     ['Warnings of the run', `Chainage (${length.symbol})`, 'Time (h)', 'In words'],
@@ -167,7 +169,7 @@ function warningsSheet(facts: RunFacts, run: ExportedRun): Cell[][] {
     ['Error', volume.error / cubic.si],
     ['Error, relative', volume.relativeError],
     [],
-    ['Arrival', facts.arrivalThreshold.text],
+    ['Arrival', sayIn(run.unitSystem, arrivalRule(facts.arrivalThreshold))],
     ...(facts.moments.length < facts.times.length
       ? [
           [

@@ -1,5 +1,6 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import type { RunWarning, SectionResult } from '../../../shared/case/resultFile';
+import { q, say } from '../../../shared/units/message';
 import { LEAST_SPREAD } from '../geometry/parts';
 import type { Grid } from '../geometry/grid';
 import type { Workspace } from '../workspace';
@@ -14,7 +15,6 @@ export interface RunWarnings {
 }
 
 const hours = (seconds: number): string => `${(seconds / 3600).toFixed(2)} h`;
-const metres = (value: number): string => `${value.toFixed(0)} m`;
 
 export function createRunWarnings(
   caseFile: CaseFile,
@@ -109,9 +109,7 @@ export function createRunWarnings(
       if (fast.length > 0) {
         warnings.push({
           code: 'supercritical',
-          message:
-            `Flow is supercritical over up to ${metres(fast.length)} of the reach (at ${hours(fast.time)}, first at ` +
-            `chainage ${metres(fast.chainage)}). Long supercritical flow is rare in natural rivers: check slope and roughness there.`,
+          ...say`Flow is supercritical over up to ${q(fast.length, 'length', { decimals: 0 })} of the reach (at ${hours(fast.time)}, first at chainage ${q(fast.chainage, 'chainage')}). Long supercritical flow is rare in natural rivers: check slope and roughness there.`,
           chainage: fast.chainage,
           time: fast.time,
         });
@@ -131,9 +129,7 @@ export function createRunWarnings(
         if (outlet.highest > top + 1e-6) {
           warnings.push({
             code: 'ratingExceeded',
-            message:
-              `The outlet rating ends at ${top.toFixed(2)} m; the water there rose to ${outlet.highest.toFixed(2)} m ` +
-              `(${hours(outlet.highestTime)}). Beyond its end the rating was continued along its last line: extend it.`,
+            ...say`The outlet rating ends at ${q(top, 'elevation')}; the water there rose to ${q(outlet.highest, 'elevation')} (${hours(outlet.highestTime)}). Beyond its end the rating was continued along its last line: extend it.`,
             chainage: sections[sections.length - 1].chainage,
             time: outlet.highestTime,
           });
@@ -142,9 +138,7 @@ export function createRunWarnings(
       if (missingLateral > 1e-6) {
         warnings.push({
           code: 'lateralLimited',
-          message:
-            `Lateral withdrawals asked for ${missingLateral.toPrecision(3)} m³ more than there was; ` +
-            'only the water that was there was taken.',
+          ...say`Lateral withdrawals asked for ${q(missingLateral, 'volume', { figures: 3 })} more than there was; only the water that was there was taken.`,
           chainage: null,
           time: null,
         });
@@ -170,10 +164,7 @@ export function createRunWarnings(
     if (count === 0) return;
     warnings.push({
       code: 'aboveSurvey',
-      message:
-        `Water rose above the surveyed ends of ${count} of ${results.length} sections, most at ${results[worst].id}: ` +
-        `by ${excess.toFixed(2)} m at ${hours(results[worst].peak.stageTime)}. Beyond its ends a section is continued ` +
-        'by vertical walls without friction, so real water would spread wider and stand lower: extend the survey.',
+      ...say`Water rose above the surveyed ends of ${count} of ${results.length} sections, most at ${results[worst].id}: by ${q(excess, 'depth')} at ${hours(results[worst].peak.stageTime)}. Beyond its ends a section is continued by vertical walls without friction, so real water would spread wider and stand lower: extend the survey.`,
       chainage: results[worst].chainage,
       time: results[worst].peak.stageTime,
     });

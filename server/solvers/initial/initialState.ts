@@ -1,5 +1,6 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import type { RunWarning } from '../../../shared/case/resultFile';
+import { q, say } from '../../../shared/units/message';
 import type { CellState } from '../geometry/cellState';
 import type { CellTables } from '../geometry/cellTables';
 import type { Grid } from '../geometry/grid';
@@ -51,9 +52,7 @@ export function setInitialState(
         const chainage = grid.chainage[limited - 1];
         warn({
           code: 'initialLimited',
-          message:
-            `The initial profile asks for more flow than its water can carry, first at chainage ` +
-            `${chainage.toFixed(0)} m: it was cut to Froude number ${FASTEST_FROUDE}. Check its stages against the bed.`,
+          ...say`The initial profile asks for more flow than its water can carry, first at chainage ${q(chainage, 'chainage')}: it was cut to Froude number ${FASTEST_FROUDE}. Check its stages against the bed.`,
           chainage,
           time: 0,
         });
@@ -70,10 +69,7 @@ export function setInitialState(
       if (Math.abs(face - initial.chainage) > 1e-6 * grid.dx) {
         warn({
           code: 'damMoved',
-          message:
-            `The dam stands at chainage ${initial.chainage.toFixed(2)} m; the nearest boundary between cells is ` +
-            `at ${face.toFixed(2)} m, where the water is parted. Choose a cell size that divides the ` +
-            `distance if that matters.`,
+          ...say`The dam stands at chainage ${q(initial.chainage, 'chainage', { decimals: 2 })}; the nearest boundary between cells is at ${q(face, 'chainage', { decimals: 2 })}, where the water is parted. Choose a cell size that divides the distance if that matters.`,
           chainage: face,
           time: 0,
         });

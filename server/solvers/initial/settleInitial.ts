@@ -1,3 +1,4 @@
+import { q, say } from '../../../shared/units/message';
 import type { FaceFlow } from '../diagnostics/faceFlow';
 import { createVolumeLedger } from '../diagnostics/volumeLedger';
 import type { RunWarnings } from '../diagnostics/runWarnings';
@@ -42,10 +43,7 @@ export function settleInitial(parts: SettleParts, polling: Polling, warnings: Ru
   if (residual <= WORTH_WARNING) return;
   warnings.add({
     code: 'initialNotSettled',
-    message:
-      `The initial steady state did not settle: at chainage ${chainage.toFixed(0)} m the flow is still ` +
-      `${(100 * residual).toPrecision(2)} % off. Begin the inflow with some hours of steady flow, or give the ` +
-      'initial state as a profile.',
+    ...say`The initial steady state did not settle: at chainage ${q(chainage, 'chainage')} the flow is still ${(100 * residual).toPrecision(2)} % off. Begin the inflow with some hours of steady flow, or give the initial state as a profile.`,
     chainage,
     time: 0,
   });

@@ -1,5 +1,6 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
 import type { RunWarning } from '../../../shared/case/resultFile';
+import { q, say } from '../../../shared/units/message';
 import type { Boundary } from '../boundaries/boundary';
 import { risingRoot } from '../boundaries/rootNear';
 import type { CellTables } from '../geometry/cellTables';
@@ -85,9 +86,7 @@ export function createStructureSet(
   function warnMoved(id: string, from: number, to: number): void {
     warn({
       code: 'structureMoved',
-      message:
-        `${id} stands at chainage ${from.toFixed(2)} m; the nearest boundary between cells is at ` +
-        `${to.toFixed(2)} m, where it is computed. Choose a cell size that divides the distance if that matters.`,
+      ...say`${id} stands at chainage ${q(from, 'chainage', { decimals: 2 })}; the nearest boundary between cells is at ${q(to, 'chainage', { decimals: 2 })}, where it is computed. Choose a cell size that divides the distance if that matters.`,
       chainage: to,
       time: null,
     });

@@ -86,7 +86,7 @@ describe('summary', () => {
     expect(summary.cellCount).toBe(100);
     expect(summary.cellSize).toBe(25);
     expect(summary.warnings).toEqual(result.warnings);
-    expect(summary.arrivalRule).toBe(result.arrivalThreshold.text);
+    expect(summary.arrivalRule.message).toBe(result.arrivalThreshold.text);
   });
 });
 

@@ -144,7 +144,7 @@ test('the summary has peaks at sections and stations, the balance and the rule o
   expect(summary.stations[1].attenuation).toBe(1 - expected.sections[2].peak.flow / 120);
   expect(summary.volume).toEqual(expected.volume);
   expect(summary.warnings).toEqual(expected.warnings);
-  expect(summary.arrivalRule).toBe(expected.arrivalThreshold.text);
+  expect(summary.arrivalRule.message).toBe(expected.arrivalThreshold.text);
   expect(summary).toMatchObject({ cellCount: 40, cellSize: 50, steps: expected.steps });
 });
 

@@ -10,6 +10,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { PlacePeaks, RunSummary } from '@/shared/runs/types';
 import { formatQuantity, formatWithUnit } from '@/shared/units/format';
+import { sayIn } from '@/shared/units/message';
 import { UNITS, type UnitSystem } from '@/shared/units/units';
 import { attenuationFigure } from '../runWords';
 
@@ -54,7 +55,7 @@ export function PeaksCard({ summary, store }: Props) {
         maxHeight={420}
       />
       <Txt variant="small" tone="soft">
-        {arrivalRule}
+        {sayIn(unitSystem, arrivalRule)}
       </Txt>
     </Card>
   );

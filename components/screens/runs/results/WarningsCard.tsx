@@ -9,6 +9,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { RunSummary } from '@/shared/runs/types';
 import { formatWithUnit } from '@/shared/units/format';
+import { sayIn } from '@/shared/units/message';
 
 type Warning = RunSummary['warnings'][number];
 
@@ -38,7 +39,7 @@ export function WarningsCard({ summary, store }: Props) {
 function Line({ warning, summary, store }: Props & { warning: Warning }) {
   const { colours } = useTheme();
   const unitSystem = useUnitSystem();
-  const { chainage, time, message } = warning;
+  const { chainage, time } = warning;
   const span = summary.times.end - summary.times.start;
   const where = [
     chainage === null ? null : formatWithUnit(chainage, 'chainage', unitSystem),
@@ -51,7 +52,7 @@ function Line({ warning, summary, store }: Props & { warning: Warning }) {
     });
   return (
     <View role="listitem" style={[styles.line, { borderTopColor: colours.line }]}>
-      <Txt>{message}</Txt>
+      <Txt>{sayIn(unitSystem, warning)}</Txt>
       {where.length ? (
         <Button kind="quiet" label={`Show ${where.join(', ')}`} onPress={show} />
       ) : null}

@@ -33,7 +33,7 @@ export const summary = (change: Partial<RunSummary> = {}): RunSummary => ({
   structures: [],
   reservoir: null,
   warnings: [],
-  arrivalRule: 'Arrival: 0.1 m above the first stage.',
+  arrivalRule: { message: 'Arrival: 0.1 m above the first stage.' },
   steps: 34_120,
   cellUpdates: 29_000_000,
   seconds: 12.3,
