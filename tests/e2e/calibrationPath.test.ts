@@ -1,4 +1,4 @@
-import type { Browser } from 'playwright-core';
+import type { Browser, Page } from 'playwright-core';
 import { DEMO_PASSWORD } from '@/seed/accounts';
 import { emailOf } from '../helpers/accounts';
 import { apiOf } from '../helpers/api';
@@ -6,7 +6,6 @@ import { axeViolations } from '../helpers/axe';
 import { launchBrowser, sidewaysOverflow, SIZES, visit, type Size } from '../helpers/browser';
 import { signIn } from '../helpers/steps';
 import type { RunRow } from '@/shared/runs/types';
-import type { Page } from 'playwright-core';
 
 jest.setTimeout(300_000);
 
