@@ -3,6 +3,7 @@ import { proposals } from '../../shared/scenarios/proposals';
 import type { Scenario, ScenarioRow } from '../../shared/scenarios/types';
 import type { Section } from '../../shared/surveys/types';
 import type { ScenarioModel } from '../models/Scenario';
+import type { UnitSystem } from '../../shared/units/units';
 
 /** Needs the scenario's `updater`. */
 export const presentScenarioRow = (scenario: ScenarioModel, runCount: number): ScenarioRow => ({
@@ -21,10 +22,11 @@ export const presentScenario = (
   scenario: ScenarioModel,
   runCount: number,
   sections: Section[],
+  system: UnitSystem,
 ): Scenario => ({
   ...presentScenarioRow(scenario, runCount),
   studyId: scenario.studyId,
   body: scenario.body,
-  ...checkScenario(scenario.body, sections),
+  ...checkScenario(scenario.body, sections, system),
   proposals: proposals(sections, scenario.body.upstream),
 });

@@ -19,11 +19,12 @@ export function scenarioRoutes({ authenticate, scenarios, studies }: Services): 
     scenarios.load(pathId(req, 'scenarioId'), actor);
 
   async function present(record: ScenarioModel) {
-    const [counts, sections] = await Promise.all([
+    const [counts, sections, system] = await Promise.all([
       scenarios.runCounts([record.id]),
       scenarios.sectionsOf(record),
+      scenarios.unitSystemOf(record),
     ]);
-    return presentScenario(record, counts.get(record.id) ?? 0, sections);
+    return presentScenario(record, counts.get(record.id) ?? 0, sections, system);
   }
 
   router.get(

@@ -1,4 +1,5 @@
 import type { Section } from '../surveys/types';
+import type { MessagePart, Said } from '../units/message';
 
 /**
  * The geometry that is routed: the sections of an accepted survey revision with the modeller's bank marks and roughness, or
@@ -53,13 +54,14 @@ export type AdviceCode =
   'spacing' | 'adverseSlope' | 'conveyanceJump' | 'noBanks' | 'roughnessRange' | 'lowEnds';
 
 /** Something that a careful modeller would look at, with its reason and its source. */
-export interface Advice {
+export interface Advice extends Said {
   code: AdviceCode;
   /** Sections it is about: one, or the two of an interval. */
   sectionIds: string[];
   /** m, where it is shown on the ribbon. */
   chainage: number;
-  message: string;
   reason: string;
+  /** Of the reason, where it has quantities. */
+  reasonParts?: MessagePart[];
   source: string;
 }

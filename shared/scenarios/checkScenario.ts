@@ -12,16 +12,18 @@ import { checkUpstream } from './checks/checkUpstream';
 import { Findings } from './checks/Findings';
 import { reachFacts } from './checks/reachFacts';
 import type { ScenarioBody } from './schemas';
+import type { UnitSystem } from '../units/units';
 
 /**
  * What keeps a scenario from being routed on these sections (faults) and what a careful person would look at (doubts), each
- * at its path in the body. Pure: the form uses it as one types, the server before a run. Covers all that the solver would refuse.
+ * at its path in the body, told in the units of the study. Pure: the form uses it as one types, the server before a run. Covers all that the solver would refuse.
  */
 export function checkScenario(
   body: ScenarioBody,
   sections: readonly Section[],
+  system: UnitSystem = 'metric',
 ): { faults: Fault[]; doubts: Fault[] } {
-  const findings = new Findings();
+  const findings = new Findings(system);
   if (!body.name.trim()) findings.fault('name', 'Name the scenario.');
   checkReachOf(sections, findings);
   if (sections.length >= 2) {

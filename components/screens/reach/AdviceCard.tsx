@@ -9,6 +9,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Advice } from '@/shared/reaches/types';
 import { formatWithUnit } from '@/shared/units/format';
 import { ADVICE_NAMES, groupAdvice, type AdviceGroup } from './groupAdvice';
+import { sayIn } from '@/shared/units/message';
 
 interface AdviceCardProps {
   advice: readonly Advice[];
@@ -48,7 +49,8 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
         {items.length > 1 ? ` · ${items.length} places` : ''}
       </Txt>
       <View role="list" aria-label={ADVICE_NAMES[code]}>
-        {shown.map(({ chainage, sectionIds, message, reason }) => {
+        {shown.map((advice) => {
+          const { chainage, sectionIds, reason, reasonParts } = advice;
           const place = formatWithUnit(chainage, 'chainage', system);
           return (
             <View key={`${chainage}${sectionIds.join()}`} role="listitem" style={styles.item}>
@@ -59,9 +61,9 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
                 onPress={() => onChoose(chainage)}
               />
               <View style={styles.words}>
-                <Txt>{message}</Txt>
+                <Txt>{sayIn(system, advice)}</Txt>
                 <Txt variant="small" tone="soft">
-                  {reason}
+                  {sayIn(system, { message: reason, parts: reasonParts })}
                 </Txt>
               </View>
             </View>

@@ -1,6 +1,7 @@
 import { useEffect, useMemo, useReducer, useState } from 'react';
 import { isApiError } from '@/components/queries/ApiError';
 import { useSaveScenario } from '@/components/queries/scenarios';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Fault } from '@/shared/errors';
 import type { Reach } from '@/shared/reaches/types';
 import { canonical } from '@/shared/case/canonical';
@@ -89,11 +90,12 @@ const baseOf = ({ version, body }: { version: number; body: ScenarioBody }): Bas
 
 /** Faults and doubts as one types; none while the reach is being read. */
 function useCheck(body: ScenarioBody, reach: Reach | undefined, clockFault: string | null) {
+  const system = useUnitSystem();
   return useMemo(() => {
-    const { faults, doubts } = reach ? checkScenario(body, reach.sections) : NOT_CHECKED;
+    const { faults, doubts } = reach ? checkScenario(body, reach.sections, system) : NOT_CHECKED;
     const own: Fault[] = clockFault ? [{ path: 'startsAt', message: clockFault }] : [];
     return { faults: [...own, ...faults], doubts };
-  }, [body, reach, clockFault]);
+  }, [body, reach, clockFault, system]);
 }
 
 const NOT_CHECKED: { faults: Fault[]; doubts: Fault[] } = { faults: [], doubts: [] };

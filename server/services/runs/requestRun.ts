@@ -13,6 +13,7 @@ import { inflowOutline } from '../../results/inflowOutline';
 import { SOLVER_VERSION } from '../../solvers';
 import { touchStudy } from '../studies/touchStudy';
 import { freezeCase } from './freezeCase';
+import type { StudyModel } from '../../models/Study';
 
 /** What a run is made of beside its case. */
 interface RunOf {
@@ -78,7 +79,7 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
       Study.findByPk(studyId, { rejectOnEmpty: true }),
     ]);
     const sections = await unpackJson<Section[]>(reach.sections);
-    const caseFile = caseOf(scenario, sections, `${study.title}: ${scenario.name}`);
+    const caseFile = caseOf(scenario, sections, study);
     const startsAt = body.startsAt === null ? null : new Date(body.startsAt);
     const of = { studyId, scenarioId: scenario.id, reachId, scenarioName: scenario.name, startsAt };
     return requestCase(actor, of, caseFile);
@@ -87,10 +88,10 @@ export function buildRequestRun(platform: Platform, queued: () => void) {
   return { request, requestCase };
 }
 
-function caseOf({ body }: ScenarioModel, sections: Section[], title: string): CaseFile {
-  const { faults } = checkScenario(body, sections);
+function caseOf({ body, name }: ScenarioModel, sections: Section[], study: StudyModel): CaseFile {
+  const { faults } = checkScenario(body, sections, study.unitSystem);
   if (faults.length > 0) throw incomplete(faults);
-  const caseFile = buildCase(body, sections, title);
+  const caseFile = buildCase(body, sections, `${study.title}: ${name}`);
   // The solver's own check has the last word.
   const refused = validateCase(caseFile);
   if (refused.faults.length > 0) throw incomplete(refused.faults);

@@ -5,6 +5,7 @@ import { inflowOf, peakOf } from '../../../shared/scenarios/hydrographs';
 import { newScenario } from '../../../shared/scenarios/proposals';
 import type { ScenarioBody } from '../../../shared/scenarios/schemas';
 import type { Section } from '../../../shared/surveys/types';
+import type { UnitSystem } from '../../../shared/units/units';
 import { unpackJson } from '../../database/packedJson';
 import { conflict, invalid } from '../../errors';
 import type { ScenarioModel } from '../../models/Scenario';
@@ -46,6 +47,11 @@ export function buildScenarios(platform: Platform) {
       group: ['scenarioId'],
     });
     return new Map(rows.map((row) => [row.scenarioId, Number(row.number)]));
+  }
+
+  /** What its study is shown and typed in. */
+  async function unitSystemOf({ studyId }: ScenarioModel): Promise<UnitSystem> {
+    return (await Study.findByPk(studyId, { rejectOnEmpty: true })).unitSystem;
   }
 
   /** The sections that a scenario is routed on. */
@@ -183,7 +189,18 @@ export function buildScenarios(platform: Platform) {
     return sectionsOf({ reachId });
   }
 
-  return { load, list, runCounts, sectionsOf, create, duplicate, duplicateChanged, save, remove };
+  return {
+    load,
+    list,
+    runCounts,
+    sectionsOf,
+    unitSystemOf,
+    create,
+    duplicate,
+    duplicateChanged,
+    save,
+    remove,
+  };
 }
 
 export type ScenariosService = ReturnType<typeof buildScenarios>;

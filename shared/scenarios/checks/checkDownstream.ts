@@ -2,6 +2,7 @@ import type { ScenarioBody } from '../schemas';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 export function checkDownstream(
   { downstream }: ScenarioBody,
@@ -13,11 +14,14 @@ export function checkDownstream(
       if (
         findings.number('downstream.slope', downstream.slope, 'Give the slope at the outlet.', {
           when: (slope) => slope <= 0 || slope > 1,
-          say: 'The slope lies above 0 and not above 1; 0.001 falls 1 m a kilometre.',
+          say: 'The slope lies above 0 and not above 1; 0.001 falls 1 in 1000.',
         }) &&
         downstream.slope! > 0.1
       )
-        findings.doubt('downstream.slope', 'A slope above 0.1 is very steep. Is it in m/m?');
+        findings.doubt(
+          'downstream.slope',
+          'A slope above 0.1 is very steep. Is it fall over length, not in percent?',
+        );
       break;
     case 'stage':
       if (
@@ -32,7 +36,7 @@ export function checkDownstream(
       )
         findings.doubt(
           'downstream.stages',
-          `The stage stays below the bed of the last section, ${reach.lastBed.toFixed(2)} m: water leaves as over a free fall.`,
+          say`The stage stays below the bed of the last section, ${q(reach.lastBed, 'elevation')}: water leaves as over a free fall.`,
         );
       break;
     case 'rating':
@@ -72,6 +76,6 @@ function checkRating(
   if (stages[stages.length - 1] <= reach.lastBed)
     findings.fault(
       'downstream.stages',
-      `The curve ends below the bed of the last section, ${reach.lastBed.toFixed(2)} m.`,
+      say`The curve ends below the bed of the last section, ${q(reach.lastBed, 'elevation')}.`,
     );
 }

@@ -3,6 +3,7 @@ import { inflowOf } from '../hydrographs';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 export function checkInitial(body: ScenarioBody, reach: ReachFacts, findings: Findings) {
   const { initial } = body;
@@ -81,6 +82,6 @@ function checkDam(
   if (stageAbove! <= bed)
     findings.fault(
       'initial.stageAbove',
-      `The reservoir lies below the bed at the dam, which is at ${bed.toFixed(2)} m.`,
+      say`The reservoir lies below the bed at the dam, which is at ${q(bed, 'elevation')}.`,
     );
 }

@@ -2,13 +2,14 @@ import type { ScenarioBody } from '../schemas';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 export function checkLaterals({ laterals }: ScenarioBody, reach: ReachFacts, findings: Findings) {
   laterals.forEach(({ from, to, times, flows }, i) => {
     const path = `laterals[${i}]`;
     const outside = {
       when: (chainage: number) => chainage < reach.first || chainage > reach.last,
-      say: `It lies outside the reach, which runs from ${km(reach.first)} to ${km(reach.last)}.`,
+      say: say`It lies outside the reach, which runs from ${q(reach.first, 'chainage')} to ${q(reach.last, 'chainage')}.`,
     };
     const hasFrom = findings.number(
       `${path}.from`,
@@ -35,5 +36,3 @@ export function checkLaterals({ laterals }: ScenarioBody, reach: ReachFacts, fin
       findings.doubt(`${path}.flows`, 'It takes water out; never more is taken than there is.');
   });
 }
-
-const km = (chainage: number) => `${(chainage / 1000).toFixed(3)} km`;

@@ -1,6 +1,7 @@
 import type { ScenarioBody } from '../schemas';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 /** Gradual transitions lose 0.1 and 0.3, bridges 0.3 and 0.5, abrupt ones up to 0.6 and 0.8: common practice. */
 const USUAL = { contraction: 0.6, expansion: 0.8 };
@@ -14,7 +15,7 @@ export function checkLocalLosses(
     const path = `localLosses[${i}]`;
     const outside = {
       when: (chainage: number) => chainage < reach.first || chainage > reach.last,
-      say: `It lies outside the reach, which runs from ${km(reach.first)} to ${km(reach.last)}.`,
+      say: say`It lies outside the reach, which runs from ${q(reach.first, 'chainage')} to ${q(reach.last, 'chainage')}.`,
     };
     const hasFrom = findings.number(`${path}.from`, loss.from, 'Give where it begins.', outside);
     const hasTo = findings.number(`${path}.to`, loss.to, 'Give where it ends.', outside);
@@ -33,5 +34,3 @@ export function checkLocalLosses(
     }
   });
 }
-
-const km = (chainage: number) => `${(chainage / 1000).toFixed(3)} km`;

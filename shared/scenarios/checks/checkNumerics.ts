@@ -3,6 +3,7 @@ import type { ScenarioBody } from '../schemas';
 import { inflowOf, peakOf } from '../hydrographs';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 /** Points on the rising limb that a flood wave needs in time (Fread & Lewis 1993; common practice). */
 const POINTS_ON_RISE = 20;
@@ -29,7 +30,10 @@ export function checkNumerics(body: ScenarioBody, reach: ReachFacts, findings: F
   if (courant !== null && !(courant > 0 && courant <= 1))
     findings.fault('numerics.courant', 'The Courant number lies above 0 and not above 1.');
   if (dryDepth !== null && !(dryDepth > 0 && dryDepth <= 0.1))
-    findings.fault('numerics.dryDepth', 'The dry depth lies above 0 and not above 0.1 m.');
+    findings.fault(
+      'numerics.dryDepth',
+      say`The dry depth lies above 0 and not above ${q(0.1, 'depth')}.`,
+    );
   const peak = peakOf(inflowOf(body.upstream));
   if (hasInterval && peak && peak.time > 0 && outputInterval! > peak.time / POINTS_ON_RISE)
     findings.doubt(
@@ -43,14 +47,14 @@ function checkCellCount(cellSize: number, reach: ReachFacts, findings: Findings)
   if (cells > CASE_LIMITS.cells)
     findings.fault(
       'numerics.cellSize',
-      `That makes ${cells.toLocaleString('en-GB')} cells; at most ${CASE_LIMITS.cells.toLocaleString('en-GB')} are routed. Use ${Math.ceil(reach.length / CASE_LIMITS.cells)} m or more.`,
+      say`That makes ${cells.toLocaleString('en-GB')} cells; at most ${CASE_LIMITS.cells.toLocaleString('en-GB')} are routed. Use ${q(Math.ceil(reach.length / CASE_LIMITS.cells), 'length')} or more.`,
     );
   else if (cellSize > reach.length / 2)
     findings.fault('numerics.cellSize', 'The reach needs two cells or more.');
   else if (cellSize > reach.leastSpacing)
     findings.doubt(
       'numerics.cellSize',
-      `Cells are longer than the least distance of two sections, ${reach.leastSpacing.toFixed(0)} m: what lies between is smoothed.`,
+      say`Cells are longer than the least distance of two sections, ${q(reach.leastSpacing, 'length', { decimals: 0 })}: what lies between is smoothed.`,
     );
 }
 

@@ -2,6 +2,7 @@ import type { ReservoirEnd, ReservoirInflow } from '../schemas';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 /** The level pool at the head of the reach: storage, stage at the start, inflow, spillway. */
 export function checkReservoir(
@@ -35,7 +36,7 @@ export function checkReservoir(
   if (hasStage && initialStage! < reach.firstBed)
     findings.doubt(
       'upstream.initialStage',
-      `The reservoir stands below the bed of the first section, ${reach.firstBed.toFixed(2)} m. Are both of one datum?`,
+      say`The reservoir stands below the bed of the first section, ${q(reach.firstBed, 'elevation')}. Are both of one datum?`,
     );
   checkInflow(inflow, 'upstream.inflow');
   if (spillway.stages.length + spillway.flows.length > 0) checkSpillway(spillway, findings);

@@ -2,6 +2,7 @@ import type { ScenarioBody } from '../schemas';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 /** Factors beyond these are no calibration but a slip of the pen; the case file holds to the same. */
 const LEAST = 0.1;
@@ -18,7 +19,7 @@ export function checkRoughness(
     const path = `roughnessFactors[${i}]`;
     const outside = {
       when: (chainage: number) => chainage < reach.first || chainage > reach.last,
-      say: `It lies outside the reach, which runs from ${km(reach.first)} to ${km(reach.last)}.`,
+      say: say`It lies outside the reach, which runs from ${q(reach.first, 'chainage')} to ${q(reach.last, 'chainage')}.`,
     };
     const hasFrom = findings.number(`${path}.from`, from, 'Give where it begins.', outside);
     const hasTo = findings.number(`${path}.to`, to, 'Give where it ends.', outside);
@@ -42,5 +43,3 @@ export function checkRoughness(
       );
   });
 }
-
-const km = (chainage: number) => `${(chainage / 1000).toFixed(3)} km`;

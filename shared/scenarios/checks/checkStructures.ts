@@ -13,6 +13,7 @@ import { checkBridge } from './structures/checkBridge';
 import { checkCulvert } from './structures/checkCulvert';
 import { checkSluice } from './structures/checkSluice';
 import { checkWeir } from './structures/checkWeir';
+import { q, say } from '../../units/message';
 
 /** A crest shorter than this share of the section is worth a second look: water cannot pass beside it. */
 const SHORT = 0.5;
@@ -99,7 +100,7 @@ function checkSpan(
   if (offsets[offsets.length - 1] - offsets[0] < SHORT * width)
     findings.doubt(
       `${path}.offsets`,
-      `The section is ${width.toFixed(0)} m wide at the level of the crest: beside the crest it stands as a wall.`,
+      say`The section is ${q(width, 'length', { decimals: 0 })} wide at the level of the crest: beside the crest it stands as a wall.`,
     );
 }
 

@@ -4,6 +4,7 @@ import { checkReservoir } from './checkReservoir';
 import { checkSeries } from './checkSeries';
 import type { Findings } from './Findings';
 import type { ReachFacts } from './reachFacts';
+import { q, say } from '../../units/message';
 
 /** s; a hundred days, slower than any flood. */
 const MAX_TIME_TO_PEAK = 100 * 86_400;
@@ -37,7 +38,7 @@ export function checkUpstream(
       if (upstream.stages.length > 0 && Math.max(...upstream.stages) <= reach.firstBed)
         findings.doubt(
           'upstream.stages',
-          `The stage never rises above the bed of the first section, ${reach.firstBed.toFixed(2)} m: no water comes in.`,
+          say`The stage never rises above the bed of the first section, ${q(reach.firstBed, 'elevation')}: no water comes in.`,
         );
       break;
     case 'wall':

@@ -1,4 +1,5 @@
 import { between, pairs, type AdviceRule } from './types';
+import { q, say } from '../../../../shared/units/message';
 
 /** Pools and riffles rise a little; more than this (m), and than this share of bank-full depth, wants a look. */
 const RISE_M = 0.1;
@@ -14,7 +15,7 @@ export const adviseAdverseSlope: AdviceRule = (sections) =>
         code: 'adverseSlope',
         sectionIds: [above.id, below.id],
         chainage: between(above, below),
-        message: `The bed rises ${rise.toFixed(2)} m from ${above.id} to ${below.id}.`,
+        ...say`The bed rises ${q(rise, 'depth')} from ${above.id} to ${below.id}.`,
         reason:
           'A pool does that, and so does a slip of the survey: a wrong datum, a missed thalweg, sections in the wrong order. Pools hold water at low flow.',
         source: 'Common practice',

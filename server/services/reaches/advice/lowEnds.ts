@@ -1,4 +1,5 @@
 import type { AdviceRule } from './types';
+import { partsOf, q, say, sayAll } from '../../../../shared/units/message';
 
 /** Ends below the bank beside them: the flood would stand against a wall that is not there. */
 export const adviseLowEnds: AdviceRule = (sections) =>
@@ -10,14 +11,15 @@ export const adviseLowEnds: AdviceRule = (sections) =>
     ].filter(({ end, bank }) => end < bank);
     if (low.length === 0) return [];
     const told = low.map(
-      ({ side, end, bank }) => `${side} end ${end.toFixed(2)} m, bank ${bank.toFixed(2)} m`,
+      ({ side, end, bank }) =>
+        say`${side} end ${q(end, 'elevation')}, bank ${q(bank, 'elevation')}`,
     );
     return [
       {
         code: 'lowEnds' as const,
         sectionIds: [id],
         chainage,
-        message: `${id} ends below its bank: ${told.join('; ')}.`,
+        ...say`${id} ends below its bank: ${partsOf(sayAll(told, '; '))}.`,
         reason:
           'Above its ends a section has walls, so water that would spread further stands too high here. Extend the section to higher ground.',
         source: 'Common practice',

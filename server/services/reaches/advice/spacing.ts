@@ -1,4 +1,5 @@
 import { between, pairs, type AdviceRule } from './types';
+import { q, say } from '../../../../shared/units/message';
 
 /** Share of D/S, and channel widths, that two sections may lie apart. Samuels (1989, 1990); numbers quoted from memory. */
 const DEPTH_RULE = 0.15;
@@ -22,15 +23,16 @@ export const adviseSpacing: AdviceRule = (sections) => {
     if (!(distance > most)) return [];
     const reason =
       byDepth <= byWidth
-        ? `0.15 of bank-full depth over slope: 0.15 × ${depth.toFixed(1)} m ÷ ${slope.toFixed(5)} = ${most.toFixed(0)} m. Backwater is lost between sections that lie further apart.`
-        : `20 bank-full widths of ${width.toFixed(0)} m are ${most.toFixed(0)} m. Storage and bends between sections further apart are guessed.`;
+        ? say`0.15 of bank-full depth over slope: 0.15 × ${q(depth, 'depth', { decimals: 1 })} ÷ ${slope.toFixed(5)} = ${q(most, 'length', { decimals: 0 })}. Backwater is lost between sections that lie further apart.`
+        : say`20 bank-full widths of ${q(width, 'length', { decimals: 0 })} are ${q(most, 'length', { decimals: 0 })}. Storage and bends between sections further apart are guessed.`;
     return [
       {
         code: 'spacing',
         sectionIds: [above.id, below.id],
         chainage: between(above, below),
-        message: `${above.id} and ${below.id} lie ${distance.toFixed(0)} m apart; ${most.toFixed(0)} m or less is advised.`,
-        reason,
+        ...say`${above.id} and ${below.id} lie ${q(distance, 'length', { decimals: 0 })} apart; ${q(most, 'length', { decimals: 0 })} or less is advised.`,
+        reason: reason.message,
+        reasonParts: reason.parts,
         source: SOURCE,
       },
     ];

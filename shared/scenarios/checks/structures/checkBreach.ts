@@ -5,6 +5,7 @@ import type { BreachBody } from '../../structures/schemas';
 import type { Findings } from '../Findings';
 import type { ReachFacts } from '../reachFacts';
 import { checkCrest } from './checkCrest';
+import { q, say } from '../../../units/message';
 
 export function checkBreach(
   breach: BreachBody,
@@ -49,7 +50,7 @@ export function checkBreach(
   if (hasBottom && breach.chainage !== null && bottomLevel! < reach.bedAt(breach.chainage) - 0.05)
     findings.doubt(
       `${path}.bottomLevel`,
-      `It lies below the bed there, which is at ${reach.bedAt(breach.chainage).toFixed(2)} m.`,
+      say`It lies below the bed there, which is at ${q(reach.bedAt(breach.chainage), 'elevation')}.`,
     );
 }
 
@@ -88,7 +89,7 @@ function checkCoefficients(
   if (weirCoefficient !== null)
     findings.number(`${path}.weirCoefficient`, weirCoefficient, '', {
       when: (c) => c <= 0 || c > 4,
-      say: 'The coefficient is above 0; 1.7 m½/s is a broad crest.',
+      say: say`The coefficient is above 0; ${q(1.7, 'weirCoefficient')} is a broad crest.`,
     });
   if (orificeCoefficient !== null)
     findings.number(`${path}.orificeCoefficient`, orificeCoefficient, '', {

@@ -2,6 +2,7 @@ import type { CulvertBody } from '../../structures/schemas';
 import type { Findings } from '../Findings';
 import { checkCoefficient } from './checkCoefficient';
 import { checkCrest } from './checkCrest';
+import { q, say } from '../../../units/message';
 
 /** Fall over length of a barrel that cannot be meant. */
 const STEEPEST = 0.5;
@@ -11,7 +12,7 @@ export function checkCulvert(culvert: CulvertBody, path: string, findings: Findi
   const size = (key: 'diameter' | 'width' | 'height', what: string) =>
     findings.number(`${path}.${key}`, culvert[key], `Give the ${what} of a barrel.`, {
       when: (value) => value <= 0 || value > 100,
-      say: `The ${what} is above 0 and not above 100 m.`,
+      say: say`The ${what} is above 0 and not above ${q(100, 'length')}.`,
     });
   if (shape === 'circular') size('diameter', 'diameter');
   else {
