@@ -100,7 +100,7 @@ describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) 
       await page.getByText('Handed in as revision 1').waitFor();
       await looksRight(page);
     });
-    expect(mailTo(MODELLER)).toContain(`Survey handed in: ${title}`);
+    await mailed(MODELLER, `Survey handed in: ${title}`);
 
     const decide = (words: string, press: string) =>
       visit(browser, size, 'handIn-modeller', async ({ page }) => {
@@ -110,9 +110,10 @@ describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) 
         await page.getByLabel(/^Remarks/).fill(words);
         await looksRight(page);
         await page.getByRole('button', { name: press }).click();
-        await page.getByText(words).first().waitFor();
+        await page.getByText(/^(Accepted|Returned) by Ines Corrow/).first().waitFor();
       });
     await decide(REMARKS, 'Return it');
+    await mailed(SURVEYOR, `Survey returned: ${title}`);
     expect(mailTo(SURVEYOR)).toContain(REMARKS);
 
     await visit(browser, size, 'handIn-again', async ({ page }) => {
@@ -128,9 +129,17 @@ describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) 
       await page.getByText('Handed in as revision 2').waitFor();
     });
     await decide('Good now.', 'Accept the survey');
-    expect(mailTo(SURVEYOR)).toContain(`Survey accepted: ${title}`);
+    await mailed(SURVEYOR, `Survey accepted: ${title}`);
   });
 });
+
+/** Mails leave after the answer: a moment is given to them. */
+async function mailed(to: string, words: string): Promise<void> {
+  const until = Date.now() + 10_000;
+  while (!mailTo(to).includes(words) && Date.now() < until)
+    await new Promise((resolve) => setTimeout(resolve, 100));
+  expect(mailTo(to)).toContain(words);
+}
 
 /** A study of the modeller that the surveyor may hand in for. */
 async function sharedStudy(title: string): Promise<Study> {
