@@ -110,7 +110,10 @@ describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) 
         await page.getByLabel(/^Remarks/).fill(words);
         await looksRight(page);
         await page.getByRole('button', { name: press }).click();
-        await page.getByText(/^(Accepted|Returned) by Ines Corrow/).first().waitFor();
+        await page
+          .getByText(/^(Accepted|Returned) by Ines Corrow/)
+          .first()
+          .waitFor();
       });
     await decide(REMARKS, 'Return it');
     await mailed(SURVEYOR, `Survey returned: ${title}`);
