@@ -10,6 +10,8 @@ import type {
 } from './schemas';
 import type { ConfidencePayload } from './types';
 import type { Variation } from './varyCase';
+import { formatWithUnit } from '../units/format';
+import type { UnitSystem } from '../units/units';
 
 export interface PlannedMember {
   label: string;
@@ -50,7 +52,7 @@ function planSensitivity({ cellSize, parameters }: SensitivitySettings): Planned
       (['low', 'high'] as const).map((side): PlannedMember => {
         const value = side === 'low' ? low : high;
         return {
-          label: `${PARAMETERS[key].label} ${valueWords(key, value)}`,
+          label: `${PARAMETERS[key].label} ${valueWords(key, value, 'metric')}`,
           payload: {
             role: { kind: 'side', parameter: key, side, value },
             variation: { ...cells, [key]: value },
@@ -87,10 +89,11 @@ function planEnsemble(settings: EnsembleSettings, { numerics }: CaseFile): Plann
 }
 
 /** `+20 %`, `× 2.4` where it is far from 1, `−0.50 m`. */
-export function valueWords(key: ParameterKey, value: number): string {
+export function valueWords(key: ParameterKey, value: number, system: UnitSystem): string {
   const { measure } = PARAMETERS[key];
   const sign = (amount: number) => (amount < 0 ? '−' : '+');
-  if (measure === 'metres') return `${sign(value)}${Math.abs(value).toFixed(2)} m`;
+  if (measure === 'metres')
+    return `${sign(value)}${formatWithUnit(Math.abs(value), 'depth', system)}`;
   if (value < 0.6 || value > 1.5) return `× ${Number(value.toFixed(2))}`;
   const percent = Number((100 * (value - 1)).toFixed(1));
   return `${sign(percent)}${Math.abs(percent)} %`;

@@ -1,7 +1,7 @@
 import { formatWithUnit } from '../units/format';
 import type { UnitSystem } from '../units/units';
 import type { Distribution, DistributionKind } from './distributions';
-import { PARAMETERS } from './parameters';
+import { PARAMETERS, type ParameterKey } from './parameters';
 import { valueWords } from './planMembers';
 import type { EnsembleSettings, SensitivitySettings, SettingsOf } from './schemas';
 
@@ -35,11 +35,19 @@ export const DISTRIBUTION_FIELDS: Record<DistributionKind, [field: string, label
 
 const digits = (value: number) => String(Number(value.toPrecision(3)));
 
-/** `lognormal, median 1, geometric standard deviation 1.2`. */
-export function distributionWords(distribution: Distribution): string {
+/** `lognormal, median 1, geometric standard deviation 1.2`; a shift with its unit. */
+export function distributionWords(
+  key: ParameterKey,
+  distribution: Distribution,
+  system: UnitSystem,
+): string {
+  const isShift = PARAMETERS[key].measure === 'metres';
   const given = distribution as unknown as Record<string, number>;
   const parts = DISTRIBUTION_FIELDS[distribution.kind].map(
-    ([field, label]) => `${label.toLowerCase()} ${digits(given[field])}`,
+    ([field, label]) =>
+      `${label.toLowerCase()} ${
+        isShift ? formatWithUnit(given[field], 'depth', system) : digits(given[field])
+      }`,
   );
   return [DISTRIBUTION_NAMES[distribution.kind].toLowerCase(), ...parts].join(', ');
 }
@@ -60,7 +68,7 @@ export function settingFacts(
     return [
       ...parameters.map(({ key, low, high }): [string, string] => [
         PARAMETERS[key].label,
-        `${valueWords(key, low)} and ${valueWords(key, high)}`,
+        `${valueWords(key, low, system)} and ${valueWords(key, high, system)}`,
       ]),
       ['Cells', cellWords(cellSize, system)],
     ];
@@ -70,7 +78,7 @@ export function settingFacts(
     ['Sampling', `Latin hypercube, ${members} members, seed ${seed}`],
     ...parameters.map(({ key, distribution }): [string, string] => [
       PARAMETERS[key].label,
-      `${distributionWords(distribution)}${PARAMETERS[key].measure === 'metres' ? ' (m, added)' : ' (multiplies)'}`,
+      `${distributionWords(key, distribution, system)} (${PARAMETERS[key].measure === 'metres' ? 'added' : 'multiplies'})`,
     ]),
     ['Cells', cellWords(cellSize, system)],
   ];

@@ -24,13 +24,13 @@ export function SensitivityResults({ result }: { result: SensitivityResult }) {
         const side = ({ value, stations }: typeof low) => {
           const there = stations?.[k][quantity] ?? null;
           return {
-            words: valueWords(parameter, value),
+            words: valueWords(parameter, value, system),
             change: there === null || base === null ? null : there - base,
           };
         };
         return { label: PARAMETERS[parameter].label, low: side(low), high: side(high) };
       }),
-    [result, k, quantity, base],
+    [result, k, quantity, base, system],
   );
   const { name } = result.stations[k];
   const label = `${VALUE_NAMES[quantity]} at ${name}`;

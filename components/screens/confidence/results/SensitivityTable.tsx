@@ -29,7 +29,7 @@ export function SensitivityTable({ result }: { result: SensitivityResult }) {
     ...result.rows.flatMap(({ parameter, low, high }) =>
       [low, high].map((side) => ({
         station: name,
-        input: `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value)}`,
+        input: `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value, system)}`,
         values: side.stations?.[k] ?? null,
         base: result.base[k],
         isBase: false,

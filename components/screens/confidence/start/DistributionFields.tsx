@@ -42,7 +42,7 @@ export function DistributionFields({ parameter, path, distribution }: Props) {
             key={`${distribution.kind} ${field}`}
             name={`${path}.distribution.${field}`}
             label={label}
-            unit={parameter.measure === 'metres' ? 'm' : undefined}
+            quantity={parameter.measure === 'metres' ? 'depth' : undefined}
           />
         ))}
       </FieldRow>

@@ -45,7 +45,7 @@ export function EnsembleForm(props: SetFormProps) {
   const seconds = estimate(options, [cells]) * ((members ?? 0) + 1);
   const words = parameters.map(({ key, distribution }) => {
     const { label } = options.parameters.find((one) => one.key === key)!;
-    return `${label} ${distributionWords(distribution)}`;
+    return `${label} ${distributionWords(key, distribution, system)}`;
   });
   return (
     <Card title="Ensemble">

@@ -6,6 +6,7 @@ import { Button } from '@/components/ui/Button';
 import { ButtonRow } from '@/components/ui/ButtonRow';
 import { Card } from '@/components/ui/Card';
 import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Parameter } from '@/shared/confidence/parameters';
 import { valueWords } from '@/shared/confidence/planMembers';
 import { CellSizeField } from './CellSizeField';
@@ -18,6 +19,7 @@ const begin = ({ key, sides: [low, high] }: Parameter) => ({ key, low, high });
 /** Each input lower and higher by itself. */
 export function SensitivityForm(props: SetFormProps) {
   const { options } = props;
+  const system = useUnitSystem();
   const [open, setOpen] = useState(false);
   const form = useSetForm('sensitivity', props, {
     name: '',
@@ -27,7 +29,7 @@ export function SensitivityForm(props: SetFormProps) {
   const rows = form.formik.values.parameters;
   const words = rows.map(({ key, low, high }) => {
     const { label } = options.parameters.find((one) => one.key === key)!;
-    return `${label} ${valueWords(key, low)} and ${valueWords(key, high)}`;
+    return `${label} ${valueWords(key, low, system)} and ${valueWords(key, high, system)}`;
   });
   // What the server or the schema refused must be seen.
   const shown = open || form.failure !== null || !form.formik.isValid;
@@ -70,4 +72,6 @@ export function SensitivityForm(props: SetFormProps) {
 }
 
 const sideLabel = (side: string, measure: Parameter['measure']) =>
-  measure === 'factor' ? { label: `${side} factor` } : { label: `${side} shift`, unit: 'm' };
+  measure === 'factor'
+    ? { label: `${side} factor` }
+    : { label: `${side} shift`, quantity: 'depth' as const };

@@ -17,8 +17,8 @@ export function sensitivityPart(sheet: Sheet, result: SensitivityResult, system:
   stations.slice(0, DRAWN_STATIONS).forEach(({ name }, k) => {
     const bars = rows.map(({ parameter, low, high }) => ({
       label: PARAMETERS[parameter].label,
-      low: sideOf(low, parameter, k, base[k]),
-      high: sideOf(high, parameter, k, base[k]),
+      low: sideOf(low, parameter, k, base[k], system),
+      high: sideOf(high, parameter, k, base[k], system),
     }));
     const drawing = tornado(`Change of peak stage at ${name}`, bars, (change) =>
       changeWords('peakStage', change, system),
@@ -41,7 +41,7 @@ export function sensitivityPart(sheet: Sheet, result: SensitivityResult, system:
       ...rows.flatMap(({ parameter, low, high }) =>
         [low, high].map((side) => [
           name,
-          `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value)}`,
+          `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value, system)}`,
           ...QUANTITIES.map((one) => {
             const [here, there] = [side.stations?.[k][one] ?? null, base[k][one]];
             return here === null || there === null
@@ -59,10 +59,11 @@ function sideOf(
   parameter: SensitivityResult['rows'][number]['parameter'],
   k: number,
   base: PlaceValues,
+  system: UnitSystem,
 ) {
   const there = side.stations?.[k].peakStage;
   return {
-    words: valueWords(parameter, side.value),
+    words: valueWords(parameter, side.value, system),
     change: there === undefined ? null : there - base.peakStage,
   };
 }
