@@ -41,7 +41,7 @@ export function CopyGeometryDialog({ reach, onClose }: CopyGeometryDialogProps) 
         <FormTextField
           name="name"
           label="Name"
-          hint="Like “Dredged to 1 m” or “Bridge opened”."
+          hint="Like “Dredged” or “Bridge opened”."
           maxLength={LIMITS.textShort}
           autoFocus
         />

@@ -11,6 +11,7 @@ import { useEditing } from './editorContext';
 import { PlacedField } from './PlacedField';
 import { runSize } from './runSize';
 import { TimeField } from './TimeField';
+import { q, say, sayIn } from '@/shared/units/message';
 
 /** How finely and how long it is computed. */
 export function NumericsPart() {
@@ -126,7 +127,7 @@ export function NumericsPart() {
             <NumberField
               label="Dry below a depth of"
               optional
-              hint={`Empty: ${CASE_DEFAULTS.dryDepth} m.`}
+              hint={`Empty: ${sayIn(system, say`${q(CASE_DEFAULTS.dryDepth, 'depth', { figures: 1 })}`)}.`}
               quantity="depth"
               value={numerics.dryDepth}
               onChange={(dryDepth) => change({ dryDepth })}
