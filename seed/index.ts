@@ -28,8 +28,19 @@ const VESHALL: StudyBody = {
     'Flood levels and times at Tornick bridge, Sallow Mill and the gauge at Ebbick for the 1 in 100 year flood.',
 };
 const VESHALL_STATIONS: StationBody[] = [
-  { name: 'Tornick bridge', chainage: 10_600 },
-  { name: 'Sallow Mill', chainage: 13_100 },
+  {
+    name: 'Tornick bridge',
+    chainage: 10_600,
+    levels: [
+      { kind: 'soffit', level: 41.6, note: 'Middle arch' },
+      { kind: 'road', level: 42.9, note: '' },
+    ],
+  },
+  {
+    name: 'Sallow Mill',
+    chainage: 13_100,
+    levels: [{ kind: 'floor', level: 38.3, note: 'Miller’s house' }],
+  },
   { name: 'Gauge at Ebbick', chainage: 17_400 },
 ];
 const QUENLOW: StudyBody = {
