@@ -48,7 +48,7 @@ async function looksRight(page: Page): Promise<void> {
 
 describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) => {
   it('goes on after a lost connection and a reload, is returned with remarks, mended and accepted', async () => {
-    const title = `Bank of the Veshall, ${size}`;
+    const title = `Bank of the Veshall ${Date.now()}, ${size}`;
     const study = await sharedStudy(title);
     const survey = `/studies/${study.id}/survey`;
 
