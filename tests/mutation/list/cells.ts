@@ -146,7 +146,7 @@ export const CELLS: Mutation[] = [
     file: 'diagnostics/faceFlow.ts',
     find: 'faceFlow[f] = 0.5 * (lateFlux[f] + fluxArea[f])',
     put: 'faceFlow[f] = fluxArea[f]',
-    tests: ['convergence/macDonald'],
+    tests: ['unit/faceFlow'],
   },
   {
     what: 'local losses: sign',
