@@ -1,8 +1,6 @@
-import { StyleSheet, View } from 'react-native';
-import { space } from '@/components/theme/tokens';
-import { NumberField } from '@/components/ui/NumberField';
 import { RadioGroup } from '@/components/ui/RadioGroup';
 import type { Reach, ReachSection } from '@/shared/reaches/types';
+import { FromToFields } from './FromToFields';
 import type { SectionChoice } from './sectionChoice';
 import type { ScopeChoice } from './sectionScope';
 
@@ -32,31 +30,7 @@ export function ScopeFields({ reach, section, ticked, scope, onChange }: ScopeFi
           { value: 'all', label: `All ${reach.sections.length}` },
         ]}
       />
-      {scope.scope === 'stretch' ? (
-        <View style={styles.pair}>
-          <View style={styles.half}>
-            <NumberField
-              label="From chainage"
-              quantity="chainage"
-              value={scope.from}
-              onChange={(from) => onChange({ ...scope, from })}
-            />
-          </View>
-          <View style={styles.half}>
-            <NumberField
-              label="To chainage"
-              quantity="chainage"
-              value={scope.to}
-              onChange={(to) => onChange({ ...scope, to })}
-            />
-          </View>
-        </View>
-      ) : null}
+      {scope.scope === 'stretch' ? <FromToFields stretch={scope} onChange={onChange} /> : null}
     </>
   );
 }
-
-const styles = StyleSheet.create({
-  pair: { flexDirection: 'row', gap: space.two },
-  half: { flex: 1, minWidth: 0 },
-});

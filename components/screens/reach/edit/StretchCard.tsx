@@ -1,6 +1,5 @@
 import { useMemo, useState } from 'react';
-import { StyleSheet, View } from 'react-native';
-import { space } from '@/components/theme/tokens';
+import { View } from 'react-native';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { NumberField } from '@/components/ui/NumberField';
@@ -9,6 +8,7 @@ import { SelectField } from '@/components/ui/SelectField';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { formatWithUnit } from '@/shared/units/format';
+import { FromToFields } from '../FromToFields';
 import { sectionsInScope, type ScopeChoice } from '../sectionScope';
 import { useEditing } from './editorContext';
 import { STRETCH_TOOLS, TOOL_NAMES, tryTool, type Outcome, type StretchTool } from './stretchTools';
@@ -88,26 +88,7 @@ export function StretchCard() {
           { value: 'here', label: `The one shown, ${section.id}` },
         ]}
       />
-      {scope.scope === 'stretch' ? (
-        <View style={styles.pair}>
-          <View style={styles.half}>
-            <NumberField
-              label="From chainage"
-              quantity="chainage"
-              value={scope.from}
-              onChange={(from) => setScope({ ...scope, from })}
-            />
-          </View>
-          <View style={styles.half}>
-            <NumberField
-              label="To chainage"
-              quantity="chainage"
-              value={scope.to}
-              onChange={(to) => setScope({ ...scope, to })}
-            />
-          </View>
-        </View>
-      ) : null}
+      {scope.scope === 'stretch' ? <FromToFields stretch={scope} onChange={setScope} /> : null}
       {outcome?.cost && outcome.cost.length > 0 ? <ThinningTable cost={outcome.cost} /> : null}
       <Txt role="status">{outcome ? `${outcome.words}.`.replace('..', '.') : ''}</Txt>
       <View>
@@ -130,8 +111,3 @@ function attempt(...given: Parameters<typeof tryTool>): {
     return { outcome: null, fault: error.message };
   }
 }
-
-const styles = StyleSheet.create({
-  pair: { flexDirection: 'row', gap: space.two },
-  half: { flex: 1, minWidth: 0 },
-});
