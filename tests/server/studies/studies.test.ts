@@ -155,7 +155,7 @@ test('stations are named places by chainage', async () => {
     .patch(`/api/stations/${bridge.body.id}`)
     .send({ name: 'Old bridge', chainage: 10_610 })
     .expect(200);
-  expect(body).toEqual({ id: bridge.body.id, name: 'Old bridge', chainage: 10_610 });
+  expect(body).toEqual({ id: bridge.body.id, name: 'Old bridge', chainage: 10_610, levels: [] });
   await api.delete(`/api/stations/${bridge.body.id}`).expect(204);
   await api.patch(`/api/stations/${bridge.body.id}`).send({ name: 'x', chainage: 1 }).expect(404);
   await api.post(stations).send({ name: ' ' }).expect(422);
