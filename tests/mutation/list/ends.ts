@@ -58,7 +58,7 @@ export const ENDS: Mutation[] = [
     file: CONTROL,
     find: 'min(control(eta), criticalFlowAt(eta))',
     put: 'control(eta)',
-    tests: [...WAVES, 'unit/steepReach', 'invariants/initialStates', 'invariants/randomReaches'],
+    tests: ['convergence/criticalOutlet'],
   },
   {
     what: 'open: sign of ω in the invariant',
