@@ -26,9 +26,9 @@ const REMARKS = 'XS-12 stands too high: check the instrument height.';
 function largeFile(note: string): Buffer {
   const rows = lowerVeshall().flatMap(({ id, chainage, points }) =>
     points.slice(1).flatMap(([offset, elevation], k) =>
-      Array.from({ length: 40 }, (_, i) => {
+      Array.from({ length: 16 }, (_, i) => {
         const [fromOffset, fromElevation] = points[k];
-        const share = i / 40;
+        const share = i / 16;
         const at = fromOffset + share * (offset - fromOffset);
         const level = fromElevation + share * (elevation - fromElevation);
         return `${id},${chainage},${at.toFixed(4)},${level.toFixed(4)}`;
