@@ -86,7 +86,7 @@ export const STRUCTURES: Mutation[] = [
     file: 'structures/breach.ts',
     find: 'stageUp - Math.max(stageDown, middle)',
     put: 'stageUp - middle',
-    tests: BREACH,
+    tests: ['structures/breachPipe'],
   },
   {
     what: 'reservoir: sign of its release',
