@@ -1,4 +1,4 @@
-import { hazardClass, type HazardClass } from '../../shared/hazard/hazardClass';
+import { worstMoment } from '../../shared/hazard/hazardClass';
 import { firstAbove } from '../../shared/runs/crossings';
 import type { AlongQuery } from '../../shared/runs/schemas';
 import type { PlaceAlong, RunAlong, RunSeries } from '../../shared/runs/types';
@@ -16,7 +16,7 @@ export async function alongReach(
   const of = async (chainage: number): Promise<PlaceAlong | null> => {
     const series = await seriesAt(blocks, chainage);
     return (
-      series && { chainage, ...worstMoment(series), arrival: arrivalOf(series, threshold, value) }
+      series && { chainage, ...hazardOf(series), arrival: arrivalOf(series, threshold, value) }
     );
   };
   const along: RunAlong = {
@@ -38,16 +38,9 @@ export async function alongReach(
 }
 
 /** The worst class, from depth and mean velocity of the same moment, and when it is first reached. */
-function worstMoment({ times, depth, velocity }: RunSeries) {
-  let worst: HazardClass | null = null;
-  let at: number | null = null;
-  for (let k = 0; k < times.length; k++) {
-    const now = hazardClass(depth[k], velocity[k]);
-    if (!now || (worst && now.label <= worst.label)) continue;
-    worst = now;
-    at = times[k];
-  }
-  return { hazard: worst && worst.label, hazardFrom: at };
+function hazardOf({ times, depth, velocity }: RunSeries) {
+  const worst = worstMoment(depth, velocity);
+  return { hazard: worst && worst.hazard.label, hazardFrom: worst && times[worst.index] };
 }
 
 function arrivalOf(series: RunSeries, threshold: AlongQuery['threshold'], value: number) {

@@ -75,14 +75,20 @@ export function hazardClass(depth: number, velocity: number): HazardClass | null
 }
 
 /** Worst class over a time series of depth and velocity at one place; null where it stays dry. */
-export function worstHazard(
+export const worstHazard = (
   depth: ArrayLike<number>,
   velocity: ArrayLike<number>,
-): HazardClass | null {
-  let worst: HazardClass | null = null;
-  for (let k = 0; k < depth.length; k++) {
-    const now = hazardClass(depth[k], velocity[k]);
-    if (now && (!worst || now.label > worst.label)) worst = now;
+): HazardClass | null => worstMoment(depth, velocity)?.hazard ?? null;
+
+/** The same with the index of the moment at which it is first reached. */
+export function worstMoment(
+  depth: ArrayLike<number>,
+  velocity: ArrayLike<number>,
+): { hazard: HazardClass; index: number } | null {
+  let worst: { hazard: HazardClass; index: number } | null = null;
+  for (let index = 0; index < depth.length; index++) {
+    const hazard = hazardClass(depth[index], velocity[index]);
+    if (hazard && (!worst || hazard.label > worst.hazard.label)) worst = { hazard, index };
   }
   return worst;
 }
