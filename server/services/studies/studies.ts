@@ -40,9 +40,10 @@ export function buildStudies({ audit, models, sequelize }: Platform) {
       may(actor, 'study.read', { firmId, memberAs: memberAs.get(id) ?? null }),
     );
     const ids = visible.map(({ id }) => id);
+    const surveyed = ids.filter((id) => memberAs.get(id) === 'surveyor');
     const [surveys, own, runs] = await Promise.all([
       surveyStandings(models, ids),
-      surveyStandings(models, ids, actor.id),
+      surveyStandings(models, surveyed, actor.id),
       runCounts(ids),
     ]);
     return visible.map((study) => {
@@ -52,7 +53,7 @@ export function buildStudies({ audit, models, sequelize }: Platform) {
         surveyRevision: seesWork ? (surveys.get(study.id)?.accepted?.revision ?? null) : null,
         surveyStanding: seesWork
           ? (surveys.get(study.id)?.standing ?? 'none')
-          : memberAs.get(study.id) === 'surveyor'
+          : surveyed.includes(study.id)
             ? (own.get(study.id)?.standing ?? 'none')
             : null,
         runCount: seesWork ? (runs.get(study.id) ?? 0) : null,

@@ -16,6 +16,7 @@ export async function surveyStandings(
   studyIds: number[],
   sentBy?: number,
 ): Promise<Map<number, StudySurveys>> {
+  if (studyIds.length === 0) return new Map();
   const revisions = await SurveyRevision.unscoped().findAll({
     where: { studyId: studyIds, ...(sentBy !== undefined && { sentBy }) },
     attributes: ['id', 'studyId', 'revision', 'sectionCount'],
