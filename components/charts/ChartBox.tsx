@@ -17,6 +17,8 @@ interface Props {
   children: (size: ChartSize) => ReactNode;
   /** Laid over the drawing, e.g. what catches the hand. */
   over?: (size: ChartSize) => ReactNode;
+  /** What can be reached by keys on the drawing: beside the image, whose parts a screen reader does not see. */
+  controls?: (size: ChartSize) => ReactNode;
 }
 
 export interface ChartSize {
@@ -25,11 +27,11 @@ export interface ChartSize {
 }
 
 /** A drawing as wide as the place it is given; under it, where its source is known, a picture of it to take away. */
-export function ChartBox({ label, unit, height, initialWidth, children, over }: Props) {
+export function ChartBox({ label, unit, height, initialWidth, children, over, controls }: Props) {
   const { width, measured } = useWidth(initialWidth);
   const source = usePictureSource();
   const outer = useRef<View>(null);
-  const box = (
+  const image = (
     <View style={[styles.box, { height }]} {...measured} role="img" aria-label={label}>
       {width > 0 ? (
         <Svg width={width} height={height} style={styles.drawing}>
@@ -38,6 +40,14 @@ export function ChartBox({ label, unit, height, initialWidth, children, over }: 
       ) : null}
       {width > 0 ? over?.({ width, height }) : null}
     </View>
+  );
+  const box = controls ? (
+    <View style={styles.outer}>
+      {image}
+      {width > 0 ? controls({ width, height }) : null}
+    </View>
+  ) : (
+    image
   );
   if (!source) return box;
   const drawing = () =>

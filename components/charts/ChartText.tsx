@@ -7,7 +7,7 @@ interface Props {
   x: number;
   y: number;
   anchor?: 'start' | 'middle' | 'end';
-  tone?: 'soft' | 'ink' | 'earth' | 'ochre';
+  tone?: 'soft' | 'ink' | 'earth' | 'ochre' | 'card';
   strong?: boolean;
   /** Stays legible where a line runs behind it. */
   halo?: boolean;

@@ -4,6 +4,8 @@ import { useTheme } from '@/components/theme/useTheme';
 import { formatWithUnit } from '@/shared/units/format';
 import { UNITS, type Quantity, type UnitSystem } from '@/shared/units/units';
 import { ChartBox, type ChartSize } from './ChartBox';
+import { OBSERVED_LOOK } from './curveLooks';
+import { CurveMark } from './CurveMark';
 import { DragSurface } from './DragSurface';
 import {
   hydrographModel,
@@ -13,8 +15,12 @@ import {
 } from './geometry/hydrographModel';
 import type { NamedLevel } from './geometry/levelLines';
 import { nearestIndex, valueAt } from './geometry/interpolate';
+import type { Polyline } from './geometry/placeLabel';
+import { PIN, pointPins, type Pin } from './geometry/pointPins';
 import { shortTime } from './geometry/timeWords';
 import { LevelLines } from './LevelLines';
+import { PointPins, type RaisedPoint } from './PointPins';
+import { PointPresses } from './PointPresses';
 import { Reading, readingBox } from './Reading';
 import { TimeAxis } from './TimeAxis';
 import { ValueAxis } from './ValueAxis';
@@ -29,6 +35,11 @@ export interface HydrographProps {
   compare?: Series | null;
   /** Levels to hold a stage against, SI. Keep the same array while only the cursor moves. */
   levels?: readonly NamedLevel[];
+  /** What was observed at the place, SI. Keep the same object while only the cursor moves. */
+  observed?: Series | null;
+  /** Points that were raised on moments of the place. */
+  points?: readonly TimedPoint[];
+  onPoint?: (id: number) => void;
   /** Highest value with its time where it is known better than from the series. */
   peak?: { value: number; time: number } | null;
   /** Time of the cursor, s; null for none. */
@@ -42,9 +53,14 @@ export interface HydrographProps {
   initialWidth?: number;
 }
 
+export interface TimedPoint extends RaisedPoint {
+  /** s from start. */
+  time: number;
+}
+
 /** A value against time, its peak named, its value at the cursor read out beside the curve and never over it. */
 export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
-  const { onChange, height = 180, series } = props;
+  const { onChange, onPoint, points, height = 180, series } = props;
   const peak = props.peak === undefined ? peakOf(series) : props.peak;
   return (
     <ChartBox
@@ -57,6 +73,11 @@ export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
           <TimeDrag {...props} onChange={onChange} size={size} />
         ) : null
       }
+      controls={
+        onPoint && points?.length && series.times.length
+          ? (size) => <Presses {...props} {...{ points, onPoint, size }} />
+          : undefined
+      }
     >
       {(size) => <Drawing {...props} peak={peak} size={size} />}
     </ChartBox>
@@ -65,12 +86,34 @@ export const Hydrograph = memo(function Hydrograph(props: HydrographProps) {
 
 type Sized = HydrographProps & { size: ChartSize };
 
-function useModel({ size, series, compare = null, quantity, unitSystem, levels }: Sized) {
+function useModel({ size, series, compare = null, quantity, unitSystem, ...more }: Sized) {
   const { width, height } = size;
+  const { levels, observed } = more;
   return useMemo(
-    () => hydrographModel({ width, height }, series, compare, quantity, unitSystem, levels),
-    [width, height, series, compare, quantity, unitSystem, levels],
+    () =>
+      hydrographModel({ width, height }, series, compare, quantity, unitSystem, {
+        levels,
+        observed,
+      }),
+    [width, height, series, compare, quantity, unitSystem, levels, observed],
   );
+}
+
+/** Boxes of the points above the curve at their moments. */
+function usePins({ series, points = NONE }: Sized, { frame, yOf }: HydrographModel) {
+  return useMemo(() => {
+    const pinned = points.map(({ id, time }) => ({
+      id,
+      x: frame.x(time),
+      y: yOf(valueAt(series.times, series.values, time)),
+    }));
+    return pointPins(pinned, frame);
+  }, [series, points, frame, yOf]);
+}
+
+function Presses(props: Sized & Required<Pick<HydrographProps, 'points' | 'onPoint'>>) {
+  const pins = usePins(props, useModel(props));
+  return <PointPresses pins={pins} points={props.points} onPoint={props.onPoint} />;
 }
 
 /** Rests at the times that the series has values for. */
@@ -87,13 +130,16 @@ function TimeDrag(props: Sized & { onChange: (t: number) => void }) {
 
 function Drawing(props: Sized) {
   const model = useModel(props);
+  const pins = usePins(props, model);
   return (
     <>
       <ValueAxis frame={model.frame} ticks={model.valueTicks} />
       <TimeAxis frame={model.frame} ticks={model.timeTicks} />
       <LevelLines lines={model.levels} frame={model.frame} />
       <Curves model={model} isGround={props.isGround} />
-      <Marks {...props} model={model} />
+      {model.observed ? <Observed at={model.observed} /> : null}
+      <Marks {...props} model={model} pins={pins} />
+      <PointPins pins={pins} points={props.points ?? NONE} />
     </>
   );
 }
@@ -127,6 +173,10 @@ const Curves = memo(function Curves({ model, isGround }: CurvesProps) {
   );
 });
 
+const Observed = memo(function Observed({ at: { x, y } }: { at: Polyline }) {
+  return Array.from(x, (px, i) => <CurveMark key={i} x={px} y={y[i]} look={OBSERVED_LOOK} />);
+});
+
 /** The peak and the cursor with their readings. */
 function Marks({
   series,
@@ -135,7 +185,8 @@ function Marks({
   quantity,
   unitSystem,
   model,
-}: Sized & { model: HydrographModel }) {
+  pins,
+}: Sized & { model: HydrographModel; pins: readonly Pin[] }) {
   const { colours } = useTheme();
   const { frame, yOf } = model;
   const bounds = {
@@ -153,6 +204,7 @@ function Marks({
   const soft = [
     ...(cursor ? [{ x: [cursor.x, cursor.x], y: [0, frame.bottom] }] : []),
     ...(model.compare ? [model.compare] : []),
+    ...(model.observed ? [model.observed] : []),
   ];
   const lines = [model.main];
 
@@ -168,6 +220,7 @@ function Marks({
   const dots = [
     ...[top, cursor].flatMap((dot) => (dot ? [around(dot)] : [])),
     ...model.levels.flatMap(({ box }) => (box ? [box] : [])),
+    ...pins.map(({ x, y }) => ({ x: x - PIN / 2, y: y - PIN / 2, width: PIN, height: PIN })),
   ];
   const cursorBox =
     cursor && apart ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: dots }) : null;
@@ -220,7 +273,7 @@ const around = ({ x, y }: { x: number; y: number }) => ({
 });
 
 function sentence(props: HydrographProps, peak: HydrographProps['peak']): string {
-  const { label, series, quantity, unitSystem, t } = props;
+  const { label, series, observed, quantity, unitSystem, t } = props;
   const n = series.times.length;
   if (!n) return `${label}: no values`;
   const span = series.times[n - 1] - series.times[0];
@@ -229,5 +282,9 @@ function sentence(props: HydrographProps, peak: HydrographProps['peak']): string
   if (peak) parts.push(`highest ${value(peak.value)} at ${shortTime(peak.time, span)}`);
   if (t !== null)
     parts.push(`${value(valueAt(series.times, series.values, t))} at ${shortTime(t, span)}`);
+  const seen = observed && peakOf(observed);
+  if (seen) parts.push(`observed at most ${value(seen.value)} at ${shortTime(seen.time, span)}`);
   return parts.join('; ');
 }
+
+const NONE: never[] = [];

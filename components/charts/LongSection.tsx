@@ -11,13 +11,18 @@ import { nearestIndex, valueAt } from './geometry/interpolate';
 import {
   longSectionFrame,
   wetSurface,
-  withStructures,
+  withRoomFor,
   type LongProfile,
+  type ObservedLevel,
 } from './geometry/longProfile';
 import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
+import { pointPins } from './geometry/pointPins';
 import { LevelMarks } from './LevelMarks';
+import { ObservedMarks } from './ObservedMarks';
 import { PlaceAxis } from './PlaceAxis';
+import { PointPins, type RaisedPoint } from './PointPins';
+import { PointPresses } from './PointPresses';
 import { Reading, readingBox, type ReadingText } from './Reading';
 import { StationMarks } from './StationMarks';
 import { StructureMarks } from './StructureMarks';
@@ -32,6 +37,11 @@ export interface LongSectionProps {
   stations?: readonly { name: string; chainage: number }[];
   /** Levels named at stations, m. */
   levels?: readonly { chainage: number; level: number }[];
+  /** Levels that a flood was seen at. */
+  observed?: readonly ObservedLevel[];
+  /** Points that were raised on places of the reach. */
+  points?: readonly PlacedPoint[];
+  onPoint?: (id: number) => void;
   /** What stands in the river; its breaches and its words as of the moment. */
   structures?: readonly StructureMark[];
   bottoms?: ReadonlyMap<string, number>;
@@ -49,18 +59,29 @@ export interface LongSectionProps {
   initialWidth?: number;
 }
 
+export interface PlacedPoint extends RaisedPoint {
+  /** m. */
+  chainage: number;
+}
+
 /** The reach from the side: ground as ground, water as water, the highest water dotted, the chosen place read out. */
 export function LongSection(props: LongSectionProps) {
-  const { sections, stations = NONE, structures = NONE, onChange, at, height = 320 } = props;
+  const { sections, stations = NONE, structures = NONE, observed = NONE, points = NONE } = props;
+  const { onChange, onPoint, at, height = 320 } = props;
   const profile = useMemo(
-    () => withStructures(props.profile, structures),
-    [props.profile, structures],
+    () => withRoomFor(props.profile, structures, observed),
+    [props.profile, structures, observed],
   );
   const stops = useMemo(
     () => placesAlong(sections, stations).map((place) => place.chainage),
     [sections, stations],
   );
-  const label = ['Long section', props.label, at === null ? '' : sentenceAt(props, at)];
+  const label = [
+    'Long section',
+    props.label,
+    observed.length ? `Observed levels: ${observed.length}` : '',
+    at === null ? '' : sentenceAt(props, at),
+  ];
   return (
     <ChartBox
       label={label.filter(Boolean).join('. ')}
@@ -74,6 +95,11 @@ export function LongSection(props: LongSectionProps) {
         };
         return onChange ? <DragSurface onDrag={drag} style={size} /> : null;
       }}
+      controls={
+        onPoint && points.length
+          ? (size) => <Presses {...props} {...{ profile, points, onPoint, size }} />
+          : undefined
+      }
     >
       {(size) => <Drawing {...props} profile={profile} size={size} />}
     </ChartBox>
@@ -82,20 +108,29 @@ export function LongSection(props: LongSectionProps) {
 
 type Sized = LongSectionProps & { size: { width: number; height: number } };
 
-function Drawing({
-  profile,
-  stage,
-  reading,
-  at,
-  unitSystem,
-  sections,
-  stations = NONE,
-  levels = NONE,
-  structures = NONE,
-  bottoms,
-  words,
-  size,
-}: Sized) {
+/** Boxes of the points above the highest water of their places, else above the bed. */
+function usePins({ profile, points = NONE, unitSystem, size: { width, height } }: Sized) {
+  return useMemo(() => {
+    const frame = longSectionFrame({ width, height }, profile, unitSystem);
+    const { bed, chainages, peakStage } = profile;
+    const pinned = points.map(({ id, chainage }) => ({
+      id,
+      x: frame.x(fromSi(chainage, 'chainage', unitSystem)),
+      y: frame.y(fromSi(valueAt(chainages, peakStage ?? bed, chainage), 'elevation', unitSystem)),
+    }));
+    return pointPins(pinned, frame);
+  }, [width, height, profile, points, unitSystem]);
+}
+
+function Presses(props: Sized & Required<Pick<LongSectionProps, 'points' | 'onPoint'>>) {
+  return <PointPresses pins={usePins(props)} points={props.points} onPoint={props.onPoint} />;
+}
+
+function Drawing(props: Sized) {
+  const { profile, stage, reading, at, unitSystem, sections, size } = props;
+  const { stations = NONE, levels = NONE, structures = NONE, bottoms, words } = props;
+  const { observed = NONE, points = NONE } = props;
+  const pins = usePins(props);
   const { colours } = useTheme();
   const { width, height } = size;
   const frame = useMemo(
@@ -140,7 +175,9 @@ function Drawing({
         unitSystem={unitSystem}
       />
       <LevelMarks {...{ levels, frame, unitSystem }} />
+      <ObservedMarks {...{ observed, frame, unitSystem }} />
       <StructureMarks {...{ structures, profile, frame, unitSystem, bottoms, words }} />
+      <PointPins {...{ pins, points }} />
       <PlaceAxis frame={frame} ticks={frame.xTicks} />
       <ChartText x={frame.left} y={14}>
         {`${stage || profile.peakStage ? 'stage' : 'elevation'}, ${UNITS[unitSystem].elevation.symbol} above datum`}

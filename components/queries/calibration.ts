@@ -9,8 +9,9 @@ import { studyKeys } from './studies';
 import { taskSetChanged } from './tasks';
 
 /** A run against an observed flood; without a name against the one that is reported, else the first. */
-export const useResiduals = (runId: number, flood: string | null) =>
+export const useResiduals = (runId: number, flood: string | null, enabled = true) =>
   useQuery({
+    enabled,
     queryKey: runKeys.result(runId, 'residuals', flood ?? ' first'),
     queryFn: ({ signal }) =>
       api.get<RunResiduals>(`/runs/${runId}/residuals`, {

@@ -23,6 +23,8 @@ export interface HydrographModel {
   valueTicks: number[];
   main: Curve;
   compare: Curve | null;
+  /** What was observed within the time that is drawn: points without a line between them. */
+  observed: Polyline | null;
   levels: LevelLine[];
   /** px of an SI value. */
   yOf: (value: number) => number;
@@ -38,10 +40,19 @@ export function hydrographModel(
   compare: Series | null,
   quantity: Quantity,
   unitSystem: UnitSystem,
-  levels: readonly NamedLevel[] = [],
+  {
+    levels = [],
+    observed = null,
+  }: { levels?: readonly NamedLevel[]; observed?: Series | null } = {},
 ): HydrographModel {
   const unit = (value: number) => fromSi(value, quantity, unitSystem);
-  const rows = compare ? [series.values, compare.values] : [series.values];
+  const x = extentOf(series.times) ?? [0, 1];
+  const seen = observed && within(observed, x);
+  const rows = [
+    series.values,
+    ...(compare ? [compare.values] : []),
+    ...(seen ? [seen.values] : []),
+  ];
   const zero = quantity === 'elevation' ? [] : [[0]];
   const drawn: [number, number] = extentOf(...rows, ...zero) ?? [0, 1];
   const near = levelsNear(levels, ...drawn, LEAST[quantity] ?? 1);
@@ -50,7 +61,6 @@ export function hydrographModel(
     near.map(({ level }) => level),
   )!;
   const y = roomyExtent([unit(low), unit(high)], unit(LEAST[quantity] ?? 1), 4);
-  const x = extentOf(series.times) ?? [0, 1];
   const frame = makeFrame(size, MARGINS, x, y);
   const yOf = (value: number) => frame.y(unit(value));
   const curve = ({ times, values }: Series): Curve => {
@@ -64,6 +74,7 @@ export function hydrographModel(
     valueTicks: valueTicks(y, frame.bottom - frame.top, 26),
     main: curve(series),
     compare: compare ? curve(within(compare, x)) : null,
+    observed: seen && { x: project(seen.times, frame.x), y: project(seen.values, yOf) },
     levels: levelLines(near, yOf, frame.left, type.caption.fontSize),
     yOf,
   };

@@ -9,8 +9,15 @@ export interface LongProfile {
   leftBank?: ArrayLike<number> | null;
   rightBank?: ArrayLike<number> | null;
   peakStage?: ArrayLike<number> | null;
-  /** Tops of structures: they fit as well. */
-  tops?: readonly number[];
+  /** Tops of structures and levels that were observed: they fit as well. */
+  heights?: readonly number[];
+}
+
+/** How high the water was seen to stand, m; a model that fits lies within the tolerance. */
+export interface ObservedLevel {
+  chainage: number;
+  level: number;
+  tolerance: number;
 }
 
 /** Thinner water than this is drawn as dry ground, m. */
@@ -26,7 +33,8 @@ export function longSectionFrame(
   profile: LongProfile,
   system: UnitSystem,
 ): Frame & { xTicks: number[]; yTicks: number[] } {
-  const rows = [profile.bed, profile.leftBank, profile.rightBank, profile.peakStage, profile.tops];
+  const { bed, leftBank, rightBank, peakStage, heights } = profile;
+  const rows = [bed, leftBank, rightBank, peakStage, heights];
   const extent = extentOf(...rows.filter((row) => row != null)) ?? [0, 1];
   const foot = extent[0] - FOOT * (extent[1] - extent[0]);
   const y = roomyExtent(
@@ -47,14 +55,19 @@ export function longSectionFrame(
   };
 }
 
-/** The same profile with room for what stands in it. */
-export const withStructures = (
+/** The same profile with room for what stands in it and for what was observed of it. */
+export function withRoomFor(
   profile: LongProfile,
   structures: readonly { top: number | null }[],
-): LongProfile =>
-  structures.length === 0
-    ? profile
-    : { ...profile, tops: structures.flatMap(({ top }) => (top === null ? [] : [top])) };
+  observed: readonly ObservedLevel[],
+): LongProfile {
+  if (structures.length === 0 && observed.length === 0) return profile;
+  const heights = [
+    ...structures.flatMap(({ top }) => top ?? []),
+    ...observed.flatMap(({ level, tolerance }) => [level - tolerance, level + tolerance]),
+  ];
+  return { ...profile, heights };
+}
 
 /** The surface where there is water; NaN, which lifts the pen, where there is none. */
 export function wetSurface(bed: ArrayLike<number>, stage: ArrayLike<number>): Float64Array {

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
@@ -17,8 +18,10 @@ import { usePlaceResults } from '../runs/results/usePlaceResults';
 import { CheckActions } from './CheckActions';
 import { checkCrumbs } from './checkCrumbs';
 import { ChecklistCard } from './ChecklistCard';
+import { jumpToPoint } from './jumpToPoint';
 import { NoteCard } from './NoteCard';
 import { PointsCard } from './PointsCard';
+import { raisedPoints } from './raisedPoints';
 import { runBadge } from './reviewWords';
 import { SendCard } from './SendCard';
 import { SignOffCard } from './SignOffCard';
@@ -38,6 +41,12 @@ export function CheckContent({ run, review, summary }: Props) {
   const place = usePlaceResults(run, summary, usePlace(store));
   const common = { run, summary, store };
   const { isWide } = useBreakpoint();
+  const system = useUnitSystem();
+  const raised = useMemo(
+    () => raisedPoints(review.points, summary.stations, run.duration, system),
+    [review.points, summary.stations, run.duration, system],
+  );
+  const pinned = { raised, onPoint: jumpToPoint };
   const wasSent = review.state !== null;
   const actions = <CheckActions run={run} review={review} />;
   const signature = review.signOff ? (
@@ -73,8 +82,8 @@ export function CheckContent({ run, review, summary }: Props) {
         </>
       )}
       {review.may.includes('review.send') ? <SendCard run={run} review={review} /> : null}
-      <LongSectionCard {...common} place={place} />
-      <StageCard {...common} place={place} />
+      <LongSectionCard {...common} {...pinned} place={place} />
+      <StageCard {...common} {...pinned} place={place} />
       {isWide ? null : points}
       <ChecklistCard run={run} review={review} />
       {wasSent ? <NoteCard review={review} /> : null}

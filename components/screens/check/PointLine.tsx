@@ -11,12 +11,15 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Review, ReviewPoint } from '@/shared/review/types';
 import type { Run } from '@/shared/runs/types';
 import { wallClock } from '@/components/ui/wallClock';
+import { pointAnchor } from './jumpToPoint';
 import { PointReply } from './PointReply';
 import { pointSteps } from './pointSteps';
 import { POINT_STATES, pointPlace } from './reviewWords';
 
 interface Props {
   point: ReviewPoint;
+  /** As on the drawings and in the report. */
+  number: number;
   run: Run;
   may: Review['may'];
   stations: readonly { name: string; chainage: number }[];
@@ -26,7 +29,7 @@ interface Props {
 const KINDS = { answer: 'answers', closed: 'closes it', reopened: 'opens it again' } as const;
 
 /** One point with what was said to it, and what may be done next. */
-export function PointLine({ point, run, may, stations, store }: Props) {
+export function PointLine({ point, number, run, may, stations, store }: Props) {
   const unitSystem = useUnitSystem();
   const [step, setStep] = useState<PointStep | null>(null);
   const { chainage, time } = point;
@@ -37,8 +40,9 @@ export function PointLine({ point, run, may, stations, store }: Props) {
       ...(time === null ? {} : { t: time }),
     });
   return (
-    <View style={styles.point}>
+    <View style={styles.point} id={pointAnchor(point.id)} tabIndex={-1}>
       <View style={styles.head}>
+        <Txt strong>{`Point ${number}`}</Txt>
         <View>
           <Badge {...POINT_STATES[point.state]} />
         </View>

@@ -7,8 +7,10 @@ import { Txt } from '@/components/ui/Txt';
 import type { Review } from '@/shared/review/types';
 import type { Run, RunSummary } from '@/shared/runs/types';
 import { PointLine } from './PointLine';
+import { pointNumbers } from './raisedPoints';
 import { RaisePoint } from './RaisePoint';
 import { sortPoints } from './reviewWords';
+import { usePointOfAddress } from './usePointOfAddress';
 
 interface Props {
   run: Run;
@@ -20,6 +22,8 @@ interface Props {
 /** The discussion of a run, point by point; nothing is signed while one is open. */
 export function PointsCard({ run, review, summary, store }: Props) {
   const [isRaising, setIsRaising] = useState(false);
+  const numbers = pointNumbers(review.points);
+  usePointOfAddress();
   const mayRaise = review.may.includes('review.raise');
   const unsettled = review.points.filter(({ state }) => state !== 'closed').length;
   return (
@@ -47,6 +51,7 @@ export function PointsCard({ run, review, summary, store }: Props) {
             <PointLine
               key={point.id}
               point={point}
+              number={numbers.get(point.id)!}
               run={run}
               may={review.may}
               stations={summary.stations}

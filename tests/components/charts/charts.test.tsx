@@ -1,4 +1,4 @@
-import { render, screen } from '@testing-library/react';
+import { fireEvent, render, screen } from '@testing-library/react';
 import { CrossSection } from '@/components/charts/CrossSection';
 import { Hydrograph } from '@/components/charts/Hydrograph';
 import { LongSection } from '@/components/charts/LongSection';
@@ -112,4 +112,59 @@ test('a cross-section tells its water, in the units of the study', () => {
   expect(label).toContain('dry at this time');
   // 2 m are 6.6 ft, 18 m are 59.1 ft.
   expect(label).toContain('banks at 6.6 and 59.1 ft');
+});
+
+const RAISED = [
+  { id: 41, number: 1, isClosed: true, words: 'Point 1, closed', chainage: 500, time: 3600 },
+  { id: 52, number: 2, isClosed: false, words: 'Point 2, open', chainage: 500, time: 7200 },
+];
+
+test.each(['on the long section', 'on a hydrograph'])(
+  'points that were raised %s are numbered, and each leads to itself',
+  (where) => {
+    const onPoint = jest.fn();
+    const common = { points: RAISED, onPoint, unitSystem: 'metric', initialWidth: 352 } as const;
+    const { container } = render(
+      where === 'on the long section' ? (
+        <LongSection
+          {...common}
+          profile={{ chainages: [0, 1000], bed: [40, 39], peakStage: [44, 43] }}
+          sections={[]}
+          at={null}
+        />
+      ) : (
+        <Hydrograph {...common} label="Stage" quantity="elevation" series={stage} t={null} />
+      ),
+    );
+    fireEvent.click(screen.getByRole('button', { name: 'Point 2, open' }));
+    expect(onPoint.mock.calls).toEqual([[52]]);
+    // A screen reader sees nothing within an image.
+    expect(container.querySelector('[role="img"] [role="button"]')).toBeNull();
+    const boxes = [...container.querySelectorAll('rect')].map((box) => box.getAttribute('fill'));
+    expect(new Set(boxes).size).toBe(2);
+    expect(container.textContent).toContain('12');
+  },
+);
+
+test('a level that a flood was seen at fits into the long section, however high', () => {
+  const { container } = render(
+    <LongSection
+      profile={{ chainages: [0, 1000], bed: [40, 39], peakStage: [44, 43] }}
+      observed={[
+        { chainage: 400, level: 61, tolerance: 0.5 },
+        { chainage: 5000, level: 41, tolerance: 0.5 },
+      ]}
+      sections={[]}
+      at={null}
+      unitSystem="metric"
+      initialWidth={352}
+    />,
+  );
+  expect(screen.getByRole('img', { name: /Observed levels: 2/ })).toBeTruthy();
+  const crosses = [...container.querySelectorAll('path')].filter((path) =>
+    path.getAttribute('d')!.includes('l8 8M'),
+  );
+  expect(crosses).toHaveLength(1);
+  const y = Number(/^M[\d.]+ ([\d.]+)/.exec(crosses[0].getAttribute('d')!)![1]);
+  expect(y).toBeGreaterThan(20);
 });

@@ -3,6 +3,7 @@ import { LongSection } from '@/components/charts/LongSection';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, useTime } from '@/components/charts/usePlaceAndTime';
 import { valueAt } from '@/components/charts/geometry/interpolate';
+import type { ObservedLevel } from '@/components/charts/geometry/longProfile';
 import { surfaceFrame } from '@/components/charts/geometry/surfaceFrame';
 import { momentWords } from '@/components/charts/geometry/timeWords';
 import { useBreakpoint } from '@/components/theme/useBreakpoint';
@@ -11,6 +12,7 @@ import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary, RunSurface } from '@/shared/runs/types';
+import type { RaisedPoints } from '../../check/raisedPoints';
 import type { PlaceResults } from './usePlaceResults';
 import { useStructuresAt } from './useStructuresAt';
 import { useResultSurface } from './useResultSurface';
@@ -20,6 +22,10 @@ interface Props {
   summary: RunSummary;
   store: PlaceAndTimeStore;
   place: PlaceResults;
+  /** Levels that a flood was seen at. */
+  observed?: readonly ObservedLevel[];
+  raised?: RaisedPoints;
+  onPoint?: (id: number) => void;
 }
 
 /** The whole reach at the chosen time. */
@@ -41,7 +47,8 @@ export function LongSectionCard(props: Props) {
   );
 }
 
-function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSurface }) {
+function Drawn(props: Props & { surface: RunSurface }) {
+  const { run, summary, store, place, surface, observed, raised, onPoint } = props;
   const unitSystem = useUnitSystem();
   const { isWide } = useBreakpoint();
   const at = usePlace(store);
@@ -57,11 +64,17 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
       : null;
   const standing = useStructuresAt(run.id, summary.structures, t);
   const moment = momentWords(t, run.duration, run.startsAt);
+  const legend = [
+    'peak dotted',
+    'banks dashed',
+    ...(observed?.length ? ['observed crossed'] : []),
+    ...(raised?.placed.length ? ['points numbered'] : []),
+  ].join(' · ');
   return (
     <Card
       title="Long section"
       // On a phone the time stands below, at the ribbon.
-      aside={isWide ? `${moment} · ${LEGEND}` : LEGEND}
+      aside={isWide ? `${moment} · ${legend}` : legend}
     >
       <LongSection
         profile={surface}
@@ -70,6 +83,9 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
         stations={summary.stations}
         levels={summary.levels}
         structures={summary.structures}
+        observed={observed}
+        points={raised?.placed}
+        onPoint={onPoint}
         {...standing}
         at={at}
         onChange={store.setAt}
@@ -81,5 +97,3 @@ function Drawn({ run, summary, store, place, surface }: Props & { surface: RunSu
     </Card>
   );
 }
-
-const LEGEND = 'peak dotted · banks dashed';

@@ -3,8 +3,11 @@ import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
+import { gaugeRecordAt } from '@/shared/calibration/gaugeRecordAt';
+import type { RunResiduals } from '@/shared/calibration/types';
 import type { Run, RunSeries, RunSummary } from '@/shared/runs/types';
 import { levelName } from '@/shared/studies/stationLevels';
+import { pointsAt, type RaisedPoints } from '../../check/raisedPoints';
 import { RatingCard } from './RatingCard';
 import { SeriesCard } from './SeriesCard';
 import type { PlaceResults } from './usePlaceResults';
@@ -14,10 +17,14 @@ interface Props {
   summary: RunSummary;
   place: PlaceResults;
   store: PlaceAndTimeStore;
+  /** The run against the observed flood that was chosen to be shown. */
+  residuals: RunResiduals | null;
+  raised: RaisedPoints;
+  onPoint: (id: number) => void;
 }
 
 /** Stage, flow and velocity against time at the chosen place. */
-export function PlaceSeries({ run, summary, place, store }: Props) {
+export function PlaceSeries({ summary, place, ...rest }: Props) {
   if (place.error)
     return (
       <ErrorState
@@ -32,26 +39,17 @@ export function PlaceSeries({ run, summary, place, store }: Props) {
         <Loading what="Reading the values at this place…" />
       </Card>
     );
-  return (
-    <Curves
-      run={run}
-      levels={summary.levels}
-      series={place.series}
-      place={place.name}
-      store={store}
-    />
-  );
+  return <Curves {...rest} levels={summary.levels} series={place.series} place={place.name} />;
 }
 
-interface CurvesProps {
-  run: Run;
+interface CurvesProps extends Pick<Props, 'run' | 'store' | 'residuals' | 'raised' | 'onPoint'> {
   levels: RunSummary['levels'];
   series: RunSeries;
   place: string;
-  store: PlaceAndTimeStore;
 }
 
-function Curves({ run, levels, series, place, store }: CurvesProps) {
+function Curves(props: CurvesProps) {
+  const { run, levels, series, place, store, residuals, raised, onPoint } = props;
   const { startsAt, inflow } = run;
   const { times, stage, flow, velocity, peaks } = series;
   const curves = useMemo(
@@ -73,23 +71,34 @@ function Curves({ run, levels, series, place, store }: CurvesProps) {
     () => (inflow.times.length ? { times: inflow.times, values: inflow.flows } : null),
     [inflow],
   );
-  const common = { place, store, startsAt };
+  const seen = useMemo(
+    () => ({
+      stage: gaugeRecordAt(residuals, series.chainage, 'stage'),
+      flow: gaugeRecordAt(residuals, series.chainage, 'flow'),
+    }),
+    [residuals, series.chainage],
+  );
+  const points = useMemo(() => pointsAt(raised, series.chainage), [raised, series.chainage]);
+  const common = { place, store, startsAt, points, onPoint };
   return (
     <>
       <SeriesCard
         {...common}
         title="Stage"
         quantity="elevation"
+        note={noteOf(seen.stage && 'observed crossed')}
         series={curves.stage}
+        observed={seen.stage}
         levels={here}
         peak={{ value: peaks.peakStage, time: peaks.peakStageTime }}
       />
       <SeriesCard
         {...common}
         title="Flow"
-        note={given ? 'inflow dashed' : undefined}
+        note={noteOf(given && 'inflow dashed', seen.flow && 'observed crossed')}
         quantity="flow"
         series={curves.flow}
+        observed={seen.flow}
         compare={given}
         peak={{ value: peaks.peakFlow, time: peaks.peakFlowTime }}
       />
@@ -98,3 +107,6 @@ function Curves({ run, levels, series, place, store }: CurvesProps) {
     </>
   );
 }
+
+const noteOf = (...words: (string | null)[]): string | undefined =>
+  words.filter((word) => word !== null).join(', ') || undefined;

@@ -19,6 +19,7 @@ import { AlongCard } from './AlongCard';
 import { ComputedCard } from './ComputedCard';
 import { LevelsCard } from './LevelsCard';
 import { LongSectionCard } from './LongSectionCard';
+import { ObservedCard } from './ObservedCard';
 import { PeaksCard } from './PeaksCard';
 import { PlaceFigures } from './PlaceFigures';
 import { PlaceSeries } from './PlaceSeries';
@@ -28,7 +29,9 @@ import { SectionCard } from './SectionCard';
 import { StructuresCard } from './StructuresCard';
 import { TimeBar } from './TimeBar';
 import { useFirstLook } from './useFirstLook';
+import { useObservedFlood } from './useObservedFlood';
 import { usePlaceResults } from './usePlaceResults';
+import { useRaisedPoints } from './useRaisedPoints';
 import { VolumeCard } from './VolumeCard';
 import { WarningsCard } from './WarningsCard';
 
@@ -54,6 +57,15 @@ function Results({ run, summary }: Props) {
   const download = useRunDownload(run.id);
   const place = usePlaceResults(run, summary, usePlace(store));
   const common = { run, summary, store };
+  const observed = useObservedFlood(run);
+  const pinned = useRaisedPoints(run, summary);
+  const longSection = (
+    <LongSectionCard {...common} {...pinned} place={place} observed={observed.levels} />
+  );
+  const series = (
+    <PlaceSeries {...common} {...pinned} place={place} residuals={observed.residuals} />
+  );
+  const seen = observed.floods.length > 0 ? <ObservedCard {...{ run, observed, store }} /> : null;
 
   return (
     <Screen
@@ -71,7 +83,7 @@ function Results({ run, summary }: Props) {
         isWide ? (
           <>
             <PlaceFigures {...common} place={place} />
-            <PlaceSeries {...common} place={place} />
+            {series}
             <SectionCard {...common} />
           </>
         ) : null
@@ -82,12 +94,16 @@ function Results({ run, summary }: Props) {
         <ErrorState error={download.error} title="The file could not be saved" />
       ) : null}
       {isWide ? (
-        <LongSectionCard {...common} place={place} />
+        <>
+          {longSection}
+          {seen}
+        </>
       ) : (
         <>
           <PlaceFigures {...common} place={place} />
-          <LongSectionCard {...common} place={place} />
-          <PlaceSeries {...common} place={place} />
+          {longSection}
+          {series}
+          {seen}
           <SectionCard {...common} />
         </>
       )}

@@ -13,7 +13,15 @@ import { SeriesTable } from './SeriesTable';
 
 interface Props extends Pick<
   HydrographProps,
-  'quantity' | 'series' | 'compare' | 'peak' | 'isGround' | 'levels'
+  | 'quantity'
+  | 'series'
+  | 'compare'
+  | 'peak'
+  | 'isGround'
+  | 'levels'
+  | 'observed'
+  | 'points'
+  | 'onPoint'
 > {
   title: string;
   /** Where, for the names. */
@@ -27,7 +35,7 @@ interface Props extends Pick<
 /** One quantity against time at the chosen place; the table behind it one press away. */
 export function SeriesCard(props: Props) {
   const { title, place, note, quantity, series, compare, peak, isGround, store, startsAt } = props;
-  const { levels } = props;
+  const { levels, observed, points, onPoint } = props;
   const unitSystem = useUnitSystem();
   // While the flood plays, the long section goes first; the curves follow as the machine allows.
   const t = useDeferredValue(useTime(store));
@@ -60,6 +68,7 @@ export function SeriesCard(props: Props) {
         <Hydrograph
           label={name}
           {...{ quantity, series, compare, peak, levels, isGround, t, unitSystem }}
+          {...{ observed, points, onPoint }}
           onChange={store.setT}
         />
       )}

@@ -33,3 +33,16 @@ test('the peak is the first of the highest', () => {
   expect(peakOf({ times: [0, 1, 2, 3], values: [1, 5, 5, 2] })).toEqual({ value: 5, time: 1 });
   expect(peakOf({ times: [], values: [] })).toBeNull();
 });
+
+test('what was observed fits into the drawing, and only what falls within its time is drawn', () => {
+  const observed = { times: [-3600, 3600, 7200, 1e6], values: [0, 60, 70, 0] };
+  const plain = hydrographModel(size, flow, null, 'flow', 'metric');
+  const model = hydrographModel(size, flow, null, 'flow', 'metric', { observed });
+  const last = flow.times[flow.times.length - 1];
+  expect(last).toBeLessThan(1e6);
+  expect(model.observed!.x).toHaveLength(2);
+  expect(model.observed!.y[1]).toBeCloseTo(model.yOf(70), 9);
+  const high = { times: [3600], values: [2 * plain.frame.y.domain()[1]] };
+  const taller = hydrographModel(size, flow, null, 'flow', 'metric', { observed: high });
+  expect(taller.frame.y.domain()[1]).toBeGreaterThanOrEqual(high.values[0]);
+});
