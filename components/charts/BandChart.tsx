@@ -2,13 +2,14 @@ import { memo, useMemo } from 'react';
 import { Circle, Line, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
 import { formatWithUnit } from '@/shared/units/format';
-import type { Quantity, UnitSystem } from '@/shared/units/units';
+import { UNITS, type Quantity, type UnitSystem } from '@/shared/units/units';
 import { ChartBox, type ChartSize } from './ChartBox';
 import { ChartText } from './ChartText';
 import { DragSurface } from './DragSurface';
 import { bandModel, type BandAxis, type BandData, type BandModel } from './geometry/bandModel';
 import { nearestIndex } from './geometry/interpolate';
 import { shortTime } from './geometry/timeWords';
+import { KeyList, type KeyEntry } from './KeyList';
 import { PlaceAxis } from './PlaceAxis';
 import { Reading, readingBox, type ReadingText } from './Reading';
 import { TimeAxis } from './TimeAxis';
@@ -21,8 +22,8 @@ export interface BandChartProps {
   quantity: Extract<Quantity, 'elevation' | 'depth' | 'flow'>;
   /** Keep the same object while only the cursor moves. */
   data: BandData;
-  /** Words for the values that the cursor reads out. */
-  names: { line: string; band?: string; level?: string };
+  /** Words for what is drawn; the cursor reads line and band out. */
+  names: { line: string; band?: string; level?: string; compare?: string };
   /** Chosen time, s, or chainage, m. */
   at: number | null;
   onChange?: (at: number) => void;
@@ -37,14 +38,27 @@ export const BandChart = memo(function BandChart(props: BandChartProps) {
   return (
     <ChartBox
       label={sentence(props)}
+      unit={UNITS[props.unitSystem][props.quantity].symbol}
       height={height}
       initialWidth={props.initialWidth}
       over={(size) => (onChange ? <Drag {...props} onChange={onChange} size={size} /> : null)}
+      legend={data.x.length ? <Key {...props} /> : null}
     >
       {(size) => (data.x.length ? <Drawing {...props} size={size} /> : null)}
     </ChartBox>
   );
 });
+
+/** One line alone is told by the title. */
+function Key({ data, names }: BandChartProps) {
+  const { colours } = useTheme();
+  const entries: KeyEntry[] = [{ words: names.line, colour: colours.water }];
+  if (data.band && names.band)
+    entries.push({ words: names.band, colour: colours.waterTint, as: 'band' });
+  if (data.compare && names.compare)
+    entries.push({ words: names.compare, colour: colours.soft, dash: '5 4' });
+  return entries.length > 1 ? <KeyList entries={entries} /> : null;
+}
 
 type Sized = BandChartProps & { size: ChartSize };
 
@@ -76,7 +90,12 @@ function Drawing(props: Sized) {
       {timeTicks ? (
         <TimeAxis frame={frame} ticks={timeTicks} />
       ) : (
-        <PlaceAxis frame={frame} ticks={placeTicks} />
+        <>
+          <PlaceAxis frame={frame} ticks={placeTicks} />
+          <ChartText x={frame.right} y={frame.bottom - 6} anchor="end">
+            {`chainage, ${UNITS[props.unitSystem].chainage.symbol}`}
+          </ChartText>
+        </>
       )}
       <Curves model={model} />
       <Level {...props} model={model} />

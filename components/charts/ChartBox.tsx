@@ -19,6 +19,8 @@ interface Props {
   over?: (size: ChartSize) => ReactNode;
   /** What can be reached by keys on the drawing: beside the image, whose parts a screen reader does not see. */
   controls?: (size: ChartSize) => ReactNode;
+  /** Below the drawing: a list of how each curve is drawn and what it is. */
+  legend?: ReactNode;
 }
 
 export interface ChartSize {
@@ -27,7 +29,8 @@ export interface ChartSize {
 }
 
 /** A drawing as wide as the place it is given; under it, where its source is known, a picture of it to take away. */
-export function ChartBox({ label, unit, height, initialWidth, children, over, controls }: Props) {
+export function ChartBox(props: Props) {
+  const { label, unit, height, initialWidth, children, over, controls, legend } = props;
   const { width, measured } = useWidth(initialWidth);
   const source = usePictureSource();
   const outer = useRef<View>(null);
@@ -49,13 +52,17 @@ export function ChartBox({ label, unit, height, initialWidth, children, over, co
   ) : (
     image
   );
-  if (!source) return box;
-  const drawing = () =>
-    (outer.current as unknown as HTMLElement | null)?.querySelector('svg') ?? null;
+  if (!source && !legend) return box;
   return (
     <View ref={outer} style={styles.outer}>
       {box}
-      <PictureButton {...{ label, unit, source, drawing }} />
+      {legend}
+      {source ? (
+        <PictureButton
+          {...{ label, unit, source }}
+          box={() => outer.current as unknown as Element | null}
+        />
+      ) : null}
     </View>
   );
 }

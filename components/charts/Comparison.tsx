@@ -37,6 +37,7 @@ export function Comparison({ label, curves, quantity, height = 220, initialWidth
   return (
     <ChartBox
       label={`${label}: computed over exact${reading}`}
+      unit={curves.along === 'time' ? UNIT[quantity] : `${UNIT[quantity]}, along chainage, m`}
       height={height}
       initialWidth={initialWidth}
       over={(size) => <Drag curves={curves} quantity={quantity} size={size} onChoose={setChosen} />}
@@ -187,4 +188,6 @@ function Cursor({ curves, quantity, frame, chosen }: CursorProps) {
 
 /** With the digits that tell computed from exact. */
 const value = (si: number, quantity: ComparedQuantity): string =>
-  `${formatError(si).replace(/^-/, '−')} ${quantity === 'stage' ? 'm' : 'm³/s'}`;
+  `${formatError(si).replace(/^-/, '−')} ${UNIT[quantity]}`;
+
+const UNIT: Record<ComparedQuantity, string> = { stage: 'm', flow: 'm³/s' };

@@ -30,7 +30,11 @@ export interface CrossSectionProps {
 export const CrossSection = memo(function CrossSection(props: CrossSectionProps) {
   const { height = 200, initialWidth } = props;
   return (
-    <ChartBox label={sentence(props)} height={height} initialWidth={initialWidth}>
+    <ChartBox
+      label={sentence(props)}
+      unit={`elevation and offset in ${UNITS[props.unitSystem].length.symbol}`}
+      {...{ height, initialWidth }}
+    >
       {(size) => <Drawing {...props} size={size} />}
     </ChartBox>
   );

@@ -38,17 +38,15 @@ export function CurveSet(props: CurveSetProps) {
   const { label, curves, onChange, height = 260, at = null } = props;
   const names = curves.map(({ name }) => name).join('; ');
   return (
-    <>
-      <ChartBox
-        label={`${label}: ${names}`}
-        height={height}
-        initialWidth={props.initialWidth}
-        over={(size) => (onChange ? <Drag {...props} onChange={onChange} size={size} /> : null)}
-      >
-        {(size) => <Drawing {...props} size={size} />}
-      </ChartBox>
-      <CurveLegend {...props} at={at} />
-    </>
+    <ChartBox
+      label={`${label}: ${names}`}
+      height={height}
+      initialWidth={props.initialWidth}
+      over={(size) => (onChange ? <Drag {...props} onChange={onChange} size={size} /> : null)}
+      legend={<CurveLegend {...props} at={at} />}
+    >
+      {(size) => <Drawing {...props} size={size} />}
+    </ChartBox>
   );
 }
 

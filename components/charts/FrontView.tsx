@@ -27,7 +27,11 @@ interface FrontViewProps {
 export const FrontView = memo(function FrontView(props: FrontViewProps) {
   const { height = 180, initialWidth } = props;
   return (
-    <ChartBox label={sentence(props)} height={height} initialWidth={initialWidth}>
+    <ChartBox
+      label={sentence(props)}
+      unit={`elevation in ${UNITS[props.unitSystem].elevation.symbol}`}
+      {...{ height, initialWidth }}
+    >
       {(size) => <Drawing {...props} size={size} />}
     </ChartBox>
   );

@@ -22,8 +22,14 @@ interface Props {
 
 /** Stage against flow: the loop that a flood draws at a place, rising whole and falling dashed, with the way it goes. */
 export const RatingLoop = memo(function RatingLoop({ height = 220, ...props }: Props) {
+  const unit = UNITS[props.unitSystem];
   return (
-    <ChartBox label={sentence(props)} height={height} initialWidth={props.initialWidth}>
+    <ChartBox
+      label={sentence(props)}
+      unit={`${unit.elevation.symbol} over ${unit.flow.symbol}`}
+      height={height}
+      initialWidth={props.initialWidth}
+    >
       {(size) => <Drawing {...props} size={size} />}
     </ChartBox>
   );
@@ -42,13 +48,14 @@ function Drawing({ series, t, unitSystem, size }: Props & { size: ChartSize }) {
   return (
     <>
       <ValueAxis frame={frame} ticks={model.stageTicks} />
-      {flowTicks.map((tick, i) => (
+      {flowTicks.map((tick) => (
         <ChartText key={tick} x={frame.x(tick)} y={frame.bottom + 18} anchor="middle">
-          {i === flowTicks.length - 1
-            ? `${formatNumber(tick, decimals)} ${UNITS[unitSystem].flow.symbol}`
-            : formatNumber(tick, decimals)}
+          {formatNumber(tick, decimals)}
         </ChartText>
       ))}
+      <ChartText x={frame.right} y={frame.bottom - 6} anchor="end">
+        {`flow, ${UNITS[unitSystem].flow.symbol}`}
+      </ChartText>
       <Path d={model.falling} {...curve} strokeDasharray="6 4" />
       <Path d={model.rising} {...curve} />
       {model.arrows.map(({ x, y, turn }) => (

@@ -1,5 +1,6 @@
 import { useRef, type ReactNode } from 'react';
 import { ScrollView, StyleSheet, View, type Text } from 'react-native';
+import { PictureProvider, type PictureSource } from '@/components/charts/picture/pictureContext';
 import { hairline, space, widths } from '../theme/tokens';
 import { useBreakpoint } from '../theme/useBreakpoint';
 import { useTheme } from '../theme/useTheme';
@@ -26,11 +27,14 @@ interface ScreenProps {
   footer?: ReactNode;
   /** Keeps forms and prose to a readable width. */
   narrow?: boolean;
+  /** Where its drawings come from: each then offers a picture of itself. */
+  picture?: PictureSource | null;
 }
 
 /** Every screen: where one is, what it is, the work, and what to do next. */
 export function Screen(props: ScreenProps) {
-  const { title, crumbs, badge, actions, lead, ribbon, children, side, footer, narrow } = props;
+  const { title, crumbs, badge, actions, lead, ribbon, children, side, footer } = props;
+  const { narrow, picture = null } = props;
   const { isWide } = useBreakpoint();
   const { colours } = useTheme();
   const heading = useRef<Text>(null);
@@ -70,18 +74,20 @@ export function Screen(props: ScreenProps) {
           {isWide && actions ? <View style={styles.actions}>{actions}</View> : null}
         </View>
         {ribbon}
-        <View style={isWide && side ? styles.columns : styles.stack}>
-          <View
-            style={[
-              styles.work,
-              isWide && side ? styles.workBeside : null,
-              narrow ? styles.narrow : null,
-            ]}
-          >
-            {children}
+        <PictureProvider value={picture}>
+          <View style={isWide && side ? styles.columns : styles.stack}>
+            <View
+              style={[
+                styles.work,
+                isWide && side ? styles.workBeside : null,
+                narrow ? styles.narrow : null,
+              ]}
+            >
+              {children}
+            </View>
+            {side ? <View style={isWide ? styles.side : styles.work}>{side}</View> : null}
           </View>
-          {side ? <View style={isWide ? styles.side : styles.work}>{side}</View> : null}
-        </View>
+        </PictureProvider>
         {!isWide && footer && actions ? <View style={styles.actionsPhone}>{actions}</View> : null}
       </ScrollView>
       {!isWide && !footer && actions ? (

@@ -6,6 +6,7 @@ import { Button } from '@/components/ui/Button';
 import { Txt } from '@/components/ui/Txt';
 import { drawPng } from './drawPng';
 import type { PictureSource } from './pictureContext';
+import { legendOf } from './placeLegend';
 import { pictureName, pictureTitle } from './pictureName';
 import { pictureSvg } from './pictureSvg';
 
@@ -13,21 +14,28 @@ interface Props {
   label: string;
   unit?: string;
   source: PictureSource;
-  /** What is drawn on the page at the moment. */
-  drawing: () => SVGSVGElement | null;
+  /** What holds the drawing and its legend on the page. */
+  box: () => Element | null;
 }
 
 /** Takes a drawing away as a picture, for a letter or a slide. */
-export function PictureButton({ label, unit, source, drawing }: Props) {
+export function PictureButton({ label, unit, source, box }: Props) {
   const [isOpen, setIsOpen] = useState(false);
   const [failure, setFailure] = useState<string | null>(null);
   const title = pictureTitle(label);
   const save = async (kind: 'png' | 'svg') => {
-    const found = drawing();
-    if (!found) return;
+    const found = box();
+    const drawing = found?.querySelector('svg');
+    if (!found || !drawing) return;
     setFailure(null);
     try {
-      const picture = pictureSvg(found, { title, unit, label, source });
+      const picture = pictureSvg(drawing, {
+        title,
+        unit,
+        label,
+        source,
+        legend: legendOf(found.querySelector('[role="list"]')),
+      });
       const blob =
         kind === 'png'
           ? await drawPng(picture)

@@ -4,11 +4,10 @@ import { createContext, useContext } from 'react';
 export interface PictureSource {
   /** What its file name begins with, e.g. `Run 3`. */
   stem: string;
-  study: string;
-  /** Number and name of the run, e.g. `Run 3, design flood`. */
-  run: string;
-  /** `Preliminary, not signed`, `Signed` or `Withdrawn`. */
-  state: string;
+  /** Lines in its foot: the study, then what of it is drawn and whether it may be relied on. */
+  foot: readonly string[];
+  /** What its file name ends with: `preliminary`, `signed`, `withdrawn`, `unsigned`; empty for what nobody signs. */
+  ending: string;
 }
 
 const PictureContext = createContext<PictureSource | null>(null);

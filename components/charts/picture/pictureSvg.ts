@@ -1,6 +1,7 @@
 import { COLOURS, fonts, type Colours } from '@/components/theme/tokens';
 import { textWidth } from '../geometry/textWidth';
 import type { PictureSource } from './pictureContext';
+import { placeLegend, type LegendEntry } from './placeLegend';
 
 export interface Picture {
   svg: string;
@@ -16,42 +17,63 @@ interface Parts {
   /** The drawing in a sentence. */
   label: string;
   source: PictureSource;
+  /** How each curve is drawn and what it is, as they stand below the drawing. */
+  legend?: readonly LegendEntry[];
 }
 
 const SVG = 'http://www.w3.org/2000/svg';
 const FAMILY = '"Source Sans 3", "Helvetica Neue", Arial, sans-serif';
 const PAD = 16;
 const TITLE = { size: 15, line: 21 };
+const KEY = { size: 12.5, line: 20 };
 const FOOT = { size: 11.5, line: 16 };
 
 /** A drawing of the page as a document of its own: title and unit above it, where it comes from in the foot, light. */
-export function pictureSvg(drawing: SVGSVGElement, { title, unit, label, source }: Parts): Picture {
+export function pictureSvg(
+  drawing: SVGSVGElement,
+  { title, unit, label, source, legend = [] }: Parts,
+): Picture {
   const inner = { width: sizeOf(drawing, 'width'), height: sizeOf(drawing, 'height') };
   const width = inner.width + 2 * PAD;
   const head = wrapped(unit ? `${title}, ${unit}` : title, inner.width, TITLE.size);
-  const foot = [source.study, `${source.run}. ${source.state}.`].flatMap((text) =>
-    wrapped(text, inner.width, FOOT.size),
-  );
+  const foot = source.foot.flatMap((text) => wrapped(text, inner.width, FOOT.size));
+  const keys = placeLegend(legend, inner.width, KEY.size);
   const top = PAD + head.length * TITLE.line + 4;
-  const footTop = top + inner.height + 8;
+  const keysTop = top + inner.height + 8;
+  const footTop = keysTop + keys.lines * KEY.line;
   const height = footTop + foot.length * FOOT.line + PAD;
   const { light } = COLOURS;
 
   const svg = element('svg', { width, height, viewBox: `0 0 ${width} ${height}`, role: 'img' });
   svg.append(text('title', {}, title), text('desc', {}, label));
   svg.append(element('rect', { width, height, fill: light.card }));
-  head.forEach((line, k) => svg.append(writing(line, PAD + 15 + k * TITLE.line, TITLE.size, true)));
-  svg.append(placed(drawing, top, inner));
-  foot.forEach((line, k) => svg.append(writing(line, footTop + 12 + k * FOOT.line, FOOT.size)));
+  head.forEach((line, k) =>
+    svg.append(writing(line, PAD, PAD + 15 + k * TITLE.line, TITLE.size, 'strong')),
+  );
+  svg.append(placed(drawing, PAD, top, inner));
+  for (const { swatch, words, x, line, width: wide } of keys.entries) {
+    const y = keysTop + line * KEY.line;
+    const size = { width: sizeOf(swatch, 'width'), height: sizeOf(swatch, 'height') };
+    svg.append(placed(swatch, PAD + x, y + (KEY.line - size.height) / 2 - 1, size));
+    svg.append(writing(words, PAD + x + wide, y + 14, KEY.size, 'ink'));
+  }
+  foot.forEach((line, k) =>
+    svg.append(writing(line, PAD, footTop + 12 + k * FOOT.line, FOOT.size, 'soft')),
+  );
   return { svg: inLight(new XMLSerializer().serializeToString(svg)), width, height };
 }
 
 /** A copy of the drawing with the fonts by their public names. */
-function placed(drawing: SVGSVGElement, top: number, { width, height }: Size): Element {
+function placed(
+  drawing: SVGSVGElement,
+  left: number,
+  top: number,
+  { width, height }: Size,
+): Element {
   const copy = drawing.cloneNode(true) as SVGSVGElement;
   copy.removeAttribute('style');
   copy.removeAttribute('class');
-  for (const [name, value] of Object.entries({ x: PAD, y: top, width, height }))
+  for (const [name, value] of Object.entries({ x: left, y: top, width, height }))
     copy.setAttribute(name, String(value));
   for (const node of copy.querySelectorAll<SVGTextElement>('text')) {
     const named = node.style.fontFamily || node.getAttribute('font-family') || '';
@@ -67,10 +89,19 @@ interface Size {
   height: number;
 }
 
-function writing(content: string, y: number, size: number, strong = false): Element {
-  const node = text('text', { x: PAD, y, 'font-size': size }, content);
-  node.setAttribute('fill', strong ? COLOURS.light.ink : COLOURS.light.soft);
-  node.setAttribute('style', `font-family: ${FAMILY}; font-weight: ${strong ? 600 : 400}`);
+function writing(
+  content: string,
+  x: number,
+  y: number,
+  size: number,
+  look: 'strong' | 'ink' | 'soft',
+): Element {
+  const node = text('text', { x, y, 'font-size': size }, content);
+  node.setAttribute('fill', look === 'soft' ? COLOURS.light.soft : COLOURS.light.ink);
+  node.setAttribute(
+    'style',
+    `font-family: ${FAMILY}; font-weight: ${look === 'strong' ? 600 : 400}`,
+  );
   return node;
 }
 

@@ -1,4 +1,5 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
+import { pictureOfRun } from '@/components/charts/picture/pictureSources';
 import { Cautions } from '@/components/layout/Cautions';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
@@ -45,6 +46,7 @@ function Against({ run }: { run: Run }) {
         { label: 'Calibration', href: root },
         { label: `Run ${run.number}`, href: `/studies/${study.id}/runs/${run.id}` },
       ]}
+      picture={pictureOfRun(run)}
       lead={`${run.scenarioName}. Residuals are computed less observed: above zero the model stands too high.`}
       actions={
         hasSome ? (

@@ -1,4 +1,5 @@
 import type { ComponentProps } from 'react';
+import { pictureOfSet } from '@/components/charts/picture/pictureSources';
 import { Cautions } from '@/components/layout/Cautions';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
@@ -19,10 +20,11 @@ interface Props {
 
 /** What a search found: the best set, what it is worth, and how sharply the observations tell. */
 export function SearchResults({ head, set, settings, result }: Props) {
-  const { may } = useCurrentStudy();
+  const { study, may } = useCurrentStudy();
   return (
     <Screen
       {...head}
+      picture={pictureOfSet(study, set)}
       lead="A proposal. The best fit is not the truth: roughness that makes up for a wrong inflow or a missing bridge fits, too."
       side={
         <>

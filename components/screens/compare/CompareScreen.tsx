@@ -1,4 +1,5 @@
 import { useLocalSearchParams, useRouter } from 'expo-router';
+import { pictureOfRuns } from '@/components/charts/picture/pictureSources';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
 import { Cautions } from '@/components/layout/Cautions';
@@ -42,6 +43,7 @@ export function CompareScreen() {
       lead="The first run is what the others are measured against."
       ribbon={isEnough && data ? <Ribbon comparison={data} /> : undefined}
       side={isWide || isEnough ? choose : undefined}
+      picture={data ? pictureOfRuns(study, data.runs) : null}
     >
       {isWide || isEnough ? null : choose}
       {error ? (

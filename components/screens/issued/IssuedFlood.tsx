@@ -36,9 +36,8 @@ export function IssuedFlood({ study, result, isClient }: Props) {
   const source = useMemo(
     () => ({
       stem: result.title,
-      study: result.title,
-      run: `By ${signedBy}, ${formatDay(signedAt)}`,
-      state: 'Signed',
+      foot: [result.title, `By ${signedBy}, ${formatDay(signedAt)}. Signed.`],
+      ending: 'signed',
     }),
     [result.title, signedBy, signedAt],
   );

@@ -1,5 +1,6 @@
 import { useMemo, useState } from 'react';
 import { LongSection } from '@/components/charts/LongSection';
+import { pictureOfReach } from '@/components/charts/picture/pictureSources';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
 import { Screen } from '@/components/layout/Screen';
@@ -58,6 +59,7 @@ export function ReachContent({ reach, reaches }: ReachContentProps) {
       title="Reach"
       crumbs={[{ label: study.title, href: `/studies/${study.id}` }]}
       badge={<Badge label={reach.name} />}
+      picture={pictureOfReach(study, reach)}
       lead={`${sections.length} sections over ${formatWithUnit(reach.lastChainage - reach.firstChainage, 'chainage', system)}`}
       actions={
         may('scenario.read') ? (

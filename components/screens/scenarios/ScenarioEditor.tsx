@@ -1,5 +1,6 @@
 import { router } from 'expo-router';
 import { useState } from 'react';
+import { pictureOfScenario } from '@/components/charts/picture/pictureSources';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import { usePlaceAndTime } from '@/components/charts/usePlaceAndTime';
 import { Screen } from '@/components/layout/Screen';
@@ -53,6 +54,7 @@ export function ScenarioEditor({ scenario }: { scenario: Scenario }) {
     <EditorProvider value={{ editor, scenario, reach: reach.data, isLocked }}>
       <Screen
         title={editor.draft.name || 'Scenario without a name'}
+        picture={pictureOfScenario(study, editor.draft.name || 'Scenario without a name')}
         crumbs={[
           { label: study.title, href: `/studies/${study.id}` },
           { label: 'Scenarios', href: `/studies/${study.id}/scenarios` },

@@ -1,4 +1,5 @@
 import { useLocalSearchParams } from 'expo-router';
+import { pictureOfCase } from '@/components/charts/picture/pictureSources';
 import { NotThere } from '@/components/layout/NotThere';
 import { isEngineer } from '@/components/layout/places';
 import { Screen } from '@/components/layout/Screen';
@@ -50,6 +51,7 @@ function ProofCase({ caseId }: { caseId: string }) {
     <Screen
       title={row.title}
       crumbs={[PROOF, { label: row.title }]}
+      picture={pictureOfCase(row, row.result?.solver ?? data.solver)}
       lead={row.setup}
       badge={
         <>

@@ -1,15 +1,16 @@
 import { fireEvent, render, screen, waitFor } from '@testing-library/react';
+import { CurveSet } from '@/components/charts/CurveSet';
 import { Hydrograph } from '@/components/charts/Hydrograph';
 import { PictureProvider } from '@/components/charts/picture/pictureContext';
 import { pictureName, pictureTitle } from '@/components/charts/picture/pictureName';
-import { pictureSource } from '@/components/charts/picture/pictureSource';
+import { pictureOfRun, pictureOfRuns } from '@/components/charts/picture/pictureSources';
 import { pictureSvg } from '@/components/charts/picture/pictureSvg';
 import { COLOURS } from '@/components/theme/tokens';
 import { saveBlob } from '@/components/queries/saveBlob';
 
 jest.mock('@/components/queries/saveBlob', () => ({ saveBlob: jest.fn() }));
 
-const SOURCE = pictureSource({
+const SOURCE = pictureOfRun({
   studyTitle: 'Lower Veshall',
   number: 3,
   scenarioName: 'Design flood',
@@ -78,9 +79,54 @@ test('the button saves a file that says what it is; without a source there is no
   expect(name).toBe('run-3-stage-at-tornick-bridge-preliminary.svg');
 });
 
+test('curves that are named below their drawing are named in its picture', async () => {
+  const runs = [
+    { number: 1, scenarioName: 'Design' },
+    { number: 2, scenarioName: 'Larger' },
+  ];
+  render(
+    <PictureProvider value={pictureOfRuns({ title: 'Lower Veshall' }, runs)}>
+      <CurveSet
+        label="Flow at Ebbick"
+        curves={runs.map(({ scenarioName }, look) => ({
+          name: scenarioName,
+          x: [0, 3600],
+          y: [10, 20 + look],
+          look,
+        }))}
+        foot="time"
+        value="flow"
+        unitSystem="metric"
+        initialWidth={352}
+      />
+    </PictureProvider>,
+  );
+  (saveBlob as jest.Mock).mockClear();
+  fireEvent.click(screen.getByRole('button', { name: 'Picture of Flow at Ebbick' }));
+  fireEvent.click(screen.getByRole('button', { name: 'SVG of Flow at Ebbick' }));
+  await waitFor(() => expect(saveBlob).toHaveBeenCalledTimes(1));
+  const [blob, name] = (saveBlob as jest.Mock).mock.calls[0] as [Blob, string];
+  expect(name).toBe('runs-1-and-2-flow-at-ebbick-unsigned.svg');
+  const picture = parse(await textOf(blob));
+  const texts = [...picture.querySelectorAll('text')].map(({ textContent }) => textContent);
+  expect(texts).toEqual(expect.arrayContaining(['Design', 'Larger', 'Lower Veshall']));
+  // The drawing, and one swatch a curve.
+  expect(picture.querySelectorAll('svg svg')).toHaveLength(3);
+});
+
+const textOf = (blob: Blob) =>
+  new Promise<string>((resolve) => {
+    const reader = new FileReader();
+    reader.onload = () => resolve(reader.result as string);
+    reader.readAsText(blob);
+  });
+
 test('names of pictures', () => {
   expect(pictureTitle('Long section. 6 h 00. Water 3 m')).toBe('Long section');
-  expect(pictureName('Débit à Pont', { ...SOURCE, state: 'Signed' })).toBe(
+  expect(pictureName('Débit à Pont', { ...SOURCE, ending: 'signed' })).toBe(
     'run-3-debit-a-pont-signed',
   );
+  const long = pictureName('Stage '.repeat(30), SOURCE);
+  expect(long.length).toBeLessThanOrEqual(100);
+  expect(long).toMatch(/-preliminary$/);
 });

@@ -69,10 +69,7 @@ function DifferenceCard({ result: { along } }: { result: ConvergenceResult }) {
   const [at, setAt] = useState<number | null>(null);
   const data = useMemo(() => ({ x: along.chainage, line: along.difference, band: null }), [along]);
   return (
-    <Card
-      title="Difference along the reach"
-      aside={`${UNITS[system].depth.symbol}, by chainage in ${UNITS[system].chainage.symbol}`}
-    >
+    <Card title="Difference along the reach" aside={UNITS[system].depth.symbol}>
       <BandChart
         label="Peak stage on the second grid less that on the finest, along the reach"
         axis="chainage"

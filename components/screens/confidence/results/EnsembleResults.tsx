@@ -91,16 +91,13 @@ export function EnsembleResults({ result }: { result: EnsembleResult }) {
         </Card>
       </View>
       <ExceedanceCard key={station.name} station={station} />
-      <Card
-        title="Peak stage along the reach"
-        aside={`${unit.elevation.symbol}, base case dashed; chainage in ${unit.chainage.symbol}`}
-      >
+      <Card title="Peak stage along the reach" aside={unit.elevation.symbol}>
         <BandChart
           label="Peak stage along the reach with its band"
           axis="chainage"
           quantity="elevation"
           data={long}
-          names={NAMES}
+          names={{ ...NAMES, compare: 'base case' }}
           at={at}
           onChange={store.setAt}
           unitSystem={system}

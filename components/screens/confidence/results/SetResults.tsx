@@ -1,3 +1,4 @@
+import { pictureOfSet } from '@/components/charts/picture/pictureSources';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { CONFIDENCE_FILES, useConfidenceDownload } from '@/components/queries/confidence';
@@ -28,6 +29,7 @@ export function SetResults({ set }: { set: TaskSet }) {
       title={set.name}
       crumbs={confidenceCrumbs(study, KIND_TITLES[set.kind as ConfidenceKind])}
       badge={<Badge {...setBadge(set)} />}
+      picture={pictureOfSet(study, set)}
       actions={files.map((file) => (
         <Button
           key={file}

@@ -1,6 +1,4 @@
-import { useMemo } from 'react';
-import { PictureProvider } from '@/components/charts/picture/pictureContext';
-import { pictureSource } from '@/components/charts/picture/pictureSource';
+import { pictureOfRun } from '@/components/charts/picture/pictureSources';
 import { ReachRibbon } from '@/components/charts/ReachRibbon';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, usePlaceAndTimeStore } from '@/components/charts/usePlaceAndTime';
@@ -41,16 +39,7 @@ interface Props {
 }
 
 /** The place by the reach ribbon, the time by the flood itself, and every drawing follows both. */
-export function ResultsScreen(props: Props) {
-  const { run } = props;
-  return (
-    <PictureProvider value={useMemo(() => pictureSource(run), [run])}>
-      <Results {...props} />
-    </PictureProvider>
-  );
-}
-
-function Results({ run, summary }: Props) {
+export function ResultsScreen({ run, summary }: Props) {
   const store = usePlaceAndTimeStore();
   useFirstLook(store, summary);
   const { isWide } = useBreakpoint();
@@ -72,6 +61,7 @@ function Results({ run, summary }: Props) {
       title={run.scenarioName}
       crumbs={runCrumbs(run)}
       badge={<Badge {...runBadge(run)} />}
+      picture={pictureOfRun(run)}
       ribbon={<Ribbon {...common} />}
       actions={
         <>

@@ -1,5 +1,6 @@
 import { router, useLocalSearchParams } from 'expo-router';
 import { StyleSheet, View } from 'react-native';
+import { pictureOfGeometries } from '@/components/charts/picture/pictureSources';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { useReaches } from '@/components/queries/reaches';
@@ -42,6 +43,7 @@ export function CompareScreen() {
         { label: study.title, href: `/studies/${study.id}` },
         { label: 'Survey', href: `/studies/${study.id}/survey` },
       ]}
+      picture={pictureOfGeometries(study, [labelOf(from), labelOf(to)])}
       lead="Two surveys or geometries of this study, section by section. Sections pair by name, and by place where a name is gone."
     >
       {failed ? (

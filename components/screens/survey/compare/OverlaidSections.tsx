@@ -1,11 +1,10 @@
 import { useMemo } from 'react';
-import { StyleSheet, View } from 'react-native';
-import Svg, { Line, Path } from 'react-native-svg';
+import { Line, Path } from 'react-native-svg';
 import { ChartBox, type ChartSize } from '@/components/charts/ChartBox';
 import { linePath, project } from '@/components/charts/geometry/paths';
+import { KeyList } from '@/components/charts/KeyList';
 import { PlaceAxis } from '@/components/charts/PlaceAxis';
 import { ValueAxis } from '@/components/charts/ValueAxis';
-import { space } from '@/components/theme/tokens';
 import { useTheme } from '@/components/theme/useTheme';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
@@ -28,30 +27,28 @@ export function OverlaidSections({ row, names }: OverlaidSectionsProps) {
     <>
       <ChartBox
         label={`${nameOf(row)} looking downstream: ${names[0]} dashed, ${names[1]} drawn through`}
+        unit={`elevation and offset in ${UNITS[system].length.symbol}`}
         height={240}
+        legend={
+          <KeyList
+            entries={[
+              {
+                words: row.before ? names[0] : `${names[0]}: none`,
+                colour: colours.soft,
+                dash: '5 4',
+              },
+              { words: row.after ? names[1] : `${names[1]}: none`, colour: colours.earth },
+            ]}
+          />
+        }
       >
         {(size) => <Drawing row={row} size={size} />}
       </ChartBox>
-      <View style={styles.key}>
-        <Key words={row.before ? names[0] : `${names[0]}: none`} stroke={colours.soft} dash="5 4" />
-        <Key words={row.after ? names[1] : `${names[1]}: none`} stroke={colours.earth} />
-      </View>
       <Txt variant="small" tone="soft">
         Elevation in {UNITS[system].elevation.symbol} above datum, offset in{' '}
         {UNITS[system].length.symbol}, looking downstream.
       </Txt>
     </>
-  );
-}
-
-function Key({ words, stroke, dash }: { words: string; stroke: string; dash?: string }) {
-  return (
-    <View style={styles.entry}>
-      <Svg width={28} height={10}>
-        <Line x1={0} x2={28} y1={5} y2={5} stroke={stroke} strokeWidth={2} strokeDasharray={dash} />
-      </Svg>
-      <Txt variant="small">{words}</Txt>
-    </View>
   );
 }
 
@@ -108,8 +105,3 @@ function Drawing({ row, size }: { row: SectionComparison; size: ChartSize }) {
     </>
   );
 }
-
-const styles = StyleSheet.create({
-  key: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.three, rowGap: space.half },
-  entry: { flexDirection: 'row', alignItems: 'center', gap: space.one },
-});
