@@ -213,6 +213,7 @@ export const runEnded = (client: QueryClient, studyId: number, runId: number) =>
 export const RUN_FILES = {
   csv: { path: 'results.csv', label: 'Results as CSV' },
   xlsx: { path: 'results.xlsx', label: 'Results as XLSX' },
+  levels: { path: 'levels.csv', label: 'Levels as CSV' },
   structures: { path: 'structures.csv', label: 'Structures as CSV' },
   case: { path: 'case.json', label: 'Case file' },
 } as const;

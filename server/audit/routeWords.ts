@@ -62,6 +62,7 @@ export const ROUTE_WORDS: Record<string, RouteWords> = {
   'POST /runs/:runId/retry': say('run.retried', 'Run put into the queue again'),
   'GET /runs/:runId/case.json': say('run.caseTaken', 'Case file downloaded'),
   'GET /runs/:runId/results.csv': say('run.resultsTaken', 'Results downloaded as CSV'),
+  'GET /runs/:runId/levels.csv': say('run.levelsTaken', 'Levels at stations downloaded as CSV'),
   'GET /runs/:runId/structures.csv': say(
     'run.structuresTaken',
     'Results at structures downloaded as CSV',

@@ -6,7 +6,7 @@ import type { RunFacts } from '../results/blocks/blockTypes';
 import type { RunBlocks } from '../results/blocks/runBlocks';
 import { levelsAt } from '../results/levelsAt';
 import { peaksAt } from '../results/peaksAt';
-import { seriesAt } from '../results/seriesAt';
+import { seriesAlong } from '../results/seriesAt';
 import { surfaceOf } from '../results/surfaceOf';
 import type { ReportFacts } from './types';
 
@@ -47,17 +47,12 @@ export async function runReport(
   facts: ReportFacts,
 ): Promise<RunReport> {
   const [run, columns] = await Promise.all([blocks.facts(), blocks.places()]);
-  const sections: PlaceResult[] = [];
-  for (const [k, { id, chainage }] of run.sections.entries()) {
-    const { depth, velocity } = await blocks.series(k);
+  const series = await blocks.seriesOf([...run.sections.keys()]);
+  const sections = run.sections.map(({ id, chainage }, k): PlaceResult => {
     const peaks = peaksAt(columns, run.inflowPeak, chainage)!;
-    sections.push({ name: id, peaks, hazard: worstHazard(depth, velocity) });
-  }
-  const stations: PlaceSeries[] = [];
-  for (const { name, chainage } of facts.stations) {
-    const place = await withSeries(blocks, name, chainage);
-    if (place) stations.push(place);
-  }
+    return { name: id, peaks, hazard: worstHazard(series[k].depth, series[k].velocity) };
+  });
+  const stations = await withSeries(blocks, facts.stations);
   const places = stations.length > 0 ? stations : await ends(blocks, run);
   return {
     facts,
@@ -71,22 +66,30 @@ export async function runReport(
   };
 }
 
+/** Those of the places that lie on the reach. */
 async function withSeries(
   blocks: RunBlocks,
-  name: string,
-  chainage: number,
-): Promise<PlaceSeries | null> {
-  const series = await seriesAt(blocks, chainage);
-  if (!series) return null;
-  const hazard = worstHazard(series.depth, series.velocity);
-  return { name, peaks: series.peaks, hazard, series };
+  places: readonly { name: string; chainage: number }[],
+): Promise<PlaceSeries[]> {
+  const found: PlaceSeries[] = [];
+  let k = 0;
+  for await (const series of seriesAlong(
+    blocks,
+    places.map(({ chainage }) => chainage),
+  )) {
+    const { name } = places[k++];
+    if (!series) continue;
+    const hazard = worstHazard(series.depth, series.velocity);
+    found.push({ name, peaks: series.peaks, hazard, series });
+  }
+  return found;
 }
 
-async function ends(blocks: RunBlocks, { sections }: RunFacts): Promise<PlaceSeries[]> {
+function ends(blocks: RunBlocks, { sections }: RunFacts): Promise<PlaceSeries[]> {
   const last = sections.length - 1;
-  const chosen = [...new Set([0, last >> 1, last])];
-  const places = await Promise.all(
-    chosen.map((k) => withSeries(blocks, sections[k].id, sections[k].chainage)),
+  const chosen = [...new Set([0, last >> 1, last])].map((k) => sections[k]);
+  return withSeries(
+    blocks,
+    chosen.map(({ id, chainage }) => ({ name: id, chainage })),
   );
-  return places.filter((place) => place !== null);
 }

@@ -4,7 +4,7 @@ import type { AlongQuery } from '../../shared/runs/schemas';
 import type { PlaceAlong, RunAlong, RunSeries } from '../../shared/runs/types';
 import type { Station } from '../../shared/studies/types';
 import type { RunBlocks } from './blocks/runBlocks';
-import { seriesAt } from './seriesAt';
+import { seriesAlong } from './seriesAt';
 
 /** Hazard, and arrival by a threshold of one's own, at every surveyed section and station, from the stored moments. */
 export async function alongReach(
@@ -13,28 +13,36 @@ export async function alongReach(
   { threshold, value }: AlongQuery,
 ): Promise<RunAlong> {
   const { sections, times } = await blocks.facts();
-  const of = async (chainage: number): Promise<PlaceAlong | null> => {
-    const series = await seriesAt(blocks, chainage);
-    return (
-      series && { chainage, ...hazardOf(series), arrival: arrivalOf(series, threshold, value) }
+  const named = stations.map(({ id: stationId, name, chainage }) => ({
+    stationId,
+    name,
+    chainage,
+  }));
+  const places = [...sections, ...named].map(({ chainage }) => chainage);
+  const found: (PlaceAlong | null)[] = [];
+  for await (const series of seriesAlong(blocks, places))
+    found.push(
+      series && {
+        chainage: places[found.length],
+        ...hazardOf(series),
+        arrival: arrivalOf(series, threshold, value),
+      },
     );
-  };
-  const along: RunAlong = {
+  const withFound = <P>(rows: P[], from: number) =>
+    rows.flatMap((row, k) => {
+      const place = found[from + k];
+      return place ? [{ ...row, ...place }] : [];
+    });
+  return {
     threshold,
     value,
     interval: times.length > 1 ? times[1] - times[0] : 0,
-    sections: [],
-    stations: [],
+    sections: withFound(
+      sections.map(({ id }) => ({ id })),
+      0,
+    ),
+    stations: withFound(named, sections.length),
   };
-  for (const { id, chainage } of sections) {
-    const found = await of(chainage);
-    if (found) along.sections.push({ id, ...found });
-  }
-  for (const { id: stationId, name, chainage } of stations) {
-    const found = await of(chainage);
-    if (found) along.stations.push({ stationId, name, ...found });
-  }
-  return along;
 }
 
 /** The worst class, from depth and mean velocity of the same moment, and when it is first reached. */

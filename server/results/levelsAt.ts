@@ -1,7 +1,7 @@
 import { levelResult, type LevelResult } from '../../shared/runs/levelResult';
 import type { Station } from '../../shared/studies/types';
 import type { RunBlocks } from './blocks/runBlocks';
-import { seriesAt } from './seriesAt';
+import { seriesAlong } from './seriesAt';
 
 /** Freeboard and times of every level at the stations that lie on the reach, lowest level of a station first. */
 export async function levelsAt(
@@ -9,12 +9,16 @@ export async function levelsAt(
   stations: readonly Station[],
 ): Promise<LevelResult[]> {
   const results: LevelResult[] = [];
-  for (const station of stations) {
-    if (!station.levels?.length) continue;
-    const series = await seriesAt(blocks, station.chainage);
+  const asked = stations.filter(({ levels }) => levels?.length);
+  let k = 0;
+  for await (const series of seriesAlong(
+    blocks,
+    asked.map(({ chainage }) => chainage),
+  )) {
+    const station = asked[k++];
     if (!series) continue;
     const stage = { ...series.peaks, times: series.times, stage: series.stage };
-    const rising = [...station.levels].sort((a, b) => a.level - b.level);
+    const rising = [...(station.levels ?? [])].sort((a, b) => a.level - b.level);
     results.push(...rising.map((level) => levelResult(station, level, stage)));
   }
   return results;

@@ -1,7 +1,7 @@
 import type { RunSeries } from '../../shared/runs/types';
-import type { PlaceColumns, RunFacts } from './blocks/blockTypes';
+import type { PlaceColumns, RunFacts, SeriesColumns } from './blocks/blockTypes';
 import { evenly } from './blocks/evenly';
-import type { RunBlocks } from './blocks/runBlocks';
+import type { RunBlocks, WaveRow } from './blocks/runBlocks';
 import { peaksAt } from './peaksAt';
 import { mix, placeBetween } from './placeBetween';
 
@@ -10,26 +10,55 @@ const MOMENTS = 2400;
 
 type Series = Omit<RunSeries, 'chainage' | 'sectionId' | 'peaks'>;
 
+/** Places that are read at once; the series of a longer reach never stand in memory all together. */
+const AT_ONCE = 64;
+
 /**
  * Stage, depth, flow and velocity against time: exact at a surveyed section, linear between the neighbouring places of
  * the wave elsewhere. null off the reach.
  */
 export async function seriesAt(blocks: RunBlocks, chainage: number): Promise<RunSeries | null> {
-  const [facts, places] = await Promise.all([blocks.facts(), blocks.places()]);
-  const peaks = peaksAt(places, facts.inflowPeak, chainage);
-  const between = placeBetween(places.chainage, chainage);
-  if (!peaks || !between) return null;
-  const section = between.share === 0 ? places.section[between.lower] : -1;
-  const series =
-    section >= 0
-      ? await sectionSeries(blocks, facts, section)
-      : await waveSeries(blocks, facts, places, chainage);
-  const sectionId = section >= 0 ? facts.sections[section].id : null;
-  return { chainage: peaks.chainage, sectionId, ...series, peaks };
+  const { value } = await seriesAlong(blocks, [chainage]).next();
+  return value ?? null;
 }
 
-async function sectionSeries(blocks: RunBlocks, facts: RunFacts, part: number): Promise<Series> {
-  const series = await blocks.series(part);
+/** The same of many places in their order: one reading of the sections and one of the wave for each `AT_ONCE` of them. */
+export async function* seriesAlong(
+  blocks: RunBlocks,
+  chainages: readonly number[],
+): AsyncGenerator<RunSeries | null, undefined> {
+  const [facts, places] = await Promise.all([blocks.facts(), blocks.places()]);
+  for (let from = 0; from < chainages.length; from += AT_ONCE) {
+    const asked = chainages.slice(from, from + AT_ONCE).map((chainage) => {
+      const peaks = peaksAt(places, facts.inflowPeak, chainage);
+      const between = placeBetween(places.chainage, chainage);
+      const section = between?.share === 0 ? places.section[between.lower] : -1;
+      return { peaks: between && peaks, section, chainage };
+    });
+    const known = asked.filter(({ peaks }) => peaks);
+    const parts = [...new Set(known.flatMap(({ section }) => (section >= 0 ? section : [])))];
+    const between = known.flatMap(({ section, chainage }) => (section < 0 ? chainage : []));
+    const [columns, waves] = await Promise.all([
+      parts.length > 0 ? blocks.seriesOf(parts) : [],
+      between.length > 0 ? waveSeries(blocks, facts, places, between) : [],
+    ]);
+    for (const { peaks, section, chainage } of asked) {
+      if (!peaks) {
+        yield null;
+        continue;
+      }
+      const series =
+        section >= 0
+          ? sectionSeries(facts, columns[parts.indexOf(section)])
+          : waves[between.indexOf(chainage)];
+      const sectionId = section >= 0 ? facts.sections[section].id : null;
+      yield { chainage: peaks.chainage, sectionId, ...series, peaks };
+    }
+  }
+  return undefined;
+}
+
+function sectionSeries(facts: RunFacts, series: SeriesColumns): Series {
   const kept = evenly(facts.times.length, MOMENTS);
   const thinned = (values: ArrayLike<number>) => Array.from(kept, (k) => values[k]);
   return {
@@ -41,26 +70,30 @@ async function sectionSeries(blocks: RunBlocks, facts: RunFacts, part: number): 
   };
 }
 
+/** At places between the surveyed sections. */
 async function waveSeries(
   blocks: RunBlocks,
   facts: RunFacts,
   places: PlaceColumns,
-  chainage: number,
-): Promise<Series> {
+  chainages: readonly number[],
+): Promise<Series[]> {
   const onWave = Array.from(places.wave.keys()).filter((i) => places.wave[i] >= 0);
   const lines = onWave.map((i) => places.chainage[i]);
-  const { lower, upper, share } = placeBetween(lines, chainage)!;
-  const [a, b] = await blocks.wave([lower, upper]);
-  const [bedA, bedB] = [places.bed[onWave[lower]], places.bed[onWave[upper]]];
-  const between = (of: (row: typeof a, bed: number) => (m: number) => number) =>
-    facts.moments.map((_, m) => mix(of(a, bedA)(m), of(b, bedB)(m), share));
-  const bed = mix(bedA, bedB, share);
-  const depth = between((row) => (m) => row.depth[m]);
-  return {
-    times: facts.moments.map((k) => facts.times[k]),
-    stage: depth.map((d) => bed + d),
-    depth,
-    flow: between((row) => (m) => row.flow[m]),
-    velocity: between((row) => (m) => row.velocity[m]),
-  };
+  const neighbours = chainages.map((chainage) => placeBetween(lines, chainage)!);
+  const rows = await blocks.wave(neighbours.flatMap(({ lower, upper }) => [lower, upper]));
+  return neighbours.map(({ lower, upper, share }, n) => {
+    const [a, b] = [rows[2 * n], rows[2 * n + 1]];
+    const [bedA, bedB] = [places.bed[onWave[lower]], places.bed[onWave[upper]]];
+    const at = (of: (row: WaveRow) => Float32Array) =>
+      facts.moments.map((_, m) => mix(of(a)[m], of(b)[m], share));
+    const bed = mix(bedA, bedB, share);
+    const depth = at((row) => row.depth);
+    return {
+      times: facts.moments.map((k) => facts.times[k]),
+      stage: depth.map((d) => bed + d),
+      depth,
+      flow: at((row) => row.flow),
+      velocity: at((row) => row.velocity),
+    };
+  });
 }

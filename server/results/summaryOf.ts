@@ -10,7 +10,7 @@ export async function summaryOf(
   runId: number,
   blocks: RunBlocks,
   stations: Station[],
-): Promise<RunSummary> {
+): Promise<Omit<RunSummary, 'signed'>> {
   const [facts, places] = await Promise.all([blocks.facts(), blocks.places()]);
   const peaks = (chainage: number) => peaksAt(places, facts.inflowPeak, chainage);
   const { times } = facts;

@@ -132,6 +132,12 @@ export function runRoutes({
     await pipeline(rows, res);
   });
 
+  router.get('/runs/:runId/levels.csv', authenticate, readRun, async (_req, res) => {
+    const run = runOf(res);
+    const text = await exports.levelsCsv(run);
+    res.attachment(`run-${run.number}-levels.csv`).type('text/csv; charset=utf-8').send(text);
+  });
+
   router.get('/runs/:runId/structures.csv', authenticate, readRun, async (_req, res) => {
     const run = runOf(res);
     const rows = await exports.structuresCsv(run);

@@ -1,6 +1,7 @@
 import type { ReservoirResult, StructureRegime, StructureResult } from '../case/resultFile';
 import type { HazardClass } from '../hazard/hazardClass';
 import type { ReviewState } from '../review/types';
+import type { StationDifference } from '../studies/stationDifferences';
 import type { LevelResult } from './levelResult';
 import type { AlongQuery } from './schemas';
 import type { Said } from '../units/message';
@@ -91,6 +92,8 @@ export interface RunSummary {
   stations: (PlacePeaks & { stationId: number; name: string })[];
   /** At those of them that levels were given for. */
   levels: LevelResult[];
+  /** Stations and levels of a signed run are those of its signature: when it was, and what is otherwise today. */
+  signed: { at: string; differs: StationDifference[] } | null;
   volume: {
     initial: number;
     inflow: number;

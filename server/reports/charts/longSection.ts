@@ -1,7 +1,9 @@
 import {
   longSectionFrame,
   wetSurface,
+  withRoomFor,
   type LongProfile,
+  type ObservedLevel,
 } from '../../../components/charts/geometry/longProfile';
 import { bandPath, linePath, project } from '../../../components/charts/geometry/paths';
 import { fromSi, UNITS, type UnitSystem } from '../../../shared/units/units';
@@ -17,6 +19,7 @@ import {
   type LegendEntry,
   type Pen,
 } from './axes';
+import { crossEntry, crosses } from './crosses';
 
 const PENS = {
   peak: { colour: COLOUR.water, width: 1.4 },
@@ -30,6 +33,8 @@ export interface LongSectionContent extends LongProfile {
   /** Water surface at the start; null: the survey alone is drawn. */
   startStage: ArrayLike<number> | null;
   stations: readonly { name: string; chainage: number }[];
+  /** Levels that a flood was seen at. */
+  observed?: readonly ObservedLevel[];
   system: UnitSystem;
   alt: string;
 }
@@ -39,7 +44,8 @@ export const longSection = (content: LongSectionContent): Drawing => ({
   alt: content.alt,
   draw(doc, size) {
     const { system, bed, chainages, peakStage, startStage } = content;
-    const frame = longSectionFrame(size, content, system);
+    const observed = onReach(content);
+    const frame = longSectionFrame(size, withRoomFor(content, [], observed), system);
     const { chainage, elevation } = UNITS[system];
     const xs = project(chainages, (m) => frame.x(fromSi(m, 'chainage', system)));
     const line = (row: ArrayLike<number>) =>
@@ -66,10 +72,28 @@ export const longSection = (content: LongSectionContent): Drawing => ({
     stroke('bed', bed, PENS.bed);
     if (content.leftBank) stroke('left bank', content.leftBank, PENS.leftBank);
     if (content.rightBank) stroke('right bank', content.rightBank, PENS.rightBank);
+    if (observed.length > 0) {
+      const px = observed.map((mark) => frame.x(fromSi(mark.chainage, 'chainage', system)));
+      const py = (m: number) => frame.y(fromSi(m, 'elevation', system));
+      crosses(doc, {
+        x: px,
+        y: observed.map(({ level }) => py(level)),
+        bars: observed.map(({ level, tolerance }) => [
+          py(level + tolerance),
+          py(level - tolerance),
+        ]),
+      });
+      shown.push(crossEntry);
+    }
     legend(doc, frame.right, 6, shown);
     stationMarks(doc, frame, content);
   },
 });
+
+const onReach = ({ observed = [], chainages }: LongSectionContent) =>
+  observed.filter(
+    ({ chainage }) => chainage >= chainages[0] && chainage <= chainages[chainages.length - 1],
+  );
 
 /** Names stand upright at the foot; one too near to the one before is left to the table. */
 function stationMarks(

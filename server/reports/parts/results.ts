@@ -1,3 +1,5 @@
+import { gaugeRecordAt } from '../../../shared/calibration/gaugeRecordAt';
+import { observedLevels } from '../../../shared/calibration/observedLevels';
 import { HAZARD_CLASSES, HAZARD_GUIDELINE } from '../../../shared/hazard/hazardClass';
 import { levelName } from '../../../shared/studies/stationLevels';
 import { formatDuration, formatNumber } from '../../../shared/units/format';
@@ -15,7 +17,8 @@ import { momentText, unitsOf } from '../words';
 /** The long section, the hydrographs, and every number of them. */
 export function results(sheet: Sheet, report: RunReport): void {
   const { facts, surface, sections, places, placesAreStations, run } = report;
-  const { unitSystem } = facts.study;
+  const { observed, study } = facts;
+  const { unitSystem } = study;
   partHeading(sheet, 'Results', 'newPage');
   figure(
     sheet,
@@ -28,12 +31,16 @@ export function results(sheet: Sheet, report: RunReport): void {
         peakStage: surface.peakStage,
         startStage: surface.stage.subarray(0, surface.places),
         stations: places.map(({ name, peaks }) => ({ name, chainage: peaks.chainage })),
+        observed: observed ? observedLevels(observed) : [],
         system: unitSystem,
-        alt: 'Long section: bed, banks, the water at the start and the highest water at every place.',
+        alt: `Long section: bed, banks, the water at the start and the highest water at every place${observed?.marks.length ? ', with the marks that were observed' : ''}.`,
       }),
     ],
     250,
-    'The highest water at every place, whenever it was reached: an envelope, at no moment the surface of the river.',
+    'The highest water at every place, whenever it was reached: an envelope, at no moment the surface of the river.' +
+      (observed?.marks.length
+        ? ` Crosses: marks of the flood ${observed.flood || 'without a name'}, each with its tolerance.`
+        : ''),
   );
   heading(sheet, placesAreStations ? 'At the stations' : 'At the first, middle and last section');
   peakTable(sheet, report, places, placesAreStations ? 'Station' : 'Section');
@@ -48,6 +55,7 @@ export function results(sheet: Sheet, report: RunReport): void {
           { value: peaks.peakStage, time: peaks.peakStageTime },
           'elevation',
           unitSystem,
+          gaugeRecordAt(observed, peaks.chainage, 'stage'),
         ),
         hydrograph(
           name,
@@ -55,6 +63,7 @@ export function results(sheet: Sheet, report: RunReport): void {
           { value: peaks.peakFlow, time: peaks.peakFlowTime },
           'flow',
           unitSystem,
+          gaugeRecordAt(observed, peaks.chainage, 'flow'),
         ),
       ],
       146,

@@ -22,6 +22,8 @@ export interface RunBlocks {
   facts(): Promise<RunFacts>;
   places(): Promise<PlaceColumns>;
   series(section: number): Promise<SeriesColumns>;
+  /** Of several sections, read at once. */
+  seriesOf(sections: number[]): Promise<SeriesColumns[]>;
   structure(part: number): Promise<StructureColumns>;
   reservoir(): Promise<ReservoirColumns>;
   /** Depth, flow and velocity at the given places of the wave, each over all moments. */
@@ -32,12 +34,19 @@ export type WaveRow = Record<keyof WaveColumns, Float32Array>;
 
 export function runBlocks(read: ReadBlocks): RunBlocks {
   const one = async (kind: BlockKind, part: number) => unzip((await read(kind, [part]))[0]);
+  const seriesOf = async (sections: number[]) => {
+    const stored = await read('series', sections);
+    return Promise.all(
+      stored.map(async (bytes) => decodeColumns<SeriesColumns>(await unzip(bytes))),
+    );
+  };
   const facts = once(async () => JSON.parse((await one('facts', 0)).toString('utf8')) as RunFacts);
 
   return {
     facts,
     places: once(async () => decodeColumns<PlaceColumns>(await one('places', 0))),
-    series: async (section) => decodeColumns<SeriesColumns>(await one('series', section)),
+    series: async (section) => (await seriesOf([section]))[0],
+    seriesOf,
     structure: async (part) => decodeColumns(await one('structure', part)) as StructureColumns,
     reservoir: async () => decodeColumns<ReservoirColumns>(await one('reservoir', 0)),
     async wave(places) {

@@ -4,9 +4,12 @@ import { lazyPool } from '../../jobs/lazyPool';
 import type { RunModel } from '../../models/Run';
 import type { EncodedBlock } from '../../results/blocks/blockTypes';
 import { csv } from '../../results/exports/csv';
+import { csvLine } from '../../results/exports/csvField';
 import type { ExportedRun } from '../../results/exports/exportedRun';
+import { levelsSheet } from '../../results/exports/levelsSheet';
 import { structuresCsv } from '../../results/exports/structuresCsv';
 import type { WorkbookTask } from '../../results/exports/workbookWorker';
+import { levelsAt } from '../../results/levelsAt';
 import { thawCase } from './freezeCase';
 import { assertRouted, type buildReadResults } from './readResults';
 
@@ -33,7 +36,7 @@ export function buildExportRun(platform: Platform, results: ReturnType<typeof bu
     startsAt: run.startsAt?.toISOString() ?? null,
     caseHash: run.caseHash,
     solverVersion: run.solverVersion,
-    stations: await results.stations(run.studyId),
+    stations: await results.stationsOf(run),
   });
 
   return {
@@ -43,6 +46,13 @@ export function buildExportRun(platform: Platform, results: ReturnType<typeof bu
     /** Pieces of text, made as they are taken. */
     async csv(run: RunModel): Promise<AsyncGenerator<string>> {
       return csv(results.open(run), await about(run));
+    },
+
+    /** Freeboard of the levels at the stations. */
+    async levelsCsv(run: RunModel): Promise<string> {
+      const { stations, unitSystem } = await about(run);
+      const levels = await levelsAt(results.open(run), stations);
+      return levelsSheet(levels, unitSystem).map(csvLine).join('');
     },
 
     /** The same of what stands in the river. */

@@ -8,7 +8,9 @@ import {
   type RunStructureSeries,
   type RunSummary,
 } from '../../../shared/runs/types';
+import { stationDifferences } from '../../../shared/studies/stationDifferences';
 import type { Station } from '../../../shared/studies/types';
+import { q, say, sayIn } from '../../../shared/units/message';
 import { AppError, conflict, notFound } from '../../errors';
 import type { Models } from '../../models';
 import type { RunModel } from '../../models/Run';
@@ -18,9 +20,11 @@ import { seriesAt } from '../../results/seriesAt';
 import { reservoirSeries, structureSeries } from '../../results/structureSeries';
 import { summaryOf } from '../../results/summaryOf';
 import { surfaceOf } from '../../results/surfaceOf';
+import { buildStationsOfRun } from './stationsOfRun';
 
 /** What a screen needs of a routed run. Each throws `conflict` where the run has no results. */
-export function buildReadResults({ RunBlock, Station }: Models) {
+export function buildReadResults(models: Models) {
+  const { RunBlock, Station } = models;
   const readBlocks =
     (runId: number): ReadBlocks =>
     async (kind, parts) => {
@@ -43,26 +47,40 @@ export function buildReadResults({ RunBlock, Station }: Models) {
       ({ id, name, chainage, levels }) => ({ id, name, chainage, levels: levels ?? [] }),
     );
 
+  const { stationsOf, signedStations } = buildStationsOfRun(models, stations);
+
   return {
     open,
     stations,
+    stationsOf,
 
     async summary(run: RunModel): Promise<RunSummary> {
-      return summaryOf(run.id, open(run), await stations(run.studyId));
+      const blocks = open(run);
+      const [today, signed] = await Promise.all([stations(run.studyId), signedStations(run)]);
+      return {
+        ...(await summaryOf(run.id, blocks, signed?.stations ?? today)),
+        signed: signed && {
+          at: signed.at,
+          differs: stationDifferences(signed.stations, today),
+        },
+      };
     },
 
     async along(run: RunModel, query: AlongQuery): Promise<RunAlong> {
-      return alongReach(open(run), await stations(run.studyId), query);
+      return alongReach(open(run), await stationsOf(run), query);
     },
 
-    /** Throws `invalid` off the reach. */
+    /** Needs the run's `study`. Throws `invalid` off the reach. */
     async series(run: RunModel, chainage: number): Promise<RunSeries> {
       const blocks = open(run);
       const series = await seriesAt(blocks, chainage);
       if (series) return series;
       const { sections } = await blocks.facts();
       const [from, to] = [sections[0].chainage, sections[sections.length - 1].chainage];
-      const message = `The reach goes from chainage ${from} m to ${to} m; choose a place on it.`;
+      const message = sayIn(
+        run.study!.unitSystem,
+        say`The reach goes from chainage ${q(from, 'chainage')} to ${q(to, 'chainage')}; choose a place on it.`,
+      );
       throw new AppError('invalid', message, { faults: [{ path: 'chainage', message }] });
     },
 

@@ -96,6 +96,7 @@ export const EXPECTED_ROUTES: Record<string, Action | 'public'> = {
   'GET /runs/:runId/along': 'run.read',
   'GET /runs/:runId/structures/:structure': 'run.read',
   'GET /runs/:runId/reservoir': 'run.read',
+  'GET /runs/:runId/levels.csv': 'run.read',
   'GET /runs/:runId/structures.csv': 'run.read',
   'GET /runs/:runId/surface': 'run.read',
   'GET /runs/:runId/case.json': 'run.read',

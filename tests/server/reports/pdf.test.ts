@@ -1,6 +1,7 @@
 import { runPdf } from '../../../server/reports/runPdf';
 import { runReport, type RunReport } from '../../../server/reports/runReport';
 import type { ReportFacts } from '../../../server/reports/types';
+import type { RunResiduals } from '../../../shared/calibration/types';
 import { CAUTIONS } from '../../../shared/runs/cautions';
 import { sampleBlocks, sampleCase } from '../results/sampleRun';
 import { inkShare, pdfInfo, pdfPages, pdfStructure } from './pdfText';
@@ -149,4 +150,34 @@ it('bears long names and texts without losing a page', async () => {
   const found = await pdfPages(pdf);
   expect(found).toHaveLength(pages);
   expect(found.join(' ').match(/goes on and on/g)).toHaveLength(120);
+});
+
+it('draws what was observed where it compares with a flood', async () => {
+  const series = { times: [0, 3600], observed: [51, 51.4], computed: [51.1, 51.3] };
+  const gauge = { gaugeId: 1, name: 'Mill', quantity: 'stage', why: null, figures: null } as const;
+  const mark = { level: 50, kind: 'debris', confidence: 'good', observedOn: null } as const;
+  const facts = sampleFacts();
+  const bridge = facts.stations[0].chainage;
+  const observed: RunResiduals = {
+    runId: 3,
+    flood: 'January 2019',
+    reported: 'January 2019',
+    marks: [1200, 90_000].map((chainage, id) => ({
+      mark: { ...mark, id, chainage, flood: 'January 2019', note: '' },
+      computed: 50.2,
+      why: null,
+      residual: 0.2,
+      tolerance: 0.3,
+    })),
+    all: null,
+    byKind: [],
+    byConfidence: [],
+    gauges: [{ ...gauge, chainage: bridge, series }],
+    misfit: null,
+  };
+  const { pdf } = await runPdf(await reportOf({ ...facts, observed }), 'A4');
+  const text = (await pdfPages(pdf)).join(' ');
+  expect(text).toContain('Crosses: marks of the flood January 2019, each with its tolerance.');
+  expect(text).toContain('Mill bridge (observed: crosses)');
+  expect(text).not.toContain('Ferrin quay (observed: crosses)');
 });

@@ -1,7 +1,7 @@
 import { decodeSurface, encodeSurface } from '../../../shared/runs/surfaceBlock';
 import { inflowPeak } from '../../../server/results/inflowPeak';
 import { peaksAt } from '../../../server/results/peaksAt';
-import { seriesAt } from '../../../server/results/seriesAt';
+import { seriesAlong, seriesAt } from '../../../server/results/seriesAt';
 import { summaryOf } from '../../../server/results/summaryOf';
 import { surfaceOf } from '../../../server/results/surfaceOf';
 import { bankLevels } from '../../../server/results/bankLevels';
@@ -39,6 +39,20 @@ describe('series at a chainage', () => {
     expect((await seriesAt(blocks, 5))?.sectionId).toBeNull();
     expect(await seriesAt(blocks, -1)).toBeNull();
     expect(await seriesAt(blocks, 2501)).toBeNull();
+  });
+});
+
+describe('along the reach', () => {
+  test('many places are read at once, in their order, each as it is read alone', async () => {
+    const { blocks, queries } = sampleBlocks();
+    const asked = [725, 1000, -1, 5, 1000, 2500];
+    const together = [];
+    for await (const series of seriesAlong(blocks, asked)) together.push(series);
+    const blocksOf = (kind: string) => queries.filter((query) => query.startsWith(kind));
+    expect(blocksOf('series')).toEqual(['series/1,2']);
+    expect(blocksOf('wave')).toHaveLength(1);
+    for (const [k, chainage] of asked.entries())
+      expect(together[k]).toEqual(await seriesAt(blocks, chainage));
   });
 });
 

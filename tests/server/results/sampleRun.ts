@@ -121,11 +121,13 @@ export function sampleBlocks(cellCount = 100, interval = 60) {
   );
   const encoded = encodeRun(caseFile, result, wave.finish());
   const reads: string[] = [];
-  const blocks = runBlocks(async (kind, parts) =>
-    parts.map((part) => {
+  const queries: string[] = [];
+  const blocks = runBlocks(async (kind, parts) => {
+    queries.push(`${kind}/${parts.join(',')}`);
+    return parts.map((part) => {
       reads.push(`${kind}/${part}`);
       return encoded.find((b) => b.kind === kind && b.part === part)!.bytes;
-    }),
-  );
-  return { caseFile, result, encoded, blocks, reads };
+    });
+  });
+  return { caseFile, result, encoded, blocks, reads, queries };
 }

@@ -145,6 +145,25 @@ test('from then on no route changes anything of it, for any role', async () => {
   expect((await asSenior.get(base)).body).toEqual(before);
 });
 
+test('its results and its files are read at the stations and levels of the signature', async () => {
+  const { asSenior, run, stations } = checked;
+  const road: StationLevel = { kind: 'road', level: 1, note: 'Of today' };
+  await stations[1].update({ levels: [road] });
+  const read = async (path: string) => asSenior.get(`/api/runs/${run.id}/${path}`).expect(200);
+  const summary: RunSummary = (await read('summary')).body;
+  expect(summary.stations.map(({ name }) => name)).not.toContain('Renamed');
+  expect(summary.levels).toEqual([]);
+  expect(summary.signed!.differs).toEqual([
+    { name: summary.stations[0].name, what: 'renamed' },
+    { name: stations[1].name, what: 'levels' },
+  ]);
+  const along: RunAlong = (await read('along?threshold=rise&value=0.1')).body;
+  expect(along.stations.map(({ name }) => name)).toEqual(summary.stations.map(({ name }) => name));
+  expect((await read('levels.csv')).text.trim().split('\r\n')).toHaveLength(1);
+  expect((await read('results.csv')).text).not.toContain('Renamed');
+  await stations[1].update({ levels: [] });
+});
+
 test('issued: the client is told and sees the chosen stations alone', async () => {
   const { asClient, asModeller, people, run, stations, study } = checked;
   const address = `/api/studies/${study.id}/issued`;

@@ -60,14 +60,12 @@ export function AlongCard({ summary, store }: Props) {
       title="Hazard and arrival"
       aside={
         summary.stations.length ? (
-          <View style={styles.aside}>
-            <Button
-              kind="quiet"
-              label={all ? 'Stations only' : 'All sections'}
-              name={all ? 'Stations only: hazard' : 'All sections: hazard'}
-              onPress={() => setAll(!all)}
-            />
-          </View>
+          <Button
+            kind="quiet"
+            label={all ? 'Stations only' : 'All sections'}
+            name={all ? 'Stations only: hazard' : 'All sections: hazard'}
+            onPress={() => setAll(!all)}
+          />
         ) : undefined
       }
     >
@@ -157,8 +155,6 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
 }
 
 const styles = StyleSheet.create({
-  // Of one line with the title, though the button is taller.
-  aside: { flexDirection: 'row', alignItems: 'center' },
   fields: { flexDirection: 'row', flexWrap: 'wrap', gap: space.two },
   field: { flexGrow: 1, flexBasis: 160, minWidth: 0 },
 });

@@ -2,7 +2,7 @@ import { Card } from '@/components/ui/Card';
 import { LinkTxt } from '@/components/ui/LinkTxt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary } from '@/shared/runs/types';
-import { formatDuration, formatNumber, formatWithUnit } from '@/shared/units/format';
+import { formatDuration, formatNumber, formatChosenLength } from '@/shared/units/format';
 import { Facts } from '../Facts';
 import { wallClock } from '@/components/ui/wallClock';
 import { tookWords } from '../runWords';
@@ -16,7 +16,7 @@ export function ComputedCard({ run, summary }: { run: Run; summary: RunSummary }
     { name: 'Length of the flood', value: formatDuration(run.duration) },
     {
       name: 'Grid',
-      value: `${formatNumber(cellCount, 0)} cells of ${formatWithUnit(cellSize, 'length', system)}`,
+      value: `${formatNumber(cellCount, 0)} cells of ${formatChosenLength(cellSize, system)}`,
     },
     {
       name: 'Steps',

@@ -48,7 +48,12 @@ export function HazardBand({ places, at, onChange }: Props) {
           ]}
         >
           {(to - from) / length > 0.04 ? (
-            <Txt variant="caption" strong>
+            <Txt
+              variant="caption"
+              strong
+              // Where the cursor stands at it, the class stays legible.
+              style={[styles.name, { backgroundColor: colours[hazard ? GROUND[hazard] : 'card'] }]}
+            >
               {hazard ?? 'dry'}
             </Txt>
           ) : null}
@@ -77,5 +82,6 @@ const styles = StyleSheet.create({
     borderRightWidth: hairline,
     overflow: 'hidden',
   },
+  name: { zIndex: 1, paddingHorizontal: 3 },
   cursor: { position: 'absolute', top: 0, bottom: 0, width: 2 },
 });

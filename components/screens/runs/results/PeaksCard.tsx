@@ -35,13 +35,11 @@ export function PeaksCard({ summary, store }: Props) {
       title={all ? 'Peaks at all sections' : 'Peaks at the stations'}
       aside={
         stations.length ? (
-          <View style={styles.aside}>
-            <Button
-              kind="quiet"
-              label={all ? 'Stations only' : 'All sections'}
-              onPress={() => setAll(!all)}
-            />
-          </View>
+          <Button
+            kind="quiet"
+            label={all ? 'Stations only' : 'All sections'}
+            onPress={() => setAll(!all)}
+          />
         ) : undefined
       }
     >

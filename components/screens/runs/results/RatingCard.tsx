@@ -1,5 +1,5 @@
 import { useDeferredValue, useMemo, useState } from 'react';
-import { StyleSheet, View } from 'react-native';
+import { StyleSheet } from 'react-native';
 import { valueAt } from '@/components/charts/geometry/interpolate';
 import { shortTime } from '@/components/charts/geometry/timeWords';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
@@ -38,7 +38,7 @@ export function RatingCard({ place, series, store }: Props) {
       title="Stage against flow"
       style={styles.card}
       aside={
-        <View style={styles.aside}>
+        <>
           <Txt tone="soft">{`${UNITS[system].elevation.symbol} over ${UNITS[system].flow.symbol}`}</Txt>
           <Button
             kind="quiet"
@@ -46,7 +46,7 @@ export function RatingCard({ place, series, store }: Props) {
             name={asTable ? `${name} as a curve` : `${name} as a table`}
             onPress={() => setAsTable(!asTable)}
           />
-        </View>
+        </>
       }
     >
       {asTable ? (
@@ -103,6 +103,5 @@ const columns = (system: UnitSystem, span: number): Column<Row>[] => [
 ];
 
 const styles = StyleSheet.create({
-  card: { gap: 0, paddingTop: space.half },
-  aside: { flexDirection: 'row', alignItems: 'center', columnGap: space.one, flexWrap: 'wrap' },
+  card: { gap: space.one },
 });

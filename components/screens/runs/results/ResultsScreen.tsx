@@ -14,6 +14,7 @@ import { runBadge } from '../../check/reviewWords';
 import { Cautions } from '../Cautions';
 import { runCrumbs } from '../runCrumbs';
 import { AlongCard } from './AlongCard';
+import { AsSigned } from './AsSigned';
 import { ComputedCard } from './ComputedCard';
 import { LevelsCard } from './LevelsCard';
 import { LongSectionCard } from './LongSectionCard';
@@ -65,7 +66,7 @@ export function ResultsScreen({ run, summary }: Props) {
       ribbon={<Ribbon {...common} />}
       actions={
         <>
-          <RunDownloads download={download} hasStructures={summary.structures.length > 0} />
+          <RunDownloads download={download} summary={summary} />
           <CheckLink run={run} />
         </>
       }
@@ -83,6 +84,7 @@ export function ResultsScreen({ run, summary }: Props) {
       {download.error ? (
         <ErrorState error={download.error} title="The file could not be saved" />
       ) : null}
+      {summary.signed ? <AsSigned studyId={run.studyId} signed={summary.signed} /> : null}
       {isWide ? (
         <>
           {longSection}

@@ -1,18 +1,22 @@
 import { RUN_FILES, type RunFile, type useRunDownload } from '@/components/queries/runs';
 import { Button } from '@/components/ui/Button';
-
-const FILES: RunFile[] = ['case', 'csv', 'xlsx'];
-const WITH_STRUCTURES: RunFile[] = ['case', 'csv', 'structures', 'xlsx'];
+import type { RunSummary } from '@/shared/runs/types';
 
 interface Props {
   download: ReturnType<typeof useRunDownload>;
-  /** Something stands in the river. */
-  hasStructures: boolean;
+  summary: Pick<RunSummary, 'levels' | 'structures'>;
 }
 
 /** The run as files. */
-export function RunDownloads({ download, hasStructures }: Props) {
-  return (hasStructures ? WITH_STRUCTURES : FILES).map((file) => (
+export function RunDownloads({ download, summary }: Props) {
+  const files: RunFile[] = [
+    'case',
+    'csv',
+    ...(summary.levels.length > 0 ? (['levels'] as const) : []),
+    ...(summary.structures.length > 0 ? (['structures'] as const) : []),
+    'xlsx',
+  ];
+  return files.map((file) => (
     <Button
       key={file}
       label={RUN_FILES[file].label}

@@ -6,7 +6,7 @@ import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
-import { StyleSheet, View } from 'react-native';
+import { StyleSheet } from 'react-native';
 import { space } from '@/components/theme/tokens';
 import { UNITS } from '@/shared/units/units';
 import { SeriesTable } from './SeriesTable';
@@ -51,7 +51,7 @@ export function SeriesCard(props: Props) {
       title={title}
       style={styles.card}
       aside={
-        <View style={styles.aside}>
+        <>
           <Txt tone="soft">{note ? `${unit}, ${note}` : unit}</Txt>
           <Button
             kind="quiet"
@@ -59,7 +59,7 @@ export function SeriesCard(props: Props) {
             name={asTable ? `${name} as a curve` : `${name} as a table`}
             onPress={() => setAsTable(!asTable)}
           />
-        </View>
+        </>
       }
     >
       {asTable ? (
@@ -77,6 +77,5 @@ export function SeriesCard(props: Props) {
 }
 
 const styles = StyleSheet.create({
-  card: { gap: 0, paddingTop: space.half },
-  aside: { flexDirection: 'row', alignItems: 'center', columnGap: space.one, flexWrap: 'wrap' },
+  card: { gap: space.one },
 });

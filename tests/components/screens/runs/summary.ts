@@ -21,6 +21,7 @@ export const summary = (change: Partial<RunSummary> = {}): RunSummary => ({
   sections: [0, 500, 900].map((chainage, i) => ({ ...peaks(chainage), id: `XS-0${i + 1}` })),
   stations: [{ ...peaks(700), stationId: 1, name: 'Sallow Mill' }],
   levels: [],
+  signed: null,
   volume: {
     initial: 1000,
     inflow: 45_000_000,
