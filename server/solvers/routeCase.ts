@@ -99,7 +99,18 @@ export function routeCase(caseFile: CaseFile, options: RouteOptions = {}): Resul
   );
   if (mustSettle) {
     settleInitial(
-      { workspace, kernel, laterals, rhs, timeStep, order, grid, faceFlow },
+      {
+        workspace,
+        cellState,
+        kernel,
+        laterals,
+        structures,
+        rhs,
+        timeStep,
+        order,
+        grid,
+        faceFlow,
+      },
       polling,
       warnings,
     );

@@ -1,2 +1,2 @@
 /** Changes with every change that can alter a result by a bit. */
-export const SOLVER_VERSION = '1.1.0';
+export const SOLVER_VERSION = '1.2.0';

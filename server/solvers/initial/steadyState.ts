@@ -50,14 +50,32 @@ export function steadyState(
       return stateFor(createSeries(upstream.times, upstream.flows)(0));
     case 'wall':
       return stateFor(0);
-    case 'reservoir':
-      return stateFor(structures?.firstRelease() ?? 0);
+    case 'reservoir': {
+      // What is released over water that the release itself makes.
+      const surplus = (q: number): number =>
+        q - (structures?.firstRelease(stateFor(q).stages[0]) ?? 0);
+      return stateFor(risingRoot(surplus, 0, 1));
+    }
     case 'stage': {
       const wanted = createSeries(upstream.times, upstream.stages)(0);
-      if (stateFor(0).stages[0] >= wanted) return stateFor(0);
+      const still = stateFor(0);
+      const end = endOfPool(wanted);
+      if (end !== null && !still.flows.some((q) => q > 0)) {
+        for (let i = 0; i <= end; i++) still.stages[i] = Math.max(bed[i], wanted);
+        return still;
+      }
+      if (still.stages[0] >= wanted) return still;
       const inflow = risingRoot((q) => stateFor(q).stages[0] - wanted, 0, 1);
       return stateFor(inflow);
     }
+  }
+
+  /** The last section before what holds water at that stage back: a structure or ground; null where none does. */
+  function endOfPool(level: number): number | null {
+    for (let i = 0; i <= n; i++) {
+      if (structures?.keepsBack(i, level) || bed[i + 1] >= level) return i;
+    }
+    return null;
   }
 
   function outletStage(flow: number): number {

@@ -40,8 +40,10 @@ export interface StructureSet {
   stageAbove(face: number, flow: number, stageBelow: number): number | null;
   /** Whether structures stand at a face between cells */
   holds(face: number): boolean;
-  /** Release (m³/s) of the reservoir at the start over a dry reach */
-  firstRelease(): number;
+  /** Whether still water at a stage (m) stays behind the structures at a face between cells */
+  keepsBack(face: number, stage: number): boolean;
+  /** Release (m³/s) of the reservoir at the start for a stage (m) below it */
+  firstRelease(stageBelow: number): number;
 }
 
 /** null where a case has neither structures nor a reservoir. */
@@ -92,6 +94,10 @@ export function createStructureSet(
     });
   }
 
+  function lowestOf(list: readonly Structure[]): number {
+    return Math.min(...list.map((structure) => structure.lowest()));
+  }
+
   function steadyFlow(list: readonly Structure[], water: Water): number {
     return list.reduce((sum, structure) => sum + structure.flow(water), 0);
   }
@@ -118,9 +124,12 @@ export function createStructureSet(
       const group = faces.find((one) => one.face === face);
       if (!group) return null;
       const list = group.structures;
-      const lowest = Math.min(...list.map((structure) => structure.lowest()));
       const floor = Math.max(stageBelow, bed[face]);
-      if (!(flow > 0)) return Math.max(floor, Math.min(lowest, bed[face] + HIGHEST));
+      if (!(flow > 0)) {
+        // What is shut holds any water: there is none to say how much.
+        const lowest = lowestOf(list);
+        return lowest < Infinity ? Math.max(floor, lowest) : floor;
+      }
       const surplus = (eta: number): number => {
         const a = waves.flowAreaAt(face, eta, tables.areaAt(face, eta));
         const velocityHead = a > 0 ? (flow / a) ** 2 / (2 * gravity) : 0;
@@ -142,13 +151,17 @@ export function createStructureSet(
       return risingRoot(surplus, floor, 0.1);
     },
     holds: (face) => faces.some((one) => one.face === face),
-    firstRelease() {
+    keepsBack(face, level) {
+      const group = faces.find((one) => one.face === face);
+      return group !== undefined && lowestOf(group.structures) >= level;
+    },
+    firstRelease(stageBelow) {
       if (!pool) return 0;
       const eta = pool.stage();
       return steadyFlow(atHead, {
         stageUp: eta,
         energyUp: eta,
-        stageDown: bed[0],
+        stageDown: Math.min(eta, stageBelow),
         cellUp: 0,
         cellDown: 1,
         isForward: true,

@@ -19,7 +19,7 @@ const norms = (l1: number) => ({ l1, l2: 2 * l1, max: 3 * l1 });
 const result = (within: boolean, isCurrent = true, l1 = 7.54e-3) => ({
   within,
   isCurrent,
-  solver: '1.1.0',
+  solver: '1.2.0',
   computedAt: '2026-12-01T10:00:00Z',
   requestedBy: 'Ines Corrow',
   seconds: 2,
