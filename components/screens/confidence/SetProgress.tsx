@@ -1,18 +1,15 @@
-import { StyleSheet, View } from 'react-native';
 import { useChangeTaskSet } from '@/components/queries/tasks';
-import { radius, space } from '@/components/theme/tokens';
-import { useTheme } from '@/components/theme/useTheme';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { FigureWithUnit } from '@/components/ui/FigureWithUnit';
+import { ProgressBar } from '@/components/ui/ProgressBar';
 import { Txt } from '@/components/ui/Txt';
 import type { TaskSet } from '@/shared/tasks/types';
 import { timeLeftWords } from '../runs/runWords';
 
 /** A set that is queued or computing, and the way to stop it. */
 export function SetProgress({ set }: { set: TaskSet }) {
-  const { colours } = useTheme();
   const cancel = useChangeTaskSet('cancel');
   const queued = set.state === 'queued';
   const percent = Math.min(99, Math.floor(set.progress * 100));
@@ -28,21 +25,7 @@ export function SetProgress({ set }: { set: TaskSet }) {
         label={words}
         size="display"
       />
-      <View
-        role="progressbar"
-        aria-label="Progress of the set"
-        aria-valuemin={0}
-        aria-valuemax={100}
-        aria-valuenow={queued ? 0 : percent}
-        style={[styles.trough, { backgroundColor: colours.earthTint }]}
-      >
-        <View
-          style={[
-            styles.water,
-            { width: `${100 * set.progress}%`, backgroundColor: colours.water },
-          ]}
-        />
-      </View>
+      <ProgressBar label="Progress of the set" share={queued ? 0 : percent / 100} />
       {cancel.error ? (
         <ErrorState error={cancel.error} title="The set could not be cancelled" />
       ) : null}
@@ -60,8 +43,3 @@ export function SetProgress({ set }: { set: TaskSet }) {
     </Card>
   );
 }
-
-const styles = StyleSheet.create({
-  trough: { height: space.one, borderRadius: radius.small, overflow: 'hidden' },
-  water: { height: '100%' },
-});

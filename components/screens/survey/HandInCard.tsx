@@ -4,6 +4,7 @@ import { FileDrop } from '@/components/ui/FileDrop';
 import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
 import { LIMITS } from '@/shared/limits';
+import { megabytes } from './megabytes';
 
 /** Endings, and the kinds by which a phone knows such files. */
 export const SURVEY_ENDINGS =
@@ -12,7 +13,7 @@ export const SURVEY_ENDINGS =
 /** The file that is handed in; one too large is said at once, before it travels. */
 export function HandInCard({ onFile }: { onFile: (file: File) => void }) {
   const [tooLarge, setTooLarge] = useState<File | null>(null);
-  const megabytes = (bytes: number) => `${Math.ceil(bytes / 1024 / 1024)} MB`;
+  const most = `${megabytes(LIMITS.upload.bytes)} MB`;
   return (
     <Card title="Hand in a survey">
       <Txt tone="soft">
@@ -23,7 +24,7 @@ export function HandInCard({ onFile }: { onFile: (file: File) => void }) {
         label="Choose the survey file"
         kind="solid"
         accept={SURVEY_ENDINGS}
-        hint={`Or drop it here. Up to ${megabytes(LIMITS.upload.bytes)}, ${LIMITS.upload.sections} sections, ${LIMITS.upload.pointsPerSection.toLocaleString('en-GB')} points a section.`}
+        hint={`Or drop it here. Up to ${most}, ${LIMITS.upload.sections} sections, ${LIMITS.upload.pointsPerSection.toLocaleString('en-GB')} points a section.`}
         onFile={(file) => {
           const fits = file.size <= LIMITS.upload.bytes;
           setTooLarge(fits ? null : file);
@@ -32,7 +33,7 @@ export function HandInCard({ onFile }: { onFile: (file: File) => void }) {
       />
       {tooLarge ? (
         <Notice tone="danger" title={`${tooLarge.name} is too large`}>
-          {`It has ${megabytes(tooLarge.size)}, and ${megabytes(LIMITS.upload.bytes)} is the most. It was not sent. Take out sheets and pictures that are no survey, or save it as CSV, and choose it again.`}
+          {`It has ${megabytes(tooLarge.size)} MB, more than the ${most} that can be handed in. It was not sent. Take out sheets and pictures that are no survey, or save it as CSV, and choose it again.`}
         </Notice>
       ) : null}
     </Card>

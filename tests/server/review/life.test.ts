@@ -1,4 +1,6 @@
 import type { IssuedResult, QueueRow, Review } from '../../../shared/review/types';
+import type { RunAlong, RunSummary } from '../../../shared/runs/types';
+import type { StationLevel } from '../../../shared/studies/stationLevels';
 import { keptMail } from '../../helpers/keptMail';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { PASSWORD } from '../../helpers/factories/buildUser';
