@@ -18,7 +18,7 @@ import { nearestIndex, valueAt } from './geometry/interpolate';
 import type { Polyline } from './geometry/placeLabel';
 import { PIN, pointPins, type Pin } from './geometry/pointPins';
 import { shortTime } from './geometry/timeWords';
-import { LevelLines } from './LevelLines';
+import { LevelLines, LevelNames } from './LevelLines';
 import { PointPins, type RaisedPoint } from './PointPins';
 import { PointPresses } from './PointPresses';
 import { Reading, readingBox } from './Reading';
@@ -139,6 +139,7 @@ function Drawing(props: Sized) {
       <Curves model={model} isGround={props.isGround} />
       {model.observed ? <Observed at={model.observed} /> : null}
       <Marks {...props} model={model} pins={pins} />
+      <LevelNames lines={model.levels} />
       <PointPins pins={pins} points={props.points ?? NONE} />
     </>
   );

@@ -132,7 +132,7 @@ const styles = StyleSheet.create({
   title: { flexShrink: 1 },
   lead: { maxWidth: widths.prose },
   actions: { flexDirection: 'row', gap: space.one, flexShrink: 0 },
-  actionsPhone: { gap: space.one, paddingTop: space.one },
+  actionsPhone: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one, paddingTop: space.one },
   foot: {
     gap: space.one,
     paddingHorizontal: space.two,

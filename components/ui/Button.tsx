@@ -57,6 +57,7 @@ export function Button(props: ButtonProps) {
 
   const box = (state: PressableStateCallbackType & { hovered?: boolean }): ViewStyle => ({
     ...styles.box,
+    ...(kind === 'quiet' ? styles.quiet : null),
     backgroundColor: ground,
     borderColor: edge,
     opacity: disabled && !busy ? 0.45 : state.pressed ? 0.75 : state.hovered ? 0.9 : 1,
@@ -112,7 +113,9 @@ const styles = StyleSheet.create({
     alignItems: 'center',
     justifyContent: 'center',
   },
-  underline: { position: 'absolute', left: space.two, right: space.two, bottom: 9, height: 1 },
+  // In line with the words above and below it.
+  quiet: { paddingHorizontal: 0, borderWidth: 0, minWidth: 24 },
+  underline: { position: 'absolute', left: 0, right: 0, bottom: 9, height: 1 },
   narrow: { alignSelf: 'flex-start', gap: space.half },
   wide: { alignSelf: 'stretch', gap: space.half },
 });

@@ -8,5 +8,5 @@ export function ButtonRow({ children }: { children: ReactNode }) {
 }
 
 const styles = StyleSheet.create({
-  row: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one },
+  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two, rowGap: space.one },
 });

@@ -28,7 +28,11 @@ export function Card({ title, aside, children, style }: CardProps) {
               {title}
             </Txt>
           ) : null}
-          {typeof aside === 'string' ? <Txt tone="soft">{aside}</Txt> : aside}
+          {typeof aside === 'string' ? (
+            <Txt tone="soft">{aside}</Txt>
+          ) : aside ? (
+            <View style={styles.aside}>{aside}</View>
+          ) : null}
         </View>
       ) : null}
       {children}
@@ -52,4 +56,12 @@ const styles = StyleSheet.create({
     columnGap: space.two,
   },
   title: { flexShrink: 1 },
+  // A button is taller than the title; the row stays as high as in the other cards.
+  aside: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    alignItems: 'center',
+    columnGap: space.two,
+    marginVertical: -space.one,
+  },
 });

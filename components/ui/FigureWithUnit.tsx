@@ -43,4 +43,6 @@ export function FigureWithUnit({ value, unit, label, size = 'figure', tone }: Fi
 /** A figure and its unit stay on one line. */
 const NO_BREAK = '\u00a0';
 
-const styles = StyleSheet.create({ figure: { gap: space.half / 2 } });
+const styles = StyleSheet.create({
+  figure: { gap: space.half / 2, flexShrink: 1, maxWidth: '100%' },
+});

@@ -14,11 +14,13 @@ interface RadioGroupProps<V extends string> {
   disabled?: boolean;
   hint?: string;
   error?: string;
+  /** Side by side where there is room: for short words without hints. */
+  inline?: boolean;
 }
 
 /** A few choices, all seen at once; the browser's own buttons bring the arrow keys. */
 export function RadioGroup<V extends string>(props: RadioGroupProps<V>) {
-  const { label, value, options, onChange, disabled, hint, error } = props;
+  const { label, value, options, onChange, disabled, hint, error, inline } = props;
   const { colours } = useTheme();
   const id = useId();
   return (
@@ -31,38 +33,40 @@ export function RadioGroup<V extends string>(props: RadioGroupProps<V>) {
           {hint}
         </Txt>
       ) : null}
-      {options.map((option) => (
-        <label
-          key={option.value}
-          style={{
-            ...domTextStyle(colours),
-            display: 'flex',
-            gap: space.one,
-            alignItems: 'center',
-            minHeight: touch,
-            padding: `${space.half}px 0`,
-            cursor: disabled ? 'default' : 'pointer',
-            opacity: disabled ? 0.6 : 1,
-          }}
-        >
-          <input
-            type="radio"
-            name={id}
-            checked={option.value === value}
-            disabled={disabled}
-            onChange={() => onChange(option.value)}
-            style={{ width: 20, height: 20, flexShrink: 0, accentColor: colours.ink }}
-          />
-          <span>
-            {option.label}
-            {option.hint ? (
-              <span style={{ ...domTextStyle(colours, 'small', 'soft'), display: 'block' }}>
-                {option.hint}
-              </span>
-            ) : null}
-          </span>
-        </label>
-      ))}
+      <View style={inline ? styles.inline : null}>
+        {options.map((option) => (
+          <label
+            key={option.value}
+            style={{
+              ...domTextStyle(colours),
+              display: 'flex',
+              gap: space.one,
+              alignItems: 'center',
+              minHeight: touch,
+              padding: `${space.half}px 0`,
+              cursor: disabled ? 'default' : 'pointer',
+              opacity: disabled ? 0.6 : 1,
+            }}
+          >
+            <input
+              type="radio"
+              name={id}
+              checked={option.value === value}
+              disabled={disabled}
+              onChange={() => onChange(option.value)}
+              style={{ width: 20, height: 20, flexShrink: 0, accentColor: colours.ink }}
+            />
+            <span>
+              {option.label}
+              {option.hint ? (
+                <span style={{ ...domTextStyle(colours, 'small', 'soft'), display: 'block' }}>
+                  {option.hint}
+                </span>
+              ) : null}
+            </span>
+          </label>
+        ))}
+      </View>
       {error ? (
         <Txt role="alert" variant="small" tone="brick" strong>
           {error}
@@ -72,4 +76,7 @@ export function RadioGroup<V extends string>(props: RadioGroupProps<V>) {
   );
 }
 
-const styles = StyleSheet.create({ group: { gap: 0 } });
+const styles = StyleSheet.create({
+  group: { gap: 0 },
+  inline: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.three },
+});

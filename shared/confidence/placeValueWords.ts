@@ -30,11 +30,14 @@ export function changeWords(
   return signed(formatWithUnit(change, as, system), change);
 }
 
-const signed = (text: string, value: number): string => (value < 0 ? text : `+${text}`);
+/** What rounds to nothing has no sign. */
+const signed = (text: string, value: number): string =>
+  value > 0 && /[1-9]/.test(text) ? `+${text}` : text;
 
 /** `−12 min` or `+1 h 05`. */
 function timeChange(seconds: number): string {
   const minutes = Math.round(Math.abs(seconds) / 60);
-  const sign = seconds < 0 && minutes > 0 ? '−' : '+';
+  if (minutes === 0) return '0 min';
+  const sign = seconds < 0 ? '−' : '+';
   return minutes < 60 ? `${sign}${minutes} min` : `${sign}${formatDuration(60 * minutes)}`;
 }

@@ -1,4 +1,4 @@
-import { formatWithUnit } from '../units/format';
+import { formatChosenLength, formatWithUnit } from '../units/format';
 import type { UnitSystem } from '../units/units';
 import type { Distribution, DistributionKind } from './distributions';
 import { PARAMETERS, type ParameterKey } from './parameters';
@@ -87,4 +87,4 @@ export function settingFacts(
 const cellWords = (cellSize: number | null, system: UnitSystem): string =>
   cellSize === null
     ? 'those of the run'
-    : `${formatWithUnit(cellSize, 'length', system)}, chosen for the members`;
+    : `${formatChosenLength(cellSize, system)}, chosen for the members`;

@@ -27,6 +27,14 @@ export function formatQuantity(si: number, quantity: Quantity, system: UnitSyste
 export const formatWithUnit = (si: number, quantity: Quantity, system: UnitSystem): string =>
   `${formatQuantity(si, quantity, system)} ${UNITS[system][quantity].symbol}`;
 
+/** A length that somebody chose, with no more digits than it needs, e.g. `25 m` or `12.5 m`. */
+export function formatChosenLength(si: number, system: UnitSystem): string {
+  const { decimals, symbol } = UNITS[system].length;
+  const value = fromSi(si, 'length', system);
+  const text = formatNumber(value, decimals);
+  return `${decimals > 0 ? text.replace(/\.0+$/, '') : text} ${symbol}`;
+}
+
 /** Seconds from start as `6 h 07`; days are not split off: a flood is told in hours. */
 export function formatDuration(seconds: number): string {
   const minutes = Math.round(seconds / 60);

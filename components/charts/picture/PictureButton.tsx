@@ -81,5 +81,5 @@ export function PictureButton({ label, unit, source, box }: Props) {
 }
 
 const styles = StyleSheet.create({
-  row: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'flex-end', gap: space.half },
+  row: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'flex-end', columnGap: space.two },
 });

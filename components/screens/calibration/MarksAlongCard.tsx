@@ -40,7 +40,10 @@ export function MarksAlongCard({ run, residuals }: Props) {
       },
     ];
   }, [surface.data, residuals]);
-  const off = useMemo(() => residualCurves(residuals), [residuals]);
+  const off = useMemo(
+    () => (surface.data ? residualCurves(residuals, surface.data.chainages) : []),
+    [residuals, surface.data],
+  );
   const ground = useMemo(
     () => surface.data && { x: surface.data.chainages, y: surface.data.bed },
     [surface.data],
@@ -92,13 +95,13 @@ export function MarksAlongCard({ run, residuals }: Props) {
   );
 }
 
-/** Residuals by chainage about a line at zero; nothing where no mark can be compared. */
-function residualCurves({ marks }: RunResiduals): SetCurve[] {
+/** Residuals by chainage about a line at zero over the whole reach; nothing where no mark can be compared. */
+function residualCurves({ marks }: RunResiduals, reach: ArrayLike<number>): SetCurve[] {
   const known = marks.filter(({ residual }) => residual !== null);
   if (known.length === 0) return [];
   const x = known.map(({ mark }) => mark.chainage);
   return [
-    { name: 'No difference', x: [x[0], x[x.length - 1]], y: [0, 0], look: 3 },
+    { name: 'No difference', x: [reach[0], reach[reach.length - 1]], y: [0, 0], look: 3 },
     {
       name: 'Residual with its tolerance',
       x,

@@ -18,7 +18,7 @@ import { GAUGE_STAGE_TOLERANCE } from '@/shared/calibration/marks';
 import type { RunResiduals } from '@/shared/calibration/types';
 import { searchSchema, SEARCH_LIMITS } from '@/shared/calibration/search/schemas';
 import type { Run, RunSummary } from '@/shared/runs/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength, formatWithUnit } from '@/shared/units/format';
 import { RunGate } from '../runs/RunGate';
 import { floodName } from './floodWords';
 import { firstCells, firstStretches } from './searchForm';
@@ -78,8 +78,7 @@ function Form({ run, residuals, summary }: Props) {
     },
   });
   const { evaluations, stretches, coarser } = form.formik.values;
-  const cell = (times: number) =>
-    formatWithUnit(summary.cellSize * times, 'length', study.unitSystem);
+  const cell = (times: number) => formatChosenLength(summary.cellSize * times, study.unitSystem);
   const root = `/studies/${study.id}` as const;
   return (
     <Screen

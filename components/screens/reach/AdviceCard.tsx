@@ -74,13 +74,11 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
         Source: {sources.join('; ')}
       </Txt>
       {items.length > FEW ? (
-        <View style={styles.more}>
-          <Button
-            kind="quiet"
-            label={open ? 'Show fewer' : `Show all ${items.length}`}
-            onPress={() => setOpen(!open)}
-          />
-        </View>
+        <Button
+          kind="quiet"
+          label={open ? 'Show fewer' : `Show all ${items.length}`}
+          onPress={() => setOpen(!open)}
+        />
       ) : null}
     </View>
   );
@@ -88,7 +86,6 @@ function Group({ group, onChoose }: { group: AdviceGroup; onChoose: (at: number)
 
 const styles = StyleSheet.create({
   group: { gap: space.half, paddingTop: space.one * 1.5, borderTopWidth: hairline },
-  item: { flexDirection: 'row', alignItems: 'flex-start', marginLeft: -space.two },
-  more: { marginLeft: -space.two },
+  item: { flexDirection: 'row', alignItems: 'flex-start', columnGap: space.two },
   words: { flex: 1, minWidth: 0, paddingVertical: space.one * 1.25 },
 });

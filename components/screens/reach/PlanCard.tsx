@@ -96,4 +96,4 @@ function neighboursOf(placed: readonly ReachSection[], { chainage }: ReachSectio
   return placed.slice(Math.max(0, middle - AROUND), middle + AROUND + 1);
 }
 
-const styles = StyleSheet.create({ view: { marginLeft: -space.two, marginVertical: -space.one } });
+const styles = StyleSheet.create({ view: { marginVertical: -space.one } });

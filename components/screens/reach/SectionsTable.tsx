@@ -107,5 +107,5 @@ function figures(system: UnitSystem): Column<ReachSection>[] {
 }
 
 const styles = StyleSheet.create({
-  choose: { flexDirection: 'row', marginLeft: -space.two, marginVertical: -space.one },
+  choose: { flexDirection: 'row', columnGap: space.two, marginVertical: -space.one },
 });

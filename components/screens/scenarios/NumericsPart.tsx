@@ -5,7 +5,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { CASE_DEFAULTS } from '@/shared/case/caseFile';
 import { proposals } from '@/shared/scenarios/proposals';
-import { formatNumber, formatWithUnit } from '@/shared/units/format';
+import { formatNumber, formatChosenLength } from '@/shared/units/format';
 import { EditorPart, FieldRow } from './EditorPart';
 import { useEditing } from './editorContext';
 import { PlacedField } from './PlacedField';
@@ -38,7 +38,7 @@ export function NumericsPart() {
               quantity="length"
               hint={
                 proposed
-                  ? `Fits this reach: ${formatWithUnit(proposed.cellSize, 'length', system)}.`
+                  ? `Fits this reach: ${formatChosenLength(proposed.cellSize, system)}.`
                   : undefined
               }
               value={numerics.cellSize}

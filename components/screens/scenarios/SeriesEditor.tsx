@@ -175,5 +175,5 @@ function Values(
 
 const styles = StyleSheet.create({
   box: { gap: space.one, alignSelf: 'stretch', minWidth: 0 },
-  buttons: { flexDirection: 'row', flexWrap: 'wrap', marginLeft: -space.two },
+  buttons: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two },
 });

@@ -67,5 +67,5 @@ function Refusal({ refusal }: { refusal: SurveyRefusal }) {
 
 const styles = StyleSheet.create({
   refusal: { gap: space.one, paddingTop: space.two, borderTopWidth: hairline },
-  actions: { flexDirection: 'row', flexWrap: 'wrap', marginLeft: -space.two },
+  actions: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two },
 });

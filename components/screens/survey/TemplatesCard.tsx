@@ -34,5 +34,5 @@ export function TemplatesCard() {
 }
 
 const styles = StyleSheet.create({
-  buttons: { marginLeft: -space.two, marginVertical: -space.one },
+  buttons: { columnGap: space.two, marginVertical: -space.one },
 });

@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import { StyleSheet, View } from 'react-native';
+import { StyleSheet } from 'react-native';
 import { Comparison } from '@/components/charts/Comparison';
 import type { ComparedQuantity } from '@/components/charts/geometry/comparisonModel';
 import { space } from '@/components/theme/tokens';
@@ -28,7 +28,7 @@ export function CurvesCard({ title, curves, quantity }: Props) {
       title={word}
       style={styles.card}
       aside={
-        <View style={styles.aside}>
+        <>
           <Txt tone="soft">{`${unit}, ${along}`}</Txt>
           <Button
             kind="quiet"
@@ -36,7 +36,7 @@ export function CurvesCard({ title, curves, quantity }: Props) {
             name={asTable ? `${name} as a curve` : `${name} as a table`}
             onPress={() => setAsTable(!asTable)}
           />
-        </View>
+        </>
       }
     >
       {asTable ? (
@@ -54,6 +54,5 @@ export function CurvesCard({ title, curves, quantity }: Props) {
 }
 
 const styles = StyleSheet.create({
-  card: { gap: 0, paddingTop: space.half },
-  aside: { flexDirection: 'row', alignItems: 'center', columnGap: space.one, flexWrap: 'wrap' },
+  card: { gap: space.one },
 });

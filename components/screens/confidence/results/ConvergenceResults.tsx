@@ -8,7 +8,7 @@ import { Notice } from '@/components/ui/Notice';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { ConvergenceResult } from '@/shared/confidence/types';
-import { formatNumber, formatWithUnit } from '@/shared/units/format';
+import { formatNumber, formatChosenLength, formatWithUnit } from '@/shared/units/format';
 import { fromSi, UNITS } from '@/shared/units/units';
 import { ConvergenceTable } from './ConvergenceTable';
 
@@ -26,7 +26,7 @@ export function ConvergenceResults({ result }: { result: ConvergenceResult }) {
   const sizes = grids.map(({ cellSize, cells }) =>
     cellSize === null
       ? 'one that failed'
-      : `${formatWithUnit(cellSize, 'length', system)} (${cells} cells)`,
+      : `${formatChosenLength(cellSize, system)} (${cells} cells)`,
   );
   return (
     <>

@@ -4,7 +4,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { GridConvergence } from '@/shared/confidence/gridConvergence';
 import type { ConvergenceResult, GridRow } from '@/shared/confidence/types';
-import { formatNumber, formatQuantity } from '@/shared/units/format';
+import { formatChosenLength, formatNumber } from '@/shared/units/format';
 import { fromSi, UNITS, type UnitSystem } from '@/shared/units/units';
 
 interface Row extends GridRow {
@@ -59,9 +59,7 @@ function columns({ grids }: ConvergenceResult, system: UnitSystem): Column<Row>[
     return formatNumber(fromSi(si, as, system), unit[as].decimals + more);
   };
   const size = (cellSize: number | null) =>
-    cellSize === null
-      ? 'Failed'
-      : `On ${formatQuantity(cellSize, 'length', system)} ${unit.length.symbol}`;
+    cellSize === null ? 'Failed' : `On ${formatChosenLength(cellSize, system)}`;
   return [
     { key: 'place', title: 'Place', render: ({ place }) => place },
     { key: 'what', title: 'Value', render: ({ quantity }) => named[quantity] },

@@ -9,7 +9,7 @@ import { Card } from '@/components/ui/Card';
 import { Notice } from '@/components/ui/Notice';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { BandSeries, EnsembleResult } from '@/shared/confidence/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength } from '@/shared/units/format';
 import { UNITS } from '@/shared/units/units';
 import { StudyRibbon } from '../../studies/StudyRibbon';
 import { EnsembleTable } from './EnsembleTable';
@@ -55,9 +55,9 @@ export function EnsembleResults({ result }: { result: EnsembleResult }) {
     <>
       <StudyRibbon studyId={study.id} at={at} onChange={store.setAt} />
       <Notice still>
-        {`Of ${members} members on cells of ${formatWithUnit(result.cellSize, 'length', system)}, 90 of 100 lie within the bands. They tell of the inputs that were varied and of nothing else: not of the shape of the flood, the survey, or what one dimension leaves out.`}
+        {`Of ${members} members on cells of ${formatChosenLength(result.cellSize, system)}, 90 of 100 lie within the bands. They tell of the inputs that were varied and of nothing else: not of the shape of the flood, the survey, or what one dimension leaves out.`}
       </Notice>
-      <Card title="Station">
+      <Card>
         <StationField
           stations={stations}
           chosen={chosen}

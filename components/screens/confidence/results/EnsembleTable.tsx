@@ -4,7 +4,7 @@ import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import { bandOf } from '@/shared/confidence/quantile';
 import type { EnsembleResult, EnsembleStation, PlaceValues } from '@/shared/confidence/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength } from '@/shared/units/format';
 import type { UnitSystem } from '@/shared/units/units';
 import { VALUE_NAMES, valueText } from '@/shared/confidence/placeValueWords';
 
@@ -29,7 +29,7 @@ export function EnsembleTable({ result }: { result: EnsembleResult }) {
         maxHeight={520}
       />
       <Txt variant="small" tone="soft">
-        {`Of ${members} members${failed ? `; ${failed} failed and are left out` : ''}. The base case is that of the run on the cells of the members, ${formatWithUnit(cellSize, 'length', system)}: what differs from the run itself is the cost of these cells. A member that the wave never reaches counts as later than any other.`}
+        {`Of ${members} members${failed ? `; ${failed} failed and are left out` : ''}. The base case is that of the run on the cells of the members, ${formatChosenLength(cellSize, system)}: what differs from the run itself is the cost of these cells. A member that the wave never reaches counts as later than any other.`}
       </Txt>
     </Card>
   );

@@ -7,7 +7,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import { PARAMETERS } from '@/shared/confidence/parameters';
 import { valueWords } from '@/shared/confidence/planMembers';
 import type { PlaceValues, SensitivityResult } from '@/shared/confidence/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength } from '@/shared/units/format';
 import { changeWords, VALUE_NAMES, valueText } from '@/shared/confidence/placeValueWords';
 import { SensitivityTable } from './SensitivityTable';
 import { StationField } from './StationField';
@@ -39,6 +39,7 @@ export function SensitivityResults({ result }: { result: SensitivityResult }) {
       <Card title="What moves it most">
         <StationField stations={result.stations} chosen={k} onChange={setStation} />
         <RadioGroup
+          inline
           label="Change of"
           value={quantity}
           options={(Object.keys(VALUE_NAMES) as (keyof PlaceValues)[]).map((value) => ({
@@ -50,7 +51,7 @@ export function SensitivityResults({ result }: { result: SensitivityResult }) {
         <Txt>
           {`${label} in the base case: `}
           <Txt strong>{valueText(quantity, base, system)}</Txt>
-          {`, on cells of ${formatWithUnit(result.cellSize, 'length', system)}. The line stands for it; an open bar is the lower value of the input, a full one the upper.`}
+          {`, on cells of ${formatChosenLength(result.cellSize, system)}. The line stands for it; an open bar is the lower value of the input, a full one the upper.`}
         </Txt>
         {base === null ? (
           <Txt tone="soft">The wave never comes there in the base case.</Txt>

@@ -2,7 +2,7 @@ import { FormNumberField } from '@/components/forms/FormNumberField';
 import { useForm } from '@/components/forms/FormRoot';
 import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { ConfidenceOptions } from '@/shared/confidence/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength } from '@/shared/units/format';
 import { computingWords, estimate } from '../confidenceWords';
 
 interface Props {
@@ -23,7 +23,7 @@ export function CellSizeField({ options, times }: Props) {
       label="Cell size of the members"
       quantity="length"
       optional
-      hint={`The run has ${formatWithUnit(options.cellSize, 'length', system)}, which left empty holds here too. Larger cells are quicker and less exact; the result states them. As it stands: ${computingWords(seconds)}.`}
+      hint={`The run has ${formatChosenLength(options.cellSize, system)}, which left empty holds here too. Larger cells are quicker and less exact; the result states them. As it stands: ${computingWords(seconds)}.`}
     />
   );
 }

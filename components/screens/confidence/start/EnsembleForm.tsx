@@ -10,7 +10,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Distribution } from '@/shared/confidence/distributions';
 import type { Parameter } from '@/shared/confidence/parameters';
 import type { ConfidenceOptions } from '@/shared/confidence/types';
-import { formatWithUnit } from '@/shared/units/format';
+import { formatChosenLength } from '@/shared/units/format';
 import { distributionWords } from '@/shared/confidence/settingWords';
 import { computingWords, estimate } from '../confidenceWords';
 import { CellSizeField } from './CellSizeField';
@@ -70,7 +70,7 @@ export function EnsembleForm(props: SetFormProps) {
           </>
         ) : (
           <Txt>
-            {`${words.join('; ')}. Seed ${seed}, cells of ${formatWithUnit(cellSize ?? options.cellSize, 'length', system)}; ${computingWords(seconds)}.`}
+            {`${words.join('; ')}. Seed ${seed}, cells of ${formatChosenLength(cellSize ?? options.cellSize, system)}; ${computingWords(seconds)}.`}
           </Txt>
         )}
         <ButtonRow>

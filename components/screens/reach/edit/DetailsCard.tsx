@@ -190,7 +190,7 @@ function Banks() {
 }
 
 const styles = StyleSheet.create({
-  apart: { flexDirection: 'row', justifyContent: 'space-between', marginHorizontal: -space.two },
+  apart: { flexDirection: 'row', justifyContent: 'space-between', gap: space.two },
   pair: { flexDirection: 'row', gap: space.two, alignItems: 'flex-start' },
   half: { flex: 1, minWidth: 0 },
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one },

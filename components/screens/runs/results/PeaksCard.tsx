@@ -1,5 +1,4 @@
 import { useState } from 'react';
-import { StyleSheet, View } from 'react-native';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace } from '@/components/charts/usePlaceAndTime';
 import { shortTime } from '@/components/charts/geometry/timeWords';
@@ -112,6 +111,3 @@ function columns(system: UnitSystem, span: number): Column<Row>[] {
     },
   ];
 }
-
-// Of one line with the title, though the button is taller.
-const styles = StyleSheet.create({ aside: { flexDirection: 'row', alignItems: 'center' } });
