@@ -98,7 +98,15 @@ export function setInitialState(
           time: 0,
         });
       }
-      return moves;
+      const shut = structures?.holdsUp(flows, stages) ?? null;
+      if (!shut) return moves;
+      warn({
+        code: 'initialNotSettled',
+        ...say`The start cannot be steady: ${shut.id} at chainage ${q(shut.chainage, 'chainage')} lets less through than flows to it then, however high the water stands. The run begins as if it passed and the water rises before it. Open it at the start, or give the initial state as still water or as a profile.`,
+        chainage: shut.chainage,
+        time: 0,
+      });
+      return false;
     }
   }
 }

@@ -37,7 +37,11 @@ export function createReservoirBoundary(
       below.look();
       const raised = release.openFlow(time, RISE);
       const growth = (raised - release.openFlow(time, 0)) / RISE;
-      flow = Math.max(0, release.solve(time));
+      flow = release.solve(time);
+      if (flow < 0) {
+        flow = 0;
+        release.flows.fill(0);
+      }
       return Math.max(inflow(time), (growth * workspace.dx) / pool.surface());
     },
   };

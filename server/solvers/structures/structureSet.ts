@@ -36,8 +36,12 @@ export interface StructureSet {
   fluxes(time: number): number;
   /** At the start of every step */
   follow(time: number): void;
-  /** Stage (m) that steady `flow` (m³/s) needs above face `face` for a stage below it; null without a structure. */
+  /** Stage (m) that steady `flow` (m³/s) needs above face `face` for a stage below it; null where no structure stands or
+   *  none lets so much through at any stage. */
   stageAbove(face: number, flow: number, stageBelow: number): number | null;
+  /** A structure that at the start lets less through than these flows (m³/s) however high the water stands; null where
+   *  there is none. Flows and stages (m) as of a profile, index 0..n+1. */
+  holdsUp(flows: Float64Array, stages: Float64Array): Structure | null;
   /** Whether structures stand at a face between cells */
   holds(face: number): boolean;
   /** Whether still water at a stage (m) stays behind the structures at a face between cells */
@@ -102,6 +106,29 @@ export function createStructureSet(
     return list.reduce((sum, structure) => sum + structure.flow(water), 0);
   }
 
+  /** What a group passes more than a flow (m³/s), by the stage above it (m) */
+  function surplusOf(
+    { face, structures: list }: StructureFace,
+    flow: number,
+    stageBelow: number,
+  ): (eta: number) => number {
+    return (eta) => {
+      const a = waves.flowAreaAt(face, eta, tables.areaAt(face, eta));
+      const velocityHead = a > 0 ? (flow / a) ** 2 / (2 * gravity) : 0;
+      const deepest = (0.5 * a) / Math.max(tables.widthAt(face, eta), 1e-9);
+      const water: Water = {
+        stageUp: eta,
+        energyUp: eta + Math.min(velocityHead, deepest),
+        stageDown: stageBelow,
+        cellUp: face,
+        cellDown: face + 1,
+        isForward: true,
+        time: 0,
+      };
+      return steadyFlow(list, water) - flow;
+    };
+  }
+
   return {
     groups,
     pool,
@@ -123,32 +150,22 @@ export function createStructureSet(
     stageAbove(face, flow, stageBelow) {
       const group = faces.find((one) => one.face === face);
       if (!group) return null;
-      const list = group.structures;
       const floor = Math.max(stageBelow, bed[face]);
       if (!(flow > 0)) {
         // What is shut holds any water: there is none to say how much.
-        const lowest = lowestOf(list);
+        const lowest = lowestOf(group.structures);
         return lowest < Infinity ? Math.max(floor, lowest) : floor;
       }
-      const surplus = (eta: number): number => {
-        const a = waves.flowAreaAt(face, eta, tables.areaAt(face, eta));
-        const velocityHead = a > 0 ? (flow / a) ** 2 / (2 * gravity) : 0;
-        const deepest = (0.5 * a) / Math.max(tables.widthAt(face, eta), 1e-9);
-        return (
-          steadyFlow(list, {
-            stageUp: eta,
-            energyUp: eta + Math.min(velocityHead, deepest),
-            stageDown: stageBelow,
-            cellUp: face,
-            cellDown: face + 1,
-            isForward: true,
-            time: 0,
-          }) - flow
-        );
-      };
-      // A structure that cannot pass the flow at any stage leaves the profile as it is; the run shows what happens.
-      if (surplus(bed[face] + HIGHEST) < 0) return null;
-      return risingRoot(surplus, floor, 0.1);
+      const surplus = surplusOf(group, flow, stageBelow);
+      return surplus(bed[face] + HIGHEST) < 0 ? null : risingRoot(surplus, floor, 0.1);
+    },
+    holdsUp(flows, stages) {
+      const group = faces.find(
+        (one) =>
+          flows[one.face] > 0 &&
+          surplusOf(one, flows[one.face], stages[one.face + 1])(bed[one.face] + HIGHEST) < 0,
+      );
+      return group ? group.structures[0] : null;
     },
     holds: (face) => faces.some((one) => one.face === face),
     keepsBack(face, level) {
