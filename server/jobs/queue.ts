@@ -1,7 +1,9 @@
 import { randomUUID } from 'node:crypto';
 import { QueryTypes, Transaction, type Sequelize } from 'sequelize';
 import type { Run as RunTold } from '../../shared/runs/types';
+import type { Said } from '../../shared/units/message';
 import type { Models } from '../models';
+import { failureFields } from '../models/failure';
 import type { EncodedBlock } from '../results/blocks/blockTypes';
 import type { QueueTiming } from './timing';
 import { retryOnDeadlock } from './retryOnDeadlock';
@@ -27,7 +29,7 @@ export type Ending =
       /** Into the reach; null: as it was asked for. */
       inflow?: RunTold['inflow'] | null;
     }
-  | { state: 'failed'; failure: string }
+  | { state: 'failed'; failure: Said }
   | { state: 'cancelled' };
 
 export type RunQueue = ReturnType<typeof runQueue>;
@@ -119,8 +121,8 @@ export function runQueue(sequelize: Sequelize, { Run, RunBlock }: Models, timing
             };
             await run.update(values, { transaction });
           } else {
-            const failure = told.state === 'failed' ? told.failure : null;
-            await run.update({ ...finished, state: told.state, failure }, { transaction });
+            const failure = failureFields(told.state === 'failed' ? told.failure : null);
+            await run.update({ ...finished, state: told.state, ...failure }, { transaction });
           }
           return true;
         }),

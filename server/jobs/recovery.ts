@@ -1,4 +1,5 @@
 import type { Models } from '../models';
+import { failureFields } from '../models/failure';
 import type { RunQueue } from './queue';
 import { MAX_ATTEMPTS } from './timing';
 
@@ -24,7 +25,7 @@ export async function recoverExpired(queue: RunQueue, { Run }: Models): Promise<
       await run.update(
         {
           state,
-          failure,
+          ...failureFields(failure === null ? null : { message: failure }),
           progress: state === 'queued' ? 0 : run.progress,
           secondsLeft: null,
           leaseOwner: null,

@@ -20,7 +20,7 @@ function main({ caseBytes, stopFlag }: RunWorkerData): void {
     post(route(caseFile, () => Atomics.load(stop, 0) !== 0, post));
   } catch (error) {
     if (error instanceof RunCancelled) post({ type: 'cancelled' });
-    else if (error instanceof RunFailed) post({ type: 'failed', reason: error.message });
+    else if (error instanceof RunFailed) post({ type: 'failed', reason: error.said });
     else throw error;
   }
 }

@@ -1,3 +1,4 @@
+import type { Said } from '../../shared/units/message';
 import type { Run } from '../../shared/runs/types';
 import type { EncodedBlock } from '../results/blocks/blockTypes';
 
@@ -29,7 +30,7 @@ export type WorkerResult =
       /** Into the reach, where it came of the routing itself: from a reservoir. */
       inflow: Run['inflow'] | null;
     }
-  | { type: 'failed'; reason: string }
+  | { type: 'failed'; reason: Said }
   | { type: 'cancelled' };
 
 export type WorkerMessage =

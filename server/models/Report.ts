@@ -18,6 +18,8 @@ export interface ReportModel extends Model<
   /** What is preliminary is made anew each time and not kept. */
   standing: Exclude<ReportRow['standing'], 'preliminary'>;
   paper: Paper;
+  /** With the published cases as its last pages. */
+  annex: CreationOptional<boolean>;
   /** SHA-256 of `pdf`, hex. */
   hash: string;
   bytes: number;
@@ -35,6 +37,7 @@ export const defineReport = (sequelize: Sequelize) =>
       runId: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
       standing: { type: DataTypes.STRING(16), allowNull: false },
       paper: { type: DataTypes.STRING(8), allowNull: false },
+      annex: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
       hash: { type: DataTypes.CHAR(64), allowNull: false },
       bytes: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },
       pages: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false },

@@ -9,6 +9,7 @@ import {
 } from 'sequelize';
 import type { Run, RunState } from '../../shared/runs/types';
 import { jsonColumn } from '../database/jsonColumn';
+import { failureColumns, type FailureFields } from './failure';
 import type { IssueModel } from './Issue';
 import type { ReviewModel } from './Review';
 import type { SignOffModel } from './SignOff';
@@ -47,7 +48,8 @@ export interface RunModel extends Model<
   cancelRequested: CreationOptional<boolean>;
   /** Why the last attempt was broken off. */
   interruption: CreationOptional<string | null>;
-  failure: CreationOptional<string | null>;
+  failure: FailureFields['failure'];
+  failureParts: FailureFields['failureParts'];
   requestedBy: number;
   requestedAt: Date;
   startedAt: CreationOptional<Date | null>;
@@ -91,7 +93,7 @@ export const defineRun = (sequelize: Sequelize) =>
       leaseUntil: DataTypes.DATE(3),
       cancelRequested: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
       interruption: DataTypes.STRING(500),
-      failure: DataTypes.TEXT,
+      ...failureColumns(),
       requestedBy: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
       requestedAt: { type: DataTypes.DATE(3), allowNull: false },
       startedAt: DataTypes.DATE(3),

@@ -7,6 +7,7 @@ import {
   type Sequelize,
 } from 'sequelize';
 import type { TaskState } from '../../shared/tasks/types';
+import { failureColumns, type FailureFields } from './failure';
 
 /** One computation of a set; `gather` is the last, which makes one result of those of all members. */
 export interface TaskModel extends Model<
@@ -30,7 +31,8 @@ export interface TaskModel extends Model<
   leaseUntil: CreationOptional<Date | null>;
   /** Why the last attempt was broken off. */
   interruption: CreationOptional<string | null>;
-  failure: CreationOptional<string | null>;
+  failure: FailureFields['failure'];
+  failureParts: FailureFields['failureParts'];
   startedAt: CreationOptional<Date | null>;
   finishedAt: CreationOptional<Date | null>;
   createdAt: CreationOptional<Date>;
@@ -54,7 +56,7 @@ export const defineTask = (sequelize: Sequelize) =>
       leaseOwner: DataTypes.STRING(36),
       leaseUntil: DataTypes.DATE(3),
       interruption: DataTypes.STRING(500),
-      failure: DataTypes.TEXT,
+      ...failureColumns(),
       startedAt: DataTypes.DATE(3),
       finishedAt: DataTypes.DATE(3),
       createdAt: DataTypes.DATE(3),

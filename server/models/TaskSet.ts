@@ -10,7 +10,9 @@ import {
 import type { TaskSetKind, TaskState } from '../../shared/tasks/types';
 import { jsonColumn } from '../database/jsonColumn';
 import type { RunModel } from './Run';
+import type { StudyModel } from './Study';
 import type { UserModel } from './User';
+import { failureColumns, type FailureFields } from './failure';
 
 /** Work beside the runs: many computations that belong together, and what was asked of them. */
 export interface TaskSetModel extends Model<
@@ -33,7 +35,8 @@ export interface TaskSetModel extends Model<
   input: Buffer;
   caseHash: string | null;
   solverVersion: string;
-  failure: CreationOptional<string | null>;
+  failure: FailureFields['failure'];
+  failureParts: FailureFields['failureParts'];
   requestedBy: number;
   requestedAt: Date;
   startedAt: CreationOptional<Date | null>;
@@ -44,6 +47,8 @@ export interface TaskSetModel extends Model<
   updatedAt: CreationOptional<Date>;
   requester?: NonAttribute<UserModel>;
   run?: NonAttribute<RunModel | null>;
+  /** Verification belongs to none. */
+  study?: NonAttribute<StudyModel | null>;
 }
 
 export const defineTaskSet = (sequelize: Sequelize) =>
@@ -62,7 +67,7 @@ export const defineTaskSet = (sequelize: Sequelize) =>
       input: { type: DataTypes.BLOB('long'), allowNull: false },
       caseHash: DataTypes.STRING(80),
       solverVersion: { type: DataTypes.STRING(20), allowNull: false },
-      failure: DataTypes.TEXT,
+      ...failureColumns(),
       requestedBy: { type: DataTypes.BIGINT.UNSIGNED, allowNull: false },
       requestedAt: { type: DataTypes.DATE(3), allowNull: false },
       startedAt: DataTypes.DATE(3),

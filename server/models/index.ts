@@ -105,6 +105,7 @@ export function defineModels(sequelize: Sequelize) {
   models.Withdrawal.belongsTo(models.User, { as: 'withdrawer', foreignKey: 'withdrawnBy' });
   models.ClientRead.belongsTo(models.User, { as: 'reader', foreignKey: 'userId' });
   models.TaskSet.belongsTo(models.Run, { as: 'run', foreignKey: 'runId' });
+  models.TaskSet.belongsTo(models.Study, { as: 'study', foreignKey: 'studyId' });
   models.TaskSet.belongsTo(models.User, { as: 'requester', foreignKey: 'requestedBy' });
   return models;
 }

@@ -1,4 +1,5 @@
 import type { Run, RunRow } from '../../shared/runs/types';
+import { failureIn } from '../models/failure';
 import type { RunModel } from '../models/Run';
 import { may } from '../policies/decide';
 import type { Actor } from '../policies/subject';
@@ -33,7 +34,7 @@ export const presentRun = (run: RunModel, actor: Actor): Run => ({
   solverVersion: run.solverVersion,
   duration: run.duration,
   attempts: run.attempts,
-  failure: run.failure ?? null,
+  failure: failureIn(run.study!.unitSystem, run),
   inflow: run.inflow,
   triesOutlet: Boolean(run.triedFor),
   may: actionsOf(run, actor),

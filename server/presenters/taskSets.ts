@@ -1,11 +1,13 @@
+import { memberLabel } from '../../shared/confidence/memberLabel';
 import type { TaskRow, TaskSet, TaskSetRow } from '../../shared/tasks/types';
+import { failureIn } from '../models/failure';
 import type { TaskModel } from '../models/Task';
 import type { TaskSetModel } from '../models/TaskSet';
 import { may } from '../policies/decide';
 import type { Actor } from '../policies/subject';
 import type { CountedTaskSet, TaskCounts } from '../services/tasks/findTaskSets';
 
-/** Needs the set's `requester` and `run`. */
+/** Needs the set's `requester`, `run` and `study`. */
 export const presentTaskSetRow = ({ set, counts }: CountedTaskSet): TaskSetRow => ({
   id: set.id,
   kind: set.kind,
@@ -20,7 +22,7 @@ export const presentTaskSetRow = ({ set, counts }: CountedTaskSet): TaskSetRow =
   total: counts.total,
   finished: counts.finished,
   failed: counts.failed,
-  failure: set.failure ?? null,
+  failure: failureIn(systemOf(set), set),
   requestedBy: set.requester!.name,
   requestedAt: set.requestedAt.toISOString(),
   finishedAt: set.finishedAt?.toISOString() ?? null,
@@ -36,18 +38,21 @@ export const presentTaskSet = (
   caseHash: set.caseHash,
   solverVersion: set.solverVersion,
   settings: set.settings,
-  tasks: tasks.map(presentTask),
+  tasks: tasks.map((task) => presentTask(task, set)),
   may: actionsOf(set, tasks, actor),
 });
 
-const presentTask = ({ id, position, label, state, progress, failure }: TaskModel): TaskRow => ({
-  id,
-  index: position,
-  label,
-  state,
-  progress,
-  failure: failure ?? null,
+const presentTask = (task: TaskModel, set: TaskSetModel): TaskRow => ({
+  id: task.id,
+  index: task.position,
+  label: memberLabel(set, task, systemOf(set)),
+  state: task.state,
+  progress: task.progress,
+  failure: failureIn(systemOf(set), task),
 });
+
+/** Verification belongs to no study and is told in SI. */
+const systemOf = ({ study }: TaskSetModel) => study?.unitSystem ?? 'metric';
 
 function actionsOf(set: TaskSetModel, tasks: TaskModel[], actor: Actor): TaskSet['may'] {
   if (!may(actor, 'taskSet.change', { firmId: set.firmId })) return [];

@@ -37,7 +37,7 @@ const REQUIRED = [
 export function validateCase(value: unknown): CheckedCase {
   const faults = new Faults();
   if (!faults.record('', value, REQUIRED, ['gravity', 'roughnessFactors', 'localLosses'])) {
-    return { faults: [{ path: '(case)', message: faults.list[0].message }], caseFile: null };
+    return { faults: [{ ...faults.list[0], path: '(case)' }], caseFile: null };
   }
   const has = (key: string): boolean => key in value;
   if (has('format') && value.format !== CASE_FORMAT) {

@@ -1,5 +1,5 @@
 import { formatNumber } from './format';
-import { fromSi, UNITS, type Quantity, type UnitSystem } from './units';
+import { UNITS, type Quantity, type Unit, type UnitSystem } from './units';
 
 /** A number of a message, SI. */
 export interface SaidQuantity {
@@ -9,10 +9,17 @@ export interface SaidQuantity {
   figures?: number;
   /** Where the quantity's own decimals are not wanted; in every system. */
   decimals?: number;
+  /** All the digits there are: a value that somebody typed and looks for again. */
+  exact?: boolean;
+}
+
+/** The symbol of a unit by itself: a length "in m". */
+export interface SaidUnit {
+  unit: Quantity;
 }
 
 /** What a message is put together from, in order. */
-export type MessagePart = string | SaidQuantity;
+export type MessagePart = string | SaidQuantity | SaidUnit;
 
 /** A sentence whose numbers can be told in the study's units. */
 export interface Said {
@@ -25,7 +32,7 @@ export interface Said {
 /** Tag of a template: ``say`The bed rises ${q(0.4, 'depth')}.` ``; words and plain numbers go in as they are. */
 export function say(
   words: TemplateStringsArray,
-  ...values: (string | number | SaidQuantity | readonly MessagePart[])[]
+  ...values: (string | number | SaidQuantity | SaidUnit | readonly MessagePart[])[]
 ): Said {
   const parts = words.flatMap((text, i): MessagePart[] => {
     const value = values[i];
@@ -47,8 +54,19 @@ export const partsOf = ({ message, parts }: Said): MessagePart[] => parts ?? [me
 export const q = (
   value: number,
   quantity: Quantity,
-  digits: Pick<SaidQuantity, 'figures' | 'decimals'> = {},
+  digits: Pick<SaidQuantity, 'figures' | 'decimals' | 'exact'> = {},
 ): SaidQuantity => ({ value, quantity, ...digits });
+
+/** A value as it was typed, with all its digits. */
+export const typed = (value: number, quantity: Quantity): SaidQuantity =>
+  q(value, quantity, { exact: true });
+
+/** A unit's symbol for `say`. */
+export const unitOf = (unit: Quantity): SaidUnit => ({ unit });
+
+/** What is plain text already, or a message, as a message. */
+export const asSaid = (words: string | Said): Said =>
+  typeof words === 'string' ? { message: words } : words;
 
 /** The message as it is shown to a person in this system. */
 export function sayIn(system: UnitSystem, { message, parts }: Said): string {
@@ -56,7 +74,7 @@ export function sayIn(system: UnitSystem, { message, parts }: Said): string {
   return system === 'metric' || !parts ? message : write(parts, system);
 }
 
-const isParts = (value: SaidQuantity | readonly MessagePart[]): value is readonly MessagePart[] =>
+const isParts = (value: MessagePart | readonly MessagePart[]): value is readonly MessagePart[] =>
   Array.isArray(value);
 
 function joined(parts: MessagePart[]): Said {
@@ -65,15 +83,22 @@ function joined(parts: MessagePart[]): Said {
 }
 
 const write = (parts: readonly MessagePart[], system: UnitSystem): string =>
-  parts.map((part) => (typeof part === 'string' ? part : quantityText(part, system))).join('');
+  parts.map((part) => (typeof part === 'string' ? part : partText(part, system))).join('');
+
+const partText = (part: SaidQuantity | SaidUnit, system: UnitSystem): string =>
+  'unit' in part ? unitIn(part.unit, system).symbol : quantityText(part, system);
+
+/** A sentence compares places with cell sizes and spacings: chainages are told in metres here, not kilometres. */
+const unitIn = (quantity: Quantity, system: UnitSystem): Unit =>
+  quantity === 'chainage' && system === 'metric'
+    ? { symbol: 'm', si: 1, decimals: 0 }
+    : UNITS[system][quantity];
 
 function quantityText(said: SaidQuantity, system: UnitSystem): string {
-  // A sentence compares places with cell sizes and spacings: chainages are told in metres here, not kilometres.
-  const inMetres = said.quantity === 'chainage' && system === 'metric';
-  const { symbol, decimals } = inMetres
-    ? { symbol: 'm', decimals: 0 }
-    : UNITS[system][said.quantity];
-  const value = inMetres ? said.value : fromSi(said.value, said.quantity, system);
+  const { symbol, si, decimals } = unitIn(said.quantity, system);
+  const value = said.value / si;
+  // Nine figures: what was typed in feet comes back without the rounding of its way through metres.
+  if (said.exact) return `${si === 1 ? value : Number(value.toPrecision(9))} ${symbol}`;
   if (said.figures === undefined) {
     return `${formatNumber(value, said.decimals ?? decimals)} ${symbol}`;
   }

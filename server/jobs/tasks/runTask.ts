@@ -1,6 +1,7 @@
 import { gunzipSync, gzipSync } from 'node:zlib';
 import type { TaskSetKind } from '../../../shared/tasks/types';
-import { RunCancelled, RunFailed } from '../../solvers';
+import { SaidError } from '../../../shared/units/SaidError';
+import { RunCancelled } from '../../solvers';
 import { TaskCancelled, type AnyTaskKind, type TaskControl } from './taskKind';
 import type { TaskAnswer, TaskWork } from './taskMessages';
 
@@ -23,9 +24,9 @@ export function runTaskOf(kinds: Partial<Record<TaskSetKind, AnyTaskKind>>) {
     } catch (error) {
       if (error instanceof RunCancelled || error instanceof TaskCancelled)
         return { type: 'cancelled' };
+      if (error instanceof SaidError) return { type: 'failed', reason: error.said };
       const { message, stack } = error as Error;
-      if (error instanceof RunFailed) return { type: 'failed', reason: message };
-      return { type: 'failed', reason: message, fault: stack ?? message };
+      return { type: 'failed', reason: { message }, fault: stack ?? message };
     }
   };
 }

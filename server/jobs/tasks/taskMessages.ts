@@ -1,4 +1,5 @@
 import type { TaskSetKind } from '../../../shared/tasks/types';
+import type { Said } from '../../../shared/units/message';
 
 /** What a worker thread is given: gzip of JSON throughout. */
 export interface TaskWork {
@@ -22,5 +23,5 @@ export interface TaskWork {
 
 export type TaskAnswer =
   | { type: 'finished'; result: Uint8Array }
-  | { type: 'failed'; reason: string; fault?: string }
+  | { type: 'failed'; reason: Said; fault?: string }
   | { type: 'cancelled' };

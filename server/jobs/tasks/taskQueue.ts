@@ -1,7 +1,10 @@
 import { randomUUID } from 'node:crypto';
 import { QueryTypes, Transaction, type Sequelize } from 'sequelize';
 import type { TaskSetKind } from '../../../shared/tasks/types';
+import { partsOf, say, type Said } from '../../../shared/units/message';
 import type { Models } from '../../models';
+import { failureFields, failureSaid } from '../../models/failure';
+import type { TaskModel } from '../../models/Task';
 import { retryOnDeadlock } from '../retryOnDeadlock';
 import { MAX_ATTEMPTS, type QueueTiming } from '../timing';
 import type { TaskWork } from './taskMessages';
@@ -17,7 +20,7 @@ export interface TaskClaim {
 
 export type TaskEnding =
   | { state: 'finished'; result: Uint8Array }
-  | { state: 'failed'; failure: string }
+  | { state: 'failed'; failure: Said }
   | { state: 'cancelled' };
 
 export type TaskQueue = ReturnType<typeof taskQueue>;
@@ -160,7 +163,7 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
               ...noLease,
               state,
               result,
-              failure,
+              ...failureFields(failure),
               finishedAt: now,
               ...(state === 'finished' && { progress: 1 }),
             },
@@ -207,7 +210,9 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
               ...noLease,
               state,
               progress: 0,
-              failure: state === 'failed' ? brokeOff(task.attempts, task.interruption) : null,
+              ...failureFields(
+                state === 'failed' ? { message: brokeOff(task.attempts, task.interruption) } : null,
+              ),
               finishedAt: state === 'queued' ? null : now,
             },
             { transaction },
@@ -255,11 +260,13 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
               );
               return false;
             }
-            const failure = some
-              ? (gather?.failure ?? null)
-              : `None of its ${members.length} members came to a result. The first says: ${members[0]?.failure ?? 'nothing'}`;
+            const failure = some ? gather && failureSaid(gather) : noneOf(members);
             await set.update(
-              { state: failure === null ? 'finished' : 'failed', failure, finishedAt: now },
+              {
+                state: failure ? 'failed' : 'finished',
+                ...failureFields(failure ?? null),
+                finishedAt: now,
+              },
               { transaction },
             );
             return true;
@@ -270,6 +277,11 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
       return ended;
     },
   };
+}
+
+function noneOf(members: TaskModel[]): Said {
+  const why = members.length > 0 && failureSaid(members[0]);
+  return say`None of its ${members.length} members came to a result. The first says: ${why ? partsOf(why) : 'nothing'}`;
 }
 
 const brokeOff = (attempts: number, interruption: string | null): string =>

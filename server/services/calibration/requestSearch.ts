@@ -2,8 +2,10 @@ import type { ObservedFlood } from '../../../shared/calibration/compareFlood';
 import type { SearchBody, SearchSettings } from '../../../shared/calibration/search/types';
 import { withFactors } from '../../../shared/calibration/search/withFactors';
 import type { CaseFile } from '../../../shared/case/caseFile';
+import { faultsIn } from '../../../shared/case/validate/faults';
 import { validateCase } from '../../../shared/case/validateCase';
 import type { Fault } from '../../../shared/errors';
+import type { UnitSystem } from '../../../shared/units/units';
 import { invalid } from '../../errors';
 import type { CalibrationInput } from '../../jobs/tasks/calibration/calibrationKind';
 import type { RunModel } from '../../models/Run';
@@ -40,7 +42,8 @@ export function buildRequestSearch({ observations, runs, tasks }: Needs) {
     const runCells = caseFile.numerics.cellSize;
     const cellSize = runCells * body.coarser;
     const ones = stretches.map(() => 1);
-    const faults = faultsOf(withFactors(caseFile, stretches, ones, cellSize), caseFile);
+    const varied = withFactors(caseFile, stretches, ones, cellSize);
+    const faults = faultsOf(varied, caseFile, run.study!.unitSystem);
     if (faults.length > 0) throw invalid(faults);
     const settings: SearchSettings = { ...body, cells: { search: cellSize, run: runCells } };
     const startsAt = run.startsAt?.toISOString() ?? null;
@@ -78,9 +81,13 @@ const chosen = ({ marks, gauges }: ObservedFlood, use: SearchBody['use']): Obser
 });
 
 /** Faults of the case at the stretches that cause them. */
-function faultsOf(varied: CaseFile, { roughnessFactors = [] }: CaseFile): Fault[] {
+function faultsOf(
+  varied: CaseFile,
+  { roughnessFactors = [] }: CaseFile,
+  system: UnitSystem,
+): Fault[] {
   const before = roughnessFactors.length;
-  return validateCase(varied).faults.map(({ path, message }) => {
+  return faultsIn(system, validateCase(varied).faults).map(({ path, message }) => {
     const k = /^roughnessFactors\[(\d+)\](?:\.(from|to))?/.exec(path);
     if (!k) return { path: 'coarser', message };
     return { path: `stretches[${Number(k[1]) - before}].${k[2] ?? 'to'}`, message };

@@ -1,13 +1,19 @@
 import type { Fault } from '../../../shared/errors';
 import type { SectionsChangeBody } from '../../../shared/reaches/schemas';
 import type { Section } from '../../../shared/surveys/types';
+import { formatQuantity } from '../../../shared/units/format';
+import { UNITS, type UnitSystem } from '../../../shared/units/units';
 import { invalid } from '../../errors';
 
 /** Sections named in one fault; more are counted. */
 const NAMED = 3;
 
-/** The sections with the change made. Pure. Throws `invalid` with everything that does not fit; then nothing is changed. */
-export function changeSections(sections: Section[], body: SectionsChangeBody): Section[] {
+/** The sections with the change made. Pure. Throws `invalid` with everything that does not fit, told in the study's units; then nothing is changed. */
+export function changeSections(
+  sections: Section[],
+  body: SectionsChangeBody,
+  system: UnitSystem,
+): Section[] {
   const chosen = new Set(body.sectionIds);
   const known = new Set(sections.map(({ id }) => id));
   const strangers = body.sectionIds.filter((id) => !known.has(id));
@@ -19,7 +25,7 @@ export function changeSections(sections: Section[], body: SectionsChangeBody): S
   const changed = sections
     .filter(({ id }) => chosen.has(id))
     .map((section) => withBanks(section, body));
-  faults.push(...bankFaults(changed, body), ...zoneFaults(changed, body));
+  faults.push(...bankFaults(changed, body, system), ...zoneFaults(changed, body));
   if (faults.length > 0) throw invalid(faults);
   const byId = new Map(changed.map((section) => [section.id, withRoughness(section, body)]));
   return sections.map((section) => byId.get(section.id) ?? section);
@@ -56,7 +62,11 @@ function withRoughness(
   };
 }
 
-function bankFaults(sections: Section[], { banks }: SectionsChangeBody): Fault[] {
+function bankFaults(
+  sections: Section[],
+  { banks }: SectionsChangeBody,
+  system: UnitSystem,
+): Fault[] {
   if (!banks) return [];
   if (banks[0] >= banks[1])
     return [{ path: 'banks[1]', message: 'The right bank stands to the right of the left one.' }];
@@ -65,7 +75,10 @@ function bankFaults(sections: Section[], { banks }: SectionsChangeBody): Fault[]
   );
   if (outside.length === 0) return [];
   const [{ points }] = outside;
-  const range = `${points[0][0]} to ${points[points.length - 1][0]} m`;
+  const ends = [points[0][0], points[points.length - 1][0]].map((offset) =>
+    formatQuantity(offset, 'length', system),
+  );
+  const range = `${ends.join(' to ')} ${UNITS[system].length.symbol}`;
   return [
     {
       path: 'banks[0]',

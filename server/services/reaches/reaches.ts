@@ -42,8 +42,9 @@ export function buildReaches(platform: Platform) {
     actor: Actor,
     body: SectionsChangeBody,
   ): Promise<ReachModel> {
+    const { unitSystem } = await Study.findByPk(reach.studyId, { rejectOnEmpty: true });
     await versions.next(reach, actor, body.version, (before) => {
-      const sections = changeSections(before, body);
+      const sections = changeSections(before, body, unitSystem);
       return { sections, told: { words: describeChange(before, sections) } };
     });
     return reach.reload({ include: INCLUDE });

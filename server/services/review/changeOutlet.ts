@@ -1,4 +1,5 @@
 import type { CaseFile, Downstream } from '../../../shared/case/caseFile';
+import { q, say, type Said } from '../../../shared/units/message';
 
 /** How far a given level is raised, m. */
 const RAISED = 0.5;
@@ -8,16 +9,16 @@ const SLOPE_SHARE = 0.5;
 const MILD_SLOPE = 0.0005;
 
 /** What is changed at the outlet to see how far it reaches, in words; null where the end is closed. */
-export function describeOutletChange(downstream: Downstream): string | null {
+export function describeOutletChange(downstream: Downstream): Said | null {
   switch (downstream.kind) {
     case 'normalDepth':
-      return 'half of the slope at the outlet';
+      return say`half of the slope at the outlet`;
     case 'stage':
     case 'rating':
-      return `the stage at the outlet ${RAISED} m higher`;
+      return say`the stage at the outlet ${q(RAISED, 'depth')} higher`;
     case 'criticalDepth':
     case 'open':
-      return `normal depth at a slope of ${MILD_SLOPE} at the outlet`;
+      return say`normal depth at a slope of ${MILD_SLOPE} at the outlet`;
     case 'wall':
       return null;
   }

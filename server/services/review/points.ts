@@ -1,4 +1,6 @@
 import type { PointBody, PointEntryBody } from '../../../shared/review/schemas';
+import { formatDuration } from '../../../shared/units/format';
+import { q, say, sayIn } from '../../../shared/units/message';
 import { conflict, invalid } from '../../errors';
 import type { ReviewPointModel } from '../../models/ReviewPoint';
 import type { ReviewPointEntryModel } from '../../models/ReviewPointEntry';
@@ -61,10 +63,18 @@ export function buildPoints(
     const [from, to] = [sections[0].chainage, sections[sections.length - 1].chainage];
     if (chainage !== null && (chainage < from || chainage > to))
       throw invalid([
-        { path: 'chainage', message: `The reach goes from chainage ${from} m to ${to} m.` },
+        {
+          path: 'chainage',
+          message: sayIn(
+            run.study!.unitSystem,
+            say`The reach goes from chainage ${q(from, 'chainage')} to ${q(to, 'chainage')}.`,
+          ),
+        },
       ]);
     if (time !== null && time > run.duration)
-      throw invalid([{ path: 'time', message: `The run ends after ${run.duration} s.` }]);
+      throw invalid([
+        { path: 'time', message: `The run ends after ${formatDuration(run.duration)}.` },
+      ]);
   }
 
   /** Throws `invalid` for an empty answer, `conflict` where the point or the check is past it. */

@@ -25,7 +25,7 @@ export function buildReadReview(
   async function checklistOf(run: RunModel, review: ReviewModel | null): Promise<ChecklistItem[]> {
     if (run.state !== 'routed') return [];
     const answers = review?.answers ?? {};
-    return checklistItems(await gather(run, review)).map((item) => ({
+    return checklistItems(await gather(run, review), run.study!.unitSystem).map((item) => ({
       ...item,
       answer: answers[item.id] || null,
     }));

@@ -1,5 +1,6 @@
 import { conflict } from '../../errors';
 import type { ProgressHub } from '../../jobs/progressHub';
+import { failureFields } from '../../models/failure';
 import type { RunModel } from '../../models/Run';
 import type { Platform } from '../../platform';
 import { SOLVER_VERSION } from '../../solvers';
@@ -62,7 +63,7 @@ export function buildChangeRuns({ audit, sequelize, models, now }: Platform, nee
           attempts: 0,
           cancelRequested: false,
           interruption: null,
-          failure: null,
+          ...failureFields(null),
           startedAt: null,
           finishedAt: null,
           solverVersion: SOLVER_VERSION,

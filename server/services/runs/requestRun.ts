@@ -1,4 +1,5 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
+import { faultsIn } from '../../../shared/case/validate/faults';
 import { validateCase } from '../../../shared/case/validateCase';
 import type { Fault } from '../../../shared/errors';
 import { buildCase } from '../../../shared/scenarios/buildCase';
@@ -94,7 +95,7 @@ function caseOf({ body, name }: ScenarioModel, sections: Section[], study: Study
   const caseFile = buildCase(body, sections, `${study.title}: ${name}`);
   // The solver's own check has the last word.
   const refused = validateCase(caseFile);
-  if (refused.faults.length > 0) throw incomplete(refused.faults);
+  if (refused.faults.length > 0) throw incomplete(faultsIn(study.unitSystem, refused.faults));
   return caseFile;
 }
 

@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize';
 import { TASK_STATE_WORDS } from '../../../shared/tasks/types';
 import { conflict } from '../../errors';
+import { failureFields } from '../../models/failure';
 import type { TaskSetModel } from '../../models/TaskSet';
 import type { Platform } from '../../platform';
 
@@ -66,14 +67,14 @@ export function buildChangeTaskSets({ audit, sequelize, models, now }: Platform,
             progress: 0,
             attempts: 0,
             interruption: null,
-            failure: null,
+            ...failureFields(null),
             startedAt: null,
             finishedAt: null,
           },
           { where, transaction },
         );
         await set.update(
-          { state: 'queued', failure: null, startedAt: null, finishedAt: null },
+          { state: 'queued', ...failureFields(null), startedAt: null, finishedAt: null },
           { transaction },
         );
         const record = { kind: 'taskSet', id };

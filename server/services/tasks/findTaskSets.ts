@@ -22,10 +22,11 @@ export interface CountedTaskSet {
 
 /** Sets by id, study or firm, with who asked for them; their tasks and results. */
 export function buildFindTaskSets({ models, sequelize }: Platform) {
-  const { Run, Task, TaskSet, User } = models;
+  const { Run, Study, Task, TaskSet, User } = models;
   const include = [
     { model: User, as: 'requester', attributes: ['id', 'name'] },
     { model: Run, as: 'run', attributes: ['id', 'number'] },
+    { model: Study, as: 'study', attributes: ['id', 'unitSystem'] },
   ];
 
   async function counted(sets: TaskSetModel[]): Promise<CountedTaskSet[]> {

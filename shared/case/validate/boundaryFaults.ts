@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
 import { checkReservoir } from './reservoirFaults';
@@ -30,7 +31,7 @@ export function checkDownstream(faults: Faults, value: unknown): void {
     if (value.slope <= 0 || value.slope > 1) {
       faults.add(
         'downstream.slope',
-        `is ${value.slope}; the slope of normal depth lies above 0 and up to 1 (m fall a m length)`,
+        `is ${value.slope}; the slope of normal depth lies above 0 and up to 1 (fall over length)`,
       );
     }
   } else if (kind === 'stage') {
@@ -58,17 +59,17 @@ export function checkLaterals(faults: Faults, value: unknown, ends: ReachEnds): 
     const places = (['from', 'to'] as const).filter((key) => {
       if (!(key in lateral)) return false;
       const at = lateral[key];
-      if (!faults.number(join(path, key), at, 'a chainage in m')) return false;
+      if (!faults.number(join(path, key), at, 'a chainage', 'chainage')) return false;
       if (!ends || (at >= ends[0] && at <= ends[1])) return true;
       return faults.add(
         join(path, key),
-        `chainage ${at} m lies outside the reach, ${ends[0]} m to ${ends[1]} m`,
+        say`chainage ${typed(at, 'chainage')} lies outside the reach, ${typed(ends[0], 'chainage')} to ${typed(ends[1], 'chainage')}`,
       );
     });
     if (places.length === 2 && (lateral.from as number) > (lateral.to as number)) {
       faults.add(
         path,
-        `from ${String(lateral.from)} m lies below to ${String(lateral.to)} m; swap them`,
+        say`from ${typed(lateral.from as number, 'chainage')} lies below to ${typed(lateral.to as number, 'chainage')}; swap them`,
       );
     }
   });

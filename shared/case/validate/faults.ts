@@ -1,15 +1,21 @@
+import type { Fault } from '../../errors';
+import { asSaid, say, sayIn, unitOf, type Said } from '../../units/message';
+import type { Quantity, UnitSystem } from '../../units/units';
 /** One fault of a case: where in the document, what is wrong and how to mend it. */
-export interface CaseFault {
+export interface CaseFault extends Said {
   path: string;
-  message: string;
 }
+
+/** The faults as a study in these units reads them. */
+export const faultsIn = (system: UnitSystem, faults: readonly CaseFault[]): Fault[] =>
+  faults.map(({ path, ...said }) => ({ path, message: sayIn(system, said) }));
 
 /** Collects the faults of a document; each check tells whether what it looked at can be used further. */
 export class Faults {
   readonly list: CaseFault[] = [];
 
-  add(path: string, message: string): false {
-    this.list.push({ path, message });
+  add(path: string, words: string | Said): false {
+    this.list.push({ path, ...asSaid(words) });
     return false;
   }
 
@@ -46,9 +52,11 @@ export class Faults {
     return true;
   }
 
-  number(path: string, value: unknown, what: string): value is number {
+  /** A finite number; `what` as in "a width", in the unit of the quantity where it has one. */
+  number(path: string, value: unknown, what: string, unit?: Quantity): value is number {
     if (typeof value === 'number' && Number.isFinite(value)) return true;
-    return this.add(path, `must be ${what} as a finite number, not ${kindOf(value)}`);
+    const inUnit = unit ? [' in ', unitOf(unit)] : '';
+    return this.add(path, say`must be ${what}${inUnit} as a finite number, not ${kindOf(value)}`);
   }
 
   text(path: string, value: unknown, most: number): value is string {

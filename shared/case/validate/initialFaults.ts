@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import type { ReachEnds } from './boundaryFaults';
 import type { Faults } from './faults';
 import { checkSeries } from './seriesFaults';
@@ -21,7 +22,7 @@ export function checkInitial(
     }
   }
   if (kind === 'still' && faults.record(path, value, ['kind', 'stage']) && 'stage' in value) {
-    faults.number('initial.stage', value.stage, 'a stage in m');
+    faults.number('initial.stage', value.stage, 'a stage', 'elevation');
   }
   if (kind === 'profile') {
     if (!faults.record(path, value, ['kind', 'chainages', 'stages', 'flows'])) return;
@@ -32,18 +33,18 @@ export function checkInitial(
     if (!faults.record(path, value, required)) return;
     if (
       'chainage' in value &&
-      faults.number('initial.chainage', value.chainage, 'a chainage in m')
+      faults.number('initial.chainage', value.chainage, 'a chainage', 'chainage')
     ) {
       if (ends && (value.chainage < ends[0] || value.chainage > ends[1])) {
         faults.add(
           'initial.chainage',
-          `the dam at ${value.chainage} m lies outside the reach, ${ends[0]} m to ${ends[1]} m`,
+          say`the dam at ${typed(value.chainage, 'chainage')} lies outside the reach, ${typed(ends[0], 'chainage')} to ${typed(ends[1], 'chainage')}`,
         );
       }
     }
     for (const key of ['stageAbove', 'stageBelow']) {
       if (key in value && value[key] !== null) {
-        faults.number(`initial.${key}`, value[key], 'a stage in m, or null for dry');
+        faults.number(`initial.${key}`, value[key], 'a stage or null for dry,', 'elevation');
       }
     }
   }

@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import type { Faults } from './faults';
 
 /** Largest elevation, offset or chainage (m, either sign) that can be meant. */
@@ -10,7 +11,7 @@ export function checkMetres(
   value: unknown,
   what: string,
 ): value is number {
-  if (!faults.number(path, value, `${what} in m`)) return false;
+  if (!faults.number(path, value, what, 'length')) return false;
   if (Math.abs(value) <= FARTHEST) return true;
-  return faults.add(path, `${value} m is out of range; check the unit`);
+  return faults.add(path, say`${typed(value, 'length')} is out of range; check the unit`);
 }

@@ -1,3 +1,5 @@
+import { q, say, typed } from '../../units/message';
+import type { Quantity } from '../../units/units';
 import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
 import { kindOf, type Faults } from './faults';
@@ -12,22 +14,25 @@ export function checkNumerics(
   const required = ['cellSize', 'duration', 'outputInterval'];
   if (!faults.record(path, value, required, ['order', 'courant', 'dryDepth', 'momentum'])) return;
 
-  const positive = (key: string, what: string): number | null => {
-    if (!(key in value) || !faults.number(`numerics.${key}`, value[key], what)) return null;
+  const positive = (key: string, what: string, unit?: Quantity): number | null => {
+    if (!(key in value) || !faults.number(`numerics.${key}`, value[key], what, unit)) return null;
     const given = value[key] as number;
     if (given > 0) return given;
-    faults.add(`numerics.${key}`, `is ${given}; ${what} must be above 0`);
+    faults.add(
+      `numerics.${key}`,
+      say`is ${unit ? typed(given, unit) : given}; ${what} must be above 0`,
+    );
     return null;
   };
-  const cellSize = positive('cellSize', 'a cell size in m');
+  const cellSize = positive('cellSize', 'a cell size', 'length');
   const duration = positive('duration', 'a duration in s');
   const interval = positive('outputInterval', 'an output interval in s');
 
   if (cellSize !== null && ends && (ends[1] - ends[0]) / cellSize > CASE_LIMITS.cells + 0.5) {
-    const smallest = ((ends[1] - ends[0]) / CASE_LIMITS.cells).toPrecision(3);
+    const smallest = (ends[1] - ends[0]) / CASE_LIMITS.cells;
     faults.add(
       'numerics.cellSize',
-      `${cellSize} m makes more than ${CASE_LIMITS.cells} cells; use at least ${smallest} m`,
+      say`${typed(cellSize, 'length')} makes more than ${CASE_LIMITS.cells} cells; use at least ${q(smallest, 'length', { figures: 3 })}`,
     );
   }
   if (duration !== null && duration > CASE_LIMITS.duration) {
@@ -63,12 +68,12 @@ export function checkNumerics(
   }
   if (
     value.dryDepth !== undefined &&
-    faults.number('numerics.dryDepth', value.dryDepth, 'a depth in m')
+    faults.number('numerics.dryDepth', value.dryDepth, 'a depth', 'depth')
   ) {
     if (value.dryDepth <= 0 || value.dryDepth > 0.1) {
       faults.add(
         'numerics.dryDepth',
-        `is ${value.dryDepth} m; it must lie above 0 and up to 0.1 m`,
+        say`is ${typed(value.dryDepth, 'depth')}; it must lie above 0 and up to ${typed(0.1, 'depth')}`,
       );
     }
   }

@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import { join, type Faults } from './faults';
 import { checkSeries } from './seriesFaults';
 
@@ -16,11 +17,14 @@ export function checkReservoir(faults: Faults, path: string, value: unknown): vo
   if ('initialStage' in value) {
     const at = join(path, 'initialStage');
     if (
-      faults.number(at, initialStage, 'a stage in m') &&
+      faults.number(at, initialStage, 'a stage', 'elevation') &&
       Array.isArray(stages) &&
       (initialStage < stages[0] || initialStage > stages[stages.length - 1])
     ) {
-      faults.add(at, `${initialStage} m lies outside the stages of the storage table; extend it`);
+      faults.add(
+        at,
+        say`${typed(initialStage, 'elevation')} lies outside the stages of the storage table; extend it`,
+      );
     }
   }
   if ('inflow' in value && faults.record(join(path, 'inflow'), inflow, ['times', 'flows'])) {

@@ -1,3 +1,4 @@
+import { say, typed, unitOf } from '../../units/message';
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
 import { checkMetres } from './metres';
@@ -26,8 +27,7 @@ export function checkSections(faults: Faults, value: unknown): void {
       if (before && chainage <= before.chainage) {
         faults.add(
           join(path, 'chainage'),
-          `is ${chainage} m, not beyond the ${before.chainage} m of sections[${before.index}]; ` +
-            'order the sections downstream, each at a chainage of its own',
+          say`is ${typed(chainage, 'chainage')}, not beyond the ${typed(before.chainage, 'chainage')} of sections[${before.index}]; order the sections downstream, each at a chainage of its own`,
         );
       }
       before = { chainage, index };
@@ -68,7 +68,7 @@ function checkPoints(faults: Faults, path: string, value: unknown): [number, num
   value.forEach((point, k) => {
     const at = `${path}[${k}]`;
     if (!isPair(point)) {
-      faults.add(at, 'must be [offset, elevation], two numbers in m');
+      faults.add(at, say`must be [offset, elevation], two numbers in ${unitOf('length')}`);
       return;
     }
     const fine =
@@ -79,8 +79,7 @@ function checkPoints(faults: Faults, path: string, value: unknown): [number, num
     if (before && (point[0] as number) < before[0]) {
       faults.add(
         at,
-        `its offset ${String(point[0])} m lies left of the ${before[0]} m before it; ` +
-          'order the points from left to right',
+        say`its offset ${typed(point[0] as number, 'length')} lies left of the ${typed(before[0], 'length')} before it; order the points from left to right`,
       );
     }
     points.push([point[0] as number, point[1] as number]);
@@ -132,19 +131,19 @@ function checkRoughness(faults: Faults, path: string, value: unknown, ends: Ends
     if (before !== null && offset <= before) {
       faults.add(
         `${at}[0]`,
-        `offset ${offset} m does not lie right of the ${before} m before it; order the zones`,
+        say`offset ${typed(offset, 'length')} does not lie right of the ${typed(before, 'length')} before it; order the zones`,
       );
     }
     if (k === 0 && ends && offset > ends[0]) {
       faults.add(
         `${at}[0]`,
-        `the first zone begins at ${offset} m, right of the first point at ${ends[0]} m; begin it there`,
+        say`the first zone begins at ${typed(offset, 'length')}, right of the first point at ${typed(ends[0], 'length')}; begin it there`,
       );
     }
     if (ends && offset > ends[1]) {
       faults.add(
         `${at}[0]`,
-        `offset ${offset} m lies right of the last point at ${ends[1]} m; remove the zone`,
+        say`offset ${typed(offset, 'length')} lies right of the last point at ${typed(ends[1], 'length')}; remove the zone`,
       );
     }
     before = offset;
@@ -153,7 +152,10 @@ function checkRoughness(faults: Faults, path: string, value: unknown, ends: Ends
 
 function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): Ends {
   if (!isPair(value)) {
-    faults.add(path, 'must be [left bank offset, right bank offset], two numbers in m');
+    faults.add(
+      path,
+      say`must be [left bank offset, right bank offset], two numbers in ${unitOf('length')}`,
+    );
     return null;
   }
   const fine =
@@ -164,13 +166,13 @@ function checkBanks(faults: Faults, path: string, value: unknown, ends: Ends): E
   if (left >= right) {
     faults.add(
       path,
-      `the left bank at ${left} m does not lie left of the right bank at ${right} m; swap or mend them`,
+      say`the left bank at ${typed(left, 'length')} does not lie left of the right bank at ${typed(right, 'length')}; swap or mend them`,
     );
   }
   if (ends && (left < ends[0] || right > ends[1])) {
     faults.add(
       path,
-      `the banks at ${left} m and ${right} m must lie within the section, ${ends[0]} m to ${ends[1]} m`,
+      say`the banks at ${typed(left, 'length')} and ${typed(right, 'length')} must lie within the section, ${typed(ends[0], 'length')} to ${typed(ends[1], 'length')}`,
     );
   }
   return [left, right];

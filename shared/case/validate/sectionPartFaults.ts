@@ -1,3 +1,4 @@
+import { q, say, typed } from '../../units/message';
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
 import { checkMetres } from './metres';
@@ -36,7 +37,7 @@ export function checkEmbankments(
     if (offset < first || offset > last) {
       faults.add(
         join(at, 'offset'),
-        `${offset} m lies outside the section, ${first} m to ${last} m; move the embankment into it`,
+        say`${typed(offset, 'length')} lies outside the section, ${typed(first, 'length')} to ${typed(last, 'length')}; move the embankment into it`,
       );
       continue;
     }
@@ -44,14 +45,13 @@ export function checkEmbankments(
     if (crest < ground - SURVEY_ROUNDING) {
       faults.add(
         join(at, 'crest'),
-        `${crest} m lies below the ground at its offset, ${ground.toFixed(2)} m; give the top of the embankment`,
+        say`${typed(crest, 'elevation')} lies below the ground at its offset, ${q(ground, 'elevation')}; give the top of the embankment`,
       );
     }
     if (banks && (side === 'left' ? offset > banks[0] : offset < banks[1])) {
       faults.add(
         join(at, 'offset'),
-        `${offset} m lies between the bank marks, ${banks[0]} m to ${banks[1]} m; ` +
-          `an embankment stands on the ${side} bank or outside it`,
+        say`${typed(offset, 'length')} lies between the bank marks, ${typed(banks[0], 'length')} to ${typed(banks[1], 'length')}; an embankment stands on the ${side} bank or outside it`,
       );
     }
     found[side] = { offset, crest };
@@ -61,7 +61,7 @@ export function checkEmbankments(
   if (left && right && left.offset >= right.offset) {
     faults.add(
       path,
-      `the left embankment at ${left.offset} m does not lie left of the right one at ${right.offset} m; swap or mend them`,
+      say`the left embankment at ${typed(left.offset, 'length')} does not lie left of the right one at ${typed(right.offset, 'length')}; swap or mend them`,
     );
     return;
   }
@@ -71,7 +71,7 @@ export function checkEmbankments(
     if (one.crest > bed) continue;
     faults.add(
       join(join(path, side), 'crest'),
-      `${one.crest} m does not stand above the bed of the channel, ${bed.toFixed(2)} m; mend it`,
+      say`${typed(one.crest, 'elevation')} does not stand above the bed of the channel, ${q(bed, 'elevation')}; mend it`,
     );
   }
 }
@@ -96,7 +96,10 @@ export function checkStorage(
     const from = part.from as number;
     const to = part.to as number;
     if (from >= to) {
-      faults.add(at, `from ${from} m does not lie left of to ${to} m; swap or mend them`);
+      faults.add(
+        at,
+        say`from ${typed(from, 'length')} does not lie left of to ${typed(to, 'length')}; swap or mend them`,
+      );
       return;
     }
     const first = points?.[0][0] ?? -Infinity;
@@ -104,15 +107,14 @@ export function checkStorage(
     if (from < first || to > last) {
       faults.add(
         at,
-        `${from} m to ${to} m reaches beyond the section, ${first} m to ${last} m; end it there`,
+        say`${typed(from, 'length')} to ${typed(to, 'length')} reaches beyond the section, ${typed(first, 'length')} to ${typed(last, 'length')}; end it there`,
       );
     }
     const before = parts[parts.length - 1];
     if (before && from < before[1]) {
       faults.add(
         at,
-        `begins at ${from} m, before the end of the part before it at ${before[1]} m; ` +
-          'order the parts from left to right and let none overlap',
+        say`begins at ${typed(from, 'length')}, before the end of the part before it at ${typed(before[1], 'length')}; order the parts from left to right and let none overlap`,
       );
     }
     parts.push([from, to]);

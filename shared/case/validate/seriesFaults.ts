@@ -1,3 +1,5 @@
+import { say, typed, type SaidQuantity } from '../../units/message';
+import type { Quantity } from '../../units/units';
 import { CASE_LIMITS } from '../caseLimits';
 import { join, type Faults } from './faults';
 
@@ -16,16 +18,22 @@ export interface SeriesRule {
   least?: number;
 }
 
-const UNITS: Record<string, string> = {
-  times: 's',
-  chainages: 'm',
-  stages: 'm',
-  flows: 'm³/s',
-  volumes: 'm³',
-  openings: 'm',
-  depths: 'm',
-  factors: '',
+/** Times are in seconds everywhere; factors have no unit. */
+const QUANTITIES: Record<string, Quantity | undefined> = {
+  chainages: 'chainage',
+  stages: 'elevation',
+  flows: 'flow',
+  volumes: 'volume',
+  openings: 'depth',
+  depths: 'depth',
 };
+
+/** A value of the list as it was given, with its unit. */
+function amount(value: number, key: string): SaidQuantity | string {
+  const quantity = QUANTITIES[key];
+  if (quantity) return typed(value, quantity);
+  return key === 'times' ? `${value} s` : String(value);
+}
 
 /** Parallel lists of places and values in the record at `path`. */
 export function checkSeries(
@@ -39,15 +47,14 @@ export function checkSeries(
     if (rule.notNegative?.includes(rule.at) && places[0] < 0) {
       faults.add(
         `${join(path, rule.at)}[0]`,
-        `is ${places[0]} ${UNITS[rule.at]}; it cannot be negative`,
+        say`is ${amount(places[0], rule.at)}; it cannot be negative`,
       );
     }
     for (let k = 1; k < places.length; k++) {
       if (places[k] > places[k - 1]) continue;
       faults.add(
         `${join(path, rule.at)}[${k}]`,
-        `${places[k]} ${UNITS[rule.at]} is not beyond the ${places[k - 1]} ${UNITS[rule.at]} before it; ` +
-          'order the entries, one value at each',
+        say`${amount(places[k], rule.at)} is not beyond the ${amount(places[k - 1], rule.at)} before it; order the entries, one value at each`,
       );
     }
   }
@@ -63,13 +70,13 @@ export function checkSeries(
     values.forEach((value, k) => {
       const at = `${join(path, key)}[${k}]`;
       if (rule.notNegative?.includes(key) && value < 0) {
-        faults.add(at, `is ${value} ${UNITS[key]}; it cannot be negative`);
+        faults.add(at, say`is ${amount(value, key)}; it cannot be negative`);
       }
       if (rule.rising?.includes(key) && k > 0 && value <= values[k - 1]) {
-        faults.add(at, `is ${value} ${UNITS[key]}, not above the value before it; it must rise`);
+        faults.add(at, say`is ${amount(value, key)}, not above the value before it; it must rise`);
       }
       if (rule.notFalling?.includes(key) && k > 0 && value < values[k - 1]) {
-        faults.add(at, `is ${value} ${UNITS[key]}, below the value before it; it must not fall`);
+        faults.add(at, say`is ${amount(value, key)}, below the value before it; it must not fall`);
       }
     });
   }
@@ -91,7 +98,8 @@ function numbers(
       !faults.number(
         `${path}[${k}]`,
         entry,
-        UNITS[what] ? `one of the ${what} in ${UNITS[what]}` : `one of the ${what}`,
+        `one of the ${what}${what === 'times' ? ' in s' : ''}`,
+        QUANTITIES[what],
       )
     )
       fine = false;

@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
 import { join, type Faults } from './faults';
@@ -73,17 +74,17 @@ function checkStretch(
   const places = (['from', 'to'] as const).filter((key) => {
     if (!(key in entry)) return false;
     const at = entry[key];
-    if (!faults.number(join(path, key), at, 'a chainage in m')) return false;
+    if (!faults.number(join(path, key), at, 'a chainage', 'chainage')) return false;
     if (!ends || (at >= ends[0] && at <= ends[1])) return true;
     return faults.add(
       join(path, key),
-      `chainage ${at} m lies outside the reach, ${ends[0]} m to ${ends[1]} m`,
+      say`chainage ${typed(at, 'chainage')} lies outside the reach, ${typed(ends[0], 'chainage')} to ${typed(ends[1], 'chainage')}`,
     );
   });
   if (places.length === 2 && (entry.from as number) >= (entry.to as number)) {
     faults.add(
       path,
-      `from ${String(entry.from)} m does not lie above to ${String(entry.to)} m; swap or mend them`,
+      say`from ${typed(entry.from as number, 'chainage')} does not lie above to ${typed(entry.to as number, 'chainage')}; swap or mend them`,
     );
   }
 }

@@ -1,3 +1,4 @@
+import { say, typed } from '../../units/message';
 import { CASE_LIMITS } from '../caseLimits';
 import type { ReachEnds } from './boundaryFaults';
 import { join, type Faults } from './faults';
@@ -45,15 +46,18 @@ export function checkStructures(
       } else ids.set(id, k);
     }
     const at = join(path, 'chainage');
-    if (!('chainage' in structure) || !faults.number(at, chainage, 'a chainage in m') || !ends)
+    if (
+      !('chainage' in structure) ||
+      !faults.number(at, chainage, 'a chainage', 'chainage') ||
+      !ends
+    )
       return;
     if (hasReservoir && chainage === ends[0]) return;
     inside++;
     if (chainage > ends[0] && chainage < ends[1]) return;
     faults.add(
       at,
-      `${chainage} m does not lie between the ends of the reach, ${ends[0]} m and ${ends[1]} m` +
-        (chainage === ends[0] ? '; at the head only a reservoir can have structures' : ''),
+      say`${typed(chainage, 'chainage')} does not lie between the ends of the reach, ${typed(ends[0], 'chainage')} and ${typed(ends[1], 'chainage')}${chainage === ends[0] ? '; at the head only a reservoir can have structures' : ''}`,
     );
   });
   const cellSize = isRecord(numerics) ? numerics.cellSize : null;

@@ -1,6 +1,7 @@
 import { Faults } from '../../case/validate/faults';
 import { checkEmbankments, checkStorage } from '../../case/validate/sectionPartFaults';
 import type { Section } from '../../surveys/types';
+import { partsOf, say } from '../../units/message';
 import type { Findings } from './Findings';
 
 /** Sections that can be routed: two or more, each with roughness everywhere and banks within. */
@@ -24,8 +25,8 @@ function checkParts({ id, points, banks, storage, embankments }: Section, findin
   const ground = { points, banks };
   if (storage) checkStorage(faults, 'storage', storage, ground, embankments);
   if (embankments) checkEmbankments(faults, 'embankments', embankments, ground);
-  for (const { path, message } of faults.list)
-    findings.fault('reachId', `Section ${id}, ${path}: ${message}. Mend it under Reach.`);
+  for (const { path, ...said } of faults.list)
+    findings.fault('reachId', say`Section ${id}, ${path}: ${partsOf(said)}. Mend it under Reach.`);
 }
 
 function named(sections: readonly Section[]): string {

@@ -13,7 +13,7 @@ import { checkBridge } from './structures/checkBridge';
 import { checkCulvert } from './structures/checkCulvert';
 import { checkSluice } from './structures/checkSluice';
 import { checkWeir } from './structures/checkWeir';
-import { q, say } from '../../units/message';
+import { partsOf, q, say } from '../../units/message';
 
 /** A crest shorter than this share of the section is worth a second look: water cannot pass beside it. */
 const SHORT = 0.5;
@@ -116,7 +116,8 @@ function checkAsCase(
   );
   const faults = new Faults();
   checkCaseStructures(faults, { structures: built, upstream, numerics }, [reach.first, reach.last]);
-  for (const { path, message } of faults.list) findings.fault(formPath(path), `It ${message}.`);
+  for (const { path, ...said } of faults.list)
+    findings.fault(formPath(path), say`It ${partsOf(said)}.`);
 }
 
 /** `structures[0].crest[2][1]` of the case is `structures[0].levels[2]` of the form. */

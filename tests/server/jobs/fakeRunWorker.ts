@@ -1,6 +1,7 @@
 import { parentPort, workerData } from 'node:worker_threads';
 import { gunzipSync, gzipSync } from 'node:zlib';
 import type { EncodedBlock } from '../../../server/results/blocks/blockTypes';
+import { RunFailed } from '../../../server/solvers/runErrors';
 import type { RunWorkerData, WorkerMessage } from '../../../server/jobs/workerMessages';
 
 /** What a stand-in for a run does; it travels where the frozen case would. */
@@ -35,7 +36,7 @@ if (stopped()) {
   const blocks = does === 'routesTwice' ? [block, block] : [block];
   post({ type: 'routed', blocks, solver: '1.0.0', peakStage: 4, peakFlow: 5, inflow: null });
 } else if (does === 'fails') {
-  post({ type: 'failed', reason: 'The run failed at chainage 10.0 m at 5.0 s: too steep.' });
+  post({ type: 'failed', reason: new RunFailed('too steep.', 5, 10).said });
 } else if (does === 'throws') {
   throw new Error('a fault in the program');
 } else if (does === 'eatsMemory') {

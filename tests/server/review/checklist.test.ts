@@ -1,5 +1,7 @@
 import type { CaseFile } from '../../../shared/case/caseFile';
+import { q, say } from '../../../shared/units/message';
 import { changeOutlet, describeOutletChange } from '../../../server/services/review/changeOutlet';
+import type { UnitSystem } from '../../../shared/units/units';
 import { checklistItems } from '../../../server/services/review/checklist/items';
 import type { ChecklistFacts } from '../../../server/services/review/checklist/types';
 import { sampleBlocks } from '../results/sampleRun';
@@ -28,8 +30,8 @@ beforeAll(async () => {
   };
 });
 
-const item = (id: string, change: Partial<ChecklistFacts> = {}) =>
-  checklistItems({ ...facts, ...change }).find((found) => found.id === id)!;
+const item = (id: string, change: Partial<ChecklistFacts> = {}, system: UnitSystem = 'metric') =>
+  checklistItems({ ...facts, ...change }, system).find((found) => found.id === id)!;
 
 test.each([
   [0.0009, 'good'],
@@ -54,7 +56,7 @@ test('the supercritical length is half the way to each neighbour', () => {
   const sections = [a, { ...b, peakFroude: 1.2 }, c];
   // Sections at 0, 1000 and 2500 m: 500 m above and 750 m below the middle one.
   expect(item('supercritical', { sections })).toMatchObject({ outcome: 'look' });
-  expect(item('supercritical', { sections }).finding).toContain('1250 m');
+  expect(item('supercritical', { sections }).finding).toContain('1,250 m');
 });
 
 test('sections that fall dry, that are overtopped, and roughness that no table knows', () => {
@@ -75,7 +77,7 @@ test('the outlet is judged by the place that moves most', () => {
   const probe = (there: number): ChecklistFacts['probe'] => ({
     runNumber: 2,
     state: 'routed',
-    change: 'half of the slope at the outlet',
+    change: describeOutletChange({ kind: 'stage', times: [0], stages: [50] })!,
     peaks: [
       { name: 'Mill', here: 52.5, there: 52.501 },
       { name: 'Bridge', here: 52, there },
@@ -86,7 +88,13 @@ test('the outlet is judged by the place that moves most', () => {
   expect(item('outletInfluence', { probe: probe(51.95) }).outcome).toBe('look');
   const far = item('outletInfluence', { probe: probe(52.2) });
   expect(far.outcome).toBe('bad');
+  expect(far.finding).toContain('the stage at the outlet 0.50 m higher moves');
   expect(far.finding).toContain('0.200 m, at Bridge');
+  // 0.5 m are 1.640 ft, 0.2 m are 0.656 ft, 0.02 m are 0.066 ft: 1 ft is 0.3048 m exactly (NIST SP 811, app. B.8).
+  const inFeet = item('outletInfluence', { probe: probe(52.2) }, 'usCustomary');
+  expect(inFeet.finding).toContain('the stage at the outlet 1.64 ft higher moves');
+  expect(inFeet.finding).toContain('0.656 ft, at Bridge');
+  expect(inFeet.rule).toContain('below 0.07 ft is good');
   expect(item('outletInfluence', { probe: { ...probe(52)!, state: 'running' } }).outcome).toBe(
     'asked',
   );
@@ -203,7 +211,35 @@ test('a run against observed marks says how far off it is; without any it is ask
   expect(item('calibration', { observed })).toMatchObject({
     outcome: 'good',
     finding:
-      'Against January 2024: 4 of 5 marks within their tolerance, mean error -0.10 m, root mean square 0.20 m; misfit 0.70 tolerances.',
+      'Against January 2024: 4 of 5 marks within their tolerance, mean error −0.10 m, root mean square 0.20 m; misfit 0.70 tolerances.',
   });
   expect(item('calibration', { observed: { ...observed, misfit: 1.2 } }).outcome).toBe('look');
+});
+
+test('no item of a study in feet speaks of metres, whatever it finds', () => {
+  const run = {
+    ...facts.run,
+    warnings: [
+      {
+        code: 'initialDry' as const,
+        ...say`Rose by ${q(0.42, 'depth')}.`,
+        chainage: null,
+        time: null,
+      },
+    ],
+  };
+  const sections = facts.sections.map((section) => ({
+    ...section,
+    peakFroude: 1.2,
+    lowerEnd: 52,
+  }));
+  const grids = [1, 2, 4].map((k) => ({
+    runNumber: k,
+    cellSize: 25 * k,
+    peaks: [{ name: 'Mill', stage: 52.5 + 0.1 * k }],
+  }));
+  const items = checklistItems({ ...facts, run, sections, grids }, 'usCustomary');
+  const words = items.map(({ finding, rule }) => `${finding} ${rule}`).join('\n');
+  expect(words).toContain('Rose by 1.38 ft.');
+  expect(words).not.toMatch(/\d\s?(m|km|m³|m³\/s|m\/s)(?![\w³²/])|metre/);
 });

@@ -1,5 +1,13 @@
 import { arrivalRule } from '../../../shared/runs/arrivalRule';
-import { partsOf, q, say, sayAll, sayIn } from '../../../shared/units/message';
+import type { CaseFile } from '../../../shared/case/caseFile';
+import { checkLaterals } from '../../../shared/case/validate/boundaryFaults';
+import { Faults, faultsIn } from '../../../shared/case/validate/faults';
+import { checkReservoir } from '../../../shared/case/validate/reservoirFaults';
+import { memberLabel } from '../../../shared/confidence/memberLabel';
+import { PLANS } from '../../../shared/confidence/planMembers';
+import type { SensitivitySettings } from '../../../shared/confidence/schemas';
+import { partsOf, q, say, sayAll, sayIn, typed, unitOf } from '../../../shared/units/message';
+import { RunFailed } from '../../../server/solvers/runErrors';
 
 // 1 ft is 0.3048 m exactly (NIST SP 811, app. B.8): 3.048 m are 10 ft, 28.316846592 m³ are 1000 ft³.
 const rises = say`The bed rises ${q(3.048, 'depth')} over ${q(1234.44, 'chainage')} in ${3} places.`;
@@ -40,4 +48,60 @@ test('the arrival rule of a run of any age is told in feet', () => {
   const rule = arrivalRule({ text: 'As it was stored, 0.1 m.', rise: 0.1, depth: 0.1 });
   expect(sayIn('metric', rule)).toBe('As it was stored, 0.1 m.');
   expect(sayIn('usCustomary', rule)).toMatch(/is 0\.33 ft above .* water is 0\.33 ft deep/);
+});
+
+test('what was typed comes back with all its digits, and nothing of the way through metres', () => {
+  // 12.345 ft are 3.762756 m: 1 ft is 0.3048 m exactly (NIST SP 811, app. B.8).
+  const fault = say`is ${typed(3.762756, 'length')}; a width in ${unitOf('length')}, ${typed(1000, 'chainage')}`;
+  expect(fault.message).toBe('is 3.762756 m; a width in m, 1000 m');
+  expect(sayIn('usCustomary', fault)).toBe('is 12.345 ft; a width in ft, 3280.8399 ft');
+});
+
+test('why a run failed is told in feet', () => {
+  const { message, said } = new RunFailed(say`Rose ${q(3.048, 'depth')}.`, 5, 30.48);
+  expect(message).toBe('The run failed at chainage 30.5 m at 5.0 s: Rose 3.05 m.');
+  expect(sayIn('usCustomary', said)).toBe(
+    'The run failed at chainage 100.0 ft at 5.0 s: Rose 10.00 ft.',
+  );
+});
+
+test('faults of a case file and of the parts of a section are told in feet', () => {
+  const faults = new Faults();
+  checkLaterals(faults, [{ from: 914.4, to: 10, times: [0], flows: [1] }], [0, 304.8]);
+  checkReservoir(faults, 'upstream', {
+    kind: 'reservoir',
+    stages: [3.048, 6.096],
+    volumes: [5, -28.316846592],
+    initialStage: 304.8,
+    inflow: { times: [0], flows: ['x'] },
+  });
+  const told = faultsIn('usCustomary', faults.list).map(({ message }) => message);
+  expect(told).toEqual([
+    'chainage 3000 ft lies outside the reach, 0 ft to 1000 ft',
+    'is -1000 ft³; it cannot be negative',
+    'is -1000 ft³, not above the value before it; it must rise',
+    '1000 ft lies outside the stages of the storage table; extend it',
+    'must be one of the flows in ft³/s as a finite number, not the text "x"',
+  ]);
+});
+
+test('a member of a set is named in feet', () => {
+  const settings = {
+    cellSize: null,
+    parameters: [
+      { key: 'roughness', low: 0.8, high: 1.2 },
+      { key: 'outletStage', low: -0.3048, high: 0.3048 },
+    ],
+  };
+  const set = { kind: 'sensitivity', settings };
+  const labels = PLANS.sensitivity(settings as SensitivitySettings, {} as CaseFile).map(
+    ({ label }, position) => memberLabel(set, { position, label }, 'usCustomary'),
+  );
+  expect(labels).toEqual([
+    'Base case',
+    "Manning's n −20 %",
+    "Manning's n +20 %",
+    'Stage at the outlet −1.00 ft',
+    'Stage at the outlet +1.00 ft',
+  ]);
 });

@@ -59,7 +59,7 @@ describe('validation of a case', () => {
       "sections[1].roughness[0][1]: Manning's n is -0.03; it cannot be negative (rivers: 0.02 to 0.15)",
       'sections[2].chainage: is 400 m, not beyond the 500 m of sections[1]; order the sections downstream, each at a chainage of its own',
       'upstream.flows[2]: must be one of the flows in m³/s as a finite number, not the text "x"',
-      'numerics.cellSize: is 0; a cell size in m must be above 0',
+      'numerics.cellSize: is 0 m; a cell size must be above 0',
     ]);
   });
 

@@ -11,6 +11,7 @@ import type {
   SearchResult,
   SearchStretch,
 } from '../../../../shared/calibration/search/types';
+import { SaidError } from '../../../../shared/units/SaidError';
 
 export interface Search {
   observed: ObservedFlood;
@@ -41,11 +42,14 @@ export async function searchRoughness(
   onEvaluation: (done: number) => void,
 ): Promise<SearchResult> {
   const evaluations: Evaluation[] = [];
+  /** Why the last one gave nothing. */
+  let stopped: Error | null = null;
   let best: { factors: number[]; misfit: number; compared: Compared } | null = null;
 
   async function evaluate(factors: number[], purpose: Evaluation['purpose']) {
     let misfit: number | null = null;
     let failure: string | null = null;
+    stopped = null;
     try {
       const compared = await compareFlood(observed, compute(factors), startsAt);
       misfit = compared.misfit;
@@ -53,20 +57,24 @@ export async function searchRoughness(
         best = { factors, misfit, compared };
     } catch (error) {
       if (!isFailure(error)) throw error;
-      failure = (error as Error).message;
+      stopped = error as Error;
+      failure = stopped.message;
     }
     evaluations.push({ number: evaluations.length + 1, purpose, factors, misfit, failure });
     onEvaluation(evaluations.length);
     return misfit;
   }
   const bestSoFar = () => best!;
+  const whyStopped = () => stopped;
 
   const ones = stretches.map(() => 1);
   const [first] = [await evaluate(ones, 'before')];
   if (first === null)
-    throw new Error(
-      evaluations[0].failure ??
+    throw (
+      whyStopped() ??
+      new SaidError(
         'Nothing that was observed can be compared with this run: places off the reach, dry, or times that do not meet.',
+      )
     );
   const before = bestSoFar().compared;
 

@@ -7,6 +7,8 @@ import type {
   PlaceValues,
 } from '../../../../shared/confidence/types';
 import { varyCase } from '../../../../shared/confidence/varyCase';
+import { partsOf, q, say } from '../../../../shared/units/message';
+import { SaidError } from '../../../../shared/units/SaidError';
 import { mergePlaces } from '../../../results/blocks/mergePlaces';
 import { peaksAt } from '../../../results/peaksAt';
 import { routeCase } from '../../../solvers';
@@ -22,8 +24,8 @@ export function computeMember(
   const varied = varyCase(caseFile, variation);
   const { faults } = validateCase(varied);
   if (faults.length > 0) {
-    const { path, message } = faults[0];
-    throw new Error(`The varied case cannot be routed: ${path}: ${message}`);
+    const { path, ...said } = faults[0];
+    throw new SaidError(say`The varied case cannot be routed: ${path}: ${partsOf(said)}`);
   }
   const recorder = series ? recordStations(varied, stations) : null;
   const result = routeCase(varied, {
@@ -63,7 +65,7 @@ function peaksOf(
   const merged = mergePlaces(sections, result);
   return (chainage) => {
     const peaks = peaksAt(merged, null, chainage);
-    if (!peaks) throw new Error(`Chainage ${chainage} m is not on the reach.`);
+    if (!peaks) throw new SaidError(say`Chainage ${q(chainage, 'chainage')} is not on the reach.`);
     const { bed, peakStage, peakFlow, arrival } = peaks;
     return { bed, peakStage, peakFlow, arrival };
   };

@@ -5,7 +5,8 @@ import {
 } from '../../../../shared/breach/regressions';
 import type { CaseFile } from '../../../../shared/case/caseFile';
 import type { BreachInput, ReservoirInput } from '../../../../shared/case/structures';
-import { metres, type ChecklistRule } from './types';
+import { q, say, sayAll, type Said } from '../../../../shared/units/message';
+import type { ChecklistRule } from './types';
 
 const MINUTE = 60;
 const RULE =
@@ -17,7 +18,7 @@ export const breach: ChecklistRule = ({ caseFile }) => {
   if (breaches.length === 0) return null;
   const item = { id: 'breach', title: 'Breach parameters', rule: RULE };
   const compared = breaches.map((dam) => compare(caseFile, dam));
-  const finding = compared.map(({ words }) => words).join(' ');
+  const finding = sayAll(compared.map(({ words }) => words));
   if (compared.some(({ within }) => within === null)) return { ...item, outcome: 'asked', finding };
   return { ...item, outcome: compared.every(({ within }) => within) ? 'good' : 'look', finding };
 };
@@ -26,12 +27,12 @@ export const breach: ChecklistRule = ({ caseFile }) => {
 function compare(
   { upstream }: CaseFile,
   dam: BreachInput,
-): { within: boolean | null; words: string } {
+): { within: boolean | null; words: Said } {
   const inputs = upstream.kind === 'reservoir' ? inputsOf(upstream, dam) : null;
   if (!inputs)
     return {
       within: null,
-      words: `${dam.id}: no storage above the breach is known to the model; say where width and formation time come from.`,
+      words: say`${dam.id}: no storage above the breach is known to the model; say where width and formation time come from.`,
     };
   const width = dam.bottomWidth + dam.sideSlope * inputs.breachHeight;
   const widths = rangeOf('width', inputs);
@@ -44,9 +45,7 @@ function compare(
   const minutes = (seconds: number) => `${Math.round(seconds / MINUTE)} min`;
   return {
     within,
-    words:
-      `${dam.id}: average width ${metres(width, 1)}, regressions ${metres(widths[0], 1)} to ${metres(widths[1], 1)}; ` +
-      `formation in ${minutes(dam.formationTime)}, regressions ${minutes(times[0])} to ${minutes(times[1])}.`,
+    words: say`${dam.id}: average width ${q(width, 'length')}, regressions ${q(widths[0], 'length')} to ${q(widths[1], 'length')}; formation in ${minutes(dam.formationTime)}, regressions ${minutes(times[0])} to ${minutes(times[1])}.`,
   };
 }
 

@@ -1,5 +1,6 @@
 import type { GaugeFit, RunResiduals } from '../../../../shared/calibration/types';
-import { metres, type ChecklistRule } from './types';
+import { partsOf, q, say, sayAll, type Said } from '../../../../shared/units/message';
+import type { ChecklistRule } from './types';
 
 /** Off by the tolerance on average: beyond it the run is worth a look. */
 const GOOD = 1;
@@ -17,28 +18,28 @@ export const calibration: ChecklistRule = ({ observed }) => {
   return {
     ...item,
     outcome: observed.misfit <= GOOD ? 'good' : 'look',
-    finding: `Against ${observed.flood || 'the observed flood'}: ${told(observed).join('; ')}.`,
-    rule: 'Good marks within 0.30 m and gauges within 0.15 m (common practice).',
+    finding: say`Against ${observed.flood || 'the observed flood'}: ${partsOf(sayAll(told(observed), '; '))}.`,
+    rule: say`Good marks within ${q(0.3, 'depth')} and gauges within ${q(0.15, 'depth')} (common practice).`,
   };
 };
 
-function told({ all, gauges, misfit }: RunResiduals): string[] {
+function told({ all, gauges, misfit }: RunResiduals): Said[] {
   return [
     ...(all
       ? [
-          `${all.within} of ${all.count} marks within their tolerance, mean error ${metres(all.mean)}, root mean square ${metres(all.rms)}`,
+          say`${all.within} of ${all.count} marks within their tolerance, mean error ${q(all.mean, 'depth')}, root mean square ${q(all.rms, 'depth')}`,
         ]
       : []),
     ...gauges.flatMap(ofGauge),
-    `misfit ${misfit!.toFixed(2)} tolerances`,
+    say`misfit ${misfit!.toFixed(2)} tolerances`,
   ];
 }
 
-function ofGauge({ name, quantity, figures }: GaugeFit): string[] {
+function ofGauge({ name, quantity, figures }: GaugeFit): Said[] {
   if (!figures) return [];
   const { efficiency, rms } = figures;
-  const off = quantity === 'stage' ? metres(rms) : `${rms.toFixed(1)} m³/s`;
+  const off = q(rms, quantity === 'stage' ? 'depth' : 'flow');
   return [
-    `${quantity} at ${name} off by ${off} root mean square${efficiency === null ? '' : `, efficiency ${efficiency.toFixed(2)}`}`,
+    say`${quantity} at ${name} off by ${off} root mean square${efficiency === null ? '' : `, efficiency ${efficiency.toFixed(2)}`}`,
   ];
 }

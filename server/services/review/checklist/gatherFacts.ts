@@ -67,7 +67,9 @@ export function buildGatherFacts(
     const id = review?.outletProbeRunId ?? null;
     const probe = id === null ? null : await models.Run.findByPk(id);
     if (!probe) return null;
-    const change = describeOutletChange((await caseOf(run)).downstream) ?? 'a changed outlet';
+    const change = describeOutletChange((await caseOf(run)).downstream) ?? {
+      message: 'a changed outlet',
+    };
     const told = { runNumber: probe.number, state: probe.state, change };
     if (probe.state !== 'routed') return { ...told, peaks: [] };
     const there = new Map((await peaksOf(probe)).map(({ name, stage }) => [name, stage]));

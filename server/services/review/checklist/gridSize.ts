@@ -1,5 +1,6 @@
 import { gridConvergence } from '../../../../shared/confidence/gridConvergence';
-import { metres, type ChecklistRule } from './types';
+import { partsOf, q, say, sayAll } from '../../../../shared/units/message';
+import { fine, type ChecklistRule } from './types';
 
 /** m between the finest two grids. */
 const GOOD = 0.05;
@@ -8,17 +9,17 @@ export const gridSize: ChecklistRule = ({ convergence, grids, run }) => {
   const item = {
     id: 'gridSize',
     title: 'Cell size',
-    rule: 'The same case on three cell sizes, with the grid convergence index (Roache 1994; Celik et al. 2008); 0.05 m between the finest two is good (common practice).',
+    rule: say`The same case on three cell sizes, with the grid convergence index (Roache 1994; Celik et al. 2008); ${q(GOOD, 'depth')} between the finest two is good (common practice).`,
   };
   if (convergence) return { ...item, ...ofSet(convergence) };
   if (grids.length < 2)
     return {
       ...item,
       outcome: 'asked',
-      finding: `Routed on cells of ${metres(run.cellSize, 1)} alone. Compute a convergence set of it, or say why these cells are fine enough.`,
+      finding: say`Routed on cells of ${q(run.cellSize, 'length')} alone. Compute a convergence set of it, or say why these cells are fine enough.`,
     };
-  const [fine, medium, coarse] = grids;
-  const pairs = fine.peaks.flatMap(({ name, stage }) => {
+  const [finest, medium, coarse] = grids;
+  const pairs = finest.peaks.flatMap(({ name, stage }) => {
     const other = medium.peaks.find((peak) => peak.name === name);
     return other ? [{ name, fine: stage, medium: other.stage }] : [];
   });
@@ -27,13 +28,13 @@ export const gridSize: ChecklistRule = ({ convergence, grids, run }) => {
     pairs[0],
   );
   const difference = most ? Math.abs(most.fine - most.medium) : 0;
-  const sizes = grids.map(({ cellSize }) => metres(cellSize, 1)).join(', ');
+  const sizes = sizesOf(grids);
   return {
     ...item,
     outcome: difference <= GOOD ? 'good' : 'look',
-    finding:
-      `Cells of ${sizes}: the finest two differ by at most ${metres(difference, 3)}${most ? `, at ${most.name}` : ''}.` +
-      (coarse && most ? orderOf(most.name, [fine, medium, coarse]) : ''),
+    finding: say`Cells of ${sizes}: the finest two differ by at most ${fine(difference)}${most ? `, at ${most.name}` : ''}.${
+      coarse && most ? orderOf(most.name, [finest, medium, coarse]) : ''
+    }`,
   };
 };
 
@@ -41,16 +42,24 @@ export const gridSize: ChecklistRule = ({ convergence, grids, run }) => {
 function ofSet({ name, result }: NonNullable<Parameters<ChecklistRule>[0]['convergence']>) {
   const { along, grids, widest } = result;
   const difference = Math.abs(widest.difference);
-  const sizes = grids.map(({ cellSize }) => (cellSize === null ? 'failed' : metres(cellSize, 1)));
+  const sizes = sizesOf(grids);
   const order =
     along.order === null ? '' : ` Observed order of the peak stage ${along.order.toFixed(1)}.`;
   return {
     outcome: difference <= GOOD ? ('good' as const) : ('look' as const),
-    finding:
-      `${name}: cells of ${sizes.join(', ')}; the finest two differ in peak stage by at most ` +
-      `${metres(difference, 3)}, at chainage ${metres(widest.chainage, 0)}.${order}`,
+    finding: say`${name}: cells of ${sizes}; the finest two differ in peak stage by at most ${fine(difference)}, at chainage ${q(widest.chainage, 'chainage')}.${order}`,
   };
 }
+
+const sizesOf = (grids: readonly { cellSize: number | null }[]) =>
+  partsOf(
+    sayAll(
+      grids.map(({ cellSize }) =>
+        cellSize === null ? { message: 'failed' } : say`${q(cellSize, 'length')}`,
+      ),
+      ', ',
+    ),
+  );
 
 type Grid = Parameters<ChecklistRule>[0]['grids'][number];
 

@@ -1,3 +1,4 @@
+import { sayAll } from '../../../../shared/units/message';
 import type { ChecklistRule } from './types';
 
 const CODES = new Set(['initialNotSettled', 'initialDry', 'damMoved']);
@@ -9,12 +10,12 @@ const KINDS = {
 } as const;
 
 export const initialState: ChecklistRule = ({ caseFile, run }) => {
-  const said = run.warnings.filter(({ code }) => CODES.has(code)).map(({ message }) => message);
+  const said = run.warnings.filter(({ code }) => CODES.has(code));
   return {
     id: 'initialState',
     title: 'Initial state',
     outcome: said.length === 0 ? 'good' : 'look',
-    finding: [KINDS[caseFile.initial.kind], ...said].join(' '),
+    finding: sayAll([{ message: KINDS[caseFile.initial.kind] }, ...said]),
     rule: 'The state at the start is settled, or its settling is over before the flood comes (common practice).',
   };
 };

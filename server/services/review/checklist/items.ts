@@ -1,3 +1,6 @@
+import type { ChecklistItem } from '../../../../shared/review/types';
+import { asSaid, sayIn } from '../../../../shared/units/message';
+import type { UnitSystem } from '../../../../shared/units/units';
 import { breach } from './breach';
 import { calibration } from './calibration';
 import { dryCells } from './dryCells';
@@ -11,7 +14,7 @@ import { suddenFailure } from './suddenFailure';
 import { supercritical } from './supercritical';
 import { surveyAdvice } from './surveyAdvice';
 import { timeStep } from './timeStep';
-import type { ChecklistFacts, ChecklistRule, FoundItem } from './types';
+import type { ChecklistFacts, ChecklistRule } from './types';
 import { volumeBalance } from './volumeBalance';
 import { warnings } from './warnings';
 
@@ -34,5 +37,13 @@ const RULES: ChecklistRule[] = [
   ...QUESTIONS,
 ];
 
-export const checklistItems = (facts: ChecklistFacts): FoundItem[] =>
-  RULES.flatMap((rule) => rule(facts) ?? []);
+/** The items with their words in these units. */
+export const checklistItems = (
+  facts: ChecklistFacts,
+  system: UnitSystem,
+): Omit<ChecklistItem, 'answer'>[] =>
+  RULES.flatMap((rule) => rule(facts) ?? []).map(({ finding, rule, ...item }) => ({
+    ...item,
+    finding: sayIn(system, asSaid(finding)),
+    rule: sayIn(system, asSaid(rule)),
+  }));

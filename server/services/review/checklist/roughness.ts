@@ -5,7 +5,7 @@ export const roughness: ChecklistRule = ({ caseFile }) => {
   const values = caseFile.sections.flatMap((section) => section.roughness.map(([, n]) => n));
   const { min, max } = ROUGHNESS_RANGE;
   const outside = values.filter((n) => n < min || n > max).length;
-  const range = `Manning's n from ${Math.min(...values)} to ${Math.max(...values)} s/m^(1/3)`;
+  const range = `Manning's n from ${Math.min(...values)} to ${Math.max(...values)}`;
   return {
     id: 'roughness',
     title: 'Roughness',

@@ -1,4 +1,5 @@
-import { metres, type ChecklistRule } from './types';
+import { q, say } from '../../../../shared/units/message';
+import type { ChecklistRule } from './types';
 
 export const sectionEnds: ChecklistRule = ({ sections }) => {
   const over = sections.filter(({ peakStage, lowerEnd }) => peakStage > lowerEnd);
@@ -13,7 +14,7 @@ export const sectionEnds: ChecklistRule = ({ sections }) => {
     finding:
       over.length === 0
         ? 'Every peak stays below the lower end of its section.'
-        : `Above the lower end at ${over.map(({ id }) => id).join(', ')}, by up to ${metres(most)}: walls stand there that are not in the field.`,
+        : say`Above the lower end at ${over.map(({ id }) => id).join(', ')}, by up to ${q(most, 'depth')}: walls stand there that are not in the field.`,
     rule: 'Sections reach above the highest water (common practice).',
   };
 };

@@ -1,4 +1,5 @@
-import { metres, type ChecklistRule } from './types';
+import { q, say } from '../../../../shared/units/message';
+import type { ChecklistRule } from './types';
 
 /** Each section stands for half of the way to its neighbours. */
 export const supercritical: ChecklistRule = ({ sections }) => {
@@ -16,7 +17,7 @@ export const supercritical: ChecklistRule = ({ sections }) => {
     finding:
       fast.length === 0
         ? `Subcritical at every surveyed section throughout; the highest Froude number is ${highest.toFixed(2)}.`
-        : `Supercritical at some time at ${fast.map(({ section }) => section.id).join(', ')}, about ${metres(length, 0)} of the reach; the highest Froude number is ${highest.toFixed(2)}.`,
+        : say`Supercritical at some time at ${fast.map(({ section }) => section.id).join(', ')}, about ${q(length, 'chainage')} of the reach; the highest Froude number is ${highest.toFixed(2)}.`,
     rule: 'Where Froude passes 1, look at the bed, the roughness and the spacing of sections there (common practice).',
   };
 };

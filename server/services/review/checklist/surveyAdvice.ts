@@ -1,3 +1,4 @@
+import { partsOf, say, sayAll } from '../../../../shared/units/message';
 import { counted, type ChecklistRule } from './types';
 
 export const surveyAdvice: ChecklistRule = ({ advice }) => ({
@@ -7,9 +8,6 @@ export const surveyAdvice: ChecklistRule = ({ advice }) => ({
   finding:
     advice.length === 0
       ? 'None.'
-      : `${counted(advice.length, 'note')} on the reach: ${advice
-          .slice(0, 5)
-          .map(({ message }) => message)
-          .join(' ')}${advice.length > 5 ? ` And ${advice.length - 5} more.` : ''}`,
+      : say`${counted(advice.length, 'note')} on the reach: ${partsOf(sayAll(advice.slice(0, 5)))}${advice.length > 5 ? ` And ${advice.length - 5} more.` : ''}`,
   rule: 'Each is mended or answered before the result is used (common practice).',
 });

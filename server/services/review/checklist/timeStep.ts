@@ -1,4 +1,5 @@
 import { CASE_DEFAULTS } from '../../../../shared/case/caseFile';
+import { q, say } from '../../../../shared/units/message';
 import { counted, type ChecklistRule } from './types';
 
 /** The steps are chosen by the Courant limit throughout the run; an explicit scheme is unstable above 1. */
@@ -16,9 +17,7 @@ export const timeStep: ChecklistRule = ({ caseFile, run, places }) => {
     id: 'timeStep',
     title: 'Courant number and time steps',
     outcome: courant <= 1 ? 'good' : 'bad',
-    finding:
-      `${counted(run.steps, 'step')} held to a Courant number of ${courant}, ${mean.toPrecision(3)} s on average. ` +
-      `With the greatest depth and velocity of each place together it would be ${shortest.toPrecision(3)} s on cells of ${run.cellSize.toPrecision(4)} m.`,
+    finding: say`${counted(run.steps, 'step')} held to a Courant number of ${courant}, ${mean.toPrecision(3)} s on average. With the greatest depth and velocity of each place together it would be ${shortest.toPrecision(3)} s on cells of ${q(run.cellSize, 'length', { figures: 4 })}.`,
     rule: 'At most 1 for an explicit scheme (Courant, Friedrichs & Lewy 1928).',
   };
 };

@@ -3,6 +3,7 @@ import type { CaseFile } from '../../../../shared/case/caseFile';
 import type { ConvergenceResult } from '../../../../shared/confidence/types';
 import type { Advice } from '../../../../shared/reaches/types';
 import type { ChecklistItem } from '../../../../shared/review/types';
+import { q, type Said } from '../../../../shared/units/message';
 import type { RunState } from '../../../../shared/runs/types';
 import type { PlaceColumns, RunFacts } from '../../../results/blocks/blockTypes';
 
@@ -36,7 +37,7 @@ export interface ChecklistFacts {
   /** Advice on the reach as it stands now. */
   advice: Advice[];
   /** The same case with a changed outlet; null: not asked for. */
-  probe: { runNumber: number; state: RunState; change: string; peaks: PeakPair[] } | null;
+  probe: { runNumber: number; state: RunState; change: Said; peaks: PeakPair[] } | null;
   /** The latest finished convergence set of this very case; null: none. */
   convergence: { name: string; result: ConvergenceResult } | null;
   /** Against the observed flood of its report; null: none was chosen. */
@@ -45,12 +46,17 @@ export interface ChecklistFacts {
   grids: { runNumber: number; cellSize: number; peaks: { name: string; stage: number }[] }[];
 }
 
-export type FoundItem = Omit<ChecklistItem, 'answer'>;
+/** An item whose words can be told in the study's units. */
+export type FoundItem = Omit<ChecklistItem, 'answer' | 'finding' | 'rule'> & {
+  finding: string | Said;
+  rule: string | Said;
+};
 
 /** One item, from the facts alone; null where it does not concern the run. */
 export type ChecklistRule = (facts: ChecklistFacts) => FoundItem | null;
 
-export const metres = (value: number, digits = 2) => `${value.toFixed(digits)} m`;
+/** A height or a depth to the millimetre. */
+export const fine = (value: number) => q(value, 'depth', { decimals: 3 });
 export const counted = (count: number, one: string, many = `${one}s`) =>
   `${count} ${count === 1 ? one : many}`;
 

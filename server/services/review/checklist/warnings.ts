@@ -1,3 +1,4 @@
+import { partsOf, say, sayAll } from '../../../../shared/units/message';
 import { counted, type ChecklistRule } from './types';
 
 export const warnings: ChecklistRule = ({ run }) => ({
@@ -7,9 +8,6 @@ export const warnings: ChecklistRule = ({ run }) => ({
   finding:
     run.warnings.length === 0
       ? 'None.'
-      : `${counted(run.warnings.length, 'warning')}: ${run.warnings
-          .slice(0, 5)
-          .map(({ message }) => message)
-          .join(' ')}${run.warnings.length > 5 ? ` And ${run.warnings.length - 5} more.` : ''}`,
+      : say`${counted(run.warnings.length, 'warning')}: ${partsOf(sayAll(run.warnings.slice(0, 5)))}${run.warnings.length > 5 ? ` And ${run.warnings.length - 5} more.` : ''}`,
   rule: 'Each is understood and answered (common practice).',
 });

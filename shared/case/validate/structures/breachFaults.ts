@@ -1,5 +1,6 @@
+import { say, typed } from '../../../units/message';
 import { join, type Faults } from '../faults';
-import { checkCrest, checkNumber, checkWord } from './fields';
+import { checkCrest, checkNumber, checkWord, type Range } from './fields';
 
 const REQUIRED = [
   'kind',
@@ -24,20 +25,35 @@ export function checkBreach(faults: Faults, path: string, value: unknown): void 
   checkWord(faults, path, value, 'growth', ['linear', 'sine']);
   checkNumber(faults, path, value, 'formationTime', { what: 'a time in s', least: 0, most: 9.5e8 });
   const hasWidth = checkNumber(faults, path, value, 'bottomWidth', {
-    what: 'a width in m',
+    what: 'a width',
+    unit: 'length',
     above: 0,
   });
-  const hasBottom = checkNumber(faults, path, value, 'bottomLevel', { what: 'a level in m' });
+  const hasBottom = checkNumber(faults, path, value, 'bottomLevel', {
+    what: 'a level',
+    unit: 'elevation',
+  });
   const slope = { what: 'a side slope (horizontal to vertical)', least: 0, most: 20 };
   checkNumber(faults, path, value, 'sideSlope', slope);
-  checkNumber(faults, path, value, 'weirCoefficient', { what: 'C in m^0.5/s', above: 0, most: 4 });
+  checkNumber(faults, path, value, 'weirCoefficient', {
+    what: 'C',
+    unit: 'weirCoefficient',
+    above: 0,
+    most: 4,
+  });
   checkNumber(faults, path, value, 'orificeCoefficient', {
     what: 'a coefficient',
     above: 0,
     most: 1,
   });
-  const hasCentre = checkNumber(faults, path, value, 'centre', { what: 'an offset in m' });
-  const hasStart = checkNumber(faults, path, value, 'startLevel', { what: 'a level in m' });
+  const hasCentre = checkNumber(faults, path, value, 'centre', {
+    what: 'an offset',
+    unit: 'length',
+  });
+  const hasStart = checkNumber(faults, path, value, 'startLevel', {
+    what: 'a level',
+    unit: 'elevation',
+  });
 
   if (value.mode === 'piping' && !('startLevel' in value)) {
     faults.add(join(path, 'startLevel'), 'is missing; a pipe begins at a level of its own');
@@ -45,7 +61,7 @@ export function checkBreach(faults: Faults, path: string, value: unknown): void 
   if (hasStart && hasBottom && (value.startLevel as number) < (value.bottomLevel as number)) {
     faults.add(
       join(path, 'startLevel'),
-      `${String(value.startLevel)} m lies below the bottom of the full breach; a breach only grows down`,
+      say`${typed(value.startLevel as number, 'elevation')} lies below the bottom of the full breach; a breach only grows down`,
     );
   }
   if (!ends) return;
@@ -53,7 +69,7 @@ export function checkBreach(faults: Faults, path: string, value: unknown): void 
   if (centre < ends[0] || centre > ends[1]) {
     faults.add(
       join(path, 'centre'),
-      `${centre} m lies outside the crest, ${ends[0]} m to ${ends[1]} m`,
+      say`${typed(centre, 'length')} lies outside the crest, ${typed(ends[0], 'length')} to ${typed(ends[1], 'length')}`,
     );
   } else if (hasWidth) {
     const half = 0.5 * (value.bottomWidth as number);
@@ -62,8 +78,7 @@ export function checkBreach(faults: Faults, path: string, value: unknown): void 
     if (centre - half < ends[0] - slack || centre + half > ends[1] + slack) {
       faults.add(
         join(path, 'bottomWidth'),
-        `${String(value.bottomWidth)} m about offset ${centre} m reaches beyond the crest, ` +
-          `${ends[0]} m to ${ends[1]} m; mend one of them`,
+        say`${typed(value.bottomWidth as number, 'length')} about offset ${typed(centre, 'length')} reaches beyond the crest, ${typed(ends[0], 'length')} to ${typed(ends[1], 'length')}; mend one of them`,
       );
     }
   }
@@ -74,7 +89,7 @@ export function checkBreach(faults: Faults, path: string, value: unknown): void 
     if (typeof level !== 'number' || level <= top) continue;
     faults.add(
       join(path, key),
-      `${level} m lies above the crest, whose highest point is at ${top} m`,
+      say`${typed(level, 'elevation')} lies above the crest, whose highest point is at ${typed(top, 'elevation')}`,
     );
   }
 }
@@ -83,7 +98,9 @@ function checkTrigger(faults: Faults, path: string, value: unknown): void {
   if (value === undefined) return;
   const kind = faults.kind(path, value, ['time', 'stage']);
   if (kind === null || !faults.record(path, value, ['kind', kind])) return;
-  const range =
-    kind === 'time' ? { what: 'a time in s', least: 0, most: 9.5e8 } : { what: 'a stage in m' };
+  const range: Range =
+    kind === 'time'
+      ? { what: 'a time in s', least: 0, most: 9.5e8 }
+      : { what: 'a stage', unit: 'elevation' };
   checkNumber(faults, path, value, kind, range);
 }

@@ -8,7 +8,7 @@ export function checkBridge(faults: Faults, path: string, value: unknown): void 
   checkWord(faults, path, value, 'piers', PIER_SHAPE_NAMES);
   const share = { what: 'a share of the flow area', least: 0, most: 0.5 };
   checkNumber(faults, path, value, 'obstructed', share);
-  checkNumber(faults, path, value, 'soffit', { what: 'a level in m' });
+  checkNumber(faults, path, value, 'soffit', { what: 'a level', unit: 'elevation' });
   const contraction = { what: 'a coefficient of contraction', least: 0.5, most: 1 };
   checkNumber(faults, path, value, 'contraction', contraction);
   if (value.deck !== undefined) checkCrest(faults, join(path, 'deck'), value.deck);

@@ -24,16 +24,20 @@ export function checkCulvert(faults: Faults, path: string, value: unknown): void
   checkWord(faults, path, value, 'shape', ['circular', 'box']);
   checkWord(faults, path, value, 'inlet', CULVERT_INLET_NAMES);
   for (const key of size) {
-    checkNumber(faults, path, value, key, { what: 'a size in m', above: 0, most: 100 });
+    checkNumber(faults, path, value, key, { what: 'a size', unit: 'length', above: 0, most: 100 });
   }
   const count = { what: 'a number of barrels', least: 1, most: 100 };
   if (checkNumber(faults, path, value, 'barrels', count) && !Number.isInteger(value.barrels)) {
     faults.add(join(path, 'barrels'), `is ${String(value.barrels)}; barrels are whole`);
   }
   checkNumber(faults, path, value, 'n', { what: "Manning's n", above: 0, most: 1 });
-  const hasLength = checkNumber(faults, path, value, 'length', { what: 'a length in m', above: 0 });
+  const hasLength = checkNumber(faults, path, value, 'length', {
+    what: 'a length',
+    unit: 'length',
+    above: 0,
+  });
   const levels = ['invertUp', 'invertDown'].map((key) =>
-    checkNumber(faults, path, value, key, { what: 'a level in m' }),
+    checkNumber(faults, path, value, key, { what: 'a level', unit: 'elevation' }),
   );
   if (hasLength && levels.every(Boolean)) {
     const slope =
@@ -41,7 +45,7 @@ export function checkCulvert(faults: Faults, path: string, value: unknown): void
     if (Math.abs(slope) > 0.5) {
       faults.add(
         join(path, 'invertDown'),
-        `makes a slope of ${slope.toFixed(2)} (m fall a m length); check inverts and length`,
+        `makes a slope of ${slope.toFixed(2)} (fall over length); check inverts and length`,
       );
     }
   }

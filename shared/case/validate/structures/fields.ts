@@ -1,9 +1,12 @@
+import { say, typed, unitOf } from '../../../units/message';
+import type { Quantity } from '../../../units/units';
 import { CASE_LIMITS } from '../../caseLimits';
 import { join, type Faults } from '../faults';
 
 export interface Range {
-  /** With unit, as in "a width in m" */
+  /** As in "a width", or with a unit that is the same everywhere: "a time in s" */
   what: string;
+  unit?: Quantity;
   least?: number;
   above?: number;
   most?: number;
@@ -15,22 +18,23 @@ export function checkNumber(
   path: string,
   record: Record<string, unknown>,
   key: string,
-  { what, least, above, most = 1e7 }: Range,
+  { what, unit, least, above, most = 1e7 }: Range,
 ): boolean {
   const value = record[key];
   if (value === undefined) return false;
   const at = join(path, key);
-  if (!faults.number(at, value, what)) return false;
+  if (!faults.number(at, value, what, unit)) return false;
+  const amount = (given: number) => (unit && given !== 0 ? typed(given, unit) : given);
   if (above !== undefined && value <= above) {
-    return faults.add(at, `is ${value}; ${what} must be above ${above}`);
+    return faults.add(at, say`is ${amount(value)}; ${what} must be above ${amount(above)}`);
   }
   if (least !== undefined && value < least) {
-    return faults.add(at, `is ${value}; ${what} must be at least ${least}`);
+    return faults.add(at, say`is ${amount(value)}; ${what} must be at least ${amount(least)}`);
   }
   if (Math.abs(value) > most) {
     return faults.add(
       at,
-      `is ${value}; ${what} of more than ${most} cannot be meant, check the unit`,
+      say`is ${amount(value)}; ${what} of more than ${amount(most)} cannot be meant, check the unit`,
     );
   }
   return true;
@@ -57,16 +61,16 @@ export function checkCrest(faults: Faults, path: string, value: unknown): [numbe
   value.forEach((point, k) => {
     const at = `${path}[${k}]`;
     if (!Array.isArray(point) || point.length !== 2) {
-      faults.add(at, 'must be [offset, level], two numbers in m');
+      faults.add(at, say`must be [offset, level], two numbers in ${unitOf('length')}`);
       return;
     }
     const [offset, level] = point as [unknown, unknown];
-    faults.number(`${at}[1]`, level, 'a level in m');
-    if (!faults.number(`${at}[0]`, offset, 'an offset in m')) return;
+    faults.number(`${at}[1]`, level, 'a level', 'elevation');
+    if (!faults.number(`${at}[0]`, offset, 'an offset', 'length')) return;
     if (offset < last) {
       faults.add(
         at,
-        `its offset ${offset} m lies left of the ${last} m before it; order the points`,
+        say`its offset ${typed(offset, 'length')} lies left of the ${typed(last, 'length')} before it; order the points`,
       );
     }
     last = offset;
