@@ -53,10 +53,17 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       runs,
       standingChanged: ({ id }) =>
         background.run('drawing a report to keep', async () =>
-          reports.pdf(await runs.find.again(id), 'A4'),
+          reports.pdf(await runs.find.again(id), { paper: 'A4', annex: false }),
         ),
     });
-    const reports = buildReports(platform, { confidence, observedOf, reviews, runs });
+    const verificationCases = buildVerificationCases(platform, tasks);
+    const reports = buildReports(platform, {
+      annexOf: verificationCases.annexOf,
+      confidence,
+      observedOf,
+      reviews,
+      runs,
+    });
     return {
       ...platform,
       close,
@@ -84,7 +91,7 @@ export async function compose(env: Env, overrides: Overrides = {}) {
       reports,
       issued: buildIssued(platform, { reviews, runs }),
       verify: buildVerify(platform, reviews),
-      verificationCases: buildVerificationCases(platform, tasks),
+      verificationCases,
       auditTrail: buildReadAudit(platform),
     };
   } catch (error) {

@@ -18,8 +18,10 @@ export const useReports = (runId: number) =>
 export function useReportDownload(runId: number) {
   const client = useQueryClient();
   return useMutation({
-    mutationFn: (paper: Paper) =>
-      api.download(`/runs/${runId}/report.pdf`, `report-run-${runId}.pdf`, { query: { paper } }),
+    mutationFn: ({ paper, annex }: { paper: Paper; annex: boolean }) =>
+      api.download(`/runs/${runId}/report.pdf`, `report-run-${runId}.pdf`, {
+        query: { paper, annex: String(annex) },
+      }),
     onSuccess: () => client.invalidateQueries({ queryKey: reportKeys.of(runId) }),
   });
 }

@@ -58,18 +58,23 @@ function entryOf(req: Request, res: Response): AuditEntry | null {
   if (NOT_TOLD.has(name)) return null;
   const told = ROUTE_WORDS[name];
   const record = recordOf(res);
+  const words = told && detailed(told.words, res);
   if (res.statusCode < 400) {
     // An answer that nothing is new gives nothing away.
     if (!told || res.statusCode === 304) return null;
-    return { action: told.action, words: join(told.words, nameOf(res)), record };
+    return { action: told.action, words: join(words!, nameOf(res)), record };
   }
   const code = res.locals['errorCode'] as ErrorCode | undefined;
   const refused = told ? code && REFUSALS.has(code) : res.locals['refused'];
   if (!refused) return null;
   const action = told?.action ?? `${String(res.locals['action'] ?? 'page')}`;
-  const words = join(told?.words ?? `Looking at ${req.originalUrl.split('?')[0]}`, nameOf(res));
-  return { action, words: `${words}: refused (${res.statusCode})`, record, outcome: 'refused' };
+  const what = join(words ?? `Looking at ${req.originalUrl.split('?')[0]}`, nameOf(res));
+  return { action, words: `${what}: refused (${res.statusCode})`, record, outcome: 'refused' };
 }
+
+/** With what the route alone knows of its answer. */
+const detailed = (words: string, { locals }: Response): string =>
+  locals['detail'] ? `${words} ${String(locals['detail'])}` : words;
 
 const join = (words: string, name: string | null) => (name ? `${words}: ${name}` : words);
 

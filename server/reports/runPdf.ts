@@ -1,4 +1,6 @@
 import type { Paper } from '../../shared/reports/types';
+import { annexPages } from './annex/annexPages';
+import type { AnnexFacts } from './annex/types';
 import { cautions } from './parts/cautions';
 import { check } from './parts/check';
 import { confidence } from './parts/confidence';
@@ -37,8 +39,12 @@ export interface DrawnReport {
   pages: number;
 }
 
-/** The report as PDF. The same report on the same paper gives the same bytes. Takes seconds: off the main thread. */
-export async function runPdf(report: RunReport, paper: Paper): Promise<DrawnReport> {
+/** The report as PDF, with the published cases as its last pages where they are given. The same report on the same paper gives the same bytes. Takes seconds: off the main thread. */
+export async function runPdf(
+  report: RunReport,
+  paper: Paper,
+  annex: AnnexFacts | null = null,
+): Promise<DrawnReport> {
   const { firmName, study, run, signOff: signed, withdrawal } = report.facts;
   const title = `${study.title}: ${run.scenarioName}, run ${run.number}`;
   const sheet = openSheet(paper, {
@@ -48,6 +54,7 @@ export async function runPdf(report: RunReport, paper: Paper): Promise<DrawnRepo
     date: new Date(withdrawal?.at ?? signed?.at ?? run.finishedAt),
   });
   for (const part of PARTS) part(sheet, report);
+  if (annex) annexPages(sheet, annex, run);
   const pages = sheet.doc.bufferedPageRange().count;
   finishPages(sheet, standingOf(report.facts), `${firmName} · ${title}`);
   return { pdf: new Uint8Array(await closeSheet(sheet)), pages };

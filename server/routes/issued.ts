@@ -1,5 +1,5 @@
 import { Router } from 'express';
-import { reportQuerySchema } from '../../shared/reports/schemas';
+import { paperQuerySchema } from '../../shared/reports/schemas';
 import type { Services } from '../composition';
 import { actorOf, authorize, recordOf, type Loader } from '../middleware/authorize';
 import { pathId } from '../middleware/pathId';
@@ -26,9 +26,9 @@ export function issuedRoutes({ authenticate, issued, reports, studies }: Service
     authenticate,
     authorize('issued.report', run),
     async (req, res) => {
-      const { paper } = await check(reportQuerySchema, req.query);
+      const { paper } = await check(paperQuerySchema, req.query);
       const record = recordOf<RunModel>(res);
-      const pdf = await reports.pdf(record, paper);
+      const pdf = await reports.pdf(record, { paper, annex: false });
       res.attachment(`run-${record.number}-report.pdf`).type('application/pdf').send(pdf);
     },
   );

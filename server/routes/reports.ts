@@ -13,10 +13,12 @@ export function reportRoutes({ authenticate, reports, runs }: Services): Router 
   );
 
   router.get('/runs/:runId/report.pdf', authenticate, readRun, async (req, res) => {
-    const { paper } = await check(reportQuerySchema, req.query);
+    const wanted = await check(reportQuerySchema, req.query);
     const run = recordOf<RunModel>(res);
-    const pdf = await reports.pdf(run, paper);
-    res.attachment(`run-${run.number}-report.pdf`).type('application/pdf').send(pdf);
+    if (wanted.annex) res.locals['detail'] = 'with the annex of published cases';
+    const pdf = await reports.pdf(run, wanted);
+    const name = wanted.annex ? 'report-with-annex' : 'report';
+    res.attachment(`run-${run.number}-${name}.pdf`).type('application/pdf').send(pdf);
   });
 
   router.get('/runs/:runId/reports', authenticate, readRun, async (_req, res) => {

@@ -1,5 +1,5 @@
 import { Router } from 'express';
-import { reportQuerySchema } from '../../shared/reports/schemas';
+import { paperQuerySchema } from '../../shared/reports/schemas';
 import {
   caseQuerySchema,
   runCasesSchema,
@@ -31,7 +31,7 @@ export function verificationCaseRoutes({ authenticate, verificationCases }: Serv
   });
 
   router.get('/verification-cases/annex.pdf', authenticate, mayRead, async (req, res) => {
-    const { paper } = await check(reportQuerySchema, req.query);
+    const { paper } = await check(paperQuerySchema, req.query);
     const pdf = await annex(actorOf(res).firmId, paper);
     res.attachment('published-cases.pdf').type('application/pdf').send(pdf);
   });

@@ -3,6 +3,7 @@ import { View } from 'react-native';
 import { useReportDownload, useReports } from '@/components/queries/reports';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
+import { Checkbox } from '@/components/ui/Checkbox';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { LinkTxt } from '@/components/ui/LinkTxt';
 import { List } from '@/components/ui/List';
@@ -17,6 +18,7 @@ import { PAPER_NAMES, reportWords, standingWords } from './reportWords';
 export function ReportCard({ run }: { run: Run }) {
   const usual: Paper = useUnitSystem() === 'metric' ? 'A4' : 'LETTER';
   const [paper, setPaper] = useState<Paper>(usual);
+  const [annex, setAnnex] = useState(false);
   const download = useReportDownload(run.id);
   const { data: reports } = useReports(run.id);
   return (
@@ -28,20 +30,22 @@ export function ReportCard({ run }: { run: Run }) {
         options={(['A4', 'LETTER'] as const).map((value) => ({ value, label: PAPER_NAMES[value] }))}
         onChange={setPaper}
       />
+      <Checkbox label="With the annex of published cases" checked={annex} onChange={setAnnex} />
+      <Txt variant="small" tone="soft">
+        {'What the solver is worth, as the last pages of the report. It is made of the results on '}
+        <LinkTxt variant="small" href="/proof">
+          Proof
+        </LinkTxt>
+        .
+      </Txt>
       <Button
         label={download.isPending ? 'Making the report…' : 'Report, PDF'}
         busy={download.isPending}
-        onPress={() => download.mutate(paper)}
+        onPress={() => download.mutate({ paper, annex })}
       />
       {download.error ? (
         <ErrorState error={download.error} title="The report could not be saved" />
       ) : null}
-      <Txt variant="small">
-        What the solver is worth goes with it as a file of its own:{' '}
-        <LinkTxt variant="small" href="/proof">
-          annex of published cases
-        </LinkTxt>
-      </Txt>
       {reports?.length ? (
         <List label="Reports kept">
           {reports.map((report) => (

@@ -20,10 +20,18 @@ const STANDINGS: Record<ReportRow['standing'], string> = {
 };
 
 /** A kept report in a line: `Signed, A4, 14 pages, 210 kB, 14 Nov 2025`. */
-export const reportWords = ({ standing, paper, pages, bytes, createdAt }: ReportRow): string =>
+export const reportWords = ({
+  standing,
+  paper,
+  annex,
+  pages,
+  bytes,
+  createdAt,
+}: ReportRow): string =>
   [
     STANDINGS[standing],
     PAPER_NAMES[paper],
+    ...(annex ? ['with the annex'] : []),
     pages === 1 ? '1 page' : `${pages} pages`,
     `${formatNumber(Math.max(1, bytes / 1000), 0)} kB`,
     formatDay(createdAt),

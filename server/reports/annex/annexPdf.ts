@@ -2,11 +2,10 @@ import type { Paper } from '../../../shared/reports/types';
 import { SOLVER_VERSION } from '../../solvers/version';
 import { finishPages } from '../pdf/finishPages';
 import { closeSheet, openSheet } from '../pdf/sheet';
-import { casePage } from './casePage';
-import { summaryPage } from './summaryPage';
+import { annexPages } from './annexPages';
 import type { AnnexFacts } from './types';
 
-/** Published cases as the annex of a report. The same facts on the same paper give the same bytes. */
+/** The annex of a report as a file of its own. The same facts on the same paper give the same bytes. */
 export async function annexPdf(facts: AnnexFacts, paper: Paper): Promise<Uint8Array> {
   const title = 'Published cases';
   const latest = facts.cases.reduce(
@@ -19,8 +18,7 @@ export async function annexPdf(facts: AnnexFacts, paper: Paper): Promise<Uint8Ar
     subject: 'Annex: the solver against published and independent solutions',
     date: new Date(latest),
   });
-  summaryPage(sheet, facts);
-  for (const each of facts.cases) casePage(sheet, each);
+  annexPages(sheet, facts);
   finishPages(
     sheet,
     null,

@@ -8,10 +8,14 @@ import { momentText } from '../words';
 import type { AnnexCase, AnnexFacts } from './types';
 
 /** What the cases are for, what they are not for, and the list of verdicts. */
-export function summaryPage(sheet: Sheet, { cases }: AnnexFacts): void {
+export function summaryPage(
+  sheet: Sheet,
+  { cases }: AnnexFacts,
+  report: { solverVersion: string } | null,
+): void {
   const older = cases.filter(({ summary }) => !summary.isCurrent);
   const outside = cases.filter(({ summary }) => !summary.within);
-  partHeading(sheet, 'Annex: published cases', 'flowing');
+  partHeading(sheet, 'Annex: published cases', report ? 'newPage' : 'flowing');
   paragraph(
     sheet,
     `The solver that routes the floods (version ${SOLVER_VERSION}) was given ${cases.length} cases whose answers are known: exact ` +
@@ -24,6 +28,7 @@ export function summaryPage(sheet: Sheet, { cases }: AnnexFacts): void {
       'roughness or the flood of a study are known, and nothing of what one-dimensional equations leave out. The judgement of ' +
       'a licensed engineer and the rules of the local authority stand over it.',
   );
+  if (report) ofReport(sheet, cases, report.solverVersion);
   if (outside.length > 0)
     notice(
       sheet,
@@ -52,6 +57,21 @@ export function summaryPage(sheet: Sheet, { cases }: AnnexFacts): void {
       rows.map(row),
     );
   }
+}
+
+/** What a signature on the report does not say, and whether it was this solver that routed the run. */
+function ofReport(sheet: Sheet, cases: readonly AnnexCase[], routedBy: string): void {
+  paragraph(
+    sheet,
+    'The annex tells of the solver and not of this run: a signature of the report above is on the run.',
+  );
+  const others = cases.filter(({ summary }) => summary.solver !== routedBy);
+  if (others.length > 0)
+    notice(
+      sheet,
+      `The run of this report was routed by solver ${routedBy}; ${others.length} of ${cases.length} cases were computed by another version, as marked.`,
+      'ochre',
+    );
 }
 
 const row = ({ about, summary }: AnnexCase): string[] => [

@@ -50,10 +50,10 @@ export function buildVerify({ models, sequelize }: Platform, reviews: ReviewsSer
     };
   }
 
-  /** Of the signed report, in every paper size that it was made in. */
+  /** Of the signed report, in every paper size that it was made in; those with an annex last. */
   async function hashesOf(runId: number): Promise<string[]> {
     const rows = await sequelize.query<{ hash: string }>(
-      "SELECT hash FROM reports WHERE run_id = ? AND standing = 'signed' ORDER BY paper",
+      "SELECT hash FROM reports WHERE run_id = ? AND standing = 'signed' ORDER BY annex, paper",
       { replacements: [runId], type: QueryTypes.SELECT },
     );
     return rows.map(({ hash }) => hash);

@@ -3,6 +3,7 @@ import { conflict } from '../../errors';
 import { lazyPool } from '../../jobs/lazyPool';
 import type { Platform } from '../../platform';
 import type { AnnexTask } from '../../reports/annex/annexWorker';
+import type { AnnexFacts } from '../../reports/annex/types';
 import type { buildTasks } from '../tasks';
 import { buildFindCases } from './findCases';
 import { buildRequestCases } from './requestCases';
@@ -17,16 +18,20 @@ export function buildVerificationCases(platform: Platform, tasks: ReturnType<typ
     'annexWorker',
   );
 
-  /** Throws `conflict` where no case has a result. */
-  async function annex(firmId: number, paper: Paper): Promise<Buffer> {
+  /** What the annex is made of. Throws `conflict` where no case has a result. */
+  async function annexOf(firmId: number): Promise<AnnexFacts> {
     const [firm, cases] = await Promise.all([
       platform.models.Firm.findByPk(firmId, { rejectOnEmpty: true }),
       find.finished(firmId),
     ]);
     if (cases.length === 0)
       throw conflict('No case has a result yet. Run the cases first; the annex is made of them.');
-    return Buffer.from(await pool().run({ facts: { firmName: firm.name, cases }, paper }));
+    return { firmName: firm.name, cases };
   }
+
+  /** The annex as a file of its own. */
+  const annex = async (firmId: number, paper: Paper): Promise<Buffer> =>
+    Buffer.from(await pool().run({ facts: await annexOf(firmId), paper }));
 
   /** Throws `notFound` where there is no such case, `conflict` where it has no result. */
   async function csv(firmId: number, caseId: string): Promise<string> {
@@ -35,5 +40,5 @@ export function buildVerificationCases(platform: Platform, tasks: ReturnType<typ
     return valuesCsv(result);
   }
 
-  return { annex, find, request: buildRequestCases(tasks, find), csv };
+  return { annex, annexOf, find, request: buildRequestCases(tasks, find), csv };
 }

@@ -74,6 +74,50 @@ it('is kept with its hash from the signature on: the same bytes for everybody, o
   expect([...told.reportHashes].sort()).toEqual([sha256(first), sha256(letter)].sort());
 });
 
+it('carries the published cases as its last pages where that is asked for, and is kept so as well', async () => {
+  const { asModeller, firmId, run } = checked;
+  const plain = await take(asModeller);
+  const withAnnex = () => asModeller.get(address()).query({ annex: 'true' });
+  const none = await withAnnex().expect(409);
+  expect(none.body.error.message).toContain('Run the cases first');
+
+  await asModeller.post('/api/verification-cases/runs').send({ caseIds: ['uniform-mild'] });
+  server.services.tasks.start();
+  while ((await server.services.verificationCases.find.finished(firmId)).length === 0)
+    await new Promise((resolve) => setTimeout(resolve, 50));
+  const response = await withAnnex().buffer(true).responseType('blob').expect(200);
+  expect(response.headers['content-disposition']).toContain('run-1-report-with-annex.pdf');
+  const pdf: Buffer = response.body;
+  const [before, after] = [await pdfPages(plain), await pdfPages(pdf)];
+  expect(after.length).toBeGreaterThan(before.length + 1);
+  after.forEach((page, k) => expect(page).toContain(`${k + 1} of ${after.length}`));
+  const annex = after.slice(before.length);
+  expect(annex[0]).toContain('Annex: published cases');
+  expect(annex[0]).toContain('a signature of the report above is on the run');
+  // What stands before it is the report as it is without.
+  const text = after.slice(0, before.length).join(' ');
+  expect(text.replace(/\d+ of \d+/g, '')).toBe(before.join(' ').replace(/\d+ of \d+/g, ''));
+
+  const again = await withAnnex().buffer(true).responseType('blob').expect(200);
+  expect((again.body as Buffer).equals(pdf)).toBe(true);
+  expect((await take(asModeller)).equals(plain)).toBe(true);
+  const kept = await rows();
+  expect(kept.find(({ annex: has, paper }) => has && paper === 'A4')!.hash).toBe(sha256(pdf));
+  expect(kept.filter(({ annex: has }) => !has)).toHaveLength(2);
+  const { verificationCode } = (await server.services.models.SignOff.findOne({
+    where: { runId: run.id },
+  }))!;
+  const told: Verification = (
+    await server.request.get(`/api/verification/${verificationCode}`).expect(200)
+  ).body;
+  expect(told.reportHash).toBe(sha256(plain));
+  expect(told.reportHashes).toContain(sha256(pdf));
+  const trail = await server.services.models.AuditRow.findAll({ where: { firmId } });
+  expect(trail.map(({ words }) => words).join('\n')).toMatch(
+    /Report downloaded with the annex of published cases: run 1, /,
+  );
+});
+
 it('says the same after names of the study and its people have changed', async () => {
   const before = await take(checked.asSenior);
   await checked.study.update({ title: 'Another title' });

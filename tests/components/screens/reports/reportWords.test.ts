@@ -8,15 +8,16 @@ test('a report made before the signature is said to be preliminary', () => {
 });
 
 test('a kept report in a line', () => {
-  expect(
-    reportWords({
-      id: 1,
-      paper: 'LETTER',
-      standing: 'signed',
-      hash: 'aa',
-      bytes: 210_400,
-      pages: 14,
-      createdAt: '2025-11-14T12:00:00Z',
-    }),
-  ).toBe('Signed, US Letter, 14 pages, 210 kB, 14 Nov 2025');
+  const report = {
+    id: 1,
+    paper: 'LETTER',
+    annex: false,
+    standing: 'signed',
+    hash: 'aa',
+    bytes: 210_400,
+    pages: 14,
+    createdAt: '2025-11-14T12:00:00Z',
+  } as const;
+  expect(reportWords(report)).toBe('Signed, US Letter, 14 pages, 210 kB, 14 Nov 2025');
+  expect(reportWords({ ...report, annex: true })).toContain('US Letter, with the annex, 14 pages');
 });
