@@ -35,8 +35,8 @@ export const STRUCTURES: Mutation[] = [
   {
     what: 'sluice: drowned without the momentum of the jet',
     file: 'structures/sluiceFlow.ts',
-    find: '(1 / j - 1 / down) * m',
-    put: '(1 / j + 1 / down) * m',
+    find: '(1 / j - 1 / tail) * m',
+    put: '(1 / j + 1 / tail) * m',
     tests: ['structures/sluice'],
   },
   {
