@@ -1,5 +1,5 @@
 import { CASE_DEFAULTS, type CaseFile, type FlowSeries } from '../case/caseFile';
-import { formatDuration, formatNumber, formatWithUnit } from '../units/format';
+import { formatDuration, formatNumber, formatSetting, formatWithUnit } from '../units/format';
 import type { Quantity, UnitSystem } from '../units/units';
 import { factsOfSection } from './sectionFacts';
 
@@ -24,7 +24,7 @@ export function caseFacts(caseFile: CaseFile, system: UnitSystem): CaseFact[] {
     ...roughnessFacts(caseFile, say),
     ...lossFacts(caseFile, say),
     ...structureFacts(caseFile),
-    ...numericsFacts(caseFile, say),
+    ...numericsFacts(caseFile, say, system),
     ...caseFile.sections.flatMap((section) => factsOfSection(section, say)),
   ];
 }
@@ -194,7 +194,7 @@ function short(value: unknown): string {
   return text.length > MOST_LETTERS ? `${text.slice(0, MOST_LETTERS)}…` : text;
 }
 
-function numericsFacts({ numerics, gravity }: CaseFile, say: Say): CaseFact[] {
+function numericsFacts({ numerics, gravity }: CaseFile, say: Say, system: UnitSystem): CaseFact[] {
   const filled = { ...CASE_DEFAULTS, ...numerics };
   return [
     fact('Settings', 'cell size', say(filled.cellSize, 'length'), filled.cellSize),
@@ -202,8 +202,12 @@ function numericsFacts({ numerics, gravity }: CaseFile, say: Say): CaseFact[] {
     fact('Settings', 'output interval', `${filled.outputInterval} s`),
     fact('Settings', 'order', String(filled.order)),
     fact('Settings', 'Courant number', String(filled.courant)),
-    fact('Settings', 'dry depth', `${filled.dryDepth} m`),
+    fact('Settings', 'dry depth', formatSetting(filled.dryDepth, 'depth', system)),
     fact('Settings', 'momentum coefficient', filled.momentum),
-    fact('Settings', 'gravity', `${gravity ?? CASE_DEFAULTS.gravity} m/s²`),
+    fact(
+      'Settings',
+      'gravity',
+      formatSetting(gravity ?? CASE_DEFAULTS.gravity, 'acceleration', system),
+    ),
   ];
 }

@@ -70,7 +70,7 @@ export function distributionFault(
       if (!(distribution.deviation > 0)) return 'The standard deviation must be above 0.';
       break;
     case 'lognormal':
-      if (measure === 'metres') return 'A shift in metres is not lognormal: it may be below 0.';
+      if (measure === 'metres') return 'A shift is not lognormal: it may be below 0.';
       if (!(distribution.median > 0)) return 'The median must be above 0.';
       if (!(distribution.spread > 1))
         return 'The geometric standard deviation must be above 1, e.g. 1.2.';

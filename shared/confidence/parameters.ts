@@ -1,4 +1,5 @@
 import type { CaseFile } from '../case/caseFile';
+import { q, say, type Said } from '../units/message';
 import type { Distribution } from './distributions';
 
 export const PARAMETER_KEYS = [
@@ -15,7 +16,7 @@ export type ParameterKey = (typeof PARAMETER_KEYS)[number];
 export interface Parameter {
   key: ParameterKey;
   label: string;
-  /** What a value does: multiplies, or is added in metres. */
+  /** What a value does: multiplies, or is added (in metres, stored). */
   measure: 'factor' | 'metres';
   /** The value that changes nothing. */
   neutral: number;
@@ -23,7 +24,7 @@ export interface Parameter {
   sides: readonly [number, number];
   distribution: Distribution;
   /** Why so much. */
-  reason: string;
+  reason: Said;
 }
 
 const WAHL =
@@ -37,8 +38,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 1,
     sides: [0.8, 1.2],
     distribution: { kind: 'lognormal', median: 1, spread: 1.2 },
-    reason:
-      "Manning's n that is judged and not calibrated is off by about a fifth, more often upwards (common practice).",
+    reason: say`Manning's n that is judged and not calibrated is off by about a fifth, more often upwards (common practice).`,
   },
   peakFlow: {
     key: 'peakFlow',
@@ -47,8 +47,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 1,
     sides: [0.9, 1.1],
     distribution: { kind: 'normal', mean: 1, deviation: 0.1 },
-    reason:
-      'Flood peaks from a rating curve are known to about a tenth (common practice); those from rainfall are known less well.',
+    reason: say`Flood peaks from a rating curve are known to about a tenth (common practice); those from rainfall are known less well.`,
   },
   outletSlope: {
     key: 'outletSlope',
@@ -57,8 +56,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 1,
     sides: [0.5, 2],
     distribution: { kind: 'triangular', low: 0.5, mode: 1, high: 2 },
-    reason:
-      'The slope of the water surface below the last section is seldom known to better than a factor of two (common practice).',
+    reason: say`The slope of the water surface below the last section is seldom known to better than a factor of two (common practice).`,
   },
   outletStage: {
     key: 'outletStage',
@@ -67,7 +65,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 0,
     sides: [-0.5, 0.5],
     distribution: { kind: 'triangular', low: -0.5, mode: 0, high: 0.5 },
-    reason: 'Half a metre either way (common practice where the water below is not gauged).',
+    reason: say`${q(0.5, 'depth')} either way (common practice where the water below is not gauged).`,
   },
   breachWidth: {
     key: 'breachWidth',
@@ -76,7 +74,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 1,
     sides: [0.4, 2.4],
     distribution: { kind: 'lognormal', median: 0.98, spread: 1.58 },
-    reason: `${WAHL} 0.40 and 2.4 times the prediction of Froehlich (1995); the lognormal distribution has these as its 2.5 and 97.5 % values.`,
+    reason: say`${WAHL} 0.40 and 2.4 times the prediction of Froehlich (1995); the lognormal distribution has these as its 2.5 and 97.5 % values.`,
   },
   breachTime: {
     key: 'breachTime',
@@ -85,7 +83,7 @@ export const PARAMETERS: Record<ParameterKey, Parameter> = {
     neutral: 1,
     sides: [0.38, 7.3],
     distribution: { kind: 'lognormal', median: 1.67, spread: 2.13 },
-    reason: `${WAHL} 0.38 and 7.3 times the prediction of Froehlich (1995); the lognormal distribution has these as its 2.5 and 97.5 % values.`,
+    reason: say`${WAHL} 0.38 and 7.3 times the prediction of Froehlich (1995); the lognormal distribution has these as its 2.5 and 97.5 % values.`,
   },
 };
 

@@ -1,3 +1,5 @@
+import type { UnitSystem } from '../units/units';
+
 /** Manning's n of natural and made channels, as published. */
 export interface RoughnessRow {
   group: RoughnessGroup;
@@ -8,15 +10,16 @@ export interface RoughnessRow {
   max: number;
 }
 export type RoughnessGroup =
-  | 'Minor stream'
-  | 'Mountain stream'
-  | 'Flood plain'
-  | 'Major stream, top width above 30 m (100 ft)'
-  | 'Excavated'
-  | 'Lined';
+  'Minor stream' | 'Mountain stream' | 'Flood plain' | 'Major stream' | 'Excavated' | 'Lined';
 
 export const ROUGHNESS_SOURCE =
   'V. T. Chow (1959), Open-Channel Hydraulics, McGraw-Hill, table 5-6';
+
+/** What a group is called in these units. Of a major stream the source says a top width at flood stage above 100 ft. */
+export const groupWords = (group: RoughnessGroup, system: UnitSystem): string =>
+  group === 'Major stream'
+    ? `Major stream, top width above ${system === 'metric' ? '30 m' : '100 ft'}`
+    : group;
 
 /** Natural channels first: they are what is surveyed. */
 export const ROUGHNESS_TABLE: readonly RoughnessRow[] = [
@@ -173,14 +176,14 @@ export const ROUGHNESS_TABLE: readonly RoughnessRow[] = [
     max: 0.16,
   },
   {
-    group: 'Major stream, top width above 30 m (100 ft)',
+    group: 'Major stream',
     description: 'Regular section, no boulders or brush',
     min: 0.025,
     normal: null,
     max: 0.06,
   },
   {
-    group: 'Major stream, top width above 30 m (100 ft)',
+    group: 'Major stream',
     description: 'Irregular and rough section',
     min: 0.035,
     normal: null,

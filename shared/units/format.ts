@@ -35,6 +35,10 @@ export function formatChosenLength(si: number, system: UnitSystem): string {
   return `${decimals > 0 ? text.replace(/\.0+$/, '') : text} ${symbol}`;
 }
 
+/** A setting of any size with six figures at most and no zeros behind them, e.g. `0.001 m` or `9.80665 m/s²`. */
+export const formatSetting = (si: number, quantity: Quantity, system: UnitSystem): string =>
+  `${Number(fromSi(si, quantity, system).toPrecision(6))} ${UNITS[system][quantity].symbol}`;
+
 /** Seconds from start as `6 h 07`; days are not split off: a flood is told in hours. */
 export function formatDuration(seconds: number): string {
   const minutes = Math.round(seconds / 60);

@@ -20,6 +20,7 @@ export const QUANTITIES = [
   'storage', // what a reservoir holds
   'weirCoefficient', // C of Q = C b h^1.5
   'multiplier', // of Manning's n
+  'acceleration', // of gravity
 ] as const;
 export type Quantity = (typeof QUANTITIES)[number];
 
@@ -46,6 +47,7 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     slope: { symbol: 'm/m', si: 1, decimals: 5 },
     storage: { symbol: '10⁶ m³', si: 1e6, decimals: 3 },
     weirCoefficient: { symbol: 'm½/s', si: 1, decimals: 2 },
+    acceleration: { symbol: 'm/s²', si: 1, decimals: 2 },
     multiplier: { symbol: '× n', si: 1, decimals: 2 },
   },
   usCustomary: {
@@ -59,6 +61,7 @@ export const UNITS: Record<UnitSystem, Record<Quantity, Unit>> = {
     volume: { symbol: 'ft³', si: FT ** 3, decimals: 0 },
     slope: { symbol: 'ft/ft', si: 1, decimals: 5 },
     storage: { symbol: 'acre-ft', si: 43_560 * FT ** 3, decimals: 0 },
+    acceleration: { symbol: 'ft/s²', si: FT, decimals: 2 },
     weirCoefficient: { symbol: 'ft½/s', si: FT ** 0.5, decimals: 2 },
     multiplier: { symbol: '× n', si: 1, decimals: 2 },
   },

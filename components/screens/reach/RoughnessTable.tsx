@@ -6,7 +6,9 @@ import { SelectField, type Option } from '@/components/ui/SelectField';
 import { Table, type Column } from '@/components/ui/Table';
 import { TextField } from '@/components/ui/TextField';
 import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 import {
+  groupWords,
   ROUGHNESS_SOURCE,
   ROUGHNESS_TABLE,
   type RoughnessRow,
@@ -25,6 +27,7 @@ interface RoughnessTableProps {
 /** The published values of Manning's n; a press takes one into the form. */
 export function RoughnessTable({ targets, target, onTarget, onTake }: RoughnessTableProps) {
   const [typed, setTyped] = useState('');
+  const system = useUnitSystem();
   const rows = filterRoughness(ROUGHNESS_TABLE, typed);
   const taken = targets.find(({ value }) => value === target)?.label ?? '';
   const value = (key: 'min' | 'normal' | 'max', title: string): Column<RoughnessRow> => ({
@@ -70,7 +73,7 @@ export function RoughnessTable({ targets, target, onTarget, onTake }: RoughnessT
               render: ({ group, description }) => (
                 <>
                   <Txt variant="small" tone="soft">
-                    {group}:{' '}
+                    {groupWords(group, system)}:{' '}
                   </Txt>
                   <Txt variant="small">{description}</Txt>
                 </>

@@ -1,5 +1,5 @@
 import { CASE_DEFAULTS, type CaseFile } from '../../../shared/case/caseFile';
-import { formatDuration, formatNumber } from '../../../shared/units/format';
+import { formatDuration, formatNumber, formatSetting } from '../../../shared/units/format';
 import { inflowOutline } from '../../results/inflowOutline';
 import { hydrograph } from '../charts/hydrograph';
 import { figure } from '../pdf/figure';
@@ -78,7 +78,10 @@ export function scenario(sheet: Sheet, { facts, caseFile, run }: RunReport): voi
     ['Output every', `${formatNumber(numerics.outputInterval, 0)} s`],
     ['Order in space and time', String(numerics.order ?? CASE_DEFAULTS.order)],
     ['Courant number', formatNumber(numerics.courant ?? CASE_DEFAULTS.courant, 2)],
-    ['Dry depth', `${formatNumber((numerics.dryDepth ?? CASE_DEFAULTS.dryDepth) * 1000, 1)} mm`],
+    [
+      'Dry depth',
+      formatSetting(numerics.dryDepth ?? CASE_DEFAULTS.dryDepth, 'depth', facts.study.unitSystem),
+    ],
     ['Momentum of the flow', momentumText(caseFile)],
     ['Time steps taken', formatNumber(run.steps, 0)],
   ]);

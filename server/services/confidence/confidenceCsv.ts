@@ -51,6 +51,10 @@ function linesOf(result: ConfidenceResult, scale: Scale, part: ConfidencePart): 
   }
 }
 
+/** A factor as it is, a shift in the unit of lengths. */
+const valueOf = (key: ParameterKey, value: number | null, s: Scale): number | null =>
+  PARAMETERS[key].measure === 'factor' ? value : s.length(value);
+
 function convergenceLines({ grids, stations, along }: ConvergenceResult, s: Scale): Line[] {
   const head = [
     'place',
@@ -126,7 +130,7 @@ function sensitivityLines({ base, rows, stations }: SensitivityResult, s: Scale)
       'station',
       `chainage (${s.m})`,
       'input',
-      'factor, or shift in m',
+      `factor, or shift (${s.m})`,
       `peak stage (${s.m})`,
       `peak flow (${s.q})`,
       'arrival (s)',
@@ -138,7 +142,12 @@ function sensitivityLines({ base, rows, stations }: SensitivityResult, s: Scale)
       line(k, 'base case', null, base[k]),
       ...rows.flatMap(({ parameter, low, high }) =>
         [low, high].map((side) =>
-          line(k, PARAMETERS[parameter].label, side.value, side.stations?.[k] ?? null),
+          line(
+            k,
+            PARAMETERS[parameter].label,
+            valueOf(parameter, side.value, s),
+            side.stations?.[k] ?? null,
+          ),
         ),
       ),
     ]),
@@ -179,7 +188,7 @@ function memberLines({ drawn, stations }: EnsembleResult, s: Scale): Line[] {
       'member',
       ...keys.map((key) => {
         const { label, measure } = PARAMETERS[key];
-        return `${label} (${measure === 'factor' ? 'factor' : 'shift in m'})`;
+        return `${label} (${measure === 'factor' ? 'factor' : `shift, ${s.m}`})`;
       }),
       ...stations.flatMap(({ name }) => [
         `${name}: peak stage (${s.m})`,
@@ -189,7 +198,7 @@ function memberLines({ drawn, stations }: EnsembleResult, s: Scale): Line[] {
     ],
     ...drawn.map(({ index, variation }, k) => [
       index,
-      ...keys.map((key) => variation[key] ?? null),
+      ...keys.map((key) => valueOf(key, variation[key] ?? null, s)),
       ...stations.flatMap(({ peakStages, peakFlows, arrivals }) => [
         s.length(peakStages[k]),
         s.flow(peakFlows[k]),

@@ -20,6 +20,6 @@ test('what was chosen for a sensitivity is told in feet', () => {
   };
   expect(settingFacts({ kind: 'sensitivity', settings }, 'usCustomary')).toEqual([
     ['Stage at the outlet', '−1.00 ft and +1.00 ft'],
-    ['Cells', '100.0 ft, chosen for the members'],
+    ['Cells', '100 ft, chosen for the members'],
   ]);
 });

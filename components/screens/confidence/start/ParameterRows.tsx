@@ -4,7 +4,9 @@ import { useForm } from '@/components/forms/FormRoot';
 import { space } from '@/components/theme/tokens';
 import { Checkbox } from '@/components/ui/Checkbox';
 import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Parameter, ParameterKey } from '@/shared/confidence/parameters';
+import { sayIn } from '@/shared/units/message';
 
 interface Props<Row extends { key: ParameterKey }> {
   parameters: readonly Parameter[];
@@ -18,6 +20,7 @@ interface Props<Row extends { key: ParameterKey }> {
 export function ParameterRows<Row extends { key: ParameterKey }>(props: Props<Row>) {
   const { parameters, begin, children } = props;
   const { formik, errorOf } = useForm();
+  const system = useUnitSystem();
   const rows = formik.values.parameters as Row[];
   const set = (next: Row[]) => void formik.setFieldValue('parameters', next);
   const missing = errorOf('parameters');
@@ -30,7 +33,7 @@ export function ParameterRows<Row extends { key: ParameterKey }>(props: Props<Ro
           <View key={key} role="group" aria-label={label} style={styles.row}>
             <Checkbox
               label={label}
-              hint={reason}
+              hint={sayIn(system, reason)}
               checked={k >= 0}
               disabled={formik.isSubmitting}
               onChange={(on) =>

@@ -1,5 +1,7 @@
 import { RadioGroup } from '@/components/ui/RadioGroup';
 import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
+import { formatWithUnit } from '@/shared/units/format';
 import { FieldRow } from '../EditorPart';
 import { PlacedField } from '../PlacedField';
 import { TimeField } from '../TimeField';
@@ -9,6 +11,7 @@ import { useStructure } from './structureContext';
 /** The breach that is routed. Own numbers stand for themselves: they are of no estimate any more. */
 export function BreachOpening() {
   const { structure, path, change, disabled } = useStructure('breach');
+  const system = useUnitSystem();
   return (
     <>
       <Txt strong heading={4}>
@@ -46,7 +49,7 @@ export function BreachOpening() {
           path={`${path}.weirCoefficient`}
           label="Weir coefficient"
           optional
-          hint="C of Q = C b h^1.5. Empty: that of a broad crest, 1.7 in metres, 3.1 in feet."
+          hint={`C of Q = C b h^1.5. Empty: that of a broad crest, ${formatWithUnit(1.7, 'weirCoefficient', system)}.`}
           quantity="weirCoefficient"
           value={structure.weirCoefficient}
           onChange={(weirCoefficient) => change({ weirCoefficient })}

@@ -1,4 +1,5 @@
 import type { SluiceBody } from '../../structures/schemas';
+import { q, say } from '../../../units/message';
 import { checkSeries } from '../checkSeries';
 import type { Findings } from '../Findings';
 import { checkContraction } from './checkCoefficient';
@@ -6,7 +7,7 @@ import { checkContraction } from './checkCoefficient';
 export function checkSluice(sluice: SluiceBody, path: string, findings: Findings) {
   findings.number(`${path}.width`, sluice.width, 'Give the clear width of the gates.', {
     when: (width) => width <= 0 || width > 1e4,
-    say: 'The width is above 0 and not above 10 km.',
+    say: say`The width is above 0 and not above ${q(1e4, 'length', { decimals: 0 })}.`,
   });
   findings.number(`${path}.sill`, sluice.sill, 'Give the level of the sill.');
   checkSeries(findings, {
