@@ -20,6 +20,8 @@ const node = {
 };
 
 module.exports = {
+  // How long a test takes tells of the machine; only what hangs should fail by it.
+  testTimeout: 60_000,
   projects: [
     {
       ...node,
