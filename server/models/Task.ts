@@ -24,6 +24,8 @@ export interface TaskModel extends Model<
   /** gzip of JSON; large, like `result`: both are left out of the default scope. */
   payload: Buffer;
   result: CreationOptional<Buffer | null>;
+  /** gzip of JSON: what an attempt had found before it broke off. Left out of the default scope. */
+  notes: CreationOptional<Buffer | null>;
   progress: CreationOptional<number>;
   attempts: CreationOptional<number>;
   /** A fresh one each time it is claimed; whoever does not hold it may not write. */
@@ -51,6 +53,7 @@ export const defineTask = (sequelize: Sequelize) =>
       state: { type: DataTypes.STRING(16), allowNull: false },
       payload: { type: DataTypes.BLOB('long'), allowNull: false },
       result: DataTypes.BLOB('long'),
+      notes: DataTypes.BLOB('long'),
       progress: { type: DataTypes.DOUBLE, allowNull: false, defaultValue: 0 },
       attempts: { type: DataTypes.INTEGER.UNSIGNED, allowNull: false, defaultValue: 0 },
       leaseOwner: DataTypes.STRING(36),
@@ -62,5 +65,8 @@ export const defineTask = (sequelize: Sequelize) =>
       createdAt: DataTypes.DATE(3),
       updatedAt: DataTypes.DATE(3),
     },
-    { tableName: 'tasks', defaultScope: { attributes: { exclude: ['payload', 'result'] } } },
+    {
+      tableName: 'tasks',
+      defaultScope: { attributes: { exclude: ['payload', 'result', 'notes'] } },
+    },
   );

@@ -5,9 +5,10 @@ import type { TaskModel } from '../models/Task';
 import type { TaskSetModel } from '../models/TaskSet';
 import { may } from '../policies/decide';
 import type { Actor } from '../policies/subject';
+import { signedSet } from '../services/tasks/signedSet';
 import type { CountedTaskSet, TaskCounts } from '../services/tasks/findTaskSets';
 
-/** Needs the set's `requester`, `run` and `study`. */
+/** Needs the set's `requester`, `run` with its `signOff`, and `study`. */
 export const presentTaskSetRow = ({ set, counts }: CountedTaskSet): TaskSetRow => ({
   id: set.id,
   kind: set.kind,
@@ -40,6 +41,7 @@ export const presentTaskSet = (
   settings: set.settings,
   tasks: tasks.map((task) => presentTask(task, set)),
   may: actionsOf(set, tasks, actor),
+  whyNoRetry: isLeft(set, tasks) ? signedSet(set) : null,
 });
 
 const presentTask = (task: TaskModel, set: TaskSetModel): TaskRow => ({
@@ -57,9 +59,14 @@ const systemOf = ({ study }: TaskSetModel) => study?.unitSystem ?? 'metric';
 function actionsOf(set: TaskSetModel, tasks: TaskModel[], actor: Actor): TaskSet['may'] {
   if (!may(actor, 'taskSet.change', { firmId: set.firmId })) return [];
   if (set.state === 'queued' || set.state === 'running') return ['taskSet.cancel'];
-  const left = tasks.some(({ state }) => state === 'failed' || state === 'cancelled');
-  return left ? ['taskSet.retry'] : [];
+  return isLeft(set, tasks) && signedSet(set) === null ? ['taskSet.retry'] : [];
 }
+
+/** It has ended, and some of it without a result. */
+const isLeft = ({ state }: TaskSetModel, tasks: TaskModel[]): boolean =>
+  state !== 'queued' &&
+  state !== 'running' &&
+  tasks.some((task) => task.state === 'failed' || task.state === 'cancelled');
 
 /** By the pace so far; null where there is too little to go by. */
 function secondsLeft({ state, startedAt }: TaskSetModel, { progress }: TaskCounts): number | null {

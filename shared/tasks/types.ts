@@ -65,4 +65,6 @@ export interface TaskSet extends TaskSetRow {
   settings: unknown;
   tasks: TaskRow[];
   may: ('taskSet.cancel' | 'taskSet.retry')[];
+  /** Why what is left of it is not computed again, though some is; null: it may be, or nothing is left. */
+  whyNoRetry: string | null;
 }

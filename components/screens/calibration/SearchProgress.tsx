@@ -26,7 +26,7 @@ export function SearchProgress({ set, settings }: { set: TaskSet; settings: Sear
       />
       <Txt tone="soft">
         It often ends sooner, when better multipliers are no longer found. You can leave: it goes on
-        without you.
+        without you, and after an interruption from the runs that it had made.
       </Txt>
       {set.may.includes('taskSet.cancel') ? (
         <Button

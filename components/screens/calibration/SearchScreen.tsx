@@ -3,19 +3,14 @@ import { NotThere } from '@/components/layout/NotThere';
 import { Screen } from '@/components/layout/Screen';
 import { useCurrentStudy } from '@/components/layout/studyContext';
 import { isApiError } from '@/components/queries/ApiError';
-import {
-  isUnderWay,
-  useChangeTaskSet,
-  useTaskSet,
-  useTaskSetResult,
-} from '@/components/queries/tasks';
+import { isUnderWay, useTaskSet, useTaskSetResult } from '@/components/queries/tasks';
 import { Badge } from '@/components/ui/Badge';
-import { Button } from '@/components/ui/Button';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Loading } from '@/components/ui/Loading';
 import { Notice } from '@/components/ui/Notice';
 import type { SearchResult, SearchSettings } from '@/shared/calibration/search/types';
 import { TASK_STATE_WORDS, type TaskSet } from '@/shared/tasks/types';
+import { RetrySet } from '../confidence/StoppedSet';
 import { SearchProgress } from './SearchProgress';
 import { SearchResults } from './SearchResults';
 
@@ -46,7 +41,6 @@ export function SearchScreen() {
 function Found({ set }: { set: TaskSet }) {
   const { study } = useCurrentStudy();
   const result = useTaskSetResult<SearchResult>(set);
-  const retry = useChangeTaskSet('retry');
   const settings = set.settings as SearchSettings;
   const root = `/studies/${study.id}` as const;
   const head = {
@@ -84,12 +78,9 @@ function Found({ set }: { set: TaskSet }) {
           >
             {set.tasks[0]?.failure ??
               set.failure ??
-              'Nothing of it was kept. Trying again begins from the start.'}
+              'The runs that it had made are kept: going on begins after them.'}
           </Notice>
-          {set.may.includes('taskSet.retry') ? (
-            <Button label="Try again" busy={retry.isPending} onPress={() => retry.mutate(set.id)} />
-          ) : null}
-          {retry.error ? <ErrorState error={retry.error} title="It was not started again" /> : null}
+          <RetrySet set={set} label={set.state === 'failed' ? 'Try again' : 'Go on'} />
         </>
       ) : null}
       {set.state === 'finished' ? (

@@ -18,7 +18,7 @@ export function StoppedSet({ set }: { set: TaskSet }) {
         <Txt>
           {failed
             ? (set.failure ?? 'No reason was given.')
-            : `${set.finished} of ${set.total} members had been computed and are kept. Going on computes the others.`}
+            : `${set.finished} of ${set.total} members had been computed and are kept.${set.may.includes('taskSet.retry') ? ' Going on computes the others.' : ''}`}
         </Txt>
       </Notice>
       <RetrySet set={set} label={failed ? 'Try again' : 'Go on'} />
@@ -26,9 +26,10 @@ export function StoppedSet({ set }: { set: TaskSet }) {
   );
 }
 
-/** Computes again what failed or was cancelled. */
+/** Computes again what failed or was cancelled, or says why that is not done. */
 export function RetrySet({ set, label }: { set: TaskSet; label: string }) {
   const retry = useChangeTaskSet('retry');
+  if (set.whyNoRetry) return <Txt tone="soft">{set.whyNoRetry}</Txt>;
   if (!set.may.includes('taskSet.retry')) return null;
   return (
     <>

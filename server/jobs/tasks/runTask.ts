@@ -10,12 +10,15 @@ export function runTaskOf(kinds: Partial<Record<TaskSetKind, AnyTaskKind>>) {
   /** Members of a set follow each other: its input is unpacked once. */
   let lastInput: { setId: number; value: unknown } | null = null;
 
-  return async ({ setId, kind, input, what, shared }: TaskWork): Promise<TaskAnswer> => {
+  return async (work: TaskWork): Promise<TaskAnswer> => {
+    const { setId, kind, input, what, shared, notebook } = work;
     const stop = new Int32Array(shared, 0, 1);
     const progress = new Float64Array(shared, 8, 1);
     const control: TaskControl = {
       shouldStop: () => Atomics.load(stop, 0) !== 0,
       onProgress: (fraction) => void (progress[0] = fraction),
+      kept: what.part === 'member' && what.notes ? unpack(what.notes) : null,
+      keep: (notes) => notebook.postMessage(gzipSync(JSON.stringify(notes))),
     };
     try {
       if (lastInput?.setId !== setId) lastInput = { setId, value: unpack(input) };

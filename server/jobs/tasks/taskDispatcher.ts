@@ -46,7 +46,10 @@ export function taskDispatcher(parts: Parts) {
   async function begin(claim: TaskClaim): Promise<void> {
     const task = pool.begin(await queue.read(claim));
     const done = task.outcome
-      .then((outcome) => end(claim, outcome))
+      .then(async (outcome) => {
+        await keepNotes(claim, task);
+        await end(claim, outcome);
+      })
       .catch(async (error: unknown) => {
         log.error({ err: error, taskId: claim.taskId }, 'task not stored');
         await queue
@@ -58,6 +61,11 @@ export function taskDispatcher(parts: Parts) {
         wake();
       });
     active.set(claim.token, { claim, task, done });
+  }
+
+  async function keepNotes(claim: TaskClaim, task: RunningTask): Promise<void> {
+    const notes = task.takeNotes();
+    if (notes) await queue.note(claim, notes);
   }
 
   async function end(claim: TaskClaim, outcome: TaskOutcome): Promise<void> {
@@ -83,8 +91,10 @@ export function taskDispatcher(parts: Parts) {
   }
 
   async function renewAll(): Promise<void> {
-    for (const { claim, task } of [...active.values()])
+    for (const { claim, task } of [...active.values()]) {
+      await keepNotes(claim, task);
       if (!(await queue.renew(claim, task.progress()))) task.cancel();
+    }
   }
 
   async function fill(): Promise<void> {

@@ -4,6 +4,10 @@ export interface TaskControl {
   shouldStop: () => boolean;
   /** 0..1 of this task. */
   onProgress: (fraction: number) => void;
+  /** What an attempt that was broken off had kept last; null: nothing. JSON. */
+  kept: unknown;
+  /** Keeps what is needed to go on from here, should this attempt be broken off; the last counts. */
+  keep: (notes: unknown) => void;
 }
 
 /** A member as it comes to `gather`; `result` is null where it failed. */

@@ -1,6 +1,7 @@
+import { MessageChannel } from 'node:worker_threads';
 import Piscina from 'piscina';
 import { workerFile, workerOptions } from '../startWorker';
-import type { TaskAnswer, TaskWork } from './taskMessages';
+import type { StoredWork, TaskAnswer, TaskWork } from './taskMessages';
 
 export const TASK_WORKER = workerFile(__dirname, 'taskWorker');
 
@@ -16,6 +17,8 @@ export interface RunningTask {
   outcome: Promise<TaskOutcome>;
   /** 0..1 */
   progress: () => number;
+  /** What it kept since this was last asked; null: nothing new. */
+  takeNotes: () => Uint8Array | null;
   /** Asks the task to stop; ends its thread by force if it has not stopped soon. */
   cancel: () => void;
   kill: () => void;
@@ -40,20 +43,32 @@ export function taskPool(file: string, threads: number) {
     }));
 
   return {
-    begin(work: Omit<TaskWork, 'shared'>): RunningTask {
+    begin(work: StoredWork): RunningTask {
       const shared = new SharedArrayBuffer(16);
+      const { port1: notes, port2: notebook } = new MessageChannel();
+      let latest: Uint8Array | null = null;
+      notes.on('message', (kept: Uint8Array) => void (latest = kept));
+      notes.unref();
       const force = new AbortController();
       let asked = false;
       let timer: NodeJS.Timeout | undefined;
       const outcome = started()
-        .run({ ...work, shared }, { signal: force.signal })
+        .run({ ...work, shared, notebook }, { signal: force.signal, transferList: [notebook] })
         .catch((error: unknown): TaskOutcome =>
           asked ? { type: 'cancelled' } : { type: 'broken', why: wordsOf(error) },
         )
-        .finally(() => clearTimeout(timer));
+        .finally(() => {
+          clearTimeout(timer);
+          notes.close();
+        });
       return {
         outcome,
         progress: () => new Float64Array(shared, 8, 1)[0],
+        takeNotes() {
+          const taken = latest;
+          latest = null;
+          return taken;
+        },
         cancel() {
           if (asked) return;
           asked = true;

@@ -7,7 +7,7 @@ import { failureFields, failureSaid } from '../../models/failure';
 import type { TaskModel } from '../../models/Task';
 import { retryOnDeadlock } from '../retryOnDeadlock';
 import { MAX_ATTEMPTS, type QueueTiming } from '../timing';
-import type { TaskWork } from './taskMessages';
+import type { StoredWork } from './taskMessages';
 
 /** A task taken from the queue. Only who holds `token` may write to it; each claim has a fresh one. */
 export interface TaskClaim {
@@ -107,7 +107,7 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
     },
 
     /** What its worker needs. */
-    async read({ taskId, setId, kind, part }: TaskClaim): Promise<Omit<TaskWork, 'shared'>> {
+    async read({ taskId, setId, kind, part }: TaskClaim): Promise<StoredWork> {
       const set = await TaskSet.unscoped().findByPk(setId, {
         attributes: ['id', 'input'],
         rejectOnEmpty: true,
@@ -115,9 +115,9 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
       const { input } = set;
       const Full = Task.unscoped();
       if (part === 'member') {
-        const attributes = ['id', 'payload'];
-        const { payload } = await Full.findByPk(taskId, { attributes, rejectOnEmpty: true });
-        return { setId, kind, input, what: { part, payload } };
+        const attributes = ['id', 'payload', 'notes'];
+        const { payload, notes } = await Full.findByPk(taskId, { attributes, rejectOnEmpty: true });
+        return { setId, kind, input, what: { part, payload, notes } };
       }
       const members = (
         await Full.findAll({
@@ -147,6 +147,13 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
       return rows.length > 0;
     },
 
+    /** Keeps what the task has found so far for another attempt, should this one break off. */
+    async note(claim: TaskClaim, notes: Uint8Array): Promise<void> {
+      await retryOnDeadlock(() =>
+        Task.update({ notes: Buffer.from(notes) }, { where: held(claim) }),
+      );
+    },
+
     /** Writes how the task ended, once; false where the claim was lost. A set that was cancelled keeps no late results. */
     finish: (claim: TaskClaim, ending: TaskEnding): Promise<boolean> =>
       retryOnDeadlock(() =>
@@ -165,7 +172,7 @@ export function taskQueue(sequelize: Sequelize, { Task, TaskSet }: Models, timin
               result,
               ...failureFields(failure),
               finishedAt: now,
-              ...(state === 'finished' && { progress: 1 }),
+              ...(state === 'finished' && { progress: 1, notes: null }),
             },
             { transaction },
           );

@@ -1,9 +1,9 @@
-import type { Transaction } from 'sequelize';
 import { TASK_STATE_WORDS } from '../../../shared/tasks/types';
 import { conflict } from '../../errors';
 import { failureFields } from '../../models/failure';
 import type { TaskSetModel } from '../../models/TaskSet';
 import type { Platform } from '../../platform';
+import { RUN_OF_SET, signedSet } from './signedSet';
 
 interface Needs {
   /** Stops what this process computes of a set. */
@@ -14,13 +14,7 @@ interface Needs {
 
 /** Cancel and try again. Both throw `conflict` where the set is past it. */
 export function buildChangeTaskSets({ audit, sequelize, models, now }: Platform, needs: Needs) {
-  const { SignOff, Task, TaskSet } = models;
-
-  /** Whether the run was signed with what the set had found. */
-  const signedWith = async ({ runId, state }: TaskSetModel, transaction: Transaction) =>
-    state === 'finished' &&
-    runId !== null &&
-    (await SignOff.count({ where: { runId }, transaction })) > 0;
+  const { Task, TaskSet } = models;
 
   return {
     /** What waits is cancelled at once, what goes on within a second or two; what has finished stays readable. */
@@ -56,10 +50,13 @@ export function buildChangeTaskSets({ audit, sequelize, models, now }: Platform,
           throw conflict(
             `The set is ${TASK_STATE_WORDS[set.state].toLowerCase()} and none of its members failed; there is nothing to try again.`,
           );
-        if (await signedWith(set, transaction))
-          throw conflict(
-            'The report of the signed run tells this set as it is. Ask for a new set instead.',
-          );
+        const ofRun = await TaskSet.findByPk(id, {
+          include: [RUN_OF_SET],
+          transaction,
+          rejectOnEmpty: true,
+        });
+        const signed = signedSet(ofRun);
+        if (signed) throw conflict(signed);
         await Task.destroy({ where: { setId: id, part: 'gather' }, transaction });
         await Task.update(
           {

@@ -6,6 +6,7 @@ import type { TaskModel } from '../../models/Task';
 import type { TaskSetModel } from '../../models/TaskSet';
 import type { Platform } from '../../platform';
 import type { Actor, Loaded } from '../../policies/subject';
+import { RUN_OF_SET } from './signedSet';
 
 /** How the members of a set stand. */
 export interface TaskCounts {
@@ -22,10 +23,10 @@ export interface CountedTaskSet {
 
 /** Sets by id, study or firm, with who asked for them; their tasks and results. */
 export function buildFindTaskSets({ models, sequelize }: Platform) {
-  const { Run, Study, Task, TaskSet, User } = models;
+  const { Study, Task, TaskSet, User } = models;
   const include = [
     { model: User, as: 'requester', attributes: ['id', 'name'] },
-    { model: Run, as: 'run', attributes: ['id', 'number'] },
+    RUN_OF_SET,
     { model: Study, as: 'study', attributes: ['id', 'unitSystem'] },
   ];
 

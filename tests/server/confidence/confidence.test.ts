@@ -248,5 +248,7 @@ test('what a signed run reports of a set stays as it is', async () => {
     record: Buffer.alloc(0),
   });
   const refused = await api.post(`/api/task-sets/${set.id}/retry`).expect(409);
-  expect(refused.body.error.message).toContain('Ask for a new set instead');
+  const { body } = await api.get(`/api/task-sets/${set.id}`).expect(200);
+  expect(body).toMatchObject({ may: [], whyNoRetry: refused.body.error.message });
+  expect(body.whyNoRetry).toContain('Ask for a new set instead');
 });

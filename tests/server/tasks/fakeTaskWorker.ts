@@ -4,8 +4,8 @@ import { TaskCancelled, type TaskControl } from '../../../server/jobs/tasks/task
 
 /** What a stand-in for a member does. */
 export interface FakeMember {
-  does: 'adds' | 'fails' | 'exits' | 'isStuck';
-  /** ms of wall time before it does so. */
+  does: 'adds' | 'fails' | 'exits' | 'isStuck' | 'counts';
+  /** ms of wall time before it does so; of one that counts, between its numbers. */
   after: number;
   value: number;
 }
@@ -20,8 +20,19 @@ function wait({ after, does }: FakeMember, { shouldStop, onProgress }: TaskContr
   }
 }
 
+/** Counts to the value from where an attempt before it was broken off; answers how many it has counted itself. */
+function count(member: FakeMember, control: TaskControl): number {
+  const from = (control.kept as number | null) ?? 0;
+  for (let k = from; k < member.value; k++) {
+    wait(member, control);
+    control.keep(k + 1);
+  }
+  return member.value - from;
+}
+
 const fake = taskKind<{ offset: number }, FakeMember, number, { sum: number; failed: number }>({
   compute(member, { offset }, control) {
+    if (member.does === 'counts') return count(member, control);
     wait(member, control);
     if (member.does === 'fails') throw new Error('The wall of the channel is missing.');
     if (member.does === 'exits') process.exit(7);

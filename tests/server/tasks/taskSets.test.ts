@@ -3,6 +3,7 @@ import pino from 'pino';
 import type { TaskSetKind } from '../../../shared/tasks/types';
 import { taskDispatcher, type TaskDispatcher } from '../../../server/jobs/tasks/taskDispatcher';
 import { taskQueue, type TaskClaim } from '../../../server/jobs/tasks/taskQueue';
+import { unpackJson } from '../../../server/database/packedJson';
 import type { TaskSetModel } from '../../../server/models/TaskSet';
 import type { UserModel } from '../../../server/models/User';
 import { buildUser } from '../../helpers/factories/buildUser';
@@ -95,6 +96,37 @@ test('members are computed, what fails does not spoil the rest, and all is gathe
   const again = await untilEnded(set);
   expect(await tasksOf().find.result(again)).toEqual({ sum: 204, failed: 1 });
   expect((await tasksOf().find.tasks(again)).map(({ attempts }) => attempts)).toEqual([1, 1, 1]);
+});
+
+test('a long member that is broken off goes on from what it had kept, as does one that was cancelled', async () => {
+  const set = await make([{ does: 'counts', after: 20, value: 60 }]);
+  const notesOf = async () => {
+    const where = { setId: set.id, part: 'member' as const };
+    return (await server.services.models.Task.unscoped().findOne({ where }))!.notes;
+  };
+  const untilNoted = async (but: Buffer | null) => {
+    for (;;) {
+      const notes = await notesOf();
+      if (notes && !but?.equals(notes)) return notes;
+      await pause(20);
+    }
+  };
+  const first = start();
+  const noted = await untilNoted(null);
+  await first.stop();
+  const second = start();
+  await untilNoted(noted);
+  await tasksOf().change.cancel(set);
+  second.cancel(set.id);
+  const stopped = await untilEnded(set);
+  while ((await tasksOf().find.tasks(set))[0].state === 'running') await pause(20);
+  const counted = await unpackJson<number>((await notesOf())!);
+  expect(counted).toBeGreaterThan(1);
+  await tasksOf().change.retry(stopped);
+  second.wake();
+  const ended = await untilEnded(set);
+  expect(await tasksOf().find.result(ended)).toEqual({ sum: 60 - counted, failed: 0 });
+  expect(await notesOf()).toBeNull();
 });
 
 test('a set of which no member comes to a result says why', async () => {

@@ -32,26 +32,44 @@ const FIRST_STEP = 0.25;
 /**
  * Roughness multipliers, one a stretch, that make the misfit least: a bounded simplex in the logarithms of the multipliers,
  * so that a half and a double are as far from 1. `compute` routes the flood with the multipliers it is given; where it
- * throws an Error the set is no good, which `isFailure` tells from what must end the search. `onEvaluation` is told after
- * each run. Throws where not even the multipliers of 1 can be routed and compared.
+ * throws an Error the set is no good, which `isFailure` tells from what must end the search. `onEvaluation` is told of all
+ * runs after each. `known` are those of an attempt that broke off: the search takes the same way again and does not route
+ * them a second time. Throws where not even the multipliers of 1 can be routed and compared.
  */
 export async function searchRoughness(
   { observed, startsAt, stretches, evaluations: budget }: Search,
   compute: (factors: number[]) => ComputedFlood,
   isFailure: (error: unknown) => boolean,
-  onEvaluation: (done: number) => void,
+  onEvaluation: (evaluations: Evaluation[]) => void,
+  known: readonly Evaluation[] = [],
 ): Promise<SearchResult> {
   const evaluations: Evaluation[] = [];
   /** Why the last one gave nothing. */
   let stopped: Error | null = null;
-  let best: { factors: number[]; misfit: number; compared: Compared } | null = null;
+  let best: { factors: number[]; misfit: number; compared: Compared | null } | null = null;
+
+  const comparedWith = async (factors: number[]): Promise<Compared> =>
+    compareFlood(observed, compute(factors), startsAt);
+  const isKnown = (factors: number[]) => {
+    const again = known[evaluations.length];
+    // What ended the attempt before is tried anew.
+    if (!again || (evaluations.length === 0 && again.misfit === null)) return null;
+    return factors.every((factor, i) => factor === again.factors[i]) ? again : null;
+  };
 
   async function evaluate(factors: number[], purpose: Evaluation['purpose']) {
     let misfit: number | null = null;
     let failure: string | null = null;
     stopped = null;
+    const again = isKnown(factors);
+    if (again) {
+      evaluations.push({ ...again, purpose });
+      if (again.misfit !== null && (best === null || again.misfit < best.misfit))
+        best = { factors, misfit: again.misfit, compared: null };
+      return again.misfit;
+    }
     try {
-      const compared = await compareFlood(observed, compute(factors), startsAt);
+      const compared = await comparedWith(factors);
       misfit = compared.misfit;
       if (misfit !== null && (best === null || misfit < best.misfit))
         best = { factors, misfit, compared };
@@ -61,7 +79,7 @@ export async function searchRoughness(
       failure = stopped.message;
     }
     evaluations.push({ number: evaluations.length + 1, purpose, factors, misfit, failure });
-    onEvaluation(evaluations.length);
+    onEvaluation(evaluations);
     return misfit;
   }
   const bestSoFar = () => best!;
@@ -76,7 +94,7 @@ export async function searchRoughness(
         'Nothing that was observed can be compared with this run: places off the reach, dry, or times that do not meet.',
       )
     );
-  const before = bestSoFar().compared;
+  const before = bestSoFar().compared ?? (await comparedWith(ones));
 
   const low = stretches.map((stretch) => Math.log(stretch.low));
   const high = stretches.map((stretch) => Math.log(stretch.high));
@@ -111,6 +129,7 @@ export async function searchRoughness(
     }
     flatness.push(flatnessOf(points, { factor, misfit: centre.misfit }, stretch));
   }
-  const { factors, misfit, compared: after } = bestSoFar();
+  const { factors, misfit, compared } = bestSoFar();
+  const after = compared ?? (await comparedWith(factors));
   return { best: { factors, misfit }, before, after, why: end.why, evaluations, flatness };
 }
