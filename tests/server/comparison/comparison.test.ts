@@ -1,6 +1,8 @@
 import type { RunComparison } from '../../../shared/comparison/types';
 import type { RunSummary } from '../../../shared/runs/types';
 import type { Scenario } from '../../../shared/scenarios/types';
+import type { UserModel } from '../../../server/models/User';
+import { buildMember } from '../../helpers/factories/buildStudy';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { buildRunnable } from '../runs/buildRunnable';
@@ -8,6 +10,7 @@ import { untilEnded } from '../runs/untilEnded';
 
 let server: TestServer;
 let api: Awaited<ReturnType<TestServer['signInAs']>>;
+let modeller: UserModel;
 let studyId: number;
 let scenarioId: number;
 let runIds: number[];
@@ -15,9 +18,9 @@ let runIds: number[];
 beforeAll(async () => {
   server = await startTestServer({ WORKERS: '1' });
   const { services } = server;
-  const user = await buildUser(services, ['modeller']);
-  api = await server.signInAs(user);
-  const { study, scenario } = await buildRunnable(services, user);
+  modeller = await buildUser(services, ['modeller']);
+  api = await server.signInAs(modeller);
+  const { study, scenario } = await buildRunnable(services, modeller);
   [studyId, scenarioId] = [study.id, scenario.id];
   services.runs.start();
   const copy = await api
@@ -83,4 +86,50 @@ test('refuses one run, five, the same twice, and those of another study or firm'
     .get(`/api/studies/${studyId}/comparison`)
     .query({ runs: `${a},${b}` })
     .expect(404);
+});
+
+test('is for engineers of the firm: to all others the study has no such thing', async () => {
+  const { firmId } = modeller;
+  const senior = await buildUser(server.services, ['seniorEngineer'], { firmId });
+  const of = { query: { runs: runIds.join(',') }, path: `/api/studies/${studyId}/comparison` };
+  const theirs = await (await server.signInAs(senior)).get(of.path).query(of.query).expect(200);
+  expect((theirs.body as RunComparison).runs.map(({ id }) => id)).toEqual(runIds);
+  const study = await server.services.models.Study.findByPk(studyId, { rejectOnEmpty: true });
+  for (const role of ['client', 'surveyor', 'administrator'] as const) {
+    const user = await buildUser(server.services, [role], { firmId });
+    if (role !== 'administrator') await buildMember(server.services, study, user, role);
+    await (await server.signInAs(user)).get(of.path).query(of.query).expect(404);
+  }
+  await server.request.get(of.path).query(of.query).expect(401);
+});
+
+test('a run of another study is refused as one that is not there; one without results as such', async () => {
+  const { services } = server;
+  const [a] = runIds;
+  const other = await buildRunnable(services, modeller);
+  const foreign = await api.post(`/api/scenarios/${other.scenario.id}/runs`).expect(201);
+  await untilEnded(services, foreign.body.id);
+  const [theirs, none] = await Promise.all([
+    compare(`${a},${foreign.body.id}`).expect(422),
+    compare(`${a},999999`).expect(422),
+  ]);
+  expect(theirs.body.error.faults).toEqual(none.body.error.faults);
+
+  const run = await services.models.Run.findByPk(runIds[1], { rejectOnEmpty: true });
+  await run.update({ state: 'failed' });
+  const refused = await compare(runIds.join(',')).expect(409);
+  expect(refused.body.error.message).toContain(`Run ${run.number} has no results`);
+  await run.update({ state: 'routed' });
+});
+
+test('what differs is told in the units of the study; the numbers stay SI', async () => {
+  const metric: RunComparison = (await compare(runIds.join(',')).expect(200)).body;
+  const { Study } = server.services.models;
+  const study = await Study.findByPk(studyId, { rejectOnEmpty: true });
+  await study.update({ unitSystem: 'usCustomary' });
+  const us: RunComparison = (await compare(runIds.join(',')).expect(200)).body;
+  await study.update({ unitSystem: 'metric' });
+  // 120 and 144 m³/s over 0.3048³ m³ a cubic foot.
+  expect(us.differences[0].values).toEqual(['4,238 ft³/s', '5,085 ft³/s']);
+  expect(us.places).toEqual(metric.places);
 });
