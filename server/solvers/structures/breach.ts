@@ -1,7 +1,7 @@
 import type { BreachInput } from '../../../shared/case/structures';
 import { createSeries } from '../sources/series';
 import { breachGrowth, openedHead, type BreachOpening } from './breachOpening';
-import { crestHead, crestLow, crestOf, drowning } from './crestFlow';
+import { crestHead, crestLow, crestOf, drowning, power15 } from './crestFlow';
 import type { Regime, Structure } from './structure';
 
 const WEIR_COEFFICIENT = 1.7;
@@ -65,8 +65,8 @@ export function createBreach(input: BreachInput, chainage: number, gravity: numb
     const head = stageUp - bottom;
     if (!(head > 0) || !(width > 0)) return 0;
     const tail = Math.max(0, stageDown - bottom);
-    const share = drowning(tail ** 1.5, head ** 1.5);
-    const open15 = weir * width * (energyUp - bottom) ** 1.5 * share;
+    const share = drowning(power15(tail), power15(head));
+    const open15 = weir * width * power15(energyUp - bottom) * share;
     const middle = 0.5 * (bottom + roof);
     const drop = stageUp - Math.max(stageDown, middle);
     const full =

@@ -5,6 +5,11 @@ export function crestOf(points: readonly (readonly [number, number])[]): Crest {
   return Float64Array.from(points.flat());
 }
 
+/** h^1.5, many times faster than a power */
+export function power15(h: number): number {
+  return h * Math.sqrt(h);
+}
+
 /**
  * ∫ (z - crest)^1.5 ds (m^2.5) of water that stands at z over a straight piece of crest of length `length`, from level
  * `a` to level `b`: exact, 0.4 L (h_a^2.5 - h_b^2.5)/(h_a - h_b).
@@ -16,10 +21,10 @@ export function pieceHead(z: number, length: number, a: number, b: number): numb
   const rise = high - low;
   if (low > 0 && rise < 0.02 * high) {
     const middle = 0.5 * (high + low);
-    return (length * (high ** 1.5 + 4 * middle ** 1.5 + low ** 1.5)) / 6;
+    return (length * (power15(high) + 4 * power15(middle) + power15(low))) / 6;
   }
-  const rest = low > 0 ? low ** 2.5 : 0;
-  return (0.4 * length * (high ** 2.5 - rest)) / rise;
+  const rest = low > 0 ? low * power15(low) : 0;
+  return (0.4 * length * (high * power15(high) - rest)) / rise;
 }
 
 /** ∫ (z - crest)^1.5 ds over the whole crest (m^2.5). */

@@ -1,6 +1,6 @@
 import type { CulvertInput } from '../../../shared/case/structures';
 import { boxBarrel, circularBarrel, type Barrel } from './barrel';
-import { broadCoefficient, crestHead, crestOf, drowning } from './crestFlow';
+import { broadCoefficient, crestHead, crestOf, drowning, power15 } from './crestFlow';
 import { freeSurfaceHeadwater, fullLosses, inletHeadwater, outletHeadwater } from './culvertFlow';
 import { CULVERT_INLETS } from './culvertInlets';
 import type { Regime, Structure } from './structure';
@@ -86,7 +86,7 @@ export function createCulvert(input: CulvertInput, chainage: number, gravity: nu
     // Tailwater: a full barrel by its losses; one that is not, like a weir at its higher invert.
     const full = barrel.fullArea * Math.sqrt((2 * gravity * (stageUp - stageDown)) / losses);
     const sill = Math.max(invertUp, invertDown);
-    const share = drowning(Math.max(0, stageDown - sill) ** 1.5, (stageUp - sill) ** 1.5);
+    const share = drowning(power15(Math.max(0, stageDown - sill)), power15(stageUp - sill));
     const submerged = Math.min(1, Math.max(0, (head / barrel.rise - FULL_FORM) / (1 - FULL_FORM)));
     const held = Math.min(flow * (share + submerged * (1 - share)), full);
     if (held < 0.999 * flow)

@@ -1,4 +1,3 @@
-import { risingRoot } from '../boundaries/rootNear';
 import type { Structure, Water } from './structure';
 import type { WaterSide } from './waterSide';
 
@@ -14,6 +13,12 @@ export interface Release {
   stageUp(): number;
   stageDown(): number;
 }
+
+/** Relative: near what rounding leaves of the flow */
+const EXACT = 1e-14;
+/** A rise that is not relied on for the next search: that of a flow that jumps */
+const STEEP = 1e3;
+const MOST_EVALUATIONS = 100;
 
 type GivingSide = Pick<WaterSide, 'isWet' | 'stageAt' | 'mostAt' | 'velocityHead'>;
 
@@ -67,25 +72,63 @@ export function createRelease(
     for (let k = 0; k < count; k++) flows[k] *= share;
     return sum * share;
   }
-  const forwardSurplus = (q: number): number => q - flowWith(q);
-  const backwardSurplus = (q: number): number => q + flowWith(-q);
+
+  // What the last search found: the flow, and how fast its surplus rises with it (1 where the flow does not feel itself).
+  let known = 0;
+  let rise = 1;
+
+  /**
+   * The root of `q - F(q)`, F the flow with the stages that q makes, in the direction of `most` = F(0). The surplus rises with
+   * q by 1 at least, since more flow lowers the water above and raises the one below: what is left of it bounds the
+   * error. Secants from the flow known last, within a bracket that is halved where they do not shrink it.
+   */
+  function search(most: number): number {
+    const sign = most > 0 ? 1 : -1;
+    let low = 0;
+    let high = Math.abs(most);
+    let x = sign * known > 0 && sign * known < high ? sign * known : high;
+    let lastX = 0;
+    let lastSurplus = -high;
+    let best = 0;
+    let least = high;
+    let width = high;
+    rise = Math.min(rise, STEEP);
+    for (let k = 0; k < MOST_EVALUATIONS; k++) {
+      const surplus = x - sign * flowWith(sign * x);
+      if (Math.abs(surplus) < least) {
+        least = Math.abs(surplus);
+        best = x;
+      }
+      if (surplus < 0) low = x;
+      else high = x;
+      if (k > 0) rise = Math.max(1, (surplus - lastSurplus) / (x - lastX));
+      if (Math.abs(surplus) <= EXACT * x * (k > 0 ? rise : 1)) break;
+      lastX = x;
+      lastSurplus = surplus;
+      if (high - low <= EXACT * high) break;
+      x -= surplus / rise;
+      const isSlow = k % 4 === 3 && high - low > 0.5 * width;
+      if (k % 4 === 3) width = high - low;
+      if (isSlow || !(x > low && x < high)) x = 0.5 * (low + high);
+    }
+    known = sign * best;
+    return known;
+  }
 
   return {
     flows,
     stageUp: () => above,
     stageDown: () => below,
-    openFlow(time, rise) {
+    openFlow(time, up) {
       water.time = time;
-      return flowWith(0, rise);
+      return flowWith(0, up);
     },
     solve(time) {
       water.time = time;
       const most = flowWith(0);
       if (most === 0) return 0;
-      // More flow lowers the water above and raises the one below: the surplus rises with the flow.
-      const q =
-        most > 0 ? risingRoot(forwardSurplus, 0, most) : -risingRoot(backwardSurplus, 0, -most);
-      // Where the law of a structure jumps, as from a free to a drowned jet, the flow lies within the jump.
+      const q = search(most);
+      // Where the law of a structure jumps the flow lies within the jump.
       const sum = flowWith(q);
       if (sum !== 0) for (let k = 0; k < count; k++) flows[k] *= q / sum;
       return q;

@@ -1,6 +1,6 @@
 import type { SluiceInput } from '../../../shared/case/structures';
 import { createSeries } from '../sources/series';
-import { broadCoefficient, drowning } from './crestFlow';
+import { broadCoefficient, drowning, power15 } from './crestFlow';
 import { gateFlow, type GateFlow } from './sluiceFlow';
 import type { Regime, Structure } from './structure';
 
@@ -29,8 +29,8 @@ export function createSluice(input: SluiceInput, chainage: number, gravity: numb
         regime = opening > 0 ? 'dry' : 'closed';
         return 0;
       }
-      const share = drowning(down ** 1.5, up ** 1.5);
-      const open = weir * (energyUp - sill) ** 1.5 * share;
+      const share = drowning(power15(down), power15(up));
+      const open = weir * power15(energyUp - sill) * share;
       gateFlow(gate, up, down, opening, contraction, gravity);
       if (open <= gate.q) {
         regime = share < FREE ? 'drowned' : 'free';

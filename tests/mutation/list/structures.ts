@@ -14,8 +14,8 @@ export const STRUCTURES: Mutation[] = [
   {
     what: 'weir: sloping crest counts its lower end only',
     file: 'structures/crestFlow.ts',
-    find: '(high ** 2.5 - rest)',
-    put: 'high ** 2.5',
+    find: '(high * power15(high) - rest)',
+    put: 'high * power15(high)',
     tests: WEIR,
   },
   {
