@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { memo, useCallback, useMemo } from 'react';
 import { Circle, Line, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
 import { formatWithUnit } from '@/shared/units/format';
@@ -18,6 +18,8 @@ import { nearestIndex, valueAt } from './geometry/interpolate';
 import type { Polyline } from './geometry/placeLabel';
 import { PIN, pointPins, type Pin } from './geometry/pointPins';
 import { shortTime } from './geometry/timeWords';
+import type { LiveTime } from './liveTime';
+import { MovingCursor } from './MovingCursor';
 import { LevelLines, LevelNames } from './LevelLines';
 import { PointPins, type RaisedPoint } from './PointPins';
 import { PointPresses } from './PointPresses';
@@ -44,6 +46,8 @@ export interface HydrographProps {
   peak?: { value: number; time: number } | null;
   /** Time of the cursor, s; null for none. */
   t: number | null;
+  /** Moves the cursor frame by frame; `t` then only names its value, a few times a second. */
+  live?: LiveTime;
   /** Of ground or a dam, not of water. */
   isGround?: boolean;
   /** Left out: the drawing only shows. */
@@ -187,6 +191,7 @@ function Marks({
   unitSystem,
   model,
   pins,
+  live,
 }: Sized & { model: HydrographModel; pins: readonly Pin[] }) {
   const { colours } = useTheme();
   const { frame, yOf } = model;
@@ -198,6 +203,10 @@ function Marks({
   };
   const span = frame.x.domain()[1] - frame.x.domain()[0];
   const value = (si: number) => formatWithUnit(si, quantity, unitSystem);
+  const at = useCallback(
+    (time: number) => yOf(valueAt(series.times, series.values, time)),
+    [yOf, series],
+  );
   const cursor =
     t === null || !series.times.length
       ? null
@@ -234,7 +243,7 @@ function Marks({
     : null;
   return (
     <>
-      {cursor ? (
+      {cursor && !live ? (
         <Line
           x1={cursor.x}
           x2={cursor.x}
@@ -250,7 +259,10 @@ function Marks({
           <Reading texts={peakText} box={peakBox} from={top.x} />
         </>
       ) : null}
-      {cursor ? (
+      {cursor && live ? (
+        <MovingCursor live={live} xOf={frame.x} yOf={at} line={{ top: 4, bottom: frame.bottom }} />
+      ) : null}
+      {cursor && !live ? (
         <Circle
           cx={cursor.x}
           cy={cursor.y}

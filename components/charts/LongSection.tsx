@@ -19,6 +19,7 @@ import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
 import { pointPins } from './geometry/pointPins';
 import { LevelMarks } from './LevelMarks';
+import { MovingDot, MovingWater, type LiveWater } from './MovingWater';
 import { ObservedMarks } from './ObservedMarks';
 import { PlaceAxis } from './PlaceAxis';
 import { PointPins, type RaisedPoint } from './PointPins';
@@ -31,6 +32,8 @@ import { ValueAxis } from './ValueAxis';
 export interface LongSectionProps {
   /** Bed, banks and highest water by chainage, m. Keep it the same object while only the water moves. */
   profile: LongProfile;
+  /** Water that moves by itself; `stage` and `reading` then only name values, a few times a second. */
+  live?: LiveWater | null;
   /** Water surface of the moment at the same places, m; null for the bare reach. */
   stage?: ArrayLike<number> | null;
   sections: readonly { id: string; chainage: number }[];
@@ -127,7 +130,7 @@ function Presses(props: Sized & Required<Pick<LongSectionProps, 'points' | 'onPo
 }
 
 function Drawing(props: Sized) {
-  const { profile, stage, reading, at, unitSystem, sections, size } = props;
+  const { profile, live = null, stage, reading, at, unitSystem, sections, size } = props;
   const { stations = NONE, levels = NONE, structures = NONE, bottoms, words } = props;
   const { observed = NONE, points = NONE } = props;
   const pins = usePins(props);
@@ -149,6 +152,10 @@ function Drawing(props: Sized) {
       right: profile.rightBank ? y(profile.rightBank) : null,
     };
   }, [profile, frame, unitSystem]);
+  const y = useMemo(() => {
+    const px = (m: number) => frame.y(fromSi(m, 'elevation', unitSystem));
+    return { at0: px(0), perMetre: px(1) - px(0) };
+  }, [frame, unitSystem]);
   const surface = stage
     ? project(wetSurface(profile.bed, stage), (m) => frame.y(fromSi(m, 'elevation', unitSystem)))
     : null;
@@ -156,9 +163,13 @@ function Drawing(props: Sized) {
   return (
     <>
       <ValueAxis frame={frame} ticks={frame.yTicks} />
-      {surface ? <Path d={bandPath(lines.x, surface, lines.bed)} fill={colours.waterTint} /> : null}
+      {live ? (
+        <MovingWater {...{ live, y }} x={lines.x} bed={profile.bed} foot={frame.bottom} />
+      ) : surface ? (
+        <Path d={bandPath(lines.x, surface, lines.bed)} fill={colours.waterTint} />
+      ) : null}
       <Ground lines={lines} foot={frame.bottom} />
-      {surface ? (
+      {surface && !live ? (
         <Path
           d={linePath(lines.x, surface)}
           fill="none"
@@ -187,7 +198,7 @@ function Drawing(props: Sized) {
       </ChartText>
       {at === null ? null : (
         <Cursor
-          {...{ frame, profile, stage, reading, at, unitSystem }}
+          {...{ frame, profile, live, y, stage, reading, at, unitSystem }}
           lines={lines}
           surface={surface}
         />
@@ -244,12 +255,15 @@ const Ground = memo(function Ground({ lines, foot }: { lines: Lines; foot: numbe
 
 interface CursorProps extends ReadingOf {
   at: number;
+  live: LiveWater | null;
+  y: { at0: number; perMetre: number };
   frame: ReturnType<typeof longSectionFrame>;
   lines: Lines;
   surface: Float64Array | null;
 }
 
-function Cursor({ at, frame, profile, stage, reading, unitSystem, lines, surface }: CursorProps) {
+function Cursor(props: CursorProps) {
+  const { at, frame, profile, live, stage, reading, unitSystem, lines, surface } = props;
   const { colours } = useTheme();
   const x = frame.x(fromSi(at, 'chainage', unitSystem));
   const level = reading?.stage ?? valueAt(profile.chainages, stage ?? profile.bed, at);
@@ -269,7 +283,11 @@ function Cursor({ at, frame, profile, stage, reading, unitSystem, lines, surface
   return (
     <>
       <Line x1={x} x2={x} y1={10} y2={frame.bottom} stroke={colours.ink} strokeWidth={1.25} />
-      <Circle cx={x} cy={y} r={5} fill={colours.card} stroke={colours.ink} strokeWidth={2} />
+      {live ? (
+        <MovingDot live={live} x={x} y={props.y} />
+      ) : (
+        <Circle cx={x} cy={y} r={5} fill={colours.card} stroke={colours.ink} strokeWidth={2} />
+      )}
       <Reading texts={texts} box={box} from={x} />
     </>
   );

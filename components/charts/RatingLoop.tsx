@@ -1,4 +1,4 @@
-import { memo, useMemo } from 'react';
+import { memo, useCallback, useMemo } from 'react';
 import { Circle, Path } from 'react-native-svg';
 import { useTheme } from '@/components/theme/useTheme';
 import { formatNumber, formatWithUnit } from '@/shared/units/format';
@@ -8,6 +8,8 @@ import { ChartText } from './ChartText';
 import { valueAt } from './geometry/interpolate';
 import { ratingModel, type RatingSeries } from './geometry/ratingModel';
 import { tickDecimals } from './geometry/ticks';
+import type { LiveTime } from './liveTime';
+import { MovingCursor } from './MovingCursor';
 import { ValueAxis } from './ValueAxis';
 
 interface Props {
@@ -15,6 +17,8 @@ interface Props {
   series: RatingSeries;
   /** Time of the dot, s; null for none. */
   t: number | null;
+  /** Moves the dot frame by frame; `t` then only names its values. */
+  live?: LiveTime;
   unitSystem: UnitSystem;
   height?: number;
   initialWidth?: number;
@@ -35,7 +39,7 @@ export const RatingLoop = memo(function RatingLoop({ height = 220, ...props }: P
   );
 });
 
-function Drawing({ series, t, unitSystem, size }: Props & { size: ChartSize }) {
+function Drawing({ series, t, live, unitSystem, size }: Props & { size: ChartSize }) {
   const { colours } = useTheme();
   const { width, height } = size;
   const model = useMemo(
@@ -43,6 +47,14 @@ function Drawing({ series, t, unitSystem, size }: Props & { size: ChartSize }) {
     [width, height, series, unitSystem],
   );
   const { frame, flowTicks } = model;
+  const xAt = useCallback(
+    (time: number) => model.xOf(valueAt(series.times, series.flow, time)),
+    [model, series],
+  );
+  const yAt = useCallback(
+    (time: number) => model.yOf(valueAt(series.times, series.stage, time)),
+    [model, series],
+  );
   const curve = { fill: 'none', stroke: colours.water, strokeWidth: 2 } as const;
   const decimals = tickDecimals(flowTicks);
   return (
@@ -66,7 +78,10 @@ function Drawing({ series, t, unitSystem, size }: Props & { size: ChartSize }) {
           transform={`translate(${x} ${y}) rotate(${turn})`}
         />
       ))}
-      {t !== null && series.times.length ? (
+      {t !== null && live && series.times.length ? (
+        <MovingCursor live={live} xOf={xAt} yOf={yAt} />
+      ) : null}
+      {t !== null && !live && series.times.length ? (
         <Circle
           cx={model.xOf(valueAt(series.times, series.flow, t))}
           cy={model.yOf(valueAt(series.times, series.stage, t))}

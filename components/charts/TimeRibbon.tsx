@@ -1,6 +1,6 @@
-import { memo, useId, useMemo } from 'react';
+import { memo, useCallback, useId, useMemo, useRef } from 'react';
 import { StyleSheet, View } from 'react-native';
-import Svg, { Circle, ClipPath, Defs, Line, Path, Rect } from 'react-native-svg';
+import Svg, { ClipPath, Defs, Path } from 'react-native-svg';
 import { scaleLinear } from 'd3-scale';
 import { useTheme } from '@/components/theme/useTheme';
 import { ChartText } from './ChartText';
@@ -10,7 +10,9 @@ import { bandPath, linePath, project } from './geometry/paths';
 import { thinSeries } from './geometry/thinSeries';
 import { timeTicks } from './geometry/ticks';
 import { timeWords } from './geometry/timeWords';
+import type { LiveTime } from './liveTime';
 import { SliderSurface } from './SliderSurface';
+import { useEachFrame } from './useEachFrame';
 import { useWidth } from './useWidth';
 
 interface Shape {
@@ -23,7 +25,9 @@ interface Shape {
 }
 
 export interface TimeRibbonProps extends Shape {
-  /** Chosen time, s. */
+  /** Moves the hand frame by frame. */
+  live: LiveTime;
+  /** Chosen time in words and for the keys, s. */
   t: number;
   onChange: (t: number) => void;
   /** s that an arrow key moves. */
@@ -38,7 +42,7 @@ const PLOT_BOTTOM = 56;
 const INSET = 8;
 
 /** The inflow hydrograph is the slider: drag along the flood to move in time. */
-export function TimeRibbon({ t, onChange, step, startsAt, ...shape }: TimeRibbonProps) {
+export function TimeRibbon({ live, t, onChange, step, startsAt, ...shape }: TimeRibbonProps) {
   const { start = 0, end } = shape;
   const { width, measured } = useWidth(shape.initialWidth);
   const stops = useMemo(() => timeStops(start, end, step), [start, end, step]);
@@ -54,7 +58,7 @@ export function TimeRibbon({ t, onChange, step, startsAt, ...shape }: TimeRibbon
         onChange={onChange}
         onDrag={(px) => onChange(stops[nearestIndex(stops, x.invert(px))])}
       >
-        <Flood {...shape} width={width} to={t} knob />
+        <Flood {...shape} width={width} live={live} knob />
       </SliderSurface>
     </View>
   );
@@ -71,6 +75,10 @@ export interface TimeProgressProps extends Shape {
 /** The same flood filling while it computes. */
 export function TimeProgress({ reached, progress, valueText, ...shape }: TimeProgressProps) {
   const { width, measured } = useWidth(shape.initialWidth);
+  const live = useMemo(
+    () => ({ time: () => reached, subscribe: () => () => undefined }),
+    [reached],
+  );
   return (
     <View
       {...measured}
@@ -82,28 +90,41 @@ export function TimeProgress({ reached, progress, valueText, ...shape }: TimePro
       aria-valuenow={Math.round(progress * 100)}
       aria-valuetext={valueText}
     >
-      <Flood {...shape} width={width} to={reached} />
+      <Flood {...shape} width={width} live={live} />
     </View>
   );
 }
 
 interface FloodProps extends Shape {
   width: number;
-  to: number;
+  live: LiveTime;
   knob?: boolean;
 }
 
-function Flood({ inflow, start = 0, end, width, to, knob }: FloodProps) {
+/** What moves is written by ref, frame by frame. */
+const Flood = memo(function Flood({ inflow, start = 0, end, width, live, knob }: FloodProps) {
   const { colours } = useTheme();
   const passed = useId();
   const drawn = useMemo(() => floodShape(inflow, start, end, width), [inflow, start, end, width]);
+  const reached = useRef<SVGRectElement>(null);
+  const hand = useRef<SVGGElement>(null);
+  const dot = useRef<SVGCircleElement>(null);
+  const draw = useCallback(
+    (t: number) => {
+      const px = timeScale(start, end, width)(t);
+      reached.current?.setAttribute('width', Math.max(0, px).toFixed(1));
+      hand.current?.setAttribute('transform', `translate(${px.toFixed(1)} 0)`);
+      dot.current?.setAttribute('cy', drawn.yAt(t).toFixed(1));
+    },
+    [start, end, width, drawn],
+  );
+  useEachFrame(live, draw);
   if (width <= 0) return <View style={styles.box} />;
-  const px = timeScale(start, end, width)(to);
   return (
     <Svg width={width} height={HEIGHT}>
       <Defs>
         <ClipPath id={passed}>
-          <Rect x={0} y={0} width={Math.max(0, px)} height={HEIGHT} />
+          <rect ref={reached} x={0} y={0} height={HEIGHT} />
         </ClipPath>
       </Defs>
       <Path d={drawn.band} fill={colours.line} />
@@ -116,11 +137,13 @@ function Flood({ inflow, start = 0, end, width, to, knob }: FloodProps) {
         clipPath={`url(#${passed})`}
       />
       <RibbonAxis start={start} end={end} width={width} />
-      <Line x1={px} x2={px} y1={2} y2={PLOT_BOTTOM + 2} stroke={colours.ink} strokeWidth={2} />
-      {knob ? <Circle cx={px} cy={drawn.yAt(to)} r={6.5} fill={colours.ink} /> : null}
+      <g ref={hand}>
+        <line y1={2} y2={PLOT_BOTTOM + 2} stroke={colours.ink} strokeWidth={2} />
+        {knob ? <circle ref={dot} r={6.5} fill={colours.ink} /> : null}
+      </g>
     </Svg>
   );
-}
+});
 
 const RibbonAxis = memo(function RibbonAxis(props: { start: number; end: number; width: number }) {
   const { start, end, width } = props;

@@ -35,7 +35,7 @@ export function usePlaceAndTimeStore(): PlaceAndTimeStore {
     if (!focused) return undefined;
     let timer: ReturnType<typeof setTimeout> | undefined;
     const write = () => {
-      const next = writePlaceAndTime(store.get());
+      const next = writePlaceAndTime(store.shown());
       const text = `${next.at ?? ''}|${next.t ?? ''}`;
       if (text === written.current) return;
       written.current = text;
@@ -45,7 +45,7 @@ export function usePlaceAndTimeStore(): PlaceAndTimeStore {
       clearTimeout(timer);
       timer = setTimeout(write, SETTLE_MS);
     };
-    const stop = store.subscribe(later);
+    const stop = store.subscribeShown(later);
     later();
     return () => {
       stop();
@@ -56,10 +56,10 @@ export function usePlaceAndTimeStore(): PlaceAndTimeStore {
 }
 
 export const usePlace = (store: PlaceAndTimeStore): number | null =>
-  useSyncExternalStore(store.subscribe, () => store.get().at);
+  useSyncExternalStore(store.subscribeShown, () => store.shown().at);
 
 export const useTime = (store: PlaceAndTimeStore): number | null =>
-  useSyncExternalStore(store.subscribe, () => store.get().t);
+  useSyncExternalStore(store.subscribeShown, () => store.shown().t);
 
 /** Place and time with their setters, for screens where nothing plays. */
 export function usePlaceAndTime(): PlaceAndTime & Pick<PlaceAndTimeStore, 'setAt' | 'setT'> {

@@ -27,12 +27,15 @@ export function usePlayback(
       const passed = before === null ? 0 : now - before;
       before = now;
       const t = Math.min(end, (store.get().t ?? start) + passed * rate);
-      store.setT(t);
+      store.playT(t, now);
       if (t >= end) setPlaying(false);
       else frame = requestAnimationFrame(step);
     };
     frame = requestAnimationFrame(step);
-    return () => cancelAnimationFrame(frame);
+    return () => {
+      cancelAnimationFrame(frame);
+      store.settle();
+    };
   }, [isPlaying, isFocused, store, start, end, rate]);
 
   const play = () => {

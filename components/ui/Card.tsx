@@ -1,4 +1,4 @@
-import type { ReactNode } from 'react';
+import type { ReactNode, Ref } from 'react';
 import { StyleSheet, View, type StyleProp, type ViewStyle } from 'react-native';
 import { hairline, radius, space } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
@@ -10,13 +10,15 @@ interface CardProps {
   aside?: ReactNode;
   children?: ReactNode;
   style?: StyleProp<ViewStyle>;
+  ref?: Ref<View>;
 }
 
 /** A titled piece of a screen. */
-export function Card({ title, aside, children, style }: CardProps) {
+export function Card({ title, aside, children, style, ref }: CardProps) {
   const { colours } = useTheme();
   return (
     <View
+      ref={ref}
       role={title ? 'region' : undefined}
       aria-label={title}
       style={[styles.card, { backgroundColor: colours.card, borderColor: colours.line }, style]}

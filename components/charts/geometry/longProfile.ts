@@ -1,6 +1,7 @@
 import { fromSi, type UnitSystem } from '@/shared/units/units';
 import { extentOf, makeFrame, roomyExtent, type Frame } from './frame';
 import { valueTicks } from './ticks';
+import { THIN } from './waterPaths';
 
 /** What a long section is drawn from: rows of one length, m. */
 export interface LongProfile {
@@ -20,8 +21,6 @@ export interface ObservedLevel {
   tolerance: number;
 }
 
-/** Thinner water than this is drawn as dry ground, m. */
-const THIN = 0.002;
 /** Least height of the drawing, m, so that a level pool looks level. */
 const LEAST = 1;
 /** Ground below the lowest bed that is drawn, as a share of the height: room for names. */

@@ -1,4 +1,4 @@
-import { useMemo } from 'react';
+import { memo, useDeferredValue, useMemo } from 'react';
 import { LongSection } from '@/components/charts/LongSection';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { usePlace, useTime } from '@/components/charts/usePlaceAndTime';
@@ -14,6 +14,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { Run, RunSummary, RunSurface } from '@/shared/runs/types';
 import type { RaisedPoints } from '../../check/raisedPoints';
 import type { PlaceResults } from './usePlaceResults';
+import { useLiveWater } from './useLiveWater';
 import { useStructuresAt } from './useStructuresAt';
 import { useResultSurface } from './useResultSurface';
 
@@ -47,12 +48,19 @@ export function LongSectionCard(props: Props) {
   );
 }
 
-function Drawn(props: Props & { surface: RunSurface }) {
-  const { run, summary, store, place, surface, observed, raised, onPoint } = props;
+type Ready = Props & { surface: RunSurface };
+
+function Drawn(props: Ready) {
+  // The water moves by itself; its readings follow as the machine allows.
+  const t = useDeferredValue(useTime(props.store)) ?? props.summary.times.start;
+  return <AtTime {...props} t={t} />;
+}
+
+const AtTime = memo(function AtTime(props: Ready & { t: number }) {
+  const { run, summary, store, place, surface, observed, raised, onPoint, t } = props;
   const unitSystem = useUnitSystem();
   const { isWide } = useBreakpoint();
   const at = usePlace(store);
-  const t = useTime(store) ?? summary.times.start;
   const stage = useMemo(
     () => surfaceFrame(surface, t, new Float32Array(surface.places)),
     [surface, t],
@@ -62,6 +70,7 @@ function Drawn(props: Props & { surface: RunSurface }) {
     isCurrent && series && peaks
       ? { stage: valueAt(series.times, series.stage, t), peakStage: peaks.peakStage }
       : null;
+  const live = useLiveWater(store, summary, surface, at, isCurrent ? series : null);
   const standing = useStructuresAt(run.id, summary.structures, t);
   const moment = momentWords(t, run.duration, run.startsAt);
   const legend = [
@@ -78,6 +87,7 @@ function Drawn(props: Props & { surface: RunSurface }) {
     >
       <LongSection
         profile={surface}
+        live={live}
         stage={stage}
         sections={summary.sections}
         stations={summary.stations}
@@ -96,4 +106,4 @@ function Drawn(props: Props & { surface: RunSurface }) {
       />
     </Card>
   );
-}
+});

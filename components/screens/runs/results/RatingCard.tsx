@@ -4,7 +4,7 @@ import { valueAt } from '@/components/charts/geometry/interpolate';
 import { shortTime } from '@/components/charts/geometry/timeWords';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
 import { RatingLoop } from '@/components/charts/RatingLoop';
-import { useTime } from '@/components/charts/usePlaceAndTime';
+import { useTimeInView } from '@/components/charts/useTimeInView';
 import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
@@ -14,6 +14,7 @@ import { useUnitSystem } from '@/components/ui/unitSystem';
 import type { RunSeries } from '@/shared/runs/types';
 import { formatQuantity, formatWithUnit } from '@/shared/units/format';
 import { UNITS, type UnitSystem } from '@/shared/units/units';
+import { useLiveTime } from './useLiveTime';
 
 interface Props {
   place: string;
@@ -27,7 +28,9 @@ const ROWS = 150;
 /** Stage against flow at the chosen place; the table behind it one press away. */
 export function RatingCard({ place, series, store }: Props) {
   const system = useUnitSystem();
-  const t = useDeferredValue(useTime(store));
+  const { watch, t: moment } = useTimeInView(store);
+  const t = useDeferredValue(moment);
+  const live = useLiveTime(store, 0);
   const [asTable, setAsTable] = useState(false);
   const { times, stage, flow } = series;
   const loop = useMemo(() => ({ times, stage, flow }), [times, stage, flow]);
@@ -35,6 +38,7 @@ export function RatingCard({ place, series, store }: Props) {
   const span = times.length ? times[times.length - 1] - times[0] : 0;
   return (
     <Card
+      ref={watch}
       title="Stage against flow"
       style={styles.card}
       aside={
@@ -58,7 +62,7 @@ export function RatingCard({ place, series, store }: Props) {
           maxHeight={280}
         />
       ) : (
-        <RatingLoop label={name} series={loop} t={t} unitSystem={system} />
+        <RatingLoop label={name} series={loop} t={t} live={live} unitSystem={system} />
       )}
       <Txt variant="small" tone="soft">
         {t !== null && times.length

@@ -1,7 +1,9 @@
-import { memo, useDeferredValue, useMemo } from 'react';
+import { memo, useDeferredValue, useMemo, type Ref } from 'react';
+import type { View } from 'react-native';
 import { CrossSection } from '@/components/charts/CrossSection';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
-import { usePlace, useTime } from '@/components/charts/usePlaceAndTime';
+import { usePlace } from '@/components/charts/usePlaceAndTime';
+import { useTimeInView } from '@/components/charts/useTimeInView';
 import { nearestIndex } from '@/components/charts/geometry/interpolate';
 import { sectionWater, wetWidth } from '@/components/charts/geometry/sectionWater';
 import { surfaceLevel } from '@/components/charts/geometry/surfaceFrame';
@@ -25,12 +27,14 @@ interface Props {
 export function SectionNow({ run, summary, store, sections, surface }: Props) {
   const place = usePlace(store) ?? sections[0].chainage;
   // As with the curves: while the flood plays, the long section goes first.
-  const t = useDeferredValue(useTime(store)) ?? summary.times.start;
+  const { watch, t: moment } = useTimeInView(store);
+  const t = useDeferredValue(moment) ?? summary.times.start;
   const chainages = useMemo(() => sections.map(({ chainage }) => chainage), [sections]);
   const section = sections[nearestIndex(chainages, place)];
   const stage = surfaceLevel(surface, t, section.chainage);
   return (
     <Drawn
+      ref={watch}
       section={section}
       isHere={Math.abs(section.chainage - place) < 0.005}
       stage={stage}
@@ -41,6 +45,7 @@ export function SectionNow({ run, summary, store, sections, surface }: Props) {
 }
 
 interface DrawnProps {
+  ref: Ref<View>;
   section: RunSection;
   isHere: boolean;
   stage: number;
@@ -48,7 +53,7 @@ interface DrawnProps {
   moment: string;
 }
 
-const Drawn = memo(function Drawn({ section, isHere, stage, peakStage, moment }: DrawnProps) {
+const Drawn = memo(function Drawn({ ref, section, isHere, stage, peakStage, moment }: DrawnProps) {
   const unitSystem = useUnitSystem();
   const where = `${section.id}, ${formatWithUnit(section.chainage, 'chainage', unitSystem)}`;
   const depth = stage - Math.min(...section.points.map(([, ground]) => ground));
@@ -59,7 +64,7 @@ const Drawn = memo(function Drawn({ section, isHere, stage, peakStage, moment }:
     `${formatWithUnit(width, 'length', unitSystem)} wide at ${moment}.`,
   ];
   return (
-    <Card title="Section" aside={isHere ? where : `nearest: ${where}`}>
+    <Card ref={ref} title="Section" aside={isHere ? where : `nearest: ${where}`}>
       <CrossSection
         label={`Section ${where}, ${moment} after start`}
         {...{ section, stage, peakStage, unitSystem }}

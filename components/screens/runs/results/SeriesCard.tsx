@@ -1,7 +1,7 @@
 import { useDeferredValue, useMemo, useState } from 'react';
 import { Hydrograph, type HydrographProps } from '@/components/charts/Hydrograph';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
-import { useTime } from '@/components/charts/usePlaceAndTime';
+import { useTimeInView } from '@/components/charts/useTimeInView';
 import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { Txt } from '@/components/ui/Txt';
@@ -10,6 +10,7 @@ import { StyleSheet } from 'react-native';
 import { space } from '@/components/theme/tokens';
 import { UNITS } from '@/shared/units/units';
 import { SeriesTable } from './SeriesTable';
+import { useLiveTime } from './useLiveTime';
 
 interface Props extends Pick<
   HydrographProps,
@@ -38,7 +39,9 @@ export function SeriesCard(props: Props) {
   const { levels, observed, points, onPoint } = props;
   const unitSystem = useUnitSystem();
   // While the flood plays, the long section goes first; the curves follow as the machine allows.
-  const t = useDeferredValue(useTime(store));
+  const { watch, t: moment } = useTimeInView(store);
+  const t = useDeferredValue(moment);
+  const live = useLiveTime(store, 0);
   const [asTable, setAsTable] = useState(false);
   const unit = UNITS[unitSystem][quantity].symbol;
   const name = `${title} at ${place}`;
@@ -48,6 +51,7 @@ export function SeriesCard(props: Props) {
   );
   return (
     <Card
+      ref={watch}
       title={title}
       style={styles.card}
       aside={
@@ -67,7 +71,7 @@ export function SeriesCard(props: Props) {
       ) : (
         <Hydrograph
           label={name}
-          {...{ quantity, series, compare, peak, levels, isGround, t, unitSystem }}
+          {...{ quantity, series, compare, peak, levels, isGround, t, live, unitSystem }}
           {...{ observed, points, onPoint }}
           onChange={store.setT}
         />

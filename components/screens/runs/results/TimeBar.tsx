@@ -10,6 +10,7 @@ import { useBreakpoint } from '@/components/theme/useBreakpoint';
 import { Button } from '@/components/ui/Button';
 import { Txt } from '@/components/ui/Txt';
 import type { Run, RunSummary } from '@/shared/runs/types';
+import { useLiveTime } from './useLiveTime';
 
 interface Props {
   run: Run;
@@ -27,6 +28,7 @@ export function TimeBar({ run, summary, store }: Props) {
   const t = useTime(store) ?? start;
   const [pace, setPace] = useState(0);
   const { isPlaying, play, pause } = usePlayback(store, { start, end }, PACES[pace]);
+  const live = useLiveTime(store, start);
   const move = (to: number) => {
     pause();
     store.setT(to);
@@ -52,6 +54,7 @@ export function TimeBar({ run, summary, store }: Props) {
           inflow={run.inflow}
           start={start}
           end={end}
+          live={live}
           t={t}
           onChange={move}
           step={interval > 0 ? interval : (end - start) / 100}
