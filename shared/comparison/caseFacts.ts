@@ -2,6 +2,7 @@ import { CASE_DEFAULTS, type CaseFile, type FlowSeries } from '../case/caseFile'
 import { formatDuration, formatNumber, formatSetting, formatWithUnit } from '../units/format';
 import type { Quantity, UnitSystem } from '../units/units';
 import { factsOfSection } from './sectionFacts';
+import { factsOfStructure } from './structureFacts';
 
 /** One thing that goes into a run, as it is said, and what is behind the words, to tell whether two are the same. */
 export interface CaseFact {
@@ -23,7 +24,7 @@ export function caseFacts(caseFile: CaseFile, system: UnitSystem): CaseFact[] {
     ...initialFacts(caseFile, say),
     ...roughnessFacts(caseFile, say),
     ...lossFacts(caseFile, say),
-    ...structureFacts(caseFile),
+    ...caseFile.structures.flatMap((structure) => factsOfStructure(structure, say)),
     ...numericsFacts(caseFile, say, system),
     ...caseFile.sections.flatMap((section) => factsOfSection(section, say)),
   ];
@@ -175,24 +176,6 @@ const lossFacts = ({ localLosses = [] }: CaseFile, say: Say): CaseFact[] =>
     const text = `${contraction} and ${expansion}, ${say(from, 'chainage')} to ${say(to, 'chainage')}`;
     return fact(`Local loss ${i + 1}`, 'contraction and expansion', text, loss);
   });
-
-/** Field by field, so that a changed crest or opening shows; numbers are in m, s and m³/s as in the case file. */
-function structureFacts({ structures }: CaseFile): CaseFact[] {
-  return structures.flatMap((structure) =>
-    Object.entries(structure)
-      .filter(([key]) => key !== 'id' && key !== 'note')
-      .map(([key, value]) => fact(`Structure ${structure.id}`, words(key), short(value), value)),
-  );
-}
-
-/** `crestWidth` as `crest width`. */
-const words = (key: string) => key.replaceAll(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
-
-const MOST_LETTERS = 60;
-function short(value: unknown): string {
-  const text = typeof value === 'string' ? value : JSON.stringify(value);
-  return text.length > MOST_LETTERS ? `${text.slice(0, MOST_LETTERS)}…` : text;
-}
 
 function numericsFacts({ numerics, gravity }: CaseFile, say: Say, system: UnitSystem): CaseFact[] {
   const filled = { ...CASE_DEFAULTS, ...numerics };

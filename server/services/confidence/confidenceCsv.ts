@@ -61,7 +61,10 @@ function convergenceLines({ grids, stations, along }: ConvergenceResult, s: Scal
     `chainage (${s.m})`,
     'quantity',
     'unit',
-    ...grids.map(({ cellSize }, k) => `grid ${k + 1}: ${s.length(cellSize) ?? 'failed'} ${s.m}`),
+    ...grids.map(
+      ({ cellSize }, k) =>
+        `grid ${k + 1}: ${cellSize === null ? 'failed' : `${Number(s.length(cellSize)!.toPrecision(6))} ${s.m}`}`,
+    ),
     'observed order (-)',
     'extrapolated',
     'half width of the band',

@@ -17,7 +17,7 @@ export function convergencePart(sheet: Sheet, result: ConvergenceResult, system:
       : `Observed order of the peak stage ${formatNumber(along.order, 1)} (middle of the places).`;
   paragraph(
     sheet,
-    `The finest two grids differ in peak stage by at most ${formatNumber(fromSi(difference, 'depth', system), 3)} ${UNITS[system].depth.symbol}, at chainage ${unit(widest.chainage, 'chainage')}; 0.05 m is good (common practice). ${order}`,
+    `The finest two grids differ in peak stage by at most ${formatNumber(fromSi(difference, 'depth', system), 3)} ${UNITS[system].depth.symbol}, at chainage ${unit(widest.chainage, 'chainage')}; ${unit(0.05, 'depth')} is good (common practice). ${order}`,
   );
   const size = (cellSize: number | null) =>
     cellSize === null ? 'failed' : unit(cellSize, 'length');
