@@ -15,7 +15,7 @@ import {
 } from './geometry/hydrographModel';
 import type { NamedLevel } from './geometry/levelLines';
 import { nearestIndex, valueAt } from './geometry/interpolate';
-import type { Polyline } from './geometry/placeLabel';
+import { overlap, type Polyline } from './geometry/placeLabel';
 import { PIN, pointPins, type Pin } from './geometry/pointPins';
 import { shortTime } from './geometry/timeWords';
 import type { LiveTime } from './liveTime';
@@ -272,7 +272,9 @@ function Marks({
           strokeWidth={1.5}
         />
       ) : null}
-      {cursor && cursorBox ? <Reading texts={cursorText} box={cursorBox} from={cursor.x} /> : null}
+      {cursor && cursorBox && !(peakBox && overlap(cursorBox, peakBox)) ? (
+        <Reading texts={cursorText} box={cursorBox} from={cursor.x} />
+      ) : null}
     </>
   );
 }

@@ -86,7 +86,7 @@ const within = (box: Box, bounds: Box) =>
 const covers = (box: Box, point: { x: number; y: number }) =>
   overlap(box, { x: point.x - 6, y: point.y - 6, width: 12, height: 12 });
 
-const overlap = (a: Box, b: Box) =>
+export const overlap = (a: Box, b: Box): boolean =>
   a.x < b.x + b.width && b.x < a.x + a.width && a.y < b.y + b.height && b.y < a.y + a.height;
 
 const clamp = (box: Box, bounds: Box): Box => ({

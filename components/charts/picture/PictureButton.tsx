@@ -5,6 +5,7 @@ import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
 import { Txt } from '@/components/ui/Txt';
 import { drawPng } from './drawPng';
+import { withFonts } from './embeddedFonts';
 import type { PictureSource } from './pictureContext';
 import { legendOf } from './placeLegend';
 import { pictureName, pictureTitle } from './pictureName';
@@ -29,13 +30,14 @@ export function PictureButton({ label, unit, source, box }: Props) {
     if (!found || !drawing) return;
     setFailure(null);
     try {
-      const picture = pictureSvg(drawing, {
+      const drawn = pictureSvg(drawing, {
         title,
         unit,
         label,
         source,
         legend: legendOf(found.querySelector('[role="list"]')),
       });
+      const picture = await withFonts(drawn);
       const blob =
         kind === 'png'
           ? await drawPng(picture)

@@ -1,14 +1,12 @@
-import { embeddedFonts } from './embeddedFonts';
 import type { Picture } from './pictureSvg';
 
 /** Sharp on paper and on dense screens. */
 const DENSITY = 2;
 
-/** The picture as PNG at twice its size, in the product's font. */
+/** The picture as PNG at twice its size; it draws with the fonts that the picture carries. */
 export async function drawPng({ svg, width, height }: Picture): Promise<Blob> {
-  const withFonts = svg.replace(/<desc/, `<style>${await embeddedFonts()}</style><desc`);
   const image = new Image(width * DENSITY, height * DENSITY);
-  image.src = `data:image/svg+xml;charset=utf-8,${encodeURIComponent(withFonts)}`;
+  image.src = `data:image/svg+xml;charset=utf-8,${encodeURIComponent(svg)}`;
   await image.decode();
   const canvas = document.createElement('canvas');
   canvas.width = Math.round(width * DENSITY);

@@ -1,7 +1,14 @@
 import { fonts } from '@/components/theme/tokens';
+import type { Picture } from './pictureSvg';
 
-/** An image sees no font of the page: rules that carry the two weights of the drawings within them. */
-export async function embeddedFonts(): Promise<string> {
+/** A picture sees no font of the page and is opened where there is none: it carries the two weights of the drawings. */
+export async function withFonts(picture: Picture): Promise<Picture> {
+  const rules = await embeddedFonts();
+  const svg = picture.svg.replace('<desc', () => `<style>${rules}</style><desc`);
+  return { ...picture, svg };
+}
+
+async function embeddedFonts(): Promise<string> {
   const wanted: [string, number][] = [
     [fonts.regular, 400],
     [fonts.semibold, 600],

@@ -40,7 +40,7 @@ export function pictureSvg(
   const keys = placeLegend(legend, inner.width, KEY.size);
   const top = PAD + head.length * TITLE.line + 4;
   const keysTop = top + inner.height + 8;
-  const footTop = keysTop + keys.lines * KEY.line;
+  const footTop = keysTop + (keys.lines > 0 ? keys.lines * KEY.line + 6 : 0);
   const height = footTop + foot.length * FOOT.line + PAD;
   const { light } = COLOURS;
 
