@@ -59,10 +59,9 @@ export function steadyState(
     case 'stage': {
       const wanted = createSeries(upstream.times, upstream.stages)(0);
       const still = stateFor(0);
-      const end = endOfPool(wanted);
-      if (end !== null && !still.flows.some((q) => q > 0)) {
-        for (let i = 0; i <= end; i++) still.stages[i] = Math.max(bed[i], wanted);
-        return still;
+      if (!still.flows.some((q) => q > 0)) {
+        const pools = still.stages.slice();
+        if (levelPools(pools, wanted)) return { ...still, stages: pools };
       }
       if (still.stages[0] >= wanted) return still;
       const inflow = risingRoot((q) => stateFor(q).stages[0] - wanted, 0, 1);
@@ -70,12 +69,21 @@ export function steadyState(
     }
   }
 
-  /** The last section before what holds water at that stage back: a structure or ground; null where none does. */
-  function endOfPool(level: number): number | null {
-    for (let i = 0; i <= n; i++) {
-      if (structures?.keepsBack(i, level) || bed[i + 1] >= level) return i;
+  /**
+   * Levels still water with the stage upstream as far as a structure or ground holds it back, and lets what stands higher
+   * beyond run back over that. False where nothing holds it back.
+   */
+  function levelPools(stages: Float64Array, level: number): boolean {
+    let ceiling = level;
+    let isHeld = false;
+    for (let i = 0; i <= n + 1; i++) {
+      const stage = isHeld ? Math.min(stages[i], ceiling) : level;
+      stages[i] = Math.max(bed[i], stage);
+      const barrier = Math.max(structures?.keepsBack(i) ?? -Infinity, bed[i + 1] ?? -Infinity);
+      if (barrier >= level) isHeld = true;
+      ceiling = Math.max(ceiling, barrier);
     }
-    return null;
+    return isHeld;
   }
 
   function outletStage(flow: number): number {

@@ -44,8 +44,8 @@ export interface StructureSet {
   holdsUp(flows: Float64Array, stages: Float64Array): Structure | null;
   /** Whether structures stand at a face between cells */
   holds(face: number): boolean;
-  /** Whether still water at a stage (m) stays behind the structures at a face between cells */
-  keepsBack(face: number, stage: number): boolean;
+  /** Stage (m) up to which still water stays behind the structures at a face between cells; -Infinity without any */
+  keepsBack(face: number): number;
   /** Release (m³/s) of the reservoir at the start for a stage (m) below it */
   firstRelease(stageBelow: number): number;
 }
@@ -168,17 +168,18 @@ export function createStructureSet(
       return group ? group.structures[0] : null;
     },
     holds: (face) => faces.some((one) => one.face === face),
-    keepsBack(face, level) {
+    keepsBack(face) {
       const group = faces.find((one) => one.face === face);
-      return group !== undefined && lowestOf(group.structures) >= level;
+      return group ? lowestOf(group.structures) : -Infinity;
     },
     firstRelease(stageBelow) {
       if (!pool) return 0;
       const eta = pool.stage();
+      if (stageBelow >= eta) return 0;
       return steadyFlow(atHead, {
         stageUp: eta,
         energyUp: eta,
-        stageDown: Math.min(eta, stageBelow),
+        stageDown: stageBelow,
         cellUp: 0,
         cellDown: 1,
         isForward: true,

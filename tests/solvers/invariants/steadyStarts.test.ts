@@ -117,6 +117,29 @@ describe('a steady start before what is shut', () => {
     expect(Math.max(...cells.peakFlow.map(Math.abs))).toBeLessThan(1e-9);
   });
 
+  it('lets no pool beyond stand higher than it would run back over', () => {
+    const crestAt = (chainage: number, level: number): StructureInput => ({
+      ...weir,
+      id: `weir ${chainage}`,
+      chainage,
+      crest: [
+        [0, level],
+        [20, level],
+      ],
+    });
+    const { cells } = routeChecked(
+      channel([crestAt(400, 4), crestAt(800, 6)], {
+        upstream: { kind: 'stage', ...steadyStage(3) },
+        downstream: { kind: 'stage', ...steadyStage(1) },
+        initial: { kind: 'steady' },
+        numerics: brief,
+      }),
+    );
+    cells.chainage.forEach((x, i) =>
+      expect(cells.initialStage[i]).toBeCloseTo(x < 400 ? 3 : x < 800 ? 4 : 1, 9),
+    );
+  });
+
   it('begins empty where nothing comes', () => {
     const { cells } = routeChecked(
       channel([gate], {
