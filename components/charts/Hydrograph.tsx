@@ -16,7 +16,7 @@ import {
 import type { NamedLevel } from './geometry/levelLines';
 import { nearestIndex, valueAt } from './geometry/interpolate';
 import { overlap, type Polyline } from './geometry/placeLabel';
-import { PIN, pointPins, type Pin } from './geometry/pointPins';
+import { pinBox, pointPins, type Pin } from './geometry/pointPins';
 import { shortTime } from './geometry/timeWords';
 import type { LiveTime } from './liveTime';
 import { MovingCursor } from './MovingCursor';
@@ -230,7 +230,7 @@ function Marks({
   const dots = [
     ...[top, cursor].flatMap((dot) => (dot ? [around(dot)] : [])),
     ...model.levels.flatMap(({ box }) => (box ? [box] : [])),
-    ...pins.map(({ x, y }) => ({ x: x - PIN / 2, y: y - PIN / 2, width: PIN, height: PIN })),
+    ...pins.map(pinBox),
   ];
   const cursorBox =
     cursor && apart ? readingBox(cursorText, cursor, bounds, { lines, soft, taken: dots }) : null;

@@ -17,7 +17,7 @@ import {
 } from './geometry/longProfile';
 import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
-import { pointPins } from './geometry/pointPins';
+import { pinBox, pointPins, type Pin } from './geometry/pointPins';
 import { LevelMarks } from './LevelMarks';
 import { MovingDot, MovingWater, type LiveWater } from './MovingWater';
 import { ObservedMarks } from './ObservedMarks';
@@ -188,7 +188,6 @@ function Drawing(props: Sized) {
       <LevelMarks {...{ levels, frame, unitSystem }} />
       <ObservedMarks {...{ observed, frame, unitSystem }} />
       <StructureMarks {...{ structures, profile, frame, unitSystem, bottoms, words }} />
-      <PointPins {...{ pins, points }} />
       <PlaceAxis frame={frame} ticks={frame.xTicks} />
       <ChartText x={frame.left} y={14}>
         {`${stage || profile.peakStage ? 'stage' : 'elevation'}, ${UNITS[unitSystem].elevation.symbol} above datum`}
@@ -198,11 +197,12 @@ function Drawing(props: Sized) {
       </ChartText>
       {at === null ? null : (
         <Cursor
-          {...{ frame, profile, live, y, stage, reading, at, unitSystem }}
+          {...{ frame, profile, live, y, stage, reading, at, unitSystem, pins }}
           lines={lines}
           surface={surface}
         />
       )}
+      <PointPins {...{ pins, points }} />
     </>
   );
 }
@@ -260,10 +260,11 @@ interface CursorProps extends ReadingOf {
   frame: ReturnType<typeof longSectionFrame>;
   lines: Lines;
   surface: Float64Array | null;
+  pins: readonly Pin[];
 }
 
 function Cursor(props: CursorProps) {
-  const { at, frame, profile, live, stage, reading, unitSystem, lines, surface } = props;
+  const { at, frame, profile, live, stage, reading, unitSystem, lines, surface, pins } = props;
   const { colours } = useTheme();
   const x = frame.x(fromSi(at, 'chainage', unitSystem));
   const level = reading?.stage ?? valueAt(profile.chainages, stage ?? profile.bed, at);
@@ -279,7 +280,8 @@ function Cursor(props: CursorProps) {
     row ? [{ x: lines.x, y: row }] : [],
   );
   const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };
-  const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken: [axisTitle] });
+  const taken = [axisTitle, ...pins.map(pinBox)];
+  const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken });
   return (
     <>
       <Line x1={x} x2={x} y1={10} y2={frame.bottom} stroke={colours.ink} strokeWidth={1.25} />

@@ -1,4 +1,5 @@
 import type { Frame } from './frame';
+import type { Box } from './placeLabel';
 
 /** A raised point and where it points to, px. */
 export interface Pinned {
@@ -20,6 +21,14 @@ export interface Pin {
 export const PIN = 18;
 /** From box to box and from a box to its foot: what a finger presses must not lie on another. */
 const STEP = 24;
+
+/** What a label keeps clear of. */
+export const pinBox = ({ x, y }: Pin): Box => ({
+  x: x - PIN / 2,
+  y: y - PIN / 2,
+  width: PIN,
+  height: PIN,
+});
 
 /**
  * Boxes above the places that they point to, within the plot. Where two would lie on each other the later one stands

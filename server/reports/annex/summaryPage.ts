@@ -63,7 +63,7 @@ export function summaryPage(
 function ofReport(sheet: Sheet, cases: readonly AnnexCase[], routedBy: string): void {
   paragraph(
     sheet,
-    'The annex tells of the solver and not of this run: a signature of the report above is on the run.',
+    'The annex tells of the solver and not of this run: what is signed in the report above is the run.',
   );
   const others = cases.filter(({ summary }) => summary.solver !== routedBy);
   if (others.length > 0)

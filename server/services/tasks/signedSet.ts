@@ -10,5 +10,5 @@ export const RUN_OF_SET = {
 /** Why nothing of a set is computed again once its run is signed; null before. Needs `RUN_OF_SET`. */
 export const signedSet = ({ run }: TaskSetModel): string | null =>
   run?.signOff
-    ? `Run ${run.number} is signed, and what was known of it then stays as it is. Ask for a new set instead.`
+    ? `Run ${run.number} is signed: what was asked of it is not computed again. Ask for a new set instead.`
     : null;

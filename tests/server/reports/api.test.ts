@@ -93,7 +93,7 @@ it('carries the published cases as its last pages where that is asked for, and i
   after.forEach((page, k) => expect(page).toContain(`${k + 1} of ${after.length}`));
   const annex = after.slice(before.length);
   expect(annex[0]).toContain('Annex: published cases');
-  expect(annex[0]).toContain('a signature of the report above is on the run');
+  expect(annex[0]).toContain('what is signed in the report above is the run');
   // What stands before it is the report as it is without.
   const text = after.slice(0, before.length).join(' ');
   expect(text.replace(/\d+ of \d+/g, '')).toBe(before.join(' ').replace(/\d+ of \d+/g, ''));
