@@ -8,41 +8,17 @@ import type { ScenarioModel } from '../server/models/Scenario';
 import type { StudyModel } from '../server/models/Study';
 import type { UserModel } from '../server/models/User';
 import { DEMO_ACCOUNTS, DEMO_FIRM, DEMO_PASSWORD, OTHER_FIRM, type DemoAccount } from './accounts';
-import { OBSERVED_GAUGE, OBSERVED_MARKS } from './observations';
+import { person } from './checks';
+import { seedParts } from './parts';
 import { lowerVeshall } from './reaches/lowerVeshall';
 import { quenlowValley } from './reaches/quenlowValley';
 import { damFailure, designFlood, gradualFailure, largerFlood } from './scenarios';
 import { faultySurveyFile, surveyFile } from './surveyFiles';
+import { VESHALL, VESHALL_STATIONS } from './veshall';
 
 export { seedChecks } from './checks';
 export { seedConfidence } from './confidence';
 
-const VESHALL: StudyBody = {
-  title: 'Lower Veshall at Tornick',
-  clientName: 'Tornick Town Council',
-  place: 'Tornick',
-  verticalDatum: 'Veshall levelling datum 1974',
-  coordinateSystem: 'Veshall valley grid, metres',
-  unitSystem: 'metric',
-  purpose:
-    'Flood levels and times at Tornick bridge, Sallow Mill and the gauge at Ebbick for the 1 in 100 year flood.',
-};
-const VESHALL_STATIONS: StationBody[] = [
-  {
-    name: 'Tornick bridge',
-    chainage: 10_600,
-    levels: [
-      { kind: 'soffit', level: 41.6, note: 'Middle arch' },
-      { kind: 'road', level: 42.9, note: '' },
-    ],
-  },
-  {
-    name: 'Sallow Mill',
-    chainage: 13_100,
-    levels: [{ kind: 'floor', level: 38.3, note: 'Miller’s house' }],
-  },
-  { name: 'Gauge at Ebbick', chainage: 17_400 },
-];
 const QUENLOW: StudyBody = {
   title: 'Quenlow dam, sudden failure',
   clientName: 'Quenlow Water Board',
@@ -72,15 +48,24 @@ const OSTRAND: StudyBody = {
 
 /**
  * Loads the demo data through the real services, and puts its runs into the real queue. Idempotent: what an interrupted start
- * has left is completed, and where all is there nothing is touched, so that what people change or delete stays so.
+ * has left is completed, and where all is there nothing is touched, so that what people change or delete stays so. What is
+ * newer than the data directory is added once.
  */
 export async function seedDemo(services: Services): Promise<void> {
   const { models } = services;
   // Made last: where it stands, everything does.
-  if (await models.Study.findOne({ where: { title: OSTRAND.title } })) return;
+  if (!(await models.Study.findOne({ where: { title: OSTRAND.title } }))) await seedBase(services);
+  const modeller = await person(services, 'Ines Corrow');
+  const study = await models.Study.findOne({
+    where: { title: VESHALL.title, ...(modeller && { firmId: modeller.firmId }) },
+  });
+  if (modeller && study) await seedParts(services, study, modeller);
+}
+
+async function seedBase(services: Services): Promise<void> {
   const users = await seedAccounts(services);
-  const person = (name: string) => users.get(name)!;
-  const [modeller, surveyor, client] = ['Ines Corrow', 'Dov Hallam', 'Maud Ferrin'].map(person);
+  const known = (name: string) => users.get(name)!;
+  const [modeller, surveyor, client] = ['Ines Corrow', 'Dov Hallam', 'Maud Ferrin'].map(known);
 
   const veshall = await seedStudy(services, modeller, VESHALL, VESHALL_STATIONS);
   await share(services, veshall, surveyor, 'surveyor');
@@ -91,7 +76,6 @@ export async function seedDemo(services: Services): Promise<void> {
   const larger = await seedScenario(services, veshall, surveyor, modeller, river, largerFlood);
   await seedRun(services, modeller, flood);
   await seedRun(services, modeller, larger);
-  await seedObservations(services, veshall);
 
   const quenlow = await seedStudy(services, modeller, QUENLOW, QUENLOW_STATIONS);
   await share(services, quenlow, surveyor, 'surveyor');
@@ -101,7 +85,7 @@ export async function seedDemo(services: Services): Promise<void> {
   const piping = await seedScenario(services, quenlow, surveyor, modeller, valley, gradualFailure);
   await seedRun(services, modeller, piping);
 
-  await seedStudy(services, person('Lena Ostrand'), OSTRAND, []);
+  await seedStudy(services, known('Lena Ostrand'), OSTRAND, []);
 }
 
 async function seedAccounts({ models }: Services): Promise<Map<string, UserModel>> {
@@ -186,7 +170,10 @@ async function seedScenario(
     });
     await surveys.decide(revision, modeller, { decision: 'accepted', remarks: '' });
   }
-  const reach = await models.Reach.findOne({ where: { studyId }, rejectOnEmpty: true });
+  const reach = await models.Reach.findOne({
+    where: { studyId, copiedFrom: null },
+    rejectOnEmpty: true,
+  });
   const body = bodyOf(reach.id, sections);
   const known = await models.Scenario.findOne({
     where: { studyId, name: body.name },
@@ -196,15 +183,6 @@ async function seedScenario(
     known ?? (await scenarios.create(study, modeller, { name: body.name, reachId: reach.id }));
   if (scenario.version > 1) return scenario;
   return scenarios.save(scenario, modeller, { version: scenario.version, body });
-}
-
-/** What an earlier flood left behind, where the study has nothing observed yet. */
-async function seedObservations({ models, observations }: Services, study: StudyModel) {
-  const where = { studyId: study.id };
-  if ((await models.Mark.count({ where })) === 0)
-    await observations.marks.add(study, OBSERVED_MARKS);
-  if ((await models.Gauge.count({ where })) === 0)
-    await observations.gauges.create(study, OBSERVED_GAUGE);
 }
 
 async function seedRun({ models, runs }: Services, modeller: UserModel, scenario: ScenarioModel) {

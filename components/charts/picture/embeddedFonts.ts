@@ -28,9 +28,10 @@ async function embeddedFonts(): Promise<string> {
 function addressOf(family: string): string | null {
   for (const sheet of document.styleSheets)
     for (const rule of sheet.cssRules) {
-      if (!(rule instanceof CSSFontFaceRule)) continue;
-      if (!rule.style.getPropertyValue('font-family').includes(family)) continue;
-      const found = rule.style.getPropertyValue('src').match(/url\(["']?([^"')]+)/);
+      if (!rule.cssText.startsWith('@font-face')) continue;
+      const { style } = rule as CSSFontFaceRule;
+      if (!style.getPropertyValue('font-family').includes(family)) continue;
+      const found = style.getPropertyValue('src').match(/url\(["']?([^"')]+)/);
       if (found) return new URL(found[1], sheet.href ?? document.baseURI).href;
     }
   return null;
