@@ -104,15 +104,19 @@ function useModel({ size, series, compare = null, quantity, unitSystem, ...more 
 }
 
 /** Boxes of the points above the curve at their moments. */
-function usePins({ series, points = NONE }: Sized, { frame, yOf }: HydrographModel) {
+function usePins({ series, points = NONE }: Sized, { frame, yOf, levels }: HydrographModel) {
   return useMemo(() => {
     const pinned = points.map(({ id, time }) => ({
       id,
       x: frame.x(time),
       y: yOf(valueAt(series.times, series.values, time)),
     }));
-    return pointPins(pinned, frame);
-  }, [series, points, frame, yOf]);
+    return pointPins(
+      pinned,
+      frame,
+      levels.flatMap(({ box }) => box ?? []),
+    );
+  }, [series, points, frame, yOf, levels]);
 }
 
 function Presses(props: Sized & Required<Pick<HydrographProps, 'points' | 'onPoint'>>) {

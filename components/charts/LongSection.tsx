@@ -17,7 +17,7 @@ import {
 } from './geometry/longProfile';
 import { bandPath, linePath, project } from './geometry/paths';
 import { placesAlong } from './geometry/placesAlong';
-import { pinBox, pointPins, type Pin } from './geometry/pointPins';
+import { PIN, pinBox, pointPins, type Pin } from './geometry/pointPins';
 import { LevelMarks } from './LevelMarks';
 import { MovingDot, MovingWater, type LiveWater } from './MovingWater';
 import { ObservedMarks } from './ObservedMarks';
@@ -281,7 +281,9 @@ function Cursor(props: CursorProps) {
   );
   const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };
   const taken = [axisTitle, ...pins.map(pinBox)];
-  const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken });
+  // Beside the numbers of points above the place, not below the ground for their sake.
+  const gap = pins.some((pin) => Math.abs(pin.x - x) < PIN) ? PIN / 2 + 6 : undefined;
+  const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken }, gap);
   return (
     <>
       <Line x1={x} x2={x} y1={10} y2={frame.bottom} stroke={colours.ink} strokeWidth={1.25} />

@@ -21,11 +21,14 @@ interface Props {
 /** Numbers in boxes with a stem to what they speak of: full while they wait, an outline once they are closed. */
 export function PointPins({ pins, points }: Props) {
   const { colours } = useTheme();
-  return pins.map(({ id, x, y, footX, footY }) => {
+  const stems = pins.map(({ id, x, y, footX, footY }) => (
+    <Line key={id} x1={x} y1={y} x2={footX} y2={footY} stroke={colours.ink} strokeWidth={1} />
+  ));
+  // Over all stems, so that none runs through a number.
+  const boxes = pins.map(({ id, x, y }) => {
     const { number, isClosed } = points.find((point) => point.id === id)!;
     return (
       <G key={id}>
-        <Line x1={x} y1={y} x2={footX} y2={footY} stroke={colours.ink} strokeWidth={1} />
         <Rect
           x={x - PIN / 2}
           y={y - PIN / 2}
@@ -42,4 +45,10 @@ export function PointPins({ pins, points }: Props) {
       </G>
     );
   });
+  return (
+    <>
+      {stems}
+      {boxes}
+    </>
+  );
 }

@@ -15,12 +15,13 @@ export function readingBox(
   point: { x: number; y: number },
   bounds: Box,
   obstacles: Obstacles,
+  gap?: number,
 ): Box {
   const size = {
     width: Math.max(...texts.map(({ text }) => textWidth(text, CHART_TEXT_SIZE))),
     height: texts.length * LINE,
   };
-  return placeLabel(point, size, bounds, obstacles);
+  return placeLabel(point, size, bounds, obstacles, gap);
 }
 
 /** One or more lines of a reading in the box that was found for them, written from the side of their point. */

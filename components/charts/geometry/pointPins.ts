@@ -32,9 +32,13 @@ export const pinBox = ({ x, y }: Pin): Box => ({
 
 /**
  * Boxes above the places that they point to, within the plot. Where two would lie on each other the later one stands
- * higher; at the top of the plot it moves to the side, away from the nearer edge.
+ * higher; at the top of the plot it moves to the side, away from the nearer edge. The same where a name stands.
  */
-export function pointPins(points: readonly Pinned[], frame: Frame): Pin[] {
+export function pointPins(
+  points: readonly Pinned[],
+  frame: Frame,
+  names: readonly Box[] = [],
+): Pin[] {
   const { left, right, top, bottom } = frame;
   const placed: Pin[] = [];
   for (const { id, x: footX, y: footY } of points) {
@@ -43,7 +47,14 @@ export function pointPins(points: readonly Pinned[], frame: Frame): Pin[] {
     let x = Math.min(Math.max(footX, left + STEP / 2), right - STEP / 2);
     let y = Math.min(Math.max(footY - STEP, highest), bottom - STEP / 2);
     const isTaken = () =>
-      placed.some((pin) => Math.abs(pin.x - x) < STEP && Math.abs(pin.y - y) < STEP);
+      placed.some((pin) => Math.abs(pin.x - x) < STEP && Math.abs(pin.y - y) < STEP) ||
+      names.some(
+        (box) =>
+          x + PIN / 2 > box.x &&
+          x - PIN / 2 < box.x + box.width &&
+          y + PIN / 2 > box.y &&
+          y - PIN / 2 < box.y + box.height,
+      );
     while (isTaken() && y - STEP >= highest) y -= STEP;
     while (isTaken() && x + away >= left && x + away <= right) x += away;
     placed.push({ id, x, y, footX, footY });

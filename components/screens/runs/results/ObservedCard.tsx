@@ -49,15 +49,18 @@ export function ObservedCard({ run, observed, store }: Props) {
           <Txt>{marksSentence(residuals, system)}</Txt>
           {gauges.length > 0 ? (
             <ButtonRow>
-              {gauges.map(({ gaugeId, name, chainage }) => (
-                <Button
-                  key={gaugeId}
-                  kind="quiet"
-                  label={`${name}, ${formatWithUnit(chainage, 'chainage', system)}`}
-                  name={`Show the record of ${name}`}
-                  onPress={() => store.setAt(chainage)}
-                />
-              ))}
+              {gauges.map(({ gaugeId, name, chainage }) => {
+                const label = `${name}, ${formatWithUnit(chainage, 'chainage', system)}`;
+                return (
+                  <Button
+                    key={gaugeId}
+                    kind="quiet"
+                    label={label}
+                    name={`Show the record of ${label}`}
+                    onPress={() => store.setAt(chainage)}
+                  />
+                );
+              })}
             </ButtonRow>
           ) : null}
           <LinkTxt

@@ -34,3 +34,12 @@ test('at the foot of the plot it stays within it', () => {
   expect(pin.y).toBe(145);
   expect(pin.x).toBe(52);
 });
+
+test('a name is not covered', () => {
+  const name = { x: 60, y: 66, width: 80, height: 15 };
+  const [pin] = pointPins([{ id: 1, x: 120, y: 100 }], frame, [name]);
+  expect(pin).toMatchObject({ x: 120, y: 52 });
+  const [low] = pointPins([{ id: 1, x: 120, y: 60 }], frame, [{ ...name, y: 25 }]);
+  expect(low.y).toBe(36);
+  expect(low.x - 9).toBeGreaterThanOrEqual(140);
+});
