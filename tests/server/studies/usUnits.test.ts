@@ -2,6 +2,8 @@ import { read, utils } from 'xlsx';
 import type { Reach } from '../../../shared/reaches/types';
 import type { RunSummary } from '../../../shared/runs/types';
 import { sayIn } from '../../../shared/units/message';
+import { failureFields } from '../../../server/models/failure';
+import { RunFailed } from '../../../server/solvers';
 import { buildUser } from '../../helpers/factories/buildUser';
 import { startTestServer, type TestServer } from '../../helpers/testServer';
 import { buildRunnable } from '../runs/buildRunnable';
@@ -89,4 +91,31 @@ test('advice on the reach can be told without a metre', async () => {
   // Sections 2297 ft apart where 20 widths are fewer.
   expect(told.join(' ')).toContain('lie 2,297 ft apart');
   expect(told.filter((words) => SI.test(words))).toEqual([]);
+});
+
+test('why a run failed is told in feet; what failed before there were quantities stays as it was', async () => {
+  const { models } = server.services;
+  const { id } = (await api.post(`/api/scenarios/${made.scenario.id}/runs`).expect(201)).body;
+  await untilEnded(server.services, id);
+  const { said } = new RunFailed('the velocity grew.', 5, 304.8);
+  await models.Run.update({ state: 'failed', ...failureFields(said) }, { where: { id } });
+  const told = async () => (await api.get(`/api/runs/${id}`).expect(200)).body.failure as string;
+  // 304.8 m are 1000 ft exactly (NIST SP 811, app. B.8).
+  expect(await told()).toBe('The run failed at chainage 1,000.0 ft at 5.0 s: the velocity grew.');
+  await models.Run.update({ failureParts: null }, { where: { id } });
+  expect(await told()).toBe('The run failed at chainage 304.8 m at 5.0 s: the velocity grew.');
+});
+
+test('a place off the reach and banks off a section are refused in feet', async () => {
+  const { id } = (await api.post(`/api/scenarios/${made.scenario.id}/runs`).expect(201)).body;
+  await untilEnded(server.services, id);
+  const off = (await api.get(`/api/runs/${id}/series?chainage=9999`).expect(422)).body.error;
+  expect(off.message).toContain('from chainage 0 ft to 6,562 ft');
+  const reach: Reach = (await api.get(`/api/reaches/${made.reach.id}`).expect(200)).body;
+  const refused = await api
+    .patch(`/api/reaches/${made.reach.id}/sections`)
+    .send({ version: reach.version, sectionIds: ['XS-01'], banks: [-10, 35] })
+    .expect(422);
+  // The section is 50 m wide.
+  expect(refused.body.error.faults[0].message).toContain('which runs from 0.0 to 164.0 ft');
 });
