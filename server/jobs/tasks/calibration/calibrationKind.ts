@@ -37,16 +37,19 @@ export const calibrationKind = taskKind<CalibrationInput, null, SearchResult, Se
     const places = observed.gauges.map(({ chainage }) => chainage);
     const all = evaluations + FLATNESS_RUNS * stretches.length;
     const notes = kept as SearchNotes | null;
+    const known = notes?.solver === SOLVER_VERSION ? notes.evaluations : [];
+    const tell = (done: number) => onProgress(Math.min(0.999, done / all));
+    tell(known.length);
     return searchRoughness(
       input,
       (factors) =>
         computeFlood(withFactors(caseFile, stretches, factors, cellSize), places, shouldStop),
       (error) => error instanceof RunFailed,
       (evaluations) => {
-        onProgress(Math.min(0.999, evaluations.length / all));
+        tell(evaluations.length);
         keep({ solver: SOLVER_VERSION, evaluations } satisfies SearchNotes);
       },
-      notes?.solver === SOLVER_VERSION ? notes.evaluations : [],
+      known,
     );
   },
   gather: ([{ result }]) => result!,
