@@ -5,7 +5,7 @@ import type { StructureMark } from '@/shared/structures/structureMarks';
 import { formatWithUnit } from '@/shared/units/format';
 import { fromSi, UNITS, type UnitSystem } from '@/shared/units/units';
 import { ChartBox } from './ChartBox';
-import { ChartText } from './ChartText';
+import { ChartText, CHART_TEXT_SIZE } from './ChartText';
 import { DragSurface } from './DragSurface';
 import { nearestIndex, valueAt } from './geometry/interpolate';
 import {
@@ -25,6 +25,7 @@ import { PlaceAxis } from './PlaceAxis';
 import { PointPins, type RaisedPoint } from './PointPins';
 import { PointPresses } from './PointPresses';
 import { Reading, readingBox, type ReadingText } from './Reading';
+import { stationNames, type StationName } from './geometry/stationNames';
 import { StationMarks } from './StationMarks';
 import { StructureMarks } from './StructureMarks';
 import { ValueAxis } from './ValueAxis';
@@ -152,6 +153,10 @@ function Drawing(props: Sized) {
       right: profile.rightBank ? y(profile.rightBank) : null,
     };
   }, [profile, frame, unitSystem]);
+  const names = useMemo(
+    () => stationNames(stations, profile, frame, unitSystem, CHART_TEXT_SIZE),
+    [stations, profile, frame, unitSystem],
+  );
   const y = useMemo(() => {
     const px = (m: number) => frame.y(fromSi(m, 'elevation', unitSystem));
     return { at0: px(0), perMetre: px(1) - px(0) };
@@ -181,6 +186,7 @@ function Drawing(props: Sized) {
       <StationMarks
         sections={sections}
         stations={stations}
+        names={names}
         profile={profile}
         frame={frame}
         unitSystem={unitSystem}
@@ -197,7 +203,7 @@ function Drawing(props: Sized) {
       </ChartText>
       {at === null ? null : (
         <Cursor
-          {...{ frame, profile, live, y, stage, reading, at, unitSystem, pins }}
+          {...{ frame, profile, live, y, names, stage, reading, at, unitSystem, pins }}
           lines={lines}
           surface={surface}
         />
@@ -261,10 +267,12 @@ interface CursorProps extends ReadingOf {
   lines: Lines;
   surface: Float64Array | null;
   pins: readonly Pin[];
+  names: readonly StationName[];
 }
 
 function Cursor(props: CursorProps) {
   const { at, frame, profile, live, stage, reading, unitSystem, lines, surface, pins } = props;
+  const { names } = props;
   const { colours } = useTheme();
   const x = frame.x(fromSi(at, 'chainage', unitSystem));
   const level = reading?.stage ?? valueAt(profile.chainages, stage ?? profile.bed, at);
@@ -280,7 +288,7 @@ function Cursor(props: CursorProps) {
     row ? [{ x: lines.x, y: row }] : [],
   );
   const axisTitle = { x: frame.left, y: 0, width: 150, height: 18 };
-  const taken = [axisTitle, ...pins.map(pinBox)];
+  const taken = [axisTitle, ...names.map(({ box }) => box), ...pins.map(pinBox)];
   // Beside the numbers of points above the place, not below the ground for their sake.
   const gap = pins.some((pin) => Math.abs(pin.x - x) < PIN) ? PIN / 2 + 6 : undefined;
   const box = readingBox(texts, { x, y }, bounds, { lines: drawn, taken }, gap);

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { shortTime } from '@/components/charts/geometry/timeWords';
 import type { PlaceAndTimeStore } from '@/components/charts/placeAndTime';
@@ -46,7 +46,10 @@ export function AlongCard({ summary, store }: Props) {
   const [value, setValue] = useState<number | null>(0.3);
   const [all, setAll] = useState(summary.stations.length === 0);
   const sound = value !== null && Number.isFinite(value) && (threshold !== 'rise' || value > 0);
-  const asked = useSettled(sound ? value : null, REST_MS);
+  const wish = useMemo(() => (sound ? { threshold, value } : null), [sound, threshold, value]);
+  const settled = useSettled(wish, REST_MS);
+  // A number that was typed for one threshold is never asked of another.
+  const asked = settled?.threshold === threshold ? settled.value : null;
   const along = useRunAlong(summary.runId, threshold, asked);
   const span = summary.times.end - summary.times.start;
   const data = along.data;

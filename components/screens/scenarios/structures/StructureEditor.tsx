@@ -143,5 +143,5 @@ export function StructureEditor({ structure, index, copyName, onRemove }: Props)
 
 const styles = StyleSheet.create({
   one: { gap: space.two, paddingTop: space.two, borderTopWidth: hairline },
-  head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'baseline', columnGap: space.two },
+  head: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', columnGap: space.two },
 });
