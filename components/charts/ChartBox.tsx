@@ -34,28 +34,20 @@ export function ChartBox(props: Props) {
   const { width, measured } = useWidth(initialWidth);
   const source = usePictureSource();
   const outer = useRef<View>(null);
-  const image = (
-    <View style={[styles.box, { height }]} {...measured} role="img" aria-label={label}>
-      {width > 0 ? (
-        <Svg width={width} height={height} style={styles.drawing}>
-          {children({ width, height })}
-        </Svg>
-      ) : null}
-      {width > 0 ? over?.({ width, height }) : null}
-    </View>
-  );
-  const box = controls ? (
-    <View style={styles.outer}>
-      {image}
-      {width > 0 ? controls({ width, height }) : null}
-    </View>
-  ) : (
-    image
-  );
-  if (!source && !legend) return box;
+  const size = { width, height };
   return (
     <View ref={outer} style={styles.outer}>
-      {box}
+      <View style={styles.outer}>
+        <View style={[styles.box, { height }]} {...measured} role="img" aria-label={label}>
+          {width > 0 ? (
+            <Svg width={width} height={height} style={styles.drawing}>
+              {children(size)}
+            </Svg>
+          ) : null}
+          {width > 0 ? over?.(size) : null}
+        </View>
+        {width > 0 ? controls?.(size) : null}
+      </View>
       {legend}
       {source ? (
         <PictureButton
