@@ -6,6 +6,7 @@ import type {
   SurveyRevision,
   SurveyRevisionRow,
 } from '@/shared/surveys/types';
+import type { UnitSystem } from '@/shared/units/units';
 import { api } from './apiClient';
 import { isApiError } from './ApiError';
 import { reachKeys } from './reaches';
@@ -139,5 +140,8 @@ export const SURVEY_TEMPLATES = [
   { path: '/templates/survey-sections-example.xlsx', label: 'Filled example, one sheet a section' },
 ] as const;
 
-export const downloadTemplate = (path: (typeof SURVEY_TEMPLATES)[number]['path']) =>
-  api.download(path, path.slice(path.lastIndexOf('/') + 1));
+type TemplatePath = (typeof SURVEY_TEMPLATES)[number]['path'];
+
+/** A workbook in the units of the study. */
+export const downloadTemplate = ({ path, units }: { path: TemplatePath; units: UnitSystem }) =>
+  api.download(`${path}?units=${units}`, path.slice(path.lastIndexOf('/') + 1));

@@ -1,5 +1,6 @@
 import { array, number, object, string, type InferType } from 'yup';
 import { LIMITS } from '../limits';
+import { UNIT_SYSTEMS } from '../units/units';
 import { LENGTH_UNITS, SURVEY_FIELDS } from './types';
 
 /** The `match` field of the multipart body, as JSON. */
@@ -22,6 +23,11 @@ export const surveyFormSchema = object({
   uploadId: number().integer().positive().optional(),
   match: string().max(20_000).optional(),
   note: string().trim().max(LIMITS.textLong).default(''),
+}).noUnknown();
+
+/** `GET /api/templates/…`: what its lengths are in. */
+export const templateQuerySchema = object({
+  units: string().oneOf(UNIT_SYSTEMS).default('metric').required(),
 }).noUnknown();
 
 /** `POST /api/surveys/:surveyId/decision`. */

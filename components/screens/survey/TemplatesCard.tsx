@@ -6,9 +6,11 @@ import { Button } from '@/components/ui/Button';
 import { Card } from '@/components/ui/Card';
 import { ErrorState } from '@/components/ui/ErrorState';
 import { Txt } from '@/components/ui/Txt';
+import { useUnitSystem } from '@/components/ui/unitSystem';
 
 /** Workbooks to fill in, and to see how they are filled in. */
 export function TemplatesCard() {
+  const units = useUnitSystem();
   const download = useMutation({ mutationFn: downloadTemplate });
   return (
     <Card title="Templates">
@@ -21,8 +23,8 @@ export function TemplatesCard() {
             key={path}
             kind="quiet"
             label={`${label}, XLSX`}
-            busy={download.isPending && download.variables === path}
-            onPress={() => download.mutate(path)}
+            busy={download.isPending && download.variables.path === path}
+            onPress={() => download.mutate({ path, units })}
           />
         ))}
       </View>
