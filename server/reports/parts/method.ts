@@ -1,18 +1,20 @@
+import type { CaseFile } from '../../../shared/case/caseFile';
 import { ROUGHNESS_SOURCE } from '../../../shared/reaches/roughnessTable';
 import { arrivalRule } from '../../../shared/runs/arrivalRule';
 import { sayIn } from '../../../shared/units/message';
+import type { UnitSystem } from '../../../shared/units/units';
 import type { Sheet } from '../pdf/sheet';
 import { heading, list, paragraph, partHeading } from '../pdf/writing';
 import type { RunReport } from '../runReport';
 
 /** Half a page: what is solved, how, and by whom it was published. */
-export function method(sheet: Sheet, { facts, run }: RunReport): void {
+export function method(sheet: Sheet, { caseFile, facts, run }: RunReport): void {
   partHeading(sheet, 'Method', 'flowing');
   paragraph(
     sheet,
     'The equations of Saint-Venant for unsteady flow in one dimension, conservation of volume and of momentum with ' +
       "Manning's friction, are solved on the surveyed cross-sections. Each section is one water level and one mean " +
-      'velocity; conveyance is summed over its roughness zones. The momentum coefficient is taken as 1.',
+      `velocity; conveyance, ${conveyanceText(facts.study.unitSystem)}, is summed over its roughness zones. ${momentumSentence(caseFile)}`,
   );
   paragraph(
     sheet,
@@ -36,3 +38,12 @@ export function method(sheet: Sheet, { facts, run }: RunReport): void {
     `${ROUGHNESS_SOURCE} (Manning's n).`,
   ]);
 }
+
+/** The same n in both systems: a foot is 0.3048 m, and 0.3048 to the power of −1/3 is 1.486. */
+const conveyanceText = (system: UnitSystem): string =>
+  system === 'metric' ? 'A R^(2/3) / n' : '1.486 A R^(2/3) / n in feet and seconds';
+
+const momentumSentence = ({ numerics }: CaseFile): string =>
+  numerics.momentum === 'compound'
+    ? 'The momentum coefficient follows from the conveyances of channel and flood plains.'
+    : 'The momentum coefficient is taken as 1.';

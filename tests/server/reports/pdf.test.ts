@@ -134,6 +134,14 @@ it('speaks US customary units where the study does, and takes the ends where the
   const text = (await pdfPages((await runPdf(report, 'LETTER')).pdf)).join(' ');
   // 53 m and 60 m³/s in feet (1 ft = 0.3048 m exactly).
   expect(text).toContain('XS-01 173.88 ft 2,119 ft³/s');
+  // The same n in feet: (1 / 0.3048)^(1/3) = 1.486.
+  expect(text).toContain('conveyance, 1.486 A R^(2/3) / n');
+  const si =
+    /\d\s?(k?m|m³\/s|m\/s|m²|m³|mm|cm)(?![\p{L}\d²³/])|[\s(,](k?m|m³\/s|m\/s|m²|m³)(?=[\s),.;:])/u;
+  const inWords = text.split(/(?<=[.:;]) /).filter((sentence) => si.test(sentence));
+  // What people wrote stays as they wrote it.
+  const written = 'Two marks of the 2011 flood at the mill, within 0.15 m.';
+  expect(inWords.filter((sentence) => sentence !== written)).toEqual([]);
 });
 
 it('bears long names and texts without losing a page', async () => {
