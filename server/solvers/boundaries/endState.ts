@@ -33,6 +33,9 @@ export function downstreamEnd(n: number): End {
   return { section: n + 1, cell: n, face: n, outward: 1 };
 }
 
+/** A cell can be sloped without doubt where its surface clears the beds around it by this share of its depth. */
+const CLEARLY = 0.03;
+
 /**
  * Extrapolates the state of the last cell over its half to the section at the end. Where that section differs abruptly
  * from the cell's at equal stage (a steep or a stepped bed) and the water is fast, the area of the cell is taken along
@@ -67,10 +70,11 @@ export function createEndState(
     const own = area[cell];
     const level = tables.areaAt(section, etaCell);
     const froude = Math.abs(flow[cell]) / (cellFlowArea[cell] * celerity[cell]);
-    const isFlat = Math.min(etaCell, stage[inner]) <= Math.max(slopeFloor[cell], slopeFloor[inner]);
+    const clear = Math.min(etaCell, stage[inner]) - Math.max(slopeFloor[cell], slopeFloor[inner]);
+    const flat = Math.min(1, Math.max(0, 1 - clear / (CLEARLY * (etaCell - bed[cell]))));
     const ratio = level > 0 ? Math.max(level / own, own / level) : Infinity;
-    const mix = isFlat ? 1 : Math.min(1, Math.max(0, (ratio - 1.5) / 1.5));
-    if (isFlat) state.path = 1 - outward * Math.min(1, Math.max(0, 2 * froude - 1));
+    const mix = Math.max(flat, Math.min(1, Math.max(0, (ratio - 1.5) / 1.5)));
+    state.path = 1 - flat * outward * Math.min(1, Math.max(0, 2 * froude - 1));
     let a = 0;
     let q = 0;
     if (mix < 1) {
