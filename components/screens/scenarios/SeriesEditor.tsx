@@ -1,5 +1,5 @@
 import { useMutation } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { space } from '@/components/theme/tokens';
 import { Button } from '@/components/ui/Button';
@@ -11,6 +11,7 @@ import { TextField } from '@/components/ui/TextField';
 import { Txt } from '@/components/ui/Txt';
 import type { Fault } from '@/shared/errors';
 import type { ColumnsReading } from './columnsText';
+import { RowsTable } from './RowsTable';
 
 export interface SeriesColumn {
   title: string;
@@ -37,15 +38,20 @@ interface SeriesEditorProps {
 
 const SHOWN = 200;
 const FAULTS_SHOWN = 8;
+/** Longer tables are pasted, not typed. */
+const ROWS_TYPED = 200;
 
 /** A table of values: pasted or typed as text, or read from a file, and shown as it was understood. */
 export function SeriesEditor(props: SeriesEditorProps) {
   const { label, columns, values, onChange, read, write, readFile, error, disabled } = props;
   const [text, setText] = useState<string | null>(null);
   const [isShown, setShown] = useState(false);
+  const [asRows, setAsRows] = useState(false);
   const count = values[0]?.length ?? 0;
   const isTyping = text !== null || count === 0;
   const reading = text === null ? null : read(text);
+  const hasFaults = Boolean(reading?.faults.length);
+  const faulty = useMemo(() => faultyRows(reading?.faults ?? []), [reading]);
   const file = useMutation({
     mutationFn: async (chosen: File) => {
       const found = await readFile!(chosen);
@@ -67,20 +73,37 @@ export function SeriesEditor(props: SeriesEditorProps) {
     <View role="group" aria-label={label} style={styles.box}>
       {isTyping && !disabled ? (
         <>
-          <TextField
-            label={label}
-            lines={8}
-            hint={`Paste from a spreadsheet or type, a row a line: ${columns.map(({ title, unit }) => `${title} in ${unit}`).join(', then ')}.`}
-            value={text ?? ''}
-            onChange={type}
-            error={reading?.faults.length ? undefined : error}
-          />
+          {asRows ? (
+            <RowsTable {...{ label, columns, faulty }} text={text ?? ''} onText={type} />
+          ) : (
+            <TextField
+              label={label}
+              lines={8}
+              hint={`Paste from a spreadsheet or type, a row a line: ${columns.map(({ title, unit }) => `${title} in ${unit}`).join(', then ')}.`}
+              value={text ?? ''}
+              onChange={type}
+              error={hasFaults ? undefined : error}
+            />
+          )}
           {reading && reading.faults.length === 0 && count > 0 ? (
             <Txt role="status" variant="small" tone="moss">
               {reading.understood}
             </Txt>
           ) : null}
-          {reading ? <Faults faults={reading.faults} kept={count > 0} /> : null}
+          {reading ? (
+            <Faults faults={asRows ? inRows(reading.faults) : reading.faults} kept={count > 0} />
+          ) : null}
+          <Button
+            kind="quiet"
+            label={asRows ? 'As text, to paste' : 'Row by row'}
+            name={`${asRows ? 'As text, to paste' : 'Row by row'}, ${label}`}
+            disabled={!asRows && (hasFaults || count > ROWS_TYPED)}
+            onPress={() => {
+              // Whatever stood between the columns: rows are cut at tabs.
+              if (!asRows && reading) setText(write(reading.columns));
+              setAsRows(!asRows);
+            }}
+          />
         </>
       ) : error ? (
         <Txt role="alert" variant="small" tone="brick" strong>
@@ -92,9 +115,9 @@ export function SeriesEditor(props: SeriesEditorProps) {
           {disabled ? null : (
             <Button
               kind="quiet"
-              label={text === null ? 'Edit the values' : 'Done with the text'}
-              name={`${text === null ? 'Edit the values' : 'Done with the text'}, ${label}`}
-              disabled={Boolean(reading?.faults.length)}
+              label={text === null ? 'Edit the values' : 'Done'}
+              name={`${text === null ? 'Edit the values' : 'Done'}, ${label}`}
+              disabled={hasFaults}
               onPress={() => setText(text === null ? write(values) : null)}
             />
           )}
@@ -127,6 +150,15 @@ export function SeriesEditor(props: SeriesEditorProps) {
     </View>
   );
 }
+
+/** Rows of the fields, below their heading line; of a text that begins with its heading. */
+const rowOf = ({ path }: Fault): number => Number(/\d+/.exec(path)?.[0] ?? 1) - 2;
+const faultyRows = (faults: readonly Fault[]): ReadonlySet<number> => new Set(faults.map(rowOf));
+const inRows = (faults: readonly Fault[]): Fault[] =>
+  faults.map((fault) => ({
+    ...fault,
+    message: fault.message.replace(/^Line \d+/, `Row ${rowOf(fault) + 1}`),
+  }));
 
 function Faults({ faults, kept }: { faults: readonly Fault[]; kept: boolean }) {
   if (faults.length === 0) return null;

@@ -1,8 +1,9 @@
-import type { ClipboardEvent, CSSProperties, KeyboardEvent } from 'react';
+import type { ClipboardEvent, CSSProperties } from 'react';
 import { StyleSheet, View } from 'react-native';
 import { radius, space } from '@/components/theme/tokens';
 import { useTheme } from '@/components/theme/useTheme';
 import { Button } from '@/components/ui/Button';
+import { goBetweenCells } from '@/components/ui/goBetweenCells';
 import { domTextStyle } from '@/components/ui/textStyle';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
@@ -148,22 +149,6 @@ export function PointsTable({ chosen, onChoose, onPaste }: PointsTableProps) {
       ) : null}
     </>
   );
-}
-
-/** Enter and the arrows up and down go to the cell below or above. */
-function goBetweenCells(event: KeyboardEvent<HTMLElement>) {
-  const step = { Enter: 1, ArrowDown: 1, ArrowUp: -1 }[event.key];
-  const cell = (event.target as HTMLElement).dataset['cell'];
-  if (!step || !cell) return;
-  event.preventDefault();
-  const [row, column] = cell.split('/').map(Number);
-  const next = event.currentTarget.querySelector<HTMLInputElement>(
-    `[data-cell="${row + step}/${column}"]`,
-  );
-  if (next) {
-    next.focus();
-    next.select();
-  } else (event.target as HTMLElement).blur();
 }
 
 const styles = StyleSheet.create({

@@ -56,6 +56,39 @@ describe('a table of values', () => {
     expect((box() as HTMLTextAreaElement).value).toBe('0\t55\n2\tx');
   });
 
+  it('is typed row by row: rows are added by Enter, mended, pasted over and removed', () => {
+    show(<Bench />);
+    fireEvent.click(screen.getByRole('button', { name: 'Row by row, Inflow table' }));
+    const cell = (column: 'time' | 'flow', row: number) =>
+      screen.getByRole('textbox', { name: new RegExp(`^${column}, row ${row},`) });
+    const put = (column: 'time' | 'flow', row: number, value: string) =>
+      fireEvent.change(cell(column, row), { target: { value } });
+    put('time', 1, '0');
+    expect(screen.getByText('Row 1 has no value.')).toBeTruthy();
+    put('flow', 1, '55');
+    expect(values()).toEqual([[0], [55]]);
+    fireEvent.keyDown(cell('flow', 1), { key: 'Enter' });
+    expect(document.activeElement).toBe(cell('time', 2));
+    // An empty row is none yet.
+    expect(values()).toEqual([[0], [55]]);
+    const clipboardData = { getData: () => '2\t90\n3\t70\n' };
+    fireEvent.paste(cell('time', 2), { clipboardData });
+    expect(values()).toEqual([
+      [0, 7200, 10_800],
+      [55, 90, 70],
+    ]);
+    put('flow', 2, 'x');
+    expect(cell('flow', 2).getAttribute('aria-invalid')).toBe('true');
+    expect(values()[1]).toEqual([55, 90, 70]);
+    fireEvent.click(screen.getByRole('button', { name: 'Remove row 2 of Inflow table' }));
+    expect(values()).toEqual([
+      [0, 10_800],
+      [55, 70],
+    ]);
+    fireEvent.click(screen.getByRole('button', { name: 'As text, to paste, Inflow table' }));
+    expect((box() as HTMLTextAreaElement).value.split('\n')).toHaveLength(3);
+  });
+
   it('shows the values as a table', () => {
     show(
       <Bench
