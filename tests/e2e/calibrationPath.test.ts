@@ -60,6 +60,17 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
       await page.getByRole('img', { name: /^Marks on the long section/ }).waitFor();
       await isSound(page);
 
+      // Beside the results only once it is chosen, and then by the address alone.
+      const besides = new URLSearchParams({ observed: flood });
+      await page.goto(`/studies/1/runs/${run.id}?${besides}`);
+      await page.getByRole('img', { name: /^Long section.*Observed levels: 2/ }).waitFor();
+      await isSound(page);
+      await page.getByLabel('Flood to draw beside this run').selectOption('None');
+      await page.waitForURL((url) => !url.searchParams.has('observed'));
+      expect(await page.getByRole('img', { name: /Observed levels/ }).count()).toBe(0);
+      const against = new URLSearchParams({ flood });
+      await page.goto(`/studies/1/calibration/runs/${run.id}?${against}`);
+
       await page.getByRole('link', { name: 'Search for roughness' }).click();
       await page.getByRole('button', { name: 'Remove Flood plain' }).click();
       await page.getByLabel('Runs at most').fill('5');

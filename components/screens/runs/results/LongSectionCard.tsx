@@ -76,7 +76,7 @@ const AtTime = memo(function AtTime(props: Ready & { t: number }) {
   const legend = [
     'peak dotted',
     'banks dashed',
-    ...(observed?.length ? ['observed crossed'] : []),
+    ...(observed?.length ? ['observed as crosses'] : []),
     ...(raised?.placed.length ? ['points numbered'] : []),
   ].join(' · ');
   return (

@@ -86,7 +86,7 @@ function Curves(props: CurvesProps) {
         {...common}
         title="Stage"
         quantity="elevation"
-        note={noteOf(seen.stage && 'observed crossed')}
+        note={noteOf(seen.stage && 'observed as crosses')}
         series={curves.stage}
         observed={seen.stage}
         levels={here}
@@ -95,7 +95,7 @@ function Curves(props: CurvesProps) {
       <SeriesCard
         {...common}
         title="Flow"
-        note={noteOf(given && 'inflow dashed', seen.flow && 'observed crossed')}
+        note={noteOf(given && 'inflow dashed', seen.flow && 'observed as crosses')}
         quantity="flow"
         series={curves.flow}
         observed={seen.flow}
