@@ -33,6 +33,13 @@ export const STRUCTURES: Mutation[] = [
     tests: ['structures/sluice'],
   },
   {
+    what: 'sluice: drowns with a jump',
+    file: 'structures/sluiceFlow.ts',
+    find: 'share * (drowned - free)',
+    put: '(drowned - free)',
+    tests: ['structures/sluice'],
+  },
+  {
     what: 'sluice: drowned without the momentum of the jet',
     file: 'structures/sluiceFlow.ts',
     find: '(1 / j - 1 / tail) * m',
