@@ -36,8 +36,7 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
       // Of its own, so that a product that was visited before is fit for it.
       const flood = `Flood seen at ${size} size, ${Date.now()}`;
       const run = routed[0];
-      await signIn(page, emailOf('Ines Corrow'), DEMO_PASSWORD);
-      await page.goto('/studies/1/calibration');
+      await signIn(page, emailOf('Ines Corrow'), DEMO_PASSWORD, '/studies/1/calibration');
       await page.getByRole('button', { name: 'Add marks' }).click();
       await page.getByLabel('Flood', { exact: true }).fill(flood);
       await page

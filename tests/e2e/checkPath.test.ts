@@ -27,7 +27,7 @@ const WORDS = 'The piers take a third of the area; the step stays on finer cells
 describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
   const as = (name: string, walk: (page: Page) => Promise<void>) =>
     visit(browser, size, `check-${name}`, async ({ page }) => {
-      await signIn(page, emailOf(name), DEMO_PASSWORD);
+      await signIn(page, emailOf(name), DEMO_PASSWORD, null);
       await walk(page);
       expect(await sidewaysOverflow(page)).toBeLessThanOrEqual(0);
       expect(await axeViolations(page)).toEqual([]);

@@ -104,8 +104,7 @@ describe.each(Object.keys(SIZES) as Size[])('hand-in from the bank, %s', (size) 
 
     const decide = (words: string, press: string) =>
       visit(browser, size, 'handIn-modeller', async ({ page }) => {
-        await signIn(page, MODELLER, DEMO_PASSWORD);
-        await page.goto(survey);
+        await signIn(page, MODELLER, DEMO_PASSWORD, survey);
         await page.getByRole('row', { name: /Waits for an engineer/ }).click();
         await page.getByLabel(/^Remarks/).fill(words);
         await looksRight(page);

@@ -11,7 +11,7 @@ import type { ResultFile } from '@/shared/case/resultFile';
 import { formatQuantity } from '@/shared/units/format';
 import { launchBrowser, sidewaysOverflow, SIZES, visit, type Size } from '../helpers/browser';
 import { axeViolations } from '../helpers/axe';
-import { goTo, signIn } from '../helpers/steps';
+import { goTo, signInByForm } from '../helpers/steps';
 
 jest.setTimeout(300_000);
 
@@ -33,7 +33,7 @@ describe.each(Object.keys(SIZES) as Size[])('from workbook to routed flood, %s',
   it('takes a modeller from the spreadsheet to a peak that all three doors agree on', () =>
     visit(browser, size, 'mainPath', async ({ page }) => {
       const sections = lowerVeshall();
-      await signIn(page, 'ines.corrow@pykemorrow.example', DEMO_PASSWORD);
+      await signInByForm(page, 'ines.corrow@pykemorrow.example', DEMO_PASSWORD);
 
       // A study.
       await page.goto('/studies/new');

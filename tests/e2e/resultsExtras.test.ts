@@ -16,8 +16,7 @@ describe.each(Object.keys(SIZES) as Size[])('what results tell besides, %s', (si
     visit(browser, size, 'resultsExtras', async ({ page }) => {
       const house = `Ferry house, ${size}`;
       const floor = size === 'phone' ? 34.5 : 33.5;
-      await signIn(page, 'ines.corrow@pykemorrow.example', DEMO_PASSWORD);
-      await page.goto('/studies/1/stations');
+      await signIn(page, 'ines.corrow@pykemorrow.example', DEMO_PASSWORD, '/studies/1/stations');
       await page.getByRole('button', { name: 'Gauge at Ebbick', exact: true }).click();
       const form = page.getByRole('dialog');
       await form.getByRole('button', { name: 'Add a level' }).click();

@@ -19,7 +19,6 @@ describe.each(Object.keys(SIZES) as Size[])('a dam that fails, %s', (size) => {
   it('is built by the form, takes its breach from a regression, and is routed', () =>
     visit(browser, size, 'structuresPath', async ({ page, errors }) => {
       await signIn(page, 'ines.corrow@pykemorrow.example', DEMO_PASSWORD);
-      await page.goto('/');
       await page
         .getByRole('link', { name: /Quenlow dam/ })
         .first()
