@@ -1,5 +1,5 @@
 import { TextInput, type TextInputProps } from 'react-native';
-import { space } from '../theme/tokens';
+import { space, type } from '../theme/tokens';
 import { useTheme } from '../theme/useTheme';
 import { aria } from './aria';
 import { controlStyle } from './controlStyle';
@@ -49,9 +49,19 @@ export function TextField(props: TextFieldProps) {
             textStyle(colours, 'lead'),
             controlStyle(colours, invalid),
             { paddingVertical: space.one, opacity: disabled ? 0.6 : 1 },
+            lines !== undefined && lines <= NOTE_LINES ? growing(lines) : null,
           ]}
         />
       )}
     </Field>
   );
 }
+
+/** A note is read whole; a long table scrolls. */
+const NOTE_LINES = 5;
+const growing = (lines: number) =>
+  ({
+    fieldSizing: 'content',
+    minHeight: lines * type.lead.lineHeight + 2 * space.one,
+    maxHeight: 320,
+  }) as object;

@@ -67,5 +67,5 @@ const styles = StyleSheet.create({
   // Over the buttons that it is about, where it is seen wherever the form is scrolled to.
   trouble: { width: '100%' },
   words: { flexShrink: 1 },
-  buttons: { flexDirection: 'row', gap: space.one },
+  buttons: { flexDirection: 'row', gap: space.one * 1.5 },
 });

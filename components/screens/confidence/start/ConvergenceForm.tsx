@@ -4,8 +4,7 @@ import { FormSubmit } from '@/components/forms/FormSubmit';
 import { Card } from '@/components/ui/Card';
 import { Txt } from '@/components/ui/Txt';
 import { useUnitSystem } from '@/components/ui/unitSystem';
-import { formatNumber } from '@/shared/units/format';
-import { fromSi, UNITS } from '@/shared/units/units';
+import { formatChosenLength } from '@/shared/units/format';
 import { computingWords, estimate } from '../confidenceWords';
 import { useSetForm, type SetFormProps } from './useSetForm';
 
@@ -17,14 +16,13 @@ export function ConvergenceForm(props: SetFormProps) {
   const grids = (finest: number) => [finest, finest / 2, finest / 4];
   const choice = (value: 'same' | 'half', label: string, finest: number) => {
     const sizes = grids(finest).map((count) =>
-      formatNumber(fromSi(length / Math.round(count), 'length', system), 1),
+      formatChosenLength(length / Math.round(count), system),
     );
     const seconds = estimate(props.options, grids(finest));
-    const unit = UNITS[system].length.symbol;
     return {
       value,
       label,
-      hint: `Cells of ${sizes.join(', ')} ${unit}; ${computingWords(seconds)}.`,
+      hint: `Cells of ${sizes.join(', ')}; ${computingWords(seconds)}.`,
     };
   };
   return (

@@ -90,6 +90,6 @@ const styles = StyleSheet.create({
   },
   trouble: { width: '100%' },
   words: { flexShrink: 1 },
-  row: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one },
+  row: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two, rowGap: space.one },
   buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one },
 });

@@ -135,5 +135,5 @@ export function PointsCard() {
 }
 
 const styles = StyleSheet.create({
-  buttons: { flexDirection: 'row', flexWrap: 'wrap', gap: space.one },
+  buttons: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two, rowGap: space.one },
 });
