@@ -20,8 +20,8 @@ export function rootNear(
   }
 }
 
-/** The root of an increasing function at or above `lo`; see rootNear. */
-export function risingRoot(f: (x: number) => number, lo: number, step: number): number {
+/** The root of an increasing function at or above `lo`, or where it is within `enough` of 0; see rootNear. */
+export function risingRoot(f: (x: number) => number, lo: number, step: number, enough = 0): number {
   let fLo = f(lo);
   if (fLo >= 0) return lo;
   let hi = lo + step;
@@ -33,7 +33,7 @@ export function risingRoot(f: (x: number) => number, lo: number, step: number): 
     hi = lo + step;
     fHi = f(hi);
   }
-  if (fHi < 0) return hi;
+  if (fHi <= enough) return hi;
   let best = -fLo < fHi ? lo : hi;
   let least = Math.min(-fLo, fHi);
   let side = 0;
@@ -45,7 +45,7 @@ export function risingRoot(f: (x: number) => number, lo: number, step: number): 
       least = Math.abs(fx);
       best = x;
     }
-    if (fx === 0) break;
+    if (Math.abs(fx) <= enough) break;
     if (fx < 0) {
       lo = x;
       fLo = fx;

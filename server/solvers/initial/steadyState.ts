@@ -12,6 +12,9 @@ import type { StructureSet } from '../structures/structureSet';
 import type { Workspace } from '../workspace';
 import { steadyProfile } from './steadyProfile';
 
+/** m, or share of a flow: what settles afterwards (settle.ts) does the rest. */
+const CLOSE = 1e-5;
+
 export interface SteadyState {
   /** m and m³/s, index 0..n+1 */
   stages: Float64Array;
@@ -54,7 +57,8 @@ export function steadyState(
       // What is released over water that the release itself makes.
       const surplus = (q: number): number =>
         q - (structures?.firstRelease(stateFor(q).stages[0]) ?? 0);
-      return stateFor(risingRoot(surplus, 0, 1));
+      const most = structures?.firstRelease(bed[0]) ?? 0;
+      return stateFor(risingRoot(surplus, 0, Math.max(most, 1e-6), CLOSE * most));
     }
     case 'stage': {
       const wanted = createSeries(upstream.times, upstream.stages)(0);
@@ -64,8 +68,9 @@ export function steadyState(
         if (levelPools(pools, wanted)) return { ...still, stages: pools };
       }
       if (still.stages[0] >= wanted) return still;
-      const inflow = risingRoot((q) => stateFor(q).stages[0] - wanted, 0, 1);
-      return stateFor(inflow);
+      const excess = (q: number): number => stateFor(q).stages[0] - wanted;
+      const { criticalFlowAt } = createEndSection(workspace, tables, 0);
+      return stateFor(risingRoot(excess, 0, Math.max(0.25 * criticalFlowAt(wanted), 1e-6), CLOSE));
     }
   }
 
