@@ -1,3 +1,6 @@
+import type { Station } from '../../../shared/studies/types';
+import { levelsSheet } from '../../../server/results/exports/levelsSheet';
+import { levelsAt } from '../../../server/results/levelsAt';
 import { gzipSync } from 'node:zlib';
 import { read, utils } from 'xlsx';
 import { CAUTIONS } from '../../../shared/runs/cautions';
@@ -150,4 +153,32 @@ describe('workbook', () => {
     expect(rows('Stage')[0][1]).toBe('Clock time (UTC)');
     expect(rows('Stage')[3][1]).toBe('2026-11-14T06:01:00Z');
   });
+});
+
+test('levels with their freeboard, by hand: the wave of the sample run stands 3 m deep at its top', async () => {
+  const { blocks } = sampleBlocks();
+  const stations: Station[] = [
+    {
+      id: 1,
+      name: 'Mill',
+      chainage: 1000,
+      levels: [
+        { kind: 'road', level: 53, note: '' },
+        { kind: 'floor', level: 51.6, note: 'Mill house' },
+      ],
+    },
+    { id: 2, name: 'Far', chainage: 9000, levels: [{ kind: 'road', level: 1, note: '' }] },
+  ];
+  const levels = await levelsAt(blocks, stations);
+  const [, floor, road] = levelsSheet(levels, 'metric');
+  expect(road).toEqual(['Mill', 1000, 'Road level', 53, 52, 1, null, null]);
+  expect(floor.slice(0, 5)).toEqual(['Mill', 1000, 'House floor, Mill house', 51.6, 52]);
+  expect(floor[5]).toBeCloseTo(-0.4, 9);
+  // 2.6 m and more while exp(-((t - 2300)/900)²) > 0.8: from 2300 - 425 s on, for 850 s; the moments are 60 s apart.
+  const half = 900 * Math.sqrt(-Math.log(0.8));
+  expect(Math.abs(Number(floor[6]) * 3600 - (2300 - half))).toBeLessThan(2);
+  expect(Math.abs(Number(floor[7]) * 3600 - 2 * half)).toBeLessThan(4);
+  const [heads, us] = levelsSheet(levels, 'usCustomary');
+  expect(heads[5]).toBe('Freeboard (ft)');
+  expect(us[5]).toBeCloseTo(-0.4 / 0.3048, 9);
 });
