@@ -48,20 +48,24 @@ export function HazardBand({ places, at, onChange }: Props) {
           ]}
         >
           {(to - from) / length > 0.04 ? (
-            <Txt
-              variant="caption"
-              strong
-              // Where the cursor stands at it, the class stays legible.
-              style={[styles.name, { backgroundColor: colours[hazard ? GROUND[hazard] : 'card'] }]}
-            >
+            <Txt variant="caption" strong>
               {hazard ?? 'dry'}
             </Txt>
           ) : null}
         </View>
       ))}
-      {share !== null && share >= 0 && share <= 1 ? (
-        <View style={[styles.cursor, { left: `${100 * share}%`, backgroundColor: colours.ink }]} />
-      ) : null}
+      {share !== null && share >= 0 && share <= 1
+        ? // From both edges, so that it never crosses out a class.
+          (['top', 'bottom'] as const).map((edge) => (
+            <View
+              key={edge}
+              style={[
+                styles.cursor,
+                { [edge]: 0, left: `${100 * share}%`, backgroundColor: colours.ink },
+              ]}
+            />
+          ))
+        : null}
     </View>
   );
 }
@@ -82,6 +86,5 @@ const styles = StyleSheet.create({
     borderRightWidth: hairline,
     overflow: 'hidden',
   },
-  name: { zIndex: 1, paddingHorizontal: 3 },
-  cursor: { position: 'absolute', top: 0, bottom: 0, width: 2 },
+  cursor: { position: 'absolute', height: 7, width: 3, marginLeft: -1.5 },
 });
