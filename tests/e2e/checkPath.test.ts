@@ -5,6 +5,7 @@ import path from 'node:path';
 import type { Browser, Page } from 'playwright-core';
 import { DEMO_PASSWORD } from '@/seed/accounts';
 import { emailOf } from '../helpers/accounts';
+import { apiOf } from '../helpers/api';
 import { axeViolations } from '../helpers/axe';
 import { launchBrowser, sidewaysOverflow, SIZES, visit, type Size } from '../helpers/browser';
 import { mailTo } from '../helpers/mailTo';
@@ -34,9 +35,8 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
     });
 
   it('takes a finished run from its modeller over the signature to the client', async () => {
-    let check = '';
+    const check = `/studies/1/runs/${await routeAgain()}/check`;
     await as('Ines Corrow', async (page) => {
-      check = `/studies/1/runs/${await routeAgain(page)}/check`;
       await page.goto(check);
       await answerAll(page);
       await page.getByLabel('Method').fill('Finite volumes on 25 m cells.');
@@ -126,24 +126,16 @@ describe.each(Object.keys(SIZES) as Size[])('at %s size', (size) => {
 });
 
 /** A new run of the first scenario, once it is routed: what is signed never changes, so each walk needs its own. */
-async function routeAgain(page: Page): Promise<number> {
-  return page.evaluate(async () => {
-    const { accessToken } = await (await fetch('/api/auth/refresh', { method: 'POST' })).json();
-    const call = async (method: string, address: string) =>
-      (
-        await fetch(`/api${address}`, {
-          method,
-          headers: { Authorization: `Bearer ${accessToken}` },
-        })
-      ).json();
-    const { id } = await call('POST', '/scenarios/1/runs');
-    for (;;) {
-      const { state, failure } = await call('GET', `/runs/${id}`);
-      if (state === 'routed') return id as number;
-      if (state !== 'queued' && state !== 'running') throw new Error(`${state}: ${failure}`);
-      await new Promise((resolve) => setTimeout(resolve, 1000));
-    }
-  });
+async function routeAgain(): Promise<number> {
+  const api = await apiOf(emailOf('Ines Corrow'));
+  const { id } = await api.send<{ id: number }>('POST', '/scenarios/1/runs');
+  for (;;) {
+    const run = await api.get<{ state: string; failure: string | null }>(`/runs/${id}`);
+    if (run.state === 'routed') return id;
+    if (run.state !== 'queued' && run.state !== 'running')
+      throw new Error(`${run.state}: ${run.failure}`);
+    await new Promise((resolve) => setTimeout(resolve, 500));
+  }
 }
 
 /** Words on every item of the checklist that waits for them. */
