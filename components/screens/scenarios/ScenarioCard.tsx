@@ -109,5 +109,11 @@ const changedOn = (iso: string): string =>
   new Date(iso).toLocaleDateString('en-GB', { day: 'numeric', month: 'short', year: 'numeric' });
 
 const styles = StyleSheet.create({
-  buttons: { flexDirection: 'row', flexWrap: 'wrap', columnGap: space.two, rowGap: space.one, alignItems: 'center' },
+  buttons: {
+    flexDirection: 'row',
+    flexWrap: 'wrap',
+    columnGap: space.two,
+    rowGap: space.one,
+    alignItems: 'center',
+  },
 });
