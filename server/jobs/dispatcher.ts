@@ -53,8 +53,8 @@ export function runDispatcher(parts: Parts) {
       time: 0,
       surface: null,
     });
-  const publishEnd = (runId: number, state: RunState, failure: string | null) =>
-    hub.publish(runId, { type: 'ended', state, failure });
+  const publishEnd = (runId: number, state: RunState) =>
+    hub.publish(runId, { type: 'ended', state });
 
   function begin(claim: Claim): void {
     const { runId } = claim;
@@ -105,8 +105,8 @@ export function runDispatcher(parts: Parts) {
     const stored = await persist(() => queue.finish(claim, ending));
     log.info({ runId, state: ending.state, stored }, 'run ended');
     if (!stored) return hub.forget(runId);
-    const run = await models.Run.findByPk(runId, { attributes: ['state', 'failure'] });
-    if (run) publishEnd(runId, run.state, run.failure);
+    const run = await models.Run.findByPk(runId, { attributes: ['state'] });
+    if (run) publishEnd(runId, run.state);
   }
 
   async function persist(store: () => Promise<boolean>): Promise<boolean> {
@@ -139,10 +139,10 @@ export function runDispatcher(parts: Parts) {
   }
 
   async function recover(): Promise<void> {
-    for (const { runId, state, failure } of await recoverExpired(queue, models)) {
+    for (const { runId, state } of await recoverExpired(queue, models)) {
       log.warn({ runId, state }, 'run recovered');
       if (state === 'queued') publishState(runId, state);
-      else publishEnd(runId, state, failure);
+      else publishEnd(runId, state);
     }
   }
 

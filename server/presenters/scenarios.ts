@@ -28,5 +28,5 @@ export const presentScenario = (
   studyId: scenario.studyId,
   body: scenario.body,
   ...checkScenario(scenario.body, sections, system),
-  proposals: proposals(sections, scenario.body.upstream),
+  proposals: proposals(sections, scenario.body.upstream, system),
 });

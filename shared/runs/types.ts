@@ -224,4 +224,4 @@ export type RunEvent =
       /** Water surface of the moment, at most 300 places; null before the first. */
       surface: { chainages: number[]; bed: number[]; stage: number[] } | null;
     }
-  | { type: 'ended'; state: RunState; failure: string | null };
+  | { type: 'ended'; state: RunState };

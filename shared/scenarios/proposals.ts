@@ -1,5 +1,6 @@
 import { bankfullWidth, thalwegOf } from '../reaches/sectionGeometry';
 import type { Section } from '../surveys/types';
+import { fromSi, toSi, type UnitSystem } from '../units/units';
 import { inflowOf, SCS_RECESSION_RATIO, USUAL_GAMMA_EXPONENT } from './hydrographs';
 import type { ScenarioBody, Upstream } from './schemas';
 import type { Scenario } from './types';
@@ -22,12 +23,16 @@ const SLOPES = { min: 1e-5, max: 0.2, fallback: 1e-4 };
 const OUTLET_SHARE = 0.25;
 const OUTLET_SECTIONS = 4;
 
-/** What fits the reach and the inflow: the form starts from it. SI. */
-export function proposals(sections: Sections, upstream?: Upstream): Scenario['proposals'] {
+/** What fits the reach and the inflow: the form starts from it. SI, round numbers in the units of the study. */
+export function proposals(
+  sections: Sections,
+  upstream?: Upstream,
+  system: UnitSystem = 'metric',
+): Scenario['proposals'] {
   const length = sections[sections.length - 1].chainage - sections[0].chainage;
   const duration = durationFor(length, upstream);
   return {
-    cellSize: cellSizeFor(sections, length),
+    cellSize: cellSizeFor(sections, length, system),
     outletSlope: outletSlopeOf(sections),
     duration,
     outputInterval:
@@ -37,8 +42,17 @@ export function proposals(sections: Sections, upstream?: Upstream): Scenario['pr
 }
 
 /** A new scenario: everything but the flood itself is proposed. */
-export function newScenario(name: string, reachId: number, sections: Sections): ScenarioBody {
-  const { cellSize, outletSlope, duration, outputInterval } = proposals(sections);
+export function newScenario(
+  name: string,
+  reachId: number,
+  sections: Sections,
+  system: UnitSystem = 'metric',
+): ScenarioBody {
+  const { cellSize, outletSlope, duration, outputInterval } = proposals(
+    sections,
+    undefined,
+    system,
+  );
   return {
     name,
     reachId,
@@ -64,12 +78,12 @@ export function newScenario(name: string, reachId: number, sections: Sections): 
 }
 
 /** Fine enough for the spacing of the sections, no finer than the width of the river can show. */
-function cellSizeFor(sections: Sections, length: number): number {
+function cellSizeFor(sections: Sections, length: number, system: UnitSystem): number {
   const spacings = sections.slice(1).map(({ chainage }, i) => chainage - sections[i].chainage);
   const widths = sections.map(bankfullWidth);
   const wish = Math.max(median(spacings) / CELLS_PER_INTERVAL, median(widths) / CELLS_PER_WIDTH);
   const bounded = Math.min(Math.max(wish, length / CELLS.max), length / CELLS.min);
-  return roundDown(bounded);
+  return toSi(roundDown(fromSi(bounded, 'length', system)), 'length', system);
 }
 
 /** Fall of the thalweg over the lowest part of the reach, by least squares; of the whole reach where that does not fall. */

@@ -21,7 +21,7 @@ export function NumericsPart() {
   const change = (to: Partial<typeof numerics>) =>
     dispatch({ type: 'numericsChanged', change: to });
   const upstream = draft.upstream.byKind[draft.upstream.kind];
-  const proposed = reach ? proposals(reach.sections, upstream) : null;
+  const proposed = reach ? proposals(reach.sections, upstream, system) : null;
   const size = reach ? runSize(numerics, reach) : null;
   const takes =
     proposed &&

@@ -44,7 +44,7 @@ export function buildChangeRuns({ audit, sequelize, models, now }: Platform, nee
         return run.state;
       });
       if (state === 'running') needs.stop(id);
-      else needs.hub.publish(id, { type: 'ended', state, failure: null });
+      else needs.hub.publish(id, { type: 'ended', state });
     },
 
     /** The same frozen case once more, by the solver as it is now. */

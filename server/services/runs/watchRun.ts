@@ -68,7 +68,7 @@ export function buildWatchRun({ Run }: Models, hub: ProgressHub, log: Logger) {
 }
 
 const isEnded = ({ state }: RunModel) => state !== 'queued' && state !== 'running';
-const ended = ({ state, failure }: RunModel): RunEvent => ({ type: 'ended', state, failure });
+const ended = ({ state }: RunModel): RunEvent => ({ type: 'ended', state });
 const stored = ({ state, progress, secondsLeft, duration }: RunModel): RunEvent => ({
   type: 'progress',
   state,

@@ -70,7 +70,7 @@ export function buildScenarios(platform: Platform) {
     { name, reachId }: { name: string; reachId: number },
   ): Promise<ScenarioModel> {
     const sections = await sectionsOfStudy(study.id, reachId, 'reachId');
-    return store(study.id, actor, newScenario(name, reachId, sections), sections);
+    return store(study.id, actor, newScenario(name, reachId, sections, study.unitSystem), sections);
   }
 
   /** The same under another name, with a change where one is given; runs stay with the original. */

@@ -15,7 +15,7 @@ const progress = (share: number, stage: number[] | null): RunEvent => ({
   time: share * 1000,
   surface: stage && { chainages: [0, 100], bed: [1, 0], stage },
 });
-const ended: RunEvent = { type: 'ended', state: 'routed', failure: null };
+const ended: RunEvent = { type: 'ended', state: 'routed' };
 
 /** Each call of the stream gives the next of these; an Error breaks the line. */
 function streams(...lines: (RunEvent | Error)[][]) {

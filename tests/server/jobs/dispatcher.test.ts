@@ -60,7 +60,7 @@ test('a run is taken, watched and stored; its events come in order and end once'
   expect(progress.length).toBeGreaterThan(5);
   expect(progress).toEqual([...progress].sort((a, b) => a - b));
   expect(events.filter((event) => event.type === 'ended')).toEqual([
-    { type: 'ended', state: 'routed', failure: null },
+    { type: 'ended', state: 'routed' },
   ]);
   expect(events[events.length - 1].type).toBe('ended');
   expect(hub.latest(run.id)).toBeNull();

@@ -78,7 +78,7 @@ test('killed in the middle, the run finishes after the next start, once, with th
   const seen = watching.events;
   expect(seen.some((event) => event.type === 'progress' && event.state === 'running')).toBe(true);
   expect(seen.filter((event) => event.type === 'ended')).toEqual([
-    { type: 'ended', state: 'routed', failure: null },
+    { type: 'ended', state: 'routed' },
   ]);
 
   const blocks = await stored(id);

@@ -154,7 +154,7 @@ test('a run that has ended says so at once and closes', async () => {
   await untilEnded(server.services, id);
   const watching = await events(id);
   await watching.closed;
-  expect(watching.events).toEqual([{ type: 'ended', state: 'routed', failure: null }]);
+  expect(watching.events).toEqual([{ type: 'ended', state: 'routed' }]);
 });
 
 test('who goes away is forgotten; whose sign-in ends is shown no more', async () => {
@@ -191,7 +191,6 @@ test('a run that the solver gives up fails in words, without a second attempt', 
   expect(watching.events[watching.events.length - 1]).toEqual({
     type: 'ended',
     state: 'failed',
-    failure: run.failure,
   });
   const { error } = (await api.get(`/api/runs/${id}/summary`).expect(409)).body;
   expect(error.message).toContain('has no results');

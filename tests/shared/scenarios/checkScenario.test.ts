@@ -238,13 +238,20 @@ describe('proposals', () => {
       [3, 20_000],
     ] as const) {
       const reach = plainSections(count, spacing);
-      const { cellSize } = proposals(reach);
       const length = spacing * (count - 1);
-      expect(cellSize).toBeLessThanOrEqual(spacing);
-      expect(length / cellSize).toBeLessThanOrEqual(50_000);
-      expect([1, 2, 2.5, 5]).toContain(
-        Number((cellSize / 10 ** Math.floor(Math.log10(cellSize) + 1e-9)).toFixed(6)),
-      );
+      // In a study in feet they are round in feet: 1 ft is 0.3048 m.
+      for (const [system, unit] of [
+        ['metric', 1],
+        ['usCustomary', 0.3048],
+      ] as const) {
+        const { cellSize } = proposals(reach, undefined, system);
+        const shown = cellSize / unit;
+        expect(cellSize).toBeLessThanOrEqual(spacing);
+        expect(length / cellSize).toBeLessThanOrEqual(50_000);
+        expect([1, 2, 2.5, 5]).toContain(
+          Number((shown / 10 ** Math.floor(Math.log10(shown) + 1e-9)).toFixed(6)),
+        );
+      }
     }
   });
   test('the run lasts until the flood has passed the outlet', () => {
