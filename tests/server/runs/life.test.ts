@@ -89,7 +89,6 @@ test('a queued run is cancelled at once, tried again, and then routed', async ()
   expect(watching.events[watching.events.length - 1]).toEqual({
     type: 'ended',
     state: 'cancelled',
-    failure: null,
   });
   await api.post(`/api/runs/${id}/cancel`).expect(409);
 
