@@ -196,7 +196,7 @@ test('CSV and workbook hold the same numbers as the screen', async () => {
 
 test('what is asked off the reach or without sense is said to be so', async () => {
   const off = await api.get(`/api/runs/${run.id}/series?chainage=2100`).expect(422);
-  expect(off.body.error.message).toContain('chainage 0 m to 2000 m');
+  expect(off.body.error.message).toContain('chainage 0 m to 2,000 m');
   await api.get(`/api/runs/${run.id}/series`).expect(422);
   await api.get(`/api/runs/${run.id}/series?chainage=abc`).expect(422);
   await api.get(`/api/runs/${run.id}/surface?places=1000000`).expect(422);
