@@ -1,5 +1,5 @@
 import type { Frame } from './frame';
-import type { Box } from './placeLabel';
+import { overlap, type Box } from './placeLabel';
 
 /** A raised point and where it points to, px. */
 export interface Pinned {
@@ -23,7 +23,9 @@ export const PIN = 18;
 const STEP = 24;
 
 /** What a label keeps clear of. */
-export const pinBox = ({ x, y }: Pin): Box => ({
+export const pinBox = ({ x, y }: Pin): Box => boxAt(x, y);
+
+const boxAt = (x: number, y: number): Box => ({
   x: x - PIN / 2,
   y: y - PIN / 2,
   width: PIN,
@@ -48,13 +50,7 @@ export function pointPins(
     let y = Math.min(Math.max(footY - STEP, highest), bottom - STEP / 2);
     const isTaken = () =>
       placed.some((pin) => Math.abs(pin.x - x) < STEP && Math.abs(pin.y - y) < STEP) ||
-      names.some(
-        (box) =>
-          x + PIN / 2 > box.x &&
-          x - PIN / 2 < box.x + box.width &&
-          y + PIN / 2 > box.y &&
-          y - PIN / 2 < box.y + box.height,
-      );
+      names.some((box) => overlap(boxAt(x, y), box));
     while (isTaken() && y - STEP >= highest) y -= STEP;
     while (isTaken() && x + away >= left && x + away <= right) x += away;
     placed.push({ id, x, y, footX, footY });

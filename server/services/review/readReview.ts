@@ -1,5 +1,4 @@
 import type { ChecklistItem, Review, ReviewPoint } from '../../../shared/review/types';
-import { unpackJson } from '../../database/packedJson';
 import type { ReviewModel } from '../../models/Review';
 import type { RunModel } from '../../models/Run';
 import type { Platform } from '../../platform';
@@ -9,6 +8,7 @@ import { presentPoint, presentSignOff } from '../../presenters/reviews';
 import { buildGatherFacts, type FactsNeeds } from './checklist/gatherFacts';
 import { checklistItems } from './checklist/items';
 import type { FindReviews } from './findReviews';
+import { readSignedRecord } from './readSignedRecord';
 import type { SignedRecord } from './signedRecord';
 import { allowedNow, obstaclesOf, signerObstacles } from './standing';
 
@@ -33,11 +33,7 @@ export function buildReadReview(
 
   /** What was fixed by the signature; null before it. */
   async function signedRecord(runId: number): Promise<SignedRecord | null> {
-    const signed = await models.SignOff.scope('withRecord').findOne({
-      where: { runId },
-      attributes: ['record'],
-    });
-    return signed && unpackJson<SignedRecord>(signed.record);
+    return (await readSignedRecord(models, runId))?.record ?? null;
   }
 
   async function signOffOf({ id: runId }: RunModel): Promise<Review['signOff']> {
