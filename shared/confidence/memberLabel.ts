@@ -1,6 +1,5 @@
 import type { UnitSystem } from '../units/units';
-import { PARAMETERS, type ParameterKey } from './parameters';
-import { valueWords } from './planMembers';
+import { sideLabel } from './planMembers';
 import type { SensitivitySettings } from './schemas';
 
 /** What a member of a set is called in these units; `label` as it was stored, in SI. */
@@ -18,6 +17,3 @@ export function memberLabel(
   const { key, low, high } = parameter;
   return sideLabel(key, position % 2 === 1 ? low : high, system);
 }
-
-const sideLabel = (key: ParameterKey, value: number, system: UnitSystem): string =>
-  `${PARAMETERS[key].label} ${valueWords(key, value, system)}`;

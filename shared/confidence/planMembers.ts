@@ -52,7 +52,7 @@ function planSensitivity({ cellSize, parameters }: SensitivitySettings): Planned
       (['low', 'high'] as const).map((side): PlannedMember => {
         const value = side === 'low' ? low : high;
         return {
-          label: `${PARAMETERS[key].label} ${valueWords(key, value, 'metric')}`,
+          label: sideLabel(key, value, 'metric'),
           payload: {
             role: { kind: 'side', parameter: key, side, value },
             variation: { ...cells, [key]: value },
@@ -98,3 +98,7 @@ export function valueWords(key: ParameterKey, value: number, system: UnitSystem)
   const percent = Number((100 * (value - 1)).toFixed(1));
   return `${sign(percent)}${Math.abs(percent)} %`;
 }
+
+/** One side of a varied input: `Manning's n +20 %`. */
+export const sideLabel = (key: ParameterKey, value: number, system: UnitSystem): string =>
+  `${PARAMETERS[key].label} ${valueWords(key, value, system)}`;

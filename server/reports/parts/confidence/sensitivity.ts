@@ -1,6 +1,6 @@
 import { PARAMETERS } from '../../../../shared/confidence/parameters';
 import { changeWords, VALUE_NAMES, valueText } from '../../../../shared/confidence/placeValueWords';
-import { valueWords } from '../../../../shared/confidence/planMembers';
+import { sideLabel, valueWords } from '../../../../shared/confidence/planMembers';
 import type { PlaceValues, SensitivityResult } from '../../../../shared/confidence/types';
 import type { UnitSystem } from '../../../../shared/units/units';
 import { tornado, tornadoHeight } from '../../charts/tornado';
@@ -41,7 +41,7 @@ export function sensitivityPart(sheet: Sheet, result: SensitivityResult, system:
       ...rows.flatMap(({ parameter, low, high }) =>
         [low, high].map((side) => [
           name,
-          `${PARAMETERS[parameter].label} ${valueWords(parameter, side.value, system)}`,
+          sideLabel(parameter, side.value, system),
           ...QUANTITIES.map((one) => {
             const [here, there] = [side.stations?.[k][one] ?? null, base[k][one]];
             return here === null || there === null
